@@ -5,14 +5,7 @@ export const ROLES = ['owner', 'bookkeeper', 'mechanic', 'partner', 'accountant'
 export type Role = (typeof ROLES)[number];
 
 /** Ways a rebuild leaves the shop other than by sale; each closes it on its exit date. */
-export const OTHER_EXITS = [
-  'parted out',
-  'scrapped',
-  'own use',
-  'resold as it stood',
-  'swapped',
-  'stolen',
-] as const;
+export const OTHER_EXITS = ['parted out', 'scrapped', 'own use', 'resold as it stood', 'swapped', 'stolen'] as const;
 export type OtherExit = (typeof OTHER_EXITS)[number];
 export type ExitKind = 'sold' | OtherExit;
 
@@ -53,15 +46,7 @@ export const DEFAULT_DAMAGES = [
 ] as const;
 
 /** Vehicle classes, as a shop starts out with them. A shop edits its own list. */
-export const DEFAULT_CLASSES = [
-  'small car',
-  'midsize car',
-  'large car',
-  'sports',
-  'SUV',
-  'pickup',
-  'van',
-] as const;
+export const DEFAULT_CLASSES = ['small car', 'midsize car', 'large car', 'sports', 'SUV', 'pickup', 'van'] as const;
 
 /**
  * Cost categories, as a shop starts out with them. The purchase is a field of the rebuild, never an entry,

@@ -4,6 +4,7 @@ import { defineConfig } from 'vitest/config';
 
 export default defineConfig({
   plugins: [react(), tailwindcss()],
+  publicDir: 'src/public',
   build: {
     manifest: true,
     target: 'baseline-widely-available',

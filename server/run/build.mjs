@@ -5,7 +5,7 @@ import { join } from 'node:path';
 import { run } from './child.mjs';
 import { root, say, stop } from './place.mjs';
 
-const sources = ['src', 'shared', 'public', 'index.html', 'vite.config.ts', 'package-lock.json'];
+const sources = ['src', 'shared', 'index.html', 'vite.config.ts', 'package-lock.json'];
 const stamp = join(root, 'dist/.built-from');
 
 /** Builds if needed; quick and silent when nothing changed. */

@@ -1,0 +1,26 @@
+/** A page to photograph. `path` is below the shop's address unless it starts with a slash. */
+export interface PageToShoot {
+  readonly name: string;
+  readonly path: string;
+  /** Go on to the address of the first link that matches this selector; without such a link the page is left out. */
+  readonly follow?: string;
+  readonly isSignedOut?: true;
+}
+
+/** Every page of the product, in the order of the contact sheets. A new page adds its line. */
+export const PAGES: readonly PageToShoot[] = [
+  { name: 'sign-in', path: '/sign-in', isSignedOut: true },
+  { name: 'sign-up', path: '/sign-up', isSignedOut: true },
+  { name: 'year', path: 'year' },
+  { name: 'what-pays', path: 'what-pays' },
+  { name: 'overruns', path: 'overruns' },
+  { name: 'time-to-sell', path: 'time-to-sell' },
+  { name: 'contingency', path: 'contingency' },
+  { name: 'rebuilds', path: 'rebuilds' },
+  { name: 'one-rebuild', path: 'rebuilds', follow: 'main a[href*="/rebuilds/"]' },
+  { name: 'ledger', path: 'ledger' },
+  { name: 'hours', path: 'hours' },
+  { name: 'import', path: 'import' },
+  { name: 'people', path: 'people' },
+  { name: 'shop', path: 'shop' },
+];

@@ -1,0 +1,56 @@
+// npm run shots [-- page …]: photographs every page into .shots/, the demo's and an empty shop's, on contact sheets too.
+import { mkdirSync, rmSync } from 'node:fs';
+import { fileURLToPath } from 'node:url';
+import { type Browser, chromium } from 'playwright-core';
+import { browser as launchOptions } from '../e2e/support/browser.ts';
+import { startServer } from '../e2e/support/server.ts';
+import { contactSheet } from './contact-sheet.ts';
+import { PAGES } from './pages.ts';
+import { shoot } from './shoot.ts';
+import { demoOwner, emptyShop, type Visitor } from './visitors.ts';
+
+const SETS: readonly { name: string; demo: boolean; visitor: Visitor }[] = [
+  { name: 'demo', demo: true, visitor: demoOwner },
+  { name: 'empty', demo: false, visitor: emptyShop },
+];
+const WIDTHS = [1280, 768, 390];
+const SCHEMES = ['light', 'dark'] as const;
+
+const shots = fileURLToPath(new URL('../../.shots/', import.meta.url));
+const wanted = process.argv.slice(2);
+const pages = PAGES.filter(({ name }) => wanted.length === 0 || wanted.includes(name));
+const names = pages.map(({ name }) => name);
+const complaints = new Set<string>();
+
+const browser = await chromium.launch(launchOptions());
+try {
+  for (const set of SETS) await shootSet(browser, set);
+} finally {
+  await browser.close();
+}
+for (const complaint of complaints) process.stdout.write(`! ${complaint}\n`);
+process.stdout.write(`Pictures and contact sheets lie in .shots/; ${complaints.size} complaints.\n`);
+
+async function shootSet(camera: Browser, set: (typeof SETS)[number]): Promise<void> {
+  const server = await startServer({ demo: set.demo });
+  try {
+    const entrance = await camera.newContext({ baseURL: server.origin });
+    const shopId = await set.visitor(entrance, server);
+    const state = await entrance.storageState();
+    await entrance.close();
+    for (const scheme of SCHEMES) {
+      for (const width of WIDTHS) {
+        const title = `${set.name}-${scheme}-${width}`;
+        const folder = `${shots}${title}/`;
+        rmSync(folder, { recursive: true, force: true });
+        mkdirSync(folder, { recursive: true });
+        const onComplaint = (text: string) => complaints.add(`${title} ${text}`);
+        await shoot(camera, { origin: server.origin, shopId, state, width, scheme, folder, onComplaint }, pages);
+        await contactSheet(camera, folder, names, `${shots}${title}.png`);
+        process.stdout.write(`${title}\n`);
+      }
+    }
+  } finally {
+    await server.stop();
+  }
+}

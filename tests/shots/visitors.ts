@@ -1,0 +1,35 @@
+import type { APIRequestContext, BrowserContext } from 'playwright-core';
+import { sessionApi, sessionSchema } from '#shared/contracts/session.ts';
+import type { RunningServer } from '../e2e/support/server.ts';
+
+/** Signs somebody in within a browser context; resolves to the id of the shop that they stand in. */
+export type Visitor = (context: BrowserContext, server: RunningServer) => Promise<string>;
+
+/** The owner of the demo shop, with the sign-in that the server prints when it starts. */
+export const demoOwner: Visitor = async (context, server) => {
+  const printed = /\bowner\b[^\n]*?(\S+@\S+)\s+(\S+)/i.exec(server.output());
+  if (!printed) throw new Error(`The server printed no sign-in of the demo's owner:\n${server.output()}`);
+  await post(context.request, sessionApi.signIn.path, { email: printed[1], password: printed[2] });
+  return shopOf(context.request);
+};
+
+/** Somebody who has just signed up: a shop without a single row. */
+export const emptyShop: Visitor = async (context) => {
+  await post(context.request, sessionApi.signUp.path, {
+    name: 'Robin Ames',
+    email: 'robin@example.test',
+    password: 'a long enough phrase 27',
+    shopName: 'Ames & Daughter',
+  });
+  return shopOf(context.request);
+};
+
+async function post(request: APIRequestContext, path: string, data: object): Promise<void> {
+  const reply = await request.post(path, { data });
+  if (!reply.ok()) throw new Error(`POST ${path} answered ${reply.status()}: ${await reply.text()}`);
+}
+
+async function shopOf(request: APIRequestContext): Promise<string> {
+  const reply = await request.get(sessionApi.get.path);
+  return sessionSchema.parse(await reply.json()).shop.id;
+}

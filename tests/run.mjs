@@ -65,7 +65,7 @@ async function vitest() {
 
 async function playwright() {
   const report = join(reports, 'playwright.json');
-  const env = { CHROMIUM: await findChromium(), PLAYWRIGHT_JSON_OUTPUT_FILE: report };
+  const env = { CHROMIUM: await findChromium(), REPORT_FILE: report };
   const code = await run(
     process.execPath,
     ['node_modules/@playwright/test/cli.js', 'test', '-c', 'tests/e2e/playwright.config.ts'],

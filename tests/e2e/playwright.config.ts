@@ -1,7 +1,9 @@
 import { defineConfig } from '@playwright/test';
 import { browser } from './support/browser.ts';
 
-/** Run by `npm test` after the build; it hands over the browser in CHROMIUM. */
+const report = process.env['REPORT_FILE'];
+
+/** Run by `npm test` after the build; it hands over the browser in CHROMIUM and wants a REPORT_FILE. */
 export default defineConfig({
   testDir: '.',
   testMatch: '**/*.spec.ts',
@@ -10,7 +12,7 @@ export default defineConfig({
   workers: 2,
   timeout: 60_000,
   expect: { timeout: 10_000 },
-  reporter: [['dot'], ['json']],
+  reporter: report ? [['list'], ['json', { outputFile: report }]] : 'list',
   use: {
     launchOptions: browser(),
     locale: 'en-US',

@@ -1,0 +1,82 @@
+import { ceilProduct, compareFractions } from './exact.ts';
+import type { RebuildFacts } from './facts.ts';
+import { type PlannedOutcome, planned, plannedOutcomes } from './sets.ts';
+
+/** A level as a fraction p/q, 0 < p < q, never by way of a percentage: 2/3 is not 67 %. */
+export interface Level {
+  readonly p: number;
+  readonly q: number;
+}
+
+/** The levels shown: half, two thirds, four fifths, nine tenths. */
+export const LEVELS: readonly Level[] = [
+  { p: 1, q: 2 },
+  { p: 2, q: 3 },
+  { p: 4, q: 5 },
+  { p: 9, q: 10 },
+];
+
+/** B − E over E, kept as its two whole numbers so that a reserve comes out to the cent. `estimateCents` > 0. */
+export type Overran = Pick<PlannedOutcome, 'overrunCents' | 'estimateCents'>;
+
+export interface Contingency {
+  readonly n: number;
+  readonly level: Level;
+  /** Which of the sorted overruns is taken. */
+  readonly k: number;
+  /** k/(n + 1): the chance that the next rebuild stays within. null = too few yet. */
+  readonly guarantee: number | null;
+  /** The overrun taken. null = too few yet: k is above n, whatever the values are. */
+  readonly taken: Overran | null;
+  /** `taken` as a fraction of the estimate; may be negative. null = too few yet. */
+  readonly uplift: number | null;
+}
+
+/** k = ceil((n + 1)·p/q), in whole numbers. Example: n 35 at 4/5 gives 29. */
+export function rankAt(n: number, { p, q }: Level): number {
+  return ceilProduct(n + 1, p, q);
+}
+
+/** Order of two overruns by their fraction, exactly. */
+export function byOverrun(a: Overran, b: Overran): number {
+  return compareFractions(a.overrunCents, a.estimateCents, b.overrunCents, b.estimateCents);
+}
+
+/**
+ * Cushion that past rebuilds ask for (definitions §10, §18.3): of n sorted overruns o = (B − E)/E the k-th, k =
+ * ceil((n + 1)·p/q), uninterpolated and free of any curve; the next like rebuild stays within it with probability
+ * k/(n + 1) ≥ p/q (order statistics; exact unless values tie). k > n: null, never the maximum in its place.
+ * Example: nine overruns at 4/5 take the eighth.
+ */
+export function contingency(set: readonly Overran[], level: Level): Contingency {
+  const n = set.length;
+  const k = rankAt(n, level);
+  const taken = k > n ? null : (set.toSorted(byOverrun)[k - 1] ?? null);
+  return {
+    n,
+    level,
+    k,
+    guarantee: taken && k / (n + 1),
+    taken,
+    uplift: taken && taken.overrunCents / taken.estimateCents,
+  };
+}
+
+/** `contingency` over the shop's completed rebuilds with an estimate (set K), at each of the levels. */
+export function contingencies(facts: readonly RebuildFacts[], levels: readonly Level[]): Contingency[] {
+  const outcomes = plannedOutcomes(planned(facts));
+  return levels.map((level) => contingency(outcomes, level));
+}
+
+/**
+ * Cents to put on top of an estimate: ceil(u·e), exactly; 0 if the overrun taken is not above 0 (a plan is never cut).
+ * Example: 505,822 over on 213,016 asks 505,822 of an estimate of 213,016.
+ */
+export function reserve(taken: Overran, estimate: number): number {
+  return taken.overrunCents <= 0 ? 0 : ceilProduct(taken.overrunCents, estimate, taken.estimateCents);
+}
+
+/** Cents of a flat rule of `percent` whole percent on an estimate, raised to the next cent. */
+export function flatReserve(percent: number, estimate: number): number {
+  return ceilProduct(percent, estimate, 100);
+}

@@ -1,0 +1,74 @@
+import { byOverrun, flatReserve, reserve } from './contingency.ts';
+import { RankTree } from './rank-tree.ts';
+import type { PlannedOutcome } from './sets.ts';
+import { creepPercent, residualCents, twoPartReserve } from './two-part-rule.ts';
+
+/** What a rule asked for, at the time. `uplift` is the overrun taken, unrounded; a two-part rule has none. */
+export interface Asked {
+  readonly reserveCents: number;
+  readonly uplift: number | null;
+}
+
+/**
+ * A rule as it stood when the first `historySize` outcomes were known, k being its rank there. Calls must come with
+ * a history that never shrinks: each outcome is then taken in once.
+ */
+export type HistoryRule = (historySize: number, k: number, estimateCents: number) => Asked;
+
+/** The percent rule (§10) over growing histories of `outcomes`, which are in the order they became known. */
+export function percentOverTime(outcomes: readonly PlannedOutcome[]): HistoryRule {
+  const sorted = outcomes.map((outcome, index) => ({ outcome, index })).sort((a, b) => byOverrun(a.outcome, b.outcome));
+  const rankOf = new Int32Array(outcomes.length);
+  for (const [rank, { index }] of sorted.entries()) rankOf[index] = rank;
+  const seen = growing(rankOf);
+  return (historySize, k, estimateCents) => {
+    const taken = sorted[seen(historySize, k)]?.outcome;
+    if (taken === undefined) throw new RangeError('rank beyond the history');
+    return { reserveCents: reserve(taken, estimateCents), uplift: taken.overrunCents / taken.estimateCents };
+  };
+}
+
+/** The two-part rule (§11b) over growing histories. The creep is a whole percent and moves little: one tree for each. */
+export function twoPartOverTime(outcomes: readonly PlannedOutcome[]): HistoryRule {
+  const creepSums = prefixSums(outcomes.map((outcome) => outcome.overrunCents - outcome.surpriseCents));
+  const estimateSums = prefixSums(outcomes.map((outcome) => outcome.estimateCents));
+  const byCreep = new Map<number, (historySize: number, k: number) => number>();
+  return (historySize, k, estimateCents) => {
+    const creep = creepPercent(creepSums[historySize] ?? 0, estimateSums[historySize] ?? 0);
+    const known = byCreep.get(creep);
+    const kth = known ?? residualsOverTime(outcomes, creep);
+    if (!known) byCreep.set(creep, kth);
+    const flatCents = Math.max(0, kth(historySize, k));
+    return { reserveCents: twoPartReserve(creep, flatCents, estimateCents), uplift: null };
+  };
+}
+
+/** A flat percentage, whatever was known. */
+export function flatOverTime(percent: number): HistoryRule {
+  return (_historySize, _k, estimateCents) => ({ reserveCents: flatReserve(percent, estimateCents), uplift: null });
+}
+
+function residualsOverTime(outcomes: readonly PlannedOutcome[], creep: number): (size: number, k: number) => number {
+  const residuals = Float64Array.from(outcomes, (outcome) => residualCents(outcome, creep));
+  const order = Int32Array.from(residuals.keys()).sort((a, b) => (residuals[a] ?? 0) - (residuals[b] ?? 0));
+  const rankOf = new Int32Array(residuals.length);
+  for (const [rank, index] of order.entries()) rankOf[index] = rank;
+  const seen = growing(rankOf);
+  return (size, k) => residuals[order[seen(size, k)] ?? 0] ?? 0;
+}
+
+/** Rank of the k-th smallest among the first `size` items, `size` never shrinking. */
+function growing(rankOf: Int32Array): (size: number, k: number) => number {
+  const tree = new RankTree(rankOf.length);
+  let taken = 0;
+  return (size, k) => {
+    for (; taken < size; taken += 1) tree.add(rankOf[taken] ?? 0);
+    return tree.kth(k);
+  };
+}
+
+function prefixSums(values: readonly number[]): number[] {
+  const sums = [0];
+  for (const value of values) sums.push((sums[sums.length - 1] ?? 0) + value);
+  return sums;
+}

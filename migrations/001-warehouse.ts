@@ -11,8 +11,7 @@ export async function up(db: Knex): Promise<void> {
 
 const ROLE = `('owner', 'bookkeeper', 'mechanic', 'partner', 'accountant')`;
 const EXIT = `('parted out', 'scrapped', 'own use', 'resold as it stood', 'swapped', 'stolen')`;
-const cents = (column: string) =>
-  `${column} INTEGER CHECK (${column} BETWEEN -1000000000000 AND 1000000000000)`;
+const cents = (column: string) => `${column} INTEGER CHECK (${column} BETWEEN -1000000000000 AND 1000000000000)`;
 
 const SHOPS_AND_PEOPLE = [
   `CREATE TABLE shops (
@@ -118,7 +117,8 @@ const BOOKS = [
   `CREATE TABLE entries (
     id TEXT NOT NULL, shop_id TEXT NOT NULL REFERENCES shops (id), rebuild_id TEXT, category_id TEXT NOT NULL,
     ${dayCheck('dated_on')}, cents INTEGER NOT NULL CHECK (cents BETWEEN -1000000000000 AND 1000000000000),
-    vendor TEXT, what TEXT, foreseen TEXT CHECK (foreseen IN ('foreseen', 'surprise', 'chosen extra')),
+    vendor TEXT, what TEXT, foreseen TEXT CHECK (foreseen IN ('foreseen', 'surprise')),
+    is_extra INTEGER NOT NULL DEFAULT 0 CHECK (is_extra IN (0, 1)),
     free_value_cents INTEGER CHECK (free_value_cents BETWEEN 0 AND 1000000000000), receipt TEXT, split_id TEXT,
     is_guess INTEGER NOT NULL DEFAULT 0, ${SOURCE},
     voided_at TEXT, voided_by TEXT REFERENCES users (id), void_reason TEXT,

@@ -28,8 +28,11 @@ export const REBUILD_DATES = [
 ] as const;
 export type RebuildDate = (typeof REBUILD_DATES)[number][0];
 
-/** How a cost came about. `null` beside these means that nobody said. */
-export const FORESEEN = ['foreseen', 'surprise', 'chosen extra'] as const;
+/**
+ * Was a cost foreseen when the estimate was locked? `null` beside these means that nobody said. A chosen extra
+ * (scope added by choice) is marked apart, since it is neither an overrun nor a surprise.
+ */
+export const FORESEEN = ['foreseen', 'surprise'] as const;
 export type Foreseen = (typeof FORESEEN)[number];
 
 /** Damage, as a shop starts out with it. A shop edits its own list. */

@@ -1,0 +1,29 @@
+import type { AccessTable } from './platform/http.ts';
+
+const OWNER = ['owner'] as const;
+const BOOKS = ['owner', 'bookkeeper'] as const;
+const READS_BOOKS = ['owner', 'bookkeeper', 'accountant'] as const;
+const SHOP = ['owner', 'bookkeeper', 'mechanic', 'partner', 'accountant'] as const;
+
+/**
+ * Who may call what: the one table that routes, the API document and the tests are made from. A route that does
+ * not stand here stops the start; so does a line without a route. The rule is to refuse.
+ */
+export const access: AccessTable = {
+  'GET /api/health': 'everyone',
+  'GET /api/openapi.json': 'everyone',
+
+  'GET /api/session': 'everyone',
+  'POST /api/session': 'everyone',
+  'DELETE /api/session': 'everyone',
+  'POST /api/sign-up': 'everyone',
+  'PUT /api/session/shop': 'signed in',
+
+  'GET /api/shop': READS_BOOKS,
+  'PATCH /api/shop': OWNER,
+  'GET /api/shop/lists': SHOP,
+  'POST /api/shop/lists/:kind': OWNER,
+  'PATCH /api/shop/lists/:kind/:itemId': OWNER,
+  'POST /api/shop/workers': BOOKS,
+  'PATCH /api/shop/workers/:workerId': BOOKS,
+};

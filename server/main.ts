@@ -1,0 +1,45 @@
+import { createServer } from 'node:http';
+import { createApp } from './app.ts';
+import { readConfig } from './platform/config.ts';
+import { openServices } from './services.ts';
+
+const config = readConfig(process.env);
+const services = await openServices(config);
+const { database, sessions, logger } = services;
+
+const server = createServer(
+  { headersTimeout: 10_000, requestTimeout: 300_000, connectionsCheckingInterval: 5000 },
+  createApp(services),
+);
+server.listen(config.port, config.host, () => {
+  const address = server.address();
+  const port = typeof address === 'object' && address ? address.port : config.port;
+  process.stdout.write(`Panelgap is open at http://${config.host}:${port}\n`);
+});
+server.on('error', (error) => {
+  logger.fatal({ err: error }, `cannot listen on ${config.host}:${config.port}`);
+  process.exit(1);
+});
+
+const sweep = setInterval(() => {
+  sessions.sweep().catch((error: unknown) => logger.error({ err: error }, 'sweeping old sessions failed'));
+}, 3_600_000);
+
+/** Stops taking requests, finishes those under way, and closes the books; ten seconds at most. */
+function stop(): void {
+  clearInterval(sweep);
+  setTimeout(() => process.exit(1), 10_000).unref();
+  server.close(() => {
+    database.close().then(
+      () => process.exit(0),
+      () => process.exit(1),
+    );
+  });
+  server.closeIdleConnections();
+}
+process.once('SIGTERM', stop);
+process.once('SIGINT', stop);
+process.on('unhandledRejection', (error) => {
+  logger.fatal({ err: error }, 'unhandled rejection');
+  process.exit(1);
+});

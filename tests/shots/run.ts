@@ -6,7 +6,7 @@ import { browser as launchOptions } from '../e2e/support/browser.ts';
 import { startServer } from '../e2e/support/server.ts';
 import { contactSheet } from './contact-sheet.ts';
 import { PAGES } from './pages.ts';
-import { shoot } from './shoot.ts';
+import { SCHEMES, type Scheme, shoot } from './shoot.ts';
 import { demoOwner, emptyShop, type Visitor } from './visitors.ts';
 
 const SETS: readonly { name: string; demo: boolean; visitor: Visitor }[] = [
@@ -14,7 +14,6 @@ const SETS: readonly { name: string; demo: boolean; visitor: Visitor }[] = [
   { name: 'empty', demo: false, visitor: emptyShop },
 ];
 const WIDTHS = [1280, 768, 390];
-const SCHEMES = ['light', 'dark'] as const;
 
 const shots = fileURLToPath(new URL('../../.shots/', import.meta.url));
 const wanted = process.argv.slice(2);
@@ -38,17 +37,18 @@ async function shootSet(camera: Browser, set: (typeof SETS)[number]): Promise<vo
     const shopId = await set.visitor(entrance, server);
     const state = await entrance.storageState();
     await entrance.close();
-    for (const scheme of SCHEMES) {
-      for (const width of WIDTHS) {
-        const title = `${set.name}-${scheme}-${width}`;
-        const folder = `${shots}${title}/`;
-        rmSync(folder, { recursive: true, force: true });
-        mkdirSync(folder, { recursive: true });
-        const onComplaint = (text: string) => complaints.add(`${title} ${text}`);
-        await shoot(camera, { origin: server.origin, shopId, state, width, scheme, folder, onComplaint }, pages);
-        await contactSheet(camera, folder, names, `${shots}${title}.png`);
-        process.stdout.write(`${title}\n`);
+    for (const width of WIDTHS) {
+      const folder = (scheme: Scheme) => `${shots}${set.name}-${width}-${scheme}/`;
+      for (const scheme of SCHEMES) {
+        rmSync(folder(scheme), { recursive: true, force: true });
+        mkdirSync(folder(scheme), { recursive: true });
       }
+      const onComplaint = (text: string) => complaints.add(`${set.name} ${width} ${text}`);
+      await shoot(camera, { origin: server.origin, shopId, state, width, folder, onComplaint }, pages);
+      for (const scheme of SCHEMES) {
+        await contactSheet(camera, folder(scheme), names, `${shots}${set.name}-${width}-${scheme}.png`);
+      }
+      process.stdout.write(`${set.name} ${width}\n`);
     }
   } finally {
     await server.stop();

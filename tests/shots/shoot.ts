@@ -1,20 +1,22 @@
 import type { Browser, BrowserContext, Page } from 'playwright-core';
 import type { PageToShoot } from './pages.ts';
 
+export const SCHEMES = ['light', 'dark'] as const;
+export type Scheme = (typeof SCHEMES)[number];
+
 export interface Setting {
   readonly origin: string;
   readonly shopId: string;
   /** Cookies of the person who is signed in. */
   readonly state: Awaited<ReturnType<BrowserContext['storageState']>>;
   readonly width: number;
-  readonly scheme: 'light' | 'dark';
-  /** Where the pictures go; ends with a slash. */
-  readonly folder: string;
+  /** Where the pictures of a scheme go; ends with a slash. */
+  readonly folder: (scheme: Scheme) => string;
   /** Gets every error and warning of the browser's console. */
   readonly onComplaint: (text: string) => void;
 }
 
-/** Photographs pages in full, one file each. */
+/** Photographs pages in full, one file for each and each scheme. */
 export async function shoot(browser: Browser, setting: Setting, pages: readonly PageToShoot[]): Promise<void> {
   for (const isSignedOut of [true, false]) {
     const chosen = pages.filter((page) => (page.isSignedOut ?? false) === isSignedOut);
@@ -22,7 +24,6 @@ export async function shoot(browser: Browser, setting: Setting, pages: readonly 
     const context = await browser.newContext({
       baseURL: setting.origin,
       viewport: { width: setting.width, height: setting.width < 600 ? 844 : 900 },
-      colorScheme: setting.scheme,
       reducedMotion: 'reduce',
       locale: 'en-US',
       ...(isSignedOut ? {} : { storageState: setting.state }),
@@ -45,7 +46,10 @@ async function shootPage(tab: Page, setting: Setting, page: PageToShoot): Promis
     () => document.documentElement.scrollWidth - document.documentElement.clientWidth,
   );
   if (overflow > 0) setting.onComplaint(`${page.name}: ${overflow} px wider than the window of ${setting.width}`);
-  await tab.screenshot({ path: `${setting.folder}${page.name}.png`, fullPage: true });
+  for (const scheme of SCHEMES) {
+    await tab.emulateMedia({ colorScheme: scheme });
+    await tab.screenshot({ path: `${setting.folder(scheme)}${page.name}.png`, fullPage: true });
+  }
 }
 
 async function settle(tab: Page, path: string): Promise<void> {

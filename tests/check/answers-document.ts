@@ -9,7 +9,7 @@ import { completed, planned, plannedAndTold } from '../../server/domain/sets.ts'
 import { twoPartRules } from '../../server/domain/two-part-rule.ts';
 import { overrunByCell, returnByCell, whatPays } from '../../server/domain/what-pays.ts';
 import { type Overhead, shopYears, type TiedUp } from '../../server/domain/years.ts';
-import { OTHER_EXITS } from '../../shared/vocabulary.ts';
+import { OTHER_EXITS } from '#shared/vocabulary.ts';
 import {
   backTestEntry,
   contingencyEntry,

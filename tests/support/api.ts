@@ -10,7 +10,7 @@ import { readConfig } from '../../server/platform/config.ts';
 import { migrate } from '../../server/platform/database.ts';
 import type { Services } from '../../server/platform/http.ts';
 import { openServices } from '../../server/services.ts';
-import type { Role } from '../../shared/vocabulary.ts';
+import type { Role } from '#shared/vocabulary.ts';
 
 export const PASSWORD = 'seven bent fenders in a row';
 /** The moment at which tests run. */

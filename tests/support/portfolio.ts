@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import type { Line, RebuildFrame } from '../../server/domain/facts-from-lines.ts';
-import { isDay } from '../../shared/day.ts';
-import { OTHER_EXITS } from '../../shared/vocabulary.ts';
+import { isDay } from '#shared/day.ts';
+import { OTHER_EXITS } from '#shared/vocabulary.ts';
 
 /** A reference portfolio (definitions §18, format 1 or 2) in the words of the domain. */
 export interface Portfolio {

@@ -19,6 +19,14 @@ export const access: AccessTable = {
   'POST /api/sign-up': 'everyone',
   'PUT /api/session/shop': 'signed in',
 
+  'GET /api/people': OWNER,
+  'PATCH /api/people/:userId': OWNER,
+  'DELETE /api/people/:userId': OWNER,
+  'POST /api/people/invitations': OWNER,
+  'DELETE /api/people/invitations/:invitationId': OWNER,
+  'POST /api/join/look': 'everyone',
+  'POST /api/join': 'everyone',
+
   'GET /api/shop': READS_BOOKS,
   'PATCH /api/shop': OWNER,
   'GET /api/shop/lists': SHOP,

@@ -3,6 +3,7 @@ import express, { type Express } from 'express';
 import helmet from 'helmet';
 import { access } from './access.ts';
 import { healthRoutes } from './features/health/routes.ts';
+import { peopleRoutes } from './features/people/routes.ts';
 import { sessionRoutes } from './features/session/routes.ts';
 import { shopRoutes } from './features/shop/routes.ts';
 import { clientFiles } from './platform/client-files.ts';
@@ -13,7 +14,12 @@ import { noSuchRoute, problemHandler } from './platform/problems.ts';
 import { sameOriginWrites } from './platform/same-origin.ts';
 
 /** Every route of the product. */
-const routes: Route[] = [...healthRoutes(() => openApiDocument(routes, access)), ...sessionRoutes, ...shopRoutes];
+const routes: Route[] = [
+  ...healthRoutes(() => openApiDocument(routes, access)),
+  ...sessionRoutes,
+  ...peopleRoutes,
+  ...shopRoutes,
+];
 
 /** The whole application, ready to listen; tests use this same function. */
 export function createApp(services: Services): Express {

@@ -1,0 +1,32 @@
+import { useState } from 'react';
+import { Link } from 'react-router-dom';
+import { useSwitchShop } from '../lib/session.ts';
+import { Button } from '../ui/button.tsx';
+import { Dialog, DialogActions } from '../ui/dialog.tsx';
+import { ErrorState } from '../ui/states.tsx';
+
+/** Another tab moved the session to another shop; nothing was saved here. Offers to come back or to follow. */
+export function OtherShop({ shop, onDone }: { shop: { id: string; name: string }; onDone: () => void }) {
+  const switchShop = useSwitchShop();
+  const [problem, setProblem] = useState<unknown>(null);
+  const onBack = () => switchShop(shop.id).then(onDone, setProblem);
+  return (
+    <Dialog
+      open
+      stay
+      onClose={onDone}
+      title="You are in another shop now"
+      note={`This page belongs to ${shop.name}, but another tab went to a different shop. Nothing was saved.`}
+    >
+      {problem !== null && <ErrorState error={problem} />}
+      <DialogActions>
+        <Button kind="main" onClick={onBack}>
+          Go back to {shop.name}
+        </Button>
+        <Link to="/" reloadDocument className="button">
+          Open the other shop
+        </Link>
+      </DialogActions>
+    </Dialog>
+  );
+}

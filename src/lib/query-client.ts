@@ -1,0 +1,15 @@
+import { QueryClient } from '@tanstack/react-query';
+import { ApiProblem } from './api-problem.ts';
+
+/** Only what may pass by itself is tried again: no reply at all, or a server that is away. Never a refusal. */
+export function mayRetry(failures: number, error: unknown): boolean {
+  const passing = error instanceof ApiProblem && (error.status === 0 || error.status >= 500);
+  return passing && failures < 2;
+}
+
+/** The cache of server data. Answers stay fresh for half a minute; every save invalidates what it changed. */
+export function createQueryClient(): QueryClient {
+  return new QueryClient({
+    defaultOptions: { queries: { retry: mayRetry, staleTime: 30_000 }, mutations: { retry: false } },
+  });
+}

@@ -1,0 +1,34 @@
+import { Dialog as Base } from '@base-ui/react/dialog';
+import type { ReactNode } from 'react';
+
+type Props = {
+  open: boolean;
+  onClose: () => void;
+  title: string;
+  /** One sentence under the title. */
+  note?: ReactNode;
+  children: ReactNode;
+  /** Keeps it open on Escape and outside presses. */
+  stay?: boolean;
+};
+
+/** A dialog over the page. `open`, `onClose`, `title`, `note`, `stay`. Put the buttons in a `DialogActions` at its end. */
+export function Dialog({ open, onClose, title, note, children, stay = false }: Props) {
+  return (
+    <Base.Root open={open} onOpenChange={(next) => !next && onClose()} disablePointerDismissal={stay}>
+      <Base.Portal>
+        <Base.Backdrop className="backdrop" />
+        <Base.Popup className="dialog">
+          <Base.Title className="text-lead font-bold">{title}</Base.Title>
+          {note && <Base.Description className="mt-1 text-soft">{note}</Base.Description>}
+          <div className="mt-4 grid gap-4">{children}</div>
+        </Base.Popup>
+      </Base.Portal>
+    </Base.Root>
+  );
+}
+
+/** The row of buttons at the end of a dialog or form: the main one first. */
+export function DialogActions({ children }: { children: ReactNode }) {
+  return <div className="mt-2 flex flex-wrap gap-3">{children}</div>;
+}

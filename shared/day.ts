@@ -15,13 +15,12 @@ export function isDay(text: string): boolean {
   return year >= 1950 && year <= 2100 && dayFromParts(year, Number(match[2]), Number(match[3])) === text;
 }
 
-/** Day of a year, month (1–12) and day of month; null if there is no such day. */
+/** Day of a year (up to 9999), month (1–12) and day of month; null if there is no such day. */
 export function dayFromParts(year: number, month: number, dayOfMonth: number): Day | null {
   const ms = Date.UTC(year, month - 1, dayOfMonth);
   const date = new Date(ms);
-  const exists =
-    date.getUTCFullYear() === year && date.getUTCMonth() === month - 1 && date.getUTCDate() === dayOfMonth;
-  return exists ? date.toISOString().slice(0, 10) : null;
+  const exists = date.getUTCFullYear() === year && date.getUTCMonth() === month - 1 && date.getUTCDate() === dayOfMonth;
+  return exists && year <= 9999 ? date.toISOString().slice(0, 10) : null;
 }
 
 /** Whole days since 1970-01-01. The day must be valid. */

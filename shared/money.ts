@@ -24,9 +24,9 @@ export function divideRounded(numerator: bigint, denominator: bigint): bigint {
 export function splitCents(total: Cents, weights: readonly number[]): Cents[] {
   if (weights.length === 0) throw new RangeError('nothing to split over');
   if (total < 0) return splitCents(-total, weights).map((part) => (part === 0 ? 0 : -part));
-  const sum = weights.reduce((a, b) => a + b, 0);
-  const shares = sum === 0 ? weights.map(() => 1n) : weights.map(BigInt);
-  const whole = sum === 0 ? BigInt(weights.length) : BigInt(sum);
+  const isWeighted = weights.some((weight) => weight !== 0);
+  const shares = weights.map((weight) => (isWeighted ? BigInt(weight) : 1n));
+  const whole = shares.reduce((a, b) => a + b, 0n);
   const parts = shares.map((w) => (BigInt(total) * w) / whole);
   const order = shares
     .map((w, index) => ({ index, remainder: (BigInt(total) * w) % whole }))
@@ -38,11 +38,16 @@ export function splitCents(total: Cents, weights: readonly number[]): Cents[] {
 
 /**
  * Reads money as people type it, into cents: `1,250` `1250.5` `$1 250.50` `(45.00)` `45-` `-3`.
- * `decimal` is the shop's decimal mark; the other mark, spaces and apostrophes group thousands.
+ * `decimal` is the shop's decimal mark; the other mark, a space or an apostrophe groups thousands (`12 50` is not 1,250).
  * null = not readable, or finer than a cent.
  */
 export function parseCents(text: string, decimal: '.' | ',' = '.'): Cents | null {
-  let rest = text.normalize('NFKC').replace(/[\s\u2019']/g, '').replace(/[\u2212\u2013]/g, '-');
+  const group = decimal === '.' ? ',' : '.';
+  let rest = text
+    .normalize('NFKC')
+    .replace(/(?<=\d)[\s\u2019'](?=\d)/g, group)
+    .replace(/\s/g, '')
+    .replace(/[\u2212\u2013]/g, '-');
   let negative = false;
   const bracketed = /^\((.*)\)$/.exec(rest);
   if (bracketed) {
@@ -56,7 +61,6 @@ export function parseCents(text: string, decimal: '.' | ',' = '.'): Cents | null
     rest = rest.replace(/^-|-$/, '').replace(/^[$€£]/, '');
   }
   rest = rest.replace(/^\+/, '');
-  const group = decimal === '.' ? ',' : '.';
   const mark = decimal === '.' ? '\\.' : ',';
   const grouped = new RegExp(`^(\\d+|\\d{1,3}(?:\\${group}\\d{3})+)?(?:${mark}(\\d{0,2}))?$`).exec(rest);
   if (!grouped || (grouped[1] === undefined && !grouped[2])) return null;

@@ -7,7 +7,9 @@ export type Role = (typeof ROLES)[number];
 /** Ways a rebuild leaves the shop other than by sale; each closes it on its exit date. */
 export const OTHER_EXITS = ['parted out', 'scrapped', 'own use', 'resold as it stood', 'swapped', 'stolen'] as const;
 export type OtherExit = (typeof OTHER_EXITS)[number];
-export type ExitKind = 'sold' | OtherExit;
+/** Every way out of the shop. */
+export const EXITS = ['sold', ...OTHER_EXITS] as const;
+export type ExitKind = (typeof EXITS)[number];
 
 /** Where a rebuild stands, read from its dates. */
 export const STAGES = ['bought', 'in the shop', 'ready', 'listed', 'sold', ...OTHER_EXITS] as const;
@@ -34,6 +36,10 @@ export type RebuildDate = (typeof REBUILD_DATES)[number][0];
  */
 export const FORESEEN = ['foreseen', 'surprise'] as const;
 export type Foreseen = (typeof FORESEEN)[number];
+
+/** Contingency levels as fractions: 4/5 = holds four times in five. Never by way of a percentage. */
+export const LEVELS = ['1/2', '2/3', '4/5', '9/10'] as const;
+export type LevelName = (typeof LEVELS)[number];
 
 /** Damage, as a shop starts out with it. A shop edits its own list. */
 export const DEFAULT_DAMAGES = [

@@ -1,0 +1,69 @@
+import { z } from 'zod';
+import { idSchema } from '../fields.ts';
+import { cents, count, figure, headSchema, rateSchema, rebuildRefSchema } from './answers-parts.ts';
+
+/** One rebuild against its plan. `over` in cents (of hours: seconds), `rate` = over ÷ plan. */
+const dotSchema = rebuildRefSchema.omit({ name: true }).extend({ over: z.int(), rate: z.number() });
+/** `from` ≤ rate < `to`; the ends are open (null). */
+const binSchema = z.object({ from: figure, to: figure, count });
+
+/** Actual ÷ plan − 1 over the rebuilds that planned for it: pooled = Σ over Σ; quantiles are of the single rates. */
+const spread = {
+  n: count,
+  pooled: figure,
+  median: figure,
+  mean: figure,
+  q10: figure,
+  q25: figure,
+  q75: figure,
+  q90: figure,
+  isThin: z.boolean(),
+};
+const planned = { ...spread, estimateCents: cents, actualCents: cents };
+
+/** Every rebuild a dot, or bins when the answer's `marks` says so (the other list is empty then). */
+const marks = { dots: z.array(dotSchema), bins: z.array(binSchema) };
+
+/** The cents over plan, parted: a surprise, or known work costing more. Only rebuilds where each entry says which. */
+const partsSchema = z.object({
+  n: count,
+  overCents: cents,
+  surpriseCents: cents,
+  knownCents: cents,
+  /** surprise ÷ over, 0–1. null = nothing over. */
+  surpriseShare: figure,
+});
+
+const categorySchema = z.object({
+  categoryId: idSchema,
+  name: z.string(),
+  ...planned,
+  ...marks,
+  parts: partsSchema,
+  /** Spent without having been planned: never in a ratio. */
+  unbudgetedCount: count,
+  unbudgetedCents: cents,
+});
+
+export const overrunsAnswerSchema = headSchema.extend({
+  /** `binned` above 300 dots in all. */
+  marks: z.enum(['each', 'binned']),
+  total: z.object({ ...planned, ...marks, parts: partsSchema }),
+  /** By name; those that nobody planned have n 0. */
+  categories: z.array(categorySchema),
+  /** Planned hours against own + paid; both must be known. */
+  hours: z.object({ ...spread, plannedSeconds: count, actualSeconds: count, ...marks }),
+  surprises: rateSchema.extend({
+    unknownCount: count,
+    unforeseenCents: cents,
+    /** All paid on the same rebuilds: what `shareOfWork` divides by. */
+    workCents: cents,
+    shareOfWork: figure,
+    categories: z.array(rateSchema.extend({ categoryId: idSchema, name: z.string(), unforeseenCents: cents })),
+  }),
+  /** Seen before buying, not seen, not said. */
+  seen: z.array(z.object({ seen: z.boolean().nullable(), ...planned, surprises: rateSchema })),
+  /** By the shop year in which they left. */
+  years: z.array(z.object({ year: z.int(), ...planned })),
+});
+export type OverrunsAnswer = z.output<typeof overrunsAnswerSchema>;

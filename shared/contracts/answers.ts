@@ -1,0 +1,46 @@
+import type { FeatureApi } from '../contract.ts';
+import { contingencyAnswerSchema, contingencyQuerySchema } from './answers-contingency.ts';
+import { overrunsAnswerSchema } from './answers-overruns.ts';
+import { filterQuerySchema, yearQuerySchema } from './answers-parts.ts';
+import { timeToSellAnswerSchema } from './answers-time-to-sell.ts';
+import { whatPaysAnswerSchema } from './answers-what-pays.ts';
+import { yearAnswerSchema } from './answers-year.ts';
+
+/** The five answers, each with all its figures, how many rebuilds they rest on, and what is left out and why. */
+export const answersApi = {
+  year: {
+    method: 'GET',
+    path: '/api/answers/year',
+    summary: 'Did the work pay this year?',
+    query: yearQuerySchema,
+    response: yearAnswerSchema,
+  },
+  whatPays: {
+    method: 'GET',
+    path: '/api/answers/what-pays',
+    summary: 'Which wrecks pay?',
+    query: filterQuerySchema,
+    response: whatPaysAnswerSchema,
+  },
+  overruns: {
+    method: 'GET',
+    path: '/api/answers/overruns',
+    summary: 'Where does the money run over?',
+    query: filterQuerySchema,
+    response: overrunsAnswerSchema,
+  },
+  timeToSell: {
+    method: 'GET',
+    path: '/api/answers/time-to-sell',
+    summary: 'How long until the money is back?',
+    query: filterQuerySchema,
+    response: timeToSellAnswerSchema,
+  },
+  contingency: {
+    method: 'GET',
+    path: '/api/answers/contingency',
+    summary: "How much cushion should next year's budgets carry?",
+    query: contingencyQuerySchema,
+    response: contingencyAnswerSchema,
+  },
+} as const satisfies FeatureApi;

@@ -120,7 +120,7 @@ export const choiceSchema = z.object({
 export type Choice = z.infer<typeof choiceSchema>;
 
 export const lineSchema = z.object({
-  kind: z.enum(['entry', 'purchase', 'sale', 'estimate', 'hours', 'estimated hours']),
+  kind: z.enum(['entry', 'purchase', 'sale', 'asking', 'expected sale', 'estimate', 'hours', 'estimated hours']),
   /** Place in `rebuilds`; null = overhead. */
   rebuild: z.int().nullable(),
   category: z.string().nullable(),
@@ -130,6 +130,7 @@ export const lineSchema = z.object({
   vendor: z.string().nullable(),
   what: z.string().nullable(),
   foreseen: z.enum(FORESEEN).nullable(),
+  isExtra: z.boolean(),
   person: z.string().nullable(),
   isGuess: z.boolean(),
   row: z.int(),

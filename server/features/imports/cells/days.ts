@@ -1,0 +1,66 @@
+import { type Day, dayFromParts, isDay } from '#shared/day.ts';
+
+export type DateOrder = 'MDY' | 'DMY';
+
+const MONTHS = [
+  'jan januar january ene enero janv janvier', 'feb februar february febr febrero fev fevrier', 'mar marz march mrz marzo mars',
+  'apr april abr abril avr avril', 'may mai mayo', 'jun june juni junio juin', 'jul july juli julio juillet',
+  'aug august ago agosto aout', 'sep sept september septiembre septembre', 'oct okt october oktober octubre octobre',
+  'nov november noviembre novembre', 'dec dez december dezember dic diciembre decembre',
+];
+const MONTH_OF = new Map(MONTHS.flatMap((names, index) => names.split(' ').map((name) => [name, index + 1] as const)));
+
+const ISO = /^(\d{4})[-/.](\d{1,2})[-/.](\d{1,2})(?:[T ].*)?$/;
+const NUMERIC = /^(\d{1,2})([-/.])(\d{1,2})\2(\d{4}|\d{2})(?:,? \d{1,2}:\d{2}.*)?$/;
+const DAY_FIRST = /^(\d{1,2})(?:st|nd|rd|th)?[-. /]*([\p{L}]{3,})[-., /]*(\d{4}|\d{2})$/u;
+const MONTH_FIRST = /^([\p{L}]{3,})[-. /]*(\d{1,2})(?:st|nd|rd|th)?[-, /]+(\d{4}|\d{2})$/u;
+
+const plain = (text: string) => text.normalize('NFKD').replace(/\p{M}+/gu, '').toLowerCase().trim();
+
+/** `17` → 2017, `95` → 1995: the latest year with these last digits that is not after next year. */
+export function fullYear(digits: string, thisYear: number): number {
+  if (digits.length === 4) return Number(digits);
+  const year = Math.floor(thisYear / 100) * 100 + Number(digits);
+  return year > thisYear + 1 ? year - 100 : year;
+}
+
+/** Reads a day as typed. `order` settles what numbers alone cannot. 'bad' = no day that exists, 1950 to 2100. */
+export function dayReader(order: DateOrder, today: Day): (text: string) => Day | 'bad' | 'blank' {
+  const thisYear = Number(today.slice(0, 4));
+  const made = (year: string, month: number | undefined, day: string): Day | 'bad' => {
+    const found = month === undefined ? null : dayFromParts(fullYear(year, thisYear), month, Number(day));
+    return found !== null && isDay(found) ? found : 'bad';
+  };
+  return (text) => {
+    const trimmed = text.trim();
+    if (trimmed === '') return 'blank';
+    const iso = ISO.exec(trimmed);
+    if (iso) return made(iso[1] ?? '', Number(iso[2]), iso[3] ?? '');
+    const numeric = NUMERIC.exec(trimmed);
+    if (numeric) {
+      const [, first = '', mark, second = '', year = ''] = numeric;
+      const isDayFirst = mark === '.' || order === 'DMY';
+      return isDayFirst ? made(year, Number(second), first) : made(year, Number(first), second);
+    }
+    const words = plain(trimmed);
+    const dayFirst = DAY_FIRST.exec(words);
+    if (dayFirst) return made(dayFirst[3] ?? '', MONTH_OF.get(dayFirst[2] ?? ''), dayFirst[1] ?? '');
+    const monthFirst = MONTH_FIRST.exec(words);
+    return monthFirst ? made(monthFirst[3] ?? '', MONTH_OF.get(monthFirst[1] ?? ''), monthFirst[2] ?? '') : 'bad';
+  };
+}
+
+/** Does a cell look like a day, whether or not that day exists? */
+export function looksLikeDay(text: string): boolean {
+  const trimmed = text.trim();
+  if (ISO.test(trimmed) || NUMERIC.test(trimmed)) return true;
+  const words = plain(trimmed);
+  const month = DAY_FIRST.exec(words)?.[2] ?? MONTH_FIRST.exec(words)?.[1];
+  return month !== undefined && MONTH_OF.has(month);
+}
+
+/** The two numbers of `3/12/2018` that may be month and day; null where the text itself settles them. */
+export function unsettledParts(text: string): [first: number, second: number] | null {
+  const match = NUMERIC.exec(text.trim());
+  return match && match[2] !== '.' ? [Number(match[1]), Number(match[3])] : null;
+}

@@ -1,0 +1,88 @@
+import { parseCents } from '#shared/money.ts';
+
+export type DecimalMark = '.' | ',';
+
+/** Money of a cell in cents; or nothing stands there, or it cannot be read, or it is only roughly so much. */
+export type Money = number | 'blank' | 'bad' | 'rough';
+
+const NOTHING = new Set(['-', '–', '—', 'n/a', 'na', 'free', 'none', 'gratis', 'umsonst', 'kostenlos', 'nil']);
+const ROUGH = /^(~|ca\.?|about|approx\.?)|(ish|\?|k)$|\d\s*[x×*]\s*\d/i;
+const SIGN = /[$€£¥]|\b(?:USD|EUR|GBP|CAD|AUD|NZD|CHF|SEK|NOK|DKK|PLN|CZK|MXN|Kč|kr|zł)\b\.?/gi;
+
+/** Reads money as typed, with this decimal mark. `isCostCell`: `-`, `n/a`, `free` mean that nothing was spent. */
+export function moneyReader(decimal: DecimalMark): (text: string, isCostCell?: boolean) => Money {
+  return (text, isCostCell = false) => {
+    const plain = decimal === '.' ? plainCents(text) : -1;
+    if (plain >= 0) return plain;
+    const trimmed = text.trim();
+    if (trimmed === '') return 'blank';
+    if (NOTHING.has(trimmed.toLowerCase())) return isCostCell ? 'blank' : 'bad';
+    const cents = parseCents(trimmed.replace(SIGN, '').replace(/^\+|[.,]-+$/, ''), decimal);
+    if (cents !== null) return cents;
+    return /\d/.test(trimmed) && ROUGH.test(trimmed) ? 'rough' : 'bad';
+  };
+}
+
+/** `1234`, `1,234.5`, `$1,234.56` without a regular expression: most cells of a long file. −1 = another form. */
+function plainCents(text: string): number {
+  const end = text.length;
+  let at = text.charCodeAt(0) === 36 ? 1 : 0;
+  const start = at;
+  if (end === at || end > 15) return -1;
+  let value = 0;
+  let sinceComma = -1;
+  for (; at < end; at++) {
+    const code = text.charCodeAt(at);
+    if (code >= 48 && code <= 57) {
+      value = value * 10 + code - 48;
+      if (sinceComma >= 0) sinceComma++;
+    } else if (code === 44) {
+      if (at === start || (sinceComma < 0 ? at - start > 3 : sinceComma !== 3)) return -1;
+      sinceComma = 0;
+    } else break;
+  }
+  if (at === start || (sinceComma >= 0 && sinceComma !== 3)) return -1;
+  if (at === end) return value * 100;
+  if (text.charCodeAt(at) !== 46) return -1;
+  const tenth = text.charCodeAt(at + 1) - 48;
+  const hundredth = end - at === 3 ? text.charCodeAt(at + 2) - 48 : 0;
+  if (end - at > 3 || end - at < 2 || !(tenth >= 0 && tenth <= 9 && hundredth >= 0 && hundredth <= 9)) return -1;
+  return value * 100 + tenth * 10 + hundredth;
+}
+
+/** Does a cell look like money or a plain number, whatever its decimal mark? */
+export function looksLikeMoney(text: string): boolean {
+  const bare = text.trim().replace(SIGN, '').replace(/[\s'’()+\-−–]/g, '');
+  return bare !== '' && /^\d[\d.,]*$/.test(bare);
+}
+
+/** Which decimal mark a cell speaks for: 1 = point, −1 = comma, 0 = either. */
+export function decimalVote(text: string): -1 | 0 | 1 {
+  const last = /([.,])(\d+)\D*$/.exec(text);
+  if (!last) return 0;
+  const [, mark, digits = ''] = last;
+  const other = mark === '.' ? ',' : '.';
+  const speaks = digits.length !== 3 || text.includes(other);
+  const isGrouping = digits.length === 3 && text.split(mark as string).length > 2;
+  if (isGrouping) return mark === '.' ? -1 : 1;
+  if (!speaks) return 0;
+  return mark === '.' ? 1 : -1;
+}
+
+const CODES: readonly (readonly [RegExp, readonly string[]])[] = [
+  [/€|\bEUR\b/, ['EUR']],
+  [/£|\bGBP\b/, ['GBP']],
+  [/\bCHF\b/, ['CHF']],
+  [/zł|\bPLN\b/, ['PLN']],
+  [/Kč|\bCZK\b/, ['CZK']],
+  [/\bkr\b|\bSEK\b|\bNOK\b|\bDKK\b/, ['SEK', 'NOK', 'DKK']],
+  [/\bCAD\b|C\$/, ['CAD']],
+  [/\bAUD\b|A\$/, ['AUD']],
+  [/\bUSD\b|US\$/, ['USD']],
+  [/\$/, ['USD', 'CAD', 'AUD', 'NZD', 'MXN']],
+];
+
+/** The currencies that a sign or code in the text may stand for; null = it names none. */
+export function currenciesIn(text: string): readonly string[] | null {
+  return CODES.find(([sign]) => sign.test(text))?.[1] ?? null;
+}

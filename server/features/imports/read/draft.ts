@@ -1,0 +1,35 @@
+import type { RebuildFound } from '#shared/contracts/imports.ts';
+import type { ExistingRebuild } from '../books.ts';
+
+/** A rebuild while rows are being read. `place` is its place in the list of those that rows came in for; −1 = none yet. */
+export interface Draft {
+  readonly found: RebuildFound;
+  readonly existing: ExistingRebuild | null;
+  place: number;
+}
+
+/** A rebuild of which nothing is known yet but its name. */
+export function newDraft(tag: string, existing: ExistingRebuild | null, row: number, known: Partial<RebuildFound> = {}): Draft {
+  return {
+    place: -1,
+    existing,
+    found: {
+      tag: existing?.tag ?? tag, existingId: existing?.id ?? null, year: null, make: null, model: null, trim: null, vin: null,
+      className: null, damageName: null, secondDamageName: null, titleBrand: null, odometer: null, isSeen: null,
+      boughtFrom: null, notes: null, purchaseCents: null, askingCents: null, saleCents: null, expectedSaleCents: null,
+      dates: {}, spellings: [], row, ...known,
+    },
+  };
+}
+
+/** Gives out tags that neither the shop nor this file has yet: `13 F-150`, then `13 F-150 (2)`. */
+export function tagMaker(taken: Iterable<string>): (wanted: string) => string {
+  const used = new Set([...taken].map((tag) => tag.toLowerCase()));
+  return (wanted) => {
+    const base = wanted.trim().slice(0, 34).trim() || 'no name';
+    let tag = base;
+    for (let number = 2; used.has(tag.toLowerCase()); number++) tag = `${base} (${number})`;
+    used.add(tag.toLowerCase());
+    return tag;
+  };
+}

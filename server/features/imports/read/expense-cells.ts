@@ -1,0 +1,95 @@
+import type { AsideReason } from '#shared/contracts/imports.ts';
+import type { Day } from '#shared/day.ts';
+import { remembered } from '../cells/fold.ts';
+import type { VehicleTarget } from '../understand/vehicle-drafts.ts';
+import { placeOf, vehicleText } from '../understand/vehicle-columns.ts';
+import { type CategoryMeaning, PURCHASE, SALE } from '../words/categories.ts';
+import type { Plan } from './plan.ts';
+
+/** Money of a cell: cents, nothing, or why it cannot be taken. */
+export type CellMoney = number | 'blank' | AsideReason;
+
+/** An expense as its cells say it, before anything is decided. */
+export interface ExpenseCells {
+  readonly name: string;
+  readonly dateCell: string;
+  readonly on: Day | 'bad' | 'blank';
+  readonly paid: CellMoney;
+  readonly back: CellMoney;
+  readonly target: VehicleTarget | undefined;
+  readonly meaning: CategoryMeaning | undefined;
+  readonly what: string | null;
+  readonly vendor: string | null;
+}
+
+export interface Fault {
+  readonly reason: AsideReason;
+  readonly col: number | null;
+}
+
+/** Column numbers of a list of expenses; 0 = there is no such column. */
+export function expenseColumns(plan: Plan) {
+  const col = (meaning: Parameters<typeof placeOf>[1]) => placeOf(plan.columns, meaning) + 1;
+  return {
+    date: col('date'), category: col('category'), what: col('what'), vendor: col('vendor'), foreseen: col('foreseen'),
+    amount: col('amount'), credit: col('credit'), name: col('vehicle') || col('stock number') || col('model'),
+  };
+}
+export type ExpenseColumns = ReturnType<typeof expenseColumns>;
+
+/** Reads the money of a cell; nothing there is `blank`. */
+export function cellMoney(plan: Plan, cell: string): CellMoney {
+  const value = plan.money(cell);
+  if (typeof value === 'number') return plan.isForeign(cell) ? 'currency' : value;
+  return value === 'blank' ? 'blank' : value === 'rough' ? 'ambiguous-amount' : 'bad-amount';
+}
+
+const kept = (cell: string) => cell.trim().normalize('NFC') || null;
+
+/** Reads the cells of one row, each on its own. */
+export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: readonly string[]) => ExpenseCells {
+  const nameOf = vehicleText(plan.columns);
+  const dayOf = plan.days.get(cols.date) ?? (() => 'blank' as const);
+  const textOf = remembered(kept);
+  return (cells) => {
+    const cell = (col: number) => (col > 0 ? (cells[col - 1] ?? '') : '');
+    const name = nameOf(cells);
+    const dateCell = cell(cols.date).trim();
+    return {
+      name,
+      dateCell,
+      on: dayOf(dateCell),
+      paid: cellMoney(plan, cell(cols.amount)),
+      back: cellMoney(plan, cell(cols.credit)),
+      target: plan.vehicles.get(name),
+      meaning: plan.categories.get(cell(cols.category).trim()) ?? plan.categories.get(''),
+      what: textOf(cell(cols.what)),
+      vendor: textOf(cell(cols.vendor)),
+    };
+  };
+}
+
+const LONGEST = { what: 500, vendor: 200 };
+
+/** Why a row cannot come in, the first reason that stands; null = it can. */
+export function expenseFault(row: ExpenseCells, cols: ExpenseColumns, isRepeat: boolean): Fault | null {
+  const { target, on, paid, back } = row;
+  if (isRepeat) return { reason: 'duplicate', col: typeof paid === 'number' ? cols.amount : cols.name };
+  if (row.name === '') return { reason: 'missing-vehicle', col: cols.name };
+  if (target === undefined || target === 'ambiguous' || target === 'aside') return { reason: 'ambiguous-vehicle', col: cols.name };
+  if (on === 'bad' || (on === 'blank' && target === 'overhead')) return { reason: 'bad-date', col: cols.date };
+  if (typeof paid === 'string' && paid !== 'blank') return { reason: paid, col: cols.amount };
+  if (typeof back === 'string' && back !== 'blank') return { reason: back, col: cols.credit };
+  if (paid === 'blank' && back === 'blank') return { reason: 'missing-amount', col: cols.amount || cols.credit };
+  if ((row.what?.length ?? 0) > LONGEST.what) return { reason: 'cell-too-long', col: cols.what };
+  if ((row.vendor?.length ?? 0) > LONGEST.vendor) return { reason: 'cell-too-long', col: cols.vendor };
+  return factFault(row, cols);
+}
+
+/** A purchase or sale needs a rebuild, and one of which the books do not hold it already. */
+function factFault({ target, meaning }: ExpenseCells, cols: ExpenseColumns): Fault | null {
+  if (meaning?.category !== PURCHASE && meaning?.category !== SALE) return null;
+  if (typeof target !== 'object') return { reason: 'missing-vehicle', col: cols.name };
+  const isHeld = meaning.category === PURCHASE ? target.existing?.hasPurchase : target.existing?.hasLeft;
+  return isHeld ? { reason: 'duplicate', col: cols.amount || cols.credit } : null;
+}

@@ -1,0 +1,63 @@
+import { remembered } from '../cells/fold.ts';
+import { PURCHASE, SALE } from '../words/categories.ts';
+import { foreseenOf } from '../words/kinds.ts';
+import { type ExpenseCells, expenseCellReader, expenseColumns, expenseFault } from './expense-cells.ts';
+import { type DraftLine, notData, type Plan, putAside, type RowRead, type RowReader, taken } from './plan.ts';
+import { filled, totalLabel } from './row-kinds.ts';
+import type { ColumnSums } from './sums.ts';
+
+/** Reads rows of a list with one expense each. Credits and refunds become negative, sales facts of their rebuild. */
+export function expenseRowReader(plan: Plan, sums: ColumnSums): RowReader {
+  const cols = expenseColumns(plan);
+  const read = expenseCellReader(plan, cols);
+  const said = remembered(foreseenOf);
+  return (cells, line) => {
+    const row = read(cells);
+    const beside = rowBeside(cells, row);
+    if (beside?.reason === 'total') sums.compare(cells, line, totalLabel(cells) ?? '');
+    if (beside) return beside;
+    const fault = expenseFault(row, cols, plan.repeats.has(line));
+    if (typeof row.paid === 'number') sums.add(cols.amount, row.paid, fault === null);
+    if (typeof row.back === 'number') sums.add(cols.credit, row.back, fault === null);
+    if (fault) return putAside(fault.reason, fault.col, readableCents(row));
+    const came = said(cols.foreseen > 0 ? (cells[cols.foreseen - 1] ?? '').trim() : '');
+    const lines: DraftLine[] = [];
+    if (typeof row.paid === 'number') lines.push(lineOf(row, row.paid, { line, col: cols.amount, ...came }));
+    if (typeof row.back === 'number') lines.push(lineOf(row, -row.back, { line, col: cols.credit, ...came }));
+    return taken(lines);
+  };
+}
+
+function lineOf(row: ExpenseCells, cents: number, from: Pick<DraftLine, 'col' | 'foreseen' | 'isExtra'> & { line: number }): DraftLine {
+  const category = row.meaning?.category ?? '';
+  const kind = category === PURCHASE ? 'purchase' : category === SALE ? 'sale' : 'entry';
+  return {
+    kind,
+    draft: typeof row.target === 'object' ? row.target : null,
+    category: kind === 'entry' ? category : null,
+    on: row.on === 'blank' || row.on === 'bad' ? null : row.on,
+    // A sale stands positive in one column or in the other; in the books it is what came in.
+    cents: kind === 'sale' ? Math.abs(cents) : cents,
+    seconds: 0,
+    vendor: row.vendor,
+    what: row.what,
+    foreseen: from.foreseen,
+    isExtra: from.isExtra,
+    person: null,
+    isGuess: !(row.meaning?.isSure ?? false),
+    row: from.line,
+    col: from.col,
+  };
+}
+
+function readableCents({ paid, back }: ExpenseCells): number | null {
+  if (typeof paid !== 'number' && typeof back !== 'number') return null;
+  return (typeof paid === 'number' ? paid : 0) - (typeof back === 'number' ? back : 0);
+}
+
+/** Rows of the list that are no expense: totals, notes. null = an expense, or meant to be one. */
+function rowBeside(cells: readonly string[], { name, dateCell, paid, back }: ExpenseCells): RowRead | null {
+  if (dateCell !== '' && name !== '') return null;
+  if (totalLabel(cells) !== undefined) return notData('total');
+  return paid === 'blank' && back === 'blank' && filled(cells) === 1 ? notData('note') : null;
+}

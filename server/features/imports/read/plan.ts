@@ -1,0 +1,62 @@
+import type { AsideReason, Choice, Column, Line, NotData, Outcome, Shape } from '#shared/contracts/imports.ts';
+import type { Day } from '#shared/day.ts';
+import type { ShopBooks } from '../books.ts';
+import type { DecimalMark, Money } from '../cells/money.ts';
+import type { VehicleTarget } from '../understand/vehicle-drafts.ts';
+import type { CategoryMeaning } from '../words/categories.ts';
+import type { TextFormat } from '../text/rows.ts';
+import type { Draft } from './draft.ts';
+
+/** Everything settled about a file before its rows are read. */
+export interface Plan {
+  readonly format: TextFormat;
+  readonly decimal: DecimalMark;
+  readonly shape: Shape;
+  readonly columns: readonly Column[];
+  readonly heading: { readonly line: number; readonly cells: readonly string[] };
+  readonly choices: readonly Choice[];
+  readonly books: ShopBooks;
+  readonly money: (text: string, isCostCell?: boolean) => Money;
+  /** Reader of each date column, by column number. */
+  readonly days: ReadonlyMap<number, (text: string) => Day | 'bad' | 'blank'>;
+  readonly vehicles: ReadonlyMap<string, VehicleTarget>;
+  readonly categories: ReadonlyMap<string, CategoryMeaning>;
+  /** Lines that repeat a block pasted twice, to be put aside. */
+  readonly repeats: ReadonlySet<number>;
+  /** A cell that names another currency than the shop's. */
+  readonly isForeign: (text: string) => boolean;
+}
+
+/** A cell put aside while the rest of its row came in. */
+export interface CellAside {
+  readonly col: number;
+  readonly reason: AsideReason;
+  readonly text: string;
+  readonly cents: number | null;
+}
+
+/** One line of a row, with its rebuild still as a draft; null = overhead. */
+export type DraftLine = Omit<Line, 'rebuild'> & { readonly draft: Draft | null };
+
+/** How one row of the file ended. */
+export interface RowRead {
+  readonly outcome: Outcome;
+  readonly reason: AsideReason | NotData | null;
+  /** The cell that put the row aside; null = none in particular. */
+  readonly col: number | null;
+  /** Readable money on a row put aside. */
+  readonly cents: number | null;
+  readonly lines: readonly DraftLine[];
+  readonly cells: readonly CellAside[];
+}
+
+export const notData = (reason: NotData): RowRead => ({ outcome: 'not data', reason, col: null, cents: null, lines: [], cells: [] });
+export const putAside = (reason: AsideReason, col: number | null, cents: number | null): RowRead => ({
+  outcome: 'put aside', reason, col, cents, lines: [], cells: [],
+});
+export const taken = (lines: readonly DraftLine[], cells: readonly CellAside[] = []): RowRead => ({
+  outcome: 'taken', reason: null, col: null, cents: null, lines, cells,
+});
+
+/** Reads one row of the table; `sums` hears what each money column holds. */
+export type RowReader = (cells: readonly string[], line: number) => RowRead;

@@ -1,0 +1,134 @@
+import type { Aside, Control, NotData, RebuildFound, StatedTotal } from '#shared/contracts/imports.ts';
+import { readHours } from '../cells/hours.ts';
+import type { ByteSource } from '../text/bytes.ts';
+import { forEachRow } from '../text/rows.ts';
+import { PURCHASE } from '../words/categories.ts';
+import type { Draft } from './draft.ts';
+import { expenseRowReader } from './expense-row.ts';
+import { hoursRowReader } from './hours-row.ts';
+import type { DraftLine, Plan, RowRead, RowReader } from './plan.ts';
+import { rowOutsideTable } from './row-kinds.ts';
+import { type ColumnSums, columnSums, type SummedColumn } from './sums.ts';
+import { vehicleRowReader } from './vehicle-row.ts';
+
+/** What hears of each row as it is read: the preview, or the commit. */
+export interface Sink {
+  row(cells: readonly string[], line: number, read: RowRead): void;
+}
+
+/** What reading all rows came to. */
+export interface RowsRead {
+  readonly drafts: readonly Draft[];
+  readonly control: Control;
+  readonly notData: Record<NotData, number>;
+  readonly statedTotals: readonly StatedTotal[];
+}
+
+/** Reads every row of a file by its plan. Rebuilds are complete only when all rows are through. */
+export function readRows(source: ByteSource, plan: Plan, sink: Sink, onPart?: (share: number) => void): RowsRead {
+  const sums = columnSums(summedColumns(plan));
+  const read = readerOf(plan, sums);
+  const outside = rowOutsideTable(plan);
+  const drafts: Draft[] = [];
+  const tally = newTally();
+  forEachRow(
+    source,
+    plan.format,
+    (cells, line, isMalformed) => {
+      const result = outside(cells, line, isMalformed) ?? read(cells, line);
+      if (result.outcome === 'taken') for (const made of result.lines) book(made, line, drafts, tally.control);
+      tally.count(result);
+      sink.row(cells, line, result);
+    },
+    onPart,
+  );
+  tally.control.rebuilds = drafts.length;
+  return { drafts, control: tally.control, notData: tally.notData, statedTotals: sums.stated };
+}
+
+function readerOf(plan: Plan, sums: ColumnSums): RowReader {
+  if (plan.shape === 'vehicles') return vehicleRowReader(plan, sums);
+  return plan.shape === 'hours' ? hoursRowReader(plan, sums) : expenseRowReader(plan, sums);
+}
+
+function summedColumns(plan: Plan): SummedColumn[] {
+  const money = (text: string) => {
+    const value = plan.money(text, true);
+    return typeof value === 'number' ? value : null;
+  };
+  const hours = (text: string) => {
+    const value = readHours(text);
+    return typeof value === 'number' ? value : null;
+  };
+  return plan.columns.flatMap(({ col, meaning, why }): SummedColumn[] => {
+    if (meaning === 'hours' || meaning === 'estimated hours') return [{ col, measure: 'hours', read: hours }];
+    const isCompared = ['amount', 'credit', 'purchase', 'cost', 'estimate', 'sale'].includes(meaning) || (meaning === 'derived' && why.includes('sum'));
+    return isCompared ? [{ col, measure: 'money', read: money }] : [];
+  });
+}
+
+function newTally() {
+  const control: Control = {
+    rowsRead: 0, taken: 0, putAside: 0, notData: 0, blankRows: 0, rebuilds: 0, entries: 0, centsByCategory: {},
+    costCents: 0, creditCents: 0, saleCents: 0, estimateCents: 0, putAsideCents: 0, hoursSeconds: 0,
+  };
+  const notData: Record<NotData, number> = { blank: 0, title: 0, heading: 0, total: 0, note: 0 };
+  return {
+    control,
+    notData,
+    count(read: RowRead): void {
+      if (read.outcome === 'not data') notData[read.reason as NotData]++;
+      if (read.reason === 'blank') {
+        control.blankRows++;
+        return;
+      }
+      control.rowsRead++;
+      if (read.outcome === 'taken') control.taken++;
+      else if (read.outcome === 'put aside') control.putAside++;
+      else control.notData++;
+      control.putAsideCents += read.cents ?? 0;
+    },
+  };
+}
+
+/** Adds a line to its rebuild and to the control totals. */
+function book(line: DraftLine, row: number, drafts: Draft[], control: Control): void {
+  const { draft, cents } = line;
+  if (draft && draft.place < 0) {
+    draft.place = drafts.push(draft) - 1;
+    if (draft.found.row === 0) draft.found.row = row;
+  }
+  if (line.kind === 'entry' || line.kind === 'purchase') {
+    const key = line.kind === 'purchase' ? PURCHASE : (line.category ?? '');
+    control.centsByCategory[key] = (control.centsByCategory[key] ?? 0) + cents;
+    control.costCents += cents;
+    if (cents < 0) control.creditCents += cents;
+    if (line.kind === 'entry') control.entries++;
+  } else if (line.kind === 'sale') control.saleCents += cents;
+  else if (line.kind === 'estimate') control.estimateCents += cents;
+  else if (line.kind === 'hours') control.hoursSeconds += line.seconds;
+  if (draft && line.kind !== 'entry' && line.kind !== 'estimate') addFact(draft.found, line);
+}
+
+/** Purchase, sale and prices are facts of the rebuild, summed when several rows make them up. */
+function addFact(found: RebuildFound, line: DraftLine): void {
+  const sum = (before: number | null) => (before ?? 0) + line.cents;
+  if (line.kind === 'purchase') {
+    found.purchaseCents = sum(found.purchaseCents);
+    found.boughtFrom ??= line.vendor === null || line.vendor.length > 120 ? null : line.vendor;
+    if (line.on !== null && (found.dates.boughtOn === undefined || line.on < found.dates.boughtOn)) found.dates.boughtOn = line.on;
+  } else if (line.kind === 'sale') {
+    found.saleCents = sum(found.saleCents);
+    if (line.on !== null && (found.dates.soldOn === undefined || line.on > found.dates.soldOn)) found.dates.soldOn = line.on;
+  } else if (line.kind === 'asking') found.askingCents = line.cents;
+  else if (line.kind === 'expected sale') found.expectedSaleCents = line.cents;
+}
+
+/** The entries of the list of rows and cells put aside that one row makes. */
+export function asidesOf(cells: readonly string[], line: number, read: RowRead): Aside[] {
+  const asides: Aside[] = read.cells.map((cell) => ({ row: line, isCell: true, ...cell }));
+  if (read.outcome !== 'put aside') return asides;
+  const { col, reason, cents } = read;
+  const text = col === null ? cells.join(' · ') : (cells[col - 1] ?? '');
+  return [...asides, { row: line, col, isCell: false, reason: reason as Aside['reason'], text: text.slice(0, 200), cents }];
+}

@@ -1,0 +1,108 @@
+import type { AsideReason, Column, Meaning, RebuildFound } from '#shared/contracts/imports.ts';
+import { readHours } from '../cells/hours.ts';
+import { remembered } from '../cells/fold.ts';
+import { classReader, damageReader, yesOrNo } from '../words/kinds.ts';
+import type { CellAside, Plan } from './plan.ts';
+
+/** Money and hours of one cell of a vehicle's row. */
+export interface Figure {
+  readonly column: Column;
+  readonly cents: number;
+  readonly seconds: number;
+}
+
+/** What the cells of one vehicle's row say. */
+export interface VehicleCells {
+  readonly known: Partial<RebuildFound>;
+  readonly dates: Record<string, string>;
+  readonly figures: Figure[];
+  readonly asides: CellAside[];
+}
+
+type Take = (cell: string, row: VehicleCells) => AsideReason | null;
+
+const LONGEST: Partial<Record<keyof RebuildFound, number>> = { notes: 4000, boughtFrom: 120, vin: 20 };
+const FIGURES = new Set<Meaning>(['purchase', 'cost', 'estimate', 'sale', 'asking', 'expected sale']);
+const MAY_BE_CREDIT = new Set<Meaning>(['cost']);
+const TEXTS: Partial<Record<Meaning, keyof RebuildFound>> = {
+  make: 'make', model: 'model', trim: 'trim', vin: 'vin', 'title brand': 'titleBrand', 'bought from': 'boughtFrom', notes: 'notes',
+};
+
+/** Reads the cells of a vehicle's row, each by what its column holds. A cell that cannot be read is put aside alone. */
+export function vehicleCellReader(plan: Plan): (cells: readonly string[]) => VehicleCells {
+  const takers = plan.columns.map((column) => ({ column, take: takerOf(plan, column) })).filter(({ take }) => take !== null);
+  return (cells) => {
+    const row: VehicleCells = { known: {}, dates: {}, figures: [], asides: [] };
+    for (const { column, take } of takers) {
+      const cell = (cells[column.col - 1] ?? '').trim();
+      if (cell === '') continue;
+      const reason = take?.(cell, row) ?? null;
+      if (reason) row.asides.push({ col: column.col, reason, text: cell, cents: null });
+    }
+    return row;
+  };
+}
+
+function takerOf(plan: Plan, column: Column): Take | null {
+  const { meaning } = column;
+  if (FIGURES.has(meaning)) return moneyTaker(plan, column);
+  if (meaning === 'hours' || meaning === 'estimated hours') return hoursTaker(column);
+  const dayOf = plan.days.get(column.col);
+  if (dayOf) return (cell, row) => take(dayOf(cell), (day) => (row.dates[meaning] = day), 'bad-date');
+  const field = TEXTS[meaning];
+  if (field) return textTaker(field);
+  return factTaker(plan, meaning);
+}
+
+function take<T>(value: T | 'bad' | 'blank' | null, keep: (value: T) => void, reason: AsideReason): AsideReason | null {
+  if (value === 'bad' || value === null) return reason;
+  if (value !== 'blank') keep(value);
+  return null;
+}
+
+function moneyTaker(plan: Plan, column: Column): Take {
+  return (cell, row) => {
+    const cents = plan.money(cell, true);
+    if (cents === 'blank') return null;
+    if (cents === 'rough') return 'ambiguous-amount';
+    if (cents === 'bad' || (cents < 0 && !MAY_BE_CREDIT.has(column.meaning))) return 'bad-amount';
+    if (plan.isForeign(cell)) return 'currency';
+    if (cents !== 0) row.figures.push({ column, cents, seconds: 0 });
+    return null;
+  };
+}
+
+function hoursTaker(column: Column): Take {
+  return (cell, row) => take(readHours(cell), (seconds) => row.figures.push({ column, cents: 0, seconds }), 'bad-hours');
+}
+
+function textTaker(field: keyof RebuildFound): Take {
+  return (cell, row) => {
+    if (cell.length > (LONGEST[field] ?? 60)) return 'cell-too-long';
+    const before = row.known[field];
+    Object.assign(row.known, { [field]: field === 'notes' && before ? `${String(before)}\n${cell}` : cell.normalize('NFC') });
+    return null;
+  };
+}
+
+function factTaker(plan: Plan, meaning: Meaning): Take | null {
+  const fact = (field: keyof RebuildFound, read: (cell: string) => string | number | boolean | null): Take => {
+    const known = remembered(read);
+    return (cell, row) => take(known(cell), (value) => Object.assign(row.known, { [field]: value }), 'bad-value');
+  };
+  if (meaning === 'class') return fact('className', classReader(plan.books.classes));
+  if (meaning === 'damage') return fact('damageName', damageReader(plan.books.damages));
+  if (meaning === 'second damage') return fact('secondDamageName', damageReader(plan.books.damages));
+  if (meaning === 'seen') return fact('isSeen', yesOrNo);
+  if (meaning === 'year') return fact('year', (cell) => (/^(19[3-9]\d|20\d\d)$/.test(cell) ? Number(cell) : null));
+  if (meaning === 'odometer') return fact('odometer', readOdometer);
+  return null;
+}
+
+/** `103,197`, `103.197 km`, `103k` into whole miles or kilometers as written; null = neither. */
+function readOdometer(cell: string): number | null {
+  const match = /^(\d{1,3}(?:[., ’']?\d{3})*|\d{1,7})\s*(k)?\s*(?:mi|miles|km)?\.?$/i.exec(cell);
+  if (!match) return null;
+  const number = Number((match[1] ?? '').replace(/\D/g, '')) * (match[2] ? 1000 : 1);
+  return number <= 9_999_999 ? number : null;
+}

@@ -1,0 +1,90 @@
+import type { Column } from '#shared/contracts/imports.ts';
+import type { ExistingRebuild } from '../books.ts';
+import { fold } from '../cells/fold.ts';
+import { SUM_OF_COSTS } from '../understand/derived.ts';
+import { placeOf } from '../understand/vehicle-columns.ts';
+import { existingFinder } from '../understand/vehicle-drafts.ts';
+import { type Draft, newDraft, tagMaker } from './draft.ts';
+import { type DraftLine, notData, type Plan, putAside, type RowReader, taken } from './plan.ts';
+import { totalLabel } from './row-kinds.ts';
+import type { ColumnSums } from './sums.ts';
+import { type Figure, type VehicleCells, vehicleCellReader } from './vehicle-cells.ts';
+
+/** Reads rows of a sheet with one vehicle each: its facts, its costs by column, its plan, its sale. */
+export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
+  const read = vehicleCellReader(plan);
+  const nameOf = vehicleName(plan.columns);
+  const findExisting = existingOf(plan);
+  const tagFor = tagMaker(plan.books.rebuilds.map((rebuild) => rebuild.tag));
+  const seen = new Set<string>();
+  const hasStock = placeOf(plan.columns, 'stock number') >= 0;
+  const summing = plan.columns.filter((column) => column.meaning === 'derived' && column.why === SUM_OF_COSTS);
+  const addAll = (row: VehicleCells, isTaken: boolean) => {
+    for (const { column, cents, seconds } of row.figures) sums.add(column.col, cents + seconds, isTaken);
+    for (const column of summing) sums.add(column.col, costOf(row), isTaken);
+  };
+  return (cells, line) => {
+    const name = nameOf(cells);
+    const label = totalLabel(cells);
+    if ((label !== undefined && (name === '' || name === label.trim())) || (name === '' && sums.isTotal(cells))) {
+      sums.compare(cells, line, label ?? '');
+      return notData('total');
+    }
+    const row = read(cells);
+    if (name === '' && row.figures.length === 0) return notData('note');
+    const existing = name === '' ? null : findExisting(name, row);
+    const key = hasStock ? fold(name) : null;
+    const reason = name === '' ? 'missing-vehicle' : plan.repeats.has(line) || (key !== null && seen.has(key)) || isBooked(existing) ? 'duplicate' : null;
+    if (reason) {
+      addAll(row, false);
+      return putAside(reason, placeOf(plan.columns, 'stock number') + 1 || null, costOf(row));
+    }
+    if (key !== null) seen.add(key);
+    const sold = settleSale(row, plan.columns);
+    addAll(row, true);
+    const draft = newDraft(existing ? existing.tag : tagFor(name), existing, line, { ...sold.known, dates: sold.dates, spellings: [name] });
+    return taken(sold.figures.map((figure) => lineOf(figure, draft, row, line)), sold.asides);
+  };
+}
+
+const isBooked = (existing: ExistingRebuild | null) => existing !== null && (existing.hasEntries || existing.hasPurchase);
+const costOf = (row: VehicleCells) =>
+  row.figures.reduce((sum, { column, cents }) => (column.meaning === 'cost' || column.meaning === 'purchase' ? sum + cents : sum), 0);
+
+function vehicleName(columns: readonly Column[]): (cells: readonly string[]) => string {
+  const single = [placeOf(columns, 'stock number'), placeOf(columns, 'vehicle')].find((place) => place >= 0);
+  if (single !== undefined) return (cells) => (cells[single] ?? '').trim();
+  const model = placeOf(columns, 'model');
+  const parts = [placeOf(columns, 'year'), placeOf(columns, 'make'), model].filter((place) => place >= 0);
+  return (cells) => ((cells[model] ?? '').trim() === '' ? '' : parts.map((place) => (cells[place] ?? '').trim()).join(' ').trim());
+}
+
+/** The shop's own rebuild by tag; without stock numbers also the only one of the same year and model. */
+function existingOf(plan: Plan): (name: string, row: VehicleCells) => ExistingRebuild | null {
+  const finder = existingFinder(plan.books.rebuilds);
+  const hasStock = placeOf(plan.columns, 'stock number') >= 0;
+  return (name, row) => {
+    const fits = hasStock ? [] : finder.byModel(row.known.year ?? null, row.known.model ?? null);
+    return finder.byTag(name) ?? (fits.length === 1 ? (fits[0] ?? null) : null);
+  };
+}
+
+/** A sale date without a price cannot stand in the books: the date is put aside, and the rebuild stays unsold. */
+function settleSale(row: VehicleCells, columns: readonly Column[]): VehicleCells {
+  const soldOn = row.dates.soldOn;
+  if (soldOn === undefined || row.figures.some(({ column }) => column.meaning === 'sale')) return row;
+  const { soldOn: _, ...dates } = row.dates;
+  const col = columns.find((column) => column.meaning === 'soldOn')?.col ?? 1;
+  return { ...row, dates, asides: [...row.asides, { col, reason: 'missing-amount', text: soldOn, cents: null }] };
+}
+
+const KINDS = { purchase: 'purchase', cost: 'entry', estimate: 'estimate', sale: 'sale', hours: 'hours', 'estimated hours': 'estimated hours', asking: 'asking', 'expected sale': 'expected sale' } as const;
+
+function lineOf({ column, cents, seconds }: Figure, draft: Draft, row: VehicleCells, line: number): DraftLine {
+  const kind = KINDS[column.meaning as keyof typeof KINDS];
+  const on = kind === 'purchase' ? row.dates.boughtOn : kind === 'sale' ? row.dates.soldOn : undefined;
+  return {
+    kind, draft, category: column.category, on: on ?? null, cents, seconds, vendor: null, what: column.heading || null,
+    foreseen: null, person: null, isExtra: false, isGuess: false, row: line, col: column.col,
+  };
+}

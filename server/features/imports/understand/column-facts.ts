@@ -1,0 +1,48 @@
+import { looksLikeDay } from '../cells/days.ts';
+import { readHours } from '../cells/hours.ts';
+import { looksLikeMoney } from '../cells/money.ts';
+import type { Head } from './head.ts';
+
+/** What the cells below a heading look like, as shares of its filled cells (0–1). */
+export interface ColumnFacts {
+  /** 1 = the first column. */
+  readonly col: number;
+  readonly heading: string;
+  readonly filled: number;
+  readonly money: number;
+  readonly day: number;
+  readonly modelYear: number;
+  readonly hours: number;
+  /** Share of different texts among the filled cells. */
+  readonly distinct: number;
+  readonly samples: readonly string[];
+}
+
+const MODEL_YEAR = /^(19[5-9]\d|20\d\d)$/;
+
+/** Looks at every column under the headings. */
+export function columnFacts(head: Head): ColumnFacts[] {
+  const headings = head.heading?.cells ?? [];
+  return headings.map((heading, index) => {
+    const cells = head.below.map((row) => (row.cells[index] ?? '').trim()).filter((cell) => cell !== '' && cell !== heading.trim());
+    const share = (test: (cell: string) => boolean) => (cells.length ? cells.filter(test).length / cells.length : 0);
+    return {
+      col: index + 1,
+      heading: heading.trim(),
+      filled: cells.length,
+      money: share((cell) => looksLikeMoney(cell) && !looksLikeDay(cell)),
+      day: share(looksLikeDay),
+      modelYear: share((cell) => MODEL_YEAR.test(cell)),
+      hours: share((cell) => typeof readHours(cell) === 'number'),
+      distinct: cells.length ? new Set(cells).size / cells.length : 0,
+      samples: cells.slice(0, 5),
+    };
+  });
+}
+
+const MOSTLY = 0.6;
+
+export const holdsMoney = (facts: ColumnFacts) => facts.filled === 0 || facts.money >= MOSTLY;
+export const holdsDays = (facts: ColumnFacts) => facts.filled === 0 || facts.day >= MOSTLY;
+export const holdsHours = (facts: ColumnFacts) => facts.filled === 0 || facts.hours >= MOSTLY;
+export const holdsText = (facts: ColumnFacts) => facts.filled === 0 || (facts.money < MOSTLY && facts.day < MOSTLY);

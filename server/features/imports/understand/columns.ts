@@ -1,0 +1,79 @@
+import type { Column, Meaning, Shape } from '#shared/contracts/imports.ts';
+import { REBUILD_DATES } from '#shared/vocabulary.ts';
+import { type CategoryMeaning, PURCHASE, SALE } from '../words/categories.ts';
+import { headingMeanings, plannedPart } from '../words/headings.ts';
+import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
+
+type CategoryReader = (text: string) => CategoryMeaning | null;
+
+const DATES = new Set<Meaning>(['date', ...REBUILD_DATES.map(([field]) => field)]);
+const MONEY = new Set<Meaning>(['amount', 'credit', 'purchase', 'sale', 'asking', 'expected sale', 'derived']);
+const HOURS = new Set<Meaning>(['hours', 'estimated hours']);
+const NUMBERS = new Set<Meaning>(['year', 'odometer', 'stock number', 'vin', 'notes', 'vehicle', 'model', 'trim', 'derived']);
+const OF_EXPENSES: readonly Meaning[] = [
+  'date', 'vehicle', 'stock number', 'year', 'make', 'model', 'category', 'what', 'vendor', 'foreseen', 'credit', 'amount', 'notes', 'derived',
+];
+const OF_HOURS: readonly Meaning[] = ['date', 'vehicle', 'stock number', 'person', 'hours', 'task', 'notes'];
+const NOT_OF_VEHICLES = new Set<Meaning>(['date', 'category', 'what', 'vendor', 'foreseen', 'amount', 'credit', 'person', 'task']);
+const REPEATABLE = new Set<Meaning>(['ignore', 'derived', 'notes']);
+
+/** Do the cells of a column suit what its heading says? */
+function fits(meaning: Meaning, facts: ColumnFacts): boolean {
+  if (DATES.has(meaning)) return holdsDays(facts);
+  if (HOURS.has(meaning)) return holdsHours(facts);
+  if (meaning === 'year') return facts.filled === 0 || facts.modelYear >= 0.6;
+  if (NUMBERS.has(meaning)) return meaning === 'vin' || facts.day < 0.6 || meaning === 'derived';
+  return MONEY.has(meaning) ? holdsMoney(facts) : holdsText(facts);
+}
+
+/** Guesses what each column holds in a sheet of this shape. Every guess says why. */
+export function guessColumns(all: readonly ColumnFacts[], shape: Shape, categoryOf: CategoryReader): Column[] {
+  const used = new Set<Meaning>();
+  return all.map((facts) => {
+    const guess = shape === 'vehicles' ? guessOfVehicles(facts, used, categoryOf) : guessByHeading(facts, used, shape);
+    if (!REPEATABLE.has(guess.meaning) && guess.category === null) used.add(guess.meaning);
+    return { col: facts.col, heading: facts.heading, samples: [...facts.samples], ...guess };
+  });
+}
+
+type Guess = Pick<Column, 'meaning' | 'category' | 'why'>;
+const ignored = (why: string): Guess => ({ meaning: 'ignore', category: null, why });
+
+function guessByHeading(facts: ColumnFacts, used: Set<Meaning>, shape: Shape): Guess {
+  const allowed = shape === 'expenses' ? OF_EXPENSES : shape === 'hours' ? OF_HOURS : null;
+  const known = headingMeanings(facts.heading).filter((meaning) => (allowed ? allowed.includes(meaning) : !NOT_OF_VEHICLES.has(meaning)));
+  const ordered = allowed ? allowed.filter((meaning) => known.includes(meaning)) : known;
+  const meaning = ordered.find((candidate) => !used.has(candidate) && fits(candidate, facts));
+  if (meaning) return { meaning, category: null, why: `The heading says so, and the cells below suit it.` };
+  if (facts.filled === 0) return ignored('The column is empty.');
+  return ignored(known.length > 0 ? 'The cells do not suit the heading, or another column holds this.' : 'The heading is not known.');
+}
+
+function guessOfVehicles(facts: ColumnFacts, used: Set<Meaning>, categoryOf: CategoryReader): Guess {
+  const planned = plannedPart(facts.heading);
+  if (planned !== null) {
+    const guess = plannedGuess(facts, planned, categoryOf);
+    if (guess) return guess;
+  }
+  const byHeading = guessByHeading(facts, used, 'vehicles');
+  if (byHeading.meaning !== 'ignore' || !holdsMoney(facts) || facts.filled === 0) return byHeading;
+  const category = categoryOf(facts.heading);
+  if (category?.category === PURCHASE && !used.has('purchase')) {
+    return { meaning: 'purchase', category: null, why: 'The heading names the purchase, and the cells hold money.' };
+  }
+  if (!category || category.category === PURCHASE || category.category === SALE) return byHeading;
+  return { meaning: 'cost', category: category.category, why: 'The heading names a kind of cost, and the cells hold money.' };
+}
+
+function plannedGuess(facts: ColumnFacts, planned: string, categoryOf: CategoryReader): Guess | null {
+  const why = 'The heading says that this was planned.';
+  const meanings = headingMeanings(planned);
+  if (meanings.includes('hours') && holdsHours(facts)) return { meaning: 'estimated hours', category: null, why };
+  if (!holdsMoney(facts)) return null;
+  if (meanings.includes('sale')) return { meaning: 'expected sale', category: null, why };
+  const category = categoryOf(planned)?.category;
+  if (!category || category === PURCHASE || category === SALE) {
+    return ignored('A planned figure that belongs to no single category.');
+  }
+  return { meaning: 'estimate', category, why };
+}

@@ -1,0 +1,51 @@
+import type { Choice, Column } from '#shared/contracts/imports.ts';
+import type { DateOrder } from '../cells/days.ts';
+import type { DateEvidence } from './survey.ts';
+
+const ENOUGH = 5;
+
+/** Month or day first, by what the whole column holds; null = it cannot be told. */
+export function settledOrder(evidence: DateEvidence): DateOrder | null {
+  const { firstOver12, secondOver12, unsettled, monthFirstBack, dayFirstBack } = evidence;
+  if (firstOver12 !== secondOver12) return firstOver12 > secondOver12 ? 'DMY' : 'MDY';
+  if (unsettled < ENOUGH || (monthFirstBack > 0) === (dayFirstBack > 0)) return null;
+  return monthFirstBack === 0 ? 'MDY' : 'DMY';
+}
+
+/** The order of each date column, and the questions that are left. */
+export function dateOrders(
+  columns: readonly Column[],
+  evidence: ReadonlyMap<number, DateEvidence>,
+  locale: string,
+  answers: ReadonlyMap<string, string>,
+): { orders: Map<number, DateOrder>; choices: Choice[] } {
+  const settled = new Map([...evidence].map(([col, found]) => [col, settledOrder(found)]));
+  const ofFile = new Set([...settled.values()].filter((order) => order !== null));
+  const common = ofFile.size === 1 ? ([...ofFile][0] ?? null) : null;
+  const usual: DateOrder = locale === 'en-US' ? 'MDY' : 'DMY';
+  const orders = new Map<number, DateOrder>();
+  const choices: Choice[] = [];
+  for (const [col, found] of evidence) {
+    const known = settled.get(col) ?? common;
+    const column = columns.find((candidate) => candidate.col === col);
+    const id = `date-order:${col}`;
+    const answer = answers.get(id);
+    orders.set(col, answer === 'MDY' || answer === 'DMY' ? answer : (known ?? usual));
+    if (known !== null || found.unsettled === 0) continue;
+    choices.push({
+      id,
+      kind: 'date-order',
+      column: column?.heading ?? null,
+      question: `Column ${column?.heading || col}: does the month or the day stand first in ${column?.samples[0] ?? 'its dates'}?`,
+      options: [
+        { value: 'MDY', label: 'The month' },
+        { value: 'DMY', label: 'The day' },
+      ],
+      preset: usual,
+      answer: answer ?? null,
+      mustAsk: true,
+      why: 'No day in this column is above 12, and its rows are in no order that would tell.',
+    });
+  }
+  return { orders, choices };
+}

@@ -1,0 +1,40 @@
+import type { Meaning, Shape } from '#shared/contracts/imports.ts';
+import { looksLikeMoney } from '../cells/money.ts';
+import { type CategoryMeaning, SALE } from '../words/categories.ts';
+import { headingMeanings, plannedPart } from '../words/headings.ts';
+import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
+import type { Head } from './head.ts';
+
+/** What one row stands for, or why the sheet cannot be read. */
+export type ShapeGuess = { readonly shape: Shape } | { readonly shape: null; readonly why: string; readonly row: number | null };
+
+/** Guesses from the headings, and from how often the same vehicle comes back, what one row of the sheet stands for. */
+export function guessShape(head: Head, all: readonly ColumnFacts[], categoryOf: (text: string) => CategoryMeaning | null): ShapeGuess {
+  if (!head.heading) {
+    return { shape: null, row: null, why: 'No row reads like headings. Put a row of headings (date, car, what, amount) above the list and bring it in again.' };
+  }
+  const paid = head.above.find((row) => row.cells.filter(looksLikeMoney).length > 0 && row.cells.filter((cell) => cell.trim()).length > 1);
+  if (paid) {
+    return { shape: null, row: paid.line, why: 'There are figures above the headings: this looks like one sheet about one car, in sections. Such sheets cannot be read yet; list its costs one per row with the car beside each.' };
+  }
+  const means = (meaning: Meaning, holds: (facts: ColumnFacts) => boolean) =>
+    all.find((facts) => holds(facts) && headingMeanings(facts.heading).includes(meaning));
+  const costs = all.filter((facts) => facts.filled > 0 && holdsMoney(facts) && isCost(facts, categoryOf));
+  const name = means('stock number', () => true) ?? means('vehicle', holdsText) ?? means('model', () => true);
+  if (name && costs.length >= 2 && (name.distinct >= 0.8 || costs.length >= 4)) return { shape: 'vehicles' };
+  const hasMoney = means('amount', holdsMoney) ?? means('credit', holdsMoney);
+  if (name && hasMoney) return { shape: 'expenses' };
+  if (name && means('hours', holdsHours) && means('date', holdsDays)) return { shape: 'hours' };
+  return {
+    shape: null,
+    row: head.heading.line,
+    why: name
+      ? 'No column of amounts was found under the headings.'
+      : 'No column names the vehicle. Lists of costs need a column that says which car each row belongs to.',
+  };
+}
+
+function isCost(facts: ColumnFacts, categoryOf: (text: string) => CategoryMeaning | null): boolean {
+  const category = categoryOf(plannedPart(facts.heading) ?? facts.heading);
+  return category !== null && category.category !== SALE;
+}

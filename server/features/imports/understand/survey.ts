@@ -1,0 +1,97 @@
+import type { Column } from '#shared/contracts/imports.ts';
+import { REBUILD_DATES } from '#shared/vocabulary.ts';
+import { currenciesIn, decimalVote, looksLikeMoney } from '../cells/money.ts';
+import { unsettledParts } from '../cells/days.ts';
+import type { ByteSource } from '../text/bytes.ts';
+import { forEachRow, type TextFormat } from '../text/rows.ts';
+import { repeatedRows, rowHash } from './repeats.ts';
+import type { Plan } from '../read/plan.ts';
+import { isHeadingAgain } from '../read/row-kinds.ts';
+import { vehicleText } from './vehicle-columns.ts';
+
+/** What only the whole file can tell, found in one pass before any row is understood. */
+export interface Survey {
+  /** Above 0: the decimal mark is a point; below: a comma; 0: nothing speaks for either. */
+  readonly decimalVotes: number;
+  /** Currency → cells that can only be it. */
+  readonly currencies: ReadonlyMap<string, number>;
+  /** Per date column: what its numbers allow. */
+  readonly dates: ReadonlyMap<number, DateEvidence>;
+  readonly vehicles: ReadonlyMap<string, number>;
+  readonly categories: ReadonlyMap<string, number>;
+  /** Lines on which a block pasted twice stands. */
+  readonly repeats: ReadonlySet<number>;
+}
+
+export interface DateEvidence {
+  firstOver12: number;
+  secondOver12: number;
+  /** Cells that a number order matters to. */
+  unsettled: number;
+  /** Steps back in time when read as month first, and as day first. */
+  monthFirstBack: number;
+  dayFirstBack: number;
+}
+
+const MONEY = new Set<Column['meaning']>(['amount', 'credit', 'purchase', 'cost', 'estimate', 'sale', 'asking', 'expected sale', 'derived']);
+const DATES = new Set<Column['meaning']>(['date', ...REBUILD_DATES.map(([field]) => field)]);
+
+/** Goes through the whole file once. */
+export function survey(source: ByteSource, format: TextFormat, columns: readonly Column[], heading: Plan['heading']): Survey {
+  const money = columns.filter((column) => MONEY.has(column.meaning)).map((column) => column.col - 1);
+  const days = columns.filter((column) => DATES.has(column.meaning)).map((column) => ({ at: column.col - 1, see: dateWatcher() }));
+  const nameOf = vehicleText(columns);
+  const isAgain = isHeadingAgain(heading.cells);
+  const category = columns.find((column) => column.meaning === 'category');
+  const currencies = new Map<string, number>();
+  const vehicles = new Map<string, number>();
+  const categories = new Map<string, number>();
+  const hashes: number[] = [];
+  const lines: number[] = [];
+  let decimalVotes = 0;
+  forEachRow(source, format, (cells, line) => {
+    if (line <= heading.line || isAgain(cells)) return;
+    for (const at of money) {
+      const cell = cells[at];
+      if (!cell || !looksLikeMoney(cell)) continue;
+      decimalVotes += decimalVote(cell);
+      for (const currency of currenciesIn(cell) ?? []) count(currencies, currency);
+    }
+    for (const { at, see } of days) see.cell(cells[at] ?? '');
+    const name = nameOf(cells);
+    if (name) count(vehicles, name);
+    if (category && name) count(categories, (cells[category.col - 1] ?? '').trim());
+    if (cells.some((cell) => cell !== '')) {
+      hashes.push(rowHash(cells));
+      lines.push(line);
+    }
+  });
+  const repeats = new Set([...repeatedRows(hashes)].map((place) => lines[place] as number));
+  return { decimalVotes, currencies, vehicles, categories, repeats, dates: new Map(days.map(({ at, see }) => [at + 1, see.evidence])) };
+}
+
+function count(counts: Map<string, number>, key: string): void {
+  counts.set(key, (counts.get(key) ?? 0) + 1);
+}
+
+function dateWatcher() {
+  const evidence: DateEvidence = { firstOver12: 0, secondOver12: 0, unsettled: 0, monthFirstBack: 0, dayFirstBack: 0 };
+  let before: readonly [number, number, string] | null = null;
+  return {
+    evidence,
+    cell(text: string) {
+      const parts = unsettledParts(text);
+      if (!parts) return;
+      const [first, second] = parts;
+      const year = text.trim().slice(-2);
+      evidence.unsettled++;
+      if (first > 12) evidence.firstOver12++;
+      if (second > 12) evidence.secondOver12++;
+      if (before && before[2] === year) {
+        if (first * 31 + second < before[0] * 31 + before[1]) evidence.monthFirstBack++;
+        if (second * 31 + first < before[1] * 31 + before[0]) evidence.dayFirstBack++;
+      }
+      before = [first, second, year];
+    },
+  };
+}

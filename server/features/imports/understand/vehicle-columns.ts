@@ -1,0 +1,17 @@
+import type { Column, Meaning } from '#shared/contracts/imports.ts';
+
+/** Place of the first column with a meaning, from 0; −1 = none. */
+export function placeOf(columns: readonly Column[], meaning: Meaning): number {
+  return (columns.find((column) => column.meaning === meaning)?.col ?? 0) - 1;
+}
+
+/**
+ * How rows name their vehicle in a list: one column of free text, or a stock number, or year, make and model side by
+ * side. '' = the row names none.
+ */
+export function vehicleText(columns: readonly Column[]): (cells: readonly string[]) => string {
+  const single = [placeOf(columns, 'vehicle'), placeOf(columns, 'stock number')].find((place) => place >= 0);
+  if (single !== undefined) return (cells) => (cells[single] ?? '').trim();
+  const places = (['year', 'make', 'model'] as const).map((meaning) => placeOf(columns, meaning)).filter((place) => place >= 0);
+  return (cells) => places.map((place) => (cells[place] ?? '').trim()).join(' ').trim();
+}

@@ -1,0 +1,98 @@
+import type { Choice } from '#shared/contracts/imports.ts';
+import type { ExistingRebuild, ShopBooks } from '../books.ts';
+import { fold } from '../cells/fold.ts';
+import { type Draft, newDraft, tagMaker } from '../read/draft.ts';
+import { isOverhead } from '../words/vehicles.ts';
+import { groupVehicles, type VehicleDoubt, type VehicleGroup } from './vehicle-groups.ts';
+import { modelKey } from './vehicle-text.ts';
+
+/** What a vehicle cell of a list leads to. */
+export type VehicleTarget = Draft | 'overhead' | 'ambiguous' | 'aside';
+
+/** Finds the shop's rebuild for a tag, or for a year and model. Several that fit: all of them. */
+export function existingFinder(rebuilds: readonly ExistingRebuild[]) {
+  const byTag = new Map(rebuilds.map((rebuild) => [fold(rebuild.tag), rebuild]));
+  const byModel = new Map<string, ExistingRebuild[]>();
+  for (const rebuild of rebuilds) {
+    if (rebuild.year === null || !rebuild.model) continue;
+    const key = `${rebuild.year}|${modelKey(rebuild.model)}`;
+    byModel.set(key, [...(byModel.get(key) ?? []), rebuild]);
+  }
+  return {
+    byTag: (tag: string) => byTag.get(fold(tag)) ?? null,
+    byModel: (year: number | null, model: string | null) => (year === null || !model ? [] : (byModel.get(`${year}|${modelKey(model)}`) ?? [])),
+  };
+}
+
+/** A draft for every vehicle that a list names, with the questions about spellings that are left. */
+export function vehicleDrafts(
+  counts: ReadonlyMap<string, number>,
+  books: ShopBooks,
+  answers: ReadonlyMap<string, string>,
+): { of: Map<string, VehicleTarget>; choices: Choice[] } {
+  const named = new Map([...counts].filter(([spelling]) => !isOverhead(spelling)));
+  const grouped = groupVehicles(named, Number(books.today.slice(0, 4)), prefixed(answers, 'vehicle:'));
+  const finder = existingFinder(books.rebuilds);
+  const tagFor = tagMaker(books.rebuilds.map((rebuild) => rebuild.tag));
+  const choices = grouped.doubts.map((doubt) => spellingChoice(doubt, answers));
+  const drafts = new Map<VehicleGroup, VehicleTarget>();
+  for (const group of grouped.groups) {
+    const sameTag = group.spellings.map((spelling) => finder.byTag(spelling)).find((found) => found !== null);
+    const fits = sameTag ? [sameTag] : finder.byModel(group.year, group.model);
+    const { existing, choice } = chooseExisting(group, fits, answers);
+    if (choice && !sameTag) choices.push(choice);
+    const { year, make, model, spellings } = group;
+    const known = { year, make, model: year === null && make === null ? null : model, spellings };
+    drafts.set(group, existing === 'ambiguous' ? existing : newDraft(existing ? existing.tag : tagFor(group.name), existing, 0, known));
+  }
+  const of = new Map<string, VehicleTarget>();
+  for (const spelling of counts.keys()) {
+    const target = grouped.of.get(spelling);
+    of.set(spelling, target === undefined ? 'overhead' : typeof target === 'string' ? target : (drafts.get(target) ?? 'ambiguous'));
+  }
+  return { of, choices };
+}
+
+function prefixed(answers: ReadonlyMap<string, string>, prefix: string): Map<string, string> {
+  return new Map([...answers].filter(([id]) => id.startsWith(prefix)).map(([id, value]) => [id.slice(prefix.length), value]));
+}
+
+function spellingChoice(doubt: VehicleDoubt, answers: ReadonlyMap<string, string>): Choice {
+  const id = `vehicle:${doubt.spelling}`;
+  return {
+    id,
+    kind: 'vehicle',
+    column: null,
+    question: `Which vehicle is “${doubt.spelling}”?`,
+    options: [
+      ...doubt.others.map((group) => ({ value: group.id, label: group.name })),
+      { value: 'own', label: 'a vehicle of its own' },
+      { value: 'aside', label: 'put its rows aside' },
+    ],
+    preset: doubt.taken?.id ?? 'aside',
+    answer: answers.get(id) ?? null,
+    mustAsk: doubt.taken === null,
+    why: doubt.taken === null ? `${doubt.why} More than one fits.` : doubt.why,
+  };
+}
+
+function chooseExisting(group: VehicleGroup, fits: readonly ExistingRebuild[], answers: ReadonlyMap<string, string>) {
+  if (fits.length === 0) return { existing: null, choice: null };
+  const id = `rebuild:${group.name}`;
+  const answer = answers.get(id);
+  const preset = fits.length === 1 ? (fits[0]?.id ?? 'new') : 'new';
+  const chosen = fits.find((rebuild) => rebuild.id === (answer ?? (fits.length === 1 ? preset : '')));
+  const choice: Choice = {
+    id,
+    kind: 'vehicle',
+    column: null,
+    question: `Is “${group.name}” a rebuild that you have already?`,
+    options: [...fits.map((rebuild) => ({ value: rebuild.id, label: rebuild.tag })), { value: 'new', label: 'a new rebuild' }],
+    preset,
+    answer: answer ?? null,
+    mustAsk: fits.length > 1,
+    why: fits.length === 1 ? 'Year and model are the same.' : 'More than one of your rebuilds has this year and model.',
+  };
+  const existing = chosen ?? (fits.length > 1 && answer === undefined ? ('ambiguous' as const) : null);
+  return { existing, choice };
+}

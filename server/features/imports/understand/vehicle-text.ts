@@ -1,0 +1,73 @@
+import { fold } from '../cells/fold.ts';
+import { fullYear } from '../cells/days.ts';
+import { isColor, makeOf } from '../words/vehicles.ts';
+
+/** A vehicle as someone typed it, taken apart. `key` = the model's letters and digits, by which spellings are compared. */
+export interface VehicleText {
+  readonly year: number | null;
+  readonly make: string | null;
+  readonly model: string | null;
+  readonly key: string;
+}
+
+const FOUR = /^(19[3-9]\d|20\d\d)$/;
+const TWO = /^\d\d$/;
+
+/** Reads `13 F-150`, `'05 Altima`, `2012 Dodge Caravan silver`, `Escape 06`. Unknown parts are null. */
+export function readVehicle(text: string, thisYear: number): VehicleText {
+  const words = text.replace(/['’`"]/g, ' ').split(/[\s,;/]+/).filter((word) => fold(word) !== '');
+  const year = takeYear(words, thisYear);
+  const make = takeMake(words);
+  const left = words.filter((word) => !isColor(word));
+  const model = (left.length > 0 ? left : words).join(' ') || null;
+  return { year, make, model, key: modelKey(model ?? make ?? text) };
+}
+
+/** What of a model's name is compared: letters and digits alone. */
+export function modelKey(model: string): string {
+  return fold(model).replaceAll(' ', '');
+}
+
+function takeYear(words: string[], thisYear: number): number | null {
+  const four = words.findIndex((word) => FOUR.test(word));
+  if (four >= 0 && words.length > 1) return Number(words.splice(four, 1)[0]);
+  for (const at of [0, words.length - 1]) {
+    const word = words[at];
+    if (words.length > 1 && word !== undefined && TWO.test(word)) {
+      words.splice(at, 1);
+      return fullYear(word, thisYear);
+    }
+  }
+  return null;
+}
+
+function takeMake(words: string[]): string | null {
+  for (let at = 0; at < words.length; at++) {
+    for (const size of [2, 1]) {
+      const make = words.length > size ? makeOf(words.slice(at, at + size).join(' ')) : null;
+      if (make) {
+        words.splice(at, size);
+        return make;
+      }
+    }
+  }
+  return null;
+}
+
+const digitsOf = (text: string) => text.replace(/\D+/g, ' ');
+
+/**
+ * Is one text a slip of the pen away from the other: one letter more, less, changed, or two swapped? Digits never
+ * count as a slip (an F-150 is no F-250), nor do words too short to tell.
+ */
+export function isSlip(a: string, b: string): boolean {
+  if (a === b || Math.min(a.length, b.length) < 4 || Math.abs(a.length - b.length) > 1 || digitsOf(a) !== digitsOf(b)) return false;
+  let start = 0;
+  while (start < a.length && a[start] === b[start]) start++;
+  let end = 0;
+  while (end < Math.min(a.length, b.length) - start && a[a.length - 1 - end] === b[b.length - 1 - end]) end++;
+  const leftA = a.slice(start, a.length - end);
+  const leftB = b.slice(start, b.length - end);
+  if (Math.max(leftA.length, leftB.length) <= 1) return true;
+  return leftA.length === 2 && leftB.length === 2 && leftA[0] === leftB[1] && leftA[1] === leftB[0];
+}

@@ -1,0 +1,91 @@
+import { fold } from '../cells/fold.ts';
+
+/** What a category word may mean beside a category of the shop. */
+export const PURCHASE = 'purchase';
+export const SALE = 'sale';
+
+// Meaning | whole phrases, folded. Longer phrases win over shorter ones inside the same text.
+const PHRASES: Readonly<Record<string, string>> = {
+  [PURCHASE]:
+    'purchase|purchase price|bid|hammer|hammer price|winning bid|buy|bought|bought for|buy price|vehicle cost|car price|vehicle price|cost of car|kauf|kaufpreis|einkauf|ankauf|zuschlag|compra|achat',
+  [SALE]: 'sale|sold|sale price|sold for|sold price|selling price|verkauf|verkauft|verkaufspreis|erlos|venta|vente',
+  'auction fees':
+    'auction fee|auction fees|auction|buyer fee|buyers fee|buyer s fee|buyer fees|fee|fees|gate fee|bid fee|broker fee|aufgeld|auktionsgebuhr|auktionsgebuhren|auktion|gebuhr|gebuhren|comision subasta|frais encheres',
+  transport:
+    'transport|transportation|tow|towing|tow fee|tows|haul|hauling|delivery|freight|shipping|storage|yard storage|trailer|pickup fee|abschleppen|abschleppkosten|uberfuhrung|grua|transporte|remorquage',
+  parts:
+    'part|parts|used parts|new parts|body parts|mechanical parts|teile|ersatzteil|ersatzteile|gebrauchtteile|tires|tyres|tire|wheels|battery|reifen|repuestos|piezas|pieces|donor|donor car',
+  'outside labor (sublet)':
+    'outside labor|outside labour|body|outside work|outside|sublet|sublets|subcontract|subcontractor|body shop|bodyshop|body work|bodywork|frame|frame work|machine shop|machine work|welding|mechanic|shop labor|fremdleistung|fremdleistungen|fremdarbeit|werkstatt|karosserie|mano de obra externa|sous traitance',
+  'paint & body materials':
+    'paint|paints|painting|paint body|paint and body|paint materials|body materials|paint supplies|primer|clear coat|filler|lack|lackierung|lackmaterial|farbe|pintura|peinture',
+  'restraints (SRS)': 'srs|airbag|airbags|air bag|air bags|restraint|restraints|seat belts|belts|gurte|gurt',
+  'small systems':
+    'glass|windshield|windscreen|key|keys|ac|a c|alignment|scan|scans|calibration|electronics|glas|scheibe|schlussel|klima|achsvermessung',
+  'title & registration':
+    'title|titles|title dmv|title plates|title and plates|title fees|dmv|registration|reg|plates|tags|tag title|license plates|zulassung|anmeldung|kennzeichen|matriculacion|immatriculation|carte grise',
+  inspection:
+    'inspection|inspections|inspect|rebuilt inspection|state inspection|safety inspection|smog|emissions|tuv|hu|hauptuntersuchung|hu au|itv|controle technique|mot',
+  insurance: 'insurance|ins|versicherung|seguro|assurance',
+  supplies:
+    'supplies|supply|shop supplies|consumables|materials|material|fluids|verbrauchsmaterial|hilfsmittel|material werkstatt|suministros|fournitures',
+  detail: 'detail|detailing|cleaning|clean|wash|car wash|interior detail|aufbereitung|reinigung|limpieza|nettoyage',
+  'selling costs':
+    'ad|ads|advert|advertising|listing|listing fee|selling|selling cost|selling costs|sales cost|commission|photos|marketing|verkaufskosten|inserat|anzeige|anuncio|annonce',
+  tax: 'tax|taxes|sales tax|excise|vat|steuer|steuern|impuesto|taxe',
+  'paid labor': 'paid labor|paid labour|wages|wage|helper|helper pay|payroll|lohn|lohne|salario|salaires',
+  other: 'other|misc|miscellaneous|various|sundry|sonstiges|sonstige|diverses|verschiedenes|otros|divers',
+};
+
+const MEANING_OF = new Map(
+  Object.entries(PHRASES).flatMap(([meaning, phrases]) => phrases.split('|').map((phrase) => [phrase, meaning] as const)),
+);
+const MOST_WORDS = 3;
+
+/** The meaning of trade words; null = unknown. `isExact`: the whole text is a known phrase. */
+export function tradeMeaning(text: string): { meaning: string; isExact: boolean } | null {
+  const words = fold(text).split(' ');
+  const whole = MEANING_OF.get(words.join(' '));
+  if (whole) return { meaning: whole, isExact: true };
+  for (let size = Math.min(MOST_WORDS, words.length); size > 0; size--) {
+    for (let at = 0; at + size <= words.length; at++) {
+      const meaning = MEANING_OF.get(words.slice(at, at + size).join(' '));
+      if (meaning) return { meaning, isExact: false };
+    }
+  }
+  return null;
+}
+
+export interface CategoryMeaning {
+  /** A category of the shop, by its own name, or PURCHASE or SALE. */
+  readonly category: string;
+  readonly isSure: boolean;
+}
+
+/**
+ * Reads category words for a shop: its own names first, then trade words that mean the same as one of them.
+ * null = a word that nobody knows.
+ */
+export function categoryReader(shopCategories: readonly string[]): (text: string) => CategoryMeaning | null {
+  const byName = new Map(shopCategories.map((name) => [fold(name), name]));
+  const byMeaning = new Map<string, string>();
+  for (const name of shopCategories) {
+    const meaning = tradeMeaning(name)?.meaning;
+    if (meaning && !byMeaning.has(meaning)) byMeaning.set(meaning, name);
+  }
+  for (const name of shopCategories) byMeaning.set(name, name);
+  return (text) => {
+    const own = byName.get(fold(text));
+    if (own) return { category: own, isSure: true };
+    const found = tradeMeaning(text);
+    if (!found) return null;
+    if (found.meaning === PURCHASE || found.meaning === SALE) return { category: found.meaning, isSure: found.isExact };
+    const category = byMeaning.get(found.meaning);
+    return category ? { category, isSure: found.isExact } : null;
+  };
+}
+
+/** Where money goes that nobody can place: the shop's own word for it, else its last category. */
+export function otherCategory(shopCategories: readonly string[]): string {
+  return categoryReader(shopCategories)('other')?.category ?? shopCategories.at(-1) ?? 'other';
+}

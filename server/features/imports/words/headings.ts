@@ -1,0 +1,78 @@
+import type { Meaning } from '#shared/contracts/imports.ts';
+import { fold } from '../cells/fold.ts';
+
+/** What a heading may mean, the likelier first; which it is, the cells below decide. */
+const HEADINGS: Readonly<Partial<Record<Meaning, string>>> = {
+  date: 'date|day|when|paid on|date paid|invoice date|datum|tag|belegdatum|fecha|date achat',
+  vehicle: 'vehicle|car|unit|truck|which car|vehicle year model|car name|year make model|auto|fahrzeug|wagen|kfz|pkw|coche|vehiculo|voiture|vehicule|rebuild|project|job',
+  category: 'category|type|what for|kind|cost type|expense type|account|class of cost|art|kategorie|kostenart|categoria|categorie|tipo',
+  what: 'what|description|item|details|detail|desc|memo|for|purpose|beschreibung|artikel|bezeichnung|text|descripcion|concepto|designation',
+  vendor: 'vendor|from|bought from|supplier|seller|store|shop|who from|payee|paid to|where|handler|lieferant|verkaufer|proveedor|fournisseur',
+  foreseen: 'planned|planned y n|foreseen|expected|in estimate|in budget|surprise|geplant|previsto|prevu',
+  amount: 'amount|amt|cost|paid|price|total|sum|spent|expense|debit|out|money|cost usd|net cost|betrag|ausgabe|ausgaben|preis|kosten|summe|importe|coste|gasto|montant|depense',
+  credit: 'got back|credit|refund|refunds|returned|back|income|received|sale|sales|in|einnahme|einnahmen|gutschrift|erstattung|ingreso|recette|sold for|sale price',
+  'stock number': 'stock|stock no|stock number|stock nr|id|no|nr|number|tag|ref|unit no|lot|lot no|our no|lagernummer|fahrzeugnr',
+  year: 'year|yr|model year|my|baujahr|bj|jahr|ano|annee',
+  make: 'make|brand|manufacturer|marke|hersteller|marca|marque',
+  model: 'model|modell|typ|modelo|modele',
+  trim: 'trim|version|ausstattung',
+  vin: 'vin|vin no|vin number|fahrgestellnummer|fin|bastidor',
+  class: 'class|type|body|body type|body style|vehicle type|vehicle class|klasse|bauart',
+  damage: 'damage|dmg|hit|primary damage|loss|damage type|schaden|dano|dommage',
+  'second damage': 'second damage|secondary damage|other damage|damage 2',
+  'title brand': 'title|title type|title status|title brand|brand on title|papiere',
+  odometer: 'miles|mileage|odometer|odo|km|kilometer|kilometerstand|kms',
+  seen: 'seen|inspected before|seen in person|looked at|seen before',
+  'bought from': 'bought from|auction|source|bought at|from',
+  notes: 'notes|note|comments|comment|remarks|bemerkung|bemerkungen|notiz|notas|remarques',
+  boughtOn: 'bought|bought on|purchased|purchase date|date bought|buy date|gekauft|gekauft am|kaufdatum|comprado|achete',
+  paidOn: 'paid|paid on|date paid|bezahlt',
+  pickedUpOn: 'picked up|pick up|pickup|arrived|abgeholt',
+  startedOn: 'started|start|start date|begun|work started|begonnen',
+  roadworthyOn: 'ready|roadworthy|done|finished|completed|road ready|fertig|listo|pret',
+  inspectedOn: 'inspected|inspected on|inspection date|tuv am',
+  titleIssuedOn: 'title issued|title date|title received|titled',
+  listedOn: 'listed|listed on|list date|advertised|inseriert',
+  soldOn: 'sold on|sold|date sold|sale date|sold date|verkauft|verkauft am|verkaufsdatum|vendido|vendu',
+  settledOn: 'settled|settled on|closed|abgerechnet',
+  purchase: 'bid|purchase|purchase price|price|paid|bought for|cost of car|hammer|buy price|kaufpreis|zuschlag|einkauf',
+  hours: 'hours|hrs|hrs worked|labor hours|my hours|time|std|stunden|horas|heures|hour|total hours',
+  'estimated hours': 'est hours|est hrs|estimated hours|hours est|hrs est|planned hours|budget hours|stunden geplant',
+  sale: 'sold for|sale|sale price|sold|selling price|sold price|verkaufspreis|verkauft fur|erlos|precio venta',
+  asking: 'asking|asking price|list price|ask',
+  'expected sale': 'expected sale|est sale|expected price|arv|target sale|target price',
+  person: 'who|person|worker|mechanic|name|by|wer|mitarbeiter|quien|qui',
+  task: 'task|job|work|what done|work done|tatigkeit|arbeit|tarea|tache',
+  derived:
+    'total in|total|all in|total cost|total costs|total spent|cost total|total invested|invested|profit|net profit|gain|loss|profit loss|p l|margin|roi|days|days held|days to sell|balance|running total|running balance|saldo|gesamt|gesamtkosten|gewinn|summe|marge|beneficio|benefice|per hour|profit per hour',
+};
+
+const BY_WORDS = new Map<string, Meaning[]>();
+for (const [meaning, phrases] of Object.entries(HEADINGS) as [Meaning, string][]) {
+  for (const phrase of phrases.split('|')) BY_WORDS.set(phrase, [...(BY_WORDS.get(phrase) ?? []), meaning]);
+}
+const UNIT = /[([]\s*(?:usd|eur|gbp|cad|\$|€|£|us\$|h|hrs?|hours|std|km|mi|miles|y\/n|dd.?mm.?yyyy|mm.?dd.?yyyy)\s*[)\]]/gi;
+const PLAN = /\b(?:est|estimate|estimated|budget|budgeted|plan|planned|quote|quoted|geplant|soll|kv)\b/;
+
+/** A heading without units and punctuation, as compared. */
+export function headingWords(heading: string): string {
+  return fold(heading.replace(UNIT, ' '));
+}
+
+/** Every meaning that this heading is known for. */
+export function headingMeanings(heading: string): readonly Meaning[] {
+  return BY_WORDS.get(headingWords(heading)) ?? BY_WORDS.get(headingWords(heading.replace(/[([].*[)\]]/g, ' '))) ?? [];
+}
+
+/** The heading of a planned figure without the word that says so (`Parts est.` → `parts`); null = no such word. */
+export function plannedPart(heading: string): string | null {
+  const words = headingWords(heading);
+  return PLAN.test(words) ? words.replace(PLAN, ' ').replace(/\s+/g, ' ').trim() : null;
+}
+
+const TOTAL = /^(?:(?:grand|sub|car|month|monthly|year|running|overall)?\s?(?:total|totals|subtotal|sum|sums)|summe|gesamt|gesamtsumme|zwischensumme|ubertrag|suma|total general|somme|carried forward|brought forward|balance)\b|\b(?:total|totals|subtotal|summe|gesamt)$/;
+
+/** Does a cell label a total, subtotal or carried-forward line? */
+export function isTotalLabel(cell: string): boolean {
+  return cell.length < 60 && TOTAL.test(fold(cell));
+}

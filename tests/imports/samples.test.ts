@@ -1,0 +1,71 @@
+import { describe, expect, it } from 'vitest';
+import type { ImportSettings, Reading } from '#shared/contracts/imports.ts';
+import { read, sampleBytes } from './support.ts';
+import { readFacts, readHoursLines, readLines, trueFacts, trueHours, trueLines, type Truth, truthOf } from './truth.ts';
+
+// Checked against the truth beside each sample, under the rules of the samples' README.
+
+const byYear = (a: { year: number | null; model: string | null }, b: typeof a) => `${a.year} ${a.model}`.localeCompare(`${b.year} ${b.model}`);
+
+function expectAgreement(reading: Reading, truth: Truth): void {
+  const lenient = truth.canonical.lines[0]?.lenient ?? [];
+  expect(readLines(reading, lenient)).toEqual(trueLines(truth));
+  expect(readFacts(reading).sort(byYear)).toEqual(trueFacts(truth, reading).sort(byYear));
+  expect(reading.control).toMatchObject({
+    rowsRead: truth.control.rowsRead, costCents: truth.control.totalCents, saleCents: truth.control.totalSaleCents, estimateCents: truth.control.estimateCents,
+    centsByCategory: truth.control.totalCentsByCategory,
+  });
+  const aside = reading.asides.map(({ row, col, reason }) => ({ row, col, reason }));
+  for (const reject of truth.rejects) expect(aside).toContainEqual({ row: reject.row, col: reject.col, reason: reject.reason });
+  for (const { source, acceptable } of truth.undecidable) {
+    const reasons = acceptable.find((way) => way.outcome === 'reject')?.reason;
+    expect(reasons).toContain(reading.asides.find((one) => one.row === source.row)?.reason);
+  }
+  expect(aside).toHaveLength(truth.rejects.length + truth.undecidable.length);
+  const notData = reading.firstRows.filter((row) => row.outcome === 'not data').map((row) => row.row);
+  expect(notData).toEqual(truth.nonData.map(({ row }) => row));
+  expect(reading.notData.blank).toBe(truth.blankRows.flatMap(({ rows }) => rows).reduce((sum, [from, to]) => sum + to - from + 1, 0));
+  const stated = reading.statedTotals.map(({ row, stated: statedCents, imported }) => ({ row, statedCents, imported }));
+  for (const total of truth.statedTotals) {
+    expect(stated).toContainEqual({ row: total.source.row, statedCents: total.statedCents, imported: total.importedCents });
+  }
+}
+
+describe('samples with known truth', () => {
+  it.each([
+    ['p01_rebuild_summary_us.csv', {}],
+    ['p02_expense_ledger_us.csv', {}],
+    ['p06_ausgaben_werkstatt.csv', { currency: 'EUR', locale: 'de-DE' }],
+    ['p07_receipts_messy.csv', {}],
+    ['p08_notes_and_junk.csv', {}],
+  ])('%s comes in exactly as its truth says', (name, books) => {
+    expectAgreement(read(sampleBytes(name), {}, books), truthOf(name));
+  });
+
+  it('an hours log comes in once its order of day and month is settled, and not before', () => {
+    const name = 'p05_hours_log.tsv';
+    const truth = truthOf(name);
+    const asked = read(sampleBytes(name)).choices;
+    expect(asked).toEqual([expect.objectContaining({ kind: 'date-order', column: 'Date', mustAsk: true, answer: null })]);
+    const settings: ImportSettings = { answers: { [asked[0]?.id ?? '']: 'MDY' } };
+    const reading = read(sampleBytes(name), settings);
+    expect(readHoursLines(reading)).toEqual(trueHours(truth));
+    expect(reading.control.rowsRead).toBe(truth.control.rowsRead);
+    expect(reading.asides.map(({ row, col, reason }) => ({ row, col, reason }))).toEqual([{ row: 19, col: 2, reason: 'missing-vehicle' }]);
+    expect(reading.statedTotals.every((total) => total.stated === total.imported)).toBe(true);
+  });
+
+  it('euros do not come into a shop that counts in dollars', () => {
+    expect(read(sampleBytes('p06_ausgaben_werkstatt.csv')).refusal).toMatchObject({ kind: 'currency' });
+  });
+
+  it('a sheet about one car in sections is refused with the line that shows it, and nothing of it is read', () => {
+    const reading = read(sampleBytes('p03_single_car_sheet.csv'));
+    expect(reading.refusal).toMatchObject({ kind: 'shape', row: 2 });
+    expect(reading.control.rowsRead).toBe(0);
+  });
+
+  it('a workbook is refused with what to do', () => {
+    expect(read(sampleBytes('p04_workbook_2021.xlsx')).refusal).toMatchObject({ kind: 'not-text', message: expect.stringContaining('CSV') });
+  });
+});

@@ -61,12 +61,14 @@ const REBUILDS = `
   WHERE r.shop_id = @shop AND r.id IN (SELECT value FROM json_each(@ids))
   GROUP BY r.id`;
 
+// Grouping by day tempts the planner to walk the whole shop's entries by day for each rebuild: name the index.
 const FLOWS = `
   SELECT r.id, r.bought_on, r.purchase_cents, coalesce(r.sold_on, r.exit_on), coalesce(r.sale_cents, r.exit_cents),
     e.dated_on, sum(e.cents)
   FROM rebuilds r
   JOIN rollup_rebuilds k ON k.shop_id = r.shop_id AND k.rebuild_id = r.id AND k.undated_count = 0
-  LEFT JOIN entries e ON e.shop_id = r.shop_id AND e.rebuild_id = r.id AND e.voided_at IS NULL
+  LEFT JOIN entries e INDEXED BY entries_by_rebuild
+    ON e.shop_id = r.shop_id AND e.rebuild_id = r.id AND e.voided_at IS NULL
   WHERE r.shop_id = @shop AND r.id IN (SELECT value FROM json_each(@ids))
     AND r.bought_on IS NOT NULL AND r.purchase_cents IS NOT NULL
     AND coalesce(r.sold_on, r.exit_on) IS NOT NULL

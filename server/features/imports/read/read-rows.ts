@@ -36,7 +36,8 @@ export function readRows(source: ByteSource, plan: Plan, sink: Sink, onPart?: (s
     plan.format,
     (cells, line, isMalformed) => {
       const result = outside(cells, line, isMalformed) ?? read(cells, line);
-      if (result.outcome === 'taken') for (const made of result.lines) book(made, line, drafts, tally.control);
+      if (result.draft) place(result.draft, line, drafts);
+      for (const made of result.lines) book(made, line, drafts, tally.control);
       tally.count(result);
       sink.row(cells, line, result);
     },
@@ -91,13 +92,17 @@ function newTally() {
   };
 }
 
+/** Puts a rebuild among those that rows came in for, at its first row. */
+function place(draft: Draft, row: number, drafts: Draft[]): void {
+  if (draft.place >= 0) return;
+  draft.place = drafts.push(draft) - 1;
+  if (draft.found.row === 0) draft.found.row = row;
+}
+
 /** Adds a line to its rebuild and to the control totals. */
 function book(line: DraftLine, row: number, drafts: Draft[], control: Control): void {
   const { draft, cents } = line;
-  if (draft && draft.place < 0) {
-    draft.place = drafts.push(draft) - 1;
-    if (draft.found.row === 0) draft.found.row = row;
-  }
+  if (draft) place(draft, row, drafts);
   if (line.kind === 'entry' || line.kind === 'purchase') {
     const key = line.kind === 'purchase' ? PURCHASE : (line.category ?? '');
     control.centsByCategory[key] = (control.centsByCategory[key] ?? 0) + cents;

@@ -43,11 +43,12 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
     const sold = settleSale(row, plan.columns);
     addAll(row, true);
     const draft = newDraft(existing ? existing.tag : tagFor(name), existing, line, { ...sold.known, dates: sold.dates, spellings: [name] });
-    return taken(sold.figures.map((figure) => lineOf(figure, draft, row, line)), sold.asides);
+    return { ...taken(sold.figures.map((figure) => lineOf(figure, draft, row, line))), cells: sold.asides, draft };
   };
 }
 
-const isBooked = (existing: ExistingRebuild | null) => existing !== null && (existing.hasEntries || existing.hasPurchase);
+const isBooked = (existing: ExistingRebuild | null) =>
+  existing !== null && (existing.hasEntries || existing.hasPurchase || existing.hasLeft || existing.hasBaseline);
 const costOf = (row: VehicleCells) =>
   row.figures.reduce((sum, { column, cents }) => (column.meaning === 'cost' || column.meaning === 'purchase' ? sum + cents : sum), 0);
 

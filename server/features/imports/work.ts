@@ -1,0 +1,99 @@
+import BetterSqlite3 from 'better-sqlite3';
+import { chainedAfterLast } from './trail-record.ts';
+import type { ImportSettings, Reading } from '#shared/contracts/imports.ts';
+import { removeImported, undoObstacle } from '../../books/unimport.ts';
+import { preparePragmas, type RawDatabase } from '../../platform/database.ts';
+import { type Brought, type CommitTask, commitRows, ReadingOutdated } from './commit-rows.ts';
+import { readFile } from './read/read-file.ts';
+import { shopBooks } from './shop-books.ts';
+import { bytesOfFile } from './text/bytes.ts';
+
+/** What the worker is asked to do with one import. Everything in it can be sent to another thread. */
+interface Task {
+  readonly databaseFile: string;
+  readonly shopId: string;
+  readonly importId: string;
+  readonly now: Date;
+}
+export interface ReadTask extends Task {
+  readonly kind: 'read';
+  readonly file: string;
+  readonly settings: ImportSettings;
+}
+export interface CommitJob extends Task, Omit<CommitTask, 'now'> {
+  readonly kind: 'commit';
+  readonly file: string;
+  readonly requestId: string;
+}
+export interface UndoTask extends Task {
+  readonly kind: 'undo';
+  readonly userId: string;
+  readonly requestId: string;
+}
+export type Job = ReadTask | CommitJob | UndoTask;
+
+/** How a job ended. 'outdated': the books changed, so the file must be read again; `obstacle`: why undo is refused. */
+export type Done =
+  | { readonly kind: 'read'; readonly reading: Reading }
+  | { readonly kind: 'committed' }
+  | { readonly kind: 'outdated' }
+  | { readonly kind: 'undone'; readonly obstacle: string | null };
+
+/** Does a job on a connection of its own. Whoever calls holds the write lock for a commit or an undo. */
+export function work(job: Job, onPart: (share: number) => void): Done {
+  const raw = new BetterSqlite3(job.databaseFile);
+  try {
+    preparePragmas(raw);
+    if (job.kind === 'read') {
+      return { kind: 'read', reading: readFile(bytesOfFile(job.file), shopBooks(raw, job.shopId, job.now), job.settings, onPart) };
+    }
+    return job.kind === 'commit' ? commitJob(raw, job, onPart) : undoJob(raw, job);
+  } finally {
+    raw.close();
+  }
+}
+
+function commitJob(raw: RawDatabase, job: CommitJob, onPart: (share: number) => void): Done {
+  try {
+    const commit = raw.transaction(() => {
+      const brought = commitRows(raw, bytesOfFile(job.file), job, onPart);
+      const version = raiseBooksVersion(raw, job.shopId);
+      raw
+        .prepare(
+          `UPDATE imports SET state = 'committed', committed_at = ?, committed_version = ?, reading = json_set(reading, '$.brought', json(?)), version = version + 1
+           WHERE shop_id = ? AND id = ?`,
+        )
+        .run(job.at, version, JSON.stringify(brought), job.shopId, job.importId);
+      leave(raw, job, 'commit import', null, job.control);
+    });
+    commit.immediate();
+    return { kind: 'committed' };
+  } catch (error) {
+    if (error instanceof ReadingOutdated) return { kind: 'outdated' };
+    throw error;
+  }
+}
+
+function undoJob(raw: RawDatabase, job: UndoTask): Done {
+  const undo = raw.transaction((): Done => {
+    const row = raw.prepare(`SELECT json_extract(reading, '$.brought') AS brought FROM imports WHERE shop_id = ? AND id = ?`).get(job.shopId, job.importId);
+    const brought = JSON.parse((row as { brought: string }).brought) as Brought;
+    const obstacle = undoObstacle(raw, job.shopId, job.importId, brought.filled);
+    if (obstacle !== null) return { kind: 'undone', obstacle };
+    removeImported(raw, job.shopId, job.importId, brought);
+    raiseBooksVersion(raw, job.shopId);
+    raw.prepare(`UPDATE imports SET state = 'undone', undone_at = ?, version = version + 1 WHERE shop_id = ? AND id = ?`).run(job.now.toISOString(), job.shopId, job.importId);
+    leave(raw, job, 'undo import', { state: 'committed' }, { state: 'undone' });
+    return { kind: 'undone', obstacle: null };
+  });
+  return undo.immediate();
+}
+
+function raiseBooksVersion(raw: RawDatabase, shopId: string): number {
+  return raw.prepare('UPDATE shops SET books_version = books_version + 1 WHERE id = ? RETURNING books_version').pluck().get(shopId) as number;
+}
+
+function leave(raw: RawDatabase, job: CommitJob | UndoTask, action: string, before: unknown, after: unknown): void {
+  const { shopId, userId, requestId, importId } = job;
+  chainedAfterLast(raw, { shopId, actorId: userId, requestId, action, subject: 'import', subjectId: importId, before, after });
+}

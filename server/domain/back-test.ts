@@ -84,18 +84,26 @@ export function walkForward(
     options.knowledge === 'sequence' ? i : knownBefore(outcomes, outcome, i),
   );
   const rules = rulesFor(outcomes, options.withTwoPart);
-  const trials = options.levels.map(() => new Map<RuleName, Trial[]>(rules.map(([name]) => [name, []])));
+  const runs = options.levels.map((level) => ({ level, rules: rules.map((rule) => startOf(rule, outcomes.length)) }));
   // A rule takes in each outcome once, so rebuilds are visited by what was known, not by when they left.
-  for (const i of [...histories.keys()].sort((a, b) => (histories[a] ?? 0) - (histories[b] ?? 0))) {
-    for (const [l, level] of options.levels.entries()) {
-      for (const [name, rule] of rules) {
-        const list = trials[l]?.get(name);
-        if (list) list[i] = trial(outcomes[i] as PlannedOutcome, histories[i] ?? 0, level, rule);
-      }
-    }
-  }
+  const visits = [...histories.keys()].sort((a, b) => (histories[a] ?? 0) - (histories[b] ?? 0));
+  for (const i of visits) for (const run of runs) visit(run, i, outcomes[i] as PlannedOutcome, histories[i] ?? 0);
   const skippedCount = histories.filter((size) => size < SHORTEST_HISTORY).length;
-  return options.levels.map((level, l) => summary(level, skippedCount, trials[l] ?? new Map()));
+  return runs.map((run) => {
+    const scored = run.rules[0]?.tally.scored ?? 0;
+    return {
+      level: run.level,
+      skippedCount,
+      notAttainableCount: outcomes.length - skippedCount - scored,
+      scores: Object.fromEntries(run.rules.map(({ name, tally }) => [name, scoreOf(tally)])),
+      trials: Object.fromEntries(run.rules.flatMap(({ name, trials }) => (trials ? [[name, trials]] : []))),
+    };
+  });
+}
+
+interface Run {
+  readonly level: Level;
+  readonly rules: readonly ReturnType<typeof startOf>[];
 }
 
 function rulesFor(outcomes: readonly PlannedOutcome[], withTwoPart: boolean): [RuleName, HistoryRule][] {
@@ -104,15 +112,43 @@ function rulesFor(outcomes: readonly PlannedOutcome[], withTwoPart: boolean): [R
   return [['percent', percentOverTime(outcomes)], ...twoPart, ...flat];
 }
 
-function summary(level: Level, skippedCount: number, trials: ReadonlyMap<RuleName, readonly Trial[]>): BackTestLevel {
-  const unasked = (trials.get('percent') ?? []).filter((one) => one.asked === null).length;
-  return {
-    level,
-    skippedCount,
-    notAttainableCount: unasked - skippedCount,
-    scores: Object.fromEntries([...trials].map(([name, list]) => [name, score(list)])),
-    trials: Object.fromEntries(trials),
-  };
+/** A rule before its first trial; flat ones keep no trials, only their sums. */
+function startOf([name, rule]: [RuleName, HistoryRule], size: number) {
+  const tally = { scored: 0, covered: 0, shortCents: 0, unusedCents: 0, reserveCents: 0 };
+  const trials = name.startsWith('flat') ? null : Array.from<Trial>({ length: size });
+  return { name, rule, tally, trials };
+}
+
+function visit({ level, rules }: Run, i: number, outcome: PlannedOutcome, historySize: number): void {
+  const { id, exitOn, estimateCents, overrunCents } = outcome;
+  const k = rankAt(historySize, level);
+  const canAsk = historySize >= SHORTEST_HISTORY && k <= historySize;
+  for (const { rule, tally, trials } of rules) {
+    const asked = canAsk ? judge(rule(historySize, k, estimateCents), overrunCents) : null;
+    if (trials) trials[i] = { id, exitOn, estimateCents, overrunCents, historySize, k, asked };
+    if (asked === null) continue;
+    tally.scored += 1;
+    tally.covered += asked.isCovered ? 1 : 0;
+    tally.shortCents += asked.shortCents;
+    tally.unusedCents += asked.unusedCents;
+    tally.reserveCents += asked.reserveCents;
+  }
+}
+
+function judge({ reserveCents, uplift }: Asked, overrunCents: number): NonNullable<Trial['asked']> {
+  const shortCents = Math.max(0, overrunCents - reserveCents);
+  const unusedCents = Math.max(0, reserveCents - Math.max(0, overrunCents));
+  return { reserveCents, uplift, isCovered: shortCents === 0, shortCents, unusedCents };
+}
+
+function scoreOf({
+  scored,
+  covered,
+  shortCents,
+  unusedCents,
+  reserveCents,
+}: ReturnType<typeof startOf>['tally']): Score {
+  return { ...wilson(covered, scored), shortCents, unusedCents, reserveCents };
 }
 
 /** How many of the outcomes before place `i` had left the shop before this one was bought. No day: nothing known. */
@@ -125,28 +161,4 @@ function knownBefore(outcomes: readonly PlannedOutcome[], { boughtOn }: PlannedO
     else high = middle;
   }
   return low;
-}
-
-function trial(outcome: PlannedOutcome, historySize: number, level: Level, rule: HistoryRule): Trial {
-  const { id, exitOn, estimateCents, overrunCents } = outcome;
-  const k = rankAt(historySize, level);
-  const base = { id, exitOn, estimateCents, overrunCents, historySize, k };
-  if (historySize < SHORTEST_HISTORY || k > historySize) return { ...base, asked: null };
-  const { reserveCents, uplift } = rule(historySize, k, estimateCents);
-  const shortCents = Math.max(0, overrunCents - reserveCents);
-  const unusedCents = Math.max(0, reserveCents - Math.max(0, overrunCents));
-  return { ...base, asked: { reserveCents, uplift, isCovered: shortCents === 0, shortCents, unusedCents } };
-}
-
-function score(trials: readonly Trial[]): Score {
-  let [scored, covered, shortCents, unusedCents, reserveCents] = [0, 0, 0, 0, 0];
-  for (const { asked } of trials) {
-    if (asked === null) continue;
-    scored += 1;
-    covered += asked.isCovered ? 1 : 0;
-    shortCents += asked.shortCents;
-    unusedCents += asked.unusedCents;
-    reserveCents += asked.reserveCents;
-  }
-  return { ...wilson(covered, scored), shortCents, unusedCents, reserveCents };
 }

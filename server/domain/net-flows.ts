@@ -21,13 +21,20 @@ export function netFlows(flows: Iterable<Flow>): Map<number, number> {
 
 /** Days without a net flow are dropped; null unless money went both ways. */
 export function toSeries(net: NetFlows): Series | null {
-  const flows = [...net].filter(([, cents]) => cents !== 0).sort(([a], [b]) => a - b);
-  const first = flows[0]?.[0] ?? 0;
-  if (!flows.some(([, cents]) => cents > 0) || !flows.some(([, cents]) => cents < 0)) return null;
-  return {
-    years: Float64Array.from(flows, ([day]) => (day - first) / 365),
-    cents: Float64Array.from(flows, ([, cents]) => cents),
-  };
+  const days = Float64Array.from(net.keys()).sort();
+  const years: number[] = [];
+  const cents: number[] = [];
+  let [first, low, high] = [0, 0, 0];
+  for (const day of days) {
+    const amount = net.get(day) ?? 0;
+    if (amount === 0) continue;
+    if (cents.length === 0) first = day;
+    years.push((day - first) / 365);
+    cents.push(amount);
+    low = Math.min(low, amount);
+    high = Math.max(high, amount);
+  }
+  return low < 0 && high > 0 ? { years: new Float64Array(years), cents: new Float64Array(cents) } : null;
 }
 
 /**

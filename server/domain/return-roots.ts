@@ -1,9 +1,9 @@
 import { presentValue, type Series } from './net-flows.ts';
 
 const STEP = 0.01;
-/** ln(1 + r) at r = −0.9999 and at r = 1,000,000. */
-const LOWEST = Math.log(0.0001);
-const HIGHEST = Math.log(1_000_001);
+/** ln(1 + r) at r = −0.9999 and at r = 1,000,000, each with room for the rounding of a root that lies on it. */
+const LOWEST = Math.log(0.0001) - 1e-12;
+const HIGHEST = Math.log(1_000_001) + 1e-12;
 
 /** Up to `wanted` roots x, nearest to 0 first: rings of 0.01 outward from 0, both ways, refined where the sign turns. */
 export function roots(series: Series, wanted: number): number[] {

@@ -29,8 +29,12 @@ function walkForwardMicro(): void {
   type Input = { actual_estimate_cents_in_order: [number, number][] };
   const { input, expected } = publicCheck<Input, Record<string, WalkForward>>('walk-forward-micro');
   const outcomes = input.actual_estimate_cents_in_order.map(([actual, estimateCents], i) => ({
-    ...{ id: String(i + 1), exitOn: '2025-01-01', boughtOn: null, surpriseCents: 0 },
-    ...{ estimateCents, overrunCents: actual - estimateCents },
+    id: String(i + 1),
+    exitOn: '2025-01-01',
+    boughtOn: null,
+    surpriseCents: 0,
+    estimateCents,
+    overrunCents: actual - estimateCents,
   }));
   const levels = Object.keys(expected).map((percent) => ({ p: Number(percent), q: 100 }));
   for (const result of walkForward(outcomes, { levels, knowledge: 'sequence', withTwoPart: false })) {

@@ -1,4 +1,6 @@
-import { mean, median, quantile, sampleDeviation, tInterval, wilson } from '../../server/domain/statistics.ts';
+import { overrun } from '../../server/domain/overrun.ts';
+import { mean, quantile, sampleDeviation, tInterval, wilson } from '../../server/domain/statistics.ts';
+import { buildOutcome } from '../support/facts.ts';
 import { expectAllNear, expectNear, expectWithin, publicCheck } from '../support/public-check.ts';
 
 type Checks = Record<string, () => void>;
@@ -97,9 +99,9 @@ export const statisticsChecks: Checks = {
   },
   'ratios-pooled-mean': () => {
     type Input = { estimate: number[]; actual: number[] };
-    const { input, expected } = publicCheck<Input, { median: number; mean: number }>('ratios-pooled-mean');
-    const each = input.estimate.map((estimate, i) => ((input.actual[i] ?? 0) - estimate) / estimate);
-    expectNear(mean(each), expected.mean, 1e-12);
-    expectNear(median(each), expected.median, 1e-12);
+    type Expected = { pooled: number; mean: number; median: number };
+    const { input, expected } = publicCheck<Input, Expected>('ratios-pooled-mean');
+    const one = overrun(input.estimate.map((estimate, i) => buildOutcome(String(i), input.actual[i] ?? 0, estimate)));
+    expectAllNear([one.pooled, one.mean, one.median], [expected.pooled, expected.mean, expected.median], 1e-12);
   },
 };

@@ -3,6 +3,7 @@ import type { AccessTable } from './platform/http.ts';
 const OWNER = ['owner'] as const;
 const BOOKS = ['owner', 'bookkeeper'] as const;
 const READS_BOOKS = ['owner', 'bookkeeper', 'accountant'] as const;
+const WORKS = ['owner', 'bookkeeper', 'mechanic'] as const;
 const SHOP = ['owner', 'bookkeeper', 'mechanic', 'partner', 'accountant'] as const;
 
 /**
@@ -34,4 +35,31 @@ export const access: AccessTable = {
   'PATCH /api/shop/lists/:kind/:itemId': OWNER,
   'POST /api/shop/workers': BOOKS,
   'PATCH /api/shop/workers/:workerId': BOOKS,
+
+  'GET /api/rebuilds': READS_BOOKS,
+  'GET /api/rebuilds/names': READS_BOOKS,
+  'GET /api/rebuilds/:rebuildId': READS_BOOKS,
+  'POST /api/rebuilds': BOOKS,
+  'PATCH /api/rebuilds/:rebuildId': BOOKS,
+  'POST /api/rebuilds/:rebuildId/estimates': BOOKS,
+  'PATCH /api/rebuilds/:rebuildId/estimates/:estimateId': BOOKS,
+  'POST /api/rebuilds/:rebuildId/estimates/:estimateId/lock': BOOKS,
+
+  'GET /api/entries': READS_BOOKS,
+  'GET /api/entries/:entryId': READS_BOOKS,
+  'POST /api/entries': BOOKS,
+  'POST /api/entries/split': BOOKS,
+  'PATCH /api/entries/:entryId': BOOKS,
+  'POST /api/entries/:entryId/void': BOOKS,
+  'POST /api/receipts': WORKS,
+
+  'GET /api/hours': READS_BOOKS,
+  'POST /api/hours': BOOKS,
+  'PATCH /api/hours/:hoursId': BOOKS,
+  'POST /api/hours/:hoursId/void': BOOKS,
+  'GET /api/board': WORKS,
+  'GET /api/my-hours': WORKS,
+  'POST /api/my-hours': WORKS,
+  'PATCH /api/my-hours/:hoursId': WORKS,
+  'POST /api/my-hours/:hoursId/void': WORKS,
 };

@@ -3,7 +3,10 @@ import express, { type Express } from 'express';
 import helmet from 'helmet';
 import { access } from './access.ts';
 import { healthRoutes } from './features/health/routes.ts';
+import { hoursRoutes } from './features/hours/routes.ts';
+import { ledgerRoutes } from './features/ledger/routes.ts';
 import { peopleRoutes } from './features/people/routes.ts';
+import { rebuildsRoutes } from './features/rebuilds/routes.ts';
 import { sessionRoutes } from './features/session/routes.ts';
 import { shopRoutes } from './features/shop/routes.ts';
 import { clientFiles } from './platform/client-files.ts';
@@ -19,6 +22,9 @@ const routes: Route[] = [
   ...sessionRoutes,
   ...peopleRoutes,
   ...shopRoutes,
+  ...rebuildsRoutes,
+  ...ledgerRoutes,
+  ...hoursRoutes,
 ];
 
 /** The whole application, ready to listen; tests use this same function. */

@@ -6,6 +6,12 @@ const snake = (name: string) => name.replace(/[A-Z]/g, (letter) => `_${letter.to
 /** Some fields of a T: a field left out (or undefined) stays as it is. */
 export type Patch<T> = { readonly [K in keyof T]?: T[K] | undefined };
 
+/** What `before` becomes by a change: fields left out stay, null clears. */
+export function patched<T extends object>(before: T, change: Patch<T>): T {
+  const given = Object.entries(change).filter(([, value]) => value !== undefined);
+  return { ...before, ...Object.fromEntries(given) };
+}
+
 /** A row as an object of type T. Columns that start with `is_` become booleans; null stays null. */
 export function fromRow<T>(row: object): T {
   const result: Record<string, unknown> = {};

@@ -66,7 +66,10 @@ export const rebuildSchema = z.object({
 });
 export type Rebuild = z.output<typeof rebuildSchema>;
 
-/** One line of the list. Money is absent (null) for a mechanic's list, which has its own route. */
+/**
+ * One line of the list. `daysHeld` runs to the day it left, or to today. `costCents` is all-in: purchase and entries;
+ * null while the purchase is unknown. `keptCents` only for one that has left. A mechanic's list has its own route.
+ */
 export const rebuildRowSchema = z.object({
   id: idSchema,
   tag: z.string(),
@@ -87,6 +90,8 @@ export const rebuildRowSchema = z.object({
   estimateCents: z.int().nullable(),
   planningCents: z.int(),
   surpriseCents: z.int(),
+  /** (planning actual − locked estimate) ÷ locked estimate, a fraction; null = no locked estimate. */
+  overrunRate: z.number().nullable(),
 });
 export type RebuildRow = z.output<typeof rebuildRowSchema>;
 
@@ -102,6 +107,18 @@ export const rebuildsQuerySchema = z.strictObject({
   seen: z.enum(['yes', 'no', 'unknown']).optional(),
   year: z.coerce.number().int().min(1950).max(2100).optional(),
   find: z.string().max(80).optional(),
+});
+
+/** Over everything that the filter matches. Money only of those whose purchase is known. */
+export const rebuildsSummarySchema = z.object({
+  total: z.int(),
+  leftCount: z.int(),
+  lossCount: z.int(),
+  /** Left, but the purchase is not known: in no money figure. */
+  noPurchaseCount: z.int(),
+  keptCents: z.int(),
+  openCount: z.int(),
+  openCostCents: z.int(),
 });
 
 /** An estimate: the plan before work starts (the baseline once locked), or a later revision beside it. */
@@ -131,7 +148,70 @@ export const estimateSchema = z.object({
 });
 export type Estimate = z.output<typeof estimateSchema>;
 
+/** One category of one rebuild: the locked plan against what it came to. Cents. */
+export const categoryOutcomeSchema = z.object({
+  categoryId: idSchema,
+  name: z.string(),
+  /** null = no locked estimate at all; 0 = locked, nothing planned here. */
+  estimateCents: z.int().nullable(),
+  /** What was paid: the sum of all entries. */
+  paidCents: z.int(),
+  /** What a plan must expect: without chosen extras, free things at market value. This is what the gap bar shows. */
+  planningCents: z.int(),
+  surpriseCents: z.int(),
+  extraCents: z.int(),
+  freeCents: z.int(),
+  entryCount: z.int(),
+});
+export type CategoryOutcome = z.output<typeof categoryOutcomeSchema>;
+
+/** Days between two of the marking dates. `days` is null while one is unknown. */
+export const stageDaysSchema = z.object({ name: z.string(), days: z.int().nullable() });
+
+/** Something to look at twice; it never blocks. `pointer` names the field. */
+export const warningSchema = z.object({ pointer: z.string(), detail: z.string() });
+
+/** A caution where the work can hurt. `asked` names the date whose marking brings it up; null = shown always. */
+export const cautionSchema = z.object({
+  about: z.string(),
+  text: z.string(),
+  asked: z.enum(['roadworthyOn', 'listedOn', 'soldOn']).nullable(),
+});
+export type Caution = z.output<typeof cautionSchema>;
+
+export const vinCheckSchema = z.object({
+  isValid: z.boolean(),
+  problem: z.enum(['length', 'character', 'check digit']).nullable(),
+  suggestions: z.array(z.string()),
+});
+
+export const rebuildDetailSchema = z.object({
+  rebuild: rebuildSchema,
+  /** The line that the list shows of it, sums included. */
+  row: rebuildRowSchema,
+  secondDamageName: z.string().nullable(),
+  vinCheck: vinCheckSchema.nullable(),
+  warnings: z.array(warningSchema),
+  cautions: z.array(cautionSchema),
+  estimates: z.array(estimateSchema),
+  categories: z.array(categoryOutcomeSchema),
+  stageDays: z.array(stageDaysSchema),
+  paidSeconds: z.int().nullable(),
+  plannedSeconds: z.int().nullable(),
+  undatedCount: z.int(),
+  unknownForeseenCount: z.int(),
+  lateCount: z.int(),
+  lateCents: z.int(),
+  source: z.object({ importId: idSchema, fileName: z.string(), row: z.int().nullable() }).nullable(),
+});
+export type RebuildDetail = z.output<typeof rebuildDetailSchema>;
+
+/** What a picker of rebuilds needs. */
+export const rebuildNameSchema = z.object({ id: idSchema, tag: z.string(), name: z.string(), isOpen: z.boolean() });
+export type RebuildName = z.output<typeof rebuildNameSchema>;
+
 const rebuildParams = z.strictObject({ rebuildId: idSchema });
+const estimateParams = rebuildParams.extend({ estimateId: idSchema });
 
 export const rebuildsApi = {
   list: {
@@ -139,7 +219,20 @@ export const rebuildsApi = {
     path: '/api/rebuilds',
     summary: 'Rebuilds with what each cost and brought, a hundred a page',
     query: rebuildsQuerySchema,
-    response: z.object({ rows: z.array(rebuildRowSchema), total: z.int(), next: nextSchema }),
+    response: z.object({ rows: z.array(rebuildRowSchema), summary: rebuildsSummarySchema, next: nextSchema }),
+  },
+  names: {
+    method: 'GET',
+    path: '/api/rebuilds/names',
+    summary: 'Tag and name of every rebuild, open ones first',
+    response: z.array(rebuildNameSchema),
+  },
+  get: {
+    method: 'GET',
+    path: '/api/rebuilds/:rebuildId',
+    summary: 'One rebuild: plan against actual, dates, estimates, warnings and cautions',
+    params: rebuildParams,
+    response: rebuildDetailSchema,
   },
   create: {
     method: 'POST',
@@ -156,6 +249,32 @@ export const rebuildsApi = {
     params: rebuildParams,
     body: rebuildChangeSchema,
     response: rebuildSchema,
+    edits: true,
+  },
+  addEstimate: {
+    method: 'POST',
+    path: '/api/rebuilds/:rebuildId/estimates',
+    summary: 'Make the plan, or a revision beside the locked one',
+    params: rebuildParams,
+    body: estimateFieldsSchema,
+    response: estimateSchema,
+    once: true,
+  },
+  changeEstimate: {
+    method: 'PATCH',
+    path: '/api/rebuilds/:rebuildId/estimates/:estimateId',
+    summary: 'Change an estimate that is not locked',
+    params: estimateParams,
+    body: estimateFieldsSchema.partial(),
+    response: estimateSchema,
+    edits: true,
+  },
+  lockEstimate: {
+    method: 'POST',
+    path: '/api/rebuilds/:rebuildId/estimates/:estimateId/lock',
+    summary: 'Lock an estimate; the locked plan is what every overrun is against',
+    params: estimateParams,
+    response: estimateSchema,
     edits: true,
   },
 } as const satisfies FeatureApi;

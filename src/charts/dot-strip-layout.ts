@@ -26,13 +26,10 @@ export type StripSize = { width: number; labelRoom: number; figureRoom: number; 
 
 /** Rates to pixels; equal dots are stacked away from the middle line, in order, within the row. */
 export function dotStripLayout(rows: readonly StripRow[], size: StripSize) {
-  const all = rows.flatMap((row) => [...row.dots.map((dot) => dot.rate), row.low ?? 0, row.high ?? 0]);
-  const low = Math.max(LOW_END, Math.min(-0.25, ...all));
-  const high = Math.min(HIGH_END, Math.max(0.5, ...all));
+  const { low, high } = stripDomain(rows);
   const range: [number, number] = [size.labelRoom + 8, size.width - size.figureRoom - 8];
-  const scale = scaleLinear<number>({ domain: [low, high], range, nice: 4 });
-  const [from = low, to = high] = scale.domain();
-  const toX = (rate: number) => scale(Math.min(to, Math.max(from, rate)));
+  const scale = scaleLinear<number>({ domain: [low, high], range });
+  const toX = (rate: number) => scale(Math.min(high, Math.max(low, rate)));
   const showDots = rows.reduce((sum, row) => sum + row.dots.length, 0) <= DOTS_AT_MOST;
   const room = Math.max(2, Math.floor((range[1] - range[0]) / 70));
   return {
@@ -46,9 +43,21 @@ export function dotStripLayout(rows: readonly StripRow[], size: StripSize) {
         middleX: row.middle === null ? null : toX(row.middle),
         lowX: row.low === null ? null : toX(row.low),
         highX: row.high === null ? null : toX(row.high),
-        placed: showDots ? stack(row.dots, y, toX, (rate) => rate < from || rate > to) : [],
+        placed: showDots ? stack(row.dots, y, toX, (rate) => rate < low || rate > high) : [],
       };
     }),
+  };
+}
+
+/** From the 3rd to the 97th of a hundred dots, every row's own spread included: one far rebuild must not flatten the rest. */
+export function stripDomain(rows: readonly StripRow[]): { low: number; high: number } {
+  const dots = rows.flatMap((row) => row.dots.map((dot) => dot.rate)).sort((a, b) => a - b);
+  const spread = rows.flatMap((row) => [row.low ?? 0, row.high ?? 0]);
+  const near = dots[Math.floor(dots.length * 0.03)] ?? 0;
+  const far = dots[Math.ceil(dots.length * 0.97) - 1] ?? 0;
+  return {
+    low: Math.max(LOW_END, Math.min(-0.2, near - 0.05, ...spread)),
+    high: Math.min(HIGH_END, Math.max(0.4, far + 0.05, ...spread)),
   };
 }
 

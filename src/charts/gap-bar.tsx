@@ -20,9 +20,9 @@ const ROOM = 1.5;
 /**
  * The gap bar, our one sign: outline = locked estimate, solid ink = spent as foreseen, rust beyond the outline = over,
  * hatch = surprise, white inside = under. `lockedCents`, `foreseenCents`, `surpriseCents`, `overrunRate`, `format`,
- * `maxCents`, `width` (132), `height` (14), `hideLabel`.
+ * `maxCents`, `width` (96), `height` (14), `hideLabel`.
  */
-export function GapBar({ overrunRate, format, maxCents, width = 132, height = 14, hideLabel, ...data }: Props) {
+export function GapBar({ overrunRate, format, maxCents, width = 96, height = 14, hideLabel, ...data }: Props) {
   const id = useId();
   const full = maxCents ?? (data.lockedCents ?? data.foreseenCents + data.surpriseCents) * ROOM;
   const shapes = gapBarLayout(data, { width: width - 2, maxCents: full });

@@ -16,7 +16,7 @@ export function rangeLinesLayout(
   size: { width: number; labelRoom: number; rowHeight: number; lineAt: number; noteRoom: number },
 ) {
   const values = rows.flatMap((row) => [row.low ?? 0, row.high ?? 0, row.value ?? 0]);
-  const axis = valueAxis(values, [size.labelRoom + 8, size.width - size.noteRoom], 64);
+  const axis = valueAxis(values, [size.labelRoom + 18, size.width - size.noteRoom], 64);
   const x = (rate: number | null) => (rate === null ? null : axis.scale(rate));
   return {
     axis,

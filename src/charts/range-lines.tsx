@@ -46,6 +46,7 @@ function Painted({ rows, format, width }: { rows: readonly RangeRow[]; format: F
       />
       {shapes.rows.map((row) => (
         <g key={row.label}>
+          {isNarrow && <rect x={0} y={row.y - 27} width={width} height={18} className="ground" />}
           <text x={0} y={isNarrow ? row.y - 13 : row.y + 4} className="halo">
             <tspan className="strong">{row.label}</tspan>
             <tspan className="soft" dx={8}>

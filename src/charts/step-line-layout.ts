@@ -10,7 +10,7 @@ export type StepPoint = { on: Day; cents: number; label: string; href?: string |
 export type StepSeries = { points: readonly StepPoint[]; start: Day; end: Day; knownTo: Day | null };
 
 export type Size = { width: number; height: number };
-export const STEP_MARGIN = { top: 26, right: 14, bottom: 26, left: 52 };
+export const STEP_MARGIN = { top: 42, right: 14, bottom: 26, left: 52 };
 
 /** Both years laid over each other by day of the year; the axis holds both and zero. */
 export function stepLineLayout(now: StepSeries, before: StepSeries | null, size: Size) {

@@ -131,8 +131,10 @@ function EndLabels(props: {
   const past = shapes.before?.at(-1);
   if (!end) return null;
   const nowY = end.y - 11;
-  const isNear = past !== undefined && Math.abs(past.y - end.y) < 34;
-  const pastY = past && (isNear && past.y <= end.y ? Math.min(past.y - 8, nowY - 16) : past.y + 17);
+  // The line before rises to its label from the left, so the label goes over its highest late step, and over this year's label.
+  const late = (shapes.before ?? []).filter((place) => place.x > width * 0.6).map((place) => place.y);
+  const over = Math.min(...late, past?.y ?? end.y) - 9;
+  const pastY = Math.abs(over - nowY) < 17 ? Math.min(over, nowY - 17) : over;
   return (
     <>
       {past && beforeCents !== null && (

@@ -80,7 +80,7 @@ function Painted({
         bottom={height - bottom}
         write={(day) => format.number(day)}
       />
-      <text x={left} y={height - 6} className="soft">
+      <text x={left} y={height - 3} className="soft">
         {axisLabel}
       </text>
       {shapes.groups.map((group, at) => (
@@ -90,8 +90,8 @@ function Painted({
           x={(place) => place.x}
           y={(place) => place.y}
           curve={curveStepAfter}
-          stroke={at === 0 ? 'var(--color-steel)' : 'var(--color-ink)'}
-          strokeWidth={at === 0 ? 2.75 : 1.5}
+          stroke={at === 0 ? 'var(--color-steel)' : 'var(--color-soft)'}
+          strokeWidth={at === 0 ? 2.75 : 1.25}
           strokeDasharray={DASHES[at % DASHES.length] ?? ''}
         />
       ))}
@@ -103,7 +103,10 @@ function Painted({
             fill="none"
           />
           <text x={width - right + 16} y={group.labelY + 4} className={at === 0 ? 'strong gain' : ''}>
-            {group.label} <tspan className="soft">{group.n}</tspan>
+            {group.label}
+            <tspan className="soft" dx={6}>
+              {group.n}
+            </tspan>
           </text>
         </g>
       ))}

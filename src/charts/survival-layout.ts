@@ -5,7 +5,7 @@ import { spreadLabels } from './spread-labels.ts';
 export type SurvivalStep = { day: number; share: number; low: number | null; high: number | null };
 export type SurvivalGroup = { label: string; n: number; steps: readonly SurvivalStep[]; medianDays: number | null };
 
-export const SURVIVAL_MARGIN = { top: 12, bottom: 40, left: 46, right: 108 };
+export const SURVIVAL_MARGIN = { top: 12, bottom: 46, left: 46, right: 108 };
 
 type Place = { x: number; y: number };
 
@@ -30,7 +30,7 @@ export function survivalLayout(groups: readonly SurvivalGroup[], size: { width: 
     top + 4,
     size.height - bottom - 2,
   );
-  const room = Math.max(2, Math.floor((size.width - left - right) / 60));
+  const room = Math.max(2, Math.floor((size.width - left - right) / 46));
   return {
     x,
     y,

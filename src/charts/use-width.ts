@@ -7,9 +7,9 @@ export function useWidth<E extends HTMLElement>(): [RefObject<E | null>, number 
   useLayoutEffect(() => {
     const element = ref.current;
     if (!element) return;
-    const measure = () => setWidth(Math.floor(element.getBoundingClientRect().width) || null);
-    measure();
-    const observer = new ResizeObserver(measure);
+    const take = (size: number) => setWidth(Math.floor(size) || null);
+    take(element.getBoundingClientRect().width);
+    const observer = new ResizeObserver(([entry]) => entry && take(entry.contentRect.width));
     observer.observe(element);
     return () => observer.disconnect();
   }, []);

@@ -12,8 +12,8 @@ export type Send = {
   /** The version that was read; a stale one answers 412. */
   version?: number;
   signal?: AbortSignal;
-  /** The caller deals with a 401 itself (sign-in, the session query). */
-  quiet?: boolean;
+  /** About the session itself: it belongs to no shop, and the caller deals with a 401. */
+  isAboutSession?: boolean;
 };
 
 /**
@@ -38,13 +38,13 @@ export async function send(request: Send): Promise<unknown> {
 
 async function refused(reply: Response, request: Send): Promise<ApiProblem> {
   const problem = await ApiProblem.from(reply);
-  if (!request.quiet && (isSessionEnded(problem) || isOtherShop(problem))) reportProblem(problem);
+  if (!request.isAboutSession && (isSessionEnded(problem) || isOtherShop(problem))) reportProblem(problem);
   return problem;
 }
 
 function headersOf(request: Send): Headers {
   const headers = new Headers({ accept: 'application/json' });
-  const shop = shownShop();
+  const shop = request.isAboutSession ? null : shownShop();
   if (shop) headers.set('Panelgap-Shop', shop);
   if (request.body !== undefined && !(request.body instanceof FormData))
     headers.set('Content-Type', 'application/json');

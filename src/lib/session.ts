@@ -5,7 +5,7 @@ import { send } from './send.ts';
 
 /** Who is signed in and which shop the session is in; null when nobody is. */
 async function readSession(): Promise<Session | null> {
-  const reply = await send({ method: 'GET', url: '/api/session', quiet: true }).catch((problem: unknown) => {
+  const reply = await send({ method: 'GET', url: '/api/session', isAboutSession: true }).catch((problem: unknown) => {
     if (problem instanceof ApiProblem && problem.status === 401) return null;
     throw problem;
   });
@@ -26,19 +26,19 @@ export function useSession(): Session {
 
 /** Signs in. Throws ApiProblem when the address or the password is wrong. */
 export async function signIn(body: { email: string; password: string }): Promise<void> {
-  await send({ method: 'POST', url: '/api/session', body, quiet: true });
+  await send({ method: 'POST', url: '/api/session', body, isAboutSession: true });
 }
 
 /** Ends the session on the server; everything cached goes with the page that is then loaded. */
 export async function signOut(): Promise<void> {
-  await send({ method: 'DELETE', url: '/api/session', quiet: true });
+  await send({ method: 'DELETE', url: '/api/session', isAboutSession: true });
 }
 
 /** Moves the session to another of the person's shops and forgets what was read in the one before. */
 export function useSwitchShop(): (shopId: string) => Promise<void> {
   const client = useQueryClient();
   return async (shopId) => {
-    await send({ method: 'PUT', url: '/api/session/shop', body: { shopId }, quiet: true });
+    await send({ method: 'PUT', url: '/api/session/shop', body: { shopId }, isAboutSession: true });
     client.removeQueries({ predicate: (query) => query.queryKey[0] !== 'session' });
     await client.refetchQueries({ queryKey: sessionQuery().queryKey });
   };

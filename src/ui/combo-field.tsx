@@ -43,7 +43,7 @@ export function ComboField({
       >
         <Autocomplete.Input {...input} {...control} className="control" />
         <Autocomplete.Portal>
-          <Autocomplete.Positioner sideOffset={3} className="z-40">
+          <Autocomplete.Positioner sideOffset={3} align="start" className="z-40">
             <Autocomplete.Popup className="popup data-empty:hidden">
               <Autocomplete.List>
                 {(suggestion: string) => (

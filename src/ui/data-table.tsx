@@ -71,7 +71,7 @@ export function DataTable<Row extends object>(
                 {column.sortBy ? (
                   <button type="button" className="table-sort" onClick={() => onPress(column.id)}>
                     {column.header}
-                    <span aria-hidden="true">{direction === 'asc' ? '▲' : direction === 'desc' ? '▼' : ''}</span>
+                    {direction && <span aria-hidden="true">{direction === 'asc' ? '▲' : '▼'}</span>}
                   </button>
                 ) : (
                   column.header

@@ -19,9 +19,14 @@ export function Dialog({ open, onClose, title, note, children, stay = false }: P
       <Base.Portal>
         <Base.Backdrop className="backdrop" />
         <Base.Popup className="dialog">
-          <Base.Title className="text-lead font-bold">{title}</Base.Title>
+          <Base.Title className="pr-10 text-lead font-bold">{title}</Base.Title>
           {note && <Base.Description className="mt-1 text-soft">{note}</Base.Description>}
           <div className="mt-4 grid gap-4">{children}</div>
+          {!stay && (
+            <Base.Close className="absolute top-3 right-3 grid size-11 place-items-center text-lead" aria-label="Close">
+              ×
+            </Base.Close>
+          )}
         </Base.Popup>
       </Base.Portal>
     </Base.Root>

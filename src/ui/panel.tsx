@@ -1,17 +1,14 @@
-import { type ReactNode, useId } from 'react';
+import type { ReactNode } from 'react';
 
 type Props = { title: string; subtitle?: ReactNode; actions?: ReactNode; children: ReactNode; className?: string };
 
 /** A sheet with a title. `title`, `subtitle`, `actions` (at the right of the title), `className` (grid placement). */
 export function Panel({ title, subtitle, actions, children, className }: Props) {
-  const id = useId();
   return (
-    <section aria-labelledby={id} className={`panel ${className ?? ''}`}>
+    <section className={`panel ${className ?? ''}`}>
       <div className="mb-4 flex flex-wrap items-start justify-between gap-x-6 gap-y-2">
-        <div>
-          <h2 id={id} className="text-lead leading-snug font-[660]">
-            {title}
-          </h2>
+        <div className="min-w-[14rem] flex-1">
+          <h2 className="text-lead leading-snug font-[660]">{title}</h2>
           {subtitle && <p className="text-soft">{subtitle}</p>}
         </div>
         {actions && <div className="no-print flex flex-wrap gap-2">{actions}</div>}

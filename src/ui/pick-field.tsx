@@ -46,7 +46,7 @@ export function PickField({
       >
         <Combobox.Input ref={ref} {...control} placeholder={placeholder} className="control" />
         <Combobox.Portal>
-          <Combobox.Positioner sideOffset={3} className="z-40">
+          <Combobox.Positioner sideOffset={3} align="start" className="z-40">
             <Combobox.Popup className="popup">
               <Combobox.Empty>
                 <div className="px-3 py-2 text-soft">Nothing matches</div>

@@ -32,7 +32,7 @@ export function LoadingState({ label = 'Loading', lines = 5 }: { label?: string;
 export function ErrorState({ error, onRetry }: { error: unknown; onRetry?: () => void }) {
   const { title, detail, requestId } = wordsOf(error);
   return (
-    <section role="alert" className="panel grid justify-items-start gap-3 border-l-4 border-l-oxide">
+    <section role="alert" className="panel grid content-start justify-items-start gap-3 border-l-4 border-l-oxide">
       <h2 className="text-lead font-bold">{title}</h2>
       {detail && <p className="max-w-[38rem] text-soft">{detail}</p>}
       {requestId && <p className="text-label text-soft">Quote this number if you ask about it: {requestId}</p>}

@@ -1,4 +1,5 @@
 import { createServer } from 'node:http';
+import { seedDemo } from '../seeds/demo.ts';
 import { createApp } from './app.ts';
 import { readConfig } from './platform/config.ts';
 import { openServices } from './services.ts';
@@ -7,6 +8,8 @@ const config = readConfig(process.env);
 const services = await openServices(config);
 const { database, sessions, logger } = services;
 
+const signIns = await seedDemo(services);
+
 const server = createServer(
   { headersTimeout: 10_000, requestTimeout: 300_000, connectionsCheckingInterval: 5000 },
   createApp(services),
@@ -14,7 +17,12 @@ const server = createServer(
 server.listen(config.port, config.host, () => {
   const address = server.address();
   const port = typeof address === 'object' && address ? address.port : config.port;
-  process.stdout.write(`Panelgap is open at http://${config.host}:${port}\n`);
+  const lines = [`Panelgap is open at http://${config.host}:${port}`];
+  if (signIns) {
+    lines.push('', `Demo sign-ins, password ${signIns.password}:`);
+    for (const person of signIns.people) lines.push(`  ${person.role.padEnd(11)} ${person.email}`);
+  }
+  process.stdout.write(`${lines.join('\n')}\n`);
 });
 server.on('error', (error) => {
   logger.fatal({ err: error }, `cannot listen on ${config.host}:${config.port}`);
@@ -25,8 +33,12 @@ const sweep = setInterval(() => {
   sessions.sweep().catch((error: unknown) => logger.error({ err: error }, 'sweeping old sessions failed'));
 }, 3_600_000);
 
+let isStopping = false;
+
 /** Stops taking requests, finishes those under way, and closes the books; ten seconds at most. */
 function stop(): void {
+  if (isStopping) return;
+  isStopping = true;
   clearInterval(sweep);
   setTimeout(() => process.exit(1), 10_000).unref();
   server.close(() => {
@@ -37,8 +49,8 @@ function stop(): void {
   });
   server.closeIdleConnections();
 }
-process.once('SIGTERM', stop);
-process.once('SIGINT', stop);
+process.on('SIGTERM', stop);
+process.on('SIGINT', stop);
 process.on('unhandledRejection', (error) => {
   logger.fatal({ err: error }, 'unhandled rejection');
   process.exit(1);

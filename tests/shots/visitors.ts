@@ -1,15 +1,14 @@
 import type { APIRequestContext, BrowserContext } from 'playwright-core';
 import { sessionApi, sessionSchema } from '#shared/contracts/session.ts';
+import { DEMO_OWNER, DEMO_PASSWORD } from '../../seeds/demo/people.ts';
 import type { RunningServer } from '../e2e/support/server.ts';
 
 /** Signs somebody in within a browser context; resolves to the id of the shop that they stand in. */
 export type Visitor = (context: BrowserContext, server: RunningServer) => Promise<string>;
 
-/** The owner of the demo shop, with the sign-in that the server prints when it starts. */
-export const demoOwner: Visitor = async (context, server) => {
-  const printed = /\bowner\b[^\n]*?(\S+@\S+)\s+(\S+)/i.exec(server.output());
-  if (!printed) throw new Error(`The server printed no sign-in of the demo's owner:\n${server.output()}`);
-  await post(context.request, sessionApi.signIn.path, { email: printed[1], password: printed[2] });
+/** The owner of the demo shop. */
+export const demoOwner: Visitor = async (context) => {
+  await post(context.request, sessionApi.signIn.path, { email: DEMO_OWNER.email, password: DEMO_PASSWORD });
   return shopOf(context.request);
 };
 

@@ -115,14 +115,19 @@ async function take(books: Books, known: Known, one: Step): Promise<void> {
       );
       return;
     }
-    default: {
-      const rows = await live(one.do === 'void hours' ? 'hours' : 'entries');
-      if (rows.length === 0) return;
-      const row = at(rows, one.which);
-      if (one.do === 'void hours') await hours.void(row.id, row.version, 'not worked');
-      else if (one.do === 'void') await entries.void(row.id, row.version, 'not bought');
+    case 'void hours': {
+      const row = at(await live('hours'), one.which);
+      if (row) await hours.void(row.id, row.version, 'not worked');
+      return;
+    }
+    case 'void':
+    case 'move':
+    case 'change': {
+      const row = at(await live('entries'), one.which);
+      if (!row) return;
+      if (one.do === 'void') await entries.void(row.id, row.version, 'not bought');
       else if (one.do === 'move') await entries.update(row.id, row.version, { rebuildId: place, datedOn: one.datedOn });
-      else if (one.do === 'change') await entries.update(row.id, row.version, changeOf(one.entry, row));
+      else await entries.update(row.id, row.version, changeOf(one.entry, row));
     }
   }
 }

@@ -49,11 +49,8 @@ function startAfter(page: Knex.QueryBuilder, column: string, order: 'up' | 'down
     page.whereNull(column).where('id', '>', id);
     return;
   }
-  page.where((or) => {
-    or.where(column, order === 'up' ? '>' : '<', value)
-      .orWhere((same) => same.where(column, value).where('id', '>', id))
-      .orWhereNull(column);
-  });
+  const beyond = order === 'up' ? '>' : '<';
+  page.whereRaw(`(${column} ${beyond} ? OR (${column} = ? AND id > ?) OR ${column} IS NULL)`, [value, value, id]);
 }
 
 function filtered(rows: Knex.QueryBuilder, query: Query, startMonth: number): Knex.QueryBuilder {

@@ -79,7 +79,7 @@ const WORDS: Readonly<Partial<Record<DemoCategory, string>>> = {
   parts: 'Parts',
   'outside labor (sublet)': 'Body shop',
   'restraints (SRS)': 'Airbags',
-  'small systems': 'Glass, keys, AC',
+  'small systems': 'Glass',
   'title & registration': 'Title/DMV',
   inspection: 'Inspection',
   'selling costs': 'Ads',

@@ -49,7 +49,13 @@ function carsRow(vehicle: DemoVehicle): Cell[] {
   const total = purchaseCents + vehicle.entries.reduce((sum, { cents }) => sum + cents, 0);
   const seconds = hours.reduce((sum, row) => sum + row.seconds, 0);
   return [
-    ...[tag, String(year), make, model, vehicle.class, vehicle.damage, vehicle.odometer?.toLocaleString('en-US') ?? ''],
+    tag,
+    String(year),
+    make,
+    model,
+    vehicle.class,
+    vehicle.damage,
+    vehicle.odometer?.toLocaleString('en-US') ?? '',
     typed(dates.boughtOn),
     { cents: purchaseCents },
     ...costs,

@@ -8,6 +8,7 @@ import { lessons } from '../../seeds/demo/lessons.ts';
 import { openDemoShop } from '../../seeds/demo/open-demo-shop.ts';
 import { DEMO_PASSWORD } from '../../seeds/demo/people.ts';
 import { readShopFacts, type ShopFacts } from '../../server/books/shop-facts.ts';
+import type { RebuildFacts } from '../../server/domain/facts.ts';
 import { rawHandle } from '../../server/platform/database.ts';
 import { newPasswordSchema } from '#shared/contracts/session.ts';
 import { testApi } from '../support/api.ts';
@@ -52,24 +53,22 @@ function asMeasured({ rebuilds }: ShopFacts): Measured {
   const planned = rebuilds.flatMap(({ tag, plannedSeconds }) =>
     plannedSeconds === null ? [] : [[tag, plannedSeconds] as const],
   );
+  const known = Object.keys(measured(book).facts[0] ?? {});
   const facts = rebuilds
-    .map(({ tag, name, pickedUpOn, startedOn, titleIssuedOn, askingCents, plannedSeconds, flows, ...fact }) => ({
-      ...fact,
-      id: tag,
-    }))
-    .sort((a, b) => (a.id < b.id ? -1 : 1));
+    .map((rebuild) => ({ ...rebuild, id: rebuild.tag }))
+    .map((rebuild) => Object.fromEntries(Object.entries(rebuild).filter(([field]) => known.includes(field))))
+    .map((rebuild) => rebuild as unknown as RebuildFacts)
+    .sort((one, other) => (one.id < other.id ? -1 : 1));
   return { facts, plannedSeconds: new Map(planned) };
 }
+
+/** An annual return found by search agrees to nine places, not to the last bit. */
+const rounded = (facts: RebuildFacts) => ({ ...facts, xirr: facts.xirr === null ? null : facts.xirr.toFixed(9) });
 
 test('the seeded warehouse holds the generated six years to the cent, with the sums kept beside the entries', () => {
   const kept = asMeasured(demo.facts);
   const recounted = measured(book);
-  expect(kept.facts.map(({ xirr, ...fact }) => fact)).toEqual(recounted.facts.map(({ xirr, ...fact }) => fact));
-  for (const [index, { xirr }] of kept.facts.entries()) {
-    const own = recounted.facts[index]?.xirr ?? null;
-    if (own === null || xirr === null) expect(xirr).toBe(own);
-    else expect(xirr).toBeCloseTo(own, 6);
-  }
+  expect(kept.facts.map(rounded)).toEqual(recounted.facts.map(rounded));
   expect(kept.plannedSeconds).toEqual(recounted.plannedSeconds);
   const overhead = demo.facts.overhead.reduce((sum, { cents }) => sum + cents, 0);
   expect(overhead).toBe(book.overhead.reduce((sum, { cents }) => sum + cents, 0));

@@ -62,4 +62,12 @@ export const access: AccessTable = {
   'POST /api/my-hours': WORKS,
   'PATCH /api/my-hours/:hoursId': WORKS,
   'POST /api/my-hours/:hoursId/void': WORKS,
+
+  'GET /api/answers/year': READS_BOOKS,
+  'GET /api/answers/what-pays': READS_BOOKS,
+  'GET /api/answers/overruns': READS_BOOKS,
+  'GET /api/answers/time-to-sell': READS_BOOKS,
+  'GET /api/answers/contingency': READS_BOOKS,
+  'GET /api/rules': READS_BOOKS,
+  'POST /api/rules': BOOKS,
 };

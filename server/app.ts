@@ -2,11 +2,13 @@ import compression from 'compression';
 import express, { type Express } from 'express';
 import helmet from 'helmet';
 import { access } from './access.ts';
+import { answersRoutes } from './features/answers/routes.ts';
 import { healthRoutes } from './features/health/routes.ts';
 import { hoursRoutes } from './features/hours/routes.ts';
 import { ledgerRoutes } from './features/ledger/routes.ts';
 import { peopleRoutes } from './features/people/routes.ts';
 import { rebuildsRoutes } from './features/rebuilds/routes.ts';
+import { rulesRoutes } from './features/rules/routes.ts';
 import { sessionRoutes } from './features/session/routes.ts';
 import { shopRoutes } from './features/shop/routes.ts';
 import { clientFiles } from './platform/client-files.ts';
@@ -25,6 +27,8 @@ const routes: Route[] = [
   ...rebuildsRoutes,
   ...ledgerRoutes,
   ...hoursRoutes,
+  ...answersRoutes,
+  ...rulesRoutes,
 ];
 
 /** The whole application, ready to listen; tests use this same function. */

@@ -1,3 +1,4 @@
+import { LEVELS as LEVEL_NAMES, type LevelName } from '#shared/vocabulary.ts';
 import { ceilProduct, compareFractions } from './exact.ts';
 import type { RebuildFacts } from './facts.ts';
 import { type PlannedOutcome, planned, plannedOutcomes } from './sets.ts';
@@ -8,13 +9,14 @@ export interface Level {
   readonly q: number;
 }
 
+/** A level by its name: '4/5' is 4 of 5. */
+export function levelOf(name: LevelName): Level {
+  const [p = 0, q = 0] = name.split('/').map(Number);
+  return { p, q };
+}
+
 /** The levels shown: half, two thirds, four fifths, nine tenths. */
-export const LEVELS: readonly Level[] = [
-  { p: 1, q: 2 },
-  { p: 2, q: 3 },
-  { p: 4, q: 5 },
-  { p: 9, q: 10 },
-];
+export const LEVELS: readonly Level[] = LEVEL_NAMES.map(levelOf);
 
 /** B − E over E, kept as its two whole numbers so that a reserve comes out to the cent. `estimateCents` > 0. */
 export type Overran = Pick<PlannedOutcome, 'overrunCents' | 'estimateCents'>;
@@ -74,6 +76,11 @@ export function contingencies(facts: readonly RebuildFacts[], levels: readonly L
  */
 export function reserve(taken: Overran, estimate: number): number {
   return taken.overrunCents <= 0 ? 0 : ceilProduct(taken.overrunCents, estimate, taken.estimateCents);
+}
+
+/** The overrun taken as a figure to adopt: raised to a whole percent, exactly, and never below 0. */
+export function wholePercent(taken: Overran): number {
+  return taken.overrunCents <= 0 ? 0 : ceilProduct(100, taken.overrunCents, taken.estimateCents);
 }
 
 /** Cents of a flat rule of `percent` whole percent on an estimate, raised to the next cent. */

@@ -1,0 +1,56 @@
+import type { LeftOut, LeftOutReason, RebuildRef } from '#shared/contracts/answers-parts.ts';
+import { LEFT_OUT_LISTED } from '#shared/contracts/answers-parts.ts';
+import type { Rule } from '#shared/contracts/rules.ts';
+import type { Day } from '#shared/day.ts';
+import { addPackedFlows } from '../../books/flows.ts';
+import type { ShopFacts, ShopRebuild } from '../../books/shop-facts.ts';
+import type { NetFlows } from '../../domain/net-flows.ts';
+import type { TiedUp } from '../../domain/years.ts';
+
+/** What an answer is worked out from: the shop's facts as they stand today, and three looks into the warehouse. */
+export interface AnswerInput {
+  readonly shop: ShopFacts;
+  readonly today: Day;
+  readonly byId: ReadonlyMap<string, ShopRebuild>;
+  tiedUpOn(on: Day): TiedUp;
+  spentBy(ids: readonly string[], on: Day): ReadonlyMap<string, number>;
+  rules(): Rule[];
+}
+
+/** The facts as they stand at the end of a day: who leaves later has not left, overhead of later days is not paid. */
+export function asOf(shop: ShopFacts, today: Day): ShopFacts {
+  return {
+    ...shop,
+    rebuilds: shop.rebuilds.map((one) => (one.exit && one.exit.on > today ? { ...one, exit: null, flows: null } : one)),
+    overhead: shop.overhead.filter(({ on }) => on <= today),
+  };
+}
+
+export function refOf({ id, tag, name }: ShopRebuild): RebuildRef {
+  return { id, tag, name };
+}
+
+/** The rebuild of an id that a measure gave back. */
+export function rebuildOf({ byId }: Pick<AnswerInput, 'byId'>, id: string): ShopRebuild {
+  const rebuild = byId.get(id);
+  if (!rebuild) throw new RangeError(`no rebuild ${id} among the facts`);
+  return rebuild;
+}
+
+/** What is left out of a figure and why; reasons that hold for nobody do not stand. */
+export function leftOut(reasons: readonly (readonly [LeftOutReason, readonly ShopRebuild[]])[]): LeftOut[] {
+  return reasons
+    .filter(([, rebuilds]) => rebuilds.length > 0)
+    .map(([reason, rebuilds]) => ({
+      reason,
+      count: rebuilds.length,
+      rebuilds: rebuilds.slice(0, LEFT_OUT_LISTED).map(refOf),
+    }));
+}
+
+/** Flows of these rebuilds together, by day. */
+export function flowsOf(rebuilds: readonly ShopRebuild[]): NetFlows {
+  const net = new Map<number, number>();
+  for (const { flows } of rebuilds) if (flows) addPackedFlows(net, flows);
+  return net;
+}

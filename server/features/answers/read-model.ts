@@ -1,0 +1,77 @@
+import type { Day } from '#shared/day.ts';
+import { readRules } from '../../books/rules.ts';
+import { readShopFacts, type ShopFacts } from '../../books/shop-facts.ts';
+import { spentBy, tiedUpOn } from '../../books/spent-by.ts';
+import { type Database, type RawDatabase, rawHandle } from '../../platform/database.ts';
+import { type AnswerInput, asOf } from './input.ts';
+
+/** Shops whose facts stay in memory, and answers kept for each. */
+const SHOPS_KEPT = 8;
+const ANSWERS_KEPT = 64;
+
+interface KeptShop {
+  readonly facts: ShopFacts;
+  /** Replies as text, by day and question. */
+  readonly replies: Map<string, string>;
+}
+type KeptShops = Map<string, KeptShop>;
+
+// One memory per warehouse: tests run several in one process.
+const memory = new WeakMap<Database, KeptShops>();
+
+/**
+ * Answers a question about a shop as text. Facts and replies are kept until the books' version changes; everything is
+ * read at one moment, on a reading connection that waits for no writer.
+ */
+export async function answerText(
+  database: Database,
+  asked: { readonly shopId: string; readonly today: Day; readonly question: string },
+  workOut: (input: AnswerInput) => string,
+): Promise<string> {
+  const raw = await rawHandle(database.reader);
+  return raw.transaction(() => {
+    const kept = keptShop(raw, shopsOf(database), asked.shopId);
+    const key = `${asked.today} ${asked.question}`;
+    const known = kept.replies.get(key);
+    if (known !== undefined) return known;
+    const text = workOut(inputOf(raw, kept.facts, asked.today));
+    keep(kept.replies, key, text, ANSWERS_KEPT);
+    return text;
+  })();
+}
+
+function shopsOf(database: Database): KeptShops {
+  const shops = memory.get(database) ?? new Map<string, KeptShop>();
+  memory.set(database, shops);
+  return shops;
+}
+
+function keptShop(raw: RawDatabase, shops: KeptShops, shopId: string): KeptShop {
+  const version = raw.prepare('SELECT books_version FROM shops WHERE id = ?').pluck().get(shopId) as number;
+  const kept = shops.get(shopId);
+  const current =
+    kept?.facts.booksVersion === version ? kept : { facts: readShopFacts(raw, shopId), replies: new Map() };
+  keep(shops, shopId, current, SHOPS_KEPT);
+  return current;
+}
+
+/** What the answers are worked out from, on this connection. Only valid inside its transaction. */
+export function inputOf(raw: RawDatabase, facts: ShopFacts, today: Day): AnswerInput {
+  const shop = asOf(facts, today);
+  return {
+    shop,
+    today,
+    byId: new Map(shop.rebuilds.map((rebuild) => [rebuild.id, rebuild])),
+    tiedUpOn: (on) => tiedUpOn(raw, shop.shopId, shop.rebuilds, on),
+    spentBy: (ids, on) => spentBy(raw, shop.shopId, ids, on),
+    rules: () => readRules(raw, shop.shopId),
+  };
+}
+
+/** Puts a value last in line; the one that was used longest ago makes room. */
+function keep<T>(map: Map<string, T>, key: string, value: T, most: number): void {
+  map.delete(key);
+  map.set(key, value);
+  const oldest = map.keys().next().value;
+  if (map.size > most && oldest !== undefined) map.delete(oldest);
+}

@@ -1,0 +1,36 @@
+import type { z } from 'zod';
+import type { Contract } from '#shared/contract.ts';
+import { answersApi } from '#shared/contracts/answers.ts';
+import { type Context, Ready, type Route, route } from '../../platform/http.ts';
+import { contingencyAnswer } from './contingency.ts';
+import type { AnswerInput } from './input.ts';
+import { overrunsAnswer } from './overruns.ts';
+import { answerText } from './read-model.ts';
+import { timeToSellAnswer } from './time-to-sell.ts';
+import { whatPaysAnswer } from './what-pays.ts';
+import { yearAnswer } from './year.ts';
+
+export const answersRoutes: Route[] = [
+  route(answersApi.year, (ctx) => reply(ctx, (input) => yearAnswer(input, ctx.query.year))),
+  route(answersApi.whatPays, (ctx) => reply(ctx, (input) => whatPaysAnswer(input, ctx.query))),
+  route(answersApi.overruns, (ctx) => reply(ctx, (input) => overrunsAnswer(input, ctx.query))),
+  route(answersApi.timeToSell, (ctx) => reply(ctx, (input) => timeToSellAnswer(input, ctx.query))),
+  route(answersApi.contingency, (ctx) => reply(ctx, (input) => contingencyAnswer(input, ctx.query))),
+];
+
+/** The kept text of this question, or the answer worked out now and checked by its contract. */
+async function reply<C extends Contract>(
+  ctx: Context<C>,
+  workOut: (input: AnswerInput) => z.input<C['response']>,
+): Promise<Ready> {
+  const { contract, query, services } = ctx;
+  const asked = {
+    shopId: ctx.actor.shopId,
+    today: await ctx.today(),
+    question: `${contract.path} ${JSON.stringify(query)}`,
+  };
+  const text = await answerText(services.database, asked, (input) =>
+    JSON.stringify(contract.response.parse(workOut(input))),
+  );
+  return new Ready(200, text);
+}

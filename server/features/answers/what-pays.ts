@@ -1,0 +1,127 @@
+import type { z } from 'zod';
+import type { FilterQuery } from '#shared/contracts/answers-parts.ts';
+import type { Comparison, whatPaysAnswerSchema } from '#shared/contracts/answers-what-pays.ts';
+import { type ComparedGroup, type GroupComparison, groupComparison } from '../../domain/group-comparison.ts';
+import { profit, rebuildProfit } from '../../domain/profit.ts';
+import { profitPerOwnHour, worked } from '../../domain/profit-per-hour.ts';
+import { type Priced, priced } from '../../domain/sets.ts';
+import { ratio } from '../../domain/statistics.ts';
+import { cellOf } from '../../domain/what-pays.ts';
+import { filtered, filterOptions } from './filter.ts';
+import { type AnswerInput, leftOut } from './input.ts';
+import { perHourViews } from './per-hour-views.ts';
+
+type Answer = z.input<typeof whatPaysAnswerSchema>;
+type Group = Comparison['groups'][number];
+
+/** Which wrecks pay? Profit per own hour, and on cost, by class × damage and by each alone (definitions §9, §18.2). */
+export function whatPaysAnswer(input: AnswerInput, query: FilterQuery): Answer {
+  const { shop, today } = input;
+  const rebuilds = filtered(input, query, 'left');
+  const done = rebuilds.filter(({ exit }) => exit !== null);
+  const { noPurchaseCount: _, ...totals } = profit(rebuilds);
+  const hours = worked(rebuilds).map((one) => ({ rebuild: one, value: profitPerOwnHour(one) }));
+  const returns = priced(rebuilds).flatMap((one) => {
+    const value = rebuildProfit(one).returnOnCost;
+    return value === null ? [] : [{ rebuild: one, value }];
+  });
+  return {
+    asOf: today,
+    rebuildCount: rebuilds.length,
+    filters: filterOptions(input, 'left'),
+    leftOut: leftOut([
+      ['not sold yet', rebuilds.filter(({ exit }) => exit === null)],
+      ['purchase not known', done.filter(({ purchaseCents }) => purchaseCents === null)],
+      ['own hours not known', done.filter(({ ownSeconds }) => !ownSeconds)],
+      ['class or damage not known', done.filter((one) => cellOf(one) === null)],
+    ]),
+    totals,
+    views: perHourViews(rebuilds, shop.wantedCentsPerHour),
+    perHour: threeFits(input, hours, ({ profitCents, ownSeconds }) => ratio(profitCents * 3600, ownSeconds)),
+    returnOnCost: threeFits(input, returns, ({ profitCents, costCents }) => ratio(profitCents, costCents)),
+  };
+}
+
+interface Valued {
+  readonly rebuild: Priced;
+  readonly value: number;
+}
+interface Sums {
+  profitCents: number;
+  ownSeconds: number;
+  costCents: number;
+}
+type Plain = (sums: Sums) => number | null;
+interface Cell {
+  readonly class: string | null;
+  readonly damage: string | null;
+}
+
+function threeFits(input: AnswerInput, values: readonly Valued[], plain: Plain): Answer['perHour'] {
+  return {
+    cells: fit(input, values, plain, (one) => (cellOf(one) === null ? null : one)),
+    classes: fit(input, values, plain, (one) => (one.class === null ? null : { class: one.class, damage: null })),
+    damages: fit(input, values, plain, (one) => (one.damage === null ? null : { class: null, damage: one.damage })),
+  };
+}
+
+/** One fit on its own. A group's key holds both names, so that no two cells meet in one. */
+function fit(
+  { shop }: AnswerInput,
+  values: readonly Valued[],
+  plain: Plain,
+  cellOfOne: (rebuild: Priced) => Cell | null,
+): Comparison {
+  const cells = new Map<string, { cell: Cell; sums: Sums }>();
+  const grouped = values.flatMap(({ rebuild, value }) => {
+    const cell = cellOfOne(rebuild);
+    if (cell === null) return [];
+    const key = JSON.stringify([cell.class, cell.damage]);
+    const known = cells.get(key) ?? { cell, sums: { profitCents: 0, ownSeconds: 0, costCents: 0 } };
+    cells.set(key, known);
+    addTo(known.sums, rebuild);
+    return [{ group: key, value }];
+  });
+  const comparison = groupComparison(grouped);
+  const idIn = (list: readonly { id: string; name: string }[], name: string | null) =>
+    list.find((item) => item.name === name)?.id ?? null;
+  const groups = comparison.groups.map((group): Group => {
+    const { cell, sums } = cells.get(group.group) ?? { cell: { class: null, damage: null }, sums: NOTHING };
+    return {
+      classId: idIn(shop.classes, cell.class),
+      className: cell.class,
+      damageId: idIn(shop.damages, cell.damage),
+      damageName: cell.damage,
+      plain: plain(sums),
+      ...figuresOf(group),
+      ...sums,
+    };
+  });
+  return { ...heading(comparison), ungroupedCount: values.length - grouped.length, groups: ranked(groups) };
+}
+
+const NOTHING: Sums = { profitCents: 0, ownSeconds: 0, costCents: 0 };
+
+function addTo(sums: Sums, rebuild: Priced): void {
+  const { profitCents, costCents } = rebuildProfit(rebuild);
+  sums.profitCents += profitCents;
+  sums.costCents += costCents;
+  sums.ownSeconds += rebuild.ownSeconds ?? 0;
+}
+
+function figuresOf({ n, mean, deviation, interval, shrunken, isThin }: ComparedGroup) {
+  const { lower, upper } = interval ?? { lower: null, upper: null };
+  return { n, mean, deviation, lower, upper, pulled: shrunken, isThin, rank: null };
+}
+
+function heading({ n, withinVariance, pooled }: GroupComparison): Pick<Comparison, 'n' | 'withinVariance' | 'average'> {
+  return { n, withinVariance, average: pooled };
+}
+
+/** Ranks by the lower end of the pulled interval (decisions 26), the thin ones not at all. */
+function ranked(groups: Group[]): Group[] {
+  const order = groups
+    .filter(({ isThin, pulled }) => !isThin && pulled !== null)
+    .sort((a, b) => (b.pulled?.lower ?? 0) - (a.pulled?.lower ?? 0));
+  return groups.map((group) => ({ ...group, rank: order.includes(group) ? order.indexOf(group) + 1 : null }));
+}

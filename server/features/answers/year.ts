@@ -1,0 +1,185 @@
+import type { z } from 'zod';
+import { MARKS_AT_MOST } from '#shared/contracts/answers-parts.ts';
+import type { yearAnswerSchema } from '#shared/contracts/answers-year.ts';
+import { type Day, dayFromParts } from '#shared/day.ts';
+import type { ShopFacts, ShopRebuild } from '../../books/shop-facts.ts';
+import { annualReturns, hasSeveralReturns } from '../../domain/annual-return.ts';
+import { profit, rebuildProfit } from '../../domain/profit.ts';
+import { type Completed, completed, paidCents, priced } from '../../domain/sets.ts';
+import { median, sum } from '../../domain/statistics.ts';
+import { shopYearOf, shopYears, yearSpan, yearSpans } from '../../domain/years.ts';
+import { filterOptions } from './filter.ts';
+import { gapOf } from './gap.ts';
+import { type AnswerInput, flowsOf, leftOut, rebuildOf, refOf } from './input.ts';
+import { perHourViews } from './per-hour-views.ts';
+import { yearSteps } from './year-steps.ts';
+
+type Answer = z.input<typeof yearAnswerSchema>;
+
+/** Did the work pay this year? `asked` = a shop year; without one, the year of today. */
+export function yearAnswer(input: AnswerInput, asked?: number): Answer {
+  const { shop, today, byId } = input;
+  const year = asked ?? shopYearOf(today, shop.startMonth);
+  const span = yearSpan(year, shop.startMonth);
+  const through = span.to < today ? span.to : today;
+  const years = yearsOf(input);
+  const own = years.find((one) => one.year === year);
+  const last = yearSpan(year - 1, shop.startMonth);
+  const left = completed(shop.rebuilds).filter(({ exit }) => exit.on >= span.from && exit.on <= through);
+  const exits = left.map(({ id }) => rebuildOf(input, id));
+  const counts = profit(exits);
+  const keptCents = own?.keptCents ?? 0;
+  return {
+    asOf: today,
+    rebuildCount: exits.length,
+    filters: filterOptions(input, 'left'),
+    leftOut: leftOut([
+      ['purchase not known', exits.filter(({ purchaseCents }) => purchaseCents === null)],
+      ['own hours not known', exits.filter(({ ownSeconds }) => !ownSeconds)],
+      ['entry without a date', exits.filter(({ hasUndated }) => hasUndated)],
+    ]),
+    year,
+    ...span,
+    through,
+    isRunning: span.to >= today && span.from <= today,
+    exitCount: exits.length,
+    soldCount: left.filter(({ exit }) => exit.kind === 'sold').length,
+    n: counts.n,
+    lossCount: counts.lossCount,
+    profitCents: counts.profitCents,
+    overheadCents: own?.overheadCents ?? 0,
+    keptCents,
+    perHour: perHourViews(exits, shop.wantedCentsPerHour),
+    before: beforeOf(shop, years, { year, through, keptCents }),
+    steps: yearSteps(shop, byId, { from: span.from, to: through }, last),
+    money: moneyOf(shop, exits, own?.overheadCents ?? 0),
+    late: lateOf(exits),
+    tiedUp: input.tiedUpOn(through),
+    returns: returnsOf(exits),
+    rebuilds: left
+      .toSorted((a, b) => (a.exit.on < b.exit.on ? 1 : a.exit.on > b.exit.on ? -1 : 0))
+      .slice(0, MARKS_AT_MOST)
+      .map((one) => rowOf(rebuildOf(input, one.id), one.exit)),
+    rebuildTotal: exits.length,
+    years,
+  };
+}
+
+function yearsOf({ shop, today, tiedUpOn }: AnswerInput): Answer['years'] {
+  const input = { facts: shop.rebuilds, overhead: shop.overhead, asOf: today, startMonth: shop.startMonth };
+  const tiedUp = yearSpans(input).map((span) => tiedUpOn(span.tiedUpOn));
+  return shopYears(input, tiedUp).map((one, i) => ({
+    ...one,
+    tiedUp: one.tiedUp ?? tiedUp[i] ?? { on: one.tiedUpOn, rebuildCount: 0, cents: 0 },
+  }));
+}
+
+/** The year before, up to the same day of it; null if the books begin later. */
+function beforeOf(
+  { rebuilds, overhead, startMonth }: ShopFacts,
+  years: Answer['years'],
+  now: { year: number; through: Day; keptCents: number },
+): Answer['before'] {
+  const whole = years.find((one) => one.year === now.year - 1);
+  if (!whole) return null;
+  const { from, to } = yearSpan(whole.year, startMonth);
+  const through = sameDayLastYear(now.through);
+  const isIn = (on: Day) => on >= from && on <= through;
+  const left = completed(rebuilds).filter(({ exit }) => isIn(exit.on));
+  const paid = sum(overhead.filter(({ on }) => isIn(on)).map(({ cents }) => cents));
+  const keptCents = profit(left).profitCents - paid;
+  return {
+    year: whole.year,
+    from,
+    to,
+    through,
+    exitCount: left.length,
+    keptCents,
+    wholeKeptCents: whole.keptCents,
+    aheadCents: now.keptCents - keptCents,
+  };
+}
+
+function sameDayLastYear(day: Day): Day {
+  const [year, month, date] = day.split('-').map(Number) as [number, number, number];
+  return dayFromParts(year - 1, month, date) ?? `${year - 1}-02-28`;
+}
+
+function moneyOf({ categories }: ShopFacts, exits: readonly ShopRebuild[], overheadCents: number): Answer['money'] {
+  const set = priced(exits);
+  const spent = new Map<string, number>();
+  for (const rebuild of set) {
+    for (const [name, { paidCents: cents }] of rebuild.categories) spent.set(name, (spent.get(name) ?? 0) + cents);
+  }
+  const { proceedsCents, purchaseCents, profitCents } = profit(exits);
+  return {
+    proceedsCents,
+    purchaseCents,
+    categories: categories
+      .map(({ id, name }) => ({ categoryId: id, name, cents: spent.get(name) ?? 0 }))
+      .filter(({ cents }) => cents !== 0),
+    overheadCents,
+    keptCents: profitCents - overheadCents,
+  };
+}
+
+function lateOf(exits: readonly ShopRebuild[]): Answer['late'] {
+  const late = exits.filter(({ lateCount }) => lateCount > 0);
+  return {
+    count: sum(late.map(({ lateCount }) => lateCount)),
+    cents: sum(late.map(({ lateCents }) => lateCents)),
+    rebuilds: late
+      .slice(0, MARKS_AT_MOST)
+      .map((one) => ({ ...refOf(one), count: one.lateCount, cents: one.lateCents })),
+  };
+}
+
+function returnsOf(exits: readonly ShopRebuild[]): Answer['returns'] {
+  const flows = flowsOf(exits);
+  const { pooled, n, median: middle, undatedCount } = annualReturns(exits, flows);
+  const money = profit(exits);
+  const days = priced(exits)
+    .map((one) => rebuildProfit(one).daysHeld)
+    .filter((value) => value !== null);
+  return {
+    pooled,
+    n,
+    median: middle,
+    hasSeveral: hasSeveralReturns(flows),
+    undatedCount,
+    daysHeld: { n: days.length, median: median(days) },
+    onCost: {
+      n: money.returnOnCost.n,
+      pooled: money.returnOnCost.pooled,
+      median: money.returnOnCost.median,
+      profitCents: money.profitCents,
+      costCents: money.costCents,
+    },
+  };
+}
+
+function rowOf(rebuild: ShopRebuild, exit: Completed['exit']): Answer['rebuilds'][number] {
+  const [money] = priced([rebuild]).map(rebuildProfit);
+  const { purchaseCents, ownSeconds, boughtOn, lateCents } = rebuild;
+  const keptCents = money?.profitCents ?? null;
+  return {
+    ...refOf(rebuild),
+    className: rebuild.class,
+    damageName: rebuild.damage,
+    isSeen: rebuild.seen,
+    exitKind: exit.kind,
+    exitOn: exit.on,
+    boughtOn,
+    daysHeld: money?.daysHeld ?? null,
+    purchaseCents,
+    workCents: paidCents(rebuild),
+    costCents: money?.costCents ?? null,
+    proceedsCents: exit.proceedsCents,
+    keptCents,
+    ownSeconds,
+    keptPerHourCents: keptCents !== null && ownSeconds ? (keptCents * 3600) / ownSeconds : null,
+    annualReturn: rebuild.xirr,
+    lateCents,
+    gap: gapOf(rebuild),
+  };
+}

@@ -36,6 +36,13 @@ export function listStore(scope: ShopScope) {
     });
   }
 
+  /** Numbers a list anew from 0, with the moved word at its place. The others only make room: their version stays. */
+  async function makeRoom(table: string, moved: ListItem): Promise<void> {
+    const others: { id: string }[] = await scope.table(table).whereNot({ id: moved.id }).orderBy('position').select('id');
+    const order = others.toSpliced(moved.position, 0, moved);
+    for (const [position, { id }] of order.entries()) await scope.table(table).where({ id }).update({ position });
+  }
+
   return {
     async all(): Promise<Lists> {
       return {
@@ -67,7 +74,10 @@ export function listStore(scope: ShopScope) {
     },
     async changeItem(kind: ListKind, id: string, version: number, change: Patch<ListItem>): Promise<ListItem> {
       if (change.name !== undefined) await refuseTakenName(TABLES[kind], change.name, id);
-      return scope.update<ListItem>(TABLES[kind], id, version, change);
+      const changed = await scope.update<ListItem>(TABLES[kind], id, version, change);
+      if (change.position === undefined) return changed;
+      await makeRoom(TABLES[kind], changed);
+      return scope.get<ListItem>(TABLES[kind], id);
     },
     getWorker: (id: string) => scope.get<Worker>('workers', id),
     async addWorker(worker: { name: string; isPaid: boolean; userId?: string | null }): Promise<Worker> {

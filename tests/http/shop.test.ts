@@ -53,6 +53,23 @@ describe('the shop', () => {
     expect(odd.body.errors[0].pointer).toBe('/isDemo');
   });
 
+  it('moves a word to its new place and the others around it, retired ones too', async () => {
+    const api = await testApi();
+    const ada = await api.owner();
+    const classes = async () =>
+      (await ada.get('/api/shop/lists')).body.classes as { id: string; name: string; position: number; version: number }[];
+    const [first, second, third, fourth] = await classes();
+    await ada.patch(`/api/shop/lists/classes/${second?.id}`, 1, { isRetired: true });
+    const moved = await ada.patch(`/api/shop/lists/classes/${first?.id}`, 1, { position: 2 });
+    expect(moved.body.position).toBe(2);
+    const after = await classes();
+    expect(after.slice(0, 4).map((item) => item.id)).toEqual([second?.id, third?.id, first?.id, fourth?.id]);
+    expect(after.map((item) => item.position)).toEqual(after.map((_, index) => index));
+    expect(after[1]?.version, 'making room for another is no change of a word').toBe(1);
+    const beyond = await ada.patch(`/api/shop/lists/classes/${first?.id}`, moved.body.version, { position: 1000 });
+    expect(beyond.body.position).toBe(after.length - 1);
+  });
+
   it('keeps a bookkeeper from changing it', async () => {
     const api = await testApi();
     const ada = await api.owner();

@@ -4,9 +4,8 @@ import type { TiedUp } from '../domain/years.ts';
 import type { RawDatabase } from '../platform/database.ts';
 
 const MONTHS = `
-  SELECT m.rebuild_id, sum(m.paid_cents) FROM json_each(@ids) i
-  JOIN rollup_months m ON m.shop_id = @shop AND m.rebuild_id = i.value
-  WHERE m.month < @month GROUP BY m.rebuild_id`;
+  SELECT rebuild_id, sum(paid_cents) FROM rollup_months
+  WHERE shop_id = @shop AND rebuild_id IN (SELECT value FROM json_each(@ids)) AND month < @month GROUP BY rebuild_id`;
 const DAYS = `
   SELECT rebuild_id, sum(cents) FROM entries INDEXED BY entries_by_day
   WHERE shop_id = @shop AND dated_on BETWEEN @first AND @on AND voided_at IS NULL

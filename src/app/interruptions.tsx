@@ -19,7 +19,7 @@ export function Interruptions({ session }: { session: Session }) {
   const close = () => setKind(null);
   return (
     <Suspense>
-      {kind === 'ended' && <SessionEnded email={session.user.email} onDone={close} />}
+      {kind === 'ended' && <SessionEnded email={session.user.email} shopId={session.shop.id} onDone={close} />}
       {kind === 'other-shop' && <OtherShop shop={session.shop} onDone={close} />}
     </Suspense>
   );

@@ -1,15 +1,24 @@
+import { useQueryClient } from '@tanstack/react-query';
 import { useState } from 'react';
 import { Link } from 'react-router-dom';
-import { useSwitchShop } from '../lib/session.ts';
+import { moveSession } from '../lib/session.ts';
 import { Button } from '../ui/button.tsx';
 import { Dialog, DialogActions } from '../ui/dialog.tsx';
 import { ErrorState } from '../ui/states.tsx';
 
 /** Another tab moved the session to another shop; nothing was saved here. Offers to come back or to follow. */
 export function OtherShop({ shop, onDone }: { shop: { id: string; name: string }; onDone: () => void }) {
-  const switchShop = useSwitchShop();
+  const client = useQueryClient();
   const [problem, setProblem] = useState<unknown>(null);
-  const onBack = () => switchShop(shop.id).then(onDone, setProblem);
+  const onBack = async () => {
+    try {
+      await moveSession(shop.id);
+      onDone();
+      await client.invalidateQueries();
+    } catch (refused) {
+      setProblem(refused);
+    }
+  };
   return (
     <Dialog
       open

@@ -1,11 +1,15 @@
 import { useQueryClient } from '@tanstack/react-query';
-import { SignInForm } from './sign-in-form.tsx';
+import { moveSession } from '../lib/session.ts';
 import { Dialog } from '../ui/dialog.tsx';
+import { SignInForm } from './sign-in-form.tsx';
 
 /** Signs in again over the page, so that nothing typed on it is lost. */
-export function SessionEnded({ email, onDone }: { email: string; onDone: () => void }) {
+export function SessionEnded(props: { email: string; shopId: string; onDone: () => void }) {
+  const { email, shopId, onDone } = props;
   const client = useQueryClient();
   const onSignedIn = async () => {
+    // A new session may start in another shop; move it first, or the page would be taken away.
+    await moveSession(shopId);
     onDone();
     await client.invalidateQueries();
   };

@@ -22,8 +22,9 @@ type Props = {
   columnAll: readonly GridCell[];
   allColumnsLabel: string;
   allRowsLabel: string;
-  /** Writes a value and the ends of a range; money for most. */
   format: Formatter;
+  /** Writes a value and the ends of a range; whole money unless said. */
+  write?: ((value: number) => string) | undefined;
   /** What stands after a value: `/h`. */
   unit: string;
 };
@@ -35,6 +36,7 @@ type Props = {
  */
 export function GridCells(props: Props) {
   const { caption, corner, columns, rows, columnAll, format, unit } = props;
+  const write = props.write ?? ((value: number) => format.money(value, 'never'));
   const largest = Math.max(0, ...rows.flatMap((row) => row.cells.map((cell) => Math.abs(cell.value ?? 0))));
   return (
     <div className="table-frame" role="region" aria-label={caption} tabIndex={0}>
@@ -67,11 +69,11 @@ export function GridCells(props: Props) {
               </th>
               {row.cells.map((cell, at) => (
                 <td key={columns[at]} className={`cell h-[4.75rem] min-w-28 align-top tone-${cellTone(cell, largest)}`}>
-                  <Cell cell={cell} format={format} unit={unit} />
+                  <Cell cell={cell} format={format} write={write} unit={unit} />
                 </td>
               ))}
               <td className="min-w-24 align-top">
-                <Cell cell={row.all} format={format} unit={unit} isMargin />
+                <Cell cell={row.all} format={format} write={write} unit={unit} isMargin />
               </td>
             </tr>
           ))}
@@ -81,7 +83,7 @@ export function GridCells(props: Props) {
             </th>
             {columnAll.map((cell, at) => (
               <td key={columns[at]} className="align-top">
-                <Cell cell={cell} format={format} unit={unit} isMargin />
+                <Cell cell={cell} format={format} write={write} unit={unit} isMargin />
               </td>
             ))}
             <td />
@@ -95,11 +97,13 @@ export function GridCells(props: Props) {
 function Cell({
   cell,
   format,
+  write,
   unit,
   isMargin = false,
 }: {
   cell: GridCell;
   format: Formatter;
+  write: (value: number) => string;
   unit: string;
   isMargin?: boolean;
 }) {
@@ -115,13 +119,13 @@ function Cell({
       <>
         <span className="block whitespace-nowrap tabular-nums">
           <span className={`font-[700] ${isMargin ? 'text-body' : 'text-[1.25rem] leading-tight font-stretch-110%'}`}>
-            {format.money(cell.value, 'never')}
+            {write(cell.value)}
           </span>{' '}
           {unit}
         </span>
         {!isMargin && cell.low !== null && cell.high !== null && (
           <span className="block whitespace-nowrap tabular-nums">
-            {format.money(cell.low, 'never')} to {format.money(cell.high, 'never')}
+            {write(cell.low)} to {write(cell.high)}
           </span>
         )}
         <span className={isMargin ? 'block text-soft' : 'block'}>{count}</span>

@@ -15,7 +15,19 @@ async function readSession(): Promise<Session | null> {
   return sessionApi.get.response.parse(reply);
 }
 
-export const sessionQuery = () => queryOptions({ queryKey: ['session'], queryFn: readSession, staleTime: 300_000 });
+/**
+ * Read once and then only when something asks for it: a session that ends is noticed by the first refused request, which
+ * opens a dialog over the page; a quiet re-read would take the page away with what was typed on it.
+ */
+export const sessionQuery = () =>
+  queryOptions({
+    queryKey: ['session'],
+    queryFn: readSession,
+    staleTime: Number.POSITIVE_INFINITY,
+    gcTime: Number.POSITIVE_INFINITY,
+    refetchOnWindowFocus: false,
+    refetchOnReconnect: false,
+  });
 
 /** The session on a page that is only shown to people who are signed in. */
 export function useSession(): Session {
@@ -34,11 +46,16 @@ export async function signOut(): Promise<void> {
   await send({ method: 'DELETE', url: '/api/session', isAboutSession: true });
 }
 
-/** Moves the session to another of the person's shops and forgets what was read in the one before. */
+/** Moves the session to another of the person's shops, on the server only. */
+export async function moveSession(shopId: string): Promise<void> {
+  await send({ method: 'PUT', url: '/api/session/shop', body: { shopId }, isAboutSession: true });
+}
+
+/** Moves to another shop and forgets all that was read in the one before. Only where no page of either is shown. */
 export function useSwitchShop(): (shopId: string) => Promise<void> {
   const client = useQueryClient();
   return async (shopId) => {
-    await send({ method: 'PUT', url: '/api/session/shop', body: { shopId }, isAboutSession: true });
+    await moveSession(shopId);
     client.removeQueries({ predicate: (query) => query.queryKey[0] !== 'session' });
     await client.refetchQueries({ queryKey: sessionQuery().queryKey });
   };

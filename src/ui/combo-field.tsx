@@ -1,6 +1,7 @@
 import { Autocomplete } from '@base-ui/react/autocomplete';
 import type { Ref } from 'react';
 import { FieldFrame, type FieldProps, useField } from './field.tsx';
+import { usePopupHome } from './popup-home.ts';
 
 type Props = FieldProps & {
   className?: string | undefined;
@@ -32,6 +33,7 @@ export function ComboField({
   ...input
 }: Props) {
   const { id, control } = useField({ hint, error });
+  const home = usePopupHome();
   return (
     <FieldFrame {...{ id, label, hideLabel, hint, error, className }}>
       <Autocomplete.Root
@@ -41,9 +43,9 @@ export function ComboField({
         limit={12}
         disabled={disabled ?? false}
       >
-        <Autocomplete.Input {...input} {...control} className="control" />
-        <Autocomplete.Portal>
-          <Autocomplete.Positioner sideOffset={3} align="start" className="z-40">
+        <Autocomplete.Input {...input} {...control} aria-label={label} className="control" />
+        <Autocomplete.Portal container={home}>
+          <Autocomplete.Positioner sideOffset={3} positionMethod="fixed" align="start" className="z-40">
             <Autocomplete.Popup className="popup data-empty:hidden">
               <Autocomplete.List>
                 {(suggestion: string) => (

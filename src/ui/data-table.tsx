@@ -1,7 +1,7 @@
 import { createSortedRowModel, rowSortingFeature, sortFn_basic, tableFeatures, useTable } from '@tanstack/react-table';
 import { useVirtualizer } from '@tanstack/react-virtual';
 import { useMemo, useRef } from 'react';
-import { Cells, cellClass, Foot, TableFrame, type TableProps } from './table.tsx';
+import { Cells, type Column, cellClass, Foot, TableFrame, type TableProps } from './table.tsx';
 
 const features = tableFeatures({
   rowSortingFeature,
@@ -62,25 +62,7 @@ export function DataTable<Row extends object>(
 
   return (
     <TableFrame {...props} tall={isVirtual} frameRef={frame} {...(isVirtual ? { rowCount: ordered.length + 1 } : {})}>
-      <thead>
-        <tr>
-          {columns.map((column) => {
-            const direction = table.getColumn(column.id)?.getIsSorted() ?? false;
-            return (
-              <th key={column.id} scope="col" className={cellClass(column)} aria-sort={ariaSort(direction)}>
-                {column.sortBy ? (
-                  <button type="button" className="table-sort" onClick={() => onPress(column.id)}>
-                    {column.header}
-                    {direction && <span aria-hidden="true">{direction === 'asc' ? '▲' : '▼'}</span>}
-                  </button>
-                ) : (
-                  column.header
-                )}
-              </th>
-            );
-          })}
-        </tr>
-      </thead>
+      <SortHead columns={columns} directionOf={(id) => table.getColumn(id)?.getIsSorted() ?? false} onPress={onPress} />
       <tbody>
         {first > 0 && <Spacer height={window[0]?.start ?? 0} span={columns.length} />}
         {shown.map((row, at) => (
@@ -99,6 +81,36 @@ export function DataTable<Row extends object>(
   );
 }
 
+type Direction = false | 'asc' | 'desc';
+
+function SortHead<Row>(props: {
+  columns: readonly Column<Row>[];
+  directionOf: (id: string) => Direction;
+  onPress: (id: string) => void;
+}) {
+  return (
+    <thead>
+      <tr>
+        {props.columns.map((column) => {
+          const direction = props.directionOf(column.id);
+          return (
+            <th key={column.id} scope="col" className={cellClass(column)} aria-sort={ariaSort(direction)}>
+              {column.sortBy ? (
+                <button type="button" className="table-sort" onClick={() => props.onPress(column.id)}>
+                  {column.header}
+                  {direction && <span aria-hidden="true">{direction === 'asc' ? '▲' : '▼'}</span>}
+                </button>
+              ) : (
+                column.header
+              )}
+            </th>
+          );
+        })}
+      </tr>
+    </thead>
+  );
+}
+
 /** Stands for the rows that are not drawn. */
 function Spacer({ height, span }: { height: number; span: number }) {
   return (
@@ -108,6 +120,6 @@ function Spacer({ height, span }: { height: number; span: number }) {
   );
 }
 
-function ariaSort(direction: false | 'asc' | 'desc'): 'ascending' | 'descending' | undefined {
+function ariaSort(direction: Direction): 'ascending' | 'descending' | undefined {
   return direction === false ? undefined : direction === 'asc' ? 'ascending' : 'descending';
 }

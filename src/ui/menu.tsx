@@ -1,5 +1,6 @@
 import { Menu as Base } from '@base-ui/react/menu';
 import type { ReactNode } from 'react';
+import { usePopupHome } from './popup-home.ts';
 
 export type MenuItem = { label: string; note?: string; onSelect: () => void; disabled?: boolean };
 
@@ -13,13 +14,14 @@ export function Menu({
   items: readonly MenuItem[];
   plain?: boolean;
 }) {
+  const home = usePopupHome();
   return (
     <Base.Root>
       <Base.Trigger className={plain ? 'rail-act' : 'button button-small'}>
         {label} <span aria-hidden="true">▾</span>
       </Base.Trigger>
-      <Base.Portal>
-        <Base.Positioner sideOffset={4} align="start" className="z-40">
+      <Base.Portal container={home}>
+        <Base.Positioner sideOffset={4} positionMethod="fixed" align="start" className="z-40">
           <Base.Popup className="popup">
             {items.map((item) => (
               <Base.Item

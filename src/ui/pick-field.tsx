@@ -1,6 +1,7 @@
 import { Combobox } from '@base-ui/react/combobox';
 import type { Ref } from 'react';
 import { FieldFrame, type FieldProps, useField } from './field.tsx';
+import { usePopupHome } from './popup-home.ts';
 
 export type PickOption = { value: string; label: string; note?: string };
 
@@ -33,6 +34,7 @@ export function PickField({
   ref,
 }: Props) {
   const { id, control } = useField({ hint, error });
+  const home = usePopupHome();
   const chosen = options.find((option) => option.value === value) ?? null;
   return (
     <FieldFrame {...{ id, label, hideLabel, hint, error, className }}>
@@ -44,9 +46,9 @@ export function PickField({
         limit={30}
         disabled={disabled ?? false}
       >
-        <Combobox.Input ref={ref} {...control} placeholder={placeholder} className="control" />
-        <Combobox.Portal>
-          <Combobox.Positioner sideOffset={3} align="start" className="z-40">
+        <Combobox.Input ref={ref} {...control} aria-label={label} placeholder={placeholder} className="control" />
+        <Combobox.Portal container={home}>
+          <Combobox.Positioner sideOffset={3} positionMethod="fixed" align="start" className="z-40">
             <Combobox.Popup className="popup">
               <Combobox.Empty>
                 <div className="px-3 py-2 text-soft">Nothing matches</div>

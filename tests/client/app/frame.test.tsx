@@ -111,7 +111,7 @@ test('an address of a shop that is not mine says no more than that nothing stand
 });
 
 test('a session that ends is renewed over the page', async () => {
-  serve(buildSession('owner'));
+  const server = serve(buildSession('owner'));
   open(`/s/one/${NOWHERE}`);
   await places();
   reportProblem(new ApiProblem({ title: 'Sign in' }, 401));
@@ -120,6 +120,18 @@ test('a session that ends is renewed over the page', async () => {
   await userEvent.type(within(dialog).getByLabelText('Password'), 'a long enough sentence');
   await userEvent.click(within(dialog).getByRole('button', { name: 'Sign in' }));
   await waitFor(() => expect(screen.queryByRole('dialog')).not.toBeInTheDocument());
+  expect(window.location.pathname).toBe(`/s/one/${NOWHERE}`);
+  expect(server.requests).toContain('PUT /api/session/shop');
+});
+
+test('another tab moved to another shop: the page offers to come back and stays', async () => {
+  const server = serve(buildSession('owner'));
+  open(`/s/one/${NOWHERE}`);
+  await places();
+  reportProblem(new ApiProblem({ type: '/problems/other-shop', title: 'Another shop' }, 409));
+  await userEvent.click(await screen.findByRole('button', { name: 'Go back to Shop one' }));
+  await waitFor(() => expect(screen.queryByRole('dialog')).not.toBeInTheDocument());
+  expect(server.requests).toContain('PUT /api/session/shop');
   expect(window.location.pathname).toBe(`/s/one/${NOWHERE}`);
 });
 

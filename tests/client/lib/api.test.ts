@@ -82,7 +82,7 @@ describe('a call', () => {
     answer({ id: 'x', secret: 1 });
     expect(await call(get, { params: { thingId: 'x' }, query: {} })).toEqual({ id: 'x' });
     answer({ id: 5 });
-    await expect(call(get, { params: { thingId: 'x' }, query: {} })).rejects.toThrow();
+    await expect(call(get, { params: { thingId: 'x' }, query: {} })).rejects.toThrow('expected string');
   });
 });
 

@@ -16,7 +16,8 @@ export function clientFiles(): RequestHandler[] {
       },
     }),
     (req, res, next) => {
-      const wantsPage = req.method === 'GET' && !req.path.startsWith('/api/') && !path.extname(req.path);
+      const wantsPage =
+        (req.method === 'GET' || req.method === 'HEAD') && !req.path.startsWith('/api/') && !path.extname(req.path);
       if (!wantsPage || !existsSync(page)) return next();
       res.setHeader('Cache-Control', 'no-cache');
       res.sendFile(page);

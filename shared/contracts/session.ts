@@ -60,8 +60,8 @@ export const sessionApi = {
   get: {
     method: 'GET',
     path: '/api/session',
-    summary: 'Who is signed in, in which shop, as what',
-    response: sessionSchema,
+    summary: 'Who is signed in, in which shop, as what; null when nobody is',
+    response: sessionSchema.nullable(),
   },
   signIn: { method: 'POST', path: '/api/session', summary: 'Sign in', body: signInSchema, response: z.void() },
   signOut: { method: 'DELETE', path: '/api/session', summary: 'Sign out', response: z.void() },

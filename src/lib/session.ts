@@ -5,10 +5,7 @@ import { send } from './send.ts';
 
 /** Who is signed in and which shop the session is in; null when nobody is. */
 async function readSession(): Promise<Session | null> {
-  const reply = await send({ method: 'GET', url: '/api/session', isAboutSession: true }).catch((problem: unknown) => {
-    if (problem instanceof ApiProblem && problem.status === 401) return null;
-    throw problem;
-  });
+  const reply = await send({ method: 'GET', url: '/api/session', isAboutSession: true });
   if (reply === null) return null;
   // Loaded only here: a visitor who is not signed in never pays for the schemas.
   const { sessionApi } = await import('#shared/contracts/session.ts');

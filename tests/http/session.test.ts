@@ -59,7 +59,8 @@ describe('sign-up, sign-in and sign-out', () => {
     const api = await testApi();
     const ada = await api.owner();
     expect((await ada.delete('/api/session')).status).toBe(204);
-    expect((await ada.get('/api/session')).status).toBe(401);
+    expect((await ada.get('/api/session')).body).toBeNull();
+    expect((await ada.get('/api/shop')).status).toBe(401);
   });
 
   it('keeps only the hash of a session id', async () => {

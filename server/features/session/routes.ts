@@ -22,9 +22,12 @@ export const sessionRoutes: Route[] = [
       logger.warn({ requestId: ctx.req.id, source }, 'sign-in refused');
       throw new ProblemError(401, { name: 'wrong-sign-in', detail: 'Address and password do not fit.' });
     }
-    await leave(ctx);
     const shops = await users.shopsOf(user.id);
-    const cookie = await sessions.start(user.id, shops[0]?.id ?? null, ctx.req.headers['user-agent']);
+    if (!shops[0]) {
+      throw new ProblemError(403, { detail: 'You belong to no shop any more. Ask for an invitation to one.' });
+    }
+    await leave(ctx);
+    const cookie = await sessions.start(user.id, shops[0].id, ctx.req.headers['user-agent']);
     ctx.res.appendHeader('Set-Cookie', cookie);
     logger.info({ requestId: ctx.req.id, userId: user.id }, 'signed in');
   }),
@@ -57,14 +60,11 @@ async function leave(ctx: Pick<Context, 'viewer' | 'services'>): Promise<string 
   return ctx.viewer ? ctx.services.sessions.end(ctx.viewer.sessionId) : null;
 }
 
-async function describeSession(ctx: Context<typeof sessionApi.get>): Promise<Session> {
-  if (!ctx.viewer) throw new ProblemError(401, { detail: 'Sign in to go on.' });
+async function describeSession(ctx: Context<typeof sessionApi.get>): Promise<Session | null> {
+  if (!ctx.viewer?.shop) return null;
   const { database } = ctx.services;
   const users = userStore(database.reader);
   const [user, shops] = await Promise.all([users.get(ctx.viewer.userId), users.shopsOf(ctx.viewer.userId)]);
-  if (!ctx.viewer.shop) {
-    throw new ProblemError(403, { name: 'no-shop', detail: 'You no longer belong to the shop that was open.' });
-  }
   const { shopId, role } = ctx.actor;
   const shop = fromRow<Shop>(await database.reader('shops').where({ id: shopId }).first<object>());
   const seesMoney = role !== 'mechanic' && role !== 'partner';

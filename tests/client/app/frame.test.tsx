@@ -38,8 +38,8 @@ function serve(session: Session | null) {
     if (method === 'POST' && url === '/api/session') server.session = session ?? buildSession('owner');
     if (url === '/api/session/shop') server.session = buildSession('owner', JSON.parse(String(init?.body)).shopId);
     if (method !== 'GET') return new Response(null, { status: 204 });
-    if (url === '/api/session' && server.session) return Response.json(server.session);
-    const problem = { type: 'about:blank', title: 'Not here', status: url === '/api/session' ? 401 : 404 };
+    if (url === '/api/session') return Response.json(server.session);
+    const problem = { type: 'about:blank', title: 'Not here', status: 404 };
     return new Response(JSON.stringify(problem), {
       status: problem.status,
       headers: { 'content-type': 'application/problem+json' },

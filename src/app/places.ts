@@ -16,7 +16,7 @@ export const PLACES: readonly Place[] = [
   { path: 'hours', label: 'Hours', group: 'Books', roles: [...BOOKS, 'mechanic'] },
   { path: 'import', label: 'Import', group: 'Books', roles: ['owner', 'bookkeeper'] },
   { path: 'people', label: 'People', group: 'Shop', roles: ['owner'] },
-  { path: 'shop', label: 'Shop', group: 'Shop', roles: ['owner'] },
+  { path: 'shop', label: 'Shop', group: 'Shop', roles: BOOKS },
 ];
 
 export const GROUPS = ['Answers', 'Books', 'Shop'] as const;

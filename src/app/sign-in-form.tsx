@@ -3,6 +3,7 @@ import { ApiProblem } from '../lib/api-problem.ts';
 import { signIn } from '../lib/session.ts';
 import { Button } from '../ui/button.tsx';
 import { ErrorSummary } from '../ui/error-summary.tsx';
+import { PasswordField } from '../ui/password-field.tsx';
 import { TextField } from '../ui/text-field.tsx';
 
 /** Address and password, and the way in. Plain React: the first page a visitor meets loads no form library. */
@@ -26,7 +27,7 @@ export function SignInForm({ email = '', onSignedIn }: { email?: string; onSigne
   return (
     <form onSubmit={onSubmit} className="grid max-w-[24rem] gap-4">
       <TextField label="Email" name="email" type="email" autoComplete="username" required defaultValue={email} />
-      <TextField label="Password" name="password" type="password" autoComplete="current-password" required />
+      <PasswordField label="Password" name="password" autoComplete="current-password" required />
       <ErrorSummary message={problem} />
       <Button kind="main" type="submit" busy={isBusy}>
         Sign in

@@ -47,6 +47,7 @@ const HOURS = `
     sum(CASE WHEN is_paid THEN 0 ELSE seconds END) AS own, sum(CASE WHEN is_paid THEN seconds ELSE 0 END) AS paid
   FROM hours WHERE ${OF_THESE} AND voided_at IS NULL GROUP BY rebuild_id`;
 
+// The version is the one that the write at hand will raise the books to.
 const REBUILDS = `
   INSERT INTO rollup_rebuilds
   SELECT r.shop_id, r.id, coalesce(sum(e.cents), 0), count(e.id), sum(e.id IS NOT NULL AND e.dated_on IS NULL),
@@ -54,7 +55,8 @@ const REBUILDS = `
     sum(coalesce(e.cents <> 0 AND e.dated_on > coalesce(r.sold_on, r.exit_on), 0)),
     sum(CASE WHEN e.dated_on > coalesce(r.sold_on, r.exit_on) THEN e.cents ELSE 0 END),
     CASE WHEN h.own_count > 0 OR h.dated_count > 0 THEN h.own END,
-    CASE WHEN h.paid_count > 0 OR h.dated_count > 0 THEN h.paid END, NULL, NULL
+    CASE WHEN h.paid_count > 0 OR h.dated_count > 0 THEN h.paid END, NULL, NULL,
+    (SELECT books_version + 1 FROM shops WHERE id = @shop)
   FROM rebuilds r
   LEFT JOIN entries e ON e.shop_id = r.shop_id AND e.rebuild_id = r.id AND e.voided_at IS NULL
   LEFT JOIN (${HOURS}) h ON h.rebuild_id = r.id

@@ -50,7 +50,9 @@ function keptShop(raw: RawDatabase, shops: KeptShops, shopId: string): KeptShop 
   const version = raw.prepare('SELECT books_version FROM shops WHERE id = ?').pluck().get(shopId) as number;
   const kept = shops.get(shopId);
   const current =
-    kept?.facts.booksVersion === version ? kept : { facts: readShopFacts(raw, shopId), replies: new Map() };
+    kept?.facts.booksVersion === version
+      ? kept
+      : { facts: readShopFacts(raw, shopId, kept?.facts), replies: new Map() };
   keep(shops, shopId, current, SHOPS_KEPT);
   return current;
 }

@@ -15,7 +15,7 @@ export type StripRow = {
   surpriseShare: number | null;
 };
 
-/** Above this many dots in all, a row is its band and middle only. */
+/** Above this many rebuilds in a row, rows are their band and middle only. */
 export const DOTS_AT_MOST = 300;
 /** Axis ends where figures stop saying more: a category at three times its estimate is simply far over. */
 const LOW_END = -1;
@@ -30,7 +30,7 @@ export function dotStripLayout(rows: readonly StripRow[], size: StripSize) {
   const range: [number, number] = [size.labelRoom + 8, size.width - size.figureRoom - 8];
   const scale = scaleLinear<number>({ domain: [low, high], range });
   const toX = (rate: number) => scale(Math.min(high, Math.max(low, rate)));
-  const showDots = rows.reduce((sum, row) => sum + row.dots.length, 0) <= DOTS_AT_MOST;
+  const showDots = rows.every((row) => row.dots.length <= DOTS_AT_MOST);
   const room = Math.max(2, Math.floor((range[1] - range[0]) / 70));
   return {
     scale,

@@ -10,7 +10,7 @@ type Props = { caption: string; rows: readonly StripRow[]; format: Formatter };
 
 /**
  * Where the money runs over: per category each rebuild a dot, locked estimate at zero, a tick at the middle and a line over
- * 8 in 10; at the right the middle in figures and the hatched share that nobody foresaw. Above 300 dots only lines.
+ * 8 in 10; at the right the middle in figures and the hatched share that nobody foresaw. Above 300 rebuilds only lines.
  * `caption`, `rows` (label, n, dots {rate, label, href}, middle, low, high, surpriseShare), `format`.
  */
 export function DotStrip({ caption, rows, format }: Props) {

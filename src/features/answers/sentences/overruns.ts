@@ -1,0 +1,88 @@
+import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
+import type { Formatter } from '#shared/formatter.ts';
+import { capital, counted, mark, type Said, type Sentence, said, say } from './parts.ts';
+
+type Category = OverrunsAnswer['categories'][number];
+
+/** Where does the money run over? All together, then the category with most money over and the one furthest over. */
+export function sayOverruns(answer: OverrunsAnswer, format: Formatter): Said {
+  return { answer: sentence(answer, format), cautions: cautions(answer, format) };
+}
+
+function sentence(answer: OverrunsAnswer, format: Formatter): Sentence {
+  const { total } = answer;
+  if (total.n === 0 || total.pooled === null) {
+    return ['No finished rebuild has a locked estimate yet, so nothing can be said to run over.'];
+  }
+  const came = overOrUnder(total.pooled, format);
+  if (total.isThin) {
+    return say`Too few yet to say where: ${counted(format, total.n, 'finished rebuild')} with an estimate came ${came} so far.`;
+  }
+  return say`All together the work comes ${came}${where(answer, format)}.`;
+}
+
+/** `34% over`, `3% under`, `as estimated`; the figure is marked. */
+function overOrUnder(rate: number, format: Formatter): Sentence {
+  const text = format.percent(Math.abs(rate));
+  if (text === format.percent(0)) return ['to what was estimated'];
+  return say`in ${mark(`${text} ${rate > 0 ? 'over' : 'under'}`)} the locked estimates`;
+}
+
+const over = (category: Category) => category.actualCents - category.estimateCents;
+
+/** Category with the most cents over, and the one furthest over by its pooled rate; only those with enough rebuilds. */
+export function worstCategories(answer: OverrunsAnswer): { most: Category; furthest: Category } | null {
+  const said = answer.categories.filter((one) => !one.isThin && one.n > 0 && over(one) > 0);
+  const [first] = said;
+  if (!first) return null;
+  return {
+    most: said.reduce((a, b) => (over(b) > over(a) ? b : a), first),
+    furthest: said.reduce((a, b) => ((b.pooled ?? 0) > (a.pooled ?? 0) ? b : a), first),
+  };
+}
+
+function where(answer: OverrunsAnswer, format: Formatter): Sentence {
+  const worst = worstCategories(answer);
+  if (!worst) return [];
+  const { most, furthest } = worst;
+  const dollars = mark(format.signed(over(most)));
+  const rate = mark(format.signedPercent(furthest.pooled ?? 0));
+  if (most === furthest) return say`; ${most.name} most, by ${dollars} and ${rate}`;
+  return say`; ${most.name} most in money (${dollars}), ${furthest.name} furthest (${rate})`;
+}
+
+function cautions(answer: OverrunsAnswer, format: Formatter): string[] {
+  const { total, hours, surprises, categories } = answer;
+  const unbudgeted = categories.reduce((sum, one) => sum + one.unbudgetedCents, 0);
+  return said(
+    total.n > 0 && `Based on ${counted(format, total.n, 'finished rebuild')} with a locked estimate.`,
+    total.median !== null &&
+      total.q10 !== null &&
+      total.q90 !== null &&
+      !total.isThin &&
+      `Half come in above ${format.signedPercent(total.median)}; 8 in 10 lie between ${format.signedPercent(total.q10)} and ${format.signedPercent(total.q90)}.`,
+    hoursWords(hours, format),
+    seenWords(answer, format),
+    surprises.rate !== null && surprises.n > 0 && surpriseWords(surprises, format),
+    unbudgeted > 0 && `${format.money(unbudgeted)} went where nothing had been planned.`,
+  );
+}
+
+function hoursWords(hours: OverrunsAnswer['hours'], format: Formatter): string | null {
+  if (hours.pooled === null || hours.n === 0) return null;
+  const rate = format.percent(Math.abs(hours.pooled));
+  const words = hours.pooled < 0 ? `${rate} under` : `${rate} over`;
+  return `Hours run ${words} plan${hours.isThin ? `, on ${counted(format, hours.n)}: too few yet` : ''}.`;
+}
+
+function seenWords({ seen }: OverrunsAnswer, format: Formatter): string | null {
+  const of = (value: boolean) => seen.find((one) => one.seen === value && !one.isThin && one.pooled !== null);
+  const looked = of(true);
+  const unseen = of(false);
+  if (!looked || !unseen) return null;
+  return `Seen before buying ${format.signedPercent(looked.pooled ?? 0)}, unseen ${format.signedPercent(unseen.pooled ?? 0)}.`;
+}
+
+function surpriseWords(surprises: OverrunsAnswer['surprises'], format: Formatter): string {
+  return `${capital(counted(format, surprises.x))} of ${format.number(surprises.n)} had at least one surprise.`;
+}

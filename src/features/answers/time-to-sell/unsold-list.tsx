@@ -1,0 +1,71 @@
+import type { TimeToSellAnswer } from '#shared/contracts/answers-time-to-sell.ts';
+import { DataTable } from '../../../ui/data-table.tsx';
+import { Days, Money } from '../../../ui/figures.tsx';
+import { useFormatter } from '../../../ui/formatter-context.tsx';
+import { Panel } from '../../../ui/panel.tsx';
+import type { Column } from '../../../ui/table.tsx';
+import { RebuildLink } from '../rebuild-link.tsx';
+
+type Row = TimeToSellAnswer['unsold']['rebuilds'][number];
+
+/** What is still in hand, how long, and the money in it. */
+export function UnsoldList({ unsold }: { unsold: TimeToSellAnswer['unsold'] }) {
+  const format = useFormatter();
+  if (unsold.total === 0) return null;
+  const part =
+    unsold.rebuilds.length < unsold.total
+      ? ` The ${format.number(unsold.rebuilds.length)} that have waited longest are shown.`
+      : '';
+  return (
+    <Panel
+      className="mb-6"
+      title={`Still in hand on ${format.day(unsold.on)}`}
+      subtitle={`${format.count(unsold.total, 'rebuild')} ${unsold.total === 1 ? 'holds' : 'hold'} ${format.money(unsold.cents)}: purchase and what was paid so far.${part}`}
+    >
+      <DataTable caption="Unsold rebuilds" rows={unsold.rebuilds} columns={COLUMNS} rowKey={(row) => row.id} />
+    </Panel>
+  );
+}
+
+const COLUMNS: readonly Column<Row>[] = [
+  {
+    id: 'rebuild',
+    header: 'Rebuild',
+    heads: true,
+    cell: (row) => (
+      <span className="block min-w-40">
+        <RebuildLink rebuild={row} />
+      </span>
+    ),
+    sortBy: (row) => row.tag,
+  },
+  { id: 'stage', header: 'Stage', cell: (row) => row.stage, sortBy: (row) => row.stage },
+  {
+    id: 'listed',
+    header: 'Days listed',
+    number: true,
+    cell: (row) => <Days days={row.daysListed} why="not listed" />,
+    sortBy: (row) => row.daysListed,
+  },
+  {
+    id: 'held',
+    header: 'Days since bought',
+    number: true,
+    cell: (row) => <Days days={row.daysSinceBought} />,
+    sortBy: (row) => row.daysSinceBought,
+  },
+  {
+    id: 'asking',
+    header: 'Asking',
+    number: true,
+    cell: (row) => <Money cents={row.askingCents} />,
+    sortBy: (row) => row.askingCents,
+  },
+  {
+    id: 'money',
+    header: 'Money in it',
+    number: true,
+    cell: (row) => <Money cents={row.tiedUpCents} />,
+    sortBy: (row) => row.tiedUpCents,
+  },
+];

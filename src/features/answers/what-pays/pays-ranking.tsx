@@ -1,0 +1,104 @@
+import { useMemo } from 'react';
+import { Link } from 'react-router-dom';
+import type { WhatPaysAnswer } from '#shared/contracts/answers-what-pays.ts';
+import { Hours, Money } from '../../../ui/figures.tsx';
+import { useFormatter } from '../../../ui/formatter-context.tsx';
+import { Panel } from '../../../ui/panel.tsx';
+import { Segmented } from '../../../ui/segmented.tsx';
+import { type Column, Table } from '../../../ui/table.tsx';
+import { useAddress } from '../address.ts';
+import { useShopPath } from '../rebuild-link.tsx';
+import { capital } from '../sentences/parts.ts';
+import { fitsOf, type Group, nameOf, type PayView } from '../sentences/what-pays.ts';
+import { figureOf, groupSearch, inRank } from './groups.ts';
+
+const SETS = [
+  { value: 'damages', label: 'By damage' },
+  { value: 'classes', label: 'By class' },
+  { value: 'cells', label: 'By kind' },
+] as const;
+type SetName = (typeof SETS)[number]['value'];
+
+/** Kinds in the order of the lower end of their range, the plain figure and the sums beside it. */
+export function PaysRanking({ answer, view }: { answer: WhatPaysAnswer; view: PayView }) {
+  const { search, change } = useAddress();
+  const by: SetName = SETS.find(({ value }) => value === search.get('by'))?.value ?? 'damages';
+  const { groups, average } = fitsOf(answer, view)[by];
+  const columns = useColumns(view);
+  const noDifference = average?.betweenVariance === 0;
+  return (
+    <Panel
+      className="mb-6"
+      title="In order of the lower end"
+      subtitle={
+        noDifference
+          ? 'No difference shown between these: every figure is pulled all the way to the average.'
+          : 'What a kind brings at least, as far as its rebuilds show. Fewer than five are not ranked.'
+      }
+      actions={
+        <Segmented
+          label="Compare by"
+          options={SETS}
+          value={by}
+          onChange={(value) => change({ by: value === 'damages' ? null : value })}
+        />
+      }
+    >
+      <Table
+        caption="Kinds of wreck in order of the lower end of their range"
+        rows={inRank(groups)}
+        columns={columns}
+        rowKey={(row) => `${row.classId}${row.damageId}`}
+      />
+    </Panel>
+  );
+}
+
+function useColumns(view: PayView): readonly Column<Group>[] {
+  const format = useFormatter();
+  const path = useShopPath();
+  const isHour = view === 'per-hour';
+  return useMemo(() => {
+    const write = (value: number) => (isHour ? format.perHour(value) : format.percent(value, 1));
+    const gray = (row: Group, text: string) => <span className={row.isThin ? 'text-soft' : ''}>{text}</span>;
+    return [
+      { id: 'rank', header: 'Rank', number: true, cell: (row) => row.rank ?? '' },
+      {
+        id: 'kind',
+        header: 'Kind',
+        heads: true,
+        cell: (row) => (
+          <span className="block min-w-32">
+            <Link to={path(`rebuilds?${groupSearch(row)}`)}>{capital(nameOf(row))}</Link>
+          </span>
+        ),
+      },
+      { id: 'n', header: 'Rebuilds', number: true, cell: (row) => row.n },
+      {
+        id: 'value',
+        header: 'Pulled to average',
+        number: true,
+        cell: (row) => (row.isThin ? gray(row, 'too few yet') : <strong>{write(figureOf(row).value)}</strong>),
+      },
+      {
+        id: 'range',
+        header: '95% range',
+        number: true,
+        cell: (row) => {
+          const { low, high } = figureOf(row);
+          return low === null || high === null ? '' : gray(row, `${write(low)} to ${write(high)}`);
+        },
+      },
+      {
+        id: 'plain',
+        header: 'Plain, sum over sum',
+        number: true,
+        cell: (row) => (row.plain === null ? '' : gray(row, write(row.plain))),
+      },
+      { id: 'kept', header: 'Kept in all', number: true, cell: (row) => <Money cents={row.profitCents} tone="kept" /> },
+      isHour
+        ? { id: 'hours', header: 'Own hours', number: true, cell: (row) => <Hours seconds={row.ownSeconds} /> }
+        : { id: 'cost', header: 'All-in cost', number: true, cell: (row) => <Money cents={row.costCents} /> },
+    ] satisfies Column<Group>[];
+  }, [format, path, isHour]);
+}

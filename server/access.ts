@@ -63,6 +63,15 @@ export const access: AccessTable = {
   'PATCH /api/my-hours/:hoursId': WORKS,
   'POST /api/my-hours/:hoursId/void': WORKS,
 
+  'GET /api/imports': READS_BOOKS,
+  'POST /api/imports': BOOKS,
+  'GET /api/imports/:importId': READS_BOOKS,
+  'PATCH /api/imports/:importId': BOOKS,
+  'DELETE /api/imports/:importId': BOOKS,
+  'GET /api/imports/:importId/rows': READS_BOOKS,
+  'POST /api/imports/:importId/commit': BOOKS,
+  'POST /api/imports/:importId/undo': BOOKS,
+
   'GET /api/answers/year': READS_BOOKS,
   'GET /api/answers/what-pays': READS_BOOKS,
   'GET /api/answers/overruns': READS_BOOKS,

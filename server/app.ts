@@ -6,6 +6,7 @@ import { answersRoutes } from './features/answers/routes.ts';
 import { healthRoutes } from './features/health/routes.ts';
 import { hoursRoutes } from './features/hours/routes.ts';
 import { ledgerRoutes } from './features/ledger/routes.ts';
+import { importRoutes } from './features/imports/routes.ts';
 import { peopleRoutes } from './features/people/routes.ts';
 import { rebuildsRoutes } from './features/rebuilds/routes.ts';
 import { rulesRoutes } from './features/rules/routes.ts';
@@ -23,6 +24,7 @@ const routes: Route[] = [
   ...healthRoutes(() => openApiDocument(routes, access)),
   ...sessionRoutes,
   ...peopleRoutes,
+  ...importRoutes,
   ...shopRoutes,
   ...rebuildsRoutes,
   ...ledgerRoutes,

@@ -46,8 +46,15 @@ export interface Importing {
 }
 
 const SHEET = 1;
-const ENTRY = 'id shop_id rebuild_id category_id dated_on cents vendor what foreseen is_extra is_guess import_id import_sheet import_row import_col created_at created_by'.split(' ');
-const HOURS = 'id shop_id rebuild_id worker_id worked_on seconds is_paid task import_id import_sheet import_row import_col created_at created_by'.split(' ');
+const DRAWN = 20_000;
+const ENTRY =
+  'id shop_id rebuild_id category_id dated_on cents vendor what foreseen is_extra is_guess import_id import_sheet import_row import_col created_at created_by'.split(
+    ' ',
+  );
+const HOURS =
+  'id shop_id rebuild_id worker_id worked_on seconds is_paid task import_id import_sheet import_row import_col created_at created_by'.split(
+    ' ',
+  );
 const RAW_ROW = ['shop_id', 'import_id', 'sheet', 'row', 'cells', 'outcome', 'reason'];
 
 /**
@@ -63,18 +70,50 @@ export function importedBooks(raw: RawDatabase, { shopId, importId, userId, at }
     `INSERT INTO estimates (id, shop_id, rebuild_id, revision, is_baseline, made_on, planned_seconds, expected_sale_cents, locked_at, import_id, created_at)
      VALUES (?, ?, ?, 0, 1, ?, ?, ?, ?, ?, ?)`,
   );
-  const estimateLine = raw.prepare('INSERT INTO estimate_lines (shop_id, estimate_id, category_id, cents) VALUES (?, ?, ?, ?)');
+  const estimateLine = raw.prepare(
+    'INSERT INTO estimate_lines (shop_id, estimate_id, category_id, cents) VALUES (?, ?, ?, ?)',
+  );
   const worker = raw.prepare('INSERT INTO workers (id, shop_id, name, is_paid) VALUES (?, ?, ?, 0)');
 
   return {
     entry(e: ImportedEntry): void {
       entries.add(
-        nextId(), shopId, e.rebuildId, e.categoryId, e.datedOn, e.cents, e.vendor, e.what, e.foreseen, e.isExtra ? 1 : 0, e.isGuess ? 1 : 0,
-        importId, SHEET, e.row, e.col, at, userId,
+        nextId(),
+        shopId,
+        e.rebuildId,
+        e.categoryId,
+        e.datedOn,
+        e.cents,
+        e.vendor,
+        e.what,
+        e.foreseen,
+        e.isExtra ? 1 : 0,
+        e.isGuess ? 1 : 0,
+        importId,
+        SHEET,
+        e.row,
+        e.col,
+        at,
+        userId,
       );
     },
     hours(h: ImportedHours): void {
-      hours.add(nextId(), shopId, h.rebuildId, h.workerId, h.workedOn, h.seconds, h.isPaid ? 1 : 0, h.task, importId, SHEET, h.row, h.col, at, userId);
+      hours.add(
+        nextId(),
+        shopId,
+        h.rebuildId,
+        h.workerId,
+        h.workedOn,
+        h.seconds,
+        h.isPaid ? 1 : 0,
+        h.task,
+        importId,
+        SHEET,
+        h.row,
+        h.col,
+        at,
+        userId,
+      );
     },
     /** A row of the file as it stood, and how it ended. */
     row(line: number, cells: readonly string[], outcome: string, reason: string | null): void {
@@ -95,19 +134,32 @@ export function importedBooks(raw: RawDatabase, { shopId, importId, userId, at }
     /** A rebuild that the file brings: columns of its table → values. */
     rebuild(id: string, row: number, columns: ReadonlyMap<string, string | number>): void {
       const known = [...columns];
-      const names = ['id', 'shop_id', 'import_id', 'import_sheet', 'import_row', 'created_at', ...known.map(([name]) => name)];
+      const names = [
+        'id',
+        'shop_id',
+        'import_id',
+        'import_sheet',
+        'import_row',
+        'created_at',
+        ...known.map(([name]) => name),
+      ];
       raw
         .prepare(`INSERT INTO rebuilds (${names.join(', ')}) VALUES (${names.map(() => '?').join(', ')})`)
         .run(id, shopId, importId, SHEET, row, at, ...known.map(([, value]) => value));
     },
     /** Fills what the books did not know of a rebuild. Gives the columns filled, with their values. */
     fill(id: string, columns: ReadonlyMap<string, string | number>): Record<string, string | number> {
-      const before = raw.prepare('SELECT * FROM rebuilds WHERE shop_id = ? AND id = ?').get(shopId, id) as Record<string, unknown>;
+      const before = raw.prepare('SELECT * FROM rebuilds WHERE shop_id = ? AND id = ?').get(shopId, id) as Record<
+        string,
+        unknown
+      >;
       const filled = Object.fromEntries([...columns].filter(([name]) => before[name] === null));
       const names = Object.keys(filled);
       if (names.length === 0) return {};
       raw
-        .prepare(`UPDATE rebuilds SET ${names.map((name) => `${name} = ?`).join(', ')}, version = version + 1 WHERE shop_id = ? AND id = ?`)
+        .prepare(
+          `UPDATE rebuilds SET ${names.map((name) => `${name} = ?`).join(', ')}, version = version + 1 WHERE shop_id = ? AND id = ?`,
+        )
         .run(...Object.values(filled), shopId, id);
       return filled;
     },
@@ -122,11 +174,11 @@ export function importedBooks(raw: RawDatabase, { shopId, importId, userId, at }
 
 export type ImportedBooks = ReturnType<typeof importedBooks>;
 
-/** New ids, their random bytes drawn a thousand at a time. */
+/** New ids, drawn many at a time and given out in falling order: the index over them grows in one sweep per draw. */
 function idSupply(): () => string {
   let ids: string[] = [];
   return () => {
-    if (ids.length === 0) ids = newIds(1000);
+    if (ids.length === 0) ids = newIds(DRAWN).sort();
     return ids.pop() as string;
   };
 }

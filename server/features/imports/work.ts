@@ -39,11 +39,15 @@ export type Done =
   | { readonly kind: 'outdated' }
   | { readonly kind: 'undone'; readonly obstacle: string | null };
 
+// The indexes on an import's rows grow at random places; with SQLite's usual 2 MB they are read again and again.
+const CACHE_KB = 64 * 1024;
+
 /** Does a job on a connection of its own. Whoever calls holds the write lock for a commit or an undo. */
 export function work(job: Job, onPart: (share: number) => void): Done {
   const raw = new BetterSqlite3(job.databaseFile);
   try {
     preparePragmas(raw);
+    raw.pragma(`cache_size = -${CACHE_KB}`);
     if (job.kind === 'read') {
       return { kind: 'read', reading: readFile(bytesOfFile(job.file), shopBooks(raw, job.shopId, job.now), job.settings, onPart) };
     }
@@ -58,12 +62,13 @@ function commitJob(raw: RawDatabase, job: CommitJob, onPart: (share: number) => 
     const commit = raw.transaction(() => {
       const brought = commitRows(raw, bytesOfFile(job.file), job, onPart);
       const version = raiseBooksVersion(raw, job.shopId);
-      raw
+      const { changes } = raw
         .prepare(
           `UPDATE imports SET state = 'committed', committed_at = ?, committed_version = ?, reading = json_set(reading, '$.brought', json(?)), version = version + 1
-           WHERE shop_id = ? AND id = ?`,
+           WHERE shop_id = ? AND id = ? AND state = 'committing'`,
         )
         .run(job.at, version, JSON.stringify(brought), job.shopId, job.importId);
+      if (changes !== 1) throw new Error('The import is not waiting to be booked.');
       leave(raw, job, 'commit import', null, job.control);
     });
     commit.immediate();
@@ -76,8 +81,13 @@ function commitJob(raw: RawDatabase, job: CommitJob, onPart: (share: number) => 
 
 function undoJob(raw: RawDatabase, job: UndoTask): Done {
   const undo = raw.transaction((): Done => {
-    const row = raw.prepare(`SELECT json_extract(reading, '$.brought') AS brought FROM imports WHERE shop_id = ? AND id = ?`).get(job.shopId, job.importId);
-    const brought = JSON.parse((row as { brought: string }).brought) as Brought;
+    const kept = raw
+      .prepare(`SELECT json_extract(reading, '$.brought') FROM imports WHERE shop_id = ? AND id = ? AND state = 'committed'`)
+      .pluck()
+      .get(job.shopId, job.importId) as string | undefined;
+    // Someone else took it out while this one waited its turn.
+    if (kept === undefined) return { kind: 'undone', obstacle: null };
+    const brought = JSON.parse(kept) as Brought;
     const obstacle = undoObstacle(raw, job.shopId, job.importId, brought.filled);
     if (obstacle !== null) return { kind: 'undone', obstacle };
     removeImported(raw, job.shopId, job.importId, brought);

@@ -1,13 +1,13 @@
-import { parentPort, workerData } from 'node:worker_threads';
+import { parentPort } from 'node:worker_threads';
 import { type Job, work } from './work.ts';
 
-/** What the worker says: how far it is, and how it ended. */
-const port = parentPort;
-let told = 0;
-port?.postMessage({
-  done: work(workerData as Job, (share) => {
+/** Does one job after another as they are sent; says how far it is, and how each ended. */
+parentPort?.on('message', (job: Job) => {
+  let told = 0;
+  const done = work(job, (share) => {
     if (share - told < 0.02) return;
     told = share;
-    port.postMessage({ share });
-  }),
+    parentPort?.postMessage({ share });
+  });
+  parentPort?.postMessage({ done });
 });

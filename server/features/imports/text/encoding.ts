@@ -19,11 +19,9 @@ const SIGNATURES: readonly (readonly [string, string])[] = [
  * Windows-1252. Throws a FileRefusal for what is no text.
  */
 export function findEncoding(source: ByteSource): Encoding {
-  const [head] = source.chunks();
-  if (!head || source.size === 0) throw new FileRefusal('empty', 'The file is empty.');
+  const [head = Buffer.alloc(0)] = source.chunks();
+  refuseNotText(head);
   const start = head.toString('hex', 0, 4);
-  const known = SIGNATURES.find(([signature]) => start.startsWith(signature));
-  if (known) throw new FileRefusal('not-text', known[1]);
   if (start.startsWith('fffe')) return 'utf-16le';
   if (start.startsWith('feff')) return 'utf-16be';
   const [even, odd] = zeros(head);
@@ -31,6 +29,14 @@ export function findEncoding(source: ByteSource): Encoding {
   if (even > head.length / 5 && odd < head.length / 50) return 'utf-16be';
   refuseZeros(source);
   return isUtf8(source) ? 'utf-8' : 'windows-1252';
+}
+
+/** Throws a FileRefusal when a file's first bytes are those of a workbook, picture or archive, or there are none. */
+export function refuseNotText(head: Buffer): void {
+  if (head.length === 0) throw new FileRefusal('empty', 'The file is empty.');
+  const start = head.toString('hex', 0, 4);
+  const known = SIGNATURES.find(([signature]) => start.startsWith(signature));
+  if (known) throw new FileRefusal('not-text', known[1]);
 }
 
 function zeros(bytes: Buffer): [even: number, odd: number] {

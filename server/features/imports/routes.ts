@@ -1,0 +1,90 @@
+import { type Import, importsApi } from '#shared/contracts/imports.ts';
+import { shopScope } from '../../books/scope.ts';
+import { write } from '../../books/write.ts';
+import { type Context, type Route, route } from '../../platform/http.ts';
+import { ProblemError } from '../../platform/problems.ts';
+import { forgetFile, startCommit, startReading } from './background.ts';
+import { listImports, listRows, showImport } from './read-model.ts';
+import { runJob } from './run-job.ts';
+import { type ImportRecord, importStore, readingOf, settingsOf } from './store.ts';
+import { uploadImport } from './upload-import.ts';
+
+type OnImport = Context & { readonly params: { readonly importId: string } };
+
+const readScope = (ctx: Pick<Context, 'services' | 'actor'>) => shopScope(ctx.services.database.reader, ctx.actor.shopId);
+const current = async (ctx: OnImport) => importStore(readScope(ctx)).get(ctx.params.importId);
+const shown = async (ctx: OnImport) => {
+  const reply = await showImport(readScope(ctx), ctx.params.importId);
+  return { versioned: reply, version: reply.version };
+};
+const wrongState = (detail: string) => new ProblemError(409, { name: 'wrong-state', detail });
+
+export const importRoutes: Route[] = [
+  route(importsApi.list, (ctx) => listImports(readScope(ctx), ctx.query.cursor)),
+  route(importsApi.upload, uploadImport),
+  route(importsApi.show, (ctx) => shown(ctx as unknown as OnImport)),
+  route(importsApi.rows, (ctx) => listRows(readScope(ctx), ctx.params.importId, ctx.query.outcome, ctx.query.cursor)),
+  route(importsApi.change, async (ctx) => changeImport(ctx)),
+  route(importsApi.commit, async (ctx) => commitImport(ctx as unknown as OnImport)),
+  route(importsApi.undo, async (ctx) => undoImport(ctx as unknown as OnImport)),
+  route(importsApi.discard, async (ctx) => discardImport(ctx)),
+];
+
+async function changeImport(ctx: Context<typeof importsApi.change>) {
+  const { database } = ctx.services;
+  const { shopId } = ctx.actor;
+  const before = await current(ctx as unknown as OnImport);
+  if (before.state !== 'ready' && before.state !== 'refused') throw wrongState('This file is not waiting for answers.');
+  const settings = { ...settingsOf(before), ...(ctx.body.columns ? { columns: ctx.body.columns } : {}) };
+  const answers = { ...settings.answers, ...ctx.body.answers };
+  const after: ImportRecord = await database.lock(() =>
+    importStore(shopScope(database.writer, shopId)).readAgain(before.id, ctx.ifMatch ?? 0, { ...settings, answers }),
+  );
+  startReading({ services: ctx.services, shopId }, after);
+  return shown(ctx as unknown as OnImport);
+}
+
+/** Starts the commit. Asking again while it runs, or after, changes nothing: it books once. */
+async function commitImport(ctx: OnImport) {
+  const { services, actor } = ctx;
+  const before = await current(ctx);
+  if (before.state === 'committing' || before.state === 'committed') return shown(ctx);
+  if (before.state !== 'ready') throw wrongState('Only a file that was read can be booked.');
+  const open = readingOf(before)?.choices.filter((choice) => choice.mustAsk && choice.answer === null) ?? [];
+  if (open.length > 0) {
+    throw new ProblemError(422, { name: 'choices-open', detail: `Answer first: ${open.map((choice) => choice.question).join(' ')}` });
+  }
+  const { database } = services;
+  const isMine = await database.lock(() => importStore(shopScope(database.writer, actor.shopId)).move(before.id, 'ready', 'committing'));
+  if (isMine) startCommit({ services, ...actor, requestId: String(ctx.req.id) }, before);
+  return shown(ctx);
+}
+
+async function undoImport(ctx: OnImport) {
+  const { services, actor } = ctx;
+  const { database, now } = services;
+  const before = await current(ctx);
+  if (before.state === 'undone') return shown(ctx);
+  if (before.state !== 'committed') throw wrongState('Only a file that is booked can be taken out.');
+  const done = await database.lock(() =>
+    runJob({ kind: 'undo', databaseFile: database.file, importId: before.id, now: now(), ...actor, requestId: String(ctx.req.id) }),
+  );
+  if (done.kind === 'undone' && done.obstacle !== null) {
+    throw new ProblemError(409, { name: 'undo-refused', detail: `This import cannot be taken out any more. ${done.obstacle}` });
+  }
+  return shown(ctx);
+}
+
+async function discardImport(ctx: Context<typeof importsApi.discard>) {
+  const { importId } = ctx.params;
+  const ready = await write(ctx, { action: 'drop file', subject: 'import' }, async (books) => {
+    const store = importStore(books.scope);
+    const before = await store.get(importId);
+    if (before.state !== 'ready' && before.state !== 'refused') throw wrongState('A file that is being read, or is booked, cannot be dropped.');
+    await store.discard(importId);
+    const reply: Import = await showImport(books.scope, importId);
+    return { id: importId, before: { state: before.state }, after: { state: 'discarded' }, reply };
+  });
+  await forgetFile(ctx.services, importId);
+  return ready;
+}

@@ -1,0 +1,35 @@
+import { randomUUID } from 'node:crypto';
+import type { Import } from '#shared/contracts/imports.ts';
+import type { Member } from '../support/api.ts';
+
+/** Uploads a file as the page does. */
+export const upload = (member: Member, bytes: Buffer | string, name = 'old.csv', query = '', key: string = randomUUID()) =>
+  member.request('post', `/api/imports${query}`).set('Idempotency-Key', key).attach('file', Buffer.isBuffer(bytes) ? bytes : Buffer.from(bytes), name);
+
+/** Waits until nothing is being done with an import, as the page does by asking again. */
+export async function settled(member: Member, id: string): Promise<Import> {
+  for (let tries = 0; tries < 200; tries++) {
+    const { body } = await member.get(`/api/imports/${id}`);
+    if (body.state !== 'reading' && body.state !== 'committing') return body as Import;
+    await new Promise((resolve) => setTimeout(resolve, 50));
+  }
+  throw new Error('The import did not come to an end');
+}
+
+/** Uploads and reads a file. */
+export async function uploaded(member: Member, bytes: Buffer | string, name = 'old.csv'): Promise<Import> {
+  const reply = await upload(member, bytes, name);
+  if (reply.status !== 201) throw new Error(`upload answered ${reply.status}: ${reply.text}`);
+  return settled(member, reply.body.id);
+}
+
+/** Uploads, reads and books a file. */
+export async function broughtIn(member: Member, bytes: Buffer | string, name = 'old.csv'): Promise<Import> {
+  const { id } = await uploaded(member, bytes, name);
+  const reply = await member.post(`/api/imports/${id}/commit`);
+  if (reply.status >= 300) throw new Error(`commit answered ${reply.status}: ${reply.text}`);
+  return settled(member, id);
+}
+
+/** A list of expenses with these rows under the usual headings. */
+export const expenseList = (...rows: string[]) => ['Date,Car,What for,Details,Paid', ...rows].join('\n');

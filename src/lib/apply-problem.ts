@@ -5,7 +5,10 @@ import { ApiProblem } from './api-problem.ts';
  * Puts a refused save into its form: each error at the field that its pointer names (`/dates/soldOn` → `dates.soldOn`),
  * what no field answers for at the form's root. Anything but an ApiProblem flies on to the error boundary.
  */
-export function applyProblem<T extends FieldValues>(form: UseFormReturn<T>, problem: unknown): void {
+export function applyProblem<T extends FieldValues>(
+  form: Pick<UseFormReturn<T>, 'getValues' | 'setError'>,
+  problem: unknown,
+): void {
   if (!(problem instanceof ApiProblem)) throw problem;
   const values = form.getValues();
   let homeless = problem.errors.length === 0 ? [problem.message] : [];

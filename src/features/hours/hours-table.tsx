@@ -1,0 +1,97 @@
+import { useMemo } from 'react';
+import { Link } from 'react-router-dom';
+import type { HoursRow } from '#shared/contracts/hours.ts';
+import { DataTable } from '../../ui/data-table.tsx';
+import { Hours, Nothing } from '../../ui/figures.tsx';
+import { useFormatter } from '../../ui/formatter-context.tsx';
+import { Menu } from '../../ui/menu.tsx';
+import type { Column } from '../../ui/table.tsx';
+
+type Props = {
+  rows: readonly HoursRow[];
+  shopId: string;
+  ofOne?: boolean;
+  /** null for people who only read. */
+  onChange: ((hours: HoursRow) => void) | null;
+  onVoid: (hours: HoursRow) => void;
+};
+
+/** Hours by day; void ones are struck through and say why. */
+export function HoursTable({ rows, shopId, ofOne = false, onChange, onVoid }: Props) {
+  const format = useFormatter();
+  const columns = useMemo<readonly Column<HoursRow>[]>(() => {
+    const all: (Column<HoursRow> & { hidden?: boolean })[] = [
+      {
+        id: 'day',
+        header: 'Day',
+        width: 'w-28',
+        cell: (row) => (row.workedOn ? format.day(row.workedOn) : <span className="text-soft">no day</span>),
+      },
+      {
+        id: 'rebuild',
+        header: 'Rebuild',
+        width: 'w-56',
+        hidden: ofOne,
+        cell: (row) => (
+          <>
+            <Link to={`/s/${shopId}/rebuilds/${row.rebuildId}`}>{row.rebuildTag}</Link>{' '}
+            <span className="text-soft">{row.rebuildName}</span>
+          </>
+        ),
+      },
+      {
+        id: 'who',
+        header: 'Who',
+        width: 'w-36',
+        cell: (row) => row.workerName ?? <span className="text-soft">not said</span>,
+      },
+      {
+        id: 'task',
+        header: 'Doing what',
+        width: 'w-56',
+        cell: (row) => (
+          <>
+            {row.task ?? <Nothing />}
+            {row.voidReason && <span className="ml-2 inline-block">void: {row.voidReason}</span>}
+          </>
+        ),
+      },
+      { id: 'paid', header: 'Paid', width: 'w-20', cell: (row) => (row.isPaid ? 'paid' : 'own') },
+      {
+        id: 'hours',
+        header: 'Hours',
+        width: 'w-20',
+        number: true,
+        cell: (row) => <Hours seconds={row.seconds} exact />,
+      },
+      {
+        id: 'act',
+        header: <span className="sr-only">Change</span>,
+        width: 'w-16',
+        hidden: onChange === null,
+        cell: (row) =>
+          row.voidedAt === null &&
+          onChange && (
+            <Menu
+              plain
+              label={<span aria-label={`Change the hours on ${row.rebuildTag}`}>···</span>}
+              items={[
+                { label: 'Change', onSelect: () => onChange(row) },
+                { label: 'Void', onSelect: () => onVoid(row) },
+              ]}
+            />
+          ),
+      },
+    ];
+    return all.filter((column) => !column.hidden);
+  }, [format, ofOne, shopId, onChange, onVoid]);
+  return (
+    <DataTable
+      caption="Hours"
+      rows={rows}
+      columns={columns}
+      rowKey={(row) => row.id}
+      rowProps={(row) => (row.voidedAt ? { 'data-void': '' } : {})}
+    />
+  );
+}

@@ -1,0 +1,107 @@
+import { useMemo } from 'react';
+import { Link } from 'react-router-dom';
+import type { EntryRow } from '#shared/contracts/ledger.ts';
+import { DataTable } from '../../ui/data-table.tsx';
+import { Money, Nothing } from '../../ui/figures.tsx';
+import { useFormatter } from '../../ui/formatter-context.tsx';
+import { Menu } from '../../ui/menu.tsx';
+import type { Column } from '../../ui/table.tsx';
+import { kindOf } from './entry-form.ts';
+
+type Props = {
+  rows: readonly EntryRow[];
+  shopId: string;
+  /** Without the rebuild's column: the table stands on its page. */
+  ofOne?: boolean;
+  /** null for people who only read. */
+  onChange: ((entry: EntryRow) => void) | null;
+  onVoid: (entry: EntryRow) => void;
+};
+
+/** Lines of the ledger; void ones are struck through and say why. */
+export function EntriesTable({ rows, shopId, ofOne = false, onChange, onVoid }: Props) {
+  const format = useFormatter();
+  const columns = useMemo<readonly Column<EntryRow>[]>(() => {
+    const all: (Column<EntryRow> & { hidden?: boolean })[] = [
+      {
+        id: 'day',
+        header: 'Day',
+        width: 'w-28',
+        cell: (row) => (row.datedOn ? format.day(row.datedOn) : <span className="text-soft">no day</span>),
+      },
+      {
+        id: 'rebuild',
+        header: 'Rebuild',
+        width: 'w-24',
+        hidden: ofOne,
+        cell: (row) => <RebuildTag row={row} shopId={shopId} />,
+      },
+      { id: 'category', header: 'Category', width: 'w-40', cell: (row) => row.categoryName },
+      { id: 'what', header: 'What', width: 'w-72', cell: (row) => <What row={row} /> },
+      { id: 'kind', header: 'Kind', width: 'w-28', cell: (row) => <Kind row={row} /> },
+      { id: 'cents', header: 'Amount', width: 'w-32', number: true, cell: (row) => <Amount row={row} /> },
+      {
+        id: 'act',
+        header: <span className="sr-only">Change</span>,
+        width: 'w-16',
+        hidden: onChange === null,
+        cell: (row) =>
+          row.voidedAt === null &&
+          onChange && (
+            <Menu
+              plain
+              label={<span aria-label={`Change ${row.what ?? row.categoryName}`}>···</span>}
+              items={[
+                { label: 'Change', onSelect: () => onChange(row) },
+                { label: 'Void', onSelect: () => onVoid(row) },
+              ]}
+            />
+          ),
+      },
+    ];
+    return all.filter((column) => !column.hidden);
+  }, [format, ofOne, shopId, onChange, onVoid]);
+  return (
+    <DataTable
+      caption="Entries"
+      rows={rows}
+      columns={columns}
+      rowKey={(row) => row.id}
+      rowProps={(row) => (row.voidedAt ? { 'data-void': '' } : {})}
+    />
+  );
+}
+
+function RebuildTag({ row, shopId }: { row: EntryRow; shopId: string }) {
+  if (!row.rebuildId) return <span className="text-soft">overhead</span>;
+  return <Link to={`/s/${shopId}/rebuilds/${row.rebuildId}`}>{row.rebuildTag}</Link>;
+}
+
+function What({ row }: { row: EntryRow }) {
+  const words = [row.what, row.vendor].filter(Boolean).join(' · ');
+  return (
+    <>
+      {words || <Nothing />}
+      {row.splitId && <span className="text-soft"> (a share)</span>}
+      {row.voidReason && <span className="ml-2 inline-block no-underline">void: {row.voidReason}</span>}
+    </>
+  );
+}
+
+function Kind({ row }: { row: EntryRow }) {
+  const kind = kindOf(row);
+  if (kind === '') return <span className="text-soft">not said</span>;
+  return kind === 'surprise' ? <strong className="font-[640]">surprise</strong> : kind;
+}
+
+function Amount({ row }: { row: EntryRow }) {
+  if (row.freeValueCents === null) return <Money cents={row.cents} shown="always" />;
+  return (
+    <span>
+      free{' '}
+      <span className="text-soft">
+        (worth <Money cents={row.freeValueCents} shown="always" />)
+      </span>
+    </span>
+  );
+}

@@ -1,0 +1,84 @@
+import type { CategoryOutcome, RebuildDetail } from '#shared/contracts/rebuilds.ts';
+import { GapBar } from '../../charts/gap-bar.tsx';
+import { Money, Nothing } from '../../ui/figures.tsx';
+import { useFormatter } from '../../ui/formatter-context.tsx';
+import { EmptyState } from '../../ui/states.tsx';
+import { type Column, Table } from '../../ui/table.tsx';
+
+/** Locked plan against actual, category by category, drawn to one scale; then all together. */
+export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
+  const format = useFormatter();
+  const { categories, row } = detail;
+  if (categories.length === 0) {
+    return (
+      <EmptyState title="Plan against actual">
+        Once there is a plan or a first entry, each category stands here with its gap.
+      </EmptyState>
+    );
+  }
+  const most = Math.max(...categories.map((one) => Math.max(one.estimateCents ?? 0, one.planningCents, 1)));
+  const columns: Column<CategoryOutcome>[] = [
+    { id: 'name', header: 'Category', heads: true, cell: (one) => one.name },
+    { id: 'plan', header: 'Planned', number: true, cell: (one) => <Money cents={one.estimateCents} /> },
+    { id: 'actual', header: 'Actual', number: true, cell: (one) => <Money cents={one.planningCents} /> },
+    {
+      id: 'bar',
+      header: 'Planned | actual',
+      cell: (one) => (
+        <GapBar
+          lockedCents={one.estimateCents}
+          foreseenCents={one.planningCents - one.surpriseCents}
+          surpriseCents={one.surpriseCents}
+          overrunRate={rateOf(one.estimateCents, one.planningCents)}
+          format={format}
+          maxCents={most}
+          width={150}
+          hideLabel={one.estimateCents === null}
+        />
+      ),
+    },
+    {
+      id: 'surprise',
+      header: 'Surprises',
+      number: true,
+      cell: (one) => (one.surpriseCents === 0 ? <Nothing /> : <Money cents={one.surpriseCents} />),
+    },
+    {
+      id: 'extra',
+      header: 'Chosen extras',
+      number: true,
+      cell: (one) => (one.extraCents === 0 ? <Nothing /> : <Money cents={one.extraCents} />),
+    },
+  ];
+  const sum = (field: 'surpriseCents' | 'extraCents') => categories.reduce((total, one) => total + one[field], 0);
+  return (
+    <Table
+      caption="Plan against actual by category"
+      rows={categories}
+      columns={columns}
+      rowKey={(one) => one.categoryId}
+      foot={{
+        name: 'All together',
+        plan: <Money cents={row.estimateCents} />,
+        actual: <Money cents={row.planningCents} />,
+        bar: (
+          <GapBar
+            lockedCents={row.estimateCents}
+            foreseenCents={row.planningCents - row.surpriseCents}
+            surpriseCents={row.surpriseCents}
+            overrunRate={row.overrunRate}
+            format={format}
+            width={150}
+          />
+        ),
+        surprise: <Money cents={sum('surpriseCents')} />,
+        extra: <Money cents={sum('extraCents')} />,
+      }}
+    />
+  );
+}
+
+/** Over (+) or under (−) as a fraction; null where nothing was planned. */
+function rateOf(planned: number | null, actual: number): number | null {
+  return planned ? (actual - planned) / planned : null;
+}

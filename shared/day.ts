@@ -25,7 +25,22 @@ export function dayFromParts(year: number, month: number, dayOfMonth: number): D
 
 /** Whole days since 1970-01-01. The day must be valid. */
 export function dayNumber(day: Day): number {
-  return Date.UTC(Number(day.slice(0, 4)), Number(day.slice(5, 7)) - 1, Number(day.slice(8, 10))) / MS_PER_DAY;
+  return Date.UTC(calendarYearOf(day), monthOf(day) - 1, twoDigits(day, 8)) / MS_PER_DAY;
+}
+
+/** The calendar year of a valid day. */
+export function calendarYearOf(day: Day): number {
+  return twoDigits(day, 0) * 100 + twoDigits(day, 2);
+}
+
+/** The month of a valid day, 1–12. */
+export function monthOf(day: Day): number {
+  return twoDigits(day, 5);
+}
+
+// Answers read thousands of days: this is several times faster than cutting the text up.
+function twoDigits(text: string, at: number): number {
+  return (text.charCodeAt(at) - 48) * 10 + text.charCodeAt(at + 1) - 48;
 }
 
 /** The inverse of `dayNumber`. */

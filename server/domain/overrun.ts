@@ -82,7 +82,11 @@ export function overrunByCategory(facts: readonly RebuildFacts[]): CategoryOverr
 
 /** Every category in an estimate or an entry of these rebuilds, by name. */
 export function categoriesOf(set: readonly Completed[]): string[] {
-  const names = new Set(set.flatMap((rebuild) => [...rebuild.estimates.keys(), ...rebuild.categories.keys()]));
+  const names = new Set<string>();
+  for (const { estimates, categories } of set) {
+    for (const name of estimates.keys()) names.add(name);
+    for (const name of categories.keys()) names.add(name);
+  }
   return [...names].sort(byCodePoint);
 }
 

@@ -87,7 +87,7 @@ export function plannedOutcomes(set: readonly Completed[]): PlannedOutcome[] {
       overrunCents: planningCents(rebuild) - estimateCents(rebuild),
       surpriseCents: rebuild.surprisePlanningCents,
     }))
-    .sort((a, b) => byCodePoint(a.exitOn, b.exitOn) || byCodePoint(a.id, b.id));
+    .sort((a, b) => (a.exitOn < b.exitOn ? -1 : a.exitOn > b.exitOn ? 1 : byCodePoint(a.id, b.id)));
 }
 
 /** One rebuild on the market: days from listing to its sale, or to where we lost sight of it. */

@@ -21,16 +21,28 @@ export interface SurpriseRate extends Rate {
 export function surpriseRate(facts: readonly RebuildFacts[]): SurpriseRate {
   const done = completed(facts);
   const told = done.filter((rebuild) => !rebuild.hasUnknownForeseen);
-  const categories = categoriesOf(done).map((category) => {
-    const cells = told.map((rebuild) => rebuild.categories.get(category)).filter((cell) => cell !== undefined);
-    const surprised = cells.filter((cell) => cell.surpriseCount > 0).length;
-    const unforeseenCents = sum(cells.map((cell) => cell.unforeseenCents));
-    return { category, ...wilson(surprised, told.length), unforeseenCents };
-  });
-  const surprised = told.filter((rebuild) => [...rebuild.categories.values()].some((cell) => cell.surpriseCount > 0));
+  const found = new Map(categoriesOf(done).map((category) => [category, { surprised: 0, unforeseenCents: 0 }]));
+  let surprised = 0;
+  for (const rebuild of told) {
+    let isSurprised = false;
+    for (const [category, { surpriseCount, unforeseenCents: cents }] of rebuild.categories) {
+      const counts = found.get(category);
+      if (!counts) continue;
+      counts.unforeseenCents += cents;
+      if (surpriseCount === 0) continue;
+      counts.surprised += 1;
+      isSurprised = true;
+    }
+    if (isSurprised) surprised += 1;
+  }
+  const categories = [...found].map(([category, counts]) => ({
+    category,
+    ...wilson(counts.surprised, told.length),
+    unforeseenCents: counts.unforeseenCents,
+  }));
   const unforeseenCents = sum(categories.map((category) => category.unforeseenCents));
   return {
-    ...wilson(surprised.length, told.length),
+    ...wilson(surprised, told.length),
     unknownCount: done.length - told.length,
     unforeseenCents,
     shareOfWork: ratio(unforeseenCents, sum(told.map(paidCents))),

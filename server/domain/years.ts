@@ -1,4 +1,4 @@
-import { addDays, type Day } from '#shared/day.ts';
+import { addDays, calendarYearOf, type Day, monthOf } from '#shared/day.ts';
 import type { RebuildFacts } from './facts.ts';
 import { rebuildProfit } from './profit.ts';
 import { completed, priced } from './sets.ts';
@@ -53,7 +53,7 @@ export interface YearsInput {
 
 /** The shop year, by its name, that a day falls in. */
 export function shopYearOf(day: Day, startMonth: number): number {
-  return Number(day.slice(0, 4)) - (Number(day.slice(5, 7)) < startMonth ? 1 : 0);
+  return calendarYearOf(day) - (monthOf(day) < startMonth ? 1 : 0);
 }
 
 /** First and last day of a shop year. */

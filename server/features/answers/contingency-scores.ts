@@ -3,21 +3,27 @@ import type { contingencyAnswerSchema } from '#shared/contracts/answers-continge
 import { type BackTestLevel, FLAT_PERCENTS, type RuleName } from '../../domain/back-test.ts';
 
 type BackTest = z.input<typeof contingencyAnswerSchema>['backTest'];
+type Shown = BackTest['scores'][number]['rule'];
 
-const RULES: readonly (readonly [RuleName, BackTest['scores'][number]['rule']])[] = [
-  ['percent', 'percent'],
-  ['twoPart', 'two-part'],
-  ...FLAT_PERCENTS.map((percent) => [`flat${percent}`, `flat ${percent}`] as const),
-];
+export const FLAT_RULES = FLAT_PERCENTS.map((percent) => `flat${percent}` as const);
 
-/** How each rule did, all on the same rebuilds. */
-export function backTestOf(test: BackTestLevel | undefined): BackTest {
+const SHOWN: Readonly<Record<RuleName, Shown>> = {
+  percent: 'percent',
+  twoPart: 'two-part',
+  flat10: 'flat 10',
+  flat15: 'flat 15',
+  flat20: 'flat 20',
+  flat25: 'flat 25',
+};
+
+/** How each of these rules did, all on the same rebuilds. */
+export function backTestOf(test: BackTestLevel | undefined, rules: readonly RuleName[]): BackTest {
   return {
     skippedCount: test?.skippedCount ?? 0,
     tooFewCount: test?.notAttainableCount ?? 0,
-    scores: RULES.flatMap(([name, rule]) => {
-      const score = test?.scores[name];
-      return score ? [{ rule, ...score }] : [];
+    scores: rules.flatMap((rule) => {
+      const score = test?.scores[rule];
+      return score ? [{ rule: SHOWN[rule], ...score }] : [];
     }),
   };
 }

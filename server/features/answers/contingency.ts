@@ -3,7 +3,7 @@ import type { contingencyAnswerSchema, contingencyQuerySchema } from '#shared/co
 import { MARKS_AT_MOST } from '#shared/contracts/answers-parts.ts';
 import type { Rule } from '#shared/contracts/rules.ts';
 import type { ShopRebuild } from '../../books/shop-facts.ts';
-import { backTest, backTestTwoPart, type Trial } from '../../domain/back-test.ts';
+import { type Trial, walkForward } from '../../domain/back-test.ts';
 import { contingency, type Level, levelOf, rankAt, wholePercent } from '../../domain/contingency.ts';
 import { ruleRecord } from '../../domain/rule-record.ts';
 import {
@@ -16,7 +16,7 @@ import {
 import { median, quantile, sum } from '../../domain/statistics.ts';
 import { twoPartRule } from '../../domain/two-part-rule.ts';
 import { shopYearOf, yearSpan } from '../../domain/years.ts';
-import { backTestOf } from './contingency-scores.ts';
+import { backTestOf, FLAT_RULES } from './contingency-scores.ts';
 import { filtered, filterOptions } from './filter.ts';
 import { type AnswerInput, leftOut, rebuildOf, refOf } from './input.ts';
 
@@ -33,8 +33,13 @@ export function contingencyAnswer(input: AnswerInput, query: z.output<typeof con
   const done = rebuilds.filter((one): one is ShopRebuild & Completed => one.exit !== null);
   const set = done.filter((one) => estimateCents(one) > 0 && !isOverwritten(one));
   const outcomes = plannedOutcomes(set);
-  const [test] = backTest(rebuilds, [level], 'asKnown');
-  const [twoPartTest] = backTestTwoPart(rebuilds, [level], 'asKnown');
+  const told = plannedOutcomes(set.filter(({ hasUnknownForeseen }) => !hasUnknownForeseen));
+  const [twoPartTest] = walkForward(told, { levels: [level], knowledge: 'asKnown', withTwoPart: true });
+  // Where every entry says whether it was foreseen, both are the same rebuilds, and one walk serves both.
+  const [test] =
+    told.length === outcomes.length
+      ? [twoPartTest]
+      : walkForward(outcomes, { levels: [level], knowledge: 'asKnown', withTwoPart: false });
   const trials = test?.trials.percent ?? [];
   return {
     asOf: input.today,
@@ -51,9 +56,9 @@ export function contingencyAnswer(input: AnswerInput, query: z.output<typeof con
     estimateCents: sum(outcomes.map((one) => one.estimateCents)),
     overrunCents: sum(outcomes.map((one) => one.overrunCents)),
     percent: percentOf(input, outcomes, level),
-    twoPart: twoPartOf(plannedOutcomes(set.filter(({ hasUnknownForeseen }) => !hasUnknownForeseen)), level),
-    backTest: backTestOf(test),
-    twoPartBackTest: backTestOf(twoPartTest),
+    twoPart: twoPartOf(told, level),
+    backTest: backTestOf(test, ['percent', ...FLAT_RULES]),
+    twoPartBackTest: backTestOf(twoPartTest, ['percent', 'twoPart', ...FLAT_RULES]),
     trail: trials.slice(-MARKS_AT_MOST).map((trial) => trailOf(input, trial)),
     trailTotal: trials.length,
     damages: damagesOf(input, set, level),

@@ -1,7 +1,12 @@
 import type { z } from 'zod';
 import type { FilterQuery } from '#shared/contracts/answers-parts.ts';
 import type { Comparison, whatPaysAnswerSchema } from '#shared/contracts/answers-what-pays.ts';
-import { type ComparedGroup, type GroupComparison, groupComparison } from '../../domain/group-comparison.ts';
+import {
+  type ComparedGroup,
+  type GroupComparison,
+  type GroupedValue,
+  groupComparison,
+} from '../../domain/group-comparison.ts';
 import { profit, rebuildProfit } from '../../domain/profit.ts';
 import { profitPerOwnHour, worked } from '../../domain/profit-per-hour.ts';
 import { type Priced, priced } from '../../domain/sets.ts';
@@ -20,10 +25,10 @@ export function whatPaysAnswer(input: AnswerInput, query: FilterQuery): Answer {
   const rebuilds = filtered(input, query, 'left');
   const done = rebuilds.filter(({ exit }) => exit !== null);
   const { noPurchaseCount: _, ...totals } = profit(rebuilds);
-  const hours = worked(rebuilds).map((one) => ({ rebuild: one, value: profitPerOwnHour(one) }));
+  const hours = worked(rebuilds).map((one) => ({ ...valued(one), value: profitPerOwnHour(one) }));
   const returns = priced(rebuilds).flatMap((one) => {
-    const value = rebuildProfit(one).returnOnCost;
-    return value === null ? [] : [{ rebuild: one, value }];
+    const { returnOnCost: value } = rebuildProfit(one);
+    return value === null ? [] : [{ ...valued(one), value }];
   });
   return {
     asOf: today,
@@ -43,8 +48,9 @@ export function whatPaysAnswer(input: AnswerInput, query: FilterQuery): Answer {
 }
 
 interface Valued {
-  readonly rebuild: Priced;
+  readonly cell: Cell;
   readonly value: number;
+  readonly sums: Sums;
 }
 interface Sums {
   profitCents: number;
@@ -57,11 +63,18 @@ interface Cell {
   readonly damage: string | null;
 }
 
+/** A rebuild's cell and what it adds to the sums, worked out once for all fits. */
+function valued(rebuild: Priced): Omit<Valued, 'value'> {
+  const { profitCents, costCents } = rebuildProfit(rebuild);
+  const sums = { profitCents, costCents, ownSeconds: rebuild.ownSeconds ?? 0 };
+  return { cell: { class: rebuild.class, damage: rebuild.damage }, sums };
+}
+
 function threeFits(input: AnswerInput, values: readonly Valued[], plain: Plain): Answer['perHour'] {
   return {
-    cells: fit(input, values, plain, (one) => (cellOf(one) === null ? null : one)),
-    classes: fit(input, values, plain, (one) => (one.class === null ? null : { class: one.class, damage: null })),
-    damages: fit(input, values, plain, (one) => (one.damage === null ? null : { class: null, damage: one.damage })),
+    cells: fit(input, values, plain, (cell) => (cell.class === null || cell.damage === null ? null : cell)),
+    classes: fit(input, values, plain, (cell) => (cell.class === null ? null : { class: cell.class, damage: null })),
+    damages: fit(input, values, plain, (cell) => (cell.damage === null ? null : { class: null, damage: cell.damage })),
   };
 }
 
@@ -70,18 +83,21 @@ function fit(
   { shop }: AnswerInput,
   values: readonly Valued[],
   plain: Plain,
-  cellOfOne: (rebuild: Priced) => Cell | null,
+  groupOf: (cell: Cell) => Cell | null,
 ): Comparison {
   const cells = new Map<string, { cell: Cell; sums: Sums }>();
-  const grouped = values.flatMap(({ rebuild, value }) => {
-    const cell = cellOfOne(rebuild);
-    if (cell === null) return [];
-    const key = JSON.stringify([cell.class, cell.damage]);
-    const known = cells.get(key) ?? { cell, sums: { profitCents: 0, ownSeconds: 0, costCents: 0 } };
-    cells.set(key, known);
-    addTo(known.sums, rebuild);
-    return [{ group: key, value }];
-  });
+  const grouped: GroupedValue[] = [];
+  for (const { cell: own, value, sums } of values) {
+    const cell = groupOf(own);
+    if (cell === null) continue;
+    const group = `${cell.class ?? ''}\0${cell.damage ?? ''}`;
+    const known = cells.get(group) ?? { cell, sums: { ...NOTHING } };
+    cells.set(group, known);
+    known.sums.profitCents += sums.profitCents;
+    known.sums.costCents += sums.costCents;
+    known.sums.ownSeconds += sums.ownSeconds;
+    grouped.push({ group, value });
+  }
   const comparison = groupComparison(grouped);
   const idIn = (list: readonly { id: string; name: string }[], name: string | null) =>
     list.find((item) => item.name === name)?.id ?? null;
@@ -101,13 +117,6 @@ function fit(
 }
 
 const NOTHING: Sums = { profitCents: 0, ownSeconds: 0, costCents: 0 };
-
-function addTo(sums: Sums, rebuild: Priced): void {
-  const { profitCents, costCents } = rebuildProfit(rebuild);
-  sums.profitCents += profitCents;
-  sums.costCents += costCents;
-  sums.ownSeconds += rebuild.ownSeconds ?? 0;
-}
 
 function figuresOf({ n, mean, deviation, interval, shrunken, isThin }: ComparedGroup) {
   const { lower, upper } = interval ?? { lower: null, upper: null };

@@ -1,6 +1,7 @@
 import { createServer } from 'node:http';
 import { seedDemo } from '../seeds/demo.ts';
 import { createApp } from './app.ts';
+import { recoverImports } from './features/imports/background.ts';
 import { readConfig } from './platform/config.ts';
 import { openServices } from './services.ts';
 
@@ -8,6 +9,7 @@ const config = readConfig(process.env);
 const services = await openServices(config);
 const { database, sessions, logger } = services;
 
+await recoverImports(services);
 const signIns = await seedDemo(services);
 
 const server = createServer(

@@ -10,7 +10,8 @@ const ROWS = 50;
  */
 export function bulkInsert(raw: RawDatabase, table: string, columns: readonly string[]) {
   const row = `(${columns.map(() => '?').join(', ')})`;
-  const sql = (rows: number) => `INSERT INTO ${table} (${columns.join(', ')}) VALUES ${Array(rows).fill(row).join(', ')}`;
+  const sql = (rows: number) =>
+    `INSERT INTO ${table} (${columns.join(', ')}) VALUES ${Array(rows).fill(row).join(', ')}`;
   const full = raw.prepare(sql(ROWS));
   let waiting: Cell[] = [];
 

@@ -335,10 +335,9 @@ export const importsApi = {
   commit: {
     method: 'POST',
     path: '/api/imports/:importId/commit',
-    summary: 'Book everything that was understood, at once or not at all',
+    summary: 'Book everything that was understood, at once or not at all; asked twice, it books once',
     params,
     response: reply,
-    once: true,
   },
   undo: {
     method: 'POST',
@@ -346,7 +345,6 @@ export const importsApi = {
     summary: 'Take an import out of the books as if it had never been',
     params,
     response: reply,
-    once: true,
   },
   discard: {
     method: 'DELETE',

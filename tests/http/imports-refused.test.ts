@@ -21,7 +21,11 @@ describe('files that cannot come in', () => {
   });
 
   it.each([
-    ['a quotation mark that is never closed', `${expenseList('1/22/2020,13 F-150,Parts,door,10.00', '1/22/2020,"13 F-150,Parts,door,10.00')}\n`, 'line 3'],
+    [
+      'a quotation mark that is never closed',
+      `${expenseList('1/22/2020,13 F-150,Parts,door,10.00', '1/22/2020,"13 F-150,Parts,door,10.00')}\n`,
+      'line 3',
+    ],
     ['zero bytes inside', `${expenseList('1/22/2020,13 F-150,Parts,do\0or,10.00')}\n`, 'zero bytes'],
     ['one cell of a million letters', expenseList(`1/2/2020,13 F-150,Parts,${'x'.repeat(1_200_000)},10.00`), 'million'],
     ['a sheet without headings', '1/22/2020,13 F-150,Parts,door,10.00\n1/3/2020,13 F-150,Parts,hood,10.00', 'headings'],
@@ -45,7 +49,10 @@ describe('files that cannot come in', () => {
   it('an upload without a file, or in broken parts, is a clear 400', async () => {
     const api = await testApi();
     const ada = await api.owner();
-    const none = await ada.request('post', '/api/imports').set('Idempotency-Key', 'some-key-1').field('note', 'no file');
+    const none = await ada
+      .request('post', '/api/imports')
+      .set('Idempotency-Key', 'some-key-1')
+      .field('note', 'no file');
     const broken = await ada
       .request('post', '/api/imports')
       .set({ 'Idempotency-Key': 'some-key-2', 'Content-Type': 'multipart/form-data; boundary=x' })
@@ -64,7 +71,8 @@ describe('files that cannot come in', () => {
     expect((await upload(mechanic, file)).status).toBe(403);
     expect((await accountant.get(`/api/imports/${id}`)).status).toBe(200);
     expect((await accountant.post(`/api/imports/${id}/undo`)).status).toBe(403);
-    for (const url of [`/api/imports/${id}`, `/api/imports/${id}/rows`]) expect((await other.get(url)).status).toBe(404);
+    for (const url of [`/api/imports/${id}`, `/api/imports/${id}/rows`])
+      expect((await other.get(url)).status).toBe(404);
     expect((await other.post(`/api/imports/${id}/undo`)).status).toBe(404);
     expect((await other.post(`/api/imports/${id}/commit`)).status).toBe(404);
   });

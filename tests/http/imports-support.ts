@@ -3,8 +3,17 @@ import type { Import } from '#shared/contracts/imports.ts';
 import type { Member } from '../support/api.ts';
 
 /** Uploads a file as the page does. */
-export const upload = (member: Member, bytes: Buffer | string, name = 'old.csv', query = '', key: string = randomUUID()) =>
-  member.request('post', `/api/imports${query}`).set('Idempotency-Key', key).attach('file', Buffer.isBuffer(bytes) ? bytes : Buffer.from(bytes), name);
+export const upload = (
+  member: Member,
+  bytes: Buffer | string,
+  name = 'old.csv',
+  query = '',
+  key: string = randomUUID(),
+) =>
+  member
+    .request('post', `/api/imports${query}`)
+    .set('Idempotency-Key', key)
+    .attach('file', Buffer.isBuffer(bytes) ? bytes : Buffer.from(bytes), name);
 
 /** Waits until nothing is being done with an import, as the page does by asking again. */
 export async function settled(member: Member, id: string): Promise<Import> {

@@ -8,7 +8,13 @@ describe('bringing a file in', () => {
     const api = await testApi();
     const ada = await api.owner();
     const read = await uploaded(ada, sampleBytes('p01_rebuild_summary_us.csv'), 'cars.csv');
-    expect(read).toMatchObject({ state: 'ready', shape: 'vehicles', fileName: 'cars.csv', rowsTaken: 10, rowsPutAside: 0 });
+    expect(read).toMatchObject({
+      state: 'ready',
+      shape: 'vehicles',
+      fileName: 'cars.csv',
+      rowsTaken: 10,
+      rowsPutAside: 0,
+    });
     expect((await ada.get('/api/rebuilds')).body.rows).toEqual([]);
     await ada.post(`/api/imports/${read.id}/commit`);
     expect((await settled(ada, read.id)).state).toBe('committed');
@@ -16,7 +22,14 @@ describe('bringing a file in', () => {
     expect(rows).toHaveLength(10);
     // TC-01 by hand from the sheet: total in 3,214.29, and 4,700.00 less that is kept.
     const first = rows.find((row: { tag: string }) => row.tag === 'TC-01');
-    expect(first).toMatchObject({ purchaseCents: 188_000, costCents: 321_429, proceedsCents: 470_000, keptCents: 148_571, estimateCents: 37_500, ownSeconds: 51.5 * 3600 });
+    expect(first).toMatchObject({
+      purchaseCents: 188_000,
+      costCents: 321_429,
+      proceedsCents: 470_000,
+      keptCents: 148_571,
+      estimateCents: 37_500,
+      ownSeconds: 51.5 * 3600,
+    });
   });
 
   it('links every entry to its cell, keeps every row of the file, and leaves one record in the trail', async () => {
@@ -29,7 +42,9 @@ describe('bringing a file in', () => {
     expect(entries.every((entry) => entry.import_row > 1 && [7, 8].includes(entry.import_col))).toBe(true);
     const aside = (await ada.get(`/api/imports/${id}/rows?outcome=put%20aside`)).body;
     expect(aside.rows.map((row: { row: number; reason: string }) => [row.row, row.reason])).toEqual([
-      [11, 'bad-date'], [25, 'missing-vehicle'], [35, 'bad-amount'],
+      [11, 'bad-date'],
+      [25, 'missing-vehicle'],
+      [35, 'bad-amount'],
     ]);
     expect((await ada.get(`/api/imports/${id}/rows`)).body.rows).toHaveLength(84);
     const trail = await api.services.database.reader('trail').where({ subject_id: id }).pluck('action');
@@ -39,7 +54,10 @@ describe('bringing a file in', () => {
   it('books once however often the button is pressed', async () => {
     const api = await testApi();
     const ada = await api.owner();
-    const { id } = await uploaded(ada, expenseList('1/22/2020,13 F-150,Parts,door,10.00', '1/23/2020,13 F-150,Parts,hood,20.00'));
+    const { id } = await uploaded(
+      ada,
+      expenseList('1/22/2020,13 F-150,Parts,door,10.00', '1/23/2020,13 F-150,Parts,hood,20.00'),
+    );
     const replies = await Promise.all([1, 2, 3].map(() => ada.post(`/api/imports/${id}/commit`)));
     expect(replies.every((reply) => reply.status === 200)).toBe(true);
     await settled(ada, id);
@@ -51,7 +69,10 @@ describe('bringing a file in', () => {
     const api = await testApi();
     const ada = await api.owner();
     const file = expenseList('1/22/2020,13 F-150,Parts,door,10.00');
-    const [first, again] = [await upload(ada, file, 'a.csv', '', 'same-key-1'), await upload(ada, file, 'a.csv', '', 'same-key-1')];
+    const [first, again] = [
+      await upload(ada, file, 'a.csv', '', 'same-key-1'),
+      await upload(ada, file, 'a.csv', '', 'same-key-1'),
+    ];
     expect(again.body.id).toBe(first.body.id);
     await settled(ada, first.body.id);
     expect((await ada.get('/api/imports')).body.rows).toHaveLength(1);
@@ -76,7 +97,9 @@ describe('bringing a file in', () => {
     const choice = read.reading?.choices[0];
     const early = await ada.post(`/api/imports/${read.id}/commit`);
     expect([early.status, early.body.type]).toEqual([422, '/problems/choices-open']);
-    const answered = await ada.patch(`/api/imports/${read.id}`, read.version, { answers: { [choice?.id ?? '']: 'MDY' } });
+    const answered = await ada.patch(`/api/imports/${read.id}`, read.version, {
+      answers: { [choice?.id ?? '']: 'MDY' },
+    });
     expect(answered.status).toBe(200);
     await settled(ada, read.id);
     await ada.post(`/api/imports/${read.id}/commit`);
@@ -89,7 +112,10 @@ describe('bringing a file in', () => {
   it('takes another meaning for a column, on the version that was seen', async () => {
     const api = await testApi();
     const ada = await api.owner();
-    const read = await uploaded(ada, expenseList('1/22/2020,13 F-150,Parts,door,10.00', '1/13/2020,13 F-150,Parts,hood,20.00'));
+    const read = await uploaded(
+      ada,
+      expenseList('1/22/2020,13 F-150,Parts,door,10.00', '1/13/2020,13 F-150,Parts,hood,20.00'),
+    );
     const columns = [{ col: 4, meaning: 'vendor', category: null }];
     expect((await ada.patch(`/api/imports/${read.id}`, read.version + 5, { columns })).status).toBe(412);
     await ada.patch(`/api/imports/${read.id}`, read.version, { columns });
@@ -102,13 +128,21 @@ describe('bringing a file in', () => {
     const api = await testApi();
     const ada = await api.owner();
     await ada.post('/api/rebuilds', { tag: 'Big red', year: 2013, model: 'F-150' });
-    const read = await uploaded(ada, expenseList('1/22/2020,13 F-150,Purchase,bid,"1,000.00"', '1/13/2020,2013 F-150 red,Parts,hood,20.00'));
+    const read = await uploaded(
+      ada,
+      expenseList('1/22/2020,13 F-150,Purchase,bid,"1,000.00"', '1/13/2020,2013 F-150 red,Parts,hood,20.00'),
+    );
     expect(read.reading?.rebuilds).toMatchObject([{ tag: 'Big red', existingId: expect.any(String) }]);
     await ada.post(`/api/imports/${read.id}/commit`);
     await settled(ada, read.id);
     const { rows } = (await ada.get('/api/rebuilds')).body;
     expect(rows).toHaveLength(1);
-    expect(rows[0]).toMatchObject({ tag: 'Big red', purchaseCents: 100_000, costCents: 102_000, boughtOn: '2020-01-22' });
+    expect(rows[0]).toMatchObject({
+      tag: 'Big red',
+      purchaseCents: 100_000,
+      costCents: 102_000,
+      boughtOn: '2020-01-22',
+    });
   });
 
   it('a dropped file is gone and books nothing', async () => {

@@ -5,18 +5,23 @@ import { readFacts, readHoursLines, readLines, trueFacts, trueHours, trueLines, 
 
 // Checked against the truth beside each sample, under the rules of the samples' README.
 
-const byYear = (a: { year: number | null; model: string | null }, b: typeof a) => `${a.year} ${a.model}`.localeCompare(`${b.year} ${b.model}`);
+const byYear = (a: { year: number | null; model: string | null }, b: typeof a) =>
+  `${a.year} ${a.model}`.localeCompare(`${b.year} ${b.model}`);
 
 function expectAgreement(reading: Reading, truth: Truth): void {
   const lenient = truth.canonical.lines[0]?.lenient ?? [];
   expect(readLines(reading, lenient)).toEqual(trueLines(truth));
   expect(readFacts(reading).sort(byYear)).toEqual(trueFacts(truth, reading).sort(byYear));
   expect(reading.control).toMatchObject({
-    rowsRead: truth.control.rowsRead, costCents: truth.control.totalCents, saleCents: truth.control.totalSaleCents, estimateCents: truth.control.estimateCents,
+    rowsRead: truth.control.rowsRead,
+    costCents: truth.control.totalCents,
+    saleCents: truth.control.totalSaleCents,
+    estimateCents: truth.control.estimateCents,
     centsByCategory: truth.control.totalCentsByCategory,
   });
   const aside = reading.asides.map(({ row, col, reason }) => ({ row, col, reason }));
-  for (const reject of truth.rejects) expect(aside).toContainEqual({ row: reject.row, col: reject.col, reason: reject.reason });
+  for (const reject of truth.rejects)
+    expect(aside).toContainEqual({ row: reject.row, col: reject.col, reason: reject.reason });
   for (const { source, acceptable } of truth.undecidable) {
     const reasons = acceptable.find((way) => way.outcome === 'reject')?.reason;
     expect(reasons).toContain(reading.asides.find((one) => one.row === source.row)?.reason);
@@ -24,10 +29,16 @@ function expectAgreement(reading: Reading, truth: Truth): void {
   expect(aside).toHaveLength(truth.rejects.length + truth.undecidable.length);
   const notData = reading.firstRows.filter((row) => row.outcome === 'not data').map((row) => row.row);
   expect(notData).toEqual(truth.nonData.map(({ row }) => row));
-  expect(reading.notData.blank).toBe(truth.blankRows.flatMap(({ rows }) => rows).reduce((sum, [from, to]) => sum + to - from + 1, 0));
+  expect(reading.notData.blank).toBe(
+    truth.blankRows.flatMap(({ rows }) => rows).reduce((sum, [from, to]) => sum + to - from + 1, 0),
+  );
   const stated = reading.statedTotals.map(({ row, stated: statedCents, imported }) => ({ row, statedCents, imported }));
   for (const total of truth.statedTotals) {
-    expect(stated).toContainEqual({ row: total.source.row, statedCents: total.statedCents, imported: total.importedCents });
+    expect(stated).toContainEqual({
+      row: total.source.row,
+      statedCents: total.statedCents,
+      imported: total.importedCents,
+    });
   }
 }
 
@@ -46,12 +57,16 @@ describe('samples with known truth', () => {
     const name = 'p05_hours_log.tsv';
     const truth = truthOf(name);
     const asked = read(sampleBytes(name)).choices;
-    expect(asked).toEqual([expect.objectContaining({ kind: 'date-order', column: 'Date', mustAsk: true, answer: null })]);
+    expect(asked).toEqual([
+      expect.objectContaining({ kind: 'date-order', column: 'Date', mustAsk: true, answer: null }),
+    ]);
     const settings: ImportSettings = { answers: { [asked[0]?.id ?? '']: 'MDY' } };
     const reading = read(sampleBytes(name), settings);
     expect(readHoursLines(reading)).toEqual(trueHours(truth));
     expect(reading.control.rowsRead).toBe(truth.control.rowsRead);
-    expect(reading.asides.map(({ row, col, reason }) => ({ row, col, reason }))).toEqual([{ row: 19, col: 2, reason: 'missing-vehicle' }]);
+    expect(reading.asides.map(({ row, col, reason }) => ({ row, col, reason }))).toEqual([
+      { row: 19, col: 2, reason: 'missing-vehicle' },
+    ]);
     expect(reading.statedTotals.every((total) => total.stated === total.imported)).toBe(true);
   });
 
@@ -66,6 +81,9 @@ describe('samples with known truth', () => {
   });
 
   it('a workbook is refused with what to do', () => {
-    expect(read(sampleBytes('p04_workbook_2021.xlsx')).refusal).toMatchObject({ kind: 'not-text', message: expect.stringContaining('CSV') });
+    expect(read(sampleBytes('p04_workbook_2021.xlsx')).refusal).toMatchObject({
+      kind: 'not-text',
+      message: expect.stringContaining('CSV'),
+    });
   });
 });

@@ -11,8 +11,14 @@ const SAMPLES = path.resolve(import.meta.dirname, '../fixtures/spreadsheets');
 /** A new shop's books: the usual lists, no rebuild yet. */
 export function emptyBooks(changes: Partial<ShopBooks> = {}): ShopBooks {
   return {
-    currency: 'USD', locale: 'en-US', today: '2026-12-01', categories: DEFAULT_CATEGORIES.map(({ name }) => name),
-    classes: [...DEFAULT_CLASSES], damages: [...DEFAULT_DAMAGES], rebuilds: [], ...changes,
+    currency: 'USD',
+    locale: 'en-US',
+    today: '2026-12-01',
+    categories: DEFAULT_CATEGORIES.map(({ name }) => name),
+    classes: [...DEFAULT_CLASSES],
+    damages: [...DEFAULT_DAMAGES],
+    rebuilds: [],
+    ...changes,
   };
 }
 

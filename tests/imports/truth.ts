@@ -10,26 +10,64 @@ const truthSchema = z.object({
   canonical: z.object({
     rebuilds: z.array(
       z.object({
-        ref: z.string(), year: z.int(), make: z.string().nullable(), model: z.string(), vehicleClass: z.string().nullable(),
-        damage: z.string().nullable(), titleBrand: z.string().nullable(), bought: z.string().nullable(), ready: z.string().nullable(),
-        sold: z.string().nullable(), purchaseCents: z.int().nullable(), salePriceCents: z.int().nullable(), odometer: z.int().nullable(),
+        ref: z.string(),
+        year: z.int(),
+        make: z.string().nullable(),
+        model: z.string(),
+        vehicleClass: z.string().nullable(),
+        damage: z.string().nullable(),
+        titleBrand: z.string().nullable(),
+        bought: z.string().nullable(),
+        ready: z.string().nullable(),
+        sold: z.string().nullable(),
+        purchaseCents: z.int().nullable(),
+        salePriceCents: z.int().nullable(),
+        odometer: z.int().nullable(),
         acceptable: z.object({ make: z.array(z.string().nullable()).optional() }).optional(),
       }),
     ),
     lines: z.array(
       z.object({
-        rebuildRef: z.string(), date: z.string().nullable(), category: z.string(), description: z.string(), vendor: z.string().nullable(),
-        amountCents: z.int(), foreseen: z.boolean().nullable(), estimate: z.boolean(), lenient: z.array(z.string()).optional(), source: sourceSchema,
+        rebuildRef: z.string(),
+        date: z.string().nullable(),
+        category: z.string(),
+        description: z.string(),
+        vendor: z.string().nullable(),
+        amountCents: z.int(),
+        foreseen: z.boolean().nullable(),
+        estimate: z.boolean(),
+        lenient: z.array(z.string()).optional(),
+        source: sourceSchema,
       }),
     ),
-    hours: z.array(z.object({ rebuildRef: z.string(), date: z.string(), person: z.string(), hours: z.number(), task: z.string(), source: sourceSchema })),
+    hours: z.array(
+      z.object({
+        rebuildRef: z.string(),
+        date: z.string(),
+        person: z.string(),
+        hours: z.number(),
+        task: z.string(),
+        source: sourceSchema,
+      }),
+    ),
   }),
   rejects: z.array(z.object({ row: z.int(), col: z.int(), reason: z.string() })),
-  undecidable: z.array(z.object({ source: sourceSchema, acceptable: z.array(z.object({ outcome: z.string(), reason: z.array(z.string()).optional() })) })),
+  undecidable: z.array(
+    z.object({
+      source: sourceSchema,
+      acceptable: z.array(z.object({ outcome: z.string(), reason: z.array(z.string()).optional() })),
+    }),
+  ),
   nonData: z.array(z.object({ row: z.int(), kind: z.string() })),
   blankRows: z.array(z.object({ rows: z.array(z.tuple([z.int(), z.int()])) })),
   statedTotals: z.array(z.object({ statedCents: z.int(), importedCents: z.int(), source: sourceSchema })),
-  control: z.object({ rowsRead: z.int(), totalCents: z.int(), totalSaleCents: z.int(), totalCentsByCategory: z.record(z.string(), z.int()), estimateCents: z.int() }),
+  control: z.object({
+    rowsRead: z.int(),
+    totalCents: z.int(),
+    totalSaleCents: z.int(),
+    totalCentsByCategory: z.record(z.string(), z.int()),
+    estimateCents: z.int(),
+  }),
 });
 export type Truth = z.infer<typeof truthSchema>;
 
@@ -42,12 +80,16 @@ export function truthOf(name: string): Truth {
 export function trueLines(truth: Truth) {
   const nameOf = new Map(truth.canonical.rebuilds.map((rebuild) => [rebuild.ref, `${rebuild.year} ${rebuild.model}`]));
   return truth.canonical.lines.map((line) => ({
-    rebuild: nameOf.get(line.rebuildRef), category: line.category, cents: line.amountCents, isEstimate: line.estimate,
+    rebuild: nameOf.get(line.rebuildRef),
+    category: line.category,
+    cents: line.amountCents,
+    isEstimate: line.estimate,
     ...(line.lenient?.includes('date') ? {} : { date: line.date }),
     ...(line.lenient?.includes('description') ? {} : { what: line.description }),
     ...(line.lenient?.includes('vendor') ? {} : { vendor: line.vendor }),
     foreseen: line.foreseen === null ? null : line.foreseen ? 'foreseen' : 'surprise',
-    row: line.source.row, col: line.source.col,
+    row: line.source.row,
+    col: line.source.col,
   }));
 }
 
@@ -56,22 +98,40 @@ export function readLines(reading: Reading, lenient: readonly string[]) {
   return linesOf(reading)
     .filter((line) => ['entry', 'purchase', 'estimate'].includes(line.kind))
     .map((line) => ({
-      rebuild: rebuildName(reading, line.rebuild), category: line.kind === 'purchase' ? 'purchase' : line.category,
-      cents: line.cents, isEstimate: line.kind === 'estimate',
+      rebuild: rebuildName(reading, line.rebuild),
+      category: line.kind === 'purchase' ? 'purchase' : line.category,
+      cents: line.cents,
+      isEstimate: line.kind === 'estimate',
       ...(lenient.includes('date') ? {} : { date: line.on }),
       ...(lenient.includes('description') ? {} : { what: line.what }),
       ...(lenient.includes('vendor') ? {} : { vendor: line.vendor }),
-      foreseen: line.foreseen, row: line.row, col: line.col,
+      foreseen: line.foreseen,
+      row: line.row,
+      col: line.col,
     }));
 }
 
 export function trueHours(truth: Truth) {
   const nameOf = new Map(truth.canonical.rebuilds.map((rebuild) => [rebuild.ref, `${rebuild.year} ${rebuild.model}`]));
-  return truth.canonical.hours.map((line) => ({ rebuild: nameOf.get(line.rebuildRef), on: line.date, person: line.person, seconds: line.hours * 3600, what: line.task, row: line.source.row }));
+  return truth.canonical.hours.map((line) => ({
+    rebuild: nameOf.get(line.rebuildRef),
+    on: line.date,
+    person: line.person,
+    seconds: line.hours * 3600,
+    what: line.task,
+    row: line.source.row,
+  }));
 }
 
 export function readHoursLines(reading: Reading) {
-  return linesOf(reading).map(({ rebuild, on, person, seconds, what, row }) => ({ rebuild: rebuildName(reading, rebuild), on, person, seconds, what, row }));
+  return linesOf(reading).map(({ rebuild, on, person, seconds, what, row }) => ({
+    rebuild: rebuildName(reading, rebuild),
+    on,
+    person,
+    seconds,
+    what,
+    row,
+  }));
 }
 
 function rebuildName(reading: Reading, place: number | null): string | null {
@@ -85,17 +145,35 @@ export function trueFacts(truth: Truth, reading: Reading) {
     const found = reading.rebuilds.find((one) => one.year === rebuild.year && one.model === rebuild.model);
     const mayLackMake = rebuild.acceptable?.make?.includes(found?.make ?? null) ?? false;
     return {
-      year: rebuild.year, make: mayLackMake ? (found?.make ?? null) : rebuild.make, model: rebuild.model, className: rebuild.vehicleClass, damageName: rebuild.damage,
-      titleBrand: rebuild.titleBrand, boughtOn: rebuild.bought, roadworthyOn: rebuild.ready, soldOn: rebuild.sold,
-      purchaseCents: rebuild.purchaseCents, saleCents: rebuild.salePriceCents, odometer: rebuild.odometer,
+      year: rebuild.year,
+      make: mayLackMake ? (found?.make ?? null) : rebuild.make,
+      model: rebuild.model,
+      className: rebuild.vehicleClass,
+      damageName: rebuild.damage,
+      titleBrand: rebuild.titleBrand,
+      boughtOn: rebuild.bought,
+      roadworthyOn: rebuild.ready,
+      soldOn: rebuild.sold,
+      purchaseCents: rebuild.purchaseCents,
+      saleCents: rebuild.salePriceCents,
+      odometer: rebuild.odometer,
     };
   });
 }
 
 export function readFacts(reading: Reading) {
   return reading.rebuilds.map((found) => ({
-    year: found.year, make: found.make, model: found.model, className: found.className, damageName: found.damageName, titleBrand: found.titleBrand,
-    boughtOn: found.dates.boughtOn ?? null, roadworthyOn: found.dates.roadworthyOn ?? null, soldOn: found.dates.soldOn ?? null,
-    purchaseCents: found.purchaseCents, saleCents: found.saleCents, odometer: found.odometer,
+    year: found.year,
+    make: found.make,
+    model: found.model,
+    className: found.className,
+    damageName: found.damageName,
+    titleBrand: found.titleBrand,
+    boughtOn: found.dates.boughtOn ?? null,
+    roadworthyOn: found.dates.roadworthyOn ?? null,
+    soldOn: found.dates.soldOn ?? null,
+    purchaseCents: found.purchaseCents,
+    saleCents: found.saleCents,
+    odometer: found.odometer,
   }));
 }

@@ -32,43 +32,63 @@ export function startReading(asker: Asker, record: ImportRecord): void {
   const { database, config, now } = services;
   const write = (work: (store: ReturnType<typeof importStore>) => Promise<unknown>) =>
     database.lock(() => work(importStore(shopScope(database.writer, shopId))));
-  void tracked(record.id, async () => {
-    const job = { databaseFile: database.file, shopId, importId: record.id, now: now() };
-    try {
-      const done = await runJob(
-        { ...job, kind: 'read', file: importPath(config.dataDir, record.id), settings: settingsOf(record) },
-        (share) => shares.set(record.id, share),
-      );
-      if (done.kind === 'read') await write((store) => store.keepReading(record.id, done.reading));
-    } catch (error) {
-      services.logger.error({ err: error, importId: record.id }, 'reading an import failed');
-      await write((store) => store.refuse(record.id, 'This file could not be read. It may be too large, or damaged.'));
-    }
-  }, asker);
+  void tracked(
+    record.id,
+    async () => {
+      const job = { databaseFile: database.file, shopId, importId: record.id, now: now() };
+      try {
+        const done = await runJob(
+          { ...job, kind: 'read', file: importPath(config.dataDir, record.id), settings: settingsOf(record) },
+          (share) => shares.set(record.id, share),
+        );
+        if (done.kind === 'read') await write((store) => store.keepReading(record.id, done.reading));
+      } catch (error) {
+        services.logger.error({ err: error, importId: record.id }, 'reading an import failed');
+        await write((store) =>
+          store.refuse(record.id, 'This file could not be read. It may be too large, or damaged.'),
+        );
+      }
+    },
+    asker,
+  );
 }
 
 /** Books an import in a worker while other writes wait their turn. Returns at once; on failure it is ready again. */
-export function startCommit(asker: Asker & { readonly userId: string; readonly requestId: string }, record: ImportRecord): void {
+export function startCommit(
+  asker: Asker & { readonly userId: string; readonly requestId: string },
+  record: ImportRecord,
+): void {
   const { services, shopId, userId, requestId } = asker;
   const { database, config, now } = services;
-  void tracked(record.id, () =>
-    database.lock(async () => {
-      const common = { databaseFile: database.file, shopId, importId: record.id, now: now(), userId, requestId };
-      const store = importStore(shopScope(database.writer, shopId));
-      try {
-        const done = await runJob(
-          { ...common, kind: 'commit', file: importPath(config.dataDir, record.id), settings: settingsOf(record), control: controlOf(record), at: now().toISOString() },
-          (share) => shares.set(record.id, share),
-        );
-        if (done.kind !== 'outdated') return;
-        // The books changed under the reading: it is read anew, so that people see what would come in now.
-        await store.move(record.id, 'committing', 'reading');
-        startReading(asker, record);
-      } catch (error) {
-        await store.move(record.id, 'committing', 'ready');
-        throw error;
-      }
-    }), asker);
+  void tracked(
+    record.id,
+    () =>
+      database.lock(async () => {
+        const common = { databaseFile: database.file, shopId, importId: record.id, now: now(), userId, requestId };
+        const store = importStore(shopScope(database.writer, shopId));
+        try {
+          const done = await runJob(
+            {
+              ...common,
+              kind: 'commit',
+              file: importPath(config.dataDir, record.id),
+              settings: settingsOf(record),
+              control: controlOf(record),
+              at: now().toISOString(),
+            },
+            (share) => shares.set(record.id, share),
+          );
+          if (done.kind !== 'outdated') return;
+          // The books changed under the reading: it is read anew, so that people see what would come in now.
+          await store.move(record.id, 'committing', 'reading');
+          startReading(asker, record);
+        } catch (error) {
+          await store.move(record.id, 'committing', 'ready');
+          throw error;
+        }
+      }),
+    asker,
+  );
 }
 
 /** Puts imports straight that a stop of the server cut off: nothing of them was booked. */

@@ -36,7 +36,12 @@ interface Planned {
  * Books everything that a file was understood to hold: rebuilds, entries, hours, locked plans and the raw rows, with
  * the sums over them. Runs in the caller's transaction; throws ReadingOutdated when it does not come to what was seen.
  */
-export function commitRows(raw: RawDatabase, source: ByteSource, task: CommitTask, onPart?: (share: number) => void): Brought {
+export function commitRows(
+  raw: RawDatabase,
+  source: ByteSource,
+  task: CommitTask,
+  onPart?: (share: number) => void,
+): Brought {
   const { plan } = understand(source, shopBooks(raw, task.shopId, task.now), task.settings);
   if (!plan) throw new ReadingOutdated();
   raw.pragma('defer_foreign_keys = ON');
@@ -62,7 +67,8 @@ export function commitRows(raw: RawDatabase, source: ByteSource, task: CommitTas
 }
 
 function isSame(a: Control, b: Control): boolean {
-  const sorted = (control: Control) => JSON.stringify({ ...control, centsByCategory: Object.entries(control.centsByCategory).sort() });
+  const sorted = (control: Control) =>
+    JSON.stringify({ ...control, centsByCategory: Object.entries(control.centsByCategory).sort() });
   return sorted(a) === sorted(b);
 }
 
@@ -70,7 +76,9 @@ function isSame(a: Control, b: Control): boolean {
 function lineWriter(raw: RawDatabase, books: ImportedBooks, shopId: string) {
   const categories = wordIds(raw, shopId, 'categories');
   const workers = wordIds(raw, shopId, 'workers');
-  const paid = new Set(raw.prepare('SELECT id FROM workers WHERE shop_id = ? AND is_paid = 1').pluck().all(shopId) as string[]);
+  const paid = new Set(
+    raw.prepare('SELECT id FROM workers WHERE shop_id = ? AND is_paid = 1').pluck().all(shopId) as string[],
+  );
   const ids = new Map<Draft, string>();
   const plans = new Map<Draft, Planned>();
   const touched = new Set<string>();
@@ -112,7 +120,16 @@ function lineWriter(raw: RawDatabase, books: ImportedBooks, shopId: string) {
       books.entry({ ...line, rebuildId, categoryId: categoryOf(line), datedOn: line.on });
     } else if (line.kind === 'hours' && rebuildId !== null) {
       const workerId = workerOf(line.person);
-      books.hours({ rebuildId, workerId, isPaid: workerId !== null && paid.has(workerId), workedOn: line.on, seconds: line.seconds, task: line.what, row, col });
+      books.hours({
+        rebuildId,
+        workerId,
+        isPaid: workerId !== null && paid.has(workerId),
+        workedOn: line.on,
+        seconds: line.seconds,
+        task: line.what,
+        row,
+        col,
+      });
     } else if (line.kind === 'estimate' && draft) {
       const { lines } = planOf(draft);
       lines.set(categoryOf(line), (lines.get(categoryOf(line)) ?? 0) + line.cents);
@@ -123,7 +140,14 @@ function lineWriter(raw: RawDatabase, books: ImportedBooks, shopId: string) {
   return { write, idOf, plans, touched, workerIds, hasOverhead: () => isOverhead };
 }
 
-function writeRebuilds(raw: RawDatabase, books: ImportedBooks, read: RowsRead, writer: ReturnType<typeof lineWriter>, task: CommitTask, plan: Plan): Filled {
+function writeRebuilds(
+  raw: RawDatabase,
+  books: ImportedBooks,
+  read: RowsRead,
+  writer: ReturnType<typeof lineWriter>,
+  task: CommitTask,
+  plan: Plan,
+): Filled {
   const classes = wordIds(raw, task.shopId, 'vehicle_classes');
   const damages = wordIds(raw, task.shopId, 'damage_types');
   const filled: Record<string, Record<string, string | number>> = {};
@@ -137,8 +161,11 @@ function writeRebuilds(raw: RawDatabase, books: ImportedBooks, read: RowsRead, w
     const planned = writer.plans.get(draft);
     if (planned && plan.shape === 'vehicles') {
       books.baseline({
-        rebuildId: id, madeOn: draft.found.dates.boughtOn ?? null, plannedSeconds: planned.seconds,
-        expectedSaleCents: draft.found.expectedSaleCents, lines: planned.lines,
+        rebuildId: id,
+        madeOn: draft.found.dates.boughtOn ?? null,
+        plannedSeconds: planned.seconds,
+        expectedSaleCents: draft.found.expectedSaleCents,
+        lines: planned.lines,
       });
     }
   }

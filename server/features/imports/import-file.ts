@@ -34,7 +34,13 @@ export async function importFile(file: FileToImport): Promise<{ importId: string
   const common = { databaseFile: database.file, shopId, importId, now, userId, requestId, file: kept, settings };
   return database.lock(async () => {
     const store = importStore(shopScope(database.writer, shopId));
-    await store.create({ id: importId, fileName: file.fileName, fileSha256: sha256(bytes), byteSize: bytes.length, createdBy: userId });
+    await store.create({
+      id: importId,
+      fileName: file.fileName,
+      fileSha256: sha256(bytes),
+      byteSize: bytes.length,
+      createdBy: userId,
+    });
     const read = doJob({ ...common, kind: 'read' });
     if (read.kind !== 'read') throw new Error('The file was not read');
     const { reading } = read;

@@ -9,14 +9,31 @@ import { importStore, readingOf } from './store.ts';
 const PAGE = 100;
 
 const SUMMARY = [
-  'imports.id', 'imports.file_name', 'imports.byte_size', 'imports.state', 'imports.shape', 'imports.refusal', 'users.name as created_by',
-  'imports.created_at', 'imports.committed_at', 'imports.undone_at', 'imports.version',
+  'imports.id',
+  'imports.file_name',
+  'imports.byte_size',
+  'imports.state',
+  'imports.shape',
+  'imports.refusal',
+  'users.name as created_by',
+  'imports.created_at',
+  'imports.committed_at',
+  'imports.undone_at',
+  'imports.version',
 ];
 
 /** The files brought in, newest first; dropped ones are not shown. */
-export async function listImports(scope: ShopScope, cursor: string | undefined): Promise<{ rows: ImportSummary[]; next: string | null }> {
+export async function listImports(
+  scope: ShopScope,
+  cursor: string | undefined,
+): Promise<{ rows: ImportSummary[]; next: string | null }> {
   const after = readCursor(cursor, z.tuple([z.string(), z.string()]));
-  const query = summaries(scope).whereNot('imports.state', 'discarded').orderBy([{ column: 'imports.created_at', order: 'desc' }, { column: 'imports.id', order: 'desc' }]);
+  const query = summaries(scope)
+    .whereNot('imports.state', 'discarded')
+    .orderBy([
+      { column: 'imports.created_at', order: 'desc' },
+      { column: 'imports.id', order: 'desc' },
+    ]);
   if (after) query.whereRaw('(imports.created_at, imports.id) < (?, ?)', after);
   const rows: object[] = await query.limit(PAGE + 1);
   const page = rows.slice(0, PAGE).map((row) => fromRow<ImportSummary>(row));
@@ -41,10 +58,19 @@ export async function showImport(scope: ShopScope, id: string): Promise<Import> 
 }
 
 /** Rows of a file that came in, in the file's order. */
-export async function listRows(scope: ShopScope, id: string, outcome: Outcome | undefined, cursor: string | undefined): Promise<{ rows: ImportRow[]; next: string | null }> {
+export async function listRows(
+  scope: ShopScope,
+  id: string,
+  outcome: Outcome | undefined,
+  cursor: string | undefined,
+): Promise<{ rows: ImportRow[]; next: string | null }> {
   await importStore(scope).get(id);
   const after = readCursor(cursor, z.tuple([z.int()]));
-  const query = scope.table('import_rows').where({ import_id: id }).orderBy('row').select('row', 'cells', 'outcome', 'reason');
+  const query = scope
+    .table('import_rows')
+    .where({ import_id: id })
+    .orderBy('row')
+    .select('row', 'cells', 'outcome', 'reason');
   if (outcome) query.where({ outcome });
   if (after) query.where('row', '>', after[0]);
   const rows: (Omit<ImportRow, 'cells'> & { cells: string })[] = await query.limit(PAGE + 1);

@@ -3,8 +3,18 @@ import type { RebuildFound } from '#shared/contracts/imports.ts';
 type Words = ReadonlyMap<string, string>;
 
 const TEXTS = {
-  make: 'make', model: 'model', trim: 'trim', vin: 'vin', year: 'year', odometer: 'odometer', titleBrand: 'title_brand_bought',
-  boughtFrom: 'bought_from', notes: 'notes', purchaseCents: 'purchase_cents', askingCents: 'asking_cents', saleCents: 'sale_cents',
+  make: 'make',
+  model: 'model',
+  trim: 'trim',
+  vin: 'vin',
+  year: 'year',
+  odometer: 'odometer',
+  titleBrand: 'title_brand_bought',
+  boughtFrom: 'bought_from',
+  notes: 'notes',
+  purchaseCents: 'purchase_cents',
+  askingCents: 'asking_cents',
+  saleCents: 'sale_cents',
 } as const satisfies Partial<Record<keyof RebuildFound, string>>;
 
 /** What a file says of a rebuild, as columns of its table. What it does not say is left out. */
@@ -23,7 +33,10 @@ export function rebuildColumns(found: RebuildFound, classes: Words, damages: Wor
   word('damage_id', found.damageName, damages);
   word('second_damage_id', found.secondDamageName, damages);
   for (const [field, day] of Object.entries(found.dates)) {
-    columns.set(field.replace(/[A-Z]/g, (letter) => `_${letter.toLowerCase()}`), day);
+    columns.set(
+      field.replace(/[A-Z]/g, (letter) => `_${letter.toLowerCase()}`),
+      day,
+    );
   }
   return columns;
 }

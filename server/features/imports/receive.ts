@@ -16,7 +16,11 @@ export interface ReceivedFile {
  * Takes the uploaded file (field "file") to disk, within the limit. What is plainly no text is refused at once; its
  * name and its declared type count for nothing.
  */
-export async function receiveFile(req: Request, res: Response, limits: { dataDir: string; mostBytes: number }): Promise<ReceivedFile> {
+export async function receiveFile(
+  req: Request,
+  res: Response,
+  limits: { dataDir: string; mostBytes: number },
+): Promise<ReceivedFile> {
   const take = multer({
     dest: await makeImportFolder(limits.dataDir),
     limits: { fileSize: limits.mostBytes, files: 1, fields: 4, parts: 6 },

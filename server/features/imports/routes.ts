@@ -11,7 +11,8 @@ import { uploadImport } from './upload-import.ts';
 
 type OnImport = Context & { readonly params: { readonly importId: string } };
 
-const readScope = (ctx: Pick<Context, 'services' | 'actor'>) => shopScope(ctx.services.database.reader, ctx.actor.shopId);
+const readScope = (ctx: Pick<Context, 'services' | 'actor'>) =>
+  shopScope(ctx.services.database.reader, ctx.actor.shopId);
 const current = async (ctx: OnImport) => importStore(readScope(ctx)).get(ctx.params.importId);
 const shown = async (ctx: OnImport) => {
   const reply = await showImport(readScope(ctx), ctx.params.importId);
@@ -52,10 +53,15 @@ async function commitImport(ctx: OnImport) {
   if (before.state !== 'ready') throw wrongState('Only a file that was read can be booked.');
   const open = readingOf(before)?.choices.filter((choice) => choice.mustAsk && choice.answer === null) ?? [];
   if (open.length > 0) {
-    throw new ProblemError(422, { name: 'choices-open', detail: `Answer first: ${open.map((choice) => choice.question).join(' ')}` });
+    throw new ProblemError(422, {
+      name: 'choices-open',
+      detail: `Answer first: ${open.map((choice) => choice.question).join(' ')}`,
+    });
   }
   const { database } = services;
-  const isMine = await database.lock(() => importStore(shopScope(database.writer, actor.shopId)).move(before.id, 'ready', 'committing'));
+  const isMine = await database.lock(() =>
+    importStore(shopScope(database.writer, actor.shopId)).move(before.id, 'ready', 'committing'),
+  );
   if (isMine) startCommit({ services, ...actor, requestId: String(ctx.req.id) }, before);
   return shown(ctx);
 }
@@ -67,10 +73,20 @@ async function undoImport(ctx: OnImport) {
   if (before.state === 'undone') return shown(ctx);
   if (before.state !== 'committed') throw wrongState('Only a file that is booked can be taken out.');
   const done = await database.lock(() =>
-    runJob({ kind: 'undo', databaseFile: database.file, importId: before.id, now: now(), ...actor, requestId: String(ctx.req.id) }),
+    runJob({
+      kind: 'undo',
+      databaseFile: database.file,
+      importId: before.id,
+      now: now(),
+      ...actor,
+      requestId: String(ctx.req.id),
+    }),
   );
   if (done.kind === 'undone' && done.obstacle !== null) {
-    throw new ProblemError(409, { name: 'undo-refused', detail: `This import cannot be taken out any more. ${done.obstacle}` });
+    throw new ProblemError(409, {
+      name: 'undo-refused',
+      detail: `This import cannot be taken out any more. ${done.obstacle}`,
+    });
   }
   return shown(ctx);
 }
@@ -80,7 +96,8 @@ async function discardImport(ctx: Context<typeof importsApi.discard>) {
   const ready = await write(ctx, { action: 'drop file', subject: 'import' }, async (books) => {
     const store = importStore(books.scope);
     const before = await store.get(importId);
-    if (before.state !== 'ready' && before.state !== 'refused') throw wrongState('A file that is being read, or is booked, cannot be dropped.');
+    if (before.state !== 'ready' && before.state !== 'refused')
+      throw wrongState('A file that is being read, or is booked, cannot be dropped.');
     await store.discard(importId);
     const reply: Import = await showImport(books.scope, importId);
     return { id: importId, before: { state: before.state }, after: { state: 'discarded' }, reply };

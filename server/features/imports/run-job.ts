@@ -14,7 +14,8 @@ let idle: { readonly worker: Worker; readonly ending: NodeJS.Timeout } | null = 
 
 /** Does a job in a thread of its own, so that no request waits for it. `onPart` hears its share done, 0–1. */
 export async function runJob(job: Job, onPart: (share: number) => void = () => undefined): Promise<Done> {
-  const worker = takeIdle() ?? new Worker(BOOT, { eval: true, resourceLimits: { maxOldGenerationSizeMb: MOST_MEGABYTES } });
+  const worker =
+    takeIdle() ?? new Worker(BOOT, { eval: true, resourceLimits: { maxOldGenerationSizeMb: MOST_MEGABYTES } });
   worker.ref();
   try {
     const done = await ask(worker, job, onPart);

@@ -17,13 +17,19 @@ const REBUILDS = `
     EXISTS (SELECT 1 FROM entries e WHERE e.shop_id = r.shop_id AND e.rebuild_id = r.id) AS has_entries
   FROM rebuilds r WHERE r.shop_id = ? ORDER BY r.created_at, r.id`;
 
-type RebuildRow = Pick<ExistingRebuild, 'id' | 'tag' | 'year' | 'make' | 'model'> & Record<'has_purchase' | 'has_left' | 'has_baseline' | 'has_entries', number>;
+type RebuildRow = Pick<ExistingRebuild, 'id' | 'tag' | 'year' | 'make' | 'model'> &
+  Record<'has_purchase' | 'has_left' | 'has_baseline' | 'has_entries', number>;
 
 /** What understanding a file needs to know of a shop, as its books stand now. */
 export function shopBooks(raw: RawDatabase, shopId: string, now: Date): ShopBooks {
-  const shop = raw.prepare('SELECT currency, locale, time_zone, fixed_today FROM shops WHERE id = ?').get(shopId) as ShopRow;
+  const shop = raw
+    .prepare('SELECT currency, locale, time_zone, fixed_today FROM shops WHERE id = ?')
+    .get(shopId) as ShopRow;
   const names = (table: string) =>
-    raw.prepare(`SELECT name FROM ${table} WHERE shop_id = ? AND is_retired = 0 ORDER BY position`).pluck().all(shopId) as string[];
+    raw
+      .prepare(`SELECT name FROM ${table} WHERE shop_id = ? AND is_retired = 0 ORDER BY position`)
+      .pluck()
+      .all(shopId) as string[];
   const rebuilds = raw.prepare(REBUILDS).all(shopId) as RebuildRow[];
   return {
     currency: shop.currency,
@@ -43,7 +49,11 @@ export function shopBooks(raw: RawDatabase, shopId: string, now: Date): ShopBook
 }
 
 /** Ids of the shop's words by their names, in any case: retired ones too, so that none is made twice. */
-export function wordIds(raw: RawDatabase, shopId: string, table: 'categories' | 'vehicle_classes' | 'damage_types' | 'workers'): Map<string, string> {
+export function wordIds(
+  raw: RawDatabase,
+  shopId: string,
+  table: 'categories' | 'vehicle_classes' | 'damage_types' | 'workers',
+): Map<string, string> {
   const rows = raw.prepare(`SELECT name, id FROM ${table} WHERE shop_id = ?`).raw().all(shopId) as [string, string][];
   return new Map(rows.map(([name, id]) => [name.toLowerCase(), id]));
 }

@@ -35,18 +35,29 @@ export function importStore(scope: ShopScope) {
     get: (id: string) => scope.get<ImportRecord>('imports', id),
     /** An import of the same file whose rows stand in the books; null = none. */
     async findCommitted(sha256: string): Promise<ImportRecord | null> {
-      const row: object | undefined = await scope.table('imports').where({ file_sha256: sha256, state: 'committed' }).first();
+      const row: object | undefined = await scope
+        .table('imports')
+        .where({ file_sha256: sha256, state: 'committed' })
+        .first();
       return row ? fromRow<ImportRecord>(row) : null;
     },
-    create: (fields: NewImport) => scope.insert('imports', { ...fields, state: 'reading', createdAt: new Date().toISOString() }),
+    create: (fields: NewImport) =>
+      scope.insert('imports', { ...fields, state: 'reading', createdAt: new Date().toISOString() }),
     /** Starts another reading with what a person said of the file. */
     readAgain: (id: string, version: number, settings: ImportSettings) =>
-      scope.update<ImportRecord>('imports', id, version, { state: 'reading', mapping: JSON.stringify(settings), refusal: null }),
+      scope.update<ImportRecord>('imports', id, version, {
+        state: 'reading',
+        mapping: JSON.stringify(settings),
+        refusal: null,
+      }),
     /** Keeps a reading, unless the import was dropped or changed meanwhile. */
     async keepReading(id: string, reading: Reading): Promise<void> {
       const { refusal, shape } = reading;
       await only(id, 'reading').update({
-        state: refusal ? 'refused' : 'ready', shape, reading: JSON.stringify(reading), refusal: refusal?.message ?? null,
+        state: refusal ? 'refused' : 'ready',
+        shape,
+        reading: JSON.stringify(reading),
+        refusal: refusal?.message ?? null,
       });
     },
     async refuse(id: string, message: string): Promise<void> {
@@ -57,7 +68,11 @@ export function importStore(scope: ShopScope) {
       return (await only(id, from).update({ state: to })) === 1;
     },
     async discard(id: string): Promise<void> {
-      await scope.table('imports').where({ id }).whereIn('state', ['ready', 'refused']).update({ state: 'discarded', reading: null });
+      await scope
+        .table('imports')
+        .where({ id })
+        .whereIn('state', ['ready', 'refused'])
+        .update({ state: 'discarded', reading: null });
     },
   };
 }

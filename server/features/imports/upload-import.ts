@@ -33,7 +33,8 @@ export async function uploadImport(ctx: Context<typeof importsApi.upload>): Prom
       isNew = true;
       return { id, before: null, after: { fileName: received.name, fileSha256 }, reply, version: reply.version };
     });
-    if (isNew) startReading({ services: ctx.services, shopId }, await importStore(shopScope(database.reader, shopId)).get(id));
+    if (isNew)
+      startReading({ services: ctx.services, shopId }, await importStore(shopScope(database.reader, shopId)).get(id));
     return ready;
   } finally {
     if (!isNew) await Promise.all([dropFile(kept), dropFile(received.path)]);
@@ -42,5 +43,8 @@ export async function uploadImport(ctx: Context<typeof importsApi.upload>): Prom
 
 function alreadyIn(committedAt: string | null): ProblemError {
   const day = committedAt?.slice(0, 10) ?? 'before';
-  return new ProblemError(409, { name: 'already-in', detail: `This very file came in on ${day}: there is nothing new in it.` });
+  return new ProblemError(409, {
+    name: 'already-in',
+    detail: `This very file came in on ${day}: there is nothing new in it.`,
+  });
 }

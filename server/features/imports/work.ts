@@ -49,7 +49,10 @@ export function work(job: Job, onPart: (share: number) => void): Done {
     preparePragmas(raw);
     raw.pragma(`cache_size = -${CACHE_KB}`);
     if (job.kind === 'read') {
-      return { kind: 'read', reading: readFile(bytesOfFile(job.file), shopBooks(raw, job.shopId, job.now), job.settings, onPart) };
+      return {
+        kind: 'read',
+        reading: readFile(bytesOfFile(job.file), shopBooks(raw, job.shopId, job.now), job.settings, onPart),
+      };
     }
     return job.kind === 'commit' ? commitJob(raw, job, onPart) : undoJob(raw, job);
   } finally {
@@ -82,7 +85,9 @@ function commitJob(raw: RawDatabase, job: CommitJob, onPart: (share: number) => 
 function undoJob(raw: RawDatabase, job: UndoTask): Done {
   const undo = raw.transaction((): Done => {
     const kept = raw
-      .prepare(`SELECT json_extract(reading, '$.brought') FROM imports WHERE shop_id = ? AND id = ? AND state = 'committed'`)
+      .prepare(
+        `SELECT json_extract(reading, '$.brought') FROM imports WHERE shop_id = ? AND id = ? AND state = 'committed'`,
+      )
       .pluck()
       .get(job.shopId, job.importId) as string | undefined;
     // Someone else took it out while this one waited its turn.
@@ -92,7 +97,9 @@ function undoJob(raw: RawDatabase, job: UndoTask): Done {
     if (obstacle !== null) return { kind: 'undone', obstacle };
     removeImported(raw, job.shopId, job.importId, brought);
     raiseBooksVersion(raw, job.shopId);
-    raw.prepare(`UPDATE imports SET state = 'undone', undone_at = ?, version = version + 1 WHERE shop_id = ? AND id = ?`).run(job.now.toISOString(), job.shopId, job.importId);
+    raw
+      .prepare(`UPDATE imports SET state = 'undone', undone_at = ?, version = version + 1 WHERE shop_id = ? AND id = ?`)
+      .run(job.now.toISOString(), job.shopId, job.importId);
     leave(raw, job, 'undo import', { state: 'committed' }, { state: 'undone' });
     return { kind: 'undone', obstacle: null };
   });
@@ -100,10 +107,22 @@ function undoJob(raw: RawDatabase, job: UndoTask): Done {
 }
 
 function raiseBooksVersion(raw: RawDatabase, shopId: string): number {
-  return raw.prepare('UPDATE shops SET books_version = books_version + 1 WHERE id = ? RETURNING books_version').pluck().get(shopId) as number;
+  return raw
+    .prepare('UPDATE shops SET books_version = books_version + 1 WHERE id = ? RETURNING books_version')
+    .pluck()
+    .get(shopId) as number;
 }
 
 function leave(raw: RawDatabase, job: CommitJob | UndoTask, action: string, before: unknown, after: unknown): void {
   const { shopId, userId, requestId, importId } = job;
-  chainedAfterLast(raw, { shopId, actorId: userId, requestId, action, subject: 'import', subjectId: importId, before, after });
+  chainedAfterLast(raw, {
+    shopId,
+    actorId: userId,
+    requestId,
+    action,
+    subject: 'import',
+    subjectId: importId,
+    before,
+    after,
+  });
 }

@@ -3,10 +3,18 @@ import { type Day, dayFromParts, isDay } from '#shared/day.ts';
 export type DateOrder = 'MDY' | 'DMY';
 
 const MONTHS = [
-  'jan januar january ene enero janv janvier', 'feb februar february febr febrero fev fevrier', 'mar marz march mrz marzo mars',
-  'apr april abr abril avr avril', 'may mai mayo', 'jun june juni junio juin', 'jul july juli julio juillet',
-  'aug august ago agosto aout', 'sep sept september septiembre septembre', 'oct okt october oktober octubre octobre',
-  'nov november noviembre novembre', 'dec dez december dezember dic diciembre decembre',
+  'jan januar january ene enero janv janvier',
+  'feb februar february febr febrero fev fevrier',
+  'mar marz march mrz marzo mars',
+  'apr april abr abril avr avril',
+  'may mai mayo',
+  'jun june juni junio juin',
+  'jul july juli julio juillet',
+  'aug august ago agosto aout',
+  'sep sept september septiembre septembre',
+  'oct okt october oktober octubre octobre',
+  'nov november noviembre novembre',
+  'dec dez december dezember dic diciembre decembre',
 ];
 const MONTH_OF = new Map(MONTHS.flatMap((names, index) => names.split(' ').map((name) => [name, index + 1] as const)));
 
@@ -15,7 +23,12 @@ const NUMERIC = /^(\d{1,2})([-/.])(\d{1,2})\2(\d{4}|\d{2})(?:,? \d{1,2}:\d{2}.*)
 const DAY_FIRST = /^(\d{1,2})(?:st|nd|rd|th)?[-. /]*([\p{L}]{3,})[-., /]*(\d{4}|\d{2})$/u;
 const MONTH_FIRST = /^([\p{L}]{3,})[-. /]*(\d{1,2})(?:st|nd|rd|th)?[-, /]+(\d{4}|\d{2})$/u;
 
-const plain = (text: string) => text.normalize('NFKD').replace(/\p{M}+/gu, '').toLowerCase().trim();
+const plain = (text: string) =>
+  text
+    .normalize('NFKD')
+    .replace(/\p{M}+/gu, '')
+    .toLowerCase()
+    .trim();
 
 /** `17` → 2017, `95` → 1995: the latest year with these last digits that is not after next year. */
 export function fullYear(digits: string, thisYear: number): number {

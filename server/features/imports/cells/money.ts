@@ -52,7 +52,10 @@ function plainCents(text: string): number {
 
 /** Does a cell look like money or a plain number, whatever its decimal mark? */
 export function looksLikeMoney(text: string): boolean {
-  const bare = text.trim().replace(SIGN, '').replace(/[\s'’()+\-−–]/g, '');
+  const bare = text
+    .trim()
+    .replace(SIGN, '')
+    .replace(/[\s'’()+\-−–]/g, '');
   return bare !== '' && /^\d[\d.,]*$/.test(bare);
 }
 

@@ -9,15 +9,39 @@ export interface Draft {
 }
 
 /** A rebuild of which nothing is known yet but its name. */
-export function newDraft(tag: string, existing: ExistingRebuild | null, row: number, known: Partial<RebuildFound> = {}): Draft {
+export function newDraft(
+  tag: string,
+  existing: ExistingRebuild | null,
+  row: number,
+  known: Partial<RebuildFound> = {},
+): Draft {
   return {
     place: -1,
     existing,
     found: {
-      tag: existing?.tag ?? tag, existingId: existing?.id ?? null, year: null, make: null, model: null, trim: null, vin: null,
-      className: null, damageName: null, secondDamageName: null, titleBrand: null, odometer: null, isSeen: null,
-      boughtFrom: null, notes: null, purchaseCents: null, askingCents: null, saleCents: null, expectedSaleCents: null,
-      dates: {}, spellings: [], row, ...known,
+      tag: existing?.tag ?? tag,
+      existingId: existing?.id ?? null,
+      year: null,
+      make: null,
+      model: null,
+      trim: null,
+      vin: null,
+      className: null,
+      damageName: null,
+      secondDamageName: null,
+      titleBrand: null,
+      odometer: null,
+      isSeen: null,
+      boughtFrom: null,
+      notes: null,
+      purchaseCents: null,
+      askingCents: null,
+      saleCents: null,
+      expectedSaleCents: null,
+      dates: {},
+      spellings: [],
+      row,
+      ...known,
     },
   };
 }

@@ -31,8 +31,14 @@ export interface Fault {
 export function expenseColumns(plan: Plan) {
   const col = (meaning: Parameters<typeof placeOf>[1]) => placeOf(plan.columns, meaning) + 1;
   return {
-    date: col('date'), category: col('category'), what: col('what'), vendor: col('vendor'), foreseen: col('foreseen'),
-    amount: col('amount'), credit: col('credit'), name: col('vehicle') || col('stock number') || col('model'),
+    date: col('date'),
+    category: col('category'),
+    what: col('what'),
+    vendor: col('vendor'),
+    foreseen: col('foreseen'),
+    amount: col('amount'),
+    credit: col('credit'),
+    name: col('vehicle') || col('stock number') || col('model'),
   };
 }
 export type ExpenseColumns = ReturnType<typeof expenseColumns>;
@@ -76,7 +82,8 @@ export function expenseFault(row: ExpenseCells, cols: ExpenseColumns, isRepeat: 
   const { target, on, paid, back } = row;
   if (isRepeat) return { reason: 'duplicate', col: typeof paid === 'number' ? cols.amount : cols.name };
   if (row.name === '') return { reason: 'missing-vehicle', col: cols.name };
-  if (target === undefined || target === 'ambiguous' || target === 'aside') return { reason: 'ambiguous-vehicle', col: cols.name };
+  if (target === undefined || target === 'ambiguous' || target === 'aside')
+    return { reason: 'ambiguous-vehicle', col: cols.name };
   if (on === 'bad' || (on === 'blank' && target === 'overhead')) return { reason: 'bad-date', col: cols.date };
   if (typeof paid === 'string' && paid !== 'blank') return { reason: paid, col: cols.amount };
   if (typeof back === 'string' && back !== 'blank') return { reason: back, col: cols.credit };

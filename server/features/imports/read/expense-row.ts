@@ -28,7 +28,11 @@ export function expenseRowReader(plan: Plan, sums: ColumnSums): RowReader {
   };
 }
 
-function lineOf(row: ExpenseCells, cents: number, from: Pick<DraftLine, 'col' | 'foreseen' | 'isExtra'> & { line: number }): DraftLine {
+function lineOf(
+  row: ExpenseCells,
+  cents: number,
+  from: Pick<DraftLine, 'col' | 'foreseen' | 'isExtra'> & { line: number },
+): DraftLine {
   const category = row.meaning?.category ?? '';
   const kind = category === PURCHASE ? 'purchase' : category === SALE ? 'sale' : 'entry';
   return {

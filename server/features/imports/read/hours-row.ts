@@ -13,7 +13,8 @@ export function hoursRowReader(plan: Plan, sums: ColumnSums): RowReader {
   const nameCol = Math.max(at('vehicle'), at('stock number'), at('model')) + 1;
   const nameOf = vehicleText(plan.columns);
   const dayOf = plan.days.get(date + 1) ?? (() => 'blank' as const);
-  const textAt = (cells: readonly string[], place: number) => (place < 0 ? null : (cells[place] ?? '').trim().normalize('NFC') || null);
+  const textAt = (cells: readonly string[], place: number) =>
+    place < 0 ? null : (cells[place] ?? '').trim().normalize('NFC') || null;
   return (cells, line) => {
     const name = nameOf(cells);
     const dateCell = (cells[date] ?? '').trim();
@@ -27,13 +28,19 @@ export function hoursRowReader(plan: Plan, sums: ColumnSums): RowReader {
     const target = plan.vehicles.get(name);
     const on = dayOf(dateCell);
     const [who, what] = [textAt(cells, person), textAt(cells, task)];
-    const fault = plan.repeats.has(line) ? (['duplicate', hours + 1] as const)
-      : name === '' || target === 'overhead' ? (['missing-vehicle', nameCol] as const)
-      : typeof target !== 'object' ? (['ambiguous-vehicle', nameCol] as const)
-      : on === 'bad' ? (['bad-date', date + 1] as const)
-      : typeof seconds !== 'number' ? (['bad-hours', hours + 1] as const)
-      : Math.max(who?.length ?? 0, what?.length ?? 0) > LONGEST ? (['cell-too-long', task + 1] as const)
-      : null;
+    const fault = plan.repeats.has(line)
+      ? (['duplicate', hours + 1] as const)
+      : name === '' || target === 'overhead'
+        ? (['missing-vehicle', nameCol] as const)
+        : typeof target !== 'object'
+          ? (['ambiguous-vehicle', nameCol] as const)
+          : on === 'bad'
+            ? (['bad-date', date + 1] as const)
+            : typeof seconds !== 'number'
+              ? (['bad-hours', hours + 1] as const)
+              : Math.max(who?.length ?? 0, what?.length ?? 0) > LONGEST
+                ? (['cell-too-long', task + 1] as const)
+                : null;
     if (typeof seconds === 'number') sums.add(hours + 1, seconds, fault === null);
     if (fault || typeof target !== 'object' || typeof seconds !== 'number') {
       const [reason, col] = fault ?? (['bad-hours', hours + 1] as const);
@@ -41,8 +48,20 @@ export function hoursRowReader(plan: Plan, sums: ColumnSums): RowReader {
     }
     return taken([
       {
-        kind: 'hours', draft: target, category: null, on: on === 'blank' || on === 'bad' ? null : on, cents: 0, seconds,
-        vendor: null, what, foreseen: null, person: who, isExtra: false, isGuess: false, row: line, col: hours + 1,
+        kind: 'hours',
+        draft: target,
+        category: null,
+        on: on === 'blank' || on === 'bad' ? null : on,
+        cents: 0,
+        seconds,
+        vendor: null,
+        what,
+        foreseen: null,
+        person: who,
+        isExtra: false,
+        isGuess: false,
+        row: line,
+        col: hours + 1,
       },
     ]);
   };

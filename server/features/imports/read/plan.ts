@@ -52,11 +52,30 @@ export interface RowRead {
   readonly draft?: Draft;
 }
 
-export const notData = (reason: NotData): RowRead => ({ outcome: 'not data', reason, col: null, cents: null, lines: [], cells: [] });
-export const putAside = (reason: AsideReason, col: number | null, cents: number | null): RowRead => ({
-  outcome: 'put aside', reason, col, cents, lines: [], cells: [],
+export const notData = (reason: NotData): RowRead => ({
+  outcome: 'not data',
+  reason,
+  col: null,
+  cents: null,
+  lines: [],
+  cells: [],
 });
-export const taken = (lines: readonly DraftLine[]): RowRead => ({ outcome: 'taken', reason: null, col: null, cents: null, lines, cells: [] });
+export const putAside = (reason: AsideReason, col: number | null, cents: number | null): RowRead => ({
+  outcome: 'put aside',
+  reason,
+  col,
+  cents,
+  lines: [],
+  cells: [],
+});
+export const taken = (lines: readonly DraftLine[]): RowRead => ({
+  outcome: 'taken',
+  reason: null,
+  col: null,
+  cents: null,
+  lines,
+  cells: [],
+});
 
 /** Reads one row of the table; `sums` hears what each money column holds. */
 export type RowReader = (cells: readonly string[], line: number) => RowRead;

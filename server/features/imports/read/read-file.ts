@@ -10,21 +10,35 @@ const FIRST_ROWS = 200;
 const MOST_ASIDES = 5_000;
 
 /** Reads a file for people to look at: nothing is booked. A refusal is part of the reading, never thrown. */
-export function readFile(source: ByteSource, books: ShopBooks, settings: ImportSettings = {}, onPart?: (share: number) => void): Reading {
+export function readFile(
+  source: ByteSource,
+  books: ShopBooks,
+  settings: ImportSettings = {},
+  onPart?: (share: number) => void,
+): Reading {
   try {
     const understood = understand(source, books, settings);
-    return understood.plan === null ? refusedReading(understood) : previewOf(source, understood, understood.plan, onPart);
+    return understood.plan === null
+      ? refusedReading(understood)
+      : previewOf(source, understood, understood.plan, onPart);
   } catch (error) {
     if (!(error instanceof FileRefusal)) throw error;
     return refusedReading({
       format: { encoding: '', delimiter: '', decimal: '.', headingRow: null },
-      columns: [], choices: [], plan: null,
+      columns: [],
+      choices: [],
+      plan: null,
       refusal: { kind: error.kind, message: error.message, row: error.row },
     });
   }
 }
 
-function previewOf(source: ByteSource, understood: Understanding, plan: Plan, onPart?: (share: number) => void): Reading {
+function previewOf(
+  source: ByteSource,
+  understood: Understanding,
+  plan: Plan,
+  onPart?: (share: number) => void,
+): Reading {
   const firstRows: (Omit<FirstRow, 'lines'> & { lines: readonly DraftLine[] })[] = [];
   const asides: Aside[] = [];
   let asideCount = 0;
@@ -36,7 +50,13 @@ function previewOf(source: ByteSource, understood: Understanding, plan: Plan, on
       row(cells, line, result) {
         if (cells.length > plan.heading.cells.length && result.outcome === 'taken') ragged++;
         if (firstRows.length < FIRST_ROWS && result.reason !== 'blank') {
-          firstRows.push({ row: line, cells: cells.map((cell) => cell.slice(0, 500)), outcome: result.outcome, reason: result.reason, lines: result.lines });
+          firstRows.push({
+            row: line,
+            cells: cells.map((cell) => cell.slice(0, 500)),
+            outcome: result.outcome,
+            reason: result.reason,
+            lines: result.lines,
+          });
         }
         if (result.outcome === 'taken' && result.cells.length === 0) return;
         const made = asidesOf(cells, line, result);
@@ -48,11 +68,24 @@ function previewOf(source: ByteSource, understood: Understanding, plan: Plan, on
   );
   const { format, columns, choices } = understood;
   return {
-    format, columns: [...columns], choices: [...choices], shape: plan.shape, refusal: null,
+    format,
+    columns: [...columns],
+    choices: [...choices],
+    shape: plan.shape,
+    refusal: null,
     rebuilds: read.drafts.map((draft) => draft.found),
     firstRows: firstRows.map((row) => ({ ...row, lines: row.lines.map(lineOf) })),
-    asides, asideCount, notData: read.notData, statedTotals: [...read.statedTotals], control: read.control,
-    remarks: ragged === 0 ? [] : [`${ragged} rows have more cells than there are headings; what stands beyond the headings is kept with the rows and not booked.`],
+    asides,
+    asideCount,
+    notData: read.notData,
+    statedTotals: [...read.statedTotals],
+    control: read.control,
+    remarks:
+      ragged === 0
+        ? []
+        : [
+            `${ragged} rows have more cells than there are headings; what stands beyond the headings is kept with the rows and not booked.`,
+          ],
   };
 }
 
@@ -62,12 +95,32 @@ function lineOf({ draft, ...line }: DraftLine): Line {
 
 function refusedReading(understood: Understanding): Reading {
   return {
-    format: understood.format, columns: [...understood.columns], choices: [], shape: null, refusal: understood.refusal,
-    rebuilds: [], firstRows: [], asides: [], asideCount: 0,
-    notData: { blank: 0, title: 0, heading: 0, total: 0, note: 0 }, statedTotals: [],
+    format: understood.format,
+    columns: [...understood.columns],
+    choices: [],
+    shape: null,
+    refusal: understood.refusal,
+    rebuilds: [],
+    firstRows: [],
+    asides: [],
+    asideCount: 0,
+    notData: { blank: 0, title: 0, heading: 0, total: 0, note: 0 },
+    statedTotals: [],
     control: {
-      rowsRead: 0, taken: 0, putAside: 0, notData: 0, blankRows: 0, rebuilds: 0, entries: 0, centsByCategory: {}, costCents: 0,
-      creditCents: 0, saleCents: 0, estimateCents: 0, putAsideCents: 0, hoursSeconds: 0,
+      rowsRead: 0,
+      taken: 0,
+      putAside: 0,
+      notData: 0,
+      blankRows: 0,
+      rebuilds: 0,
+      entries: 0,
+      centsByCategory: {},
+      costCents: 0,
+      creditCents: 0,
+      saleCents: 0,
+      estimateCents: 0,
+      putAsideCents: 0,
+      hoursSeconds: 0,
     },
     remarks: [],
   };

@@ -63,15 +63,29 @@ function summedColumns(plan: Plan): SummedColumn[] {
   };
   return plan.columns.flatMap(({ col, meaning, why }): SummedColumn[] => {
     if (meaning === 'hours' || meaning === 'estimated hours') return [{ col, measure: 'hours', read: hours }];
-    const isCompared = ['amount', 'credit', 'purchase', 'cost', 'estimate', 'sale'].includes(meaning) || (meaning === 'derived' && why.includes('sum'));
+    const isCompared =
+      ['amount', 'credit', 'purchase', 'cost', 'estimate', 'sale'].includes(meaning) ||
+      (meaning === 'derived' && why.includes('sum'));
     return isCompared ? [{ col, measure: 'money', read: money }] : [];
   });
 }
 
 function newTally() {
   const control: Control = {
-    rowsRead: 0, taken: 0, putAside: 0, notData: 0, blankRows: 0, rebuilds: 0, entries: 0, centsByCategory: {},
-    costCents: 0, creditCents: 0, saleCents: 0, estimateCents: 0, putAsideCents: 0, hoursSeconds: 0,
+    rowsRead: 0,
+    taken: 0,
+    putAside: 0,
+    notData: 0,
+    blankRows: 0,
+    rebuilds: 0,
+    entries: 0,
+    centsByCategory: {},
+    costCents: 0,
+    creditCents: 0,
+    saleCents: 0,
+    estimateCents: 0,
+    putAsideCents: 0,
+    hoursSeconds: 0,
   };
   const notData: Record<NotData, number> = { blank: 0, title: 0, heading: 0, total: 0, note: 0 };
   return {
@@ -121,10 +135,12 @@ function addFact(found: RebuildFound, line: DraftLine): void {
   if (line.kind === 'purchase') {
     found.purchaseCents = sum(found.purchaseCents);
     found.boughtFrom ??= line.vendor === null || line.vendor.length > 120 ? null : line.vendor;
-    if (line.on !== null && (found.dates.boughtOn === undefined || line.on < found.dates.boughtOn)) found.dates.boughtOn = line.on;
+    if (line.on !== null && (found.dates.boughtOn === undefined || line.on < found.dates.boughtOn))
+      found.dates.boughtOn = line.on;
   } else if (line.kind === 'sale') {
     found.saleCents = sum(found.saleCents);
-    if (line.on !== null && (found.dates.soldOn === undefined || line.on > found.dates.soldOn)) found.dates.soldOn = line.on;
+    if (line.on !== null && (found.dates.soldOn === undefined || line.on > found.dates.soldOn))
+      found.dates.soldOn = line.on;
   } else if (line.kind === 'asking') found.askingCents = line.cents;
   else if (line.kind === 'expected sale') found.expectedSaleCents = line.cents;
 }
@@ -135,5 +151,8 @@ export function asidesOf(cells: readonly string[], line: number, read: RowRead):
   if (read.outcome !== 'put aside') return asides;
   const { col, reason, cents } = read;
   const text = col === null ? cells.join(' · ') : (cells[col - 1] ?? '');
-  return [...asides, { row: line, col, isCell: false, reason: reason as Aside['reason'], text: text.slice(0, 200), cents }];
+  return [
+    ...asides,
+    { row: line, col, isCell: false, reason: reason as Aside['reason'], text: text.slice(0, 200), cents },
+  ];
 }

@@ -6,7 +6,9 @@ import { notData, type Plan, putAside, type RowRead } from './plan.ts';
  * What any sheet may hold beside its data: blank rows, titles above the headings, headings again, broken rows. null =
  * a row of the table, to be read by its shape.
  */
-export function rowOutsideTable(plan: Plan): (cells: readonly string[], line: number, isMalformed: boolean) => RowRead | null {
+export function rowOutsideTable(
+  plan: Plan,
+): (cells: readonly string[], line: number, isMalformed: boolean) => RowRead | null {
   const { line: headingLine, cells: heading } = plan.heading;
   const isAgain = isHeadingAgain(heading);
   return (cells, line, isMalformed) => {
@@ -25,7 +27,8 @@ export function rowOutsideTable(plan: Plan): (cells: readonly string[], line: nu
 export function isHeadingAgain(heading: readonly string[]): (cells: readonly string[]) => boolean {
   const first = heading.findIndex((cell) => cell.trim() !== '');
   const firstHeading = heading[first]?.trim() ?? '';
-  return (cells) => cells[first]?.trim() === firstHeading && heading.every((cell, i) => (cells[i] ?? '').trim() === cell.trim());
+  return (cells) =>
+    cells[first]?.trim() === firstHeading && heading.every((cell, i) => (cells[i] ?? '').trim() === cell.trim());
 }
 
 export function isBlank(cells: readonly string[]): boolean {

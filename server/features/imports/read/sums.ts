@@ -22,7 +22,9 @@ const GRAND = /grand|overall|gesamtsumme/i;
  * with the rows since the total before it, or with the whole file so far, whichever it means.
  */
 export function columnSums(columns: readonly SummedColumn[]) {
-  const sums = new Map<number, Sum>(columns.map(({ col }) => [col, { taken: 0, aside: 0, takenSince: 0, asideSince: 0 }]));
+  const sums = new Map<number, Sum>(
+    columns.map(({ col }) => [col, { taken: 0, aside: 0, takenSince: 0, asideSince: 0 }]),
+  );
   const stated: StatedTotal[] = [];
 
   /** What a row holds in a column, and whether that came in. */
@@ -50,7 +52,16 @@ export function columnSums(columns: readonly SummedColumn[]) {
       const imported = isWhole ? sum.taken : sum.takenSince;
       const putAside = isWhole ? sum.aside : sum.asideSince;
       if (stated.length < MOST_KEPT) {
-        stated.push({ row, col, label: label.trim(), measure, stated: value, imported, putAside, explanation: explain(value, imported, putAside) });
+        stated.push({
+          row,
+          col,
+          label: label.trim(),
+          measure,
+          stated: value,
+          imported,
+          putAside,
+          explanation: explain(value, imported, putAside),
+        });
       }
     }
     for (const sum of sums.values()) sum.takenSince = sum.asideSince = 0;

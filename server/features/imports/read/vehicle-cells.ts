@@ -25,12 +25,20 @@ const LONGEST: Partial<Record<keyof RebuildFound, number>> = { notes: 4000, boug
 const FIGURES = new Set<Meaning>(['purchase', 'cost', 'estimate', 'sale', 'asking', 'expected sale']);
 const MAY_BE_CREDIT = new Set<Meaning>(['cost']);
 const TEXTS: Partial<Record<Meaning, keyof RebuildFound>> = {
-  make: 'make', model: 'model', trim: 'trim', vin: 'vin', 'title brand': 'titleBrand', 'bought from': 'boughtFrom', notes: 'notes',
+  make: 'make',
+  model: 'model',
+  trim: 'trim',
+  vin: 'vin',
+  'title brand': 'titleBrand',
+  'bought from': 'boughtFrom',
+  notes: 'notes',
 };
 
 /** Reads the cells of a vehicle's row, each by what its column holds. A cell that cannot be read is put aside alone. */
 export function vehicleCellReader(plan: Plan): (cells: readonly string[]) => VehicleCells {
-  const takers = plan.columns.map((column) => ({ column, take: takerOf(plan, column) })).filter(({ take }) => take !== null);
+  const takers = plan.columns
+    .map((column) => ({ column, take: takerOf(plan, column) }))
+    .filter(({ take }) => take !== null);
   return (cells) => {
     const row: VehicleCells = { known: {}, dates: {}, figures: [], asides: [] };
     for (const { column, take } of takers) {
@@ -73,14 +81,17 @@ function moneyTaker(plan: Plan, column: Column): Take {
 }
 
 function hoursTaker(column: Column): Take {
-  return (cell, row) => take(readHours(cell), (seconds) => row.figures.push({ column, cents: 0, seconds }), 'bad-hours');
+  return (cell, row) =>
+    take(readHours(cell), (seconds) => row.figures.push({ column, cents: 0, seconds }), 'bad-hours');
 }
 
 function textTaker(field: keyof RebuildFound): Take {
   return (cell, row) => {
     if (cell.length > (LONGEST[field] ?? 60)) return 'cell-too-long';
     const before = row.known[field];
-    Object.assign(row.known, { [field]: field === 'notes' && before ? `${String(before)}\n${cell}` : cell.normalize('NFC') });
+    Object.assign(row.known, {
+      [field]: field === 'notes' && before ? `${String(before)}\n${cell}` : cell.normalize('NFC'),
+    });
     return null;
   };
 }

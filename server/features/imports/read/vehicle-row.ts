@@ -34,7 +34,12 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
     if (name === '' && row.figures.length === 0) return notData('note');
     const existing = name === '' ? null : findExisting(name, row);
     const key = hasStock ? fold(name) : null;
-    const reason = name === '' ? 'missing-vehicle' : plan.repeats.has(line) || (key !== null && seen.has(key)) || isBooked(existing) ? 'duplicate' : null;
+    const reason =
+      name === ''
+        ? 'missing-vehicle'
+        : plan.repeats.has(line) || (key !== null && seen.has(key)) || isBooked(existing)
+          ? 'duplicate'
+          : null;
     if (reason) {
       addAll(row, false);
       return putAside(reason, placeOf(plan.columns, 'stock number') + 1 || null, costOf(row));
@@ -42,7 +47,11 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
     if (key !== null) seen.add(key);
     const sold = settleSale(row, plan.columns);
     addAll(row, true);
-    const draft = newDraft(existing ? existing.tag : tagFor(name), existing, line, { ...sold.known, dates: sold.dates, spellings: [name] });
+    const draft = newDraft(existing ? existing.tag : tagFor(name), existing, line, {
+      ...sold.known,
+      dates: sold.dates,
+      spellings: [name],
+    });
     return { ...taken(sold.figures.map((figure) => lineOf(figure, draft, row, line))), cells: sold.asides, draft };
   };
 }
@@ -50,14 +59,23 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
 const isBooked = (existing: ExistingRebuild | null) =>
   existing !== null && (existing.hasEntries || existing.hasPurchase || existing.hasLeft || existing.hasBaseline);
 const costOf = (row: VehicleCells) =>
-  row.figures.reduce((sum, { column, cents }) => (column.meaning === 'cost' || column.meaning === 'purchase' ? sum + cents : sum), 0);
+  row.figures.reduce(
+    (sum, { column, cents }) => (column.meaning === 'cost' || column.meaning === 'purchase' ? sum + cents : sum),
+    0,
+  );
 
 function vehicleName(columns: readonly Column[]): (cells: readonly string[]) => string {
   const single = [placeOf(columns, 'stock number'), placeOf(columns, 'vehicle')].find((place) => place >= 0);
   if (single !== undefined) return (cells) => (cells[single] ?? '').trim();
   const model = placeOf(columns, 'model');
   const parts = [placeOf(columns, 'year'), placeOf(columns, 'make'), model].filter((place) => place >= 0);
-  return (cells) => ((cells[model] ?? '').trim() === '' ? '' : parts.map((place) => (cells[place] ?? '').trim()).join(' ').trim());
+  return (cells) =>
+    (cells[model] ?? '').trim() === ''
+      ? ''
+      : parts
+          .map((place) => (cells[place] ?? '').trim())
+          .join(' ')
+          .trim();
 }
 
 /** The shop's own rebuild by tag; without stock numbers also the only one of the same year and model. */
@@ -79,13 +97,34 @@ function settleSale(row: VehicleCells, columns: readonly Column[]): VehicleCells
   return { ...row, dates, asides: [...row.asides, { col, reason: 'missing-amount', text: soldOn, cents: null }] };
 }
 
-const KINDS = { purchase: 'purchase', cost: 'entry', estimate: 'estimate', sale: 'sale', hours: 'hours', 'estimated hours': 'estimated hours', asking: 'asking', 'expected sale': 'expected sale' } as const;
+const KINDS = {
+  purchase: 'purchase',
+  cost: 'entry',
+  estimate: 'estimate',
+  sale: 'sale',
+  hours: 'hours',
+  'estimated hours': 'estimated hours',
+  asking: 'asking',
+  'expected sale': 'expected sale',
+} as const;
 
 function lineOf({ column, cents, seconds }: Figure, draft: Draft, row: VehicleCells, line: number): DraftLine {
   const kind = KINDS[column.meaning as keyof typeof KINDS];
   const on = kind === 'purchase' ? row.dates.boughtOn : kind === 'sale' ? row.dates.soldOn : undefined;
   return {
-    kind, draft, category: column.category, on: on ?? null, cents, seconds, vendor: null, what: column.heading || null,
-    foreseen: null, person: null, isExtra: false, isGuess: false, row: line, col: column.col,
+    kind,
+    draft,
+    category: column.category,
+    on: on ?? null,
+    cents,
+    seconds,
+    vendor: null,
+    what: column.heading || null,
+    foreseen: null,
+    person: null,
+    isExtra: false,
+    isGuess: false,
+    row: line,
+    col: column.col,
   };
 }

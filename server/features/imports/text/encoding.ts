@@ -5,7 +5,10 @@ import type { ByteSource } from './bytes.ts';
 export type Encoding = 'utf-8' | 'utf-16le' | 'utf-16be' | 'windows-1252';
 
 const SIGNATURES: readonly (readonly [string, string])[] = [
-  ['504b0304', 'This is a workbook or a zip archive. Save the sheet as CSV in your spreadsheet program and bring that in.'],
+  [
+    '504b0304',
+    'This is a workbook or a zip archive. Save the sheet as CSV in your spreadsheet program and bring that in.',
+  ],
   ['d0cf11e0', 'This is an old or password-protected workbook. Save the sheet as CSV and bring that in.'],
   ['25504446', 'This is a PDF. Only spreadsheets saved as CSV or text can be read.'],
   ['89504e47', 'This is a picture, whatever its name says. Only spreadsheets saved as CSV or text can be read.'],

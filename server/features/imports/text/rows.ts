@@ -34,7 +34,12 @@ export function findFormat(source: ByteSource): TextFormat {
 }
 
 /** Gives every record of the file in order. `onPart` hears the share of the file gone through, 0–1. */
-export function forEachRow(source: ByteSource, format: TextFormat, onRow: OnRow, onPart?: (share: number) => void): void {
+export function forEachRow(
+  source: ByteSource,
+  format: TextFormat,
+  onRow: OnRow,
+  onPart?: (share: number) => void,
+): void {
   const parser = new Papa.Parser({ delimiter: format.delimiter, newline: '\n', quoteChar: '"' });
   let rest = '';
   let line = 1;
@@ -48,7 +53,8 @@ export function forEachRow(source: ByteSource, format: TextFormat, onRow: OnRow,
       const cells = data[i] as string[];
       const start = line;
       line += isPlain ? 1 : 1 + lineBreaks(cells);
-      if (cells.length > MOST_CELLS) throw new FileRefusal('too-wide', `Line ${start} has ${cells.length} cells; ${MOST_CELLS} is the most.`, start);
+      if (cells.length > MOST_CELLS)
+        throw new FileRefusal('too-wide', `Line ${start} has ${cells.length} cells; ${MOST_CELLS} is the most.`, start);
       if (isLast && i === data.length - 1 && cells.length === 1 && cells[0] === '') continue;
       if (start === 1 && format.hasNamedDelimiter) continue;
       unguard(cells);
@@ -81,12 +87,20 @@ function refuseBroken(errors: Parsed['errors'], data: string[][], line: number):
   const open = errors.find((error) => error.code === 'MissingQuotes');
   if (!open) return;
   const row = line + data.slice(0, open.row).reduce((sum, cells) => sum + 1 + lineBreaks(cells), 0);
-  throw new FileRefusal('unclosed-quote', `A quotation mark opened on line ${row} is never closed. Close it and bring the file in again.`, row);
+  throw new FileRefusal(
+    'unclosed-quote',
+    `A quotation mark opened on line ${row} is never closed. Close it and bring the file in again.`,
+    row,
+  );
 }
 
 function refuseLong(rest: string, line: number): never {
   if (rest.includes('"')) {
-    throw new FileRefusal('unclosed-quote', `A quotation mark opened on line ${line} is not closed within a million characters.`, line);
+    throw new FileRefusal(
+      'unclosed-quote',
+      `A quotation mark opened on line ${line} is not closed within a million characters.`,
+      line,
+    );
   }
   throw new FileRefusal('cell-too-long', `Line ${line} is longer than a million characters.`, line);
 }

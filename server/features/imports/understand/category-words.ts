@@ -23,13 +23,21 @@ export function categoryWords(
     const id = `category:${fold(word)}`;
     const answer = answers.get(id);
     const preset = found?.category ?? other;
-    of.set(word, answer !== undefined && allowed.has(answer) ? { category: answer, isSure: true } : { category: preset, isSure: found?.isSure ?? false });
+    of.set(
+      word,
+      answer !== undefined && allowed.has(answer)
+        ? { category: answer, isSure: true }
+        : { category: preset, isSure: found?.isSure ?? false },
+    );
     if (found?.isSure || choices.has(id) || choices.size >= MOST_ASKED) continue;
     choices.set(id, {
       id,
       kind: 'category',
       column: null,
-      question: word === '' ? `${count} rows name no kind of cost. Where do they belong?` : `What does “${word}” mean? It stands on ${count === 1 ? 'one row' : `${count} rows`}.`,
+      question:
+        word === ''
+          ? `${count} rows name no kind of cost. Where do they belong?`
+          : `What does “${word}” mean? It stands on ${count === 1 ? 'one row' : `${count} rows`}.`,
       options: [
         ...shopCategories.map((name) => ({ value: name, label: name })),
         { value: PURCHASE, label: 'the purchase' },

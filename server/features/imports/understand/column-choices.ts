@@ -15,7 +15,9 @@ export function askOfColumns(
   books: ShopBooks,
 ): { columns: Column[]; choices: Choice[] } {
   if (shape === 'hours') return { columns: [...columns], choices: [] };
-  const hasSum = shape === 'vehicles' && columns.some((column) => column.meaning === 'derived' && column.why.includes('sum of the costs'));
+  const hasSum =
+    shape === 'vehicles' &&
+    columns.some((column) => column.meaning === 'derived' && column.why.includes('sum of the costs'));
   const choices: Choice[] = [];
   const settled = columns.map((column) => {
     if (hasSum || !isUnexplained(column, shape)) return column;
@@ -35,7 +37,12 @@ function isUnexplained(column: Column, shape: Shape): boolean {
   if (plannedPart(column.heading) !== null || !column.samples.every((cell) => looksLikeMoney(cell))) return false;
   const looksPaid = column.samples.some((cell) => /[.,]\d\d\b|[$€£]/.test(cell));
   const isDate = headingMeanings(column.heading).some((meaning) => meaning.endsWith('On'));
-  return looksPaid && !isDate && headingWords(column.heading) !== '' && (shape === 'vehicles' || headingMeanings(column.heading).includes('amount'));
+  return (
+    looksPaid &&
+    !isDate &&
+    headingWords(column.heading) !== '' &&
+    (shape === 'vehicles' || headingMeanings(column.heading).includes('amount'))
+  );
 }
 
 function choiceOf(column: Column, shape: Shape, id: string, answer: string | null): Choice {

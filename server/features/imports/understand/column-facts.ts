@@ -24,7 +24,9 @@ const MODEL_YEAR = /^(19[5-9]\d|20\d\d)$/;
 export function columnFacts(head: Head): ColumnFacts[] {
   const headings = head.heading?.cells ?? [];
   return headings.map((heading, index) => {
-    const cells = head.below.map((row) => (row.cells[index] ?? '').trim()).filter((cell) => cell !== '' && cell !== heading.trim());
+    const cells = head.below
+      .map((row) => (row.cells[index] ?? '').trim())
+      .filter((cell) => cell !== '' && cell !== heading.trim());
     const share = (test: (cell: string) => boolean) => (cells.length ? cells.filter(test).length / cells.length : 0);
     return {
       col: index + 1,

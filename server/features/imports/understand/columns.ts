@@ -9,12 +9,45 @@ type CategoryReader = (text: string) => CategoryMeaning | null;
 const DATES = new Set<Meaning>(['date', ...REBUILD_DATES.map(([field]) => field)]);
 const MONEY = new Set<Meaning>(['amount', 'credit', 'purchase', 'sale', 'asking', 'expected sale', 'derived']);
 const HOURS = new Set<Meaning>(['hours', 'estimated hours']);
-const NUMBERS = new Set<Meaning>(['year', 'odometer', 'stock number', 'vin', 'notes', 'vehicle', 'model', 'trim', 'derived']);
+const NUMBERS = new Set<Meaning>([
+  'year',
+  'odometer',
+  'stock number',
+  'vin',
+  'notes',
+  'vehicle',
+  'model',
+  'trim',
+  'derived',
+]);
 const OF_EXPENSES: readonly Meaning[] = [
-  'date', 'vehicle', 'stock number', 'year', 'make', 'model', 'category', 'what', 'vendor', 'foreseen', 'credit', 'amount', 'notes', 'derived',
+  'date',
+  'vehicle',
+  'stock number',
+  'year',
+  'make',
+  'model',
+  'category',
+  'what',
+  'vendor',
+  'foreseen',
+  'credit',
+  'amount',
+  'notes',
+  'derived',
 ];
 const OF_HOURS: readonly Meaning[] = ['date', 'vehicle', 'stock number', 'person', 'hours', 'task', 'notes'];
-const NOT_OF_VEHICLES = new Set<Meaning>(['date', 'category', 'what', 'vendor', 'foreseen', 'amount', 'credit', 'person', 'task']);
+const NOT_OF_VEHICLES = new Set<Meaning>([
+  'date',
+  'category',
+  'what',
+  'vendor',
+  'foreseen',
+  'amount',
+  'credit',
+  'person',
+  'task',
+]);
 const REPEATABLE = new Set<Meaning>(['ignore', 'derived', 'notes']);
 
 /** Do the cells of a column suit what its heading says? */
@@ -41,12 +74,16 @@ const ignored = (why: string): Guess => ({ meaning: 'ignore', category: null, wh
 
 function guessByHeading(facts: ColumnFacts, used: Set<Meaning>, shape: Shape): Guess {
   const allowed = shape === 'expenses' ? OF_EXPENSES : shape === 'hours' ? OF_HOURS : null;
-  const known = headingMeanings(facts.heading).filter((meaning) => (allowed ? allowed.includes(meaning) : !NOT_OF_VEHICLES.has(meaning)));
+  const known = headingMeanings(facts.heading).filter((meaning) =>
+    allowed ? allowed.includes(meaning) : !NOT_OF_VEHICLES.has(meaning),
+  );
   const ordered = allowed ? allowed.filter((meaning) => known.includes(meaning)) : known;
   const meaning = ordered.find((candidate) => !used.has(candidate) && fits(candidate, facts));
   if (meaning) return { meaning, category: null, why: `The heading says so, and the cells below suit it.` };
   if (facts.filled === 0) return ignored('The column is empty.');
-  return ignored(known.length > 0 ? 'The cells do not suit the heading, or another column holds this.' : 'The heading is not known.');
+  return ignored(
+    known.length > 0 ? 'The cells do not suit the heading, or another column holds this.' : 'The heading is not known.',
+  );
 }
 
 function guessOfVehicles(facts: ColumnFacts, used: Set<Meaning>, categoryOf: CategoryReader): Guess {
@@ -62,7 +99,11 @@ function guessOfVehicles(facts: ColumnFacts, used: Set<Meaning>, categoryOf: Cat
     return { meaning: 'purchase', category: null, why: 'The heading names the purchase, and the cells hold money.' };
   }
   if (!category || category.category === PURCHASE || category.category === SALE) return byHeading;
-  return { meaning: 'cost', category: category.category, why: 'The heading names a kind of cost, and the cells hold money.' };
+  return {
+    meaning: 'cost',
+    category: category.category,
+    why: 'The heading names a kind of cost, and the cells hold money.',
+  };
 }
 
 function plannedGuess(facts: ColumnFacts, planned: string, categoryOf: CategoryReader): Guess | null {

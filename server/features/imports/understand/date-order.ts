@@ -8,7 +8,7 @@ const ENOUGH = 5;
 export function settledOrder(evidence: DateEvidence): DateOrder | null {
   const { firstOver12, secondOver12, unsettled, monthFirstBack, dayFirstBack } = evidence;
   if (firstOver12 !== secondOver12) return firstOver12 > secondOver12 ? 'DMY' : 'MDY';
-  if (unsettled < ENOUGH || (monthFirstBack > 0) === (dayFirstBack > 0)) return null;
+  if (unsettled < ENOUGH || monthFirstBack > 0 === dayFirstBack > 0) return null;
   return monthFirstBack === 0 ? 'MDY' : 'DMY';
 }
 

@@ -19,7 +19,9 @@ export function markDerived(columns: readonly Column[], head: Head, money: Retur
   const sums = head.below.map(({ cells }) => costs.reduce((sum, column) => sum + cents(cells, column.col), 0));
   const sales = head.below.map(({ cells }) => (sale ? cents(cells, sale.col) : 0));
   const agrees = (column: Column, expected: (i: number) => number) => {
-    const filled = head.below.map((row, i) => ({ value: money(row.cells[column.col - 1] ?? '', true), i })).filter(({ value }) => typeof value === 'number');
+    const filled = head.below
+      .map((row, i) => ({ value: money(row.cells[column.col - 1] ?? '', true), i }))
+      .filter(({ value }) => typeof value === 'number');
     const right = filled.filter(({ value, i }) => Math.abs((value as number) - expected(i)) <= 1).length;
     return filled.length >= ENOUGH_ROWS && right >= filled.length * MOST;
   };
@@ -27,7 +29,12 @@ export function markDerived(columns: readonly Column[], head: Head, money: Retur
     if (column.meaning !== 'ignore' && column.meaning !== 'derived') return column;
     const isSum = agrees(column, (i) => sums[i] ?? 0);
     if (!isSum && !agrees(column, (i) => (sales[i] ?? 0) - (sums[i] ?? 0))) return column;
-    return { ...column, meaning: 'derived', category: null, why: isSum ? SUM_OF_COSTS : 'It equals the sale less the costs of its row.' };
+    return {
+      ...column,
+      meaning: 'derived',
+      category: null,
+      why: isSum ? SUM_OF_COSTS : 'It equals the sale less the costs of its row.',
+    };
   });
 }
 

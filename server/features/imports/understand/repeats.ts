@@ -41,6 +41,7 @@ export function repeatedRows(hashes: readonly number[]): Set<number> {
 /** How many rows from `at` on repeat those from `earlier` on; 0 when they are all alike. */
 function blockLength(hashes: readonly number[], earlier: number, at: number): number {
   let length = 0;
-  while (at + length < hashes.length && earlier + length < at && hashes[earlier + length] === hashes[at + length]) length++;
+  while (at + length < hashes.length && earlier + length < at && hashes[earlier + length] === hashes[at + length])
+    length++;
   return new Set(hashes.slice(at, at + length)).size >= SHORTEST_BLOCK ? length : 0;
 }

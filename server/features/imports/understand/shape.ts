@@ -6,16 +6,32 @@ import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from '
 import type { Head } from './head.ts';
 
 /** What one row stands for, or why the sheet cannot be read. */
-export type ShapeGuess = { readonly shape: Shape } | { readonly shape: null; readonly why: string; readonly row: number | null };
+export type ShapeGuess =
+  | { readonly shape: Shape }
+  | { readonly shape: null; readonly why: string; readonly row: number | null };
 
 /** Guesses from the headings, and from how often the same vehicle comes back, what one row of the sheet stands for. */
-export function guessShape(head: Head, all: readonly ColumnFacts[], categoryOf: (text: string) => CategoryMeaning | null): ShapeGuess {
+export function guessShape(
+  head: Head,
+  all: readonly ColumnFacts[],
+  categoryOf: (text: string) => CategoryMeaning | null,
+): ShapeGuess {
   if (!head.heading) {
-    return { shape: null, row: null, why: 'No row reads like headings. Put a row of headings (date, car, what, amount) above the list and bring it in again.' };
+    return {
+      shape: null,
+      row: null,
+      why: 'No row reads like headings. Put a row of headings (date, car, what, amount) above the list and bring it in again.',
+    };
   }
-  const paid = head.above.find((row) => row.cells.filter(looksLikeMoney).length > 0 && row.cells.filter((cell) => cell.trim()).length > 1);
+  const paid = head.above.find(
+    (row) => row.cells.filter(looksLikeMoney).length > 0 && row.cells.filter((cell) => cell.trim()).length > 1,
+  );
   if (paid) {
-    return { shape: null, row: paid.line, why: 'There are figures above the headings: this looks like one sheet about one car, in sections. Such sheets cannot be read yet; list its costs one per row with the car beside each.' };
+    return {
+      shape: null,
+      row: paid.line,
+      why: 'There are figures above the headings: this looks like one sheet about one car, in sections. Such sheets cannot be read yet; list its costs one per row with the car beside each.',
+    };
   }
   const means = (meaning: Meaning, holds: (facts: ColumnFacts) => boolean) =>
     all.find((facts) => holds(facts) && headingMeanings(facts.heading).includes(meaning));

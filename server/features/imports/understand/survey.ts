@@ -33,13 +33,30 @@ export interface DateEvidence {
   dayFirstBack: number;
 }
 
-const MONEY = new Set<Column['meaning']>(['amount', 'credit', 'purchase', 'cost', 'estimate', 'sale', 'asking', 'expected sale', 'derived']);
+const MONEY = new Set<Column['meaning']>([
+  'amount',
+  'credit',
+  'purchase',
+  'cost',
+  'estimate',
+  'sale',
+  'asking',
+  'expected sale',
+  'derived',
+]);
 const DATES = new Set<Column['meaning']>(['date', ...REBUILD_DATES.map(([field]) => field)]);
 
 /** Goes through the whole file once. */
-export function survey(source: ByteSource, format: TextFormat, columns: readonly Column[], heading: Plan['heading']): Survey {
+export function survey(
+  source: ByteSource,
+  format: TextFormat,
+  columns: readonly Column[],
+  heading: Plan['heading'],
+): Survey {
   const money = columns.filter((column) => MONEY.has(column.meaning)).map((column) => column.col - 1);
-  const days = columns.filter((column) => DATES.has(column.meaning)).map((column) => ({ at: column.col - 1, see: dateWatcher() }));
+  const days = columns
+    .filter((column) => DATES.has(column.meaning))
+    .map((column) => ({ at: column.col - 1, see: dateWatcher() }));
   const nameOf = vehicleText(columns);
   const isAgain = isHeadingAgain(heading.cells);
   const category = columns.find((column) => column.meaning === 'category');
@@ -67,7 +84,14 @@ export function survey(source: ByteSource, format: TextFormat, columns: readonly
     }
   });
   const repeats = new Set([...repeatedRows(hashes)].map((place) => lines[place] as number));
-  return { decimalVotes, currencies, vehicles, categories, repeats, dates: new Map(days.map(({ at, see }) => [at + 1, see.evidence])) };
+  return {
+    decimalVotes,
+    currencies,
+    vehicles,
+    categories,
+    repeats,
+    dates: new Map(days.map(({ at, see }) => [at + 1, see.evidence])),
+  };
 }
 
 function count(counts: Map<string, number>, key: string): void {

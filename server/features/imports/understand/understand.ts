@@ -46,15 +46,34 @@ export function understand(source: ByteSource, books: ShopBooks, settings: Impor
   const heading = { line: head.heading.line, cells: head.heading.cells };
   const found = survey(source, format, asked.columns, heading);
   refuseForeign(found, books.currency);
-  const plan = makePlan({ format, shape: guess.shape, columns: asked.columns, heading, books, found, answers, choices: asked.choices });
-  return { ...base, format: { ...base.format, decimal: plan.decimal }, columns: plan.columns, choices: plan.choices, plan, refusal: null };
+  const plan = makePlan({
+    format,
+    shape: guess.shape,
+    columns: asked.columns,
+    heading,
+    books,
+    found,
+    answers,
+    choices: asked.choices,
+  });
+  return {
+    ...base,
+    format: { ...base.format, decimal: plan.decimal },
+    columns: plan.columns,
+    choices: plan.choices,
+    plan,
+    refusal: null,
+  };
 }
 
 function guessAll(head: Head, books: ShopBooks, settings: ImportSettings, decimal: DecimalMark) {
   const facts = columnFacts(head);
   const categoryOf = categoryReader(books.categories);
   const guessed = guessShape(head, facts, categoryOf);
-  const columns = guessed.shape === null ? guessColumns(facts, 'expenses', categoryOf) : guessColumns(facts, guessed.shape, categoryOf);
+  const columns =
+    guessed.shape === null
+      ? guessColumns(facts, 'expenses', categoryOf)
+      : guessColumns(facts, guessed.shape, categoryOf);
   const money = moneyReader(decimal);
   const derived = guessed.shape === 'vehicles' ? markDerived(columns, head, money) : columns;
   if (!settings.columns) return { columns: derived, why: '', row: null, ...guessed };
@@ -65,7 +84,14 @@ function guessAll(head: Head, books: ShopBooks, settings: ImportSettings, decima
     return isSame ? column : { ...column, ...change, why: 'You said so.' };
   });
   const shape = shapeOf(own);
-  return shape ? { columns: own, shape, why: '', row: null } : { columns: own, shape: null, why: 'A column must name the vehicle, and another hold amounts or hours.', row: head.heading?.line ?? null };
+  return shape
+    ? { columns: own, shape, why: '', row: null }
+    : {
+        columns: own,
+        shape: null,
+        why: 'A column must name the vehicle, and another hold amounts or hours.',
+        row: head.heading?.line ?? null,
+      };
 }
 
 /** The shape that columns set by hand make. */
@@ -89,7 +115,10 @@ function refuseForeign(found: Survey, currency: string): void {
     else if (cells > other[1]) other = [name, cells];
   }
   if (other[1] > own) {
-    throw new FileRefusal('currency', `The amounts in this file are in ${other[0]}, and the shop keeps its books in ${currency}.`);
+    throw new FileRefusal(
+      'currency',
+      `The amounts in this file are in ${other[0]}, and the shop keeps its books in ${currency}.`,
+    );
   }
 }
 
@@ -105,14 +134,23 @@ interface Settled {
 }
 
 function makePlan({ format, shape, columns, heading, books, found, answers, choices }: Settled): Plan {
-  const decimal: DecimalMark = found.decimalVotes === 0 ? usualDecimal(books.locale) : found.decimalVotes > 0 ? '.' : ',';
+  const decimal: DecimalMark =
+    found.decimalVotes === 0 ? usualDecimal(books.locale) : found.decimalVotes > 0 ? '.' : ',';
   const dates = dateOrders(columns, found.dates, books.locale, answers);
   const isList = shape !== 'vehicles';
   const vehicles = isList ? vehicleDrafts(found.vehicles, books, answers) : { of: new Map(), choices: [] };
-  const words = shape === 'expenses' ? categoryWords(found.categories.size ? found.categories : new Map([['', 1]]), books.categories, answers) : { of: new Map(), choices: [] };
+  const words =
+    shape === 'expenses'
+      ? categoryWords(found.categories.size ? found.categories : new Map([['', 1]]), books.categories, answers)
+      : { of: new Map(), choices: [] };
   const repeat = repeatChoice(found.repeats.size, answers);
   return {
-    format, decimal, shape, columns, heading, books,
+    format,
+    decimal,
+    shape,
+    columns,
+    heading,
+    books,
     choices: [...choices, ...dates.choices, ...vehicles.choices, ...words.choices, ...(repeat ? [repeat] : [])],
     money: moneyReader(decimal),
     days: new Map([...dates.orders].map(([col, order]) => [col, remembered(dayReader(order, books.today))])),

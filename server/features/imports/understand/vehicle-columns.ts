@@ -12,6 +12,12 @@ export function placeOf(columns: readonly Column[], meaning: Meaning): number {
 export function vehicleText(columns: readonly Column[]): (cells: readonly string[]) => string {
   const single = [placeOf(columns, 'vehicle'), placeOf(columns, 'stock number')].find((place) => place >= 0);
   if (single !== undefined) return (cells) => (cells[single] ?? '').trim();
-  const places = (['year', 'make', 'model'] as const).map((meaning) => placeOf(columns, meaning)).filter((place) => place >= 0);
-  return (cells) => places.map((place) => (cells[place] ?? '').trim()).join(' ').trim();
+  const places = (['year', 'make', 'model'] as const)
+    .map((meaning) => placeOf(columns, meaning))
+    .filter((place) => place >= 0);
+  return (cells) =>
+    places
+      .map((place) => (cells[place] ?? '').trim())
+      .join(' ')
+      .trim();
 }

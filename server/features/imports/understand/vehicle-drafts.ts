@@ -20,7 +20,8 @@ export function existingFinder(rebuilds: readonly ExistingRebuild[]) {
   }
   return {
     byTag: (tag: string) => byTag.get(fold(tag)) ?? null,
-    byModel: (year: number | null, model: string | null) => (year === null || !model ? [] : (byModel.get(`${year}|${modelKey(model)}`) ?? [])),
+    byModel: (year: number | null, model: string | null) =>
+      year === null || !model ? [] : (byModel.get(`${year}|${modelKey(model)}`) ?? []),
   };
 }
 
@@ -43,18 +44,26 @@ export function vehicleDrafts(
     if (choice && !sameTag) choices.push(choice);
     const { year, make, model, spellings } = group;
     const known = { year, make, model: year === null && make === null ? null : model, spellings };
-    drafts.set(group, existing === 'ambiguous' ? existing : newDraft(existing ? existing.tag : tagFor(group.name), existing, 0, known));
+    drafts.set(
+      group,
+      existing === 'ambiguous' ? existing : newDraft(existing ? existing.tag : tagFor(group.name), existing, 0, known),
+    );
   }
   const of = new Map<string, VehicleTarget>();
   for (const spelling of counts.keys()) {
     const target = grouped.of.get(spelling);
-    of.set(spelling, target === undefined ? 'overhead' : typeof target === 'string' ? target : (drafts.get(target) ?? 'ambiguous'));
+    of.set(
+      spelling,
+      target === undefined ? 'overhead' : typeof target === 'string' ? target : (drafts.get(target) ?? 'ambiguous'),
+    );
   }
   return { of, choices };
 }
 
 function prefixed(answers: ReadonlyMap<string, string>, prefix: string): Map<string, string> {
-  return new Map([...answers].filter(([id]) => id.startsWith(prefix)).map(([id, value]) => [id.slice(prefix.length), value]));
+  return new Map(
+    [...answers].filter(([id]) => id.startsWith(prefix)).map(([id, value]) => [id.slice(prefix.length), value]),
+  );
 }
 
 function spellingChoice(doubt: VehicleDoubt, answers: ReadonlyMap<string, string>): Choice {
@@ -87,7 +96,10 @@ function chooseExisting(group: VehicleGroup, fits: readonly ExistingRebuild[], a
     kind: 'vehicle',
     column: null,
     question: `Is “${group.name}” a rebuild that you have already?`,
-    options: [...fits.map((rebuild) => ({ value: rebuild.id, label: rebuild.tag })), { value: 'new', label: 'a new rebuild' }],
+    options: [
+      ...fits.map((rebuild) => ({ value: rebuild.id, label: rebuild.tag })),
+      { value: 'new', label: 'a new rebuild' },
+    ],
     preset,
     answer: answer ?? null,
     mustAsk: fits.length > 1,

@@ -33,7 +33,11 @@ export interface VehicleGroups {
  * order, case, color or make beside it; a slip of the pen or a missing year joins the only vehicle that it fits.
  * `answers`: spelling → group id, 'own' or 'aside', as a person decided.
  */
-export function groupVehicles(counts: ReadonlyMap<string, number>, thisYear: number, answers: ReadonlyMap<string, string>): VehicleGroups {
+export function groupVehicles(
+  counts: ReadonlyMap<string, number>,
+  thisYear: number,
+  answers: ReadonlyMap<string, string>,
+): VehicleGroups {
   const groups = new Map<string, VehicleGroup>();
   const parts = new Map<string, VehicleText>();
   for (const [spelling, count] of counts) {
@@ -66,7 +70,15 @@ export function groupVehicles(counts: ReadonlyMap<string, number>, thisYear: num
 
 function join(groups: Map<string, VehicleGroup>, spelling: string, part: VehicleText, count: number): void {
   const id = `${part.year ?? ''}|${part.key}`;
-  const group = groups.get(id) ?? { id, name: spelling, year: part.year, make: null, model: part.model, count: 0, spellings: [] };
+  const group = groups.get(id) ?? {
+    id,
+    name: spelling,
+    year: part.year,
+    make: null,
+    model: part.model,
+    count: 0,
+    spellings: [],
+  };
   groups.set(id, group);
   group.make ??= part.make;
   group.count += count;
@@ -75,7 +87,8 @@ function join(groups: Map<string, VehicleGroup>, spelling: string, part: Vehicle
 
 /** The spelling used most; `10 Ceed` is preferred to `10 CEED` and `10 ceed`. */
 function mostUsed(group: VehicleGroup, counts: ReadonlyMap<string, number>): string {
-  const rank = (spelling: string) => (counts.get(spelling) ?? 0) + (/\p{Lu}/u.test(spelling) && /\p{Ll}/u.test(spelling) ? 1e9 : 0);
+  const rank = (spelling: string) =>
+    (counts.get(spelling) ?? 0) + (/\p{Lu}/u.test(spelling) && /\p{Ll}/u.test(spelling) ? 1e9 : 0);
   return group.spellings.reduce((best, spelling) => (rank(spelling) > rank(best) ? spelling : best));
 }
 
@@ -104,9 +117,7 @@ function bucketKeys(group: VehicleGroup): string[] {
 function doubtOf(group: VehicleGroup, index: ReadonlyMap<string, readonly VehicleGroup[]>): VehicleDoubt | null {
   const key = keyOf(group);
   const near = new Set(bucketKeys(group).flatMap((bucket) => index.get(bucket) ?? []));
-  const fits = [...near].filter(
-    (other) => other !== group && other.count > group.count && isSlip(key, keyOf(other)),
-  );
+  const fits = [...near].filter((other) => other !== group && other.count > group.count && isSlip(key, keyOf(other)));
   if (fits.length > 0) return doubt(group, fits, 'It looks like a slip of the pen.');
   const words = (group.model ?? '').split(' ');
   const lessOne = words.length > 1 ? (index.get(`=${modelKey(words.slice(0, -1).join(' '))}`) ?? []) : [];
@@ -122,7 +133,12 @@ function doubt(group: VehicleGroup, fits: readonly VehicleGroup[], why: string):
   return { spelling: group.name, taken: fits.length === 1 ? (only ?? null) : null, others: fits, why };
 }
 
-function answered(group: VehicleGroup, found: VehicleDoubt, answer: string | undefined, groups: ReadonlyMap<string, VehicleGroup>) {
+function answered(
+  group: VehicleGroup,
+  found: VehicleDoubt,
+  answer: string | undefined,
+  groups: ReadonlyMap<string, VehicleGroup>,
+) {
   if (answer === 'own') return group;
   if (answer === 'aside') return 'aside' as const;
   return (answer === undefined ? undefined : groups.get(answer)) ?? found.taken ?? ('ambiguous' as const);

@@ -15,7 +15,10 @@ const TWO = /^\d\d$/;
 
 /** Reads `13 F-150`, `'05 Altima`, `2012 Dodge Caravan silver`, `Escape 06`. Unknown parts are null. */
 export function readVehicle(text: string, thisYear: number): VehicleText {
-  const words = text.replace(/['’`"]/g, ' ').split(/[\s,;/]+/).filter((word) => fold(word) !== '');
+  const words = text
+    .replace(/['’`"]/g, ' ')
+    .split(/[\s,;/]+/)
+    .filter((word) => fold(word) !== '');
   const year = takeYear(words, thisYear);
   const make = takeMake(words);
   const left = words.filter((word) => !isColor(word));
@@ -61,7 +64,8 @@ const digitsOf = (text: string) => text.replace(/\D+/g, ' ');
  * count as a slip (an F-150 is no F-250), nor do words too short to tell.
  */
 export function isSlip(a: string, b: string): boolean {
-  if (a === b || Math.min(a.length, b.length) < 4 || Math.abs(a.length - b.length) > 1 || digitsOf(a) !== digitsOf(b)) return false;
+  if (a === b || Math.min(a.length, b.length) < 4 || Math.abs(a.length - b.length) > 1 || digitsOf(a) !== digitsOf(b))
+    return false;
   let start = 0;
   while (start < a.length && a[start] === b[start]) start++;
   let end = 0;

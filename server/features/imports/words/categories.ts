@@ -38,7 +38,9 @@ const PHRASES: Readonly<Record<string, string>> = {
 };
 
 const MEANING_OF = new Map(
-  Object.entries(PHRASES).flatMap(([meaning, phrases]) => phrases.split('|').map((phrase) => [phrase, meaning] as const)),
+  Object.entries(PHRASES).flatMap(([meaning, phrases]) =>
+    phrases.split('|').map((phrase) => [phrase, meaning] as const),
+  ),
 );
 const MOST_WORDS = 3;
 

@@ -4,14 +4,20 @@ import { fold } from '../cells/fold.ts';
 /** What a heading may mean, the likelier first; which it is, the cells below decide. */
 const HEADINGS: Readonly<Partial<Record<Meaning, string>>> = {
   date: 'date|day|when|paid on|date paid|invoice date|datum|tag|belegdatum|fecha|date achat',
-  vehicle: 'vehicle|car|unit|truck|which car|vehicle year model|car name|year make model|auto|fahrzeug|wagen|kfz|pkw|coche|vehiculo|voiture|vehicule|rebuild|project|job',
-  category: 'category|type|what for|kind|cost type|expense type|account|class of cost|art|kategorie|kostenart|categoria|categorie|tipo',
+  vehicle:
+    'vehicle|car|unit|truck|which car|vehicle year model|car name|year make model|auto|fahrzeug|wagen|kfz|pkw|coche|vehiculo|voiture|vehicule|rebuild|project|job',
+  category:
+    'category|type|what for|kind|cost type|expense type|account|class of cost|art|kategorie|kostenart|categoria|categorie|tipo',
   what: 'what|description|item|details|detail|desc|memo|for|purpose|beschreibung|artikel|bezeichnung|text|descripcion|concepto|designation',
-  vendor: 'vendor|from|bought from|supplier|seller|store|shop|who from|payee|paid to|where|handler|lieferant|verkaufer|proveedor|fournisseur',
+  vendor:
+    'vendor|from|bought from|supplier|seller|store|shop|who from|payee|paid to|where|handler|lieferant|verkaufer|proveedor|fournisseur',
   foreseen: 'planned|planned y n|foreseen|expected|in estimate|in budget|surprise|geplant|previsto|prevu',
-  amount: 'amount|amt|cost|paid|price|total|sum|spent|expense|debit|out|money|cost usd|net cost|betrag|ausgabe|ausgaben|preis|kosten|summe|importe|coste|gasto|montant|depense',
-  credit: 'got back|credit|refund|refunds|returned|back|income|received|sale|sales|in|einnahme|einnahmen|gutschrift|erstattung|ingreso|recette|sold for|sale price',
-  'stock number': 'stock|stock no|stock number|stock nr|id|no|nr|number|tag|ref|unit no|lot|lot no|our no|lagernummer|fahrzeugnr',
+  amount:
+    'amount|amt|cost|paid|price|total|sum|spent|expense|debit|out|money|cost usd|net cost|betrag|ausgabe|ausgaben|preis|kosten|summe|importe|coste|gasto|montant|depense',
+  credit:
+    'got back|credit|refund|refunds|returned|back|income|received|sale|sales|in|einnahme|einnahmen|gutschrift|erstattung|ingreso|recette|sold for|sale price',
+  'stock number':
+    'stock|stock no|stock number|stock nr|id|no|nr|number|tag|ref|unit no|lot|lot no|our no|lagernummer|fahrzeugnr',
   year: 'year|yr|model year|my|baujahr|bj|jahr|ano|annee',
   make: 'make|brand|manufacturer|marke|hersteller|marca|marque',
   model: 'model|modell|typ|modelo|modele',
@@ -25,7 +31,8 @@ const HEADINGS: Readonly<Partial<Record<Meaning, string>>> = {
   seen: 'seen|inspected before|seen in person|looked at|seen before',
   'bought from': 'bought from|auction|source|bought at|from',
   notes: 'notes|note|comments|comment|remarks|bemerkung|bemerkungen|notiz|notas|remarques',
-  boughtOn: 'bought|bought on|purchased|purchase date|date bought|buy date|gekauft|gekauft am|kaufdatum|comprado|achete',
+  boughtOn:
+    'bought|bought on|purchased|purchase date|date bought|buy date|gekauft|gekauft am|kaufdatum|comprado|achete',
   paidOn: 'paid|paid on|date paid|bezahlt',
   pickedUpOn: 'picked up|pick up|pickup|arrived|abgeholt',
   startedOn: 'started|start|start date|begun|work started|begonnen',
@@ -51,7 +58,8 @@ const BY_WORDS = new Map<string, Meaning[]>();
 for (const [meaning, phrases] of Object.entries(HEADINGS) as [Meaning, string][]) {
   for (const phrase of phrases.split('|')) BY_WORDS.set(phrase, [...(BY_WORDS.get(phrase) ?? []), meaning]);
 }
-const UNIT = /[([]\s*(?:usd|eur|gbp|cad|\$|€|£|us\$|h|hrs?|hours|std|km|mi|miles|y\/n|dd.?mm.?yyyy|mm.?dd.?yyyy)\s*[)\]]/gi;
+const UNIT =
+  /[([]\s*(?:usd|eur|gbp|cad|\$|€|£|us\$|h|hrs?|hours|std|km|mi|miles|y\/n|dd.?mm.?yyyy|mm.?dd.?yyyy)\s*[)\]]/gi;
 const PLAN = /\b(?:est|estimate|estimated|budget|budgeted|plan|planned|quote|quoted|geplant|soll|kv)\b/;
 
 /** A heading without units and punctuation, as compared. */
@@ -70,7 +78,8 @@ export function plannedPart(heading: string): string | null {
   return PLAN.test(words) ? words.replace(PLAN, ' ').replace(/\s+/g, ' ').trim() : null;
 }
 
-const TOTAL = /^(?:(?:grand|sub|car|month|monthly|year|running|overall)?\s?(?:total|totals|subtotal|sum|sums)|summe|gesamt|gesamtsumme|zwischensumme|ubertrag|suma|total general|somme|carried forward|brought forward|balance)\b|\b(?:total|totals|subtotal|summe|gesamt)$/;
+const TOTAL =
+  /^(?:(?:grand|sub|car|month|monthly|year|running|overall)?\s?(?:total|totals|subtotal|sum|sums)|summe|gesamt|gesamtsumme|zwischensumme|ubertrag|suma|total general|somme|carried forward|brought forward|balance)\b|\b(?:total|totals|subtotal|summe|gesamt)$/;
 
 /** Does a cell label a total, subtotal or carried-forward line? */
 export function isTotalLabel(cell: string): boolean {

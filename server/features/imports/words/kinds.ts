@@ -23,7 +23,10 @@ const CLASSES: readonly (readonly [string, string])[] = [
   ['large car', 'large full fullsize limousine'],
 ];
 
-function reader(own: readonly string[], known: readonly (readonly [string, string])[]): (text: string) => string | null {
+function reader(
+  own: readonly string[],
+  known: readonly (readonly [string, string])[],
+): (text: string) => string | null {
   const byName = new Map(own.map((name) => [fold(name), name]));
   const meaningOf = (text: string) => {
     const words = new Set(fold(text).split(' '));

@@ -19,7 +19,18 @@ const MAKE_OF = new Map(
     }),
 );
 const COLOR_WORDS = new Set(COLORS.split(/\s+/));
-const OVERHEAD_WORDS = new Set(['overhead', 'shop', 'general', 'none', 'no car', 'all cars', 'werkstatt', 'allgemein', 'taller', 'atelier']);
+const OVERHEAD_WORDS = new Set([
+  'overhead',
+  'shop',
+  'general',
+  'none',
+  'no car',
+  'all cars',
+  'werkstatt',
+  'allgemein',
+  'taller',
+  'atelier',
+]);
 
 /** The make that a word stands for, as it is usually written; null = no make. */
 export function makeOf(words: string): string | null {

@@ -1,0 +1,39 @@
+import { useState } from 'react';
+import type { ColumnChoice, Import, ImportSettings, Reading } from '#shared/contracts/imports.ts';
+
+/**
+ * What a person has said of a file but not sent yet: changed columns and answers. `settings` is null while nothing is
+ * changed; `reset` forgets it.
+ */
+export function useSettings(file: Import) {
+  const [columns, setColumns] = useState<ReadonlyMap<number, ColumnChoice>>(new Map());
+  const [answers, setAnswers] = useState<ReadonlyMap<string, string>>(new Map());
+  const count = columns.size + answers.size;
+  return {
+    count,
+    columnOf: (col: number) => columns.get(col) ?? null,
+    answerOf: (id: string) => answers.get(id) ?? null,
+    setColumn: (choice: ColumnChoice) => setColumns((before) => new Map(before).set(choice.col, choice)),
+    setAnswer: (id: string, value: string) => setAnswers((before) => new Map(before).set(id, value)),
+    settings: count === 0 || !file.reading ? null : settingsFrom(file.reading, columns, answers),
+    reset() {
+      setColumns(new Map());
+      setAnswers(new Map());
+    },
+  };
+}
+
+export type Settings = ReturnType<typeof useSettings>;
+
+function settingsFrom(
+  reading: Reading,
+  columns: ReadonlyMap<number, ColumnChoice>,
+  answers: ReadonlyMap<string, string>,
+): ImportSettings {
+  return {
+    ...(columns.size > 0
+      ? { columns: reading.columns.map(({ col, meaning, category }) => columns.get(col) ?? { col, meaning, category }) }
+      : {}),
+    answers: Object.fromEntries(answers),
+  };
+}

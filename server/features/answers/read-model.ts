@@ -1,3 +1,4 @@
+import { gzipSync } from 'node:zlib';
 import type { Day } from '#shared/day.ts';
 import { readRules } from '../../books/rules.ts';
 import { readShopFacts, type ShopFacts } from '../../books/shop-facts.ts';
@@ -9,10 +10,16 @@ import { type AnswerInput, asOf } from './input.ts';
 const SHOPS_KEPT = 8;
 const ANSWERS_KEPT = 64;
 
+/** A reply as text and, once it was asked for again, compressed: doing that anew each time costs more than the rest. */
+export interface KeptReply {
+  readonly text: string;
+  gzip: Buffer | null;
+}
+
 interface KeptShop {
   readonly facts: ShopFacts;
-  /** Replies as text, by day and question. */
-  readonly replies: Map<string, string>;
+  /** By day and question. */
+  readonly replies: Map<string, KeptReply>;
 }
 type KeptShops = Map<string, KeptShop>;
 
@@ -20,23 +27,26 @@ type KeptShops = Map<string, KeptShop>;
 const memory = new WeakMap<Database, KeptShops>();
 
 /**
- * Answers a question about a shop as text. Facts and replies are kept until the books' version changes; everything is
+ * Answers a question about a shop. Facts and replies are kept until the books' version changes; everything is
  * read at one moment, on a reading connection that waits for no writer.
  */
-export async function answerText(
+export async function keptAnswer(
   database: Database,
   asked: { readonly shopId: string; readonly today: Day; readonly question: string },
   workOut: (input: AnswerInput) => string,
-): Promise<string> {
+): Promise<KeptReply> {
   const raw = await rawHandle(database.reader);
   return raw.transaction(() => {
     const kept = keptShop(raw, shopsOf(database), asked.shopId);
     const key = `${asked.today} ${asked.question}`;
     const known = kept.replies.get(key);
-    if (known !== undefined) return known;
-    const text = workOut(inputOf(raw, kept.facts, asked.today));
-    keep(kept.replies, key, text, ANSWERS_KEPT);
-    return text;
+    if (known !== undefined) {
+      known.gzip ??= gzipSync(known.text);
+      return known;
+    }
+    const reply = { text: workOut(inputOf(raw, kept.facts, asked.today)), gzip: null };
+    keep(kept.replies, key, reply, ANSWERS_KEPT);
+    return reply;
   })();
 }
 

@@ -5,7 +5,7 @@ import { type Context, Ready, type Route, route } from '../../platform/http.ts';
 import { contingencyAnswer } from './contingency.ts';
 import type { AnswerInput } from './input.ts';
 import { overrunsAnswer } from './overruns.ts';
-import { answerText } from './read-model.ts';
+import { keptAnswer } from './read-model.ts';
 import { timeToSellAnswer } from './time-to-sell.ts';
 import { whatPaysAnswer } from './what-pays.ts';
 import { yearAnswer } from './year.ts';
@@ -29,8 +29,12 @@ async function reply<C extends Contract>(
     today: await ctx.today(),
     question: `${contract.path} ${JSON.stringify(query)}`,
   };
-  const text = await answerText(services.database, asked, (input) =>
+  const { text, gzip } = await keptAnswer(services.database, asked, (input) =>
     JSON.stringify(contract.response.parse(workOut(input))),
   );
+  ctx.res.vary('Accept-Encoding');
+  if (gzip !== null && ctx.req.acceptsEncodings('gzip')) {
+    ctx.res.set('Content-Encoding', 'gzip').type('application/json').send(gzip);
+  }
   return new Ready(200, text);
 }

@@ -49,6 +49,8 @@ export function whatPaysAnswer(input: AnswerInput, query: FilterQuery): Answer {
 
 interface Valued {
   readonly cell: Cell;
+  /** Of the cell; holds both names, so that no two cells meet in one. null = a name is not known. */
+  readonly key: string | null;
   readonly value: number;
   readonly sums: Sums;
 }
@@ -67,36 +69,38 @@ interface Cell {
 function valued(rebuild: Priced): Omit<Valued, 'value'> {
   const { profitCents, costCents } = rebuildProfit(rebuild);
   const sums = { profitCents, costCents, ownSeconds: rebuild.ownSeconds ?? 0 };
-  return { cell: { class: rebuild.class, damage: rebuild.damage }, sums };
+  const { class: name, damage } = rebuild;
+  return { cell: { class: name, damage }, key: name === null || damage === null ? null : `${name}\0${damage}`, sums };
 }
+
+/** How a fit groups: the key of a rebuild's group (null = in none), and the part of its cell that names it. */
+interface Grouping {
+  readonly keyOf: (one: Valued) => string | null;
+  readonly nameOf: (cell: Cell) => Cell;
+}
+const BY_CELL: Grouping = { keyOf: ({ key }) => key, nameOf: (cell) => cell };
+const BY_CLASS: Grouping = { keyOf: ({ cell }) => cell.class, nameOf: (cell) => ({ ...cell, damage: null }) };
+const BY_DAMAGE: Grouping = { keyOf: ({ cell }) => cell.damage, nameOf: (cell) => ({ ...cell, class: null }) };
 
 function threeFits(input: AnswerInput, values: readonly Valued[], plain: Plain): Answer['perHour'] {
   return {
-    cells: fit(input, values, plain, (cell) => (cell.class === null || cell.damage === null ? null : cell)),
-    classes: fit(input, values, plain, (cell) => (cell.class === null ? null : { class: cell.class, damage: null })),
-    damages: fit(input, values, plain, (cell) => (cell.damage === null ? null : { class: null, damage: cell.damage })),
+    cells: fit(input, values, plain, BY_CELL),
+    classes: fit(input, values, plain, BY_CLASS),
+    damages: fit(input, values, plain, BY_DAMAGE),
   };
 }
 
-/** One fit on its own. A group's key holds both names, so that no two cells meet in one. */
-function fit(
-  { shop }: AnswerInput,
-  values: readonly Valued[],
-  plain: Plain,
-  groupOf: (cell: Cell) => Cell | null,
-): Comparison {
+/** One fit on its own. */
+function fit({ shop }: AnswerInput, values: readonly Valued[], plain: Plain, { keyOf, nameOf }: Grouping): Comparison {
   const cells = new Map<string, { cell: Cell; sums: Sums }>();
   const grouped: GroupedValue[] = [];
-  for (const { cell: own, value, sums } of values) {
-    const cell = groupOf(own);
-    if (cell === null) continue;
-    const group = `${cell.class ?? ''}\0${cell.damage ?? ''}`;
-    const known = cells.get(group) ?? { cell, sums: { ...NOTHING } };
+  for (const one of values) {
+    const group = keyOf(one);
+    if (group === null) continue;
+    const known = cells.get(group) ?? { cell: nameOf(one.cell), sums: { ...NOTHING } };
     cells.set(group, known);
-    known.sums.profitCents += sums.profitCents;
-    known.sums.costCents += sums.costCents;
-    known.sums.ownSeconds += sums.ownSeconds;
-    grouped.push({ group, value });
+    add(known.sums, one.sums);
+    grouped.push({ group, value: one.value });
   }
   const comparison = groupComparison(grouped);
   const idIn = (list: readonly { id: string; name: string }[], name: string | null) =>
@@ -117,6 +121,12 @@ function fit(
 }
 
 const NOTHING: Sums = { profitCents: 0, ownSeconds: 0, costCents: 0 };
+
+function add(sums: Sums, more: Sums): void {
+  sums.profitCents += more.profitCents;
+  sums.costCents += more.costCents;
+  sums.ownSeconds += more.ownSeconds;
+}
 
 function figuresOf({ n, mean, deviation, interval, shrunken, isThin }: ComparedGroup) {
   const { lower, upper } = interval ?? { lower: null, upper: null };

@@ -21,7 +21,10 @@ export function SignInPage() {
   if (session) return <Navigate to={ownAddress(to)} replace />;
   return (
     <>
-      <PageHeader title="What your own past says about the next car" />
+      <PageHeader
+        title="What your own past says about the next car"
+        note="For small shops that buy damaged vehicles, rebuild them and sell them."
+      />
       <div className="grid items-start gap-x-12 gap-y-8 lg:grid-cols-[minmax(0,24rem)_minmax(0,30rem)]">
         <section className="panel" aria-labelledby="way-in">
           <h2 id="way-in" className="mb-4 text-lead font-[660]">
@@ -35,7 +38,7 @@ export function SignInPage() {
         </section>
         <div className="grid gap-4">
           <p className="text-lead text-pretty">
-            Panelgap is for small shops that buy damaged vehicles, rebuild them and sell them. It measures the{' '}
+            Each car feels like a win or a loss by itself. Panelgap measures the{' '}
             <Mark>gap between plan and outcome</Mark> over all of them, from the spreadsheets you have and the books you
             keep, and answers:
           </p>

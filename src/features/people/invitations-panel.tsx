@@ -5,10 +5,8 @@ import { useSession } from '../../lib/session.ts';
 import { Button } from '../../ui/button.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { Panel } from '../../ui/panel.tsx';
-import { type Column, Table } from '../../ui/table.tsx';
 import { notify } from '../../ui/toast.tsx';
 import { usePeopleActions } from './mutations.ts';
-import { capital } from './roles.ts';
 
 /** Invitations that are still good, until when, and a way to make their links useless. */
 export function InvitationsPanel({ invitations }: { invitations: readonly Invitation[] }) {
@@ -24,35 +22,34 @@ export function InvitationsPanel({ invitations }: { invitations: readonly Invita
       notify(refused.message, { wrong: true });
     }
   };
-  const columns: Column<Invitation>[] = [
-    { id: 'email', header: 'Invited', heads: true, cell: ({ email }) => <span className="break-all">{email}</span> },
-    { id: 'role', header: 'As', cell: ({ role }) => capital(role) },
-    {
-      id: 'expires',
-      header: 'Link works until',
-      width: 'whitespace-nowrap',
-      cell: ({ expiresAt }) => format.day(dayInZone(new Date(expiresAt), timeZone)),
-    },
-    {
-      id: 'acts',
-      header: <span className="sr-only">Withdraw</span>,
-      cell: (invitation) => (
-        <Button
-          size="small"
-          aria-label={`Withdraw the invitation of ${invitation.email}`}
-          onClick={() => void onWithdraw(invitation)}
-        >
-          Withdraw
-        </Button>
-      ),
-    },
-  ];
   return (
     <Panel title="Open invitations" subtitle="A link lost or sent astray: withdraw it and invite again.">
       {invitations.length === 0 ? (
         <p className="text-soft">None. Who is invited and has not joined yet stands here.</p>
       ) : (
-        <Table caption="Open invitations" rows={invitations} columns={columns} rowKey={(one) => one.id} />
+        <ul aria-label="Open invitations" className="border-t border-ink">
+          {invitations.map((invitation) => (
+            <li
+              key={invitation.id}
+              className="flex flex-wrap items-center justify-between gap-x-6 gap-y-2 border-b border-hair py-2"
+            >
+              <div className="min-w-0">
+                <div className="break-words">{invitation.email}</div>
+                <div className="text-label text-soft">
+                  As {invitation.role}; the link works until{' '}
+                  {format.day(dayInZone(new Date(invitation.expiresAt), timeZone))}
+                </div>
+              </div>
+              <Button
+                size="small"
+                aria-label={`Withdraw the invitation of ${invitation.email}`}
+                onClick={() => void onWithdraw(invitation)}
+              >
+                Withdraw
+              </Button>
+            </li>
+          ))}
+        </ul>
       )}
     </Panel>
   );

@@ -7,7 +7,6 @@ import { Button } from '../../ui/button.tsx';
 import { ConflictDialog } from '../../ui/conflict.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { Panel } from '../../ui/panel.tsx';
-import { type Column, Table } from '../../ui/table.tsx';
 import { SelectField } from '../../ui/text-field.tsx';
 import { AskRole, AskTakeOut } from './member-questions.tsx';
 import { capital, lostPowers, ROLE_OPTIONS, roleWords } from './roles.ts';
@@ -21,11 +20,19 @@ export function MembersPanel({ members }: { members: readonly Member[] }) {
     if (lostPowers(member.role, role).length > 0) setAsking({ member, role });
     else void change(member, role);
   };
-  const columns = useColumns({ onPick, onTakeOut: (member) => setAsking({ member, role: 'out' }) });
   const close = () => setAsking(null);
   return (
     <Panel title="Members" subtitle="A new role holds at once: the person is asked to sign in again.">
-      <Table caption="Members of the shop" rows={members} columns={columns} rowKey={(member) => member.userId} />
+      <ul aria-label="Members" className="border-t border-ink">
+        {members.map((member) => (
+          <MemberRow
+            key={member.userId}
+            member={member}
+            onPick={(role) => onPick(member, role)}
+            onTakeOut={() => setAsking({ member, role: 'out' })}
+          />
+        ))}
+      </ul>
       {asking?.role === 'out' && <AskTakeOut member={asking.member} onClose={close} />}
       {asking && asking.role !== 'out' && (
         <AskRole member={asking.member} role={asking.role} onClose={close} onAct={change} />
@@ -42,58 +49,46 @@ export function MembersPanel({ members }: { members: readonly Member[] }) {
   );
 }
 
-type Acts = { onPick: (member: Member, role: Role) => void; onTakeOut: (member: Member) => void };
+type RowProps = { member: Member; onPick: (role: Role) => void; onTakeOut: () => void };
 
-function useColumns({ onPick, onTakeOut }: Acts): Column<Member>[] {
+function MemberRow({ member, onPick, onTakeOut }: RowProps) {
   const format = useFormatter();
   const { user, shop } = useSession();
-  return [
-    {
-      id: 'name',
-      header: 'Name',
-      heads: true,
-      width: 'min-w-[10rem]',
-      cell: ({ name, email }) => (
-        <>
-          <span className="block font-[640]">{name}</span>
-          <span className="break-all text-label text-soft">{email}</span>
-        </>
-      ),
-    },
-    {
-      id: 'role',
-      header: 'Role',
-      width: 'min-w-[15rem]',
-      cell: (member) => <RoleCell member={member} isSelf={member.userId === user.id} onPick={onPick} />,
-    },
-    {
-      id: 'joined',
-      header: 'Joined',
-      width: 'whitespace-nowrap',
-      cell: ({ joinedAt }) => format.day(dayInZone(new Date(joinedAt), shop.timeZone)),
-    },
-    {
-      id: 'acts',
-      header: <span className="sr-only">Take out</span>,
-      cell: (member) =>
-        member.userId !== user.id && (
-          <Button size="small" aria-label={`Take ${member.name} out`} onClick={() => onTakeOut(member)}>
+  const { name, email, joinedAt, userId } = member;
+  const isSelf = userId === user.id;
+  return (
+    <li className="grid items-start gap-x-6 gap-y-2 border-b border-hair py-3 sm:grid-cols-[minmax(0,1fr)_minmax(0,1.3fr)_5rem]">
+      <div>
+        <div className="font-[640]">{name}</div>
+        <div className="text-label break-words text-soft">{email}</div>
+        <div className="text-label text-soft">Joined {format.day(dayInZone(new Date(joinedAt), shop.timeZone))}</div>
+      </div>
+      <MemberRole member={member} isSelf={isSelf} onPick={onPick} />
+      {!isSelf && (
+        <div className="sm:text-right">
+          <Button
+            size="small"
+            aria-label={`Take ${name} out`}
+            onClick={onTakeOut}
+            className="min-h-10 whitespace-nowrap"
+          >
             Take out
           </Button>
-        ),
-    },
-  ];
+        </div>
+      )}
+    </li>
+  );
 }
 
 /** One's own role is another owner's to change, so that nobody locks themselves out by a slip. */
-function RoleCell({ member, isSelf, onPick }: { member: Member; isSelf: boolean; onPick: Acts['onPick'] }) {
+function MemberRole({ member, isSelf, onPick }: Omit<RowProps, 'onTakeOut'> & { isSelf: boolean }) {
   const words = `${capital(roleWords(member.role))}.`;
   if (isSelf)
     return (
-      <>
-        <span className="block font-[640]">{capital(member.role)}, that is you</span>
-        <span className="text-label text-soft">{words}</span>
-      </>
+      <div>
+        <div className="font-[640]">{capital(member.role)}, that is you</div>
+        <div className="text-label text-soft">{words}</div>
+      </div>
     );
   return (
     <SelectField
@@ -102,7 +97,7 @@ function RoleCell({ member, isSelf, onPick }: { member: Member; isSelf: boolean;
       hint={words}
       options={ROLE_OPTIONS}
       value={member.role}
-      onChange={(event) => onPick(member, event.target.value as Role)}
+      onChange={(event) => onPick(event.target.value as Role)}
     />
   );
 }

@@ -14,13 +14,13 @@ export const POWERS: readonly Power[] = [
 
 const WORDS: Record<Role, string> = {
   owner: 'sees and changes everything, people and the shop included',
-  bookkeeper: 'sees and keeps all books; changes neither people nor the shop',
-  mechanic: 'puts down own hours on open rebuilds; sees no money',
+  bookkeeper: 'sees and keeps all books, but changes neither people nor the shop',
+  mechanic: 'puts down own hours on open rebuilds and sees no money',
   partner: 'sees no books yet: pages for the rebuilds they put money in come later',
-  accountant: 'sees all books and answers; changes nothing',
+  accountant: 'sees all books and answers, and changes nothing',
 };
 
-/** What a role may do, to stand after its name: "sees all books and answers; changes nothing". */
+/** What a role may do, to stand after its name: "sees all books and answers, and changes nothing". */
 export function roleWords(role: Role): string {
   return WORDS[role];
 }

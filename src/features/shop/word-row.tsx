@@ -31,13 +31,19 @@ export function WordRow({ name, note, acts, onRename }: Props) {
             <span className="break-words">{name}</span>
             {note && <span className="block text-label text-soft">{note}</span>}
           </span>
-          <span className="flex flex-wrap items-center gap-1.5">
-            {acts}
+          <span className="-mr-2 flex flex-wrap items-center">
             {onRename && (
-              <Button ref={rename} size="small" aria-label={`Rename ${name}`} onClick={() => setRenaming(true)}>
+              <Button
+                ref={rename}
+                kind="plain"
+                size="small"
+                aria-label={`Rename ${name}`}
+                onClick={() => setRenaming(true)}
+              >
                 Rename
               </Button>
             )}
+            {acts}
           </span>
         </>
       )}

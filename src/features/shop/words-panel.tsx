@@ -50,7 +50,7 @@ export function WordsPanel({ kind, title, subtitle, addLabel, items, canEdit }: 
         <WordRow
           key={item.id}
           name={item.name}
-          note={isPaidLabor(item) && 'Paid labor: wages for hours on a rebuild'}
+          note={isPaidLabor(item) && 'Wages for hours on a rebuild'}
           onRename={canEdit ? onRename(item) : undefined}
           acts={
             canEdit && (
@@ -67,7 +67,12 @@ export function WordsPanel({ kind, title, subtitle, addLabel, items, canEdit }: 
                   isEnd={at === inUse.length - 1}
                   onPress={(e) => void onMove(item, inUse[at + 1], e)}
                 />
-                <Button size="small" aria-label={`Retire ${item.name}`} onClick={() => void onRetire(item)}>
+                <Button
+                  kind="plain"
+                  size="small"
+                  aria-label={`Retire ${item.name}`}
+                  onClick={() => void onRetire(item)}
+                >
                   Retire
                 </Button>
               </>
@@ -81,7 +86,12 @@ export function WordsPanel({ kind, title, subtitle, addLabel, items, canEdit }: 
           name={item.name}
           acts={
             canEdit && (
-              <Button size="small" aria-label={`Bring ${item.name} back`} onClick={() => void onBringBack(item)}>
+              <Button
+                kind="plain"
+                size="small"
+                aria-label={`Bring ${item.name} back`}
+                onClick={() => void onBringBack(item)}
+              >
                 Bring back
               </Button>
             )
@@ -116,7 +126,14 @@ type MoveProps = {
 /** Stays in the tab order at the list's end, so that the focus is not lost there. */
 function MoveButton({ words, sign, isEnd, onPress }: MoveProps) {
   return (
-    <Button size="small" aria-label={words} aria-disabled={isEnd || undefined} onClick={onPress} className="px-2">
+    <Button
+      kind="plain"
+      size="small"
+      aria-label={words}
+      aria-disabled={isEnd || undefined}
+      onClick={onPress}
+      className="min-w-8 border-transparent px-2 text-soft"
+    >
       {sign}
     </Button>
   );

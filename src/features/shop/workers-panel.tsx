@@ -44,13 +44,19 @@ export function WorkersPanel({ workers, canEdit }: { workers: readonly Worker[];
             canEdit && (
               <>
                 <Button
+                  kind="plain"
                   size="small"
                   aria-label={`Count ${worker.name} as ${worker.isPaid ? 'unpaid' : 'paid'}`}
                   onClick={() => void onPaid(worker)}
                 >
                   {worker.isPaid ? 'Make unpaid' : 'Make paid'}
                 </Button>
-                <Button size="small" aria-label={`Retire ${worker.name}`} onClick={() => void onRetire(worker)}>
+                <Button
+                  kind="plain"
+                  size="small"
+                  aria-label={`Retire ${worker.name}`}
+                  onClick={() => void onRetire(worker)}
+                >
                   Retire
                 </Button>
               </>
@@ -64,7 +70,12 @@ export function WorkersPanel({ workers, canEdit }: { workers: readonly Worker[];
           name={worker.name}
           acts={
             canEdit && (
-              <Button size="small" aria-label={`Bring ${worker.name} back`} onClick={() => void onBringBack(worker)}>
+              <Button
+                kind="plain"
+                size="small"
+                aria-label={`Bring ${worker.name} back`}
+                onClick={() => void onBringBack(worker)}
+              >
                 Bring back
               </Button>
             )

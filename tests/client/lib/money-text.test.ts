@@ -9,6 +9,8 @@ test('typed amounts become cents, by the shop’s own mark', () => {
 test('what cannot be read says so with the text', () => {
   const result = centsTextSchema('.').safeParse('12,50,0');
   expect(result.error?.issues[0]?.message).toBe('“12,50,0” cannot be read as an amount.');
+  const optional = optionalCentsTextSchema('.').safeParse('plenty');
+  expect(optional.error?.issues[0]?.message).toBe('“plenty” cannot be read as an amount.');
 });
 
 test('an empty optional amount is nothing, not zero', () => {

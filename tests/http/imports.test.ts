@@ -145,6 +145,19 @@ describe('bringing a file in', () => {
     });
   });
 
+  it('asks whether a car of the same year and model as one that has left is that one: two years may hold two of a kind', async () => {
+    const api = await testApi();
+    const ada = await api.owner();
+    await broughtIn(ada, sampleBytes('p01_rebuild_summary_us.csv'), 'cars.csv');
+    // TC-05 is a 2005 Altima, sold in 2018; the list's own was bought in 2020.
+    const read = await uploaded(ada, sampleBytes('p02_expense_ledger_us.csv'), 'list.csv');
+    const asked = read.reading?.choices.filter((choice) => choice.mustAsk);
+    expect(asked).toMatchObject([{ question: 'Is “05 Altima” a rebuild that you have already?', answer: null }]);
+    expect((await ada.post(`/api/imports/${read.id}/commit`)).status).toBe(422);
+    await ada.patch(`/api/imports/${read.id}`, read.version, { answers: { [asked?.[0]?.id ?? '']: 'new' } });
+    expect(await settled(ada, read.id)).toMatchObject({ rowsTaken: 80, rowsPutAside: 3 });
+  });
+
   it('a dropped file is gone and books nothing', async () => {
     const api = await testApi();
     const ada = await api.owner();

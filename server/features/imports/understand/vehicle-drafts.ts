@@ -39,9 +39,9 @@ export function vehicleDrafts(
   const drafts = new Map<VehicleGroup, VehicleTarget>();
   for (const group of grouped.groups) {
     const sameTag = group.spellings.map((spelling) => finder.byTag(spelling)).find((found) => found !== null);
-    const fits = sameTag ? [sameTag] : finder.byModel(group.year, group.model);
-    const { existing, choice } = chooseExisting(group, fits, answers);
-    if (choice && !sameTag) choices.push(choice);
+    const fits = finder.byModel(group.year, group.model);
+    const { existing, choice } = sameTag ? { existing: sameTag, choice: null } : chooseExisting(group, fits, answers);
+    if (choice) choices.push(choice);
     const { year, make, model, spellings } = group;
     const known = { year, make, model: year === null && make === null ? null : model, spellings };
     drafts.set(
@@ -85,12 +85,16 @@ function spellingChoice(doubt: VehicleDoubt, answers: ReadonlyMap<string, string
   };
 }
 
+/**
+ * The shop's rebuild that a vehicle of the file is, and the question whether it is. One that fits and still stands in the
+ * shop is taken; one that has left is asked about, since the shop may have bought the same year and model again.
+ */
 function chooseExisting(group: VehicleGroup, fits: readonly ExistingRebuild[], answers: ReadonlyMap<string, string>) {
-  if (fits.length === 0) return { existing: null, choice: null };
+  const [first] = fits;
+  if (!first) return { existing: null, choice: null };
   const id = `rebuild:${group.name}`;
   const answer = answers.get(id);
-  const preset = fits.length === 1 ? (fits[0]?.id ?? 'new') : 'new';
-  const chosen = fits.find((rebuild) => rebuild.id === (answer ?? (fits.length === 1 ? preset : '')));
+  const sure = fits.length === 1 && !first.hasLeft ? first : null;
   const choice: Choice = {
     id,
     kind: 'vehicle',
@@ -100,11 +104,16 @@ function chooseExisting(group: VehicleGroup, fits: readonly ExistingRebuild[], a
       ...fits.map((rebuild) => ({ value: rebuild.id, label: rebuild.tag })),
       { value: 'new', label: 'a new rebuild' },
     ],
-    preset,
+    preset: sure?.id ?? 'new',
     answer: answer ?? null,
-    mustAsk: fits.length > 1,
-    why: fits.length === 1 ? 'Year and model are the same.' : 'More than one of your rebuilds has this year and model.',
+    mustAsk: sure === null,
+    why: whyAsked(fits.length, sure !== null),
   };
-  const existing = chosen ?? (fits.length > 1 && answer === undefined ? ('ambiguous' as const) : null);
-  return { existing, choice };
+  if (answer === undefined) return { existing: sure ?? ('ambiguous' as const), choice };
+  return { existing: fits.find((rebuild) => rebuild.id === answer) ?? null, choice };
+}
+
+function whyAsked(count: number, isSure: boolean): string {
+  if (count > 1) return 'More than one of your rebuilds has this year and model.';
+  return isSure ? 'Year and model are the same.' : 'Year and model are the same, but yours has left the shop.';
 }

@@ -20,8 +20,12 @@ export default defineConfig({
     // The machines that run this have two cores.
     maxWorkers: 2,
     allowOnly: false,
+    // A busy machine is no failure; a test that hangs still ends.
+    testTimeout: 30_000,
+    hookTimeout: 60_000,
     projects: [
       {
+        extends: true,
         test: {
           name: 'server',
           environment: 'node',

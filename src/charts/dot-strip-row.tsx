@@ -64,7 +64,7 @@ function Dot({ x, y, rate, isCut }: { x: number; y: number; rate: number; isCut:
       <path
         d={`M${x - 4 * way} ${y - 4} L${x + 3 * way} ${y} L${x - 4 * way} ${y + 4}`}
         fill="none"
-        stroke="var(--color-oxide)"
+        stroke={rate > 0 ? 'var(--color-oxide)' : 'var(--color-steel)'}
         strokeWidth={2}
       />
     );

@@ -2,7 +2,7 @@ import { Link } from 'react-router-dom';
 import type { Formatter } from '#shared/formatter.ts';
 import { cellTone } from './cell-tone.ts';
 
-/** One kind of wreck. `value` null with n above 0: too few to say. `low`/`high`: the interval, cents. `href`: its rebuilds. */
+/** One kind of wreck. `value` null with n above 0: too few yet. `low`/`high`: the interval, cents. `href`: its rebuilds. */
 export type GridCell = {
   value: number | null;
   low: number | null;
@@ -30,14 +30,15 @@ type Props = {
 };
 
 /**
- * The class × damage grid: value, range and count in each cell, painted by value; greyed where too few to say; margins at
+ * The class × damage grid: value, range and count in each cell, painted by value; gray where too few yet; margins at
  * right and below. It is a real table, so it is its own text form. `caption`, `corner`, `columns`, `rows` (label, cells, all),
  * `columnAll`, `allColumnsLabel`, `allRowsLabel`, `format`, `unit`.
  */
 export function GridCells(props: Props) {
   const { caption, corner, columns, rows, columnAll, format, unit } = props;
   const write = props.write ?? ((value: number) => format.money(value, 'never'));
-  const largest = Math.max(0, ...rows.flatMap((row) => row.cells.map((cell) => Math.abs(cell.value ?? 0))));
+  const all = [...rows.flatMap((row) => [...row.cells, row.all]), ...columnAll];
+  const largest = Math.max(0, ...all.map((cell) => Math.abs(cell.value ?? 0)));
   return (
     <div className="table-frame" role="region" aria-label={caption} tabIndex={0}>
       <table className="w-full min-w-max border-separate border-spacing-1 text-label leading-snug">
@@ -51,7 +52,7 @@ export function GridCells(props: Props) {
               <th
                 key={column}
                 scope="col"
-                className="px-2.5 py-1 text-left text-body font-[640] first-letter:uppercase"
+                className="px-1.5 py-1 text-left text-body font-[640] first-letter:uppercase"
               >
                 {column}
               </th>
@@ -63,22 +64,25 @@ export function GridCells(props: Props) {
             <tr key={row.label}>
               <th
                 scope="row"
-                className="sticky left-0 bg-sheet py-2 pr-3 text-right text-body font-[640] first-letter:uppercase"
+                className="sticky left-0 bg-sheet py-2 pr-2 text-right text-body font-[640] first-letter:uppercase"
               >
                 {row.label}
               </th>
               {row.cells.map((cell, at) => (
-                <td key={columns[at]} className={`cell h-[4.75rem] min-w-28 align-top tone-${cellTone(cell, largest)}`}>
+                <td
+                  key={columns[at]}
+                  className={`cell h-[4.75rem] min-w-[4.75rem] align-top tone-${cellTone(cell, largest)}`}
+                >
                   <Cell cell={cell} format={format} write={write} unit={unit} />
                 </td>
               ))}
-              <td className="min-w-24 align-top">
+              <td className="min-w-20 align-top">
                 <Cell cell={row.all} format={format} write={write} unit={unit} isMargin />
               </td>
             </tr>
           ))}
           <tr>
-            <th scope="row" className="sticky left-0 bg-sheet py-2 pr-3 text-right text-body font-[640]">
+            <th scope="row" className="sticky left-0 bg-sheet py-2 pr-2 text-right text-body font-[640]">
               {props.allRowsLabel}
             </th>
             {columnAll.map((cell, at) => (
@@ -112,8 +116,10 @@ function Cell({
   const body =
     cell.value === null ? (
       <>
-        <span className={isMargin ? 'block text-body font-[680]' : 'block pt-1'}>{isMargin ? 'too few' : count}</span>
-        <span className="block">{isMargin ? count : 'too few to say'}</span>
+        <span className={isMargin ? 'block text-body font-[680]' : 'block pt-1'}>
+          {isMargin ? 'too few yet' : count}
+        </span>
+        <span className="block">{isMargin ? count : 'too few yet'}</span>
       </>
     ) : (
       <>
@@ -131,7 +137,7 @@ function Cell({
         <span className={isMargin ? 'block text-soft' : 'block'}>{count}</span>
       </>
     );
-  const frame = 'block h-full px-2.5 py-1.5';
+  const frame = 'block h-full px-1.5 py-1.5';
   if (!cell.href) return <span className={frame}>{body}</span>;
   return (
     <Link to={cell.href} className={`${frame} text-inherit no-underline hover:underline`}>

@@ -16,7 +16,7 @@ export const STEP_MARGIN = { top: 42, right: 14, bottom: 26, left: 52 };
 export function stepLineLayout(now: StepSeries, before: StepSeries | null, size: Size) {
   const { top, right, bottom, left } = STEP_MARGIN;
   const values = [...now.points, ...(before?.points ?? [])].map((point) => point.cents);
-  const y = valueAxis(values, [size.height - bottom, top], 44);
+  const y = valueAxis(values, [size.height - bottom, top], Math.max(44, size.height / 6));
   const toX = (series: StepSeries, day: Day) => {
     const length = dayNumber(series.end) - dayNumber(series.start);
     return left + ((dayNumber(day) - dayNumber(series.start)) / length) * (size.width - left - right);

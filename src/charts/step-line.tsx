@@ -2,6 +2,7 @@ import { curveStepAfter } from '@visx/curve';
 import { AreaClosed, LinePath } from '@visx/shape';
 import type { Formatter } from '#shared/formatter.ts';
 import { ChartFigure, type ShowTip } from './chart-figure.tsx';
+import { freeSpot } from './free-spot.ts';
 import { LeftAxis } from './marks.tsx';
 import { PointLayer } from './point-layer.tsx';
 import { STEP_MARGIN, type StepSeries, stepLineLayout } from './step-line-layout.ts';
@@ -21,7 +22,7 @@ type Props = {
 
 /**
  * What was kept, added up through the year, in steps; last year dashed behind it. `caption`, `now`, `before` (series: points
- * {on, cents, label, href}, start, end, knownTo), `nowLabel`, `beforeLabel`, `format`, `height` (270).
+ * {on, cents, label, href}, start, end, knownTo), `nowLabel`, `beforeLabel`, `format`, `height` (270 at most; lower where it is narrow).
  */
 export function StepLine(props: Props) {
   const { now, before, format, caption } = props;
@@ -38,6 +39,8 @@ export function StepLine(props: Props) {
 }
 
 type Place = { x: number; y: number };
+/** Width of a letter of a label, roughly, in pixels. */
+const LETTER = 7.1;
 const x = (place: Place) => place.x;
 const y = (place: Place) => place.y;
 
@@ -46,11 +49,13 @@ function Painted({
   before,
   format,
   width,
-  height = 270,
+  height: most = 270,
   showTip,
   nowLabel,
   beforeLabel,
 }: Props & { width: number; showTip: ShowTip }) {
+  // A narrow picture that is high as well makes every step look like a cliff.
+  const height = Math.min(most, Math.max(250, width * 0.8));
   const shapes = stepLineLayout(now, before, { width, height });
   const total = now.points.at(-1)?.cents ?? 0;
   const end = shapes.now.at(-1);
@@ -99,7 +104,7 @@ function Painted({
         />
         {end && <circle cx={end.x} cy={end.y} r={4.5} className={total < 0 ? 'loss' : 'gain'} />}
         <EndLabels
-          {...{ shapes, width, format, nowLabel, beforeLabel }}
+          {...{ shapes, width, height, format, nowLabel, beforeLabel }}
           nowCents={total}
           beforeCents={before?.points.at(-1)?.cents ?? null}
         />
@@ -120,6 +125,7 @@ function Painted({
 function EndLabels(props: {
   shapes: ReturnType<typeof stepLineLayout>;
   width: number;
+  height: number;
   format: Formatter;
   nowLabel: string;
   nowCents: number;
@@ -130,25 +136,42 @@ function EndLabels(props: {
   const end = shapes.now.at(-1);
   const past = shapes.before?.at(-1);
   if (!end) return null;
-  const nowY = end.y - 11;
-  // The line before rises to its label from the left, so the label goes over its highest late step, and over this year's label.
-  const late = (shapes.before ?? []).filter((place) => place.x > width * 0.6).map((place) => place.y);
-  const over = Math.min(...late, past?.y ?? end.y) - 9;
-  const pastY = Math.abs(over - nowY) < 17 ? Math.min(over, nowY - 17) : over;
+  const isLeft = end.x > width * 0.45;
+  const nowText = `${format.money(nowCents)} ${props.nowLabel}`;
+  const pastText = beforeCents === null ? null : `${format.money(beforeCents)} ${props.beforeLabel}`;
+  const zero = shapes.y.scale(0);
+  const axis = [
+    { x: STEP_MARGIN.left, y: zero },
+    { x: width - STEP_MARGIN.right, y: zero },
+  ];
+  const lines = [axis, shapes.now, ...(shapes.before ? [shapes.before] : [])];
+  const limits = { top: 13, bottom: props.height - STEP_MARGIN.bottom - 6 };
+  const long = nowText.length * LETTER;
+  const now = freeSpot(
+    isLeft ? { from: end.x + 4 - long, to: end.x + 4 } : { from: end.x + 4, to: end.x + 4 + long },
+    end.y - 11,
+    lines,
+    [],
+    limits,
+  );
+  const right = width - STEP_MARGIN.right;
+  const before = pastText
+    ? freeSpot({ from: right - pastText.length * LETTER, to: right }, (past?.y ?? end.y) - 9, lines, [now], limits)
+    : null;
   return (
     <>
-      {past && beforeCents !== null && (
-        <text x={width - STEP_MARGIN.right} y={pastY} textAnchor="end" className="soft halo">
-          {format.money(beforeCents)} {props.beforeLabel}
+      {before && (
+        <text x={right} y={before.y} textAnchor="end" className="soft halo">
+          {pastText}
         </text>
       )}
       <text
         x={end.x + 4}
-        y={nowY}
-        textAnchor={end.x > width * 0.45 ? 'end' : 'start'}
+        y={now.y}
+        textAnchor={isLeft ? 'end' : 'start'}
         className={`strong halo ${nowCents < 0 ? 'loss' : 'gain'}`}
       >
-        {format.money(nowCents)} {props.nowLabel}
+        {nowText}
       </text>
     </>
   );

@@ -30,10 +30,10 @@ export function PerHourViews({ views }: { views: Views }) {
     {
       view: 'After a wage for own hours',
       figure: (
-        <span>
+        <>
           <Money cents={afterWage.leftPerRebuildCents} tone="kept" why={wage === null ? 'no wage set' : 'no hours'} />
-          {afterWage.leftPerRebuildCents !== null && ' a rebuild'}
-        </span>
+          {afterWage.leftPerRebuildCents !== null && <span className="block text-label text-soft">a rebuild</span>}
+        </>
       ),
       made:
         wage === null || afterWage.leftCents === null
@@ -47,18 +47,20 @@ export function PerHourViews({ views }: { views: Views }) {
 }
 
 const COLUMNS: readonly Column<Row>[] = [
-  { id: 'view', header: 'View', heads: true, cell: (row) => row.view },
-  { id: 'figure', header: 'Figure', number: true, cell: (row) => row.figure },
-  { id: 'made', header: 'Made of', cell: (row) => <span className="block min-w-48 text-soft">{row.made}</span> },
   {
-    id: 'n',
-    header: 'Rebuilds',
-    number: true,
+    id: 'view',
+    header: 'View, and what it is made of',
+    heads: true,
     cell: (row) => (
-      <>
-        {row.n}
-        {row.missing > 0 && <span className="block text-label text-soft">{row.missing} without hours</span>}
-      </>
+      <span className="block min-w-40">
+        {row.view}
+        <span className="block text-label text-soft">
+          {row.made}
+          {row.missing > 0 && `; ${row.missing} without hours left out`}
+        </span>
+      </span>
     ),
   },
+  { id: 'figure', header: 'Figure', number: true, cell: (row) => row.figure },
+  { id: 'n', header: 'Rebuilds', number: true, cell: (row) => row.n },
 ];

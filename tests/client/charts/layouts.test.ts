@@ -117,7 +117,13 @@ describe('dots by category', () => {
     expect(new Set(rows[0]?.placed.map((dot) => dot.y)).size).toBe(3);
   });
 
-  test('above 300 dots only the lines are drawn', () => {
+  test('300 rebuilds are dots in every category that they occur in', () => {
+    const many = row(Array.from({ length: 300 }, () => 0));
+    const { rows } = dotStripLayout([many, many], size);
+    expect(rows.map((one) => one.placed.length)).toEqual([300, 300]);
+  });
+
+  test('above 300 rebuilds only the lines are drawn', () => {
     const { rows } = dotStripLayout([row(Array.from({ length: 301 }, () => 0))], size);
     expect(rows[0]?.placed).toEqual([]);
     expect(rows[0]?.middleX).not.toBeNull();

@@ -88,7 +88,7 @@ test('the grid says value, range and count, and too few where it cannot', () => 
   const cells = within(suv ?? document.body).getAllByRole('cell');
   expect(cells.map((one) => one.textContent)).toEqual([
     '$25 /h$20 to $3011 rebuilds',
-    '2 rebuildstoo few to say',
+    '2 rebuildstoo few yet',
     'no rebuilds',
     '$20 /h13 rebuilds',
   ]);

@@ -1,5 +1,5 @@
 import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
-import { Money, Percent } from '../../../ui/figures.tsx';
+import { Percent } from '../../../ui/figures.tsx';
 import { Panel } from '../../../ui/panel.tsx';
 import { type Column, Table } from '../../../ui/table.tsx';
 import { RangeText } from '../range-text.tsx';
@@ -38,12 +38,6 @@ const COLUMNS: readonly Column<Row>[] = [
   },
   { id: 'median', header: 'Typical', number: true, cell: (row) => <Percent rate={row.median} signed /> },
   {
-    id: 'over',
-    header: 'Over',
-    number: true,
-    cell: (row) => <Money cents={row.actualCents - row.estimateCents} signed />,
-  },
-  {
     id: 'surprised',
     header: 'Had a surprise',
     number: true,
@@ -52,7 +46,10 @@ const COLUMNS: readonly Column<Row>[] = [
         <>
           <Percent rate={row.surprises.rate} />
           <span className="block text-label text-soft">
-            {row.surprises.x} of {row.surprises.n}, <RangeText low={row.surprises.lower} high={row.surprises.upper} />
+            {row.surprises.x} of {row.surprises.n}
+          </span>
+          <span className="block text-label text-soft">
+            <RangeText low={row.surprises.lower} high={row.surprises.upper} />
           </span>
         </>
       ),

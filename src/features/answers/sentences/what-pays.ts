@@ -1,6 +1,7 @@
 import type { Comparison, WhatPaysAnswer } from '#shared/contracts/answers-what-pays.ts';
 import type { Formatter } from '#shared/formatter.ts';
 import { capital, counted, ENOUGH, listed, mark, type Said, type Sentence, said, say } from './parts.ts';
+import { wageWords } from './year.ts';
 
 export const PAY_VIEWS = ['per-hour', 'on-cost'] as const;
 export type PayView = (typeof PAY_VIEWS)[number];
@@ -13,7 +14,11 @@ export function fitsOf(answer: WhatPaysAnswer, view: PayView) {
 
 /** A value of a view: `$21 an hour`, `14% on cost`. */
 export function payText(value: number, view: PayView, format: Formatter): string {
-  return view === 'per-hour' ? `${format.money(value, 'never')} an hour` : `${format.percent(value)} on cost`;
+  return `${payFigure(value, view, format)} ${view === 'per-hour' ? 'an hour' : 'on cost'}`;
+}
+
+function payFigure(value: number, view: PayView, format: Formatter): string {
+  return view === 'per-hour' ? format.money(value, 'never') : format.percent(value);
 }
 
 /** Which wrecks pay? Kinds where there are enough of them, else damage and class each by itself. */
@@ -26,17 +31,15 @@ function sentence(answer: WhatPaysAnswer, view: PayView, format: Formatter): Sen
   if (answer.totals.n === 0) return ['Nothing has been finished yet, so nothing can be said of what pays.'];
   if (cells.n === 0) return ['Hours are not known for any finished rebuild, so nothing can be said by the hour.'];
   const kinds = extremes(cells);
-  if (kinds) return say`${capital(nameOf(kinds.best))} ${pays(kinds, view, format)}.`;
-  const parts = [
-    { by: 'By damage', found: extremes(damages) },
-    { by: 'By class', found: extremes(classes) },
+  if (kinds && speaksForMost(cells)) return say`${capital(nameOf(kinds.best))} ${pays(kinds, view, format)}.`;
+  const margins = [
+    { by: 'by damage', found: extremes(damages) },
+    { by: 'by class', found: extremes(classes) },
   ].flatMap(({ by, found }) => (found ? [{ by, found }] : []));
-  if (parts.length > 0) {
-    const clauses = parts.map(
-      ({ by, found }, at) =>
-        say`${at === 0 ? by : `; ${by.toLowerCase()}`}, ${nameOf(found.best)} ${pays(found, view, format)}`,
-    );
-    return [...clauses.flat(), '.'];
+  const [first, second] = margins;
+  if (first) {
+    const rest = second ? say`; ${second.by}, ${bestAndLeast(second.found, view, format, false)}` : [];
+    return [`${capital(first.by)}, `, ...bestAndLeast(first.found, view, format, true), ...rest, '.'];
   }
   const enough = [...cells.groups, ...classes.groups, ...damages.groups].some((group) => !group.isThin);
   return enough ? noDifference(answer, view, format) : tooFew(answer, format);
@@ -44,12 +47,18 @@ function sentence(answer: WhatPaysAnswer, view: PayView, format: Formatter): Sen
 
 type Extremes = { best: Group; worst: Group };
 
-/** First by the lower end, and the one whose upper end is lowest; null where nothing is ranked or no difference shows. */
+/** Do the kinds that have enough rebuilds hold most of all rebuilds? Else the margins say more. */
+function speaksForMost({ groups, n }: Comparison): boolean {
+  const ranked = groups.filter((group) => group.rank !== null);
+  return ranked.reduce((sum, group) => sum + group.n, 0) * 2 > n;
+}
+
+/** First by the lower end, and the one that brings least; null where fewer than two are ranked or no difference shows. */
 export function extremes({ groups, average }: Comparison): Extremes | null {
   const ranked = groups.filter((group) => group.rank !== null);
   if (ranked.length < 2 || !average || average.betweenVariance === 0) return null;
   const best = ranked.reduce((a, b) => ((a.rank ?? 0) < (b.rank ?? 0) ? a : b));
-  const worst = ranked.reduce((a, b) => ((a.pulled?.upper ?? 0) <= (b.pulled?.upper ?? 0) ? a : b));
+  const worst = ranked.reduce((a, b) => ((a.pulled?.value ?? 0) <= (b.pulled?.value ?? 0) ? a : b));
   return best === worst ? null : { best, worst };
 }
 
@@ -59,10 +68,19 @@ export function nameOf(group: Group): string {
   return [group.className, damage].filter(Boolean).join(' with ');
 }
 
+/** `hail pays best ($64 an hour) and flood least ($5)`; the unit is said once, and the verb only first. */
+function bestAndLeast({ best, worst }: Extremes, view: PayView, format: Formatter, isFirst: boolean): Sentence {
+  const short = (group: Group) => group.className ?? group.damageName ?? '';
+  const value = (group: Group) => group.pulled?.value ?? 0;
+  const bare = (group: Group) => mark(payFigure(value(group), view, format));
+  const top = isFirst ? mark(payText(value(best), view, format)) : bare(best);
+  return say`${short(best)} ${isFirst ? 'pays best' : 'best'} (${top}) and ${short(worst)} least (${bare(worst)})`;
+}
+
 function pays({ best, worst }: Extremes, view: PayView, format: Formatter): Sentence {
   const low = worst.pulled?.value ?? 0;
   const verb = low < 0 ? 'loses' : 'brings only';
-  return say`pays best (${mark(payText(best.pulled?.value ?? 0, view, format))}) and ${nameOf(worst)} ${verb} ${mark(payText(low < 0 ? -low : low, view, format))}`;
+  return say`pays best (${mark(payText(best.pulled?.value ?? 0, view, format))}) and ${nameOf(worst)} ${verb} ${mark(payText(Math.abs(low), view, format))}`;
 }
 
 function noDifference(answer: WhatPaysAnswer, view: PayView, format: Formatter): Sentence {
@@ -93,7 +111,7 @@ function cautions(answer: WhatPaysAnswer, view: PayView, format: Formatter): str
     thin > 0 &&
       `${capital(counted(format, thin, 'kind'))} of wreck ${thin === 1 ? 'has' : 'have'} fewer than ${format.number(ENOUGH)} rebuilds: too few yet.`,
     surelyLosing(answer, view),
-    view === 'on-cost' && 'Your own hours are not a cost here.',
+    view === 'per-hour' ? wageWords(answer.views.afterWage, format) : 'Your own hours are not a cost here.',
     `Every way out counts, parted out and scrapped too; unsold ones do not.`,
   );
 }

@@ -1,6 +1,6 @@
 import type { YearAnswer } from '#shared/contracts/answers-year.ts';
 import type { Formatter } from '#shared/formatter.ts';
-import { areCounted, capital, counted, ENOUGH, mark, type Said, type Sentence, said, say } from './parts.ts';
+import { areCounted, capital, counted, ENOUGH, mark, type Said, type Sentence, said, say, words } from './parts.ts';
 
 /** Did the work pay this year? Kept, and by the hour where hours are known. */
 export function sayYear(answer: YearAnswer, format: Formatter): Said {
@@ -61,6 +61,7 @@ function cautions(answer: YearAnswer, format: Formatter): string[] {
     lossCount > 0 && lossWords(lossCount, n, format),
     late.count > 0 &&
       `${capital(counted(format, late.count, 'bill'))} came after the sale (${format.money(late.cents)}) and ${late.count === 1 ? 'is' : 'are'} counted here.`,
+    wageWords(perHour.afterWage, format),
     perHour.own.missingCount > 0 &&
       perHour.own.n > 0 &&
       `Hours are not known for ${counted(format, perHour.own.missingCount)}.`,
@@ -89,5 +90,15 @@ function stillIn({ tiedUp, isRunning, to }: YearAnswer, format: Formatter): stri
 }
 
 function lossWords(losses: number, n: number, format: Formatter): string {
-  return losses === n ? 'Every one of them lost money.' : `${capital(counted(format, losses))} lost money.`;
+  if (losses === n) return n === 1 ? 'It lost money.' : 'Every one of them lost money.';
+  return `${capital(words(format, losses))} of the ${words(format, n)} lost money.`;
+}
+
+/** What the wanted pay for own hours would leave; nothing without a wage or hours. */
+export function wageWords(afterWage: YearAnswer['perHour']['afterWage'], format: Formatter): string | null {
+  const { wantedCentsPerHour: wage, leftCents } = afterWage;
+  if (wage === null || leftCents === null) return null;
+  const amount = format.money(Math.abs(leftCents));
+  const paid = `Paid at the wanted ${format.money(wage)} an hour, your own hours`;
+  return leftCents < 0 ? `${paid} would leave the shop ${amount} short.` : `${paid} would still leave ${amount}.`;
 }

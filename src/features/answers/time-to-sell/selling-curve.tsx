@@ -18,7 +18,9 @@ export function SellingCurve({ answer }: { answer: TimeToSellAnswer }) {
   const drawn = classes
     .filter((one) => !one.isThin)
     .toSorted((a, b) => b.n - a.n)
-    .slice(0, CLASSES_DRAWN);
+    .slice(0, CLASSES_DRAWN)
+    // Those that end at the same height are labelled from the longest down, so that no lead crosses another.
+    .toSorted((a, b) => (b.steps.at(-1)?.days ?? 0) - (a.steps.at(-1)?.days ?? 0));
   const groups = [lineOf('All together', overall), ...drawn.map((one) => lineOf(capital(one.name), one))];
   const undrawn = classes.length - drawn.length;
   const note =

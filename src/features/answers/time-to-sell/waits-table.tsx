@@ -20,7 +20,7 @@ export function WaitsTable({ waits }: { waits: TimeToSellAnswer['waits'] }) {
   return (
     <Panel
       title="Before it is listed"
-      subtitle="Typical days in each stage, over rebuilds that have both days in order."
+      subtitle="Typical days in each stage, and how many rebuilds have both of its days in order."
     >
       <Table caption="Days in each stage" rows={rows} columns={COLUMNS} rowKey={(row) => row.wait} />
     </Panel>
@@ -35,11 +35,12 @@ const COLUMNS: readonly Column<Row>[] = [
     cell: (row) => (
       <>
         {WORDS[row.wait].name}
-        <span className="block text-label text-soft">{WORDS[row.wait].from}</span>
+        <span className="block text-label text-soft">
+          {WORDS[row.wait].from}, {row.n}
+        </span>
       </>
     ),
   },
-  { id: 'n', header: 'Rebuilds', number: true, cell: (row) => row.n },
   {
     id: 'median',
     header: 'Typical',

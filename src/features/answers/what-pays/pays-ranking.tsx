@@ -59,7 +59,7 @@ function useColumns(view: PayView): readonly Column<Group>[] {
   const path = useShopPath();
   const isHour = view === 'per-hour';
   return useMemo(() => {
-    const write = (value: number) => (isHour ? format.perHour(value) : format.percent(value, 1));
+    const write = (value: number) => (isHour ? format.money(value, 'never') : format.percent(value, 1));
     const gray = (row: Group, text: string) => <span className={row.isThin ? 'text-soft' : ''}>{text}</span>;
     return [
       { id: 'rank', header: 'Rank', number: true, cell: (row) => row.rank ?? '' },
@@ -76,7 +76,7 @@ function useColumns(view: PayView): readonly Column<Group>[] {
       { id: 'n', header: 'Rebuilds', number: true, cell: (row) => row.n },
       {
         id: 'value',
-        header: 'Pulled to average',
+        header: isHour ? 'Kept an hour, pulled' : 'On cost, pulled',
         number: true,
         cell: (row) => (row.isThin ? gray(row, 'too few yet') : <strong>{write(figureOf(row).value)}</strong>),
       },

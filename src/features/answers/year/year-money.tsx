@@ -43,7 +43,16 @@ export function YearMoney({ answer }: { answer: YearAnswer }) {
 }
 
 const COLUMNS: readonly Column<Row>[] = [
-  { id: 'what', header: 'Measure', heads: true, cell: (row) => row.what },
+  {
+    id: 'what',
+    header: 'Measure, and what it is made of',
+    heads: true,
+    cell: (row) => (
+      <span className="block min-w-44">
+        {row.what}
+        <span className="block text-label text-soft">{row.note}</span>
+      </span>
+    ),
+  },
   { id: 'figure', header: 'Figure', number: true, cell: (row) => row.figure },
-  { id: 'note', header: 'Made of', cell: (row) => <span className="block min-w-44 text-soft">{row.note}</span> },
 ];

@@ -40,6 +40,7 @@ export function YearPictures({ answer }: { answer: YearAnswer }) {
           nowLabel={answer.isRunning ? 'this year' : `in ${answer.year}`}
           beforeLabel={`in all of ${before?.year ?? ''}`}
           format={format}
+          height={Math.max(300, moneyRows(money).length * 27 - 6)}
         />
       </Panel>
       <Panel title="Where each sale dollar went" subtitle={moneySubtitle(answer, format)}>

@@ -1,0 +1,213 @@
+import type { ContingencyAnswer } from '#shared/contracts/answers-contingency.ts';
+import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
+import type { Head } from '#shared/contracts/answers-parts.ts';
+import type { TimeToSellAnswer } from '#shared/contracts/answers-time-to-sell.ts';
+import type { YearAnswer } from '#shared/contracts/answers-year.ts';
+
+/** Replies as the server sends them, whole and plausible; a test says only what it is about. */
+
+export const idOf = (text: string) => text.padEnd(22, '0');
+export const rebuild = (tag: string, name = '2015 midsize sedan') => ({ id: idOf(tag), tag, name });
+
+export function head(rebuildCount = 12): Head {
+  return {
+    asOf: '2026-11-30',
+    rebuildCount,
+    filters: {
+      yearOf: 'left',
+      years: [
+        { year: 2025, from: '2025-01-01', to: '2025-12-31', count: 5 },
+        { year: 2026, from: '2026-01-01', to: '2026-12-31', count: 7 },
+      ],
+      classes: [{ id: idOf('suv'), name: 'SUV', count: rebuildCount }],
+      damages: [{ id: idOf('hail'), name: 'hail', count: rebuildCount }],
+      seen: { yes: rebuildCount, no: 0, unknown: 0 },
+    },
+    leftOut: [],
+  };
+}
+
+const hours = (own: number) => own * 3600;
+
+export function yearReply(changes: Partial<YearAnswer> = {}): YearAnswer {
+  const kept = 1_842_000;
+  const tiedUp = { on: '2026-11-30', rebuildCount: 3, cents: 1_427_500 };
+  return {
+    ...head(),
+    year: 2026,
+    from: '2026-01-01',
+    to: '2026-12-31',
+    through: '2026-11-30',
+    isRunning: true,
+    exitCount: 9,
+    soldCount: 9,
+    n: 9,
+    lossCount: 0,
+    profitCents: kept,
+    overheadCents: 0,
+    keptCents: kept,
+    perHour: perHour(9, kept, 853),
+    before: null,
+    steps: { every: 'change', now: [], before: [] },
+    money: { proceedsCents: 9_680_000, purchaseCents: 7_838_000, categories: [], overheadCents: 0, keptCents: kept },
+    late: { count: 0, cents: 0, rebuilds: [] },
+    tiedUp: { on: '2026-11-30', rebuildCount: 0, cents: 0 },
+    returns: {
+      pooled: 0.4,
+      n: 9,
+      median: 0.3,
+      hasSeveral: false,
+      undatedCount: 0,
+      daysHeld: { n: 9, median: 120 },
+      onCost: { n: 9, pooled: 0.2, median: 0.18, profitCents: kept, costCents: 7_838_000 },
+    },
+    rebuilds: [],
+    rebuildTotal: 0,
+    years: [2025, 2026].map((year) => ({
+      year,
+      from: `${year}-01-01`,
+      to: `${year}-12-31`,
+      exitCount: 9,
+      soldCount: 9,
+      noPurchaseCount: 0,
+      profitCents: kept,
+      overheadCents: 0,
+      keptCents: kept,
+      lateCount: 0,
+      lateCents: 0,
+      tiedUp,
+    })),
+    ...changes,
+  };
+}
+
+/** Three views where `n` rebuilds kept `profitCents` over so many own hours; `missing` have none. */
+export function perHour(n: number, profitCents: number, own: number, missing = 0): YearAnswer['perHour'] {
+  const pooled = own === 0 ? null : profitCents / own;
+  const counts = { n, missingCount: missing };
+  return {
+    own: { ...counts, profitCents, ownSeconds: hours(own), pooledCents: pooled, medianCents: pooled },
+    all: { ...counts, profitCents, paidLaborCents: 0, seconds: hours(own), pooledCents: pooled },
+    afterWage: { ...counts, wantedCentsPerHour: null, leftCents: null, leftPerRebuildCents: null },
+  };
+}
+
+type Category = OverrunsAnswer['categories'][number];
+const NO_DOTS = { dots: [], bins: [] };
+
+/** A category with `n` planned rebuilds: 1,000 planned for each and `rate` over. */
+export function category(name: string, n: number, rate: number, planned = 100_000): Category {
+  const estimateCents = planned * n;
+  return {
+    categoryId: idOf(name.replaceAll(/\W/g, '')),
+    name,
+    ...spread(n, rate),
+    estimateCents,
+    actualCents: Math.round(estimateCents * (1 + rate)),
+    ...NO_DOTS,
+    parts: { n, overCents: Math.round(estimateCents * rate), surpriseCents: 0, knownCents: 0, surpriseShare: null },
+    unbudgetedCount: 0,
+    unbudgetedCents: 0,
+  };
+}
+
+function spread(n: number, rate: number) {
+  const value = n === 0 ? null : rate;
+  return {
+    n,
+    pooled: value,
+    median: value,
+    mean: value,
+    q10: value,
+    q25: value,
+    q75: value,
+    q90: value,
+    isThin: n < 5,
+  };
+}
+
+export function overrunsReply(n: number, rate: number, categories: Category[] = []): OverrunsAnswer {
+  const total = category('all', n, rate);
+  return {
+    ...head(),
+    marks: 'each',
+    total,
+    categories,
+    hours: { ...spread(0, 0), plannedSeconds: 0, actualSeconds: 0, ...NO_DOTS },
+    surprises: {
+      ...{ n: 0, x: 0, rate: null, lower: null, upper: null },
+      unknownCount: 0,
+      unforeseenCents: 0,
+      workCents: 0,
+      shareOfWork: null,
+      categories: [],
+    },
+    seen: [],
+    years: [],
+  };
+}
+
+export function timeToSellReply(overall: Partial<TimeToSellAnswer['overall']> = {}): TimeToSellAnswer {
+  const never = { unsold: null, lower: null, upper: null };
+  return {
+    ...head(),
+    overall: {
+      n: 12,
+      soldCount: 10,
+      unsoldCount: 2,
+      otherExitCount: 0,
+      median: { days: 28, lower: 20, upper: 41 },
+      at30: { unsold: 0.46, lower: 0.2, upper: 0.7 },
+      at60: { unsold: 0.21, lower: 0.05, upper: 0.4 },
+      at90: never,
+      isThin: false,
+      longestDays: 88,
+      steps: [{ days: 28, atRiskCount: 12, soldCount: 6, unsold: 0.5, lower: 0.2, upper: 0.7 }],
+      isThinned: false,
+      ...overall,
+    },
+    classes: [],
+    comparison: null,
+    waits: [],
+    unsold: { on: '2026-11-30', total: 0, cents: 0, rebuilds: [] },
+  };
+}
+
+type Score = ContingencyAnswer['backTest']['scores'][number];
+export const score = (rule: Score['rule'], x: number, n: number, shortCents = 0): Score => ({
+  ...{ rule, n, x, rate: n === 0 ? null : x / n, lower: n === 0 ? null : 0.68, upper: n === 0 ? null : 0.91 },
+  shortCents,
+  unusedCents: 200_000,
+  reserveCents: 300_000,
+});
+
+export function contingencyReply(changes: Partial<ContingencyAnswer> = {}): ContingencyAnswer {
+  return {
+    ...head(41),
+    level: '4/5',
+    estimateCents: 10_000_000,
+    overrunCents: 1_500_000,
+    percent: {
+      ...{ n: 41, k: 34, isAttainable: true, guarantee: 34 / 42, uplift: 0.2317, percent: 24 },
+      taken: { ...rebuild('B-033'), estimateCents: 600_000, overrunCents: 139_020 },
+    },
+    twoPart: {
+      ...{ n: 38, k: 32, isAttainable: true, guarantee: 32 / 39, creepPercent: 12, creepCents: 1_100_000 },
+      estimateCents: 9_400_000,
+      flatCents: 44_911,
+      adoptFlatCents: 45_000,
+    },
+    backTest: {
+      skippedCount: 6,
+      tooFewCount: 0,
+      scores: [score('percent', 29, 35, 384_000), score('flat 10', 17, 35)],
+    },
+    twoPartBackTest: { skippedCount: 6, tooFewCount: 0, scores: [score('two-part', 28, 33)] },
+    trail: [],
+    trailTotal: 0,
+    damages: [],
+    thisYear: { year: 2026, rule: null },
+    nextYear: { year: 2027, rule: null },
+    ...changes,
+  };
+}

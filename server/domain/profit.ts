@@ -1,5 +1,6 @@
 import { daysBetween } from '#shared/day.ts';
 import type { RebuildFacts } from './facts.ts';
+import { remembered } from './remembered.ts';
 import { completed, type Priced, paidCents, priced } from './sets.ts';
 import { mean, median, ratio, sum } from './statistics.ts';
 
@@ -41,7 +42,7 @@ export interface Profit {
  * What one rebuild left (definitions §2): A = Σ entries, T = purchase + A, profit = proceeds − T,
  * return on cost = profit ÷ T. Example: bought for 5,000, work 3,000, sold for 10,000: profit 2,000, 25 %.
  */
-export function rebuildProfit(rebuild: Priced): RebuildProfit {
+export const rebuildProfit = remembered((rebuild: Priced): RebuildProfit => {
   const workCents = paidCents(rebuild);
   const costCents = rebuild.purchaseCents + workCents;
   const profitCents = rebuild.exit.proceedsCents - costCents;
@@ -53,7 +54,7 @@ export function rebuildProfit(rebuild: Priced): RebuildProfit {
     returnOnCost: ratio(profitCents, costCents),
     daysHeld: rebuild.boughtOn === null ? null : daysBetween(rebuild.boughtOn, rebuild.exit.on),
   };
-}
+});
 
 /**
  * The shop's profit over its completed rebuilds (definitions §2). Pooled return on cost = Σ profit ÷ Σ T,

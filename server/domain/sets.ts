@@ -1,5 +1,6 @@
 import { type Day, dayNumber } from '#shared/day.ts';
 import type { RebuildFacts } from './facts.ts';
+import { remembered } from './remembered.ts';
 import { byCodePoint } from './text-order.ts';
 
 /** A rebuild that has left the shop (C of definitions §1 and §18.1). */
@@ -32,31 +33,31 @@ export function priced(facts: readonly RebuildFacts[]): Priced[] {
 }
 
 /** A: Σ cents paid, all entries. */
-export function paidCents(rebuild: RebuildFacts): number {
+export const paidCents = remembered((rebuild: RebuildFacts): number => {
   let total = 0;
   for (const category of rebuild.categories.values()) total += category.paidCents;
   return total;
-}
+});
 
 /** B: Σ cents that planning must expect (chosen extras left out, free things at market value). */
-export function planningCents(rebuild: RebuildFacts): number {
+export const planningCents = remembered((rebuild: RebuildFacts): number => {
   let total = 0;
   for (const category of rebuild.categories.values()) total += category.planningCents;
   return total;
-}
+});
 
 /** E: Σ cents of the locked estimate; 0 = none. */
-export function estimateCents(rebuild: RebuildFacts): number {
+export const estimateCents = remembered((rebuild: RebuildFacts): number => {
   let total = 0;
   for (const cents of rebuild.estimates.values()) total += cents;
   return total;
-}
+});
 
 /**
  * Was the estimate written over with what the work came to (§18.1)? True when three or more categories were
  * planned and every one of them cost its plan to the cent: such a plan says nothing about overruns.
  */
-export function isOverwritten(rebuild: RebuildFacts): boolean {
+export const isOverwritten = remembered((rebuild: RebuildFacts): boolean => {
   let planned = 0;
   for (const [category, cents] of rebuild.estimates) {
     if (cents === 0) continue;
@@ -64,7 +65,7 @@ export function isOverwritten(rebuild: RebuildFacts): boolean {
     planned += 1;
   }
   return planned >= 3;
-}
+});
 
 /** Set K of §18.3: completed, with an estimate that was not written over. */
 export function planned(facts: readonly RebuildFacts[]): Completed[] {

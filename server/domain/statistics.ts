@@ -30,6 +30,11 @@ export function quantile(values: readonly number[], p: number): number | null {
   return values.length === 0 ? null : simple.quantile(values, p);
 }
 
+/** Several quantiles at once, each as `quantile` gives it, for less than one by one. null = no values. */
+export function quantiles(values: readonly number[], ps: readonly number[]): (number | null)[] {
+  return values.length === 0 ? ps.map(() => null) : simple.quantile([...values], [...ps]);
+}
+
 /** Standard deviation with n − 1. null = fewer than two values; exactly 0 when all are equal. */
 export function sampleDeviation(values: readonly number[]): number | null {
   if (values.length < 2) return null;

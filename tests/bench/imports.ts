@@ -57,6 +57,8 @@ function writeLedger(file: string, rebuilds: readonly InventedRebuild[], lines: 
 }
 
 async function importThroughApi(origin: string, file: string, rows: number): Promise<number> {
+  // The plain script blocks this process for seconds; let it notice connections that the server closed meanwhile.
+  await wait(200);
   const { call } = await signUp(origin);
   const form = new FormData();
   form.append('file', new Blob([readFileSync(file)]), 'ledger.csv');

@@ -24,10 +24,9 @@ interface Found {
 export function categoryOverruns(input: AnswerInput, rebuilds: readonly ShopRebuild[], isBinned: boolean): Categories {
   const found = new Map<string, Found>();
   for (const rebuild of rebuilds) {
-    for (const name of new Set([...rebuild.estimates.keys(), ...rebuild.categories.keys()])) {
-      const category = found.get(name) ?? { planned: [], told: [], surprises: [], unbudgeted: [] };
-      found.set(name, category);
-      take(category, rebuild, name);
+    for (const name of rebuild.estimates.keys()) take(categoryIn(found, name), rebuild, name);
+    for (const name of rebuild.categories.keys()) {
+      if (!rebuild.estimates.has(name)) take(categoryIn(found, name), rebuild, name);
     }
   }
   const idOf = new Map(input.shop.categories.map(({ id, name }) => [name, id]));
@@ -47,6 +46,14 @@ export function categoryOverruns(input: AnswerInput, rebuilds: readonly ShopRebu
         unbudgetedCents: sum(unbudgeted),
       };
     });
+}
+
+function categoryIn(found: Map<string, Found>, name: string): Found {
+  const known = found.get(name);
+  if (known) return known;
+  const category: Found = { planned: [], told: [], surprises: [], unbudgeted: [] };
+  found.set(name, category);
+  return category;
 }
 
 function take(category: Found, rebuild: ShopRebuild, name: string): void {

@@ -1,4 +1,5 @@
 import { useQueryClient } from '@tanstack/react-query';
+import { ApiProblem } from '../lib/api-problem.ts';
 import { moveSession } from '../lib/session.ts';
 import { Dialog } from '../ui/dialog.tsx';
 import { SignInForm } from './sign-in-form.tsx';
@@ -9,7 +10,15 @@ export function SessionEnded(props: { email: string; shopId: string; onDone: () 
   const client = useQueryClient();
   const onSignedIn = async () => {
     // A new session may start in another shop; move it first, or the page would be taken away.
-    await moveSession(shopId);
+    const isMember = await moveSession(shopId).then(
+      () => true,
+      (refused: unknown) => {
+        if (refused instanceof ApiProblem && refused.status === 404) return false;
+        throw refused;
+      },
+    );
+    // Taken out of this shop meanwhile: what stands here cannot be saved any more.
+    if (!isMember) return location.assign('/');
     onDone();
     await client.invalidateQueries();
   };

@@ -82,4 +82,16 @@ describe('members', () => {
     expect(again.body.errors[0].pointer).toBe('/email');
     expect((await bea.post('/api/people/invitations', { email: 'x@y.example', role: 'owner' })).status).toBe(403);
   });
+
+  it('tells somebody who was taken out of their only shop why they cannot sign in', async () => {
+    const api = await testApi();
+    const ada = await api.owner();
+    const bea = await api.member(ada, 'bookkeeper');
+    const { id } = (await bea.get('/api/session')).body.user as { id: string };
+    await ada.request('delete', `/api/people/${id}`).set('If-Match', '"1"');
+    const reply = await api.anyone.post('/api/session', { email: bea.email, password: PASSWORD });
+    expect(reply.status).toBe(403);
+    expect(reply.body).toMatchObject({ detail: 'You belong to no shop any more. Ask for an invitation to one.' });
+    expect(reply.headers['set-cookie']).toBeUndefined();
+  });
 });

@@ -86,7 +86,6 @@ function HoursDeskPage() {
         }
       />
       <section className="panel">
-        <HoursFilters filters={filters} set={set} rebuilds={rebuilds} workers={workers} />
         <HoursDesk
           filters={filters}
           shopId={shop.id}
@@ -94,6 +93,7 @@ function HoursDeskPage() {
           canWrite={canWrite}
           rebuilds={rebuilds}
           workers={workers}
+          filterBar={<HoursFilters filters={filters} set={set} rebuilds={rebuilds} workers={workers} />}
           empty={
             isFiltered ? (
               <EmptyState title="Nothing matches" action={<Button onClick={clear}>Show everything</Button>}>

@@ -30,7 +30,6 @@ export function LedgerPage() {
     <>
       <LedgerAnswer filters={filters} isFiltered={isFiltered} />
       <section className="panel">
-        <LedgerFilters filters={filters} set={set} rebuilds={rebuilds} categories={categories} />
         <LedgerDesk
           filters={filters}
           shopId={shop.id}
@@ -38,6 +37,7 @@ export function LedgerPage() {
           canWrite={role === 'owner' || role === 'bookkeeper'}
           rebuilds={rebuilds}
           categories={categories}
+          filterBar={<LedgerFilters filters={filters} set={set} rebuilds={rebuilds} categories={categories} />}
           empty={
             isFiltered ? (
               <EmptyState title="Nothing matches" action={<Button onClick={clear}>Show everything</Button>}>

@@ -48,28 +48,27 @@ function Rebuild({ rebuildId }: { rebuildId: string }) {
     <>
       <RebuildHead detail={detail} shopId={shop.id} />
       <CautionsPanel detail={detail} />
-      <Panels wide>
-        <Panel
-          title="Plan against actual"
-          subtitle="The locked plan is the outline. Hatch: surprises. Chosen extras stand apart."
-        >
-          <PlanAgainstActual detail={detail} />
-        </Panel>
+      <Panel
+        title="Plan against actual"
+        subtitle="Outline: the locked plan. Ink: spent as foreseen. Rust: over. Hatch: surprises. Chosen extras stand apart."
+        className="mb-6"
+      >
+        <PlanAgainstActual detail={detail} />
+      </Panel>
+      <Panels>
         <Panel title="What it came to">
           <MoneyLines detail={detail} />
-        </Panel>
-      </Panels>
-      <Panel title="Its dates" className="mb-6">
-        <DatesForm key={generation} {...part} />
-      </Panel>
-      <Panels wide>
-        <Panel title="Estimate" subtitle="Locked before work starts; revisions are kept beside it.">
-          <EstimatesPanel detail={detail} categories={categories} canWrite={canWrite} />
         </Panel>
         <Panel title="Sale, or another way out">
           <LeavingForm key={generation} {...part} />
         </Panel>
       </Panels>
+      <Panel title="Its dates" className="mb-6">
+        <DatesForm key={generation} {...part} />
+      </Panel>
+      <Panel title="Estimate" subtitle="Locked before work starts; revisions are kept beside it." className="mb-6">
+        <EstimatesPanel detail={detail} categories={categories} canWrite={canWrite} />
+      </Panel>
       <Panel title="Entries" className="mb-6">
         <LedgerDesk
           {...desk}

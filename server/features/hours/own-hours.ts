@@ -18,7 +18,7 @@ const LATEST = 50;
 export async function listOwnHours(scope: ShopScope, userId: string): Promise<OwnHours[]> {
   const rows = namedHours(scope).where('w.user_id', userId).whereNull('hours.voided_at').limit(LATEST);
   const zone = await zoneOf(scope);
-  return (await readHours(rows)).map((row) => asOwn(row, zone));
+  return (await readHours(rows)).map((row) => asOwn(row, userId, zone));
 }
 
 export async function logOwnHours(books: Books, actor: Actor, body: NewOwnHours, today: Day): Promise<HoursEntry> {
@@ -33,14 +33,14 @@ export async function ownHoursOfToday(scope: ShopScope, userId: string, id: stri
   const row = await hoursRow(scope, id);
   const worker = row.workerId ? await scope.find<{ userId: string | null }>('workers', row.workerId) : null;
   if (worker?.userId !== userId) throw new ProblemError(404, { detail: 'There is no such thing in this shop.' });
-  if (!isOfToday(row, await zoneOf(scope))) {
-    throw new ProblemError(403, { detail: 'These were logged on an earlier day. Ask whoever keeps the books.' });
+  if (!isOwnOfToday(row, userId, await zoneOf(scope))) {
+    throw new ProblemError(403, { detail: 'These were not logged by you today. Ask whoever keeps the books.' });
   }
   return row;
 }
 
-export async function ownRow(scope: ShopScope, id: string): Promise<OwnHours> {
-  return asOwn(await hoursRow(scope, id), await zoneOf(scope));
+export async function ownRow(scope: ShopScope, userId: string, id: string): Promise<OwnHours> {
+  return asOwn(await hoursRow(scope, id), userId, await zoneOf(scope));
 }
 
 /** Own hours go on a rebuild that is still in the shop. */
@@ -57,15 +57,15 @@ export function refuseAhead(workedOn: Day | undefined, today: Day): void {
   if (workedOn && workedOn > today) throw impossible('/workedOn', 'That day is still to come.');
 }
 
-function asOwn(row: FoundHours, zone: string): OwnHours {
+function asOwn(row: FoundHours, userId: string, zone: string): OwnHours {
   const { id, rebuildId, rebuildTag, rebuildName, workedOn, seconds, task, version } = row;
-  const canChange = !row.voidedAt && isOfToday(row, zone);
+  const canChange = !row.voidedAt && isOwnOfToday(row, userId, zone);
   return { id, rebuildId, rebuildTag, rebuildName, workedOn, seconds, task, version, canChange };
 }
 
 // Both by the machine's clock, which stamps what is written; the demo shop's own day stands still.
-const isOfToday = (row: FoundHours, zone: string) =>
-  dayInZone(new Date(row.createdAt), zone) === dayInZone(new Date(), zone);
+const isOwnOfToday = (row: FoundHours, userId: string, zone: string) =>
+  row.createdBy === userId && dayInZone(new Date(row.createdAt), zone) === dayInZone(new Date(), zone);
 
 async function zoneOf({ db, shopId }: ShopScope): Promise<string> {
   const shop = await db('shops').where({ id: shopId }).first<{ time_zone: string }>('time_zone');

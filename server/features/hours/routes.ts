@@ -47,7 +47,7 @@ const ownRoutes: Route[] = [
     const today = await ctx.today();
     return write(ctx, { action: 'log own hours', subject: 'hours' }, async (books) => {
       const hours = await logOwnHours(books, ctx.actor, ctx.body, today);
-      const reply = await ownRow(books.scope, hours.id);
+      const reply = await ownRow(books.scope, ctx.actor.userId, hours.id);
       return { id: hours.id, before: null, after: hours, reply, version: hours.version };
     });
   }),
@@ -59,7 +59,7 @@ const ownRoutes: Route[] = [
       await refuseClosed(books, ctx.body.rebuildId);
       refuseAhead(ctx.body.workedOn, today);
       const after = await books.hours.update(before.id, ctx.ifMatch ?? 0, ctx.body);
-      const reply = await ownRow(books.scope, after.id);
+      const reply = await ownRow(books.scope, ctx.actor.userId, after.id);
       return { id: after.id, before, after, reply, version: after.version };
     });
   }),
@@ -68,7 +68,7 @@ const ownRoutes: Route[] = [
     write(ctx, { action: 'void own hours', subject: 'hours' }, async (books) => {
       const before = await ownHoursOfToday(books.scope, ctx.actor.userId, ctx.params.hoursId);
       const after = await books.hours.void(before.id, ctx.ifMatch ?? 0, ctx.body.reason);
-      const reply = await ownRow(books.scope, after.id);
+      const reply = await ownRow(books.scope, ctx.actor.userId, after.id);
       return { id: after.id, before, after, reply, version: after.version };
     }),
   ),

@@ -26,13 +26,15 @@ type Props = {
   canWrite: boolean;
   rebuilds: readonly PickOption[];
   workers: readonly Option[];
+  /** Stands between the fast line and the list. */
+  filterBar?: ReactNode;
   empty: ReactNode;
 };
 
 type Open = { kind: 'change' | 'void'; hours: HoursRow } | { kind: 'again'; typed: HoursForm };
 
 /** The fast line of hours, what is not saved yet, and the rows that match, a hundred at a time. */
-export function HoursDesk({ filters, shopId, today, rebuildId, canWrite, rebuilds, workers, empty }: Props) {
+export function HoursDesk({ filters, shopId, today, rebuildId, canWrite, rebuilds, workers, filterBar, empty }: Props) {
   const hours = useInfiniteQuery(hoursQuery(filters));
   const { add } = useHoursWrites();
   const [open, setOpen] = useState<Open | null>(null);
@@ -51,7 +53,8 @@ export function HoursDesk({ filters, shopId, today, rebuildId, canWrite, rebuild
   return (
     <>
       {canWrite && (
-        <div className="no-print mb-6">
+        <div className="entry-desk no-print">
+          <h2 className="mb-3 text-lead font-[660]">Add hours</h2>
           <HoursRowForm start={start} rebuilds={rebuildId ? null : rebuilds} workers={workers} onSend={outbox.send} />
         </div>
       )}
@@ -65,6 +68,7 @@ export function HoursDesk({ filters, shopId, today, rebuildId, canWrite, rebuild
           setOpen({ kind: 'again', typed });
         }}
       />
+      {filterBar}
       {hours.isPending && <LoadingState label="Loading hours" />}
       {hours.isError && <ErrorState error={hours.error} onRetry={() => void hours.refetch()} />}
       {hours.isSuccess && rows.length === 0 && empty}

@@ -1,5 +1,6 @@
 import { useCallback } from 'react';
 import type { HoursQuery } from '#shared/contracts/hours.ts';
+import { FilterBar } from '../../ui/filter-bar.tsx';
 import { FindField } from '../../ui/find-field.tsx';
 import { PickField, type PickOption } from '../../ui/pick-field.tsx';
 import { DayField, type Option, SelectField } from '../../ui/text-field.tsx';
@@ -22,10 +23,11 @@ const VOIDS = [
 
 /** Which hours are shown; all of it stands in the address. */
 export function HoursFilters({ filters, set, rebuilds, workers }: Props) {
+  const count = Object.keys(filters).filter((name) => name !== 'sort' && name !== 'order').length;
   const onFind = useCallback((find: string) => set({ find }), [set]);
   const people = [...workers, { value: 'none', label: 'Not said' }];
   return (
-    <div role="search" aria-label="Show which hours" className="filter-bar no-print">
+    <FilterBar label="Show which hours" count={count}>
       <FindField label="Find" value={filters.find ?? ''} onFind={onFind} placeholder="Doing what" />
       <PickField
         label="Rebuild"
@@ -57,6 +59,6 @@ export function HoursFilters({ filters, set, rebuilds, workers }: Props) {
         onChange={(event) => set({ void: event.target.value })}
         options={VOIDS}
       />
-    </div>
+    </FilterBar>
   );
 }

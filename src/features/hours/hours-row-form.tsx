@@ -23,8 +23,9 @@ export function HoursRowForm({ start, rebuilds, workers, onSend }: Props) {
   const onSubmit = form.handleSubmit(() => {
     const values = form.getValues();
     onSend(values);
-    form.reset({ ...values, seconds: '', task: '' });
+    // Before the reset, which forgets where the fields are.
     form.setFocus('seconds');
+    form.reset({ ...values, seconds: '', task: '' });
   });
   return (
     <form

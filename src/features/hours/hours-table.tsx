@@ -4,7 +4,7 @@ import type { HoursRow } from '#shared/contracts/hours.ts';
 import { DataTable } from '../../ui/data-table.tsx';
 import { Hours, Nothing } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
-import { Menu } from '../../ui/menu.tsx';
+import { RowActs } from '../../ui/row-acts.tsx';
 import type { Column } from '../../ui/table.tsx';
 
 type Props = {
@@ -67,18 +67,15 @@ export function HoursTable({ rows, shopId, ofOne = false, onChange, onVoid }: Pr
       {
         id: 'act',
         header: <span className="sr-only">Change</span>,
-        width: 'w-16',
+        width: 'w-32',
         hidden: onChange === null,
         cell: (row) =>
           row.voidedAt === null &&
           onChange && (
-            <Menu
-              plain
-              label={<span aria-label={`Change the hours on ${row.rebuildTag}`}>···</span>}
-              items={[
-                { label: 'Change', onSelect: () => onChange(row) },
-                { label: 'Void', onSelect: () => onVoid(row) },
-              ]}
+            <RowActs
+              of={`${row.rebuildTag}, ${row.workedOn ?? 'no day'}`}
+              onChange={() => onChange(row)}
+              onVoid={() => onVoid(row)}
             />
           ),
       },

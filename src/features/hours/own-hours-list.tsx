@@ -12,11 +12,15 @@ import { VoidDialog } from '../../ui/void-dialog.tsx';
 import { useOwnHoursWrites } from './mutations.ts';
 import { ownHoursQuery } from './queries.ts';
 
+/** How many stand there before older ones are asked for. */
+const FIRST = 8;
+
 /** A person's own latest hours; those logged today can be changed or voided. */
 export function OwnHoursList() {
   const format = useFormatter();
   const hours = useQuery(ownHoursQuery());
   const [open, setOpen] = useState<{ kind: 'change' | 'void'; row: OwnHours } | null>(null);
+  const [isWhole, setWhole] = useState(false);
   if (hours.isPending) return <LoadingState label="Loading your hours" lines={3} />;
   if (hours.isError) return <ErrorState error={hours.error} onRetry={() => void hours.refetch()} />;
   if (hours.data.length === 0)
@@ -24,7 +28,7 @@ export function OwnHoursList() {
   return (
     <>
       <ul className="grid">
-        {hours.data.map((row) => (
+        {(isWhole ? hours.data : hours.data.slice(0, FIRST)).map((row) => (
           <li key={row.id} className="own-hours">
             <span className="min-w-0">
               <span className="font-[640]">
@@ -49,6 +53,11 @@ export function OwnHoursList() {
           </li>
         ))}
       </ul>
+      {!isWhole && hours.data.length > FIRST && (
+        <Button className="touch justify-self-start" onClick={() => setWhole(true)}>
+          Show older ones
+        </Button>
+      )}
       {open?.kind === 'change' && <ChangeLength row={open.row} onClose={() => setOpen(null)} />}
       {open?.kind === 'void' && <VoidOwn row={open.row} onClose={() => setOpen(null)} />}
     </>

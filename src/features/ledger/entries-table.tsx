@@ -4,7 +4,7 @@ import type { EntryRow } from '#shared/contracts/ledger.ts';
 import { DataTable } from '../../ui/data-table.tsx';
 import { Money, Nothing } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
-import { Menu } from '../../ui/menu.tsx';
+import { RowActs } from '../../ui/row-acts.tsx';
 import type { Column } from '../../ui/table.tsx';
 import { kindOf } from './entry-form.ts';
 
@@ -43,18 +43,15 @@ export function EntriesTable({ rows, shopId, ofOne = false, onChange, onVoid }: 
       {
         id: 'act',
         header: <span className="sr-only">Change</span>,
-        width: 'w-16',
+        width: 'w-32',
         hidden: onChange === null,
         cell: (row) =>
           row.voidedAt === null &&
           onChange && (
-            <Menu
-              plain
-              label={<span aria-label={`Change ${row.what ?? row.categoryName}`}>···</span>}
-              items={[
-                { label: 'Change', onSelect: () => onChange(row) },
-                { label: 'Void', onSelect: () => onVoid(row) },
-              ]}
+            <RowActs
+              of={`${row.what ?? row.categoryName}, ${row.datedOn ?? 'no day'}`}
+              onChange={() => onChange(row)}
+              onVoid={() => onVoid(row)}
             />
           ),
       },

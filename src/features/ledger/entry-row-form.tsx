@@ -34,8 +34,9 @@ export function EntryRowForm({ start, rebuilds, categories, vendors, onSend }: P
     const values = form.getValues();
     onSend(values);
     const { datedOn, rebuildId, categoryId } = values;
-    form.reset({ ...EMPTY_ENTRY, datedOn, rebuildId, categoryId });
+    // Before the reset, which forgets where the fields are.
     form.setFocus('cents');
+    form.reset({ ...EMPTY_ENTRY, datedOn, rebuildId, categoryId });
   });
 
   return (

@@ -28,6 +28,8 @@ export type LedgerDeskProps = {
   canWrite: boolean;
   rebuilds: readonly PickOption[];
   categories: readonly PickOption[];
+  /** Stands between the fast line and the list. */
+  filterBar?: ReactNode;
   /** What stands here when nothing matches. */
   empty: ReactNode;
 };
@@ -40,7 +42,7 @@ type Open =
 
 /** The fast line, what is not saved yet, and the lines that match, a hundred at a time. */
 export function LedgerDesk(props: LedgerDeskProps) {
-  const { filters, shopId, today, rebuildId, canWrite, rebuilds, categories, empty } = props;
+  const { filters, shopId, today, rebuildId, canWrite, rebuilds, categories, filterBar, empty } = props;
   const { decimal } = useFormatter();
   const entries = useInfiniteQuery(entriesQuery(filters));
   const { add } = useLedgerWrites();
@@ -61,7 +63,17 @@ export function LedgerDesk(props: LedgerDeskProps) {
   return (
     <>
       {canWrite && (
-        <div className="no-print mb-6 grid gap-3">
+        <div className="entry-desk no-print">
+          <div className="mb-3 flex flex-wrap items-center justify-between gap-3">
+            <h2 className="text-lead font-[660]">Add an entry</h2>
+            <Menu
+              label="Another kind of entry"
+              items={[
+                { label: 'Split a bill over rebuilds', onSelect: () => setOpen({ kind: 'split' }) },
+                { label: 'Something that came free', onSelect: () => setOpen({ kind: 'free' }) },
+              ]}
+            />
+          </div>
           <EntryRowForm
             start={start}
             rebuilds={rebuildId ? null : rebuilds}
@@ -69,15 +81,6 @@ export function LedgerDesk(props: LedgerDeskProps) {
             vendors={vendors}
             onSend={outbox.send}
           />
-          <div className="flex gap-3">
-            <Menu
-              label="Other kinds of entry"
-              items={[
-                { label: 'Split a bill over rebuilds', onSelect: () => setOpen({ kind: 'split' }) },
-                { label: 'Something that came free', onSelect: () => setOpen({ kind: 'free' }) },
-              ]}
-            />
-          </div>
         </div>
       )}
       <UnsentList
@@ -90,6 +93,7 @@ export function LedgerDesk(props: LedgerDeskProps) {
           setOpen({ kind: 'again', typed });
         }}
       />
+      {filterBar}
       {entries.isPending && <LoadingState label="Loading entries" />}
       {entries.isError && <ErrorState error={entries.error} onRetry={() => void entries.refetch()} />}
       {entries.isSuccess && rows.length === 0 && empty}

@@ -1,5 +1,6 @@
 import { useCallback } from 'react';
 import { ENTRY_KINDS, type LedgerQuery } from '#shared/contracts/ledger.ts';
+import { FilterBar } from '../../ui/filter-bar.tsx';
 import { FindField } from '../../ui/find-field.tsx';
 import { PickField, type PickOption } from '../../ui/pick-field.tsx';
 import { DayField, SelectField } from '../../ui/text-field.tsx';
@@ -23,9 +24,10 @@ const DATED = [
 
 /** What of the ledger is shown; all of it stands in the address. */
 export function LedgerFilters({ filters, set, rebuilds, categories }: Props) {
+  const count = Object.keys(filters).filter((name) => name !== 'sort' && name !== 'order').length;
   const onFind = useCallback((find: string) => set({ find }), [set]);
   return (
-    <div role="search" aria-label="Show which entries" className="filter-bar no-print">
+    <FilterBar label="Show which entries" count={count}>
       <FindField label="Find" value={filters.find ?? ''} onFind={onFind} placeholder="What or vendor" />
       <PickField
         label="Rebuild"
@@ -64,6 +66,6 @@ export function LedgerFilters({ filters, set, rebuilds, categories }: Props) {
         onChange={(event) => set({ void: event.target.value })}
         options={VOIDS}
       />
-    </div>
+    </FilterBar>
   );
 }

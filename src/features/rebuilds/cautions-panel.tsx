@@ -23,6 +23,7 @@ export function CautionsPanel({ detail }: { detail: RebuildDetail }) {
           <Button
             size="small"
             kind="plain"
+            className="flex-none"
             onClick={() => onPutAway(caution.about)}
             aria-label={`Put away the caution on ${caution.about}`}
           >

@@ -5,6 +5,9 @@ import { useFormatter } from '../../ui/formatter-context.tsx';
 import { EmptyState } from '../../ui/states.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
 
+/** Room for the bars of all categories, drawn to one scale. */
+const BAR = 260;
+
 /** Locked plan against actual, category by category, drawn to one scale; then all together. */
 export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
   const format = useFormatter();
@@ -17,6 +20,7 @@ export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
     );
   }
   const most = Math.max(...categories.map((one) => Math.max(one.estimateCents ?? 0, one.planningCents, 1)));
+  const sum = (field: 'surpriseCents' | 'extraCents') => categories.reduce((total, one) => total + one[field], 0);
   const columns: Column<CategoryOutcome>[] = [
     { id: 'name', header: 'Category', heads: true, cell: (one) => one.name },
     { id: 'plan', header: 'Planned', number: true, cell: (one) => <Money cents={one.estimateCents} /> },
@@ -32,7 +36,7 @@ export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
           overrunRate={rateOf(one.estimateCents, one.planningCents)}
           format={format}
           maxCents={most}
-          width={150}
+          width={BAR}
           hideLabel={one.estimateCents === null}
         />
       ),
@@ -50,7 +54,6 @@ export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
       cell: (one) => (one.extraCents === 0 ? <Nothing /> : <Money cents={one.extraCents} />),
     },
   ];
-  const sum = (field: 'surpriseCents' | 'extraCents') => categories.reduce((total, one) => total + one[field], 0);
   return (
     <Table
       caption="Plan against actual by category"
@@ -68,7 +71,7 @@ export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
             surpriseCents={row.surpriseCents}
             overrunRate={row.overrunRate}
             format={format}
-            width={150}
+            width={BAR}
           />
         ),
         surprise: <Money cents={sum('surpriseCents')} />,

@@ -1,5 +1,6 @@
 import { useCallback } from 'react';
 import { STAGES } from '#shared/vocabulary.ts';
+import { FilterBar } from '../../ui/filter-bar.tsx';
 import { FindField } from '../../ui/find-field.tsx';
 import { type Option, SelectField } from '../../ui/text-field.tsx';
 import type { RebuildFilters } from './queries.ts';
@@ -33,6 +34,7 @@ const YEARS_BACK = 12;
 
 /** Which rebuilds are shown, and in which order; all of it stands in the address. */
 export function RebuildFilterBar({ filters, set, classes, damages, thisYear }: Props) {
+  const count = Object.keys(filters).filter((name) => name !== 'sort' && name !== 'order').length;
   const onFind = useCallback((find: string) => set({ find }), [set]);
   const years = Array.from({ length: YEARS_BACK }, (_, back) => String(thisYear - back));
   const { sort = 'bought', order = sort === 'tag' ? 'up' : 'down' } = filters;
@@ -41,7 +43,7 @@ export function RebuildFilterBar({ filters, set, classes, damages, thisYear }: P
     set({ sort: by, order: direction });
   };
   return (
-    <div role="search" aria-label="Show which rebuilds" className="filter-bar no-print">
+    <FilterBar label="Show which rebuilds" count={count}>
       <FindField label="Find" value={filters.find ?? ''} onFind={onFind} placeholder="Tag, make, model, VIN" />
       <SelectField
         label="Stage"
@@ -84,6 +86,6 @@ export function RebuildFilterBar({ filters, set, classes, damages, thisYear }: P
         onChange={(event) => onOrder(event.target.value)}
         options={ORDERS}
       />
-    </div>
+    </FilterBar>
   );
 }

@@ -3,7 +3,7 @@ import { Link } from 'react-router-dom';
 import type { RebuildRow } from '#shared/contracts/rebuilds.ts';
 import { GapBar } from '../../charts/gap-bar.tsx';
 import { DataTable } from '../../ui/data-table.tsx';
-import { Days, Hours, Money, Nothing, PerHour } from '../../ui/figures.tsx';
+import { Days, Hours, Money, PerHour } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import type { Column } from '../../ui/table.tsx';
 
@@ -16,15 +16,19 @@ export function RebuildsTable({ rows, shopId }: { rows: readonly RebuildRow[]; s
         id: 'rebuild',
         header: 'Rebuild',
         heads: true,
-        width: 'w-56',
+        width: 'w-64',
         cell: (row) => (
-          <Link to={`/s/${shopId}/rebuilds/${row.id}`} className="text-ink">
-            {row.tag}
-            {row.name && ` · ${row.name}`}
-          </Link>
+          <>
+            <Link to={`/s/${shopId}/rebuilds/${row.id}`} className="whitespace-nowrap text-ink">
+              {row.tag}
+              {row.name && ` · ${row.name}`}
+            </Link>
+            <span className="block text-label text-soft">
+              {[row.className, row.damageName].filter(Boolean).join(', ')}
+            </span>
+          </>
         ),
       },
-      { id: 'damage', header: 'Damage', width: 'w-24', cell: (row) => row.damageName ?? <Nothing /> },
       { id: 'stage', header: 'Stage', width: 'w-28', cell: (row) => <StageWords row={row} /> },
       { id: 'days', header: 'Days', width: 'w-16', number: true, cell: (row) => <Days days={row.daysHeld} /> },
       {
@@ -65,7 +69,7 @@ export function RebuildsTable({ rows, shopId }: { rows: readonly RebuildRow[]; s
       {
         id: 'gap',
         header: 'Planned | actual',
-        width: 'w-48',
+        width: 'w-40',
         cell: (row) => (
           <GapBar
             lockedCents={row.estimateCents}
@@ -73,7 +77,7 @@ export function RebuildsTable({ rows, shopId }: { rows: readonly RebuildRow[]; s
             surpriseCents={row.surpriseCents}
             overrunRate={row.overrunRate}
             format={format}
-            width={96}
+            width={84}
           />
         ),
       },
@@ -89,7 +93,7 @@ function StageWords({ row }: { row: RebuildRow }) {
   return (
     <>
       {row.stage}
-      {day && <span className="block text-label text-soft">{format.day(day)}</span>}
+      {day && <span className="block text-label whitespace-nowrap text-soft">{format.day(day)}</span>}
     </>
   );
 }

@@ -1,4 +1,3 @@
-import type { Day } from '#shared/day.ts';
 import type { ExitKind } from '#shared/vocabulary.ts';
 import type { CategoryFacts } from '../domain/facts.ts';
 import type { RawDatabase } from '../platform/database.ts';

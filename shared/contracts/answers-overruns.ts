@@ -46,7 +46,7 @@ const categorySchema = z.object({
 });
 
 export const overrunsAnswerSchema = headSchema.extend({
-  /** `binned` above 300 dots in all. */
+  /** `binned` when more than 300 rebuilds have an estimate. */
   marks: z.enum(['each', 'binned']),
   total: z.object({ ...planned, ...marks, parts: partsSchema }),
   /** By name; those that nobody planned have n 0. */

@@ -4,7 +4,9 @@ import type { InventedLine, InventedRebuild } from './invent.ts';
 import { interleaved, type Measure, timed } from './rounds.ts';
 
 export const QUESTIONS = ['year', 'what-pays', 'overruns', 'time-to-sell', 'contingency'] as const;
-const ROUNDS = 7;
+const ROUNDS = 9;
+/** Asked before anything is measured: a server that has just started has not compiled its own code yet. */
+const WARM_UP = 15;
 const COLD_MS = 50;
 const WARM_MS = 5;
 
@@ -26,6 +28,7 @@ export async function benchAnswers(
       await before();
       return timed(ask);
     };
+    for (let i = 0; i < WARM_UP; i += 1) await after(change.add)();
     const times = await interleaved(ROUNDS, {
       anew: after(change.rename),
       patched: after(change.add),

@@ -25,8 +25,20 @@ export async function duckDb(rebuilds: readonly InventedRebuild[], lines: readon
   await fill(
     'rebuilds',
     rebuilds.map((one, id) => [
-      ...[id, one.class, one.damage, one.isSeen, one.boughtOn, one.startedOn, one.readyOn, one.listedOn, one.soldOn],
-      ...[one.purchaseCents, one.saleCents, one.ownSeconds, one.paidSeconds, one.plannedSeconds],
+      id,
+      one.class,
+      one.damage,
+      one.isSeen,
+      one.boughtOn,
+      one.startedOn,
+      one.readyOn,
+      one.listedOn,
+      one.soldOn,
+      one.purchaseCents,
+      one.saleCents,
+      one.ownSeconds,
+      one.paidSeconds,
+      one.plannedSeconds,
     ]),
   );
   await fill(

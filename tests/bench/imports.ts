@@ -2,8 +2,8 @@ import { copyFileSync, mkdtempSync, readFileSync, rmSync, writeFileSync } from '
 import { tmpdir } from 'node:os';
 import path from 'node:path';
 import { setTimeout as wait } from 'node:timers/promises';
-import type { Import } from '../../shared/contracts/imports.ts';
-import { DEFAULT_CATEGORIES } from '../../shared/vocabulary.ts';
+import type { Import } from '#shared/contracts/imports.ts';
+import { DEFAULT_CATEGORIES } from '#shared/vocabulary.ts';
 import { signUp } from './client.ts';
 import type { InventedLine, InventedRebuild } from './invent.ts';
 import { plainImport, plainWarehouse } from './plain-import.ts';

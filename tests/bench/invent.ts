@@ -1,4 +1,4 @@
-import { addDays } from '../../shared/day.ts';
+import { addDays } from '#shared/day.ts';
 
 /** Invented books of a given size, the same for the same seed: rebuilds with plans, and ledger lines over them. */
 export interface InventedRebuild {

@@ -5,8 +5,8 @@ import papaparse from 'papaparse';
 import { openShop } from '../../server/books/new-shop.ts';
 import { migrate, preparePragmas } from '../../server/platform/database.ts';
 import { newId } from '../../server/platform/ids.ts';
-import { isDay } from '../../shared/day.ts';
-import { parseCents } from '../../shared/money.ts';
+import { isDay } from '#shared/day.ts';
+import { parseCents } from '#shared/money.ts';
 
 const STAMP = '2026-06-15T12:00:00.000Z';
 
@@ -45,7 +45,14 @@ export function plainImport(databaseFile: string, csv: string): void {
   raw
     .transaction(() => {
       insert('imports', 'id,shop_id,file_name,file_sha256,byte_size,state,created_by,created_at').run(
-        ...[importId, shopId, 'ledger.csv', 'x', 1, 'committed', userId, STAMP],
+        importId,
+        shopId,
+        'ledger.csv',
+        'x',
+        1,
+        'committed',
+        userId,
+        STAMP,
       );
       const addRow = insert('import_rows', 'shop_id,import_id,sheet,row,cells,outcome,reason');
       const addRebuild = insert('rebuilds', 'id,shop_id,tag,import_id,import_sheet,import_row,created_at');

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { YearAnswer } from '../../shared/contracts/answers-year.ts';
+import type { YearAnswer } from '#shared/contracts/answers-year.ts';
 import { openSmallShop, outOf } from '../support/small-shop.ts';
 
 // Source of the figures: worked out by hand from the table in support/small-shop.ts.

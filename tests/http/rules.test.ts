@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { ContingencyAnswer } from '../../shared/contracts/answers-contingency.ts';
+import type { ContingencyAnswer } from '#shared/contracts/answers-contingency.ts';
 import { openSmallShop } from '../support/small-shop.ts';
 
 // Source of the figures: worked out by hand from the table in support/small-shop.ts. Overruns: −50, 0, 50 and 100 %.
@@ -10,9 +10,17 @@ describe('adopting a rule', () => {
     const reply = await ada.post('/api/rules', { year: 2027, level: '4/5', kind: 'percent', note: 'Winter review' });
     expect(reply.status).toBe(201);
     expect(reply.body).toMatchObject({
-      ...{ year: 2027, revision: 1, kind: 'percent', level: '4/5', percent: 100, flatCents: null },
-      ...{ rebuildCount: 4, dataUntil: '2026-05-01', adoptedOn: '2026-06-15', adoptedByName: 'Ada Wick' },
-      ...{ note: 'Winter review' },
+      year: 2027,
+      revision: 1,
+      kind: 'percent',
+      level: '4/5',
+      percent: 100,
+      flatCents: null,
+      rebuildCount: 4,
+      dataUntil: '2026-05-01',
+      adoptedOn: '2026-06-15',
+      adoptedByName: 'Ada Wick',
+      note: 'Winter review',
       evidence: { n: 4, k: 4, guarantee: 0.8, uplift: 1, flatCents: null, covered: 0, scored: 0 },
     });
   });

@@ -42,8 +42,15 @@ describe('the reference portfolios through the warehouse', () => {
 
   it('keeps names apart that differ in case only', async () => {
     const project = (id: string, sold: string, category: string) => ({
-      ...{ id, class: 'Van', damage: 'front', bought: '2025-01-01', listed: '2025-02-01', sold },
-      ...{ purchase_cents: 100_000, sale_cents: 200_000, estimates: { [category]: 10_000 } },
+      id,
+      class: 'Van',
+      damage: 'front',
+      bought: '2025-01-01',
+      listed: '2025-02-01',
+      sold,
+      purchase_cents: 100_000,
+      sale_cents: 200_000,
+      estimates: { [category]: 10_000 },
       costs: [{ date: '2025-01-10', category, cents: 15_000, foreseen: true }],
     });
     const projects = [project('a1', '2025-03-01', 'parts'), project('A1', '2025-03-01', 'Parts')];

@@ -22,24 +22,49 @@ export async function smallShop(owner: Member) {
   const pickup = { classId: books.classId('pickup'), damageId: books.damageId('front') };
   const days = (boughtOn: string, listedOn: string | null) => ({ boughtOn, listedOn });
   const s1 = await books.rebuild({
-    ...{ tag: 'S-1', ...suv, isSeen: true, purchaseCents: 500_000, ...days('2025-01-10', '2025-02-15') },
-    ...{ pickedUpOn: '2025-01-12', startedOn: '2025-01-20', roadworthyOn: '2025-02-10' },
-    ...{ soldOn: '2025-03-17', saleCents: 1_000_000 },
+    tag: 'S-1',
+    ...suv,
+    isSeen: true,
+    purchaseCents: 500_000,
+    ...days('2025-01-10', '2025-02-15'),
+    pickedUpOn: '2025-01-12',
+    startedOn: '2025-01-20',
+    roadworthyOn: '2025-02-10',
+    soldOn: '2025-03-17',
+    saleCents: 1_000_000,
   });
   const s2 = await books.rebuild({
-    ...{ tag: 'S-2', ...suv, isSeen: false, purchaseCents: 400_000, ...days('2025-05-01', '2025-06-10') },
-    ...{ soldOn: '2025-07-10', saleCents: 700_000 },
+    tag: 'S-2',
+    ...suv,
+    isSeen: false,
+    purchaseCents: 400_000,
+    ...days('2025-05-01', '2025-06-10'),
+    soldOn: '2025-07-10',
+    saleCents: 700_000,
   });
   const s3 = await books.rebuild({
-    ...{ tag: 'S-3', ...pickup, isSeen: true, purchaseCents: 600_000, ...days('2026-01-05', '2026-02-01') },
-    ...{ soldOn: '2026-04-12', saleCents: 950_000 },
+    tag: 'S-3',
+    ...pickup,
+    isSeen: true,
+    purchaseCents: 600_000,
+    ...days('2026-01-05', '2026-02-01'),
+    soldOn: '2026-04-12',
+    saleCents: 950_000,
   });
   const s4 = await books.rebuild({
-    ...{ tag: 'S-4', ...pickup, isSeen: false, purchaseCents: 300_000, ...days('2026-02-01', null) },
-    ...{ exitKind: 'scrapped', exitOn: '2026-05-01', exitCents: 100_000 },
+    tag: 'S-4',
+    ...pickup,
+    isSeen: false,
+    purchaseCents: 300_000,
+    ...days('2026-02-01', null),
+    exitKind: 'scrapped',
+    exitOn: '2026-05-01',
+    exitCents: 100_000,
   });
   const s5 = await books.rebuild({
-    ...{ tag: 'S-5', classId: books.classId('small car'), purchaseCents: 200_000 },
+    tag: 'S-5',
+    classId: books.classId('small car'),
+    purchaseCents: 200_000,
     ...days('2026-03-01', '2026-06-01'),
   });
   const s6 = await books.rebuild({ tag: 'S-6', soldOn: '2026-05-20', saleCents: 500_000 });

@@ -53,8 +53,9 @@ export function Palette({ session, onClose }: { session: Session; onClose: () =>
 }
 
 function usePaletteItems(session: Session): PaletteItem[] {
+  const sources = paletteSources.filter((source) => source.roles.includes(session.role));
   const found = useQueries({
-    queries: paletteSources.map((source) => ({
+    queries: sources.map((source) => ({
       queryKey: ['palette', source.key, session.shop.id],
       queryFn: () => source.load(session.shop.id),
     })),

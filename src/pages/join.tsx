@@ -2,7 +2,7 @@ import { useQuery, useSuspenseQuery } from '@tanstack/react-query';
 import { useNavigate, useParams } from 'react-router-dom';
 import { JoinForm } from '../features/people/join-form.tsx';
 import { invitationQuery } from '../features/people/queries.ts';
-import { roleWords } from '../features/people/roles.ts';
+import { roleSentence } from '../features/people/roles.ts';
 import { ApiProblem } from '../lib/api-problem.ts';
 import { sessionQuery } from '../lib/session.ts';
 import { PageHeader } from '../ui/answer-header.tsx';
@@ -21,7 +21,7 @@ export function JoinPage() {
   const { shopName, role, email } = invitation;
   return (
     <>
-      <PageHeader title={`Join ${shopName} as ${role}`} note={`In this shop, ${article(role)} ${roleWords(role)}.`} />
+      <PageHeader title={`Join ${shopName} as ${role}`} note={roleSentence(role)} />
       {session && session.user.email !== email && (
         <p className="mb-4 max-w-[38rem] text-soft">
           You are signed in as {session.user.email}. Joining signs you in as {email} instead.
@@ -58,8 +58,4 @@ function DeadLink({ isSignedIn }: { isSignedIn: boolean }) {
       </EmptyState>
     </>
   );
-}
-
-function article(role: string): string {
-  return /^[aeiou]/.test(role) ? `an ${role}` : `a ${role}`;
 }

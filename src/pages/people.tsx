@@ -1,10 +1,11 @@
 import { useQuery } from '@tanstack/react-query';
 import { useState } from 'react';
+import type { Role } from '#shared/vocabulary.ts';
 import { InvitationsPanel } from '../features/people/invitations-panel.tsx';
 import { InviteDialog } from '../features/people/invite-dialog.tsx';
 import { MembersPanel } from '../features/people/members-panel.tsx';
 import { peopleQuery } from '../features/people/queries.ts';
-import { roleWords } from '../features/people/roles.ts';
+import { roleSentence } from '../features/people/roles.ts';
 import { RoleTable } from '../features/people/role-table.tsx';
 import { useSession } from '../lib/session.ts';
 import { PageHeader } from '../ui/answer-header.tsx';
@@ -50,13 +51,13 @@ function People() {
   );
 }
 
-function NotYours({ role }: { role: Parameters<typeof roleWords>[0] }) {
+function NotYours({ role }: { role: Role }) {
   return (
     <>
       <PageHeader title="People" />
       <EmptyState title="Only owners invite people and change roles">
         <p>
-          Your role here is {role}: {roleWords(role)}. Ask an owner of the shop if it should be another.
+          Your role here is {role}. {roleSentence(role)} Ask an owner of the shop if it should be another.
         </p>
       </EmptyState>
     </>

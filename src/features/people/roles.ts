@@ -25,6 +25,11 @@ export function roleWords(role: Role): string {
   return WORDS[role];
 }
 
+/** The same as a sentence: "An accountant sees all books and answers, and changes nothing." */
+export function roleSentence(role: Role): string {
+  return `${/^[aeiou]/.test(role) ? 'An' : 'A'} ${role} ${WORDS[role]}.`;
+}
+
 /** Roles as options of a field. */
 export const ROLE_OPTIONS = ROLES.map((role) => ({ value: role, label: capital(role) }));
 

@@ -23,7 +23,7 @@ export function AddWord({ label, maxLength = 60, flag, onAdd }: Props) {
     },
   });
   return (
-    <form onSubmit={onSubmit} noValidate className="mt-4 flex flex-wrap items-end gap-x-3 gap-y-2">
+    <form onSubmit={onSubmit} noValidate className="mt-4 flex flex-wrap items-start gap-x-3 gap-y-2">
       <TextField
         ref={field}
         label={label}
@@ -33,8 +33,8 @@ export function AddWord({ label, maxLength = 60, flag, onAdd }: Props) {
         error={errors.name ?? message}
         className="min-w-[9rem] flex-1"
       />
-      {flag && <CheckField label={flag} name="flag" className="min-h-10 content-center" />}
-      <Button type="submit" busy={isBusy}>
+      {flag && <CheckField label={flag} name="flag" className="mt-[1.4rem] min-h-10 content-center" />}
+      <Button type="submit" busy={isBusy} className="mt-[1.4rem]">
         Add
       </Button>
     </form>

@@ -1,15 +1,15 @@
 import { z } from 'zod';
 import { type Shop, shopFieldsSchema } from '#shared/contracts/shop.ts';
+import { decimalMark } from '#shared/format.ts';
 import { into } from '../../lib/form-text.ts';
 import { centsToText, optionalCentsTextSchema } from '../../lib/money-text.ts';
 import type { ShopChange } from './mutations.ts';
 
-type Decimal = '.' | ',';
 export type ShopTyped = z.input<ReturnType<typeof shopFormSchema>>;
 export type ShopFields = z.output<typeof shopFieldsSchema>;
 
-/** What the form holds, all as text, turned into what the contract takes. */
-export function shopFormSchema(decimal: Decimal) {
+/** What the form holds, all as text in the way of the shop's locale, turned into what the contract takes. */
+export function shopFormSchema(locale: string) {
   return z
     .strictObject({
       name: z.string(),
@@ -17,13 +17,13 @@ export function shopFormSchema(decimal: Decimal) {
       locale: z.string(),
       timeZone: z.string(),
       yearStartMonth: z.string().transform(Number),
-      wantedCentsPerHour: optionalCentsTextSchema(decimal),
+      wantedCentsPerHour: optionalCentsTextSchema(decimalMark(locale)),
     })
     .transform(into(shopFieldsSchema));
 }
 
 /** A shop as the form starts with it. */
-export function shopTyped(shop: Shop, decimal: Decimal): ShopTyped {
+export function shopTyped(shop: Shop): ShopTyped {
   const { name, currency, locale, timeZone } = shop;
   return {
     name,
@@ -31,7 +31,7 @@ export function shopTyped(shop: Shop, decimal: Decimal): ShopTyped {
     locale,
     timeZone,
     yearStartMonth: String(shop.yearStartMonth),
-    wantedCentsPerHour: centsToText(shop.wantedCentsPerHour, decimal),
+    wantedCentsPerHour: centsToText(shop.wantedCentsPerHour, decimalMark(shop.locale)),
   };
 }
 

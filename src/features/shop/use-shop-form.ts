@@ -4,23 +4,21 @@ import { useForm } from 'react-hook-form';
 import type { Shop } from '#shared/contracts/shop.ts';
 import { ApiProblem } from '../../lib/api-problem.ts';
 import { applyProblem } from '../../lib/apply-problem.ts';
-import { useFormatter } from '../../ui/formatter-context.tsx';
 import { notify } from '../../ui/toast.tsx';
 import { type ShopChange, useShopEdit } from './mutations.ts';
 import { changesOf, type ShopFields, type ShopTyped, shopFormSchema, shopTyped, undoOf } from './shop-form.ts';
 
 /** The shop's form: sends what was changed, over the version that it was opened with. */
 export function useShopForm(shop: Shop) {
-  const { decimal } = useFormatter();
   const [base, setBase] = useState(shop);
   const form = useForm<ShopTyped, unknown, ShopFields>({
-    resolver: zodResolver(shopFormSchema(decimal)),
-    values: shopTyped(base, decimal),
+    resolver: zodResolver(shopFormSchema(base.locale)),
+    values: shopTyped(base),
   });
   const { edit, conflict, dismiss } = useShopEdit();
   const startFrom = (saved: Shop) => {
     setBase(saved);
-    form.reset(shopTyped(saved, decimal));
+    form.reset(shopTyped(saved));
   };
   // A newer shop shows at once, but never over something half typed: then its version will tell at the save.
   if (!form.formState.isDirty && base.version < shop.version) setBase(shop);

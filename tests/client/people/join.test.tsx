@@ -36,7 +36,7 @@ test('says which shop, which role and what it may see, and lets a new person in'
   const { asked } = serve();
   open();
   expect(await screen.findByRole('heading', { name: 'Join Whitlock Rebuilds as mechanic' })).toBeInTheDocument();
-  expect(screen.getByText(/a mechanic puts down own hours on open rebuilds and sees no money/)).toBeInTheDocument();
+  expect(screen.getByText('A mechanic puts down own hours on open rebuilds and sees no money.')).toBeInTheDocument();
   expect(screen.getByLabelText('Email')).toHaveValue('mo@shop.example');
   await userEvent.type(screen.getByLabelText('Your name'), 'Mo Reyes');
   await userEvent.type(screen.getByLabelText('Password'), PASSWORD);

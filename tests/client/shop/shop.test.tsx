@@ -114,6 +114,18 @@ test('sends only what was changed, says so, and takes it back on Undo', async ()
   expect(shop).toMatchObject({ yearStartMonth: 1, wantedCentsPerHour: null, version: 3 });
 });
 
+test('a new way of writing numbers shows in the amounts of the form', async () => {
+  shop = { ...shop, wantedCentsPerHour: 3250 };
+  serve();
+  showPage(<ShopPage />);
+  const pay = await screen.findByLabelText('Wanted pay per hour');
+  expect(pay).toHaveValue('32.50');
+  await userEvent.selectOptions(screen.getByLabelText('How numbers are written'), 'de-DE');
+  await userEvent.click(screen.getByRole('button', { name: 'Save the shop' }));
+  await waitFor(() => expect(pay).toHaveValue('32,50'));
+  expect(shop).toMatchObject({ locale: 'de-DE', wantedCentsPerHour: 3250 });
+});
+
 test('an amount that cannot be read is said at its field and stays there', async () => {
   const { asked } = serve();
   showPage(<ShopPage />);

@@ -1,4 +1,4 @@
-import type { Estimate, EstimateFields } from '#shared/contracts/rebuilds.ts';
+import type { Estimate, EstimateFields } from '#shared/contracts/estimates.ts';
 import { newId } from '../platform/ids.ts';
 import { impossible } from '../platform/problems.ts';
 import { fromRow, type Patch } from '../platform/rows.ts';

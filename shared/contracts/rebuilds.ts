@@ -11,6 +11,7 @@ import {
   textSchema,
 } from '../fields.ts';
 import { OTHER_EXITS, STAGES } from '../vocabulary.ts';
+import { estimateFieldsSchema, estimateSchema } from './estimates.ts';
 
 const count = z.int().min(0);
 const day = daySchema.nullable();
@@ -120,33 +121,6 @@ export const rebuildsSummarySchema = z.object({
   openCount: z.int(),
   openCostCents: z.int(),
 });
-
-/** An estimate: the plan before work starts (the baseline once locked), or a later revision beside it. */
-export const estimateFieldsSchema = z.strictObject({
-  lines: z
-    .array(z.strictObject({ categoryId: idSchema, cents: positiveCentsSchema }))
-    .max(60)
-    .refine((lines) => new Set(lines.map((line) => line.categoryId)).size === lines.length, {
-      error: 'A category stands here twice.',
-    }),
-  plannedSeconds: count.nullable(),
-  expectedSaleCents: positiveCentsSchema.nullable(),
-  expectedDays: count.max(10_000).nullable(),
-  note: optionalTextSchema(1000),
-});
-export type EstimateFields = z.output<typeof estimateFieldsSchema>;
-
-export const estimateSchema = z.object({
-  ...estimateFieldsSchema.shape,
-  id: idSchema,
-  rebuildId: idSchema,
-  revision: z.int(),
-  isBaseline: z.boolean(),
-  madeOn: day,
-  lockedAt: z.string().nullable(),
-  version: z.int(),
-});
-export type Estimate = z.output<typeof estimateSchema>;
 
 /** One category of one rebuild: the locked plan against what it came to. Cents. */
 export const categoryOutcomeSchema = z.object({

@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { access } from '../../server/access.ts';
-import { ROLES, type Role } from '../../shared/vocabulary.ts';
+import { ROLES, type Role } from '#shared/vocabulary.ts';
 import { type Member, testApi } from '../support/api.ts';
 
 type Method = 'get' | 'post' | 'patch' | 'put' | 'delete';

@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import type { EntryRow } from '../../shared/contracts/ledger.ts';
+import type { EntryRow } from '#shared/contracts/ledger.ts';
 import { testApi } from '../support/api.ts';
 import { booksOf } from '../support/books.ts';
 

@@ -1,6 +1,7 @@
-import type { Entry } from '../../shared/contracts/ledger.ts';
-import type { Estimate, Rebuild, RebuildDetail, RebuildRow } from '../../shared/contracts/rebuilds.ts';
-import type { Lists } from '../../shared/contracts/shop.ts';
+import type { Entry } from '#shared/contracts/ledger.ts';
+import type { Estimate } from '#shared/contracts/estimates.ts';
+import type { Rebuild, RebuildDetail, RebuildRow } from '#shared/contracts/rebuilds.ts';
+import type { Lists } from '#shared/contracts/shop.ts';
 import type { Member } from './api.ts';
 
 /** The books as a test writes them: through the API, by what things are called. Throws if a write is refused. */

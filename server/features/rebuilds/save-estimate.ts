@@ -1,4 +1,4 @@
-import type { Estimate, EstimateFields } from '#shared/contracts/rebuilds.ts';
+import type { Estimate, EstimateFields } from '#shared/contracts/estimates.ts';
 import type { Books } from '../../books/books.ts';
 import { refuseStrangers } from '../../books/references.ts';
 import { ProblemError } from '../../platform/problems.ts';

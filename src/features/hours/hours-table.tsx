@@ -25,7 +25,12 @@ export function HoursTable({ rows, shopId, ofOne = false, onChange, onVoid }: Pr
         id: 'day',
         header: 'Day',
         width: 'w-28',
-        cell: (row) => (row.workedOn ? format.day(row.workedOn) : <span className="text-soft">no day</span>),
+        cell: (row) =>
+          row.workedOn ? (
+            <span className="whitespace-nowrap">{format.day(row.workedOn)}</span>
+          ) : (
+            <span className="text-soft">no day</span>
+          ),
       },
       {
         id: 'rebuild',
@@ -43,7 +48,12 @@ export function HoursTable({ rows, shopId, ofOne = false, onChange, onVoid }: Pr
         id: 'who',
         header: 'Who',
         width: 'w-36',
-        cell: (row) => row.workerName ?? <span className="text-soft">not said</span>,
+        cell: (row) =>
+          row.workerName ? (
+            <span className="whitespace-nowrap">{row.workerName}</span>
+          ) : (
+            <span className="text-soft">not said</span>
+          ),
       },
       {
         id: 'task',

@@ -27,7 +27,12 @@ export function EntriesTable({ rows, shopId, ofOne = false, onChange, onVoid }: 
         id: 'day',
         header: 'Day',
         width: 'w-28',
-        cell: (row) => (row.datedOn ? format.day(row.datedOn) : <span className="text-soft">no day</span>),
+        cell: (row) =>
+          row.datedOn ? (
+            <span className="whitespace-nowrap">{format.day(row.datedOn)}</span>
+          ) : (
+            <span className="text-soft">no day</span>
+          ),
       },
       {
         id: 'rebuild',
@@ -36,7 +41,12 @@ export function EntriesTable({ rows, shopId, ofOne = false, onChange, onVoid }: 
         hidden: ofOne,
         cell: (row) => <RebuildTag row={row} shopId={shopId} />,
       },
-      { id: 'category', header: 'Category', width: 'w-40', cell: (row) => row.categoryName },
+      {
+        id: 'category',
+        header: 'Category',
+        width: 'w-40',
+        cell: (row) => <span className="block min-w-28">{row.categoryName}</span>,
+      },
       { id: 'what', header: 'What', width: 'w-72', cell: (row) => <What row={row} /> },
       { id: 'kind', header: 'Kind', width: 'w-28', cell: (row) => <Kind row={row} /> },
       { id: 'cents', header: 'Amount', width: 'w-32', number: true, cell: (row) => <Amount row={row} /> },
@@ -77,11 +87,11 @@ function RebuildTag({ row, shopId }: { row: EntryRow; shopId: string }) {
 function What({ row }: { row: EntryRow }) {
   const words = [row.what, row.vendor].filter(Boolean).join(' · ');
   return (
-    <>
+    <span className="block min-w-44">
       {words || <Nothing />}
       {row.splitId && <span className="text-soft"> (a share)</span>}
       {row.voidReason && <span className="ml-2 inline-block no-underline">void: {row.voidReason}</span>}
-    </>
+    </span>
   );
 }
 

@@ -1,7 +1,7 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useForm, useWatch } from 'react-hook-form';
 import type { z } from 'zod';
-import type { Estimate, estimateFieldsSchema } from '#shared/contracts/rebuilds.ts';
+import type { Estimate, estimateFieldsSchema } from '#shared/contracts/estimates.ts';
 import { parseCents } from '#shared/money.ts';
 import { applyProblem } from '../../lib/apply-problem.ts';
 import { Button } from '../../ui/button.tsx';

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { type Estimate, estimateFieldsSchema } from '#shared/contracts/rebuilds.ts';
+import { type Estimate, estimateFieldsSchema } from '#shared/contracts/estimates.ts';
 import { into, optionalCount, optionalText } from '../../lib/form-text.ts';
 import { hoursToText, optionalHoursTextSchema } from '../../lib/hours-text.ts';
 import { centsToText, optionalCentsTextSchema } from '../../lib/money-text.ts';

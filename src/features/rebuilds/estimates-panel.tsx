@@ -1,7 +1,8 @@
 import { useMutation } from '@tanstack/react-query';
 import { useState } from 'react';
 import type { z } from 'zod';
-import type { Estimate, estimateFieldsSchema, RebuildDetail } from '#shared/contracts/rebuilds.ts';
+import type { Estimate, estimateFieldsSchema } from '#shared/contracts/estimates.ts';
+import type { RebuildDetail } from '#shared/contracts/rebuilds.ts';
 import { newIdempotencyKey } from '../../lib/api.ts';
 import { Button } from '../../ui/button.tsx';
 import { Dialog, DialogActions } from '../../ui/dialog.tsx';

@@ -1,7 +1,6 @@
 import type { z } from 'zod';
+import { type Estimate, type estimateFieldsSchema } from '#shared/contracts/estimates.ts';
 import {
-  type Estimate,
-  type estimateFieldsSchema,
   type newRebuildSchema,
   type Rebuild,
   type rebuildChangeSchema,

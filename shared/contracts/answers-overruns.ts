@@ -34,6 +34,9 @@ const partsSchema = z.object({
   surpriseShare: figure,
 });
 
+/** Pooled overrun of one shop year, by the year in which the rebuilds left. */
+export const yearRateSchema = z.object({ year: z.int(), n: count, pooled: figure, isThin: z.boolean() });
+
 const categorySchema = z.object({
   categoryId: idSchema,
   name: z.string(),
@@ -43,6 +46,8 @@ const categorySchema = z.object({
   /** Spent without having been planned: never in a ratio. */
   unbudgetedCount: count,
   unbudgetedCents: cents,
+  /** Does it change? The earliest first. */
+  years: z.array(yearRateSchema),
 });
 
 export const overrunsAnswerSchema = headSchema.extend({
@@ -52,7 +57,13 @@ export const overrunsAnswerSchema = headSchema.extend({
   /** By name; those that nobody planned have n 0. */
   categories: z.array(categorySchema),
   /** Planned hours against own + paid; both must be known. */
-  hours: z.object({ ...spread, plannedSeconds: count, actualSeconds: count, ...marks }),
+  hours: z.object({
+    ...spread,
+    plannedSeconds: count,
+    actualSeconds: count,
+    ...marks,
+    years: z.array(yearRateSchema),
+  }),
   surprises: rateSchema.extend({
     unknownCount: count,
     unforeseenCents: cents,

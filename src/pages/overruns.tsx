@@ -5,6 +5,7 @@ import { EmptyAnswer } from '../features/answers/empty-answer.tsx';
 import { FilterBar } from '../features/answers/filter-bar.tsx';
 import { LeftOutList } from '../features/answers/left-out.tsx';
 import { useMayWrite } from '../features/answers/may-write.ts';
+import { CategoriesByYear } from '../features/answers/overruns/categories-by-year.tsx';
 import { OverrunsPicture } from '../features/answers/overruns/overruns-picture.tsx';
 import { OverrunsTable } from '../features/answers/overruns/overruns-table.tsx';
 import { OverrunsWorkedOut } from '../features/answers/overruns/overruns-worked-out.tsx';
@@ -46,6 +47,7 @@ export function OverrunsPage() {
             <SeenTable seen={answer.seen} />
           </Panels>
           <OverrunsYears years={answer.years} />
+          <CategoriesByYear answer={answer} />
           <LeftOutList leftOut={answer.leftOut} />
         </>
       )}

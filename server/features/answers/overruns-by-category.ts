@@ -4,6 +4,7 @@ import type { ShopRebuild } from '../../books/shop-facts.ts';
 import { sum } from '../../domain/statistics.ts';
 import { byCodePoint } from '../../domain/text-order.ts';
 import type { AnswerInput } from './input.ts';
+import { exitYears, ratesByYear } from './overruns-by-year.ts';
 import { marksOf, partsOf } from './overruns-parts.ts';
 import { type AgainstPlan, spreadOf } from './spread.ts';
 
@@ -22,6 +23,7 @@ interface Found {
  * `rebuilds` are finished and their estimates were not written over.
  */
 export function categoryOverruns(input: AnswerInput, rebuilds: readonly ShopRebuild[], isBinned: boolean): Categories {
+  const yearOf = exitYears(rebuilds, input.shop.startMonth);
   const found = new Map<string, Found>();
   for (const rebuild of rebuilds) {
     for (const name of rebuild.estimates.keys()) take(categoryIn(found, name), rebuild, name);
@@ -44,6 +46,7 @@ export function categoryOverruns(input: AnswerInput, rebuilds: readonly ShopRebu
         parts: partsOf(told, sum(surprises)),
         unbudgetedCount: unbudgeted.length,
         unbudgetedCents: sum(unbudgeted),
+        years: ratesByYear(planned, yearOf),
       };
     });
 }

@@ -9,6 +9,7 @@ import { shopYearOf } from '../../domain/years.ts';
 import { filtered, filterOptions } from './filter.ts';
 import { type AnswerInput, leftOut } from './input.ts';
 import { categoryOverruns } from './overruns-by-category.ts';
+import { exitYears, ratesByYear } from './overruns-by-year.ts';
 import { marksOf, partsOf } from './overruns-parts.ts';
 import { type AgainstPlan, spreadOf } from './spread.ts';
 
@@ -72,7 +73,8 @@ function hoursOf(input: AnswerInput, timed: readonly ShopRebuild[], isBinned: bo
     return { id, plan: plannedSeconds ?? 0, actual: (ownSeconds ?? 0) + (paidSeconds ?? 0) };
   });
   const { planSum, actualSum, ...spread } = spreadOf(each);
-  return { ...spread, plannedSeconds: planSum, actualSeconds: actualSum, ...marksOf(input, each, isBinned) };
+  const years = ratesByYear(each, exitYears(timed, input.shop.startMonth));
+  return { ...spread, plannedSeconds: planSum, actualSeconds: actualSum, ...marksOf(input, each, isBinned), years };
 }
 
 function surprisesOf({ shop }: AnswerInput, done: readonly ShopRebuild[]): Answer['surprises'] {

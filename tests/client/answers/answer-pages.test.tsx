@@ -60,6 +60,19 @@ test('overruns: each category with its plan, what nobody planned apart, and link
   expect(table.getByRole('row', { name: /^Tow/ })).toHaveTextContent('too few yet');
 });
 
+test('overruns: a step of one category shows by year, and what rests on too few is gray', async () => {
+  const rate = (year: number, n: number, pooled: number) => ({ year, n, pooled, isThin: n < 5 });
+  const paint = {
+    ...category('paint', 15, 0.2),
+    years: [rate(2023, 4, 0.9), rate(2024, 9, 0.34), rate(2025, 6, -0.02)],
+  };
+  serve([{ contract: answersApi.overruns, reply: () => overrunsReply(15, 0.2, [paint]) }]);
+  openPage(<OverrunsPage />);
+  const table = within(await screen.findByRole('table', { name: 'Overrun of each category by year' }));
+  expect(cellsOf(table.getByRole('row', { name: /^Paint/ }))).toEqual(['+90% 4', '+34% 9', '−2% 6']);
+  expect(table.getByText('+90%')).toHaveClass('text-soft');
+});
+
 test('time to sell: the unsold stand in a list with age and money, and count in the figures', async () => {
   const unsold = {
     ...{ ...rebuild('B-053'), stage: 'listed' as const, boughtOn: '2026-01-08', listedOn: '2026-04-21' },

@@ -108,6 +108,7 @@ export function category(name: string, n: number, rate: number, planned = 100_00
     parts: { n, overCents: Math.round(estimateCents * rate), surpriseCents: 0, knownCents: 0, surpriseShare: null },
     unbudgetedCount: 0,
     unbudgetedCents: 0,
+    years: [],
   };
 }
 
@@ -133,7 +134,7 @@ export function overrunsReply(n: number, rate: number, categories: Category[] = 
     marks: 'each',
     total,
     categories,
-    hours: { ...spread(0, 0), plannedSeconds: 0, actualSeconds: 0, ...NO_DOTS },
+    hours: { ...spread(0, 0), plannedSeconds: 0, actualSeconds: 0, ...NO_DOTS, years: [] },
     surprises: {
       ...{ n: 0, x: 0, rate: null, lower: null, upper: null },
       unknownCount: 0,

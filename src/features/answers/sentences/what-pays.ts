@@ -27,25 +27,33 @@ export function sayWhatPays(answer: WhatPaysAnswer, view: PayView, format: Forma
 }
 
 function sentence(answer: WhatPaysAnswer, view: PayView, format: Formatter): Sentence {
-  const { cells, classes, damages } = fitsOf(answer, view);
+  const fits = fitsOf(answer, view);
+  const { cells, classes, damages } = fits;
   if (answer.totals.n === 0) return ['Nothing has been finished yet, so nothing can be said of what pays.'];
   if (cells.n === 0) return ['Hours are not known for any finished rebuild, so nothing can be said by the hour.'];
-  const kinds = extremes(cells);
-  if (kinds && speaksForMost(cells)) return say`${capital(nameOf(kinds.best))} ${pays(kinds, view, format)}.`;
-  const margins = [
-    { by: 'by damage', found: extremes(damages) },
-    { by: 'by class', found: extremes(classes) },
-  ].flatMap(({ by, found }) => (found ? [{ by, found }] : []));
-  const [first, second] = margins;
+  const [first, second] = leads(fits);
+  if (first?.by === null) return say`${capital(nameOf(first.found.best))} ${pays(first.found, view, format)}.`;
   if (first) {
-    const rest = second ? say`; ${second.by}, ${bestAndLeast(second.found, view, format, false)}` : [];
-    return [`${capital(first.by)}, `, ...bestAndLeast(first.found, view, format, true), ...rest, '.'];
+    const rest = second ? say`; ${second.by ?? ''}, ${bestAndLeast(second.found, view, format, false)}` : [];
+    return [`${capital(first.by ?? '')}, `, ...bestAndLeast(first.found, view, format, true), ...rest, '.'];
   }
   const enough = [...cells.groups, ...classes.groups, ...damages.groups].some((group) => !group.isThin);
   return enough ? noDifference(answer, view, format) : tooFew(answer, format);
 }
 
 type Extremes = { best: Group; worst: Group };
+
+type Lead = { by: string | null; fit: Comparison; found: Extremes };
+
+/** What the answer quotes: kinds where they speak for most rebuilds, else the margins; nothing where no difference shows. */
+export function leads({ cells, classes, damages }: WhatPaysAnswer['perHour']): Lead[] {
+  const lead = (by: string | null, fit: Comparison) => {
+    const found = extremes(fit);
+    return found ? [{ by, fit, found }] : [];
+  };
+  const kinds = speaksForMost(cells) ? lead(null, cells) : [];
+  return kinds.length > 0 ? kinds : [...lead('by damage', damages), ...lead('by class', classes)];
+}
 
 /** Do the kinds that have enough rebuilds hold most of all rebuilds? Else the margins say more. */
 function speaksForMost({ groups, n }: Comparison): boolean {
@@ -54,7 +62,7 @@ function speaksForMost({ groups, n }: Comparison): boolean {
 }
 
 /** First by the lower end, and the one that brings least; null where fewer than two are ranked or no difference shows. */
-export function extremes({ groups, average }: Comparison): Extremes | null {
+function extremes({ groups, average }: Comparison): Extremes | null {
   const ranked = groups.filter((group) => group.rank !== null);
   if (ranked.length < 2 || !average || average.betweenVariance === 0) return null;
   const best = ranked.reduce((a, b) => ((a.rank ?? 0) < (b.rank ?? 0) ? a : b));

@@ -4,7 +4,7 @@ import type { Formatter } from '#shared/formatter.ts';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { useShopPath } from '../rebuild-link.tsx';
 import { capital } from '../sentences/parts.ts';
-import { extremes, fitsOf, type Group, nameOf, type PayView } from '../sentences/what-pays.ts';
+import { fitsOf, type Group, leads, nameOf, type PayView } from '../sentences/what-pays.ts';
 import { groupSearch } from './groups.ts';
 
 /** How a kind's figure comes about, worked through on the one that leads. */
@@ -13,8 +13,9 @@ export function PaysWorkedOut({ answer, view }: { answer: WhatPaysAnswer; view: 
   const path = useShopPath();
   const fits = fitsOf(answer, view);
   const isHour = view === 'per-hour';
-  const fit = [fits.cells, fits.damages, fits.classes].find((one) => extremes(one) !== null) ?? fits.cells;
-  const group = extremes(fit)?.best ?? fit.groups.find((one) => one.pulled !== null);
+  const [lead] = leads(fits);
+  const fit = lead?.fit ?? fits.cells;
+  const group = lead?.found.best ?? fit.groups.find((one) => one.pulled !== null);
   return (
     <>
       <p>

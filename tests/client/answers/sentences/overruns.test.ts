@@ -57,7 +57,7 @@ test('seen is set against unseen only where both have enough', () => {
 test('hours, surprises and what nobody planned for stand in the caution', () => {
   const reply = {
     ...overrunsReply(20, 0.3, [{ ...category('tow', 9, 0), unbudgetedCount: 2, unbudgetedCents: 30_000 }]),
-    hours: { ...overrunsReply(20, 0.49).total, plannedSeconds: 1, actualSeconds: 2, dots: [], bins: [] },
+    hours: { ...overrunsReply(20, 0.49).total, plannedSeconds: 1, actualSeconds: 2, dots: [], bins: [], years: [] },
     surprises: { ...overrunsReply(20, 0).surprises, n: 18, x: 9, rate: 0.5, lower: 0.3, upper: 0.7 },
   };
   expect(sayOverruns(reply, format).cautions).toEqual(

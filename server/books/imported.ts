@@ -29,15 +29,6 @@ export interface ImportedHours extends Source {
   readonly task: string | null;
 }
 
-export interface ImportedBaseline {
-  readonly rebuildId: string;
-  readonly madeOn: string | null;
-  readonly plannedSeconds: number | null;
-  readonly expectedSaleCents: number | null;
-  /** Category id → cents. */
-  readonly lines: ReadonlyMap<string, number>;
-}
-
 export interface Importing {
   readonly shopId: string;
   readonly importId: string;
@@ -45,7 +36,7 @@ export interface Importing {
   readonly at: string;
 }
 
-const SHEET = 1;
+export const SHEET = 1;
 const DRAWN = 20_000;
 const ENTRY =
   'id shop_id rebuild_id category_id dated_on cents vendor what foreseen is_extra is_guess import_id import_sheet import_row import_col created_at created_by'.split(
@@ -66,13 +57,6 @@ export function importedBooks(raw: RawDatabase, { shopId, importId, userId, at }
   const hours = bulkInsert(raw, 'hours', HOURS);
   const rows = bulkInsert(raw, 'import_rows', RAW_ROW);
   const nextId = idSupply();
-  const estimate = raw.prepare(
-    `INSERT INTO estimates (id, shop_id, rebuild_id, revision, is_baseline, made_on, planned_seconds, expected_sale_cents, locked_at, import_id, created_at)
-     VALUES (?, ?, ?, 0, 1, ?, ?, ?, ?, ?, ?)`,
-  );
-  const estimateLine = raw.prepare(
-    'INSERT INTO estimate_lines (shop_id, estimate_id, category_id, cents) VALUES (?, ?, ?, ?)',
-  );
   const worker = raw.prepare('INSERT INTO workers (id, shop_id, name, is_paid) VALUES (?, ?, ?, 0)');
 
   return {
@@ -119,49 +103,11 @@ export function importedBooks(raw: RawDatabase, { shopId, importId, userId, at }
     row(line: number, cells: readonly string[], outcome: string, reason: string | null): void {
       rows.add(shopId, importId, SHEET, line, JSON.stringify(cells), outcome, reason);
     },
-    /** The plan that came with a rebuild, locked at once: its work was begun long ago. */
-    baseline(b: ImportedBaseline): void {
-      const id = nextId();
-      estimate.run(id, shopId, b.rebuildId, b.madeOn, b.plannedSeconds, b.expectedSaleCents, at, importId, at);
-      for (const [categoryId, cents] of b.lines) estimateLine.run(shopId, id, categoryId, cents);
-    },
     /** A person named in a log of hours; unpaid until someone says otherwise. Gives the id. */
     worker(name: string): string {
       const id = nextId();
       worker.run(id, shopId, name);
       return id;
-    },
-    /** A rebuild that the file brings: columns of its table → values. */
-    rebuild(id: string, row: number, columns: ReadonlyMap<string, string | number>): void {
-      const known = [...columns];
-      const names = [
-        'id',
-        'shop_id',
-        'import_id',
-        'import_sheet',
-        'import_row',
-        'created_at',
-        ...known.map(([name]) => name),
-      ];
-      raw
-        .prepare(`INSERT INTO rebuilds (${names.join(', ')}) VALUES (${names.map(() => '?').join(', ')})`)
-        .run(id, shopId, importId, SHEET, row, at, ...known.map(([, value]) => value));
-    },
-    /** Fills what the books did not know of a rebuild. Gives the columns filled, with their values. */
-    fill(id: string, columns: ReadonlyMap<string, string | number>): Record<string, string | number> {
-      const before = raw.prepare('SELECT * FROM rebuilds WHERE shop_id = ? AND id = ?').get(shopId, id) as Record<
-        string,
-        unknown
-      >;
-      const filled = Object.fromEntries([...columns].filter(([name]) => before[name] === null));
-      const names = Object.keys(filled);
-      if (names.length === 0) return {};
-      raw
-        .prepare(
-          `UPDATE rebuilds SET ${names.map((name) => `${name} = ?`).join(', ')}, version = version + 1 WHERE shop_id = ? AND id = ?`,
-        )
-        .run(...Object.values(filled), shopId, id);
-      return filled;
     },
     nextId,
     flush(): void {

@@ -1,7 +1,8 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { useEffect, useRef } from 'react';
 import { Link, useNavigate, useParams } from 'react-router-dom';
-import type { Import, Reading } from '#shared/contracts/imports.ts';
+import type { Reading } from '#shared/contracts/import-reading.ts';
+import type { Import } from '#shared/contracts/imports.ts';
 import { AsidesTable } from '../features/imports/asides-table.tsx';
 import { ChoicesPanel } from '../features/imports/choices-panel.tsx';
 import { ColumnTable } from '../features/imports/column-table.tsx';
@@ -39,7 +40,7 @@ export function ImportPage() {
         </Panel>
       )}
       {canWrite && !isUnderWay(file.state) && (
-        <ImportActs file={file} settings={settings} onDropped={() => navigate(list)} />
+        <ImportActs file={file} settings={settings} onDropped={() => void navigate(list)} />
       )}
       {file.reading && !isUnderWay(file.state) && (
         <Review file={file} reading={file.reading} settings={settings} canWrite={canWrite} />

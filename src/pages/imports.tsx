@@ -22,7 +22,7 @@ export function ImportsPage() {
         title="Import"
         note="Bring in the years that lie in old spreadsheets, and see that nothing is lost and nothing counted twice."
       />
-      {canWrite && <DropZone onUploaded={(importId) => navigate(to(importId))} />}
+      {canWrite && <DropZone onUploaded={(importId) => void navigate(to(importId))} />}
       {rows.length === 0 ? (
         <EmptyState title="Every file that was brought in will stand here">
           With each come its own totals beside what was booked, the rows that were put aside, and a way to take it out

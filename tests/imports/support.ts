@@ -1,6 +1,7 @@
 import { readFileSync } from 'node:fs';
 import path from 'node:path';
-import type { ImportSettings, Reading } from '#shared/contracts/imports.ts';
+import type { Reading } from '#shared/contracts/import-reading.ts';
+import type { ImportSettings } from '#shared/contracts/imports.ts';
 import { DEFAULT_CATEGORIES, DEFAULT_CLASSES, DEFAULT_DAMAGES } from '#shared/vocabulary.ts';
 import type { ShopBooks } from '../../server/features/imports/books.ts';
 import { readFile } from '../../server/features/imports/read/read-file.ts';

@@ -1,7 +1,7 @@
 import { readFileSync } from 'node:fs';
 import path from 'node:path';
 import { z } from 'zod';
-import type { Reading } from '#shared/contracts/imports.ts';
+import type { Reading } from '#shared/contracts/import-reading.ts';
 import { linesOf } from './support.ts';
 
 /** The truth beside each sample (`NAME.truth.json`), as far as it is compared here. */

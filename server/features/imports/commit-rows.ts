@@ -1,5 +1,7 @@
-import type { Control, ImportSettings } from '#shared/contracts/imports.ts';
+import type { Control } from '#shared/contracts/import-reading.ts';
+import type { ImportSettings } from '#shared/contracts/imports.ts';
 import { type ImportedBooks, importedBooks, type Importing } from '../../books/imported.ts';
+import { type ImportedRebuilds, importedRebuilds } from '../../books/imported-rebuilds.ts';
 import { refreshOverhead, refreshRollup } from '../../books/rollup.ts';
 import type { Filled } from '../../books/unimport.ts';
 import type { RawDatabase } from '../../platform/database.ts';
@@ -60,7 +62,7 @@ export function commitRows(
   );
   if (!isSame(read.control, task.control)) throw new ReadingOutdated();
   books.flush();
-  const filled = writeRebuilds(raw, books, read, writer, task, plan);
+  const filled = writeRebuilds(raw, importedRebuilds(raw, task), read, writer, task, plan);
   if (writer.touched.size > 0) refreshRollup(raw, task.shopId, [...writer.touched]);
   if (writer.hasOverhead()) refreshOverhead(raw, task.shopId);
   return { filled, workerIds: writer.workerIds };
@@ -68,7 +70,10 @@ export function commitRows(
 
 function isSame(a: Control, b: Control): boolean {
   const sorted = (control: Control) =>
-    JSON.stringify({ ...control, centsByCategory: Object.entries(control.centsByCategory).sort() });
+    JSON.stringify({
+      ...control,
+      centsByCategory: Object.entries(control.centsByCategory).sort(([x], [y]) => x.localeCompare(y)),
+    });
   return sorted(a) === sorted(b);
 }
 
@@ -142,7 +147,7 @@ function lineWriter(raw: RawDatabase, books: ImportedBooks, shopId: string) {
 
 function writeRebuilds(
   raw: RawDatabase,
-  books: ImportedBooks,
+  books: ImportedRebuilds,
   read: RowsRead,
   writer: ReturnType<typeof lineWriter>,
   task: CommitTask,

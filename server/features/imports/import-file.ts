@@ -1,5 +1,6 @@
 import { writeFile } from 'node:fs/promises';
-import type { ImportSettings, Reading } from '#shared/contracts/imports.ts';
+import type { Reading } from '#shared/contracts/import-reading.ts';
+import type { ImportSettings } from '#shared/contracts/imports.ts';
 import { shopScope } from '../../books/scope.ts';
 import type { Config } from '../../platform/config.ts';
 import type { Database } from '../../platform/database.ts';

@@ -1,5 +1,6 @@
 import { z } from 'zod';
-import type { Import, ImportRow, ImportSummary, Outcome } from '#shared/contracts/imports.ts';
+import type { Outcome } from '#shared/contracts/import-reading.ts';
+import type { Import, ImportRow, ImportSummary } from '#shared/contracts/imports.ts';
 import type { ShopScope } from '../../books/scope.ts';
 import { readCursor, writeCursor } from '../../platform/cursor.ts';
 import { fromRow } from '../../platform/rows.ts';

@@ -1,4 +1,4 @@
-import type { RebuildFound } from '#shared/contracts/imports.ts';
+import type { RebuildFound } from '#shared/contracts/import-reading.ts';
 
 type Words = ReadonlyMap<string, string>;
 

@@ -1,4 +1,5 @@
-import type { Control, ImportSettings, ImportState, Reading, Shape } from '#shared/contracts/imports.ts';
+import type { Control, Reading, Shape } from '#shared/contracts/import-reading.ts';
+import type { ImportSettings, ImportState } from '#shared/contracts/imports.ts';
 import { fromRow } from '../../platform/rows.ts';
 import type { ShopScope } from '../../books/scope.ts';
 

@@ -42,7 +42,7 @@ export async function uploadImport(ctx: Context<typeof importsApi.upload>): Prom
 }
 
 function alreadyIn(committedAt: string | null): ProblemError {
-  const day = committedAt?.slice(0, 10) ?? 'before';
+  const day = committedAt?.slice(0, 10) ?? 'an earlier day';
   return new ProblemError(409, {
     name: 'already-in',
     detail: `This very file came in on ${day}: there is nothing new in it.`,

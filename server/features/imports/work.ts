@@ -1,6 +1,7 @@
 import BetterSqlite3 from 'better-sqlite3';
 import { chainedAfterLast } from './trail-record.ts';
-import type { ImportSettings, Reading } from '#shared/contracts/imports.ts';
+import type { Reading } from '#shared/contracts/import-reading.ts';
+import type { ImportSettings } from '#shared/contracts/imports.ts';
 import { removeImported, undoObstacle } from '../../books/unimport.ts';
 import { preparePragmas, type RawDatabase } from '../../platform/database.ts';
 import { type Brought, type CommitTask, commitRows, ReadingOutdated } from './commit-rows.ts';

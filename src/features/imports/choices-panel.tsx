@@ -1,4 +1,4 @@
-import type { Choice, Reading } from '#shared/contracts/imports.ts';
+import type { Choice, Reading } from '#shared/contracts/import-reading.ts';
 import { Panel } from '../../ui/panel.tsx';
 import { SelectField } from '../../ui/text-field.tsx';
 import type { Settings } from './use-settings.ts';

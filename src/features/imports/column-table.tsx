@@ -1,4 +1,4 @@
-import { type Column as FileColumn, MEANINGS, type Meaning, type Reading } from '#shared/contracts/imports.ts';
+import { type Column as FileColumn, MEANINGS, type Meaning, type Reading } from '#shared/contracts/import-reading.ts';
 import { Panel } from '../../ui/panel.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
 import { SelectField } from '../../ui/text-field.tsx';
@@ -16,14 +16,14 @@ type Props = { reading: Reading; settings: Settings; categories: readonly string
 export function ColumnTable({ reading, settings, categories, canChange }: Props) {
   const columns: Column<FileColumn>[] = [
     { id: 'heading', header: 'Column', heads: true, cell: (column) => column.heading || `Column ${column.col}` },
-    { id: 'samples', header: 'First values', cell: (column) => <Samples column={column} /> },
+    { id: 'samples', header: 'First values', width: 'min-w-48', cell: (column) => <Samples column={column} /> },
     {
       id: 'meaning',
       header: 'Taken for',
-      width: 'w-72',
+      width: 'w-72 min-w-56',
       cell: (column) => (canChange ? <MeaningField {...{ column, settings, categories }} /> : meaningWords(column)),
     },
-    { id: 'why', header: 'Why', cell: (column) => <span className="text-soft">{column.why}</span> },
+    { id: 'why', header: 'Why', width: 'min-w-56', cell: (column) => <span className="text-soft">{column.why}</span> },
   ];
   return (
     <Panel

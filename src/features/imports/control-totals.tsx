@@ -1,4 +1,4 @@
-import type { Reading, StatedTotal } from '#shared/contracts/imports.ts';
+import type { Reading, StatedTotal } from '#shared/contracts/import-reading.ts';
 import { Hours, Money } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { Panel } from '../../ui/panel.tsx';
@@ -19,20 +19,14 @@ export function ControlTotals({ reading }: { reading: Reading }) {
       value: format.number(control.notData),
     },
   ];
-  const sums = [
-    ...kinds.map(([name, cents]) => ({
-      name: name === 'purchase' ? 'Purchase' : name,
-      value: <Money cents={cents} shown="always" />,
-    })),
-    ...(control.saleCents !== 0 ? [{ name: 'Sales', value: <Money cents={control.saleCents} shown="always" /> }] : []),
-    ...(control.estimateCents !== 0
-      ? [{ name: 'Planned', value: <Money cents={control.estimateCents} shown="always" /> }]
-      : []),
-    ...(control.hoursSeconds !== 0 ? [{ name: 'Hours', value: <Hours seconds={control.hoursSeconds} exact /> }] : []),
-    ...(control.putAsideCents !== 0
-      ? [{ name: 'Readable on rows put aside', value: <Money cents={control.putAsideCents} shown="always" /> }]
-      : []),
-  ];
+  const money = (cents: number) => <Money cents={cents} shown="always" />;
+  const costs = kinds.map(([name, cents]) => ({ name: name === 'purchase' ? 'Purchase' : name, value: money(cents) }));
+  const others = [
+    { name: 'Sales', amount: control.saleCents, value: money(control.saleCents) },
+    { name: 'Planned costs', amount: control.estimateCents, value: money(control.estimateCents) },
+    { name: 'Hours', amount: control.hoursSeconds, value: <Hours seconds={control.hoursSeconds} exact /> },
+    { name: 'Readable on rows put aside', amount: control.putAsideCents, value: money(control.putAsideCents) },
+  ].filter((row) => row.amount !== 0);
   const columns: Column<{ name: string; value: React.ReactNode }>[] = [
     { id: 'name', header: 'What', heads: true, cell: (row) => row.name },
     { id: 'value', header: 'In this file', number: true, cell: (row) => row.value },
@@ -47,13 +41,18 @@ export function ControlTotals({ reading }: { reading: Reading }) {
           rowKey={(row) => row.name}
           foot={{ name: 'All rows, blank ones apart', value: format.number(control.rowsRead) }}
         />
-        <Table
-          caption="Sums"
-          rows={sums}
-          columns={columns}
-          rowKey={(row) => row.name}
-          foot={{ name: 'Costs together', value: <Money cents={control.costCents} shown="always" /> }}
-        />
+        {costs.length > 0 && (
+          <Table
+            caption="Costs"
+            rows={costs}
+            columns={columns}
+            rowKey={(row) => row.name}
+            foot={{ name: 'Costs together', value: money(control.costCents) }}
+          />
+        )}
+        {others.length > 0 && (
+          <Table caption="Beside costs" rows={others} columns={columns} rowKey={(row) => row.name} />
+        )}
       </div>
     </Panel>
   );

@@ -1,15 +1,15 @@
-import { type DragEvent, useRef, useState } from 'react';
+import { useRef, useState } from 'react';
 import { ApiProblem } from '../../lib/api-problem.ts';
 import { newIdempotencyKey } from '../../lib/api.ts';
 import { Button } from '../../ui/button.tsx';
 import { ErrorState } from '../../ui/states.tsx';
 import { useImportWrites } from './mutations.ts';
+import { useFileDrop } from './use-file-drop.ts';
 
 /** Takes a file by dropping it or by a button. A file that is in already asks before it comes in again. */
 export function DropZone({ onUploaded }: { onUploaded: (importId: string) => void }) {
-  const { upload } = useImportWrites();
+  const writes = useImportWrites();
   const input = useRef<HTMLInputElement>(null);
-  const [isOver, setOver] = useState(false);
   const [isBusy, setBusy] = useState(false);
   const [failed, setFailed] = useState<{ file: File; problem: unknown } | null>(null);
 
@@ -18,7 +18,7 @@ export function DropZone({ onUploaded }: { onUploaded: (importId: string) => voi
     setBusy(true);
     setFailed(null);
     try {
-      onUploaded((await upload(file, newIdempotencyKey(), importAnyway)).id);
+      onUploaded((await writes.upload(file, newIdempotencyKey(), importAnyway)).id);
     } catch (problem) {
       setFailed({ file, problem });
     } finally {
@@ -26,22 +26,12 @@ export function DropZone({ onUploaded }: { onUploaded: (importId: string) => voi
       if (input.current) input.current.value = '';
     }
   }
-  const onDrop = (event: DragEvent) => {
-    event.preventDefault();
-    setOver(false);
-    void send(event.dataTransfer.files[0]);
-  };
+  const isOver = useFileDrop((file) => void send(file));
   const isIn = failed?.problem instanceof ApiProblem && failed.problem.type === '/problems/already-in';
   return (
     <div className="mb-6 grid gap-4">
       <section
         aria-label="Bring a file in"
-        onDragOver={(event) => {
-          event.preventDefault();
-          setOver(true);
-        }}
-        onDragLeave={() => setOver(false)}
-        onDrop={onDrop}
         className={`panel grid justify-items-start gap-3 border-dashed ${isOver ? 'border-ink bg-paper' : 'border-edge'}`}
       >
         <h2 className="text-lead font-[660]">Drop an old spreadsheet here, saved as CSV</h2>
@@ -62,13 +52,15 @@ export function DropZone({ onUploaded }: { onUploaded: (importId: string) => voi
           Choose a file
         </Button>
       </section>
-      {failed && <ErrorState error={failed.problem} />}
+      {failed && !isIn && <ErrorState error={failed.problem} />}
       {failed && isIn && (
-        <div>
+        <section role="alert" className="panel grid justify-items-start gap-3 border-l-4 border-l-edge">
+          <h2 className="text-lead font-bold">{failed.file.name} is in already</h2>
+          <p className="text-soft">{(failed.problem as ApiProblem).message}</p>
           <Button busy={isBusy} onClick={() => void send(failed.file, true)}>
-            Bring {failed.file.name} in once more all the same
+            Bring it in once more all the same
           </Button>
-        </div>
+        </section>
       )}
     </div>
   );

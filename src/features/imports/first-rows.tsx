@@ -1,5 +1,5 @@
 import { useState } from 'react';
-import type { FirstRow, Line, Reading } from '#shared/contracts/imports.ts';
+import type { FirstRow, Line, Reading } from '#shared/contracts/import-reading.ts';
 import { Button } from '../../ui/button.tsx';
 import { Hours, Money } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
@@ -15,8 +15,8 @@ export function FirstRows({ reading }: { reading: Reading }) {
   const rows = isAll ? reading.firstRows : reading.firstRows.slice(0, AT_FIRST);
   const columns: Column<FirstRow>[] = [
     { id: 'row', header: 'Row', heads: true, cell: (row) => row.row },
-    { id: 'cells', header: 'As it stands in the file', width: 'w-1/2', cell: (row) => <Cells row={row} /> },
-    { id: 'read', header: 'As it was read', cell: (row) => <Reads row={row} reading={reading} /> },
+    { id: 'cells', header: 'As it stands in the file', width: 'w-1/2 min-w-72', cell: (row) => <Cells row={row} /> },
+    { id: 'read', header: 'As it was read', width: 'min-w-64', cell: (row) => <Reads row={row} reading={reading} /> },
   ];
   return (
     <Panel title="The first rows, as they were read">

@@ -13,6 +13,7 @@ export function ImportActs({ file, settings, onDropped }: { file: Import; settin
   const [busy, setBusy] = useState(false);
   const [problem, setProblem] = useState<unknown>(null);
   const [asks, setAsks] = useState<'drop' | 'undo' | null>(null);
+  const taken = file.reading?.control.taken ?? 0;
   const isOpen = file.reading?.choices.some((choice) => choice.mustAsk && choice.answer === null) ?? false;
 
   async function act(work: () => Promise<unknown>) {
@@ -42,10 +43,10 @@ export function ImportActs({ file, settings, onDropped }: { file: Import; settin
         )}
         {file.state === 'ready' && settings.count === 0 && (
           <Button kind="main" busy={busy} disabled={isOpen} onClick={() => void act(() => writes.commit(file))}>
-            {isOpen ? 'Answer the questions first' : `Book ${file.reading?.control.taken ?? 0} rows`}
+            {isOpen ? 'Answer the questions first' : `Book ${taken} ${taken === 1 ? 'row' : 'rows'}`}
           </Button>
         )}
-        {settings.count > 0 && <Button onClick={settings.reset}>Forget the changes</Button>}
+        {settings.count > 0 && <Button onClick={() => settings.reset()}>Forget the changes</Button>}
         {isWaiting && <Button onClick={() => setAsks('drop')}>Drop this file</Button>}
         {file.state === 'committed' && <Button onClick={() => setAsks('undo')}>Take it out again</Button>}
       </div>

@@ -1,5 +1,6 @@
 import type { ReactNode } from 'react';
-import type { Import, Reading } from '#shared/contracts/imports.ts';
+import type { Reading } from '#shared/contracts/import-reading.ts';
+import type { Import } from '#shared/contracts/imports.ts';
 import { AnswerHeader, Mark } from '../../ui/answer-header.tsx';
 import { Money } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';

@@ -10,15 +10,17 @@ export function ImportProgress({ file }: { file: Import }) {
       subtitle="You may leave this page; the work goes on."
     >
       <div className="grid max-w-[38rem] gap-2">
-        <progress
-          className="h-3 w-full accent-ink"
-          max={100}
-          value={share}
+        <div
+          role="progressbar"
           aria-label="Share of the file gone through"
-        />
-        <p className="text-soft tabular-nums" role="status">
-          {share} %
-        </p>
+          aria-valuenow={share}
+          aria-valuemin={0}
+          aria-valuemax={100}
+          className="h-3 border border-edge bg-paper"
+        >
+          <div className="h-full bg-ink" style={{ width: `${share}%` }} />
+        </div>
+        <p className="text-soft tabular-nums">{share} %</p>
       </div>
     </Panel>
   );

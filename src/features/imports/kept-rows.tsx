@@ -1,6 +1,7 @@
 import { useSuspenseInfiniteQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import type { ImportRow, Outcome } from '#shared/contracts/imports.ts';
+import type { Outcome } from '#shared/contracts/import-reading.ts';
+import type { ImportRow } from '#shared/contracts/imports.ts';
 import { Panel } from '../../ui/panel.tsx';
 import { Pager } from '../../ui/pager.tsx';
 import { Segmented } from '../../ui/segmented.tsx';

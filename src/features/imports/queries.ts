@@ -1,5 +1,6 @@
 import { infiniteQueryOptions, keepPreviousData, queryOptions } from '@tanstack/react-query';
-import { type ImportState, importsApi, type Outcome } from '#shared/contracts/imports.ts';
+import type { Outcome } from '#shared/contracts/import-reading.ts';
+import { type ImportState, importsApi } from '#shared/contracts/imports.ts';
 import { call } from '../../lib/api.ts';
 
 const ASK_AGAIN_MS = 700;

@@ -1,5 +1,5 @@
 import { useMemo } from 'react';
-import type { Reading, RebuildFound } from '#shared/contracts/imports.ts';
+import type { Reading, RebuildFound } from '#shared/contracts/import-reading.ts';
 import { DataTable } from '../../ui/data-table.tsx';
 import { Money } from '../../ui/figures.tsx';
 import { Panel } from '../../ui/panel.tsx';

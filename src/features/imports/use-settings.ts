@@ -1,5 +1,6 @@
 import { useState } from 'react';
-import type { ColumnChoice, Import, ImportSettings, Reading } from '#shared/contracts/imports.ts';
+import type { ColumnChoice, Reading } from '#shared/contracts/import-reading.ts';
+import type { Import, ImportSettings } from '#shared/contracts/imports.ts';
 
 /**
  * What a person has said of a file but not sent yet: changed columns and answers. `settings` is null while nothing is

@@ -1,4 +1,5 @@
-import type { AsideReason, ImportState, Meaning, NotData } from '#shared/contracts/imports.ts';
+import type { AsideReason, Meaning, NotData } from '#shared/contracts/import-reading.ts';
+import type { ImportState } from '#shared/contracts/imports.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 
 /** What a column may hold, in words, in the order in which it is offered. */

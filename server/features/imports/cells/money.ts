@@ -16,7 +16,7 @@ export function moneyReader(decimal: DecimalMark): (text: string, isCostCell?: b
     if (plain >= 0) return plain;
     const trimmed = text.trim();
     if (trimmed === '') return 'blank';
-    if (NOTHING.has(trimmed.toLowerCase())) return isCostCell ? 'blank' : 'bad';
+    if (saysNothing(trimmed)) return isCostCell ? 'blank' : 'bad';
     const cents = parseCents(trimmed.replace(SIGN, '').replace(/^\+|[.,]-+$/, ''), decimal);
     if (cents !== null) return cents;
     return /\d/.test(trimmed) && ROUGH.test(trimmed) ? 'rough' : 'bad';
@@ -54,9 +54,15 @@ function plainCents(text: string): number {
 export function looksLikeMoney(text: string): boolean {
   const bare = text
     .trim()
+    .replace(/^(?:~|ca\.?|about|approx\.?)|(?:ish|\?|k)$/gi, '')
     .replace(SIGN, '')
     .replace(/[\s'’()+\-−–]/g, '');
   return bare !== '' && /^\d[\d.,]*$/.test(bare);
+}
+
+/** Does a cell say in words that there is no amount? */
+export function saysNothing(text: string): boolean {
+  return NOTHING.has(text.trim().toLowerCase());
 }
 
 /** Which decimal mark a cell speaks for: 1 = point, −1 = comma, 0 = either. */

@@ -1,4 +1,4 @@
-import type { RebuildFound } from '#shared/contracts/imports.ts';
+import type { RebuildFound } from '#shared/contracts/import-reading.ts';
 import type { ExistingRebuild } from '../books.ts';
 
 /** A rebuild while rows are being read. `place` is its place in the list of those that rows came in for; −1 = none yet. */

@@ -1,4 +1,4 @@
-import type { AsideReason, Choice, Column, Line, NotData, Outcome, Shape } from '#shared/contracts/imports.ts';
+import type { AsideReason, Choice, Column, Line, NotData, Outcome, Shape } from '#shared/contracts/import-reading.ts';
 import type { Day } from '#shared/day.ts';
 import type { ShopBooks } from '../books.ts';
 import type { DecimalMark, Money } from '../cells/money.ts';

@@ -1,4 +1,5 @@
-import type { Aside, FirstRow, ImportSettings, Line, Reading } from '#shared/contracts/imports.ts';
+import type { Aside, FirstRow, Line, Reading } from '#shared/contracts/import-reading.ts';
+import type { ImportSettings } from '#shared/contracts/imports.ts';
 import type { ShopBooks } from '../books.ts';
 import { FileRefusal } from '../refusal.ts';
 import type { ByteSource } from '../text/bytes.ts';

@@ -1,4 +1,4 @@
-import type { Aside, Control, NotData, RebuildFound, StatedTotal } from '#shared/contracts/imports.ts';
+import type { Aside, Control, NotData, RebuildFound, StatedTotal } from '#shared/contracts/import-reading.ts';
 import { readHours } from '../cells/hours.ts';
 import type { ByteSource } from '../text/bytes.ts';
 import { forEachRow } from '../text/rows.ts';

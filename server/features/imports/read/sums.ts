@@ -1,4 +1,4 @@
-import type { StatedTotal } from '#shared/contracts/imports.ts';
+import type { StatedTotal } from '#shared/contracts/import-reading.ts';
 
 interface Sum {
   taken: number;

@@ -1,4 +1,4 @@
-import type { AsideReason, Column, Meaning, RebuildFound } from '#shared/contracts/imports.ts';
+import type { AsideReason, Column, Meaning, RebuildFound } from '#shared/contracts/import-reading.ts';
 import { readHours } from '../cells/hours.ts';
 import { remembered } from '../cells/fold.ts';
 import { classReader, damageReader, yesOrNo } from '../words/kinds.ts';

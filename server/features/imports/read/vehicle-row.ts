@@ -1,4 +1,4 @@
-import type { Column } from '#shared/contracts/imports.ts';
+import type { Column } from '#shared/contracts/import-reading.ts';
 import type { ExistingRebuild } from '../books.ts';
 import { fold } from '../cells/fold.ts';
 import { SUM_OF_COSTS } from '../understand/derived.ts';

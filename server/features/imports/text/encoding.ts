@@ -45,7 +45,11 @@ export function refuseNotText(head: Buffer): void {
 function zeros(bytes: Buffer): [even: number, odd: number] {
   let even = 0;
   let odd = 0;
-  for (let i = 0; i < bytes.length; i++) if (bytes[i] === 0) i % 2 === 0 ? even++ : odd++;
+  for (let i = 0; i < bytes.length; i++) {
+    if (bytes[i] !== 0) continue;
+    if (i % 2 === 0) even++;
+    else odd++;
+  }
   return [even, odd];
 }
 

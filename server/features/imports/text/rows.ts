@@ -16,6 +16,8 @@ export type OnRow = (cells: string[], line: number, isMalformed: boolean) => voi
 
 const LONGEST_CELL = 1024 * 1024;
 const MOST_CELLS = 1000;
+// A broken quotation mark may take a line break in with it; more, and it has swallowed other rows.
+const LONGEST_MALFORMED = 2;
 // A text cell that would run as a formula is written with an apostrophe before it; that is not part of the text.
 const GUARDED = /^'[=+\-@\t\r]/;
 
@@ -57,6 +59,7 @@ export function forEachRow(
         throw new FileRefusal('too-wide', `Line ${start} has ${cells.length} cells; ${MOST_CELLS} is the most.`, start);
       if (isLast && i === data.length - 1 && cells.length === 1 && cells[0] === '') continue;
       if (start === 1 && format.hasNamedDelimiter) continue;
+      if (malformed?.has(i) && line - start > LONGEST_MALFORMED) refuseOpen(start);
       unguard(cells);
       onRow(cells, start, malformed?.has(i) ?? false);
     }
@@ -87,6 +90,10 @@ function refuseBroken(errors: Parsed['errors'], data: string[][], line: number):
   const open = errors.find((error) => error.code === 'MissingQuotes');
   if (!open) return;
   const row = line + data.slice(0, open.row).reduce((sum, cells) => sum + 1 + lineBreaks(cells), 0);
+  refuseOpen(row);
+}
+
+function refuseOpen(row: number): never {
   throw new FileRefusal(
     'unclosed-quote',
     `A quotation mark opened on line ${row} is never closed. Close it and bring the file in again.`,

@@ -1,4 +1,4 @@
-import type { Choice } from '#shared/contracts/imports.ts';
+import type { Choice } from '#shared/contracts/import-reading.ts';
 import { fold } from '../cells/fold.ts';
 import { type CategoryMeaning, categoryReader, otherCategory, PURCHASE, SALE } from '../words/categories.ts';
 

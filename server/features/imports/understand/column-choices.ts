@@ -1,4 +1,4 @@
-import type { Choice, Column, Shape } from '#shared/contracts/imports.ts';
+import type { Choice, Column, Shape } from '#shared/contracts/import-reading.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import type { ShopBooks } from '../books.ts';
 import { otherCategory } from '../words/categories.ts';

@@ -1,6 +1,6 @@
 import { looksLikeDay } from '../cells/days.ts';
 import { readHours } from '../cells/hours.ts';
-import { looksLikeMoney } from '../cells/money.ts';
+import { looksLikeMoney, saysNothing } from '../cells/money.ts';
 import type { Head } from './head.ts';
 
 /** What the cells below a heading look like, as shares of its filled cells (0–1). */
@@ -26,7 +26,7 @@ export function columnFacts(head: Head): ColumnFacts[] {
   return headings.map((heading, index) => {
     const cells = head.below
       .map((row) => (row.cells[index] ?? '').trim())
-      .filter((cell) => cell !== '' && cell !== heading.trim());
+      .filter((cell) => cell !== '' && cell !== heading.trim() && !saysNothing(cell));
     const share = (test: (cell: string) => boolean) => (cells.length ? cells.filter(test).length / cells.length : 0);
     return {
       col: index + 1,
@@ -42,7 +42,7 @@ export function columnFacts(head: Head): ColumnFacts[] {
   });
 }
 
-const MOSTLY = 0.6;
+const MOSTLY = 0.5;
 
 export const holdsMoney = (facts: ColumnFacts) => facts.filled === 0 || facts.money >= MOSTLY;
 export const holdsDays = (facts: ColumnFacts) => facts.filled === 0 || facts.day >= MOSTLY;

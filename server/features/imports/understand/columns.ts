@@ -1,4 +1,4 @@
-import type { Column, Meaning, Shape } from '#shared/contracts/imports.ts';
+import type { Column, Meaning, Shape } from '#shared/contracts/import-reading.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 import { type CategoryMeaning, PURCHASE, SALE } from '../words/categories.ts';
 import { headingMeanings, plannedPart } from '../words/headings.ts';

@@ -1,4 +1,4 @@
-import type { Choice, Column } from '#shared/contracts/imports.ts';
+import type { Choice, Column } from '#shared/contracts/import-reading.ts';
 import type { DateOrder } from '../cells/days.ts';
 import type { DateEvidence } from './survey.ts';
 

@@ -1,4 +1,4 @@
-import type { Column } from '#shared/contracts/imports.ts';
+import type { Column } from '#shared/contracts/import-reading.ts';
 import type { moneyReader } from '../cells/money.ts';
 import type { Head } from './head.ts';
 

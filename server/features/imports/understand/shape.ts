@@ -1,4 +1,4 @@
-import type { Meaning, Shape } from '#shared/contracts/imports.ts';
+import type { Meaning, Shape } from '#shared/contracts/import-reading.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import { type CategoryMeaning, SALE } from '../words/categories.ts';
 import { headingMeanings, plannedPart } from '../words/headings.ts';
@@ -23,13 +23,11 @@ export function guessShape(
       why: 'No row reads like headings. Put a row of headings (date, car, what, amount) above the list and bring it in again.',
     };
   }
-  const paid = head.above.find(
-    (row) => row.cells.filter(looksLikeMoney).length > 0 && row.cells.filter((cell) => cell.trim()).length > 1,
-  );
-  if (paid) {
+  const paid = head.above.filter((row) => row.cells.some(looksPaid));
+  if (paid.length >= FIGURES_ABOVE) {
     return {
       shape: null,
-      row: paid.line,
+      row: paid[0]?.line ?? null,
       why: 'There are figures above the headings: this looks like one sheet about one car, in sections. Such sheets cannot be read yet; list its costs one per row with the car beside each.',
     };
   }
@@ -37,8 +35,9 @@ export function guessShape(
     all.find((facts) => holds(facts) && headingMeanings(facts.heading).includes(meaning));
   const costs = all.filter((facts) => facts.filled > 0 && holdsMoney(facts) && isCost(facts, categoryOf));
   const name = means('stock number', () => true) ?? means('vehicle', holdsText) ?? means('model', () => true);
-  if (name && costs.length >= 2 && (name.distinct >= 0.8 || costs.length >= 4)) return { shape: 'vehicles' };
-  const hasMoney = means('amount', holdsMoney) ?? means('credit', holdsMoney);
+  const amount = means('amount', holdsMoney);
+  if (name && costs.length >= 2 && (name.distinct >= 0.8 || costs.length >= 4 || !amount)) return { shape: 'vehicles' };
+  const hasMoney = amount ?? means('credit', holdsMoney);
   if (name && hasMoney) return { shape: 'expenses' };
   if (name && means('hours', holdsHours) && means('date', holdsDays)) return { shape: 'hours' };
   return {
@@ -49,6 +48,10 @@ export function guessShape(
       : 'No column names the vehicle. Lists of costs need a column that says which car each row belongs to.',
   };
 }
+
+// One figure above the headings may be a title's; two rows of them are costs.
+const FIGURES_ABOVE = 2;
+const looksPaid = (cell: string) => looksLikeMoney(cell) && /[.,]\d\d(?!\d)|[$€£]/.test(cell);
 
 function isCost(facts: ColumnFacts, categoryOf: (text: string) => CategoryMeaning | null): boolean {
   const category = categoryOf(plannedPart(facts.heading) ?? facts.heading);

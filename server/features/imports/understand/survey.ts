@@ -1,4 +1,4 @@
-import type { Column } from '#shared/contracts/imports.ts';
+import type { Column } from '#shared/contracts/import-reading.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 import { currenciesIn, decimalVote, looksLikeMoney } from '../cells/money.ts';
 import { unsettledParts } from '../cells/days.ts';

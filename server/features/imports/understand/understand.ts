@@ -1,4 +1,5 @@
-import type { Choice, Column, ImportSettings, Reading, Shape } from '#shared/contracts/imports.ts';
+import type { Choice, Column, Reading, Shape } from '#shared/contracts/import-reading.ts';
+import type { ImportSettings } from '#shared/contracts/imports.ts';
 import type { ShopBooks } from '../books.ts';
 import { dayReader } from '../cells/days.ts';
 import { currenciesIn, type DecimalMark, moneyReader } from '../cells/money.ts';

@@ -1,4 +1,4 @@
-import type { Column, Meaning } from '#shared/contracts/imports.ts';
+import type { Column, Meaning } from '#shared/contracts/import-reading.ts';
 
 /** Place of the first column with a meaning, from 0; −1 = none. */
 export function placeOf(columns: readonly Column[], meaning: Meaning): number {

@@ -1,4 +1,4 @@
-import type { Choice } from '#shared/contracts/imports.ts';
+import type { Choice } from '#shared/contracts/import-reading.ts';
 import type { ExistingRebuild, ShopBooks } from '../books.ts';
 import { fold } from '../cells/fold.ts';
 import { type Draft, newDraft, tagMaker } from '../read/draft.ts';

@@ -1,3 +1,4 @@
+import { fold } from '../cells/fold.ts';
 import { isSlip, modelKey, readVehicle, type VehicleText } from './vehicle-text.ts';
 
 /** Spellings that mean one vehicle. */
@@ -85,11 +86,25 @@ function join(groups: Map<string, VehicleGroup>, spelling: string, part: Vehicle
   group.spellings.push(spelling);
 }
 
-/** The spelling used most; `10 Ceed` is preferred to `10 CEED` and `10 ceed`. */
+/** The spelling used most, in any case; of its cases `10 Ceed` is preferred to `10 CEED` and `10 ceed`. */
 function mostUsed(group: VehicleGroup, counts: ReadonlyMap<string, number>): string {
-  const rank = (spelling: string) =>
-    (counts.get(spelling) ?? 0) + (/\p{Lu}/u.test(spelling) && /\p{Ll}/u.test(spelling) ? 1e9 : 0);
-  return group.spellings.reduce((best, spelling) => (rank(spelling) > rank(best) ? spelling : best));
+  const inAnyCase = new Map<string, number>();
+  for (const spelling of group.spellings) {
+    const words = fold(spelling);
+    inAnyCase.set(words, (inAnyCase.get(words) ?? 0) + (counts.get(spelling) ?? 0));
+  }
+  const isMixed = (spelling: string) => /\p{Lu}/u.test(spelling) && /\p{Ll}/u.test(spelling);
+  const rank = (spelling: string) => [
+    inAnyCase.get(fold(spelling)) ?? 0,
+    isMixed(spelling) ? 1 : 0,
+    counts.get(spelling) ?? 0,
+  ];
+  return group.spellings.reduce((best, spelling) => (isAbove(rank(spelling), rank(best)) ? spelling : best));
+}
+
+function isAbove(a: readonly number[], b: readonly number[]): boolean {
+  const at = a.findIndex((value, i) => value !== b[i]);
+  return at >= 0 && (a[at] ?? 0) > (b[at] ?? 0);
 }
 
 const keyOf = (group: VehicleGroup) => group.id.slice(group.id.indexOf('|') + 1);

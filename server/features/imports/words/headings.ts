@@ -1,4 +1,4 @@
-import type { Meaning } from '#shared/contracts/imports.ts';
+import type { Meaning } from '#shared/contracts/import-reading.ts';
 import { fold } from '../cells/fold.ts';
 
 /** What a heading may mean, the likelier first; which it is, the cells below decide. */

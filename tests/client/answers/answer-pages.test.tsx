@@ -75,8 +75,14 @@ test('overruns: a step of one category shows by year, and what rests on too few 
 
 test('time to sell: the unsold stand in a list with age and money, and count in the figures', async () => {
   const unsold = {
-    ...{ ...rebuild('B-053'), stage: 'listed' as const, boughtOn: '2026-01-08', listedOn: '2026-04-21' },
-    ...{ daysSinceBought: 326, daysListed: 223, askingCents: 825_000, tiedUpCents: 758_635 },
+    ...rebuild('B-053'),
+    stage: 'listed' as const,
+    boughtOn: '2026-01-08',
+    listedOn: '2026-04-21',
+    daysSinceBought: 326,
+    daysListed: 223,
+    askingCents: 825_000,
+    tiedUpCents: 758_635,
   };
   const reply = { ...timeToSellReply(), unsold: { on: '2026-11-30', total: 1, cents: 758_635, rebuilds: [unsold] } };
   serve([{ contract: answersApi.timeToSell, reply: () => reply }]);

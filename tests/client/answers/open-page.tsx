@@ -45,8 +45,13 @@ function session(role: Role): Session {
     role,
     shop: {
       ...shop,
-      ...{ currency: 'USD', locale: 'en-US', timeZone: 'UTC', today: '2026-11-30', isDemo: false },
-      ...{ yearStartMonth: 1, wantedCentsPerHour: null },
+      currency: 'USD',
+      locale: 'en-US',
+      timeZone: 'UTC',
+      today: '2026-11-30',
+      isDemo: false,
+      yearStartMonth: 1,
+      wantedCentsPerHour: null,
     },
     shops: [{ ...shop, role }],
   };

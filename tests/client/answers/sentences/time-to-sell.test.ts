@@ -61,8 +61,17 @@ test('nothing listed', () => {
 
 test('two classes differ only where chance is unlikely', () => {
   const test = {
-    ...{ classA: 'compact car', classB: 'small SUV', nA: 12, nB: 16, observedA: 11, expectedA: 14.7, observedB: 16 },
-    ...{ expectedB: 12.3, variance: 5.7, chiSquare: 2.3, p: 0.126 },
+    classA: 'compact car',
+    classB: 'small SUV',
+    nA: 12,
+    nB: 16,
+    observedA: 11,
+    expectedA: 14.7,
+    observedB: 16,
+    expectedB: 12.3,
+    variance: 5.7,
+    chiSquare: 2.3,
+    p: 0.126,
   };
   const cautions = (p: number) =>
     sayTimeToSell({ ...timeToSellReply(), comparison: { ...test, p } }, format).cautions.at(-1);

@@ -77,8 +77,14 @@ describe('the answer', () => {
 
 describe('what a careful friend adds', () => {
   const before = {
-    ...{ year: 2025, from: '2025-01-01', to: '2025-12-31', through: '2025-11-30', exitCount: 8 },
-    ...{ keptCents: 1_531_000, wholeKeptCents: 1_700_000, aheadCents: 311_000 },
+    year: 2025,
+    from: '2025-01-01',
+    to: '2025-12-31',
+    through: '2025-11-30',
+    exitCount: 8,
+    keptCents: 1_531_000,
+    wholeKeptCents: 1_700_000,
+    aheadCents: 311_000,
   };
 
   test('the year before, to the same day', () => {

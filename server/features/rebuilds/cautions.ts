@@ -1,4 +1,4 @@
-import type { Caution } from '#shared/contracts/rebuilds.ts';
+import type { Caution } from '#shared/contracts/rebuild-outcome.ts';
 
 /** What of a rebuild can bring up a caution: words of its damage, class, cost categories and entries. */
 export interface CautionFacts {

@@ -1,5 +1,6 @@
 import type { z } from 'zod';
-import type { CategoryOutcome, Rebuild, rebuildDetailSchema } from '#shared/contracts/rebuilds.ts';
+import type { CategoryOutcome } from '#shared/contracts/rebuild-outcome.ts';
+import type { Rebuild, rebuildDetailSchema } from '#shared/contracts/rebuilds.ts';
 import type { Day } from '#shared/day.ts';
 import { checkVin } from '#shared/vin.ts';
 import { estimateStore } from '../../books/estimates.ts';

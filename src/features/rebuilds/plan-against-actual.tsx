@@ -1,4 +1,5 @@
-import type { CategoryOutcome, RebuildDetail } from '#shared/contracts/rebuilds.ts';
+import type { CategoryOutcome } from '#shared/contracts/rebuild-outcome.ts';
+import type { RebuildDetail } from '#shared/contracts/rebuilds.ts';
 import { GapBar } from '../../charts/gap-bar.tsx';
 import { Money, Nothing } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';

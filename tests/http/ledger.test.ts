@@ -165,7 +165,7 @@ describe('the ledger', () => {
     expect(pages.map((page) => page.rows.length)).toEqual([100, 100, 30]);
     expect(new Set(rows.map((row) => row.id)).size).toBe(230);
     const days = rows.map((row) => row.datedOn ?? '');
-    expect(days).toEqual([...days].sort().reverse());
+    expect(days).toEqual(days.toSorted((a: string, b: string) => (a < b ? 1 : -1)));
     expect(pages.map((page) => page.totals?.count ?? null)).toEqual([230, null, null]);
   });
 });

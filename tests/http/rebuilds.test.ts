@@ -296,7 +296,7 @@ describe('the list of rebuilds', () => {
     const days = (await ada.get('/api/rebuilds')).body.rows.map(
       (row: { boughtOn: string | null }) => row.boughtOn ?? '',
     );
-    expect(days).toEqual([...days].sort().reverse());
+    expect(days).toEqual(days.toSorted((a: string, b: string) => (a < b ? 1 : -1)));
   });
 
   it('filters by stage, class, damage, seen, year left and words, and sums what matches', async () => {

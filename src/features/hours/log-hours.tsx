@@ -20,12 +20,17 @@ export function LogHours({ row, today, back }: { row: BoardRow; today: string; b
   const format = useFormatter();
   const { log } = useOwnHoursWrites();
   const [hours, setHours] = useState('');
+  const [isTyped, setTyped] = useState(false);
   const [task, setTask] = useState<string | null>(null);
   const [workedOn, setWorkedOn] = useState(today);
   const [key, setKey] = useState(newIdempotencyKey);
   const [problem, setProblem] = useState<ApiProblem | string | null>(null);
   const [isBusy, setBusy] = useState(false);
   const seconds = parseHours(hours);
+  const choose = (length: string, typed: boolean) => {
+    setHours(length);
+    setTyped(typed);
+  };
 
   const onSubmit = async (event: FormEvent) => {
     event.preventDefault();
@@ -62,15 +67,20 @@ export function LogHours({ row, today, back }: { row: BoardRow; today: string; b
         <legend className="sr-only">How long</legend>
         {LENGTHS.map((length) => (
           <label key={length} className="hour-key">
-            <input type="radio" name="length" checked={hours === length} onChange={() => setHours(length)} />
+            <input
+              type="radio"
+              name="length"
+              checked={!isTyped && hours === length}
+              onChange={() => choose(length, false)}
+            />
             {length === '0.5' ? '½' : length}
           </label>
         ))}
       </fieldset>
       <TextField
         label="Or another length"
-        value={LENGTHS.includes(hours) ? '' : hours}
-        onChange={(event) => setHours(event.target.value)}
+        value={isTyped ? hours : ''}
+        onChange={(event) => choose(event.target.value, true)}
         placeholder="1.5 or 1:30"
         inputMode="decimal"
         className="tall-field"

@@ -5,6 +5,8 @@ import { useFormatter } from '../../ui/formatter-context.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
 
 type Views = z.output<typeof perHourSchema>;
+const NO_HOURS = 'no hours are known';
+
 type Row = { view: string; figure: React.ReactNode; made: string; n: number; missing: number };
 
 /** Profit per hour in three views, each with the sums behind it and how many rebuilds it rests on. */
@@ -16,14 +18,17 @@ export function PerHourViews({ views }: { views: Views }) {
     {
       view: 'By own hour',
       figure: <PerHour cents={own.pooledCents} tone="kept" why="no hours" />,
-      made: `${format.money(own.profitCents)} over ${format.hours(own.ownSeconds)} own hours`,
+      made: own.n === 0 ? NO_HOURS : `${format.money(own.profitCents)} over ${format.hours(own.ownSeconds)} own hours`,
       n: own.n,
       missing: own.missingCount,
     },
     {
       view: "By everybody's hour",
       figure: <PerHour cents={all.pooledCents} tone="kept" why="no hours" />,
-      made: `${format.money(all.profitCents)} and ${format.money(all.paidLaborCents)} wages given back, over ${format.hours(all.seconds)} hours`,
+      made:
+        all.n === 0
+          ? NO_HOURS
+          : `${format.money(all.profitCents)} and ${format.money(all.paidLaborCents)} wages given back, over ${format.hours(all.seconds)} hours`,
       n: all.n,
       missing: all.missingCount,
     },

@@ -17,7 +17,7 @@ export function ContingencyWorkedOut({ answer }: { answer: ContingencyAnswer }) 
         = (n + 1) × {p} ÷ {q} raised to a whole number. No curve is fitted and nothing between two rebuilds is made up.
         The next car like these stays within it with a chance of k ÷ (n + 1).
       </p>
-      <p className="tabular-nums">
+      <p className="tabular-nums" hidden={percent.n === 0}>
         ({percent.n} + 1) × {p} ÷ {q}, raised, is k = {percent.k}
         {percent.k > percent.n && `: more than the ${percent.n} there are, so nothing can be said at this level`}.
         {percent.taken && percent.uplift !== null && (

@@ -26,6 +26,7 @@ type Row = {
 /** Categories with plan, actual, pooled and typical overrun; what nobody had planned for stands beside, in no ratio. */
 export function OverrunsTable({ answer }: { answer: OverrunsAnswer }) {
   const rows = useRows(answer);
+  if (answer.total.n === 0 && rows.length === 1) return null;
   return (
     <section id="rows" className="mb-6 scroll-mt-6">
       <Panel

@@ -10,7 +10,7 @@ const words = (row: Row) => (row.seen === null ? 'Not said' : row.seen ? 'Seen b
 
 /** Does a look before buying go with fewer overruns and surprises? */
 export function SeenTable({ seen }: { seen: OverrunsAnswer['seen'] }) {
-  const rows = seen.filter((row) => row.n > 0 || row.surprises.n > 0);
+  const rows = seen.filter((row) => row.n > 0);
   if (rows.length === 0) return null;
   return (
     <Panel

@@ -27,19 +27,21 @@ export function SurprisesTable({ surprises }: { surprises: Surprises }) {
       title="Surprises"
       subtitle={`${format.number(surprises.x)} of ${format.count(surprises.n, 'rebuild')} had one.${share}${unknown}`}
     >
-      <Table
-        caption="Surprises by category"
-        rows={rows}
-        columns={COLUMNS}
-        rowKey={(row) => row.categoryId}
-        foot={{
-          name: 'Any of them',
-          x: format.number(surprises.x),
-          rate: <Percent rate={surprises.rate} />,
-          range: <RangeText low={surprises.lower} high={surprises.upper} />,
-          cost: <Money cents={surprises.unforeseenCents} />,
-        }}
-      />
+      {rows.length > 0 && (
+        <Table
+          caption="Surprises by category"
+          rows={rows}
+          columns={COLUMNS}
+          rowKey={(row) => row.categoryId}
+          foot={{
+            name: 'Any of them',
+            x: format.number(surprises.x),
+            rate: <Percent rate={surprises.rate} />,
+            range: <RangeText low={surprises.lower} high={surprises.upper} />,
+            cost: <Money cents={surprises.unforeseenCents} />,
+          }}
+        />
+      )}
     </Panel>
   );
 }

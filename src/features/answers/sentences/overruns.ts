@@ -1,6 +1,6 @@
 import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
 import type { Formatter } from '#shared/formatter.ts';
-import { capital, counted, mark, type Said, type Sentence, said, say } from './parts.ts';
+import { capital, counted, mark, type Said, type Sentence, said, say, words } from './parts.ts';
 
 type Category = OverrunsAnswer['categories'][number];
 
@@ -71,8 +71,8 @@ function cautions(answer: OverrunsAnswer, format: Formatter): string[] {
 function hoursWords(hours: OverrunsAnswer['hours'], format: Formatter): string | null {
   if (hours.pooled === null || hours.n === 0) return null;
   const rate = format.percent(Math.abs(hours.pooled));
-  const words = hours.pooled < 0 ? `${rate} under` : `${rate} over`;
-  return `Hours run ${words} plan${hours.isThin ? `, on ${counted(format, hours.n)}: too few yet` : ''}.`;
+  const way = hours.pooled < 0 ? 'under' : 'over';
+  return `Hours run ${rate} ${way} plan${hours.isThin ? `, on ${counted(format, hours.n)}: too few yet` : ''}.`;
 }
 
 function seenWords({ seen }: OverrunsAnswer, format: Formatter): string | null {
@@ -84,5 +84,5 @@ function seenWords({ seen }: OverrunsAnswer, format: Formatter): string | null {
 }
 
 function surpriseWords(surprises: OverrunsAnswer['surprises'], format: Formatter): string {
-  return `${capital(counted(format, surprises.x))} of ${format.number(surprises.n)} had at least one surprise.`;
+  return `${capital(words(format, surprises.x))} of ${format.number(surprises.n)} had at least one surprise.`;
 }

@@ -27,7 +27,7 @@ function noneSold({ overall }: TimeToSellAnswer, format: Formatter): Sentence {
   const wait = overall.longestDays;
   const waited = wait === null ? '' : say`; the longest has waited ${mark(format.days(wait))}`;
   if (overall.n === 1)
-    return say`The one listed has not sold so far${wait === null ? '' : say` after ${mark(format.days(wait))}`}.`;
+    return say`The one listed has not sold so far${wait === null ? '' : say`, after ${mark(format.days(wait))}`}.`;
   return say`None of the ${counted(format, overall.n, 'listed rebuild')} has sold so far${waited}.`;
 }
 

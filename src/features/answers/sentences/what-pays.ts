@@ -30,7 +30,7 @@ function sentence(answer: WhatPaysAnswer, view: PayView, format: Formatter): Sen
   const fits = fitsOf(answer, view);
   const { cells, classes, damages } = fits;
   if (answer.totals.n === 0) return ['Nothing has been finished yet, so nothing can be said of what pays.'];
-  if (cells.n === 0) return ['Hours are not known for any finished rebuild, so nothing can be said by the hour.'];
+  if (cells.n === 0 && view === 'per-hour') return noHours(answer, format);
   const [first, second] = leads(fits);
   if (first?.by === null) return say`${capital(nameOf(first.found.best))} ${pays(first.found, view, format)}.`;
   if (first) {
@@ -99,14 +99,22 @@ function noDifference(answer: WhatPaysAnswer, view: PayView, format: Formatter):
   return say`No kind of wreck can be told from another yet: all together they bring ${mark(payText(value, view, format))}.`;
 }
 
-function tooFew({ totals }: WhatPaysAnswer, format: Formatter): Sentence {
+function noHours(answer: WhatPaysAnswer, format: Formatter): Sentence {
+  return say`Hours are not known for any finished rebuild, so nothing can be said by the hour. ${inAll(answer, format)}`;
+}
+
+function tooFew(answer: WhatPaysAnswer, format: Formatter): Sentence {
+  return say`Too few yet to say which wrecks pay. ${inAll(answer, format)}`;
+}
+
+function inAll({ totals }: WhatPaysAnswer, format: Formatter): Sentence {
   const verb = totals.profitCents < 0 ? 'lost' : 'kept';
   const amount = mark(format.money(Math.abs(totals.profitCents)));
   const all =
     totals.n === 1
       ? 'The one finished rebuild'
       : `${capital(counted(format, totals.n, 'finished rebuild'))} all together`;
-  return say`Too few yet to say which wrecks pay. ${all} ${verb} ${amount} so far.`;
+  return say`${all} ${verb} ${amount} so far.`;
 }
 
 function cautions(answer: WhatPaysAnswer, view: PayView, format: Formatter): string[] {

@@ -23,8 +23,10 @@ type SetName = (typeof SETS)[number]['value'];
 export function PaysRanking({ answer, view }: { answer: WhatPaysAnswer; view: PayView }) {
   const { search, change } = useAddress();
   const by: SetName = SETS.find(({ value }) => value === search.get('by'))?.value ?? 'damages';
-  const { groups, average } = fitsOf(answer, view)[by];
+  const fits = fitsOf(answer, view);
+  const { groups, average } = fits[by];
   const columns = useColumns(view);
+  if (SETS.every(({ value }) => fits[value].groups.length === 0)) return null;
   const noDifference = average?.betweenVariance === 0;
   return (
     <Panel

@@ -63,7 +63,7 @@ test('hours, surprises and what nobody planned for stand in the caution', () => 
   expect(sayOverruns(reply, format).cautions).toEqual(
     expect.arrayContaining([
       'Hours run 49% over plan.',
-      'Nine rebuilds of 18 had at least one surprise.',
+      'Nine of 18 had at least one surprise.',
       '$300 went where nothing had been planned.',
     ]),
   );

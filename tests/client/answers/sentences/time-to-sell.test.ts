@@ -37,7 +37,7 @@ test('unsold only: no middle is made up', () => {
     'None of the three listed rebuilds has sold so far; the longest has waited 40 days.',
   );
   expect(plain(say({ ...unsold, n: 1, unsoldCount: 1 }).answer)).toBe(
-    'The one listed has not sold so far after 40 days.',
+    'The one listed has not sold so far, after 40 days.',
   );
 });
 

@@ -63,7 +63,7 @@ test('too few of everything: only what they kept all together', () => {
 test('nothing finished, or no hours', () => {
   expect(say(whatPaysReply({}, 0))).toBe('Nothing has been finished yet, so nothing can be said of what pays.');
   expect(say(whatPaysReply({}, 4))).toBe(
-    'Hours are not known for any finished rebuild, so nothing can be said by the hour.',
+    'Hours are not known for any finished rebuild, so nothing can be said by the hour. Four finished rebuilds all together kept $800 so far.',
   );
 });
 

@@ -13,7 +13,7 @@ export function Palette({ session, onClose }: { session: Session; onClose: () =>
   const items = usePaletteItems(session);
   const onPick = (item: PaletteItem) => {
     onClose();
-    if (item.to) navigate(item.to);
+    if (item.to) void navigate(item.to);
     item.run?.();
   };
   return (

@@ -20,6 +20,7 @@ export const PAGES: readonly PageToShoot[] = [
   { name: 'one-rebuild', path: 'rebuilds', follow: 'main a[href*="/rebuilds/"]' },
   { name: 'ledger', path: 'ledger' },
   { name: 'hours', path: 'hours' },
+  { name: 'own-hours', path: 'hours?view=mine' },
   { name: 'import', path: 'import' },
   { name: 'people', path: 'people' },
   { name: 'shop', path: 'shop' },

@@ -68,7 +68,7 @@ function MemberRow({ member, onPick, onTakeOut }: RowProps) {
         <div className="sm:text-right">
           <Button
             size="small"
-            aria-label={`Take ${name} out`}
+            aria-label={`Take out ${name}`}
             onClick={onTakeOut}
             className="min-h-10 whitespace-nowrap"
           >

@@ -46,7 +46,7 @@ export function WorkersPanel({ workers, canEdit }: { workers: readonly Worker[];
                 <Button
                   kind="plain"
                   size="small"
-                  aria-label={`Count ${worker.name} as ${worker.isPaid ? 'unpaid' : 'paid'}`}
+                  aria-label={`Make ${worker.isPaid ? 'unpaid' : 'paid'}: ${worker.name}`}
                   onClick={() => void onPaid(worker)}
                 >
                   {worker.isPaid ? 'Make unpaid' : 'Make paid'}

@@ -107,7 +107,7 @@ test('when another owner was quicker, both roles stand side by side and mine can
 test('takes a member out only after asking', async () => {
   serve();
   showPage(<PeoplePage />);
-  await userEvent.click(await screen.findByRole('button', { name: 'Take Mo Reyes out' }));
+  await userEvent.click(await screen.findByRole('button', { name: 'Take out Mo Reyes' }));
   const dialog = await screen.findByRole('dialog', { name: 'Take Mo Reyes out of the shop?' });
   await userEvent.click(within(dialog).getByRole('button', { name: 'Take Mo Reyes out' }));
   await waitFor(() => expect(screen.queryByLabelText('Role of Mo Reyes')).not.toBeInTheDocument());

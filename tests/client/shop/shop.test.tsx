@@ -233,8 +233,8 @@ test('a bookkeeper adds workers and says who is paid, and only reads the rest', 
   await userEvent.click(screen.getByRole('checkbox', { name: 'Paid' }));
   await userEvent.click(screen.getByRole('button', { name: 'Add' }));
   expect(await within(list).findByText('Ike Boone')).toBeInTheDocument();
-  await userEvent.click(screen.getByRole('button', { name: 'Count Ike Boone as unpaid' }));
-  expect(await screen.findByRole('button', { name: 'Count Ike Boone as paid' })).toBeInTheDocument();
+  await userEvent.click(screen.getByRole('button', { name: 'Make unpaid: Ike Boone' }));
+  expect(await screen.findByRole('button', { name: 'Make paid: Ike Boone' })).toBeInTheDocument();
 });
 
 test('an accountant reads; a mechanic is told whom to ask', async () => {

@@ -4,7 +4,7 @@ import { type RunningServer, startServer } from './server.ts';
 interface Own {
   /** A server with empty books, one per worker and shared by its tests: each test signs up its own shop. */
   emptyServer: RunningServer;
-  /** A server with the demo shop, one per worker; its tests only read. */
+  /** A server with the demo shop, one per worker: its tests leave no entry and no hours behind. */
   demoServer: RunningServer;
 }
 
@@ -24,6 +24,11 @@ export const test = base.extend<object, Own>({
     await provide(page);
     expect(complaints, 'complaints in the browser console').toEqual([]);
   },
+});
+
+/** The same on the demo server. */
+export const demoTest = test.extend({
+  baseURL: async ({ demoServer }, provide) => provide(demoServer.origin),
 });
 
 export { expect };

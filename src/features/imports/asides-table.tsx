@@ -17,7 +17,7 @@ export function AsidesTable({ reading }: { reading: Reading }) {
         id: 'reason',
         header: 'Why',
         sortBy: (one) => one.reason,
-        width: 'w-64',
+        width: 'w-64 min-w-44',
         cell: (one) => ASIDE_WORDS[one.reason],
       },
       {
@@ -29,7 +29,7 @@ export function AsidesTable({ reading }: { reading: Reading }) {
       {
         id: 'text',
         header: 'What stands there',
-        width: 'w-72',
+        width: 'w-72 min-w-44',
         cell: (one) => one.text || <span className="text-soft">nothing</span>,
       },
       {

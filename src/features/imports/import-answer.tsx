@@ -62,7 +62,7 @@ function CautionLine({ reading, file }: { reading: Reading; file: Import }) {
           , with <Money cents={control.putAsideCents} shown="always" /> readable on them
         </>
       )}
-      ; {format.number(control.notData)} hold no data.
+      ; {format.number(control.notData)} {control.notData === 1 ? 'holds' : 'hold'} no data.
       {file.state === 'ready' && ' Nothing is booked yet.'}
       {reading.remarks.map((remark) => ` ${remark}`)}
     </>

@@ -17,13 +17,13 @@ const COLUMNS: Column<RebuildFound>[] = [
   {
     id: 'name',
     header: 'Vehicle',
-    width: 'w-56',
+    width: 'w-56 min-w-40',
     cell: (found) => [found.year, found.make, found.model].filter(Boolean).join(' '),
   },
   {
     id: 'spellings',
     header: 'In the file as',
-    width: 'w-96',
+    width: 'w-96 min-w-72',
     cell: (found) => <span className="text-soft">{found.spellings.join(' · ')}</span>,
   },
   {

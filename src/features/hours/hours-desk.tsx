@@ -68,7 +68,7 @@ export function HoursDesk({ filters, shopId, today, rebuildId, canWrite, rebuild
           setOpen({ kind: 'again', typed });
         }}
       />
-      {filterBar}
+      {(rows.length > 0 || Object.keys(filters).length > 0) && filterBar}
       {hours.isPending && <LoadingState label="Loading hours" />}
       {hours.isError && <ErrorState error={hours.error} onRetry={() => void hours.refetch()} />}
       {hours.isSuccess && rows.length === 0 && empty}

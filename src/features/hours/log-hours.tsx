@@ -59,8 +59,11 @@ export function LogHours({ row, today, back }: { row: BoardRow; today: string; b
           {row.name && ` · ${row.name}`}
           {row.damageName && `, ${row.damageName}`}
         </h2>
-        <p className="text-lead text-soft">
-          {format.hours(row.loggedSeconds)} hours so far{planned}. <Link to={back}>Another one</Link>
+        <p className="flex flex-wrap items-center gap-x-4 text-lead text-soft">
+          {format.hours(row.loggedSeconds)} hours so far{planned}
+          <Link to={back} className="inline-flex min-h-11 items-center">
+            Another one
+          </Link>
         </p>
       </header>
       <fieldset className="hour-keys">

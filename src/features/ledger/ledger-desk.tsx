@@ -93,7 +93,7 @@ export function LedgerDesk(props: LedgerDeskProps) {
           setOpen({ kind: 'again', typed });
         }}
       />
-      {filterBar}
+      {(rows.length > 0 || Object.keys(filters).length > 0) && filterBar}
       {entries.isPending && <LoadingState label="Loading entries" />}
       {entries.isError && <ErrorState error={entries.error} onRetry={() => void entries.refetch()} />}
       {entries.isSuccess && rows.length === 0 && empty}

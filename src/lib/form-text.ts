@@ -1,10 +1,20 @@
 import { z } from 'zod';
+import { daySchema } from '#shared/fields.ts';
 
 /** Fields of a form hold text; these turn an empty one into null, as contracts want it. */
 export const optionalText = z.string().transform((text) => text.trim() || null);
 
 /** A chosen id, or null for nothing. */
 export const optionalPick = z.string().transform((id) => id || null);
+
+/** A day, or null for an empty field; said at its field together with the faults of the others. */
+export const optionalDay = z.string().transform((text, context) => {
+  if (text === '') return null;
+  const day = daySchema.safeParse(text);
+  if (day.success) return day.data;
+  for (const { message } of day.error.issues) context.addIssue({ code: 'custom', message });
+  return z.NEVER;
+});
 
 /** A whole number typed, or null. */
 export const optionalCount = z.string().transform((text, context) => {

@@ -1,4 +1,4 @@
-import type { ComponentProps } from 'react';
+import type { ComponentProps, SyntheticEvent } from 'react';
 import { FieldFrame, type FieldProps, useField } from './field.tsx';
 
 type Shared = FieldProps & { className?: string | undefined };
@@ -40,9 +40,28 @@ export function TextAreaField({
   );
 }
 
+/** What a form holds while a day field shows something that is no day: no contract takes it for one. */
+const NO_DAY = 'no such day';
+
+type InputEvent = SyntheticEvent<HTMLInputElement>;
+
+/**
+ * The browser reports a day that does not exist, or is half typed, as an empty field. A form that registered the field is
+ * told that it is neither, or what was typed would be saved as no day at all.
+ */
+function tellingOfBadDays<E extends InputEvent>(handler: ((event: E) => void) | undefined) {
+  if (!handler) return undefined;
+  return (event: E) => {
+    const { name, validity } = event.currentTarget;
+    handler(validity.badInput ? ({ type: event.type, target: { name, value: NO_DAY } } as unknown as E) : event);
+  };
+}
+
 /** A calendar day, the system's own picker; its value is `YYYY-MM-DD` or ''. As TextField. */
 export function DayField(props: Shared & Omit<ComponentProps<'input'>, 'className' | 'type'>) {
-  return <TextField min="1950-01-01" max="2100-12-31" {...props} type="date" />;
+  const { onChange, onBlur, value } = props;
+  const told = value === undefined ? { onChange: tellingOfBadDays(onChange), onBlur: tellingOfBadDays(onBlur) } : {};
+  return <TextField min="1950-01-01" max="2100-12-31" {...props} {...told} type="date" />;
 }
 
 export type Option = { value: string; label: string };

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { type HoursRow, newHoursSchema } from '#shared/contracts/hours.ts';
-import { into, optionalPick, optionalText } from '../../lib/form-text.ts';
+import { into, optionalDay, optionalPick, optionalText } from '../../lib/form-text.ts';
 import { hoursTextSchema, hoursToText } from '../../lib/hours-text.ts';
 import type { HoursChange } from './mutations.ts';
 
@@ -21,7 +21,7 @@ export const hoursFormSchema = z
   .object({
     rebuildId: z.string().min(1, { error: 'Choose a rebuild.' }),
     workerId: optionalPick,
-    workedOn: optionalText,
+    workedOn: optionalDay,
     seconds: hoursTextSchema,
     isPaid: z.string().transform((paid) => (paid === '' ? undefined : paid === 'yes')),
     task: optionalText,

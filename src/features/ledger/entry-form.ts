@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { type EntryRow, newEntrySchema } from '#shared/contracts/ledger.ts';
-import { into, optionalPick, optionalText } from '../../lib/form-text.ts';
+import { into, optionalDay, optionalPick, optionalText } from '../../lib/form-text.ts';
 import { centsTextSchema, centsToText, optionalCentsTextSchema } from '../../lib/money-text.ts';
 import type { EntryChange } from './mutations.ts';
 
@@ -41,7 +41,7 @@ export const EMPTY_ENTRY: EntryForm = {
 export function entryFormSchema(decimal: '.' | ',') {
   return z
     .object({
-      datedOn: optionalText,
+      datedOn: optionalDay,
       rebuildId: optionalPick,
       categoryId: z.string().min(1, { error: 'Choose a category.' }),
       cents: centsTextSchema(decimal),

@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { newSplitSchema } from '#shared/contracts/ledger.ts';
-import { into, optionalText } from '../../lib/form-text.ts';
+import { into, optionalDay, optionalText } from '../../lib/form-text.ts';
 import { centsTextSchema } from '../../lib/money-text.ts';
 
 /** A share as typed; a rebuild of '' is overhead. */
@@ -13,7 +13,7 @@ export interface ShareForm {
 export function splitFormSchema(decimal: '.' | ',') {
   return z
     .object({
-      datedOn: optionalText,
+      datedOn: optionalDay,
       categoryId: z.string().min(1, { error: 'Choose a category.' }),
       cents: centsTextSchema(decimal),
       vendor: optionalText,

@@ -1,7 +1,7 @@
 import { z } from 'zod';
 import { type Rebuild, rebuildChangeSchema } from '#shared/contracts/rebuilds.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
-import { into, optionalCount, optionalPick, optionalText } from '../../lib/form-text.ts';
+import { into, optionalCount, optionalDay, optionalPick, optionalText } from '../../lib/form-text.ts';
 import { centsToText, optionalCentsTextSchema } from '../../lib/money-text.ts';
 import type { RebuildChange } from './mutations.ts';
 
@@ -101,17 +101,17 @@ export const factsSchema = (decimal: '.' | ',') =>
     })
     .transform(into(rebuildChangeSchema));
 
-export const datesSchema = z.record(z.string(), optionalText).transform(into(rebuildChangeSchema));
+export const datesSchema = z.record(z.string(), optionalDay).transform(into(rebuildChangeSchema));
 
 export const leavingSchema = (decimal: '.' | ',') =>
   z
     .object({
       askingCents: optionalCentsTextSchema(decimal),
-      soldOn: optionalText,
+      soldOn: optionalDay,
       saleCents: optionalCentsTextSchema(decimal),
       buyerChannel: optionalText,
       exitKind: optionalPick,
-      exitOn: optionalText,
+      exitOn: optionalDay,
       exitCents: optionalCentsTextSchema(decimal),
     })
     .transform(into(rebuildChangeSchema));

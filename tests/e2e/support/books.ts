@@ -19,10 +19,17 @@ export function rowOf(table: Locator, head: string | RegExp): Locator {
 /** The answer that stands under a page's question. */
 export const answerOn = (page: Page) => page.locator('main .answer').first();
 
-/** Brings a file to the point where it was read and nothing is booked. */
-export async function readFile(page: Page, shop: string, file: string): Promise<void> {
+type File = Parameters<Locator['setInputFiles']>[0];
+
+/** Chooses a file on the import page. */
+export async function sendFile(page: Page, shop: string, file: File): Promise<void> {
   await page.goto(`${shop}/import`);
   await page.getByLabel('File to bring in').setInputFiles(file);
+}
+
+/** Brings a file to the point where it was read and nothing is booked. */
+export async function readFile(page: Page, shop: string, file: File): Promise<void> {
+  await sendFile(page, shop, file);
   await expect(page.getByRole('button', { name: 'Drop this file' })).toBeVisible();
 }
 

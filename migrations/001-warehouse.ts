@@ -150,9 +150,15 @@ const BOOKS = [
   `CREATE TABLE rollup_rebuilds (
     shop_id TEXT NOT NULL, rebuild_id TEXT NOT NULL, paid_cents INTEGER NOT NULL, entry_count INTEGER NOT NULL,
     undated_count INTEGER NOT NULL, unknown_foreseen_count INTEGER NOT NULL, late_count INTEGER NOT NULL,
-    late_cents INTEGER NOT NULL, own_seconds INTEGER, paid_seconds INTEGER, xirr REAL,
+    late_cents INTEGER NOT NULL, own_seconds INTEGER, paid_seconds INTEGER, planning_cents INTEGER NOT NULL,
+    surprise_planning_cents INTEGER NOT NULL, paid_labor_cents INTEGER NOT NULL, estimate_cents INTEGER NOT NULL,
+    -- A table with row numbers, since its rows are long: a lookup in the other kind reads whole rows on its way.
+    -- The categories' sums and the locked estimate once more, each as one JSON text: answers read every rebuild.
+    category_sums TEXT NOT NULL, baseline TEXT NOT NULL,
+    -- The version of the books that these sums belong to: who has older facts reads again only what changed since.
+    refreshed_version INTEGER NOT NULL, xirr REAL,
     -- Net cash flow per day as pairs of little-endian doubles (day number, cents); null while it has no exit.
-    flows BLOB, PRIMARY KEY (shop_id, rebuild_id)) STRICT, WITHOUT ROWID`,
+    flows BLOB, PRIMARY KEY (shop_id, rebuild_id)) STRICT`,
   `CREATE TABLE rollup_months (
     shop_id TEXT NOT NULL, rebuild_id TEXT NOT NULL, month TEXT NOT NULL, paid_cents INTEGER NOT NULL,
     PRIMARY KEY (shop_id, rebuild_id, month)) STRICT, WITHOUT ROWID`,

@@ -4,7 +4,7 @@ import type { RebuildFacts } from '../../server/domain/facts.ts';
 import { overrun } from '../../server/domain/overrun.ts';
 import { profit } from '../../server/domain/profit.ts';
 import { profitPerHour, profitPerOwnHour, worked } from '../../server/domain/profit-per-hour.ts';
-import { isOverwritten, paidCents } from '../../server/domain/sets.ts';
+import { isOverwritten } from '../../server/domain/sets.ts';
 import { mean, ratio, sum } from '../../server/domain/statistics.ts';
 import { surpriseRate } from '../../server/domain/surprise-rate.ts';
 import { DEMO_TODAY } from './parameters.ts';
@@ -120,5 +120,5 @@ export function hoursOverrun(
 }
 
 function unsoldDollars(facts: readonly RebuildFacts[]): number {
-  return sum(facts.filter(({ exit }) => exit === null).map((one) => (one.purchaseCents ?? 0) + paidCents(one))) / 100;
+  return sum(facts.filter(({ exit }) => exit === null).map((one) => (one.purchaseCents ?? 0) + one.paidCents)) / 100;
 }

@@ -47,19 +47,38 @@ const HOURS = `
     sum(CASE WHEN is_paid THEN 0 ELSE seconds END) AS own, sum(CASE WHEN is_paid THEN seconds ELSE 0 END) AS paid
   FROM hours WHERE ${OF_THESE} AND voided_at IS NULL GROUP BY rebuild_id`;
 
+const CATEGORY_SUMS = `
+  SELECT rebuild_id, sum(planning_cents) AS planning, sum(surprise_planning_cents) AS surprise,
+    sum(CASE WHEN category_id IN (SELECT id FROM categories WHERE shop_id = @shop AND is_paid_labor) THEN paid_cents END)
+      AS labor,
+    json_group_array(json_array(category_id, paid_cents, planning_cents, unforeseen_cents, surprise_count, extra_cents,
+      free_cents, entry_count)) AS sums
+  FROM rollup_categories WHERE ${OF_THESE} GROUP BY rebuild_id`;
+
+const BASELINES = `
+  SELECT e.rebuild_id, sum(l.cents) AS cents, json_group_array(json_array(l.category_id, l.cents)) AS plan
+  FROM estimates e JOIN estimate_lines l ON l.shop_id = e.shop_id AND l.estimate_id = e.id
+  WHERE e.shop_id = @shop AND e.rebuild_id IN (SELECT value FROM json_each(@ids)) AND e.is_baseline = 1
+  GROUP BY e.rebuild_id`;
+
 // The version is the one that the write at hand will raise the books to.
 const REBUILDS = `
-  INSERT INTO rollup_rebuilds
+  INSERT INTO rollup_rebuilds (shop_id, rebuild_id, paid_cents, entry_count, undated_count, unknown_foreseen_count,
+    late_count, late_cents, own_seconds, paid_seconds, planning_cents, surprise_planning_cents, paid_labor_cents,
+    estimate_cents, category_sums, baseline, refreshed_version)
   SELECT r.shop_id, r.id, coalesce(sum(e.cents), 0), count(e.id), sum(e.id IS NOT NULL AND e.dated_on IS NULL),
     sum(e.id IS NOT NULL AND e.foreseen IS NULL),
     sum(coalesce(e.cents <> 0 AND e.dated_on > coalesce(r.sold_on, r.exit_on), 0)),
     sum(CASE WHEN e.dated_on > coalesce(r.sold_on, r.exit_on) THEN e.cents ELSE 0 END),
     CASE WHEN h.own_count > 0 OR h.dated_count > 0 THEN h.own END,
-    CASE WHEN h.paid_count > 0 OR h.dated_count > 0 THEN h.paid END, NULL, NULL,
-    (SELECT books_version + 1 FROM shops WHERE id = @shop)
+    CASE WHEN h.paid_count > 0 OR h.dated_count > 0 THEN h.paid END,
+    coalesce(c.planning, 0), coalesce(c.surprise, 0), coalesce(c.labor, 0), coalesce(b.cents, 0),
+    coalesce(c.sums, '[]'), coalesce(b.plan, '[]'), (SELECT books_version + 1 FROM shops WHERE id = @shop)
   FROM rebuilds r
   LEFT JOIN entries e ON e.shop_id = r.shop_id AND e.rebuild_id = r.id AND e.voided_at IS NULL
   LEFT JOIN (${HOURS}) h ON h.rebuild_id = r.id
+  LEFT JOIN (${CATEGORY_SUMS}) c ON c.rebuild_id = r.id
+  LEFT JOIN (${BASELINES}) b ON b.rebuild_id = r.id
   WHERE r.shop_id = @shop AND r.id IN (SELECT value FROM json_each(@ids))
   GROUP BY r.id`;
 

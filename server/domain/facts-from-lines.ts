@@ -21,6 +21,9 @@ export interface Line {
 export type RebuildFrame = Omit<
   RebuildFacts,
   | 'categories'
+  | 'paidCents'
+  | 'planningCents'
+  | 'estimateCents'
   | 'paidLaborCents'
   | 'hasUnknownForeseen'
   | 'hasUndated'
@@ -56,6 +59,9 @@ export function factsFromLines(
   const facts: RebuildFacts = {
     ...frame,
     categories,
+    paidCents: lines.reduce((total, line) => total + line.cents, 0),
+    planningCents: lines.reduce((total, line) => total + planningValue(line), 0),
+    estimateCents: [...frame.estimates.values()].reduce((total, cents) => total + cents, 0),
     paidLaborCents: paidLaborCategory === null ? 0 : (categories.get(paidLaborCategory)?.paidCents ?? 0),
     hasUnknownForeseen: lines.some((line) => line.isForeseen === null),
     hasUndated: lines.some((line) => line.on === null),

@@ -23,6 +23,12 @@ export interface RebuildFacts {
   /** Unpaid hours, in whole seconds. null = unknown. */
   readonly ownSeconds: number | null;
   readonly paidSeconds: number | null;
+  /** A of §2: Σ cents of all entries. */
+  readonly paidCents: number;
+  /** B of §18.1: Σ over entries that are not chosen extras of (market value if free, else cents). */
+  readonly planningCents: number;
+  /** E of §5: Σ of the locked baseline; 0 = no estimate. */
+  readonly estimateCents: number;
   /** Locked baseline per category, cents ≥ 0. Empty = no estimate. */
   readonly estimates: ReadonlyMap<string, number>;
   /** Sums of the entries per category; every category with at least one entry stands here. */

@@ -1,5 +1,5 @@
 import type { RebuildFacts } from './facts.ts';
-import { type Completed, completed, estimateCents, isOverwritten, planned, planningCents } from './sets.ts';
+import { type Completed, completed, isOverwritten, planned } from './sets.ts';
 import { FEW, mean, median, quantile, ratio, sum } from './statistics.ts';
 import { byCodePoint } from './text-order.ts';
 
@@ -38,8 +38,8 @@ export interface CategoryOverrun {
 /** (actual − estimate) ÷ estimate of one rebuild, a fraction. null = no estimate, or one that was written over. */
 export function rebuildOverrun(rebuild: RebuildFacts): number | null {
   if (isOverwritten(rebuild)) return null;
-  const estimate = estimateCents(rebuild);
-  return ratio(planningCents(rebuild) - estimate, estimate);
+  const estimate = rebuild.estimateCents;
+  return ratio(rebuild.planningCents - estimate, estimate);
 }
 
 /**
@@ -50,8 +50,8 @@ export function rebuildOverrun(rebuild: RebuildFacts): number | null {
 export function overrun(facts: readonly RebuildFacts[]): Overrun {
   const set = planned(facts);
   const each = set.map(rebuildOverrun).filter((value) => value !== null);
-  const estimate = sum(set.map(estimateCents));
-  const actual = sum(set.map(planningCents));
+  const estimate = sum(set.map((rebuild) => rebuild.estimateCents));
+  const actual = sum(set.map((rebuild) => rebuild.planningCents));
   const done = completed(facts);
   const overwrittenCount = done.filter(isOverwritten).length;
   return {

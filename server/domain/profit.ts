@@ -1,7 +1,7 @@
 import { daysBetween } from '#shared/day.ts';
 import type { RebuildFacts } from './facts.ts';
 import { remembered } from './remembered.ts';
-import { completed, type Priced, paidCents, priced } from './sets.ts';
+import { completed, type Priced, priced } from './sets.ts';
 import { mean, median, ratio, sum } from './statistics.ts';
 
 export interface RebuildProfit {
@@ -43,7 +43,7 @@ export interface Profit {
  * return on cost = profit ÷ T. Example: bought for 5,000, work 3,000, sold for 10,000: profit 2,000, 25 %.
  */
 export const rebuildProfit = remembered((rebuild: Priced): RebuildProfit => {
-  const workCents = paidCents(rebuild);
+  const workCents = rebuild.paidCents;
   const costCents = rebuild.purchaseCents + workCents;
   const profitCents = rebuild.exit.proceedsCents - costCents;
   return {

@@ -32,27 +32,6 @@ export function priced(facts: readonly RebuildFacts[]): Priced[] {
   return completed(facts).filter((rebuild): rebuild is Priced => rebuild.purchaseCents !== null);
 }
 
-/** A: Σ cents paid, all entries. */
-export const paidCents = remembered((rebuild: RebuildFacts): number => {
-  let total = 0;
-  for (const category of rebuild.categories.values()) total += category.paidCents;
-  return total;
-});
-
-/** B: Σ cents that planning must expect (chosen extras left out, free things at market value). */
-export const planningCents = remembered((rebuild: RebuildFacts): number => {
-  let total = 0;
-  for (const category of rebuild.categories.values()) total += category.planningCents;
-  return total;
-});
-
-/** E: Σ cents of the locked estimate; 0 = none. */
-export const estimateCents = remembered((rebuild: RebuildFacts): number => {
-  let total = 0;
-  for (const cents of rebuild.estimates.values()) total += cents;
-  return total;
-});
-
 /**
  * Was the estimate written over with what the work came to (§18.1)? True when three or more categories were
  * planned and every one of them cost its plan to the cent: such a plan says nothing about overruns.
@@ -69,7 +48,7 @@ export const isOverwritten = remembered((rebuild: RebuildFacts): boolean => {
 
 /** Set K of §18.3: completed, with an estimate that was not written over. */
 export function planned(facts: readonly RebuildFacts[]): Completed[] {
-  return completed(facts).filter((rebuild) => estimateCents(rebuild) > 0 && !isOverwritten(rebuild));
+  return completed(facts).filter((rebuild) => rebuild.estimateCents > 0 && !isOverwritten(rebuild));
 }
 
 /** Set K2 of §18.3: K without those that have an entry whose foreseen nobody said. */
@@ -84,8 +63,8 @@ export function plannedOutcomes(set: readonly Completed[]): PlannedOutcome[] {
       id: rebuild.id,
       exitOn: rebuild.exit.on,
       boughtOn: rebuild.boughtOn,
-      estimateCents: estimateCents(rebuild),
-      overrunCents: planningCents(rebuild) - estimateCents(rebuild),
+      estimateCents: rebuild.estimateCents,
+      overrunCents: rebuild.planningCents - rebuild.estimateCents,
       surpriseCents: rebuild.surprisePlanningCents,
     }))
     .sort((a, b) => (a.exitOn < b.exitOn ? -1 : a.exitOn > b.exitOn ? 1 : byCodePoint(a.id, b.id)));

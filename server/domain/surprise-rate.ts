@@ -1,6 +1,6 @@
 import type { RebuildFacts } from './facts.ts';
 import { categoriesOf } from './overrun.ts';
-import { completed, paidCents } from './sets.ts';
+import { completed } from './sets.ts';
 import { type Rate, ratio, sum, wilson } from './statistics.ts';
 
 export interface SurpriseRate extends Rate {
@@ -45,7 +45,7 @@ export function surpriseRate(facts: readonly RebuildFacts[]): SurpriseRate {
     ...wilson(surprised, told.length),
     unknownCount: done.length - told.length,
     unforeseenCents,
-    shareOfWork: ratio(unforeseenCents, sum(told.map(paidCents))),
+    shareOfWork: ratio(unforeseenCents, sum(told.map((rebuild) => rebuild.paidCents))),
     categories,
   };
 }

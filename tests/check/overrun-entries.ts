@@ -1,7 +1,7 @@
 import type { RebuildFacts } from '../../server/domain/facts.ts';
 import { overrun, overrunByCategory, rebuildOverrun } from '../../server/domain/overrun.ts';
 import { rebuildProfit } from '../../server/domain/profit.ts';
-import { isOverwritten, planningCents, priced } from '../../server/domain/sets.ts';
+import { isOverwritten, priced } from '../../server/domain/sets.ts';
 import type { Rate } from '../../server/domain/statistics.ts';
 import { surpriseRate } from '../../server/domain/surprise-rate.ts';
 import { byCodePoint } from '../../server/domain/text-order.ts';
@@ -62,7 +62,7 @@ export function projectEntries(facts: readonly RebuildFacts[], format: 1 | 2): E
     if (format === 1) return entry;
     return {
       ...entry,
-      planning_cents: planningCents(rebuild),
+      planning_cents: rebuild.planningCents,
       surprise_cents: rebuild.hasUnknownForeseen ? null : rebuild.surprisePlanningCents,
       overwritten: isOverwritten(rebuild),
     };

@@ -60,6 +60,11 @@ export function kept(raw: RawDatabase, shopId: string): Sums {
   collect(`SELECT 'category/' || rebuild_id || '/' || category_id, paid_cents, planning_cents, unforeseen_cents,
     surprise_count, surprise_planning_cents, extra_cents, free_cents, entry_count FROM rollup_categories WHERE shop_id = ?`);
   collect(`SELECT 'month/' || rebuild_id || '/' || month, paid_cents FROM rollup_months WHERE shop_id = ?`);
+  collect(`SELECT 'totals/' || rebuild_id, planning_cents, surprise_planning_cents FROM rollup_rebuilds
+    WHERE shop_id = ?`);
+  collect(`SELECT 'text/' || k.rebuild_id || '/' || (c.value ->> 0), c.value ->> 1, c.value ->> 2, c.value ->> 3,
+    c.value ->> 4, c.value ->> 5, c.value ->> 6, c.value ->> 7
+    FROM rollup_rebuilds k, json_each(k.category_sums) c WHERE k.shop_id = ?`);
   collect(`SELECT 'rebuild/' || rebuild_id, paid_cents, entry_count, undated_count, unknown_foreseen_count, late_count,
     late_cents, own_seconds, paid_seconds, xirr FROM rollup_rebuilds WHERE shop_id = ?`);
   collect(`SELECT 'overhead/' || dated_on || '/' || category_id, paid_cents, entry_count FROM rollup_overhead
@@ -99,7 +104,11 @@ function countRebuild(sums: Sums, rebuild: RebuildRow, entries: readonly EntryRo
       one.freeCents,
       one.entryCount,
     ]);
+    const { paidCents, planningCents, unforeseenCents, surpriseCount, extraCents, freeCents, entryCount } = one;
+    const figures = [paidCents, planningCents, unforeseenCents, surpriseCount, extraCents, freeCents, entryCount];
+    sums.set(`text/${rebuild.id}/${category}`, figures);
   }
+  sums.set(`totals/${rebuild.id}`, [facts.planningCents, facts.surprisePlanningCents]);
   for (const line of lines) add(sums, `month/${rebuild.id}/${line.on?.slice(0, 7) ?? ''}`, [line.cents]);
   const paid = lines.reduce((total, line) => total + line.cents, 0);
   const unknown = lines.filter((line) => line.isForeseen === null).length;

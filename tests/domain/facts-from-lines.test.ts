@@ -1,7 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import type { Line } from '../../server/domain/facts-from-lines.ts';
-import { estimateCents, paidCents, planningCents } from '../../server/domain/sets.ts';
 import { buildLine, buildRebuild, sale } from '../support/facts.ts';
 
 describe('a rebuild summed from its entries', () => {
@@ -43,9 +42,9 @@ describe('a rebuild summed from its entries', () => {
   });
 
   it('has two actuals: paid and planning', () => {
-    expect(paidCents(facts)).toBe(186_100);
-    expect(planningCents(facts)).toBe(172_100);
-    expect(estimateCents(facts)).toBe(250_000);
+    expect(facts.paidCents).toBe(186_100);
+    expect(facts.planningCents).toBe(172_100);
+    expect(facts.estimateCents).toBe(250_000);
   });
 
   it('counts paid labor with extras, surprises at planning value and never below 0', () => {
@@ -97,8 +96,8 @@ it('order and splitting of entries change no sum', () => {
       expect(turned).toEqual({ ...one, xirr: turned.xirr });
       const paid = lines.reduce((total, { cents }) => total + cents, 0);
       const chosen = lines.reduce((total, { cents, isExtra }) => total + (isExtra ? cents : 0), 0);
-      expect(paidCents(one)).toBe(paid);
-      expect(planningCents(one)).toBe(paid - chosen);
+      expect(one.paidCents).toBe(paid);
+      expect(one.planningCents).toBe(paid - chosen);
     }),
   );
 });

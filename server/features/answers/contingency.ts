@@ -6,13 +6,7 @@ import type { ShopRebuild } from '../../books/shop-facts.ts';
 import { type Trial, walkForward } from '../../domain/back-test.ts';
 import { contingency, type Level, levelOf, rankAt, wholePercent } from '../../domain/contingency.ts';
 import { ruleRecord } from '../../domain/rule-record.ts';
-import {
-  type Completed,
-  estimateCents,
-  isOverwritten,
-  type PlannedOutcome,
-  plannedOutcomes,
-} from '../../domain/sets.ts';
+import { type Completed, isOverwritten, type PlannedOutcome, plannedOutcomes } from '../../domain/sets.ts';
 import { median, quantile, sum } from '../../domain/statistics.ts';
 import { twoPartRule } from '../../domain/two-part-rule.ts';
 import { shopYearOf, yearSpan } from '../../domain/years.ts';
@@ -31,7 +25,7 @@ export function contingencyAnswer(input: AnswerInput, query: z.output<typeof con
   const level = levelOf(name);
   const rebuilds = filtered(input, filter, 'left');
   const done = rebuilds.filter((one): one is ShopRebuild & Completed => one.exit !== null);
-  const set = done.filter((one) => estimateCents(one) > 0 && !isOverwritten(one));
+  const set = done.filter((one) => one.estimateCents > 0 && !isOverwritten(one));
   const outcomes = plannedOutcomes(set);
   const told = plannedOutcomes(set.filter(({ hasUnknownForeseen }) => !hasUnknownForeseen));
   const [twoPartTest] = walkForward(told, { levels: [level], knowledge: 'asKnown', withTwoPart: true });
@@ -47,7 +41,7 @@ export function contingencyAnswer(input: AnswerInput, query: z.output<typeof con
     filters: filterOptions(input, 'left'),
     leftOut: leftOut([
       ['not sold yet', rebuilds.filter(({ exit }) => exit === null)],
-      ['no estimate', done.filter((one) => estimateCents(one) === 0)],
+      ['no estimate', done.filter((one) => one.estimateCents === 0)],
       ['estimate written over with what it came to', done.filter(isOverwritten)],
       ['foreseen or surprise not said', set.filter(({ hasUnknownForeseen }) => hasUnknownForeseen)],
       ...unscored(input, trials),

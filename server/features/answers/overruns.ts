@@ -2,7 +2,7 @@ import type { z } from 'zod';
 import type { overrunsAnswerSchema } from '#shared/contracts/answers-overruns.ts';
 import { type FilterQuery, MARKS_AT_MOST } from '#shared/contracts/answers-parts.ts';
 import type { ShopRebuild } from '../../books/shop-facts.ts';
-import { estimateCents, isOverwritten, planningCents } from '../../domain/sets.ts';
+import { isOverwritten } from '../../domain/sets.ts';
 import { sum, wilson } from '../../domain/statistics.ts';
 import { surpriseRate } from '../../domain/surprise-rate.ts';
 import { shopYearOf } from '../../domain/years.ts';
@@ -22,7 +22,7 @@ export function overrunsAnswer(input: AnswerInput, query: FilterQuery): Answer {
   const done = rebuilds.filter(({ exit }) => exit !== null);
   const overwritten = done.filter(isOverwritten);
   const kept = done.filter((one) => !isOverwritten(one));
-  const set = kept.filter((one) => estimateCents(one) > 0);
+  const set = kept.filter((one) => one.estimateCents > 0);
   const told = set.filter(({ hasUnknownForeseen }) => !hasUnknownForeseen);
   const timed = done.filter(hasBothHours);
   const isBinned = set.length > MARKS_AT_MOST;
@@ -33,7 +33,7 @@ export function overrunsAnswer(input: AnswerInput, query: FilterQuery): Answer {
     filters: filterOptions(input, 'left'),
     leftOut: leftOut([
       ['not sold yet', rebuilds.filter(({ exit }) => exit === null)],
-      ['no estimate', kept.filter((one) => estimateCents(one) === 0)],
+      ['no estimate', kept.filter((one) => one.estimateCents === 0)],
       ['estimate written over with what it came to', overwritten],
       ['foreseen or surprise not said', done.filter(({ hasUnknownForeseen }) => hasUnknownForeseen)],
       ['planned or worked hours not known', done.filter((one) => !hasBothHours(one))],
@@ -56,7 +56,7 @@ export function overrunsAnswer(input: AnswerInput, query: FilterQuery): Answer {
 }
 
 function againstPlan(rebuild: ShopRebuild): AgainstPlan {
-  return { id: rebuild.id, plan: estimateCents(rebuild), actual: planningCents(rebuild) };
+  return { id: rebuild.id, plan: rebuild.estimateCents, actual: rebuild.planningCents };
 }
 
 function inCents(each: readonly AgainstPlan[]) {

@@ -4,7 +4,7 @@ import type { yearAnswerSchema } from '#shared/contracts/answers-year.ts';
 import type { ShopFacts, ShopRebuild } from '../../books/shop-facts.ts';
 import { annualReturns, hasSeveralReturns } from '../../domain/annual-return.ts';
 import { profit, rebuildProfit } from '../../domain/profit.ts';
-import { type Completed, paidCents, priced } from '../../domain/sets.ts';
+import { type Completed, priced } from '../../domain/sets.ts';
 import { median, sum } from '../../domain/statistics.ts';
 import { gapOf } from './gap.ts';
 import { flowsOf, refOf } from './input.ts';
@@ -86,7 +86,7 @@ export function rowOf(rebuild: ShopRebuild, exit: Completed['exit']): Answer['re
     boughtOn,
     daysHeld: money?.daysHeld ?? null,
     purchaseCents,
-    workCents: paidCents(rebuild),
+    workCents: rebuild.paidCents,
     costCents: money?.costCents ?? null,
     proceedsCents: exit.proceedsCents,
     keptCents,

@@ -16,8 +16,6 @@ export const sessionShopSchema = z.object({
   isDemo: z.boolean(),
   /** 1–12. */
   yearStartMonth: z.int(),
-  /** Null where the shop has not said, and for people who see no money. */
-  wantedCentsPerHour: z.int().nullable(),
 });
 
 export const sessionSchema = z.object({

@@ -92,7 +92,6 @@ export function buildSession(role: Role = 'owner', change: Partial<Session['shop
       today: '2026-06-15',
       isDemo: false,
       yearStartMonth: 1,
-      wantedCentsPerHour: null,
       ...change,
     },
   };

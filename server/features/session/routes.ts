@@ -67,15 +67,10 @@ async function describeSession(ctx: Context<typeof sessionApi.get>): Promise<Ses
   const [user, shops] = await Promise.all([users.get(ctx.viewer.userId), users.shopsOf(ctx.viewer.userId)]);
   const { shopId, role } = ctx.actor;
   const shop = fromRow<Shop>(await database.reader('shops').where({ id: shopId }).first<object>());
-  const seesMoney = role !== 'mechanic' && role !== 'partner';
   return {
     user: { id: user.id, name: user.name, email: user.email },
     role,
     shops,
-    shop: {
-      ...shop,
-      today: await ctx.today(),
-      wantedCentsPerHour: seesMoney ? shop.wantedCentsPerHour : null,
-    },
+    shop: { ...shop, today: await ctx.today() },
   };
 }

@@ -51,7 +51,6 @@ function session(role: Role): Session {
       today: '2026-11-30',
       isDemo: false,
       yearStartMonth: 1,
-      wantedCentsPerHour: null,
     },
     shops: [{ ...shop, role }],
   };

@@ -20,7 +20,6 @@ function buildSession(role: Role, shopId = 'one'): Session {
       today: '2026-12-15',
       isDemo: true,
       yearStartMonth: 1,
-      wantedCentsPerHour: null,
     },
     shops: [
       { id: 'one', name: 'Shop one', role },

@@ -1,7 +1,8 @@
+import { ceilProduct, compareFractions } from '#shared/exact.ts';
+import type { Overran } from '#shared/measures/reserves.ts';
 import { LEVELS as LEVEL_NAMES, type LevelName } from '#shared/vocabulary.ts';
-import { ceilProduct, compareFractions } from './exact.ts';
 import type { RebuildFacts } from './facts.ts';
-import { type PlannedOutcome, planned, plannedOutcomes } from './sets.ts';
+import { planned, plannedOutcomes } from './sets.ts';
 
 /** A level as a fraction p/q, 0 < p < q, never by way of a percentage: 2/3 is not 67 %. */
 export interface Level {
@@ -17,9 +18,6 @@ export function levelOf(name: LevelName): Level {
 
 /** The levels shown: half, two thirds, four fifths, nine tenths. */
 export const LEVELS: readonly Level[] = LEVEL_NAMES.map(levelOf);
-
-/** B − E over E, kept as its two whole numbers so that a reserve comes out to the cent. `estimateCents` > 0. */
-export type Overran = Pick<PlannedOutcome, 'overrunCents' | 'estimateCents'>;
 
 export interface Contingency {
   readonly n: number;
@@ -70,20 +68,7 @@ export function contingencies(facts: readonly RebuildFacts[], levels: readonly L
   return levels.map((level) => contingency(outcomes, level));
 }
 
-/**
- * Cents to put on top of an estimate: ceil(u·e), exactly; 0 if the overrun taken is not above 0 (a plan is never cut).
- * Example: 505,822 over on 213,016 asks 505,822 of an estimate of 213,016.
- */
-export function reserve(taken: Overran, estimate: number): number {
-  return taken.overrunCents <= 0 ? 0 : ceilProduct(taken.overrunCents, estimate, taken.estimateCents);
-}
-
 /** The overrun taken as a figure to adopt: raised to a whole percent, exactly, and never below 0. */
 export function wholePercent(taken: Overran): number {
   return taken.overrunCents <= 0 ? 0 : ceilProduct(100, taken.overrunCents, taken.estimateCents);
-}
-
-/** Cents of a flat rule of `percent` whole percent on an estimate, raised to the next cent. */
-export function flatReserve(percent: number, estimate: number): number {
-  return ceilProduct(percent, estimate, 100);
 }

@@ -1,7 +1,8 @@
-import { byOverrun, flatReserve, reserve } from './contingency.ts';
+import { flatReserve, reserve, twoPartReserve } from '#shared/measures/reserves.ts';
+import { byOverrun } from './contingency.ts';
 import { RankTree } from './rank-tree.ts';
 import type { PlannedOutcome } from './sets.ts';
-import { creepPercent, residualCents, twoPartReserve } from './two-part-rule.ts';
+import { creepPercent, residualCents } from './two-part-rule.ts';
 
 /** What a rule asked for, at the time. `uplift` is the overrun taken, unrounded; a two-part rule has none. */
 export interface Asked {

@@ -1,8 +1,8 @@
 import type { Day } from '#shared/day.ts';
+import { twoPartReserve } from '#shared/measures/reserves.ts';
 import type { RebuildFacts } from './facts.ts';
 import { plannedOutcomes, planned } from './sets.ts';
 import { type Rate, wilson } from './statistics.ts';
-import { twoPartReserve } from './two-part-rule.ts';
 
 /** An adopted rule: whole percent on top of the estimate, and cents for surprises (null = none). */
 export interface AdoptedRule {

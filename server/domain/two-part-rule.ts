@@ -1,5 +1,6 @@
-import { flatReserve, type Level, rankAt } from './contingency.ts';
-import { ceilProduct } from './exact.ts';
+import { ceilProduct } from '#shared/exact.ts';
+import { flatReserve } from '#shared/measures/reserves.ts';
+import { type Level, rankAt } from './contingency.ts';
 import type { RebuildFacts } from './facts.ts';
 import { type PlannedOutcome, planned, plannedAndTold, plannedOutcomes } from './sets.ts';
 import { sum } from './statistics.ts';
@@ -53,9 +54,4 @@ export function twoPartRules(
     rules: levels.map((level) => twoPartRule(outcomes, level)),
     unknownCount: planned(facts).length - outcomes.length,
   };
-}
-
-/** Cents that the rule puts on top of an estimate: ceil(a·e) + b. */
-export function twoPartReserve(creep: number, flatCents: number, estimate: number): number {
-  return flatReserve(creep, estimate) + flatCents;
 }

@@ -1,6 +1,7 @@
 import type { BackTestLevel, RuleName, Score } from '../../server/domain/back-test.ts';
-import { type Contingency, type Level, reserve } from '../../server/domain/contingency.ts';
-import { type TwoPartRule, twoPartReserve } from '../../server/domain/two-part-rule.ts';
+import type { Contingency, Level } from '../../server/domain/contingency.ts';
+import type { TwoPartRule } from '../../server/domain/two-part-rule.ts';
+import { reserve, twoPartReserve } from '#shared/measures/reserves.ts';
 import type { Entry } from './answers-document.ts';
 
 /** The plan that the reference answers quote a reserve for, cents. */

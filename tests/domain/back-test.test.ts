@@ -2,10 +2,11 @@ import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { addDays } from '#shared/day.ts';
 import { backTest, backTestTwoPart, type Knowledge, walkForward } from '../../server/domain/back-test.ts';
-import { contingency, flatReserve, LEVELS, type Level, reserve } from '../../server/domain/contingency.ts';
+import { contingency, LEVELS, type Level } from '../../server/domain/contingency.ts';
 import { RankTree } from '../../server/domain/rank-tree.ts';
 import type { PlannedOutcome } from '../../server/domain/sets.ts';
-import { twoPartReserve, twoPartRule } from '../../server/domain/two-part-rule.ts';
+import { twoPartRule } from '../../server/domain/two-part-rule.ts';
+import { flatReserve, reserve, twoPartReserve } from '#shared/measures/reserves.ts';
 import { buildLine, buildOutcome, buildRebuild, sale } from '../support/facts.ts';
 
 /** The definition taken at its word: the rule made anew from each history. */

@@ -1,15 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import {
-  contingencies,
-  contingency,
-  flatReserve,
-  LEVELS,
-  type Overran,
-  rankAt,
-  reserve,
-} from '../../server/domain/contingency.ts';
-import { creepPercent, twoPartReserve, twoPartRule, twoPartRules } from '../../server/domain/two-part-rule.ts';
+import { contingencies, contingency, LEVELS, rankAt } from '../../server/domain/contingency.ts';
+import { creepPercent, twoPartRule, twoPartRules } from '../../server/domain/two-part-rule.ts';
+import { flatReserve, type Overran, reserve, twoPartReserve } from '#shared/measures/reserves.ts';
 import { buildLine, buildOutcome, buildRebuild } from '../support/facts.ts';
 
 const over = (...percents: number[]): Overran[] =>

@@ -1,6 +1,7 @@
 import { expect } from 'vitest';
 import { walkForward } from '../../server/domain/back-test.ts';
-import { contingency, rankAt, reserve } from '../../server/domain/contingency.ts';
+import { contingency, rankAt } from '../../server/domain/contingency.ts';
+import { reserve } from '#shared/measures/reserves.ts';
 import { divideRounded, splitCents } from '#shared/money.ts';
 import { checkVin } from '#shared/vin.ts';
 import { expectWithin, publicCheck } from '../support/public-check.ts';

@@ -1,7 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { ceilProduct, compareFractions } from '../../server/domain/exact.ts';
-import { byCodePoint } from '../../server/domain/text-order.ts';
+import { ceilProduct, compareFractions } from '#shared/exact.ts';
 
 const amount = fc.integer({ min: -1e12, max: 1e12 });
 const divisor = fc.integer({ min: 1, max: 1e12 });
@@ -43,16 +42,4 @@ describe('compareFractions', () => {
       }),
     );
   });
-});
-
-it('names are ordered by code point, as sorting their code points would', () => {
-  expect(['b', 'a', 'B', 'ab', ''].toSorted(byCodePoint)).toEqual(['', 'B', 'a', 'ab', 'b']);
-  fc.assert(
-    fc.property(fc.string({ unit: 'binary' }), fc.string({ unit: 'binary' }), (a, b) => {
-      const [x, y] = [[...a], [...b]].map((text) =>
-        text.map((one) => (one.codePointAt(0) ?? 0).toString(16).padStart(6, '0')).join(''),
-      );
-      expect(Math.sign(byCodePoint(a, b))).toBe((x ?? '') < (y ?? '') ? -1 : x === y ? 0 : 1);
-    }),
-  );
 });

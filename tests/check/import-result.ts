@@ -1,0 +1,170 @@
+import type { Aside, Choice, Reading } from '#shared/contracts/import-reading.ts';
+import type { Import, ImportRow } from '#shared/contracts/imports.ts';
+import type { EntryRow } from '#shared/contracts/ledger.ts';
+import type { HoursRow } from '#shared/contracts/hours.ts';
+import type { RebuildDetail, RebuildRow } from '#shared/contracts/rebuilds.ts';
+import type { OwnServer } from './own-server.ts';
+
+type Page<T> = { readonly rows: readonly T[]; readonly next: string | null };
+const ASKED_KINDS = new Set([
+  'date-order',
+  'columns',
+  'vehicle',
+  'duplicate',
+  'sheets',
+  'own-labor',
+  'sale',
+  'amount-column',
+  'changed-row',
+  'overlap',
+]);
+
+/** What an import came to, asked of the API alone, in the result format of the samples' README. */
+export async function importResult(server: OwnServer, file: string, done: Import, asked: readonly Choice[]) {
+  const { reading } = done;
+  if (!reading || done.state !== 'committed') throw new Error(`${file} was not booked`);
+  const rows = await all<ImportRow>(server, `/api/imports/${done.id}/rows`);
+  const entries = await all<EntryRow>(server, `/api/entries?import=${done.id}`);
+  const hours = await all<HoursRow>(server, `/api/hours?import=${done.id}`);
+  const list = await all<RebuildRow>(server, '/api/rebuilds');
+  const details: RebuildDetail[] = [];
+  for (const { id } of list) details.push(await server.get(`/api/rebuilds/${id}`));
+  const isTotal = (line: HoursRow) => line.workedOn === null && line.workerId === null;
+  return {
+    file,
+    status: 'imported',
+    rebuilds: details.map((detail) => rebuildOf(detail, hours.filter(isTotal))),
+    lines: [...entries.map(lineOf), ...purchasesOf(reading, details), ...estimatesOf(details, reading)],
+    hours: hours.filter((line) => !isTotal(line)).map(hoursOf),
+    rejects: reading.asides.map(rejectOf),
+    nonData: rows.filter(({ outcome }) => outcome === 'not data').map(sourceOf),
+    flags: [...entries, ...hours]
+      .filter(({ isGuess }) => isGuess)
+      .map((line) => from(line.importSheet, line.importRow)),
+    importedRows: rows.filter(({ outcome }) => outcome === 'taken').map(sourceOf),
+    statedTotals: reading.statedTotals
+      .filter(({ measure }) => measure === 'money')
+      .map(({ row, stated, imported }) => ({ ...from(null, row), statedCents: stated, importedCents: imported })),
+    choicesAsked: asked
+      .filter(({ kind, mustAsk }) => ASKED_KINDS.has(kind) && (mustAsk || kind !== 'vehicle'))
+      .map(({ kind, column }) => ({ kind, column })),
+    rowBasis: 'line',
+    control: {
+      rowsRead: reading.control.rowsRead,
+      totalCents: reading.control.costCents,
+      totalSaleCents: reading.control.saleCents,
+    },
+  };
+}
+
+async function all<T>(server: OwnServer, url: string): Promise<T[]> {
+  const rows: T[] = [];
+  let cursor: string | null = null;
+  do {
+    const next: string = cursor === null ? url : `${url}${url.includes('?') ? '&' : '?'}cursor=${cursor}`;
+    const page: Page<T> = await server.get(next);
+    rows.push(...page.rows);
+    cursor = page.next;
+  } while (cursor !== null);
+  return rows;
+}
+
+const from = (_sheet: number | null, row: number | null) => ({ sheet: null, row });
+const sourceOf = ({ row }: ImportRow) => from(null, row);
+const rejectOf = ({ row, col, reason }: Aside) => ({ ...from(null, row), ...(col ? { col } : {}), reason });
+
+function rebuildOf(detail: RebuildDetail, totals: readonly HoursRow[]) {
+  const { rebuild, row } = detail;
+  const own = totals.filter((line) => line.rebuildId === rebuild.id);
+  return {
+    ref: rebuild.tag,
+    year: rebuild.year,
+    make: rebuild.make,
+    model: rebuild.model,
+    vehicleClass: row.className,
+    damage: row.damageName,
+    titleBrand: rebuild.titleBrandBought,
+    bought: rebuild.boughtOn,
+    ready: rebuild.roadworthyOn,
+    listed: rebuild.listedOn,
+    sold: rebuild.soldOn,
+    purchaseCents: rebuild.purchaseCents,
+    salePriceCents: rebuild.saleCents,
+    hours: own.length > 0 ? own.reduce((sum, line) => sum + line.seconds, 0) / 3600 : null,
+    odometer: rebuild.odometer,
+    source: from(rebuild.importSheet, rebuild.importRow),
+  };
+}
+
+function lineOf(entry: EntryRow) {
+  return {
+    rebuildRef: entry.rebuildTag,
+    date: entry.datedOn,
+    category: entry.categoryName,
+    description: entry.what,
+    vendor: entry.vendor,
+    amountCents: entry.cents,
+    foreseen: entry.foreseen === null ? null : entry.foreseen === 'foreseen',
+    estimate: false,
+    flagged: entry.isGuess,
+    source: { ...from(entry.importSheet, entry.importRow), ...(entry.importCol ? { col: entry.importCol } : {}) },
+  };
+}
+
+/** Purchases are facts of a rebuild; their rows stand in the reading, as long as it shows all of them. */
+function purchasesOf(reading: Reading, details: readonly RebuildDetail[]) {
+  const lines = reading.firstRows.flatMap((row) => row.lines).filter(({ kind }) => kind === 'purchase');
+  return details.flatMap(({ rebuild }) => {
+    const own = lines.filter((line) => line.rebuild !== null && reading.rebuilds[line.rebuild]?.tag === rebuild.tag);
+    if (own.reduce((sum, line) => sum + line.cents, 0) !== rebuild.purchaseCents) return [];
+    return own.map((line) => ({
+      rebuildRef: rebuild.tag,
+      date: line.on,
+      category: 'purchase',
+      description: line.what,
+      vendor: line.vendor,
+      amountCents: line.cents,
+      foreseen: null,
+      estimate: false,
+      flagged: line.isGuess,
+      source: { ...from(null, line.row), col: line.col },
+    }));
+  });
+}
+
+function estimatesOf(details: readonly RebuildDetail[], reading: Reading) {
+  const shown = reading.firstRows.flatMap((row) => row.lines).filter(({ kind }) => kind === 'estimate');
+  return details.flatMap(({ rebuild, categories }) =>
+    categories
+      .filter(({ estimateCents }) => (estimateCents ?? 0) > 0)
+      .map(({ name, estimateCents }) => {
+        const line = shown.find(
+          ({ rebuild: place, category }) =>
+            place !== null && reading.rebuilds[place]?.tag === rebuild.tag && category === name,
+        );
+        return {
+          rebuildRef: rebuild.tag,
+          date: line?.on ?? rebuild.boughtOn,
+          category: name,
+          description: line?.what ?? null,
+          vendor: null,
+          amountCents: estimateCents,
+          foreseen: null,
+          estimate: true,
+          source: from(rebuild.importSheet, rebuild.importRow),
+        };
+      }),
+  );
+}
+
+function hoursOf(line: HoursRow) {
+  return {
+    rebuildRef: line.rebuildTag,
+    date: line.workedOn,
+    person: line.workerName,
+    hours: line.seconds / 3600,
+    task: line.task,
+    flagged: line.isGuess,
+    source: from(line.importSheet, line.importRow),
+  };
+}

@@ -1,6 +1,7 @@
 import { createSortedRowModel, rowSortingFeature, sortFn_basic, tableFeatures, useTable } from '@tanstack/react-table';
 import { useVirtualizer } from '@tanstack/react-virtual';
 import { useMemo, useRef } from 'react';
+import { useFolded } from './fold.tsx';
 import { Cells, type Column, cellClass, Foot, TableFrame, type TableProps } from './table.tsx';
 
 const features = tableFeatures({
@@ -22,7 +23,8 @@ type Sort = { column: string; down: boolean };
 export function DataTable<Row extends object>(
   props: TableProps<Row> & { sort?: Sort; onSort?: (sort: Sort | null) => void },
 ) {
-  const { rows, columns, rowKey, rowProps, foot, sort, onSort } = props;
+  const { rows, columns, rowKey, rowProps, sort, onSort } = props;
+  const shape = useFolded(columns, props.foot);
   const frame = useRef<HTMLDivElement>(null);
   const table = useTable({
     features,
@@ -62,21 +64,21 @@ export function DataTable<Row extends object>(
 
   return (
     <TableFrame {...props} tall={isVirtual} frameRef={frame} {...(isVirtual ? { rowCount: ordered.length + 1 } : {})}>
-      <SortHead columns={columns} directionOf={(id) => table.getColumn(id)?.getIsSorted() ?? false} onPress={onPress} />
+      <SortHead columns={shape.columns} directionOf={(id) => table.getColumn(id)?.getIsSorted() ?? false} onPress={onPress} />
       <tbody>
-        {first > 0 && <Spacer height={window[0]?.start ?? 0} span={columns.length} />}
+        {first > 0 && <Spacer height={window[0]?.start ?? 0} span={shape.columns.length} />}
         {shown.map((row, at) => (
           <tr
             key={rowKey(row.original)}
             aria-rowindex={isVirtual ? first + at + 2 : undefined}
             {...rowProps?.(row.original)}
           >
-            <Cells row={row.original} index={first + at} columns={columns} />
+            <Cells row={row.original} index={first + at} columns={shape.columns} />
           </tr>
         ))}
-        {after > 0 && <Spacer height={after} span={columns.length} />}
+        {after > 0 && <Spacer height={after} span={shape.columns.length} />}
       </tbody>
-      {foot && <Foot columns={columns} foot={foot} />}
+      {shape.foot && <Foot columns={shape.columns} foot={shape.foot} />}
     </TableFrame>
   );
 }

@@ -1,4 +1,5 @@
 import { type HTMLAttributes, type ReactNode, type Ref, useId } from 'react';
+import { type Narrow, useFolded } from './fold.tsx';
 
 /** One column. `cell` draws a row's cell; `number` aligns figures; `heads` makes it the row's heading; `sortBy` lets DataTable sort. */
 export type Column<Row> = {
@@ -11,6 +12,9 @@ export type Column<Row> = {
   sortBy?: (row: Row) => number | string | null;
   /** Tailwind width, such as `w-40`; needed when rows are virtual. */
   width?: string;
+  /** On a window as narrow as this the cell stands beneath the row's heading, after the column's name unless `bare`. */
+  under?: Narrow;
+  bare?: boolean;
 };
 
 export type RowProps = HTMLAttributes<HTMLTableRowElement> & { [data: `data-${string}`]: string | undefined };
@@ -30,7 +34,8 @@ export type TableProps<Row> = {
 
 /** A table in its own frame that scrolls sideways when it must. `caption`, `rows`, `columns`, `rowKey`, `rowProps`, `foot`. */
 export function Table<Row>(props: TableProps<Row>) {
-  const { rows, columns, rowKey, rowProps, foot } = props;
+  const { rows, rowKey, rowProps } = props;
+  const { columns, foot } = useFolded(props.columns, props.foot);
   return (
     <TableFrame {...props}>
       <thead>

@@ -1,0 +1,66 @@
+import { contingency, type Level, rankAt } from './contingency.ts';
+import type { RebuildFacts } from './facts.ts';
+import { type Completed, type PlannedOutcome, planned, plannedAndTold, plannedOutcomes } from './sets.ts';
+import { twoPartRule } from './two-part-rule.ts';
+
+/** Rungs from the finest to the widest. */
+export const RUNGS = ['class+damage+seen', 'damage+seen', 'seen', 'all'] as const;
+export type Rung = (typeof RUNGS)[number];
+
+/** With fewer past rebuilds than this, no rung carries a rule. */
+export const FEWEST_ON_RUNG = 9;
+
+/** The car that a rule is wanted for. */
+export type Car = Pick<RebuildFacts, 'class' | 'damage' | 'seen'>;
+
+/** What the rule for a car is based on. */
+export interface Footing {
+  /** null = too few yet on every rung; `n` and `k` are then those of "all", so that the page can say how many lack. */
+  readonly rung: Rung | null;
+  readonly n: number;
+  readonly k: number;
+  /** The rebuilds on the rung, in the order in which they left the shop. None = too few yet. */
+  readonly outcomes: readonly PlannedOutcome[];
+}
+
+/** The percent rule on the rung that carries it. `taken`, `uplift` and `guarantee` as in `contingency`; null = too few yet. */
+export type PercentFooting = Footing & Pick<ReturnType<typeof contingency>, 'taken' | 'uplift' | 'guarantee'>;
+
+/** The two-part rule on the rung that carries it. Percent and cents are both null = too few yet. */
+export type TwoPartFooting = Footing & Pick<ReturnType<typeof twoPartRule>, 'creepPercent' | 'flatCents'>;
+
+/**
+ * The percent rule for a car from the finest rung that carries it (definitions §18.4): class + damage + seen, then
+ * damage + seen, seen, all; n ≥ 9 and k ≤ n. Over set K. Example: eight like cars and nine of that damage, all unseen:
+ * based on "damage+seen".
+ */
+export function percentOnLadder(facts: readonly RebuildFacts[], car: Car, level: Level): PercentFooting {
+  const footing = footingOf(planned(facts), car, level);
+  const { taken, uplift, guarantee } = contingency(footing.outcomes, level);
+  return { ...footing, taken, uplift, guarantee };
+}
+
+/** The two-part rule for a car in the same way, over set K2; its percent and its cents are those of the rung alone. */
+export function twoPartOnLadder(facts: readonly RebuildFacts[], car: Car, level: Level): TwoPartFooting {
+  const footing = footingOf(plannedAndTold(facts), car, level);
+  const { creepPercent, flatCents } = twoPartRule(footing.outcomes, level);
+  return { ...footing, creepPercent, flatCents };
+}
+
+function footingOf(set: readonly Completed[], car: Car, level: Level): Footing {
+  for (const rung of RUNGS) {
+    const members = set.filter((rebuild) => isOnRung(rung, rebuild, car));
+    const [n, k] = [members.length, rankAt(members.length, level)];
+    if (n >= FEWEST_ON_RUNG && k <= n) return { rung, n, k, outcomes: plannedOutcomes(members) };
+  }
+  return { rung: null, n: set.length, k: rankAt(set.length, level), outcomes: [] };
+}
+
+/** Is the past rebuild like the car in what the rung looks at? What is not known of either is like nothing. */
+function isOnRung(rung: Rung, rebuild: Completed, car: Car): boolean {
+  if (rung === 'all') return true;
+  if (car.seen === null || rebuild.seen !== car.seen) return false;
+  if (rung === 'seen') return true;
+  if (car.damage === null || rebuild.damage !== car.damage) return false;
+  return rung === 'damage+seen' || (car.class !== null && rebuild.class === car.class);
+}

@@ -1,3 +1,4 @@
+import { isUtf8 } from 'node:buffer';
 import compression from 'compression';
 import express, { type Express } from 'express';
 import helmet from 'helmet';
@@ -16,7 +17,7 @@ import { clientFiles } from './platform/client-files.ts';
 import { mount, type Route, type Services } from './platform/http.ts';
 import { requestLog } from './platform/logger.ts';
 import { openApiDocument } from './platform/openapi.ts';
-import { noSuchRoute, problemHandler } from './platform/problems.ts';
+import { noSuchRoute, ProblemError, problemHandler } from './platform/problems.ts';
 import { sameOriginWrites } from './platform/same-origin.ts';
 
 /** Every route of the product. */
@@ -42,7 +43,7 @@ export function createApp(services: Services): Express {
   app.use(securityHeaders(config.origin?.startsWith('https:') ?? false));
   app.use(compression({ filter: (req, res) => !isEventStream(res) && compression.filter(req, res) }));
   app.use('/api', requestLog(logger), noStore, sameOriginWrites(config.origin));
-  app.use('/api', express.json({ limit: '1mb', strict: true, inflate: false }));
+  app.use('/api', express.json({ limit: '1mb', strict: true, inflate: false, verify: refuseBrokenText }));
   const api = express.Router();
   mount(api, routes, access, services);
   app.use(api);
@@ -50,6 +51,11 @@ export function createApp(services: Services): Express {
   app.use(...clientFiles());
   app.use(problemHandler(logger));
   return app;
+}
+
+/** Bytes that are no UTF-8 would be replaced in silence while they are read. */
+function refuseBrokenText(_req: unknown, _res: unknown, bytes: Buffer): void {
+  if (!isUtf8(bytes)) throw new ProblemError(400, { detail: 'The text of this request is damaged: it is not UTF-8.' });
 }
 
 const noStore: express.RequestHandler = (_req, res, next) => {

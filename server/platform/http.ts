@@ -133,7 +133,7 @@ function guard(access: Access, services: Services): RequestHandler {
 
 async function contextOf(contract: Contract, req: Request, res: Response, services: Services): Promise<Context> {
   const viewer = res.locals['viewer'] as Viewer | null;
-  const body = contract.body ? read(contract.body, req.body ?? {}) : undefined;
+  const body = contract.body ? read(contract.body, readJson(req)) : undefined;
   const ctx: Context = {
     contract,
     params: (contract.params ? read(contract.params, req.params) : undefined) as never,
@@ -160,6 +160,12 @@ export function read<S extends z.ZodType>(schema: S, value: unknown): z.output<S
   const parsed = schema.safeParse(value);
   if (!parsed.success) throw invalidRequest(parsed.error);
   return parsed.data;
+}
+
+/** The JSON that was sent. Anything else is refused: read as nothing, an edit would be lost with a 200. */
+function readJson(req: Request): unknown {
+  if (req.body !== undefined) return req.body;
+  throw new ProblemError(415, { detail: 'Send a JSON body, as application/json.' });
 }
 
 function readIfMatch(req: Request): number {

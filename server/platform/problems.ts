@@ -63,6 +63,7 @@ function asProblem(error: unknown): ProblemError {
   if (fault.code === 'SQLITE_FULL') {
     return new ProblemError(507, { detail: 'The disk is full; nothing was saved.' });
   }
+  if (error instanceof URIError) return new ProblemError(400, { detail: 'This address is malformed.' });
   if (typeof fault.status === 'number' && fault.status < 500 && fault.expose === true) {
     return new ProblemError(fault.status, { detail: fault.message ?? '' });
   }

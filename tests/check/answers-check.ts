@@ -16,7 +16,7 @@ async function check(file: string | undefined): Promise<void> {
   try {
     const database = await openDatabase(dataDir);
     try {
-      const answers = answersDocument(await loadPortfolio(database, portfolio));
+      const answers = answersDocument(await loadPortfolio(database, portfolio), portfolio);
       process.stdout.write(`${JSON.stringify(answers, null, 2)}\n`);
     } finally {
       await database.close();

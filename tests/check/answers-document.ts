@@ -9,7 +9,9 @@ import { completed, planned, plannedAndTold } from '../../server/domain/sets.ts'
 import { twoPartRules } from '../../server/domain/two-part-rule.ts';
 import { overrunByCell, returnByCell, whatPays } from '../../server/domain/what-pays.ts';
 import { type Overhead, shopYears, type TiedUp } from '../../server/domain/years.ts';
+import type { Questions } from '../support/portfolio-questions.ts';
 import { OTHER_EXITS } from '#shared/vocabulary.ts';
+import { bidEntry } from './bid-entries.ts';
 import {
   backTestEntry,
   contingencyEntry,
@@ -19,6 +21,7 @@ import {
   twoPartEntry,
 } from './contingency-entries.ts';
 import { groupsEntry, paidGroupsEntry } from './group-entries.ts';
+import { ladderEntry } from './ladder-entries.ts';
 import { overrunEntry, projectEntries, surpriseEntry } from './overrun-entries.ts';
 import { sellingEntry } from './selling-entries.ts';
 
@@ -42,10 +45,10 @@ export type Entry = Record<string, unknown>;
 const WHOLE_PERCENTS: readonly Level[] = [50, 80, 90].map((p) => ({ p, q: 100 }));
 
 /**
- * Every answer in the format of the reference portfolios' answers: format 1, and with format 2 what §18 adds.
- * Ladder and bids are not answered yet, and so not in it.
+ * Every answer in the format of the reference portfolios' answers: format 1, and with format 2 what §18 adds. `asked`
+ * are the cars and bids that the portfolio asks about.
  */
-export function answersDocument(input: DocumentInput): Entry {
+export function answersDocument(input: DocumentInput, asked: Questions): Entry {
   const { facts, format, asOf } = input;
   return {
     portfolio: input.name,
@@ -68,7 +71,12 @@ export function answersDocument(input: DocumentInput): Entry {
       levels: contingencies(facts, WHOLE_PERCENTS).map((one) => ({ level: one.level.p, ...contingencyEntry(one) })),
     },
     backtest: wholePercentBackTest(facts),
-    ...(format === 2 && { ...fractionEntries(facts), ...yearEntries(input) }),
+    ...(format === 2 && {
+      ...fractionEntries(facts),
+      ladder: asked.ladder.map((question) => ladderEntry(facts, question)),
+      bids: asked.bids.map((question) => bidEntry(facts, question)),
+      ...yearEntries(input),
+    }),
     per_project: projectEntries(facts, format),
   };
 }

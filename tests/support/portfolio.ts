@@ -2,9 +2,10 @@ import { z } from 'zod';
 import type { Line, RebuildFrame } from '../../server/domain/facts-from-lines.ts';
 import { isDay } from '#shared/day.ts';
 import { OTHER_EXITS } from '#shared/vocabulary.ts';
+import { bidSchema, ladderSchema, type Questions, wholeSeconds } from './portfolio-questions.ts';
 
 /** A reference portfolio (definitions §18, format 1 or 2) in the words of the domain. */
-export interface Portfolio {
+export interface Portfolio extends Questions {
   readonly format: 1 | 2;
   readonly name: string;
   readonly asOf: string;
@@ -59,6 +60,8 @@ const portfolioSchema = z.object({
   year_start_month: z.int().min(1).max(12).default(1),
   wanted_cents_per_hour: z.number().nullish(),
   overhead: z.array(z.object({ date: day, cents })).default([]),
+  ladder: z.array(ladderSchema).default([]),
+  bids: z.array(bidSchema).default([]),
   projects: z.array(projectSchema),
 });
 
@@ -74,6 +77,8 @@ export function readPortfolio(json: unknown): Portfolio {
     startMonth: file.year_start_month,
     wantedCentsPerHour: file.wanted_cents_per_hour ?? null,
     overhead: file.overhead.map(({ date, cents: amount }) => ({ on: date, cents: amount })),
+    ladder: file.ladder,
+    bids: file.bids,
     rebuilds: file.projects.map((project) => {
       const refusal = whyRefused(project, file.as_of);
       if (refusal) throw new RangeError(`${project.id}: ${refusal}`);
@@ -125,7 +130,6 @@ function lineOf(line: Project['costs'][number]): Line {
   };
 }
 
-/** §18.2: hours mean round(3600·h) whole seconds. */
 function seconds(value: number | null | undefined): number | null {
-  return value === null || value === undefined ? null : Math.round(3600 * value);
+  return value === null || value === undefined ? null : wholeSeconds(value);
 }

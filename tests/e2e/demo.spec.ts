@@ -91,12 +91,10 @@ test('a rule is adopted for next year, with what it rested on', async ({ page })
   const percent = percentIn(await settledAnswer(page));
   const adopt = page.getByRole('button', { name: `Adopt ${percent}% for 2027`, exact: true });
   await adopt.click();
-  await page.getByRole('dialog').getByLabel('Note (optional)').fill('Agreed at the kitchen table');
-  await page
-    .getByRole('dialog')
-    .getByRole('button', { name: `Adopt ${percent}% for 2027`, exact: true })
-    .click();
-  await expect(page.getByRole('dialog')).toBeHidden();
+  const dialog = page.getByRole('dialog', { name: 'Adopt a rule' });
+  await dialog.getByLabel('Note (optional)').fill('Agreed at the kitchen table');
+  await dialog.getByRole('button', { name: `Adopt ${percent}% for 2027`, exact: true }).click();
+  await expect(dialog).toBeHidden();
   await page.reload();
   const history = page.getByRole('table', { name: 'Rules adopted' });
   await expect(history.getByRole('row', { name: /2027/ }).first()).toContainText(`${percent}%`);

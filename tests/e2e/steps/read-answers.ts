@@ -98,7 +98,8 @@ export async function adoptRule(page: Page, shop: string): Promise<void> {
   await expect(answerOn(page)).toContainText(`Add ${asked(4, 5)} to the repair estimate`);
   const adopt = { name: new RegExp(`^Adopt ${asked(4, 5)} for \\d{4}$`) };
   await page.getByRole('button', adopt).click();
-  await page.getByRole('dialog').getByRole('button', adopt).click();
-  await expect(page.getByRole('dialog')).toBeHidden();
+  const dialog = page.getByRole('dialog', { name: 'Adopt a rule' });
+  await dialog.getByRole('button', adopt).click();
+  await expect(dialog).toBeHidden();
   await expect(page.getByRole('table', { name: 'Rules adopted' })).toContainText(`${asked(4, 5)}`);
 }

@@ -47,7 +47,7 @@ export interface Context<C extends Contract = Contract> {
   today(): Promise<Day>;
   /** The version that an edit was made on. */
   readonly ifMatch: number | null;
-  /** Key and fingerprint of a write that must happen once. */
+  /** Key and fingerprint of a write that must happen once. An upload's fingerprint knows nothing of its file yet. */
   readonly once: { readonly key: string; readonly fingerprint: string } | null;
   readonly services: Services;
   readonly req: Request;
@@ -147,7 +147,7 @@ async function contextOf(contract: Contract, req: Request, res: Response, servic
     },
     today: () => todayOf(services, ctx.actor.shopId),
     ifMatch: contract.edits ? readIfMatch(req) : null,
-    once: contract.once ? readOnce(req, contract) : null,
+    once: contract.once ? readOnce(req) : null,
     services,
     req,
     res,
@@ -174,13 +174,12 @@ function readIfMatch(req: Request): number {
   return Number(match[1]);
 }
 
-function readOnce(req: Request, contract: Contract): Context['once'] {
+function readOnce(req: Request): Context['once'] {
   const key = req.headers['idempotency-key'];
   if (typeof key !== 'string' || !/^[\x21-\x7e]{8,128}$/.test(key)) {
     throw new ProblemError(400, { detail: 'Send an Idempotency-Key of 8 to 128 characters with this.' });
   }
-  const content = contract.upload ? req.headers['content-length'] : JSON.stringify(req.body);
-  return { key, fingerprint: sha256(`${req.method} ${req.path} ${content}`) };
+  return { key, fingerprint: sha256(`${req.method} ${req.path} ${JSON.stringify(req.body)}`) };
 }
 
 async function todayOf({ database, now }: Services, shopId: string): Promise<Day> {

@@ -76,6 +76,8 @@ describe('bringing a file in', () => {
     expect(again.body.id).toBe(first.body.id);
     await settled(ada, first.body.id);
     expect((await ada.get('/api/imports')).body.rows).toHaveLength(1);
+    const other = await upload(ada, expenseList('1/22/2020,13 F-150,Parts,door,99.00'), 'a.csv', '', 'same-key-1');
+    expect(other.status).toBe(422);
   });
 
   it('the same file again stops, until someone insists', async () => {

@@ -44,6 +44,32 @@ describe('joining a shop by a link', () => {
     expect((await api.anyone.post('/api/join/look', { token })).status).toBe(404);
   });
 
+  it('lets nobody in whose link is withdrawn while they join', async () => {
+    const api = await testApi();
+    const ada = await api.owner();
+    const { id, token } = await invite(ada);
+    const { passwords } = api.services;
+    const hash = passwords.hash;
+    passwords.hash = async (password) => {
+      await ada.delete(`/api/people/invitations/${id}`);
+      return hash(password);
+    };
+    expect((await api.anyone.post('/api/join', { token, name: 'Bea', password: PASSWORD })).status).toBe(404);
+    expect((await ada.get('/api/people')).body.members).toHaveLength(1);
+  });
+
+  it('makes one account when two shops’ links for one new person are used at the same moment', async () => {
+    const api = await testApi();
+    const links = [await invite(await api.owner('Ada Wick')), await invite(await api.owner('Ben Oake'))];
+    const replies = await Promise.all(
+      links.map(({ token }) => api.anyone.post('/api/join', { token, name: 'Bea', password: PASSWORD })),
+    );
+    expect(replies.map(({ status }) => status).sort()).toEqual([204, 409]);
+    const left = links[replies.findIndex(({ status }) => status === 409)];
+    const again = await api.anyone.post('/api/join', { token: left?.token, password: PASSWORD });
+    expect(again.status).toBe(204);
+  });
+
   it('stores only the hash of the link', async () => {
     const api = await testApi();
     const { token } = await invite(await api.owner());

@@ -2,7 +2,7 @@ import type { Import, importsApi } from '#shared/contracts/imports.ts';
 import { shopScope } from '../../books/scope.ts';
 import { write } from '../../books/write.ts';
 import type { Context, Ready } from '../../platform/http.ts';
-import { newId } from '../../platform/ids.ts';
+import { newId, sha256 } from '../../platform/ids.ts';
 import { ProblemError } from '../../platform/problems.ts';
 import { startReading } from './background.ts';
 import { dropFile, fileHash, importPath, keepFile } from './files.ts';
@@ -24,7 +24,8 @@ export async function uploadImport(ctx: Context<typeof importsApi.upload>): Prom
   try {
     const fileSha256 = await fileHash(received.path);
     await keepFile(received.path, kept);
-    const ready = await write(ctx, { action: 'upload file', subject: 'import' }, async (books) => {
+    const once = ctx.once && { ...ctx.once, fingerprint: sha256(`${ctx.once.fingerprint} ${fileSha256}`) };
+    const ready = await write({ ...ctx, once }, { action: 'upload file', subject: 'import' }, async (books) => {
       const store = importStore(books.scope);
       const earlier = ctx.query.importAnyway ? null : await store.findCommitted(fileSha256);
       if (earlier) throw alreadyIn(earlier.committedAt);

@@ -41,6 +41,7 @@ export async function joinShop(
       const userId = account?.id ?? newId();
       await claim(trx, invitation, account ? userId : null, stamp);
       if (passwordHash) {
+        await refuseTakenAddress(trx, invitation.email);
         const person = { id: userId, email: invitation.email, name: wish.name, password_hash: passwordHash };
         await trx('users').insert({ ...person, created_at: stamp });
       }
@@ -50,13 +51,21 @@ export async function joinShop(
   );
 }
 
-/** Uses the invitation up; a second one who got this far at the same moment finds it gone. */
+/** Someone made an account with this address while the password was being hashed. */
+async function refuseTakenAddress(trx: Knex, email: string): Promise<void> {
+  const taken = await trx('users').where({ email }).first('id');
+  if (taken)
+    throw new ProblemError(409, { detail: 'There is an account with this address now: join with its password.' });
+}
+
+/** Uses the invitation up; who got this far while it was used or withdrawn finds it gone. */
 async function claim(trx: Knex, { id, shopId }: OpenInvitation, userId: string | null, stamp: string): Promise<void> {
   const claimed = await trx('invitations')
     .where({ id, shop_id: shopId })
     .whereNull('used_at')
+    .whereNull('withdrawn_at')
     .update({ used_at: stamp, used_by: userId });
-  if (claimed !== 1) throw new ProblemError(404, { detail: 'This invitation is used up.' });
+  if (claimed !== 1) throw new ProblemError(404, { detail: 'This invitation is used up or withdrawn.' });
 }
 
 async function enter(

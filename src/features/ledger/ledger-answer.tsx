@@ -16,14 +16,16 @@ export function LedgerAnswer({ filters, isFiltered }: { filters: LedgerQuery; is
     return <AnswerHeader question={question} title="Ledger" answer={answer} />;
   }
   const free = totals.freeValueCents;
+  const [matches, comes] = totals.count === 1 ? ['matches', 'comes'] : ['match', 'come'];
+  const verb = isFiltered ? `${matches} and ${comes}` : comes;
   return (
     <AnswerHeader
       question={question}
       title="Ledger"
       answer={
         <>
-          {format.count(totals.count, 'entry', 'entries')} {isFiltered ? 'match and ' : ''}
-          {totals.count === 1 ? 'comes' : 'come'} to <Mark>{format.money(totals.cents, 'always')}</Mark>.
+          {format.count(totals.count, 'entry', 'entries')} {verb} to <Mark>{format.money(totals.cents, 'always')}</Mark>
+          .
         </>
       }
       caution={

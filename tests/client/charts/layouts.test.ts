@@ -36,6 +36,11 @@ describe('kept, added up through the year', () => {
     expect(shapes.now.at(-1)?.y).toBeGreaterThan(shapes.y.scale(0));
   });
 
+  test('of nothing but zero names zero once', () => {
+    const shapes = stepLineLayout(year('2026-01-01', '2027-01-01', []), null, { width: 600, height: 300 });
+    expect(shapes.y.ticks.map((tick) => tick.value)).toEqual([0]);
+  });
+
   test('names fewer months where there is little room', () => {
     const series = year('2026-01-01', '2027-01-01', [1]);
     const months = (width: number) =>

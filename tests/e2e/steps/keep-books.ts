@@ -27,9 +27,10 @@ export async function addEntries(page: Page, shop: string): Promise<void> {
     await expect(amount).toHaveValue('');
     await expect(form.getByLabel('Day')).toHaveValue(TYPED.day);
     await expect(form.getByLabel('Rebuild')).toHaveValue(/^TC-07/);
-    await expect(form.getByLabel('Category')).toHaveValue('parts');
+    await expect(form.getByLabel('Category')).toHaveValue(/^parts$/i);
   }
   await page.getByLabel('Find', { exact: true }).fill('seal for 99.99');
+  await expect(answerOn(page)).toHaveText('1 entry matches and comes to $99.99.');
   await page.getByRole('button', { name: `Void seal for 99.99, ${TYPED.day}` }).click();
   await page.getByRole('dialog').getByLabel('Why').fill('typed on the wrong car');
   await page.getByRole('dialog').getByRole('button', { name: 'Void it' }).click();

@@ -20,7 +20,7 @@ export async function typeDay(page: Page, day: string): Promise<void> {
 /** Picks in the field that has the focus by typing a piece of the name. */
 export async function pick(page: Page, piece: string): Promise<void> {
   await page.keyboard.type(piece);
-  await expect(page.getByRole('option').first()).toContainText(piece);
+  await expect(page.getByRole('option').first()).toContainText(piece, { ignoreCase: true });
   await page.keyboard.press('Enter');
 }
 

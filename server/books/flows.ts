@@ -1,3 +1,6 @@
+import type { NetFlows } from '../domain/net-flows.ts';
+import type { RawDatabase } from '../platform/database.ts';
+
 /** Cash flows as they are kept: net cents per day number, packed as pairs of little-endian doubles. */
 
 /** Packs net flows; days without a net flow are left out. */
@@ -17,4 +20,16 @@ export function addPackedFlows(sum: Map<number, number>, packed: Buffer): void {
     const day = packed.readDoubleLE(i);
     sum.set(day, (sum.get(day) ?? 0) + packed.readDoubleLE(i + 8));
   }
+}
+
+const FLOWS = `
+  SELECT flows FROM rollup_rebuilds
+  WHERE shop_id = ? AND rebuild_id IN (SELECT value FROM json_each(?)) AND flows IS NOT NULL`;
+
+/** Flows of these rebuilds together, by day; one that has no annual return has none. */
+export function pooledFlows(raw: RawDatabase, shopId: string, rebuildIds: readonly string[]): NetFlows {
+  const net = new Map<number, number>();
+  const packed = raw.prepare(FLOWS).pluck().all(shopId, JSON.stringify(rebuildIds)) as Buffer[];
+  for (const flows of packed) addPackedFlows(net, flows);
+  return net;
 }

@@ -75,7 +75,7 @@ type RebuildRow = [
   ...[id: string, tag: string, name: string, className: Text, damage: Text, seen: Whole],
   ...[purchase: Whole, asking: Whole, bought: Text, pickedUp: Text, started: Text, roadworthy: Text, title: Text],
   ...[listed: Text, leftOn: Text, kind: ExitKind | null, proceeds: Whole, undated: Whole, unknown: Whole],
-  ...[lateCount: Whole, lateCents: Whole, own: Whole, paidSeconds: Whole, xirr: Whole, flows: Buffer | null],
+  ...[lateCount: Whole, lateCents: Whole, own: Whole, paidSeconds: Whole, xirr: Whole],
   ...[paid: Whole, planning: Whole, surprise: Whole, labor: Whole, estimate: Whole, sums: Text, plan: Text],
   planned: Whole,
 ];
@@ -85,7 +85,7 @@ const REBUILDS = `
     r.picked_up_on, r.started_on, r.roadworthy_on, r.title_issued_on, r.listed_on, coalesce(r.sold_on, r.exit_on),
     CASE WHEN r.sold_on IS NOT NULL THEN 'sold' ELSE r.exit_kind END, coalesce(r.sale_cents, r.exit_cents),
     k.undated_count, k.unknown_foreseen_count, k.late_count, k.late_cents, k.own_seconds, k.paid_seconds, k.xirr,
-    k.flows, k.paid_cents, k.planning_cents, k.surprise_planning_cents, k.paid_labor_cents, k.estimate_cents,
+    k.paid_cents, k.planning_cents, k.surprise_planning_cents, k.paid_labor_cents, k.estimate_cents,
     k.category_sums, k.baseline, e.planned_seconds
   FROM rebuilds r
   LEFT JOIN rollup_rebuilds k ON k.shop_id = r.shop_id AND k.rebuild_id = r.id
@@ -97,7 +97,7 @@ const REBUILDS = `
 function shopRebuild(row: RebuildRow, nameOf: NameOf): ShopRebuild {
   const [id, tag, name, className, damage, seen, purchaseCents, askingCents, ...dates] = row;
   const [boughtOn, pickedUpOn, startedOn, readyOn, titleIssuedOn, listedOn, leftOn, kind, proceeds, ...kept] = dates;
-  const [undated, unknown, lateCount, lateCents, ownSeconds, paidSeconds, xirr, flows, ...totals] = kept;
+  const [undated, unknown, lateCount, lateCents, ownSeconds, paidSeconds, xirr, ...totals] = kept;
   const [paid, planning, surprise, labor, estimate, sums, plan, plannedSeconds] = totals;
   const opened = new Opened(sums ?? '[]', plan ?? '[]', nameOf);
   return {
@@ -135,6 +135,5 @@ function shopRebuild(row: RebuildRow, nameOf: NameOf): ShopRebuild {
     lateCount: lateCount ?? 0,
     lateCents: lateCents ?? 0,
     xirr,
-    flows,
   };
 }

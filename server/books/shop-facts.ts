@@ -15,8 +15,6 @@ export interface ShopRebuild extends RebuildFacts {
   readonly askingCents: number | null;
   /** Hours of the locked estimate, in seconds. null = none planned. */
   readonly plannedSeconds: number | null;
-  /** Packed cash flows by day (see `flows.ts`); null = it has no annual return. */
-  readonly flows: Buffer | null;
 }
 
 export interface Named {

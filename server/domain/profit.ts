@@ -1,7 +1,6 @@
 import { daysBetween } from '#shared/day.ts';
 import type { RebuildFacts } from './facts.ts';
-import { remembered } from './remembered.ts';
-import { completed, type Priced, priced } from './sets.ts';
+import { type Completed, completed, type Priced, priced } from './sets.ts';
 import { mean, median, ratio, sum } from './statistics.ts';
 
 export interface RebuildProfit {
@@ -14,8 +13,6 @@ export interface RebuildProfit {
   readonly profitCents: number;
   /** Profit ÷ cost, a fraction. null = cost not above 0. */
   readonly returnOnCost: number | null;
-  /** Exit − bought, days. null = day of purchase not known. */
-  readonly daysHeld: number | null;
 }
 
 export interface Profit {
@@ -42,7 +39,7 @@ export interface Profit {
  * What one rebuild left (definitions §2): A = Σ entries, T = purchase + A, profit = proceeds − T,
  * return on cost = profit ÷ T. Example: bought for 5,000, work 3,000, sold for 10,000: profit 2,000, 25 %.
  */
-export const rebuildProfit = remembered((rebuild: Priced): RebuildProfit => {
+export function rebuildProfit(rebuild: Priced): RebuildProfit {
   const workCents = rebuild.paidCents;
   const costCents = rebuild.purchaseCents + workCents;
   const profitCents = rebuild.exit.proceedsCents - costCents;
@@ -52,9 +49,13 @@ export const rebuildProfit = remembered((rebuild: Priced): RebuildProfit => {
     costCents,
     profitCents,
     returnOnCost: ratio(profitCents, costCents),
-    daysHeld: rebuild.boughtOn === null ? null : daysBetween(rebuild.boughtOn, rebuild.exit.on),
   };
-});
+}
+
+/** Exit − bought, in days (definitions §2). null = day of purchase not known. */
+export function daysHeld({ boughtOn, exit }: Pick<Completed, 'boughtOn' | 'exit'>): number | null {
+  return boughtOn === null ? null : daysBetween(boughtOn, exit.on);
+}
 
 /**
  * The shop's profit over its completed rebuilds (definitions §2). Pooled return on cost = Σ profit ÷ Σ T,

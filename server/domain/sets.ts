@@ -1,6 +1,5 @@
 import { type Day, dayNumber } from '#shared/day.ts';
 import type { RebuildFacts } from './facts.ts';
-import { remembered } from './remembered.ts';
 import { byCodePoint } from './text-order.ts';
 
 /** A rebuild that has left the shop (C of definitions §1 and §18.1). */
@@ -36,7 +35,7 @@ export function priced(facts: readonly RebuildFacts[]): Priced[] {
  * Was the estimate written over with what the work came to (§18.1)? True when three or more categories were
  * planned and every one of them cost its plan to the cent: such a plan says nothing about overruns.
  */
-export const isOverwritten = remembered((rebuild: RebuildFacts): boolean => {
+export function isOverwritten(rebuild: RebuildFacts): boolean {
   let planned = 0;
   for (const [category, cents] of rebuild.estimates) {
     if (cents === 0) continue;
@@ -44,7 +43,7 @@ export const isOverwritten = remembered((rebuild: RebuildFacts): boolean => {
     planned += 1;
   }
   return planned >= 3;
-});
+}
 
 /** Set K of §18.3: completed, with an estimate that was not written over. */
 export function planned(facts: readonly RebuildFacts[]): Completed[] {

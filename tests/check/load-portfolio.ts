@@ -1,5 +1,5 @@
 import type { Books } from '../../server/books/books.ts';
-import { addPackedFlows } from '../../server/books/flows.ts';
+import { pooledFlows } from '../../server/books/flows.ts';
 import { openShop } from '../../server/books/new-shop.ts';
 import { readShopFacts, type ShopRebuild } from '../../server/books/shop-facts.ts';
 import { tiedUpOn } from '../../server/books/spent-by.ts';
@@ -135,8 +135,6 @@ async function readBack(
   const shop = readShopFacts(raw, shopId);
   const { format, name, asOf } = portfolio;
   const { rebuilds, overhead, startMonth, wantedCentsPerHour } = shop;
-  const flows = new Map<number, number>();
-  for (const rebuild of rebuilds) if (rebuild.flows) addPackedFlows(flows, rebuild.flows);
   const spans = yearSpans({ facts: rebuilds, overhead, asOf, startMonth });
   return {
     format,
@@ -145,7 +143,11 @@ async function readBack(
     startMonth,
     wantedCentsPerHour,
     overhead,
-    flows,
+    flows: pooledFlows(
+      raw,
+      shopId,
+      rebuilds.map(({ id }) => id),
+    ),
     facts: rebuilds.map((rebuild) => inOriginalNames(rebuild, names)),
     tiedUp: spans.map(({ tiedUpOn: on }) => tiedUpOn(raw, shopId, rebuilds, on)),
   };

@@ -1,6 +1,6 @@
 import type { RebuildFacts } from '../../server/domain/facts.ts';
 import { overrun, overrunByCategory, rebuildOverrun } from '../../server/domain/overrun.ts';
-import { rebuildProfit } from '../../server/domain/profit.ts';
+import { daysHeld, rebuildProfit } from '../../server/domain/profit.ts';
 import { isOverwritten, priced } from '../../server/domain/sets.ts';
 import type { Rate } from '../../server/domain/statistics.ts';
 import { surpriseRate } from '../../server/domain/surprise-rate.ts';
@@ -56,7 +56,7 @@ export function projectEntries(facts: readonly RebuildFacts[], format: 1 | 2): E
       profit_cents: money.profitCents,
       roc: money.returnOnCost,
       xirr: rebuild.xirr,
-      days_held: money.daysHeld,
+      days_held: daysHeld(rebuild),
       overrun: rebuildOverrun(rebuild),
     };
     if (format === 1) return entry;

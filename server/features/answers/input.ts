@@ -2,18 +2,19 @@ import type { LeftOut, LeftOutReason, RebuildRef } from '#shared/contracts/answe
 import { LEFT_OUT_LISTED } from '#shared/contracts/answers-parts.ts';
 import type { Rule } from '#shared/contracts/rules.ts';
 import type { Day } from '#shared/day.ts';
-import { addPackedFlows } from '../../books/flows.ts';
 import type { ShopFacts, ShopRebuild } from '../../books/shop-facts.ts';
 import type { NetFlows } from '../../domain/net-flows.ts';
 import type { TiedUp } from '../../domain/years.ts';
 
-/** What an answer is worked out from: the shop's facts as they stand today, and three looks into the warehouse. */
+/** What an answer is worked out from: the shop's facts as they stand today, and four looks into the warehouse. */
 export interface AnswerInput {
   readonly shop: ShopFacts;
   readonly today: Day;
   readonly byId: ReadonlyMap<string, ShopRebuild>;
   tiedUpOn(on: Day): TiedUp;
   spentBy(ids: readonly string[], on: Day): ReadonlyMap<string, number>;
+  /** Cash flows of these rebuilds together, by day. */
+  flowsOf(ids: readonly string[]): NetFlows;
   rules(): Rule[];
 }
 
@@ -21,7 +22,7 @@ export interface AnswerInput {
 export function asOf(shop: ShopFacts, today: Day): ShopFacts {
   return {
     ...shop,
-    rebuilds: shop.rebuilds.map((one) => (one.exit && one.exit.on > today ? { ...one, exit: null, flows: null } : one)),
+    rebuilds: shop.rebuilds.map((one) => (one.exit && one.exit.on > today ? { ...one, exit: null } : one)),
     overhead: shop.overhead.filter(({ on }) => on <= today),
   };
 }
@@ -46,11 +47,4 @@ export function leftOut(reasons: readonly (readonly [LeftOutReason, readonly Sho
       count: rebuilds.length,
       rebuilds: rebuilds.slice(0, LEFT_OUT_LISTED).map(refOf),
     }));
-}
-
-/** Flows of these rebuilds together, by day. */
-export function flowsOf(rebuilds: readonly ShopRebuild[]): NetFlows {
-  const net = new Map<number, number>();
-  for (const { flows } of rebuilds) if (flows) addPackedFlows(net, flows);
-  return net;
 }

@@ -1,5 +1,6 @@
 import { gzipSync } from 'node:zlib';
 import type { Day } from '#shared/day.ts';
+import { pooledFlows } from '../../books/flows.ts';
 import { readRules } from '../../books/rules.ts';
 import { readShopFacts, type ShopFacts } from '../../books/shop-facts.ts';
 import { spentBy, tiedUpOn } from '../../books/spent-by.ts';
@@ -76,6 +77,7 @@ export function inputOf(raw: RawDatabase, facts: ShopFacts, today: Day): AnswerI
     byId: new Map(shop.rebuilds.map((rebuild) => [rebuild.id, rebuild])),
     tiedUpOn: (on) => tiedUpOn(raw, shop.shopId, shop.rebuilds, on),
     spentBy: (ids, on) => spentBy(raw, shop.shopId, ids, on),
+    flowsOf: (ids) => pooledFlows(raw, shop.shopId, ids),
     rules: () => readRules(raw, shop.shopId),
   };
 }

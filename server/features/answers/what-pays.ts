@@ -25,10 +25,11 @@ export function whatPaysAnswer(input: AnswerInput, query: FilterQuery): Answer {
   const rebuilds = filtered(input, query, 'left');
   const done = rebuilds.filter(({ exit }) => exit !== null);
   const { noPurchaseCount: _, ...totals } = profit(rebuilds);
-  const hours = worked(rebuilds).map((one) => ({ ...valued(one), value: profitPerOwnHour(one) }));
+  const keyOf = cellKeys();
+  const hours = worked(rebuilds).map((one) => valued(one, keyOf(one), profitPerOwnHour(one)));
   const returns = priced(rebuilds).flatMap((one) => {
     const { returnOnCost: value } = rebuildProfit(one);
-    return value === null ? [] : [{ ...valued(one), value }];
+    return value === null ? [] : [valued(one, keyOf(one), value)];
   });
   return {
     asOf: today,
@@ -65,12 +66,31 @@ interface Cell {
   readonly damage: string | null;
 }
 
+/**
+ * Gives a rebuild's cell its key, each made once: a text that is put together anew for every rebuild costs more to
+ * look up than all the sums.
+ */
+function cellKeys(): (rebuild: Priced) => string | null {
+  const keys = new Map<string, Map<string, string>>();
+  return ({ class: name, damage }) => {
+    if (name === null || damage === null) return null;
+    const row = keys.get(name) ?? new Map<string, string>();
+    keys.set(name, row);
+    const key = row.get(damage) ?? `${name}\0${damage}`;
+    row.set(damage, key);
+    return key;
+  };
+}
+
 /** A rebuild's cell and what it adds to the sums, worked out once for all fits. */
-function valued(rebuild: Priced): Omit<Valued, 'value'> {
+function valued(rebuild: Priced, key: string | null, value: number): Valued {
   const { profitCents, costCents } = rebuildProfit(rebuild);
-  const sums = { profitCents, costCents, ownSeconds: rebuild.ownSeconds ?? 0 };
-  const { class: name, damage } = rebuild;
-  return { cell: { class: name, damage }, key: name === null || damage === null ? null : `${name}\0${damage}`, sums };
+  return {
+    cell: { class: rebuild.class, damage: rebuild.damage },
+    key,
+    value,
+    sums: { profitCents, costCents, ownSeconds: rebuild.ownSeconds ?? 0 },
+  };
 }
 
 /** How a fit groups: the key of a rebuild's group (null = in none), and the part of its cell that names it. */
@@ -97,9 +117,9 @@ function fit({ shop }: AnswerInput, values: readonly Valued[], plain: Plain, { k
   for (const one of values) {
     const group = keyOf(one);
     if (group === null) continue;
-    const known = cells.get(group) ?? { cell: nameOf(one.cell), sums: { ...NOTHING } };
-    cells.set(group, known);
-    add(known.sums, one.sums);
+    const known = cells.get(group);
+    if (known) add(known.sums, one.sums);
+    else cells.set(group, { cell: nameOf(one.cell), sums: { ...one.sums } });
     grouped.push({ group, value: one.value });
   }
   const comparison = groupComparison(grouped);

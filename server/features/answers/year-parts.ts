@@ -3,11 +3,12 @@ import { MARKS_AT_MOST } from '#shared/contracts/answers-parts.ts';
 import type { yearAnswerSchema } from '#shared/contracts/answers-year.ts';
 import type { ShopFacts, ShopRebuild } from '../../books/shop-facts.ts';
 import { annualReturns, hasSeveralReturns } from '../../domain/annual-return.ts';
-import { profit, rebuildProfit } from '../../domain/profit.ts';
+import { daysHeld, profit, rebuildProfit } from '../../domain/profit.ts';
 import { type Completed, priced } from '../../domain/sets.ts';
+import type { NetFlows } from '../../domain/net-flows.ts';
 import { median, sum } from '../../domain/statistics.ts';
 import { gapOf } from './gap.ts';
-import { flowsOf, refOf } from './input.ts';
+import { refOf } from './input.ts';
 
 type Answer = z.input<typeof yearAnswerSchema>;
 
@@ -46,13 +47,12 @@ export function lateOf(exits: readonly ShopRebuild[]): Answer['late'] {
   };
 }
 
-/** Annual returns, days held and return on cost of these rebuilds. */
-export function returnsOf(exits: readonly ShopRebuild[]): Answer['returns'] {
-  const flows = flowsOf(exits);
+/** Annual returns (of these flows together), days held and return on cost of these rebuilds. */
+export function returnsOf(exits: readonly ShopRebuild[], flows: NetFlows): Answer['returns'] {
   const { pooled, n, median: middle, undatedCount } = annualReturns(exits, flows);
   const money = profit(exits);
   const days = priced(exits)
-    .map((one) => rebuildProfit(one).daysHeld)
+    .map(daysHeld)
     .filter((value) => value !== null);
   return {
     pooled,
@@ -84,7 +84,7 @@ export function rowOf(rebuild: ShopRebuild, exit: Completed['exit']): Answer['re
     exitKind: exit.kind,
     exitOn: exit.on,
     boughtOn,
-    daysHeld: money?.daysHeld ?? null,
+    daysHeld: purchaseCents === null ? null : daysHeld({ boughtOn, exit }),
     purchaseCents,
     workCents: rebuild.paidCents,
     costCents: money?.costCents ?? null,

@@ -54,7 +54,7 @@ export function yearAnswer(input: AnswerInput, asked?: number): Answer {
     money: moneyOf(shop, exits, own?.overheadCents ?? 0),
     late: lateOf(exits),
     tiedUp: input.tiedUpOn(through),
-    returns: returnsOf(exits),
+    returns: returnsOf(exits, input.flowsOf(exits.map(({ id }) => id))),
     rebuilds: left
       .toSorted((a, b) => (a.exit.on < b.exit.on ? 1 : a.exit.on > b.exit.on ? -1 : 0))
       .slice(0, MARKS_AT_MOST)

@@ -2,6 +2,7 @@ import { describe, expect, it } from 'vitest';
 import { dayReader } from '../../server/features/imports/cells/days.ts';
 import { readHours } from '../../server/features/imports/cells/hours.ts';
 import { currenciesIn, decimalVote, moneyReader } from '../../server/features/imports/cells/money.ts';
+import { tagMaker } from '../../server/features/imports/read/draft.ts';
 import { isSlip, readVehicle } from '../../server/features/imports/understand/vehicle-text.ts';
 import { categoryReader } from '../../server/features/imports/words/categories.ts';
 import { isTotalLabel } from '../../server/features/imports/words/headings.ts';
@@ -38,6 +39,9 @@ describe('money as people type it', () => {
     ['1.234,50', 'bad'],
     ['12,34', 'bad'],
     ['1.234', 'bad'],
+    ['10000000000.00', 1_000_000_000_000],
+    ['10000000000.01', 'bad'],
+    ['$99999999999.99', 'bad'],
     ['1,2345', 'bad'],
     [',234', 'bad'],
     ['1,,234', 'bad'],
@@ -143,6 +147,16 @@ describe('vehicles as people type them', () => {
     ['a4', 'a6', false],
     ['mazda3', 'mazda6', false],
   ])('%s and %s: a slip of the pen is %s', (a, b, isOne) => expect(isSlip(a, b)).toBe(isOne));
+});
+
+describe('tags given to rebuilds', () => {
+  it('stay within what a rebuild may be called, and unlike each other, however many share a name', () => {
+    const tagFor = tagMaker(['B-7']);
+    const tags = Array.from({ length: 1200 }, () => tagFor('the same long name of one and the same car'));
+    expect(Math.max(...tags.map((tag) => tag.length))).toBeLessThanOrEqual(40);
+    expect(new Set(tags).size).toBe(1200);
+    expect(tagFor('b-7')).toBe('b-7 (2)');
+  });
 });
 
 describe('category words', () => {

@@ -1,4 +1,4 @@
-import { parseCents } from '#shared/money.ts';
+import { MAX_CENTS, parseCents } from '#shared/money.ts';
 
 export type DecimalMark = '.' | ',';
 
@@ -13,7 +13,7 @@ const SIGN = /[$€£¥]|\b(?:USD|EUR|GBP|CAD|AUD|NZD|CHF|SEK|NOK|DKK|PLN|CZK|MX
 export function moneyReader(decimal: DecimalMark): (text: string, isCostCell?: boolean) => Money {
   return (text, isCostCell = false) => {
     const plain = decimal === '.' ? plainCents(text) : -1;
-    if (plain >= 0) return plain;
+    if (plain >= 0) return plain <= MAX_CENTS ? plain : 'bad';
     const trimmed = text.trim();
     if (trimmed === '') return 'blank';
     if (saysNothing(trimmed)) return isCostCell ? 'blank' : 'bad';

@@ -46,13 +46,18 @@ export function newDraft(
   };
 }
 
+const LONGEST = 40;
+
 /** Gives out tags that neither the shop nor this file has yet: `13 F-150`, then `13 F-150 (2)`. */
 export function tagMaker(taken: Iterable<string>): (wanted: string) => string {
   const used = new Set([...taken].map((tag) => tag.toLowerCase()));
   return (wanted) => {
     const base = wanted.trim().slice(0, 34).trim() || 'no name';
     let tag = base;
-    for (let number = 2; used.has(tag.toLowerCase()); number++) tag = `${base} (${number})`;
+    for (let number = 2; used.has(tag.toLowerCase()); number++) {
+      const ending = ` (${number})`;
+      tag = base.slice(0, LONGEST - ending.length) + ending;
+    }
     used.add(tag.toLowerCase());
     return tag;
   };

@@ -5,7 +5,7 @@ import { newShop, signInToDemo } from './support/visitor.ts';
 
 const OWN = PAGES.filter((page) => !page.isSignedOut);
 const ANSWERS = OWN.slice(0, 5);
-const BOOKS = [...OWN.slice(5), { name: 'one-import', path: 'import', follow: 'main a[href*="/import/"]' }];
+const BOOKS = OWN.slice(5);
 
 // The parts go to different workers.
 test.describe.configure({ mode: 'parallel', timeout: 90_000 });

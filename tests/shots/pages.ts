@@ -22,6 +22,7 @@ export const PAGES: readonly PageToShoot[] = [
   { name: 'hours', path: 'hours' },
   { name: 'own-hours', path: 'hours?view=mine' },
   { name: 'import', path: 'import' },
+  { name: 'one-import', path: 'import', follow: 'main a[href*="/import/"]' },
   { name: 'people', path: 'people' },
   { name: 'shop', path: 'shop' },
 ];

@@ -1,17 +1,18 @@
 // npm run shots [-- page …]: photographs every page into .shots/, the demo's and an empty shop's, on contact sheets too.
 import { mkdirSync, rmSync } from 'node:fs';
 import { fileURLToPath } from 'node:url';
-import { type Browser, chromium } from 'playwright-core';
+import { type Browser, type BrowserContext, chromium } from 'playwright-core';
 import { browser as launchOptions } from '../e2e/support/browser.ts';
 import { startServer } from '../e2e/support/server.ts';
+import { newShop, signInToDemo } from '../e2e/support/visitor.ts';
 import { contactSheet } from './contact-sheet.ts';
 import { PAGES } from './pages.ts';
 import { SCHEMES, type Scheme, shoot } from './shoot.ts';
-import { demoOwner, emptyShop, type Visitor } from './visitors.ts';
 
-const SETS: readonly { name: string; demo: boolean; visitor: Visitor }[] = [
-  { name: 'demo', demo: true, visitor: demoOwner },
-  { name: 'empty', demo: false, visitor: emptyShop },
+/** Whose shop is photographed: `enter` signs somebody in and resolves to the shop's address. */
+const SETS: readonly { name: string; demo: boolean; enter: (context: BrowserContext) => Promise<string> }[] = [
+  { name: 'demo', demo: true, enter: (context) => signInToDemo(context) },
+  { name: 'empty', demo: false, enter: async (context) => (await newShop(context)).shop },
 ];
 const WIDTHS = [1280, 768, 390];
 
@@ -34,7 +35,7 @@ async function shootSet(camera: Browser, set: (typeof SETS)[number]): Promise<vo
   const server = await startServer({ demo: set.demo });
   try {
     const entrance = await camera.newContext({ baseURL: server.origin });
-    const shopId = await set.visitor(entrance, server);
+    const shop = await set.enter(entrance);
     const state = await entrance.storageState();
     await entrance.close();
     for (const width of WIDTHS) {
@@ -44,7 +45,7 @@ async function shootSet(camera: Browser, set: (typeof SETS)[number]): Promise<vo
         mkdirSync(folder(scheme), { recursive: true });
       }
       const onComplaint = (text: string) => complaints.add(`${set.name} ${width} ${text}`);
-      await shoot(camera, { origin: server.origin, shopId, state, width, folder, onComplaint }, pages);
+      await shoot(camera, { origin: server.origin, shop, state, width, folder, onComplaint }, pages);
       for (const scheme of SCHEMES) {
         await contactSheet(camera, folder(scheme), names, `${shots}${set.name}-${width}-${scheme}.png`);
       }

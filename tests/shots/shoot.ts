@@ -6,7 +6,8 @@ export type Scheme = (typeof SCHEMES)[number];
 
 export interface Setting {
   readonly origin: string;
-  readonly shopId: string;
+  /** The shop's address, `/s/ID`. */
+  readonly shop: string;
   /** Cookies of the person who is signed in. */
   readonly state: Awaited<ReturnType<BrowserContext['storageState']>>;
   readonly width: number;
@@ -36,7 +37,7 @@ export async function shoot(browser: Browser, setting: Setting, pages: readonly 
 }
 
 async function shootPage(tab: Page, setting: Setting, page: PageToShoot): Promise<void> {
-  await settle(tab, page.path.startsWith('/') ? page.path : `/s/${setting.shopId}/${page.path}`);
+  await settle(tab, page.path.startsWith('/') ? page.path : `${setting.shop}/${page.path}`);
   if (page.follow) {
     const link = tab.locator(page.follow).first();
     if ((await link.count()) === 0) return;

@@ -92,6 +92,19 @@ describe('bringing a file in', () => {
     await settled(ada, anyway.body.id);
   });
 
+  it('one file brought in twice before it is booked is booked once', async () => {
+    const api = await testApi();
+    const ada = await api.owner();
+    const file = expenseList('1/22/2020,overhead,Other,rent,10.00');
+    const both = [await uploaded(ada, file), await uploaded(ada, file)];
+    const replies = await Promise.all(both.map(({ id }) => ada.post(`/api/imports/${id}/commit`)));
+    expect(replies.map(({ status }) => status).sort()).toEqual([200, 409]);
+    for (const { id } of both) await settled(ada, id);
+    const later = await Promise.all(both.map(({ id }) => ada.post(`/api/imports/${id}/commit`)));
+    expect(later.map(({ body }) => body.state ?? body.type).sort()).toEqual(['/problems/already-in', 'committed']);
+    expect((await ada.get('/api/entries')).body.totals).toMatchObject({ count: 1, cents: 1000 });
+  });
+
   it('asks what the file cannot tell, and books nothing before it is answered', async () => {
     const api = await testApi();
     const ada = await api.owner();

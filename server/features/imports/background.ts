@@ -74,7 +74,7 @@ export function startCommit(
               file: importPath(config.dataDir, record.id),
               settings: settingsOf(record),
               control: controlOf(record),
-              at: now().toISOString(),
+              at: new Date().toISOString(),
             },
             (share) => shares.set(record.id, share),
           );

@@ -20,6 +20,13 @@ const shown = async (ctx: OnImport) => {
 };
 const wrongState = (detail: string) => new ProblemError(409, { name: 'wrong-state', detail });
 
+// Two people, or two presses, may bring in one file before either books it.
+const alreadyIn = () =>
+  new ProblemError(409, {
+    name: 'already-in',
+    detail: 'This very file came in meanwhile. Drop this one, or bring it in once more if its rows shall count twice.',
+  });
+
 export const importRoutes: Route[] = [
   route(importsApi.list, (ctx) => listImports(readScope(ctx), ctx.query.cursor)),
   route(importsApi.upload, uploadImport),
@@ -59,9 +66,11 @@ async function commitImport(ctx: OnImport) {
     });
   }
   const { database } = services;
-  const isMine = await database.lock(() =>
-    importStore(shopScope(database.writer, actor.shopId)).move(before.id, 'ready', 'committing'),
-  );
+  const isMine = await database.lock(async () => {
+    const store = importStore(shopScope(database.writer, actor.shopId));
+    if (await store.cameInMeanwhile(before)) throw alreadyIn();
+    return store.move(before.id, 'ready', 'committing');
+  });
   if (isMine) startCommit({ services, ...actor, requestId: String(ctx.req.id) }, before);
   return shown(ctx);
 }

@@ -42,6 +42,16 @@ export function importStore(scope: ShopScope) {
         .first();
       return row ? fromRow<ImportRecord>(row) : null;
     },
+    /** Did the same file go into the books, or is it about to, after this one was brought in? */
+    async cameInMeanwhile({ id, fileSha256, createdAt }: ImportRecord): Promise<boolean> {
+      const other: object | undefined = await scope
+        .table('imports')
+        .where({ file_sha256: fileSha256 })
+        .whereNot({ id })
+        .whereRaw(`(state = 'committing' OR (state = 'committed' AND committed_at > ?))`, [createdAt])
+        .first('id');
+      return other !== undefined;
+    },
     create: (fields: NewImport) =>
       scope.insert('imports', { ...fields, state: 'reading', createdAt: new Date().toISOString() }),
     /** Starts another reading with what a person said of the file. */

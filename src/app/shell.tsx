@@ -31,7 +31,8 @@ export function Shell({ session }: { session: Session }) {
       <main id="main" ref={main} tabIndex={-1} className="page">
         {session.shop.isDemo && (
           <p className="no-print mb-4 text-label text-soft">
-            Demo shop: its calendar stands at {formatDayLong(session.shop.today)}.
+            Demo shop: every figure is invented, from a seed chosen so that there is something to find. Its calendar stands at{' '}
+            {formatDayLong(session.shop.today)}.
           </p>
         )}
         <ErrorBoundary

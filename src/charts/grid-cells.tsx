@@ -42,7 +42,9 @@ export function GridCells(props: Props) {
   return (
     <div className="table-frame" role="region" aria-label={caption} tabIndex={0}>
       <table className="w-full min-w-max border-separate border-spacing-1 text-label leading-snug">
-        <caption className="caption-bottom pt-3 text-left text-body text-soft">{caption}</caption>
+        <caption className="caption-bottom pt-3 text-left text-body text-soft">
+          <span className="grid-caption">{caption}</span>
+        </caption>
         <thead>
           <tr>
             <td>

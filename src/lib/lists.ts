@@ -1,6 +1,7 @@
 import { queryOptions } from '@tanstack/react-query';
 import { shopApi } from '#shared/contracts/shop.ts';
 import { call } from './api.ts';
+import { capital } from './capital.ts';
 
 /** The shop's classes, damage types, categories and workers, for the forms and filters of every page. */
 export const listsQuery = () =>
@@ -12,5 +13,5 @@ type Word = { readonly id: string; readonly name: string; readonly isRetired: bo
 export function optionsOf(words: readonly Word[], chosen: string | null = null): { value: string; label: string }[] {
   return words
     .filter((word) => !word.isRetired || word.id === chosen)
-    .map((word) => ({ value: word.id, label: word.name }));
+    .map((word) => ({ value: word.id, label: capital(word.name) }));
 }

@@ -13,6 +13,7 @@ const features = tableFeatures({
 /** From this many rows on, only those in view are drawn. */
 const VIRTUAL_FROM = 200;
 const ROW_HEIGHT = 39;
+const FOLDED_ROW_HEIGHT = 84;
 
 type Sort = { column: string; down: boolean };
 
@@ -47,7 +48,7 @@ export function DataTable<Row extends object>(
   const virtual = useVirtualizer({
     count: isVirtual ? ordered.length : 0,
     getScrollElement: () => frame.current,
-    estimateSize: () => ROW_HEIGHT,
+    estimateSize: () => (shape.columns === columns ? ROW_HEIGHT : FOLDED_ROW_HEIGHT),
     overscan: 6,
   });
   const window = virtual.getVirtualItems();

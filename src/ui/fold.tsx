@@ -62,6 +62,11 @@ function Under<Row>(props: { columns: readonly Column<Row>[]; valueOf: (column: 
   );
 }
 
+/** Is the window as narrow as a phone's? For what is drawn to a width. */
+export function useIsPhone(): boolean {
+  return useMatches(NARROW.phone);
+}
+
 function useMatches(query: string): boolean {
   return useSyncExternalStore(
     (onChange) => {

@@ -13,7 +13,7 @@ export type Column<Row> = {
   /** Tailwind width, such as `w-40`; needed when rows are virtual. */
   width?: string;
   /** On a window as narrow as this the cell stands beneath the row's heading, after the column's name unless `bare`. */
-  under?: Narrow;
+  under?: Narrow | undefined;
   bare?: boolean;
 };
 

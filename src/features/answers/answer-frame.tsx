@@ -1,6 +1,7 @@
 import type { UseQueryResult } from '@tanstack/react-query';
 import type { ReactNode } from 'react';
 import type { Head } from '#shared/contracts/answers-parts.ts';
+import { unbroken } from '../../lib/unbroken.ts';
 import { AnswerHeader } from '../../ui/answer-header.tsx';
 import { HowWorkedOut } from '../../ui/panel.tsx';
 import { usePageTitle } from '../../ui/page-title.ts';
@@ -51,7 +52,7 @@ function Answered<Answer extends Head>(props: Props<Answer> & { answer: Answer }
         title={title}
         filters={props.filters(answer)}
         answer={<Spoken sentence={sentence} />}
-        caution={cautions.length > 0 && cautions.join(' ')}
+        caution={cautions.length > 0 && unbroken(cautions.join(' '))}
       >
         <HowWorkedOut>{props.howWorkedOut(answer)}</HowWorkedOut>
       </AnswerHeader>

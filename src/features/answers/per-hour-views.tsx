@@ -1,5 +1,6 @@
 import type { z } from 'zod';
 import type { perHourSchema } from '#shared/contracts/answers-parts.ts';
+import { unbroken } from '../../lib/unbroken.ts';
 import { Money, PerHour } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
@@ -60,7 +61,7 @@ const COLUMNS: readonly Column<Row>[] = [
       <span className="block min-w-40">
         {row.view}
         <span className="block text-label text-soft">
-          {row.made}
+          {unbroken(row.made)}
           {row.missing > 0 && `; ${row.missing} without hours left out`}
         </span>
       </span>

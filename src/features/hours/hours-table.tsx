@@ -25,11 +25,13 @@ export function HoursTable({ rows, shopId, ofOne = false, onChange, onVoid }: Pr
         id: 'day',
         header: 'Day',
         width: 'w-28',
+        under: ofOne ? undefined : 'phone',
+        bare: true,
         cell: (row) =>
           row.workedOn ? (
             <span className="whitespace-nowrap">{format.day(row.workedOn)}</span>
           ) : (
-            <span className="text-soft">no day</span>
+            <span className="text-soft">No day</span>
           ),
       },
       {
@@ -48,17 +50,21 @@ export function HoursTable({ rows, shopId, ofOne = false, onChange, onVoid }: Pr
         id: 'who',
         header: 'Who',
         width: 'w-36',
+        under: 'phone',
+        bare: true,
         cell: (row) =>
           row.workerName ? (
             <span className="whitespace-nowrap">{row.workerName}</span>
           ) : (
-            <span className="text-soft">not said</span>
+            <span className="text-soft">Not said</span>
           ),
       },
       {
         id: 'task',
         header: 'Doing what',
         width: 'w-56',
+        under: 'phone',
+        bare: true,
         cell: (row) => (
           <>
             {row.task ?? <Nothing />}
@@ -66,7 +72,14 @@ export function HoursTable({ rows, shopId, ofOne = false, onChange, onVoid }: Pr
           </>
         ),
       },
-      { id: 'paid', header: 'Paid', width: 'w-20', cell: (row) => (row.isPaid ? 'paid' : 'own') },
+      {
+        id: 'paid',
+        header: 'Paid',
+        width: 'w-20',
+        under: 'phone',
+        bare: true,
+        cell: (row) => (row.isPaid ? 'Paid' : 'Own'),
+      },
       {
         id: 'hours',
         header: 'Hours',
@@ -78,6 +91,8 @@ export function HoursTable({ rows, shopId, ofOne = false, onChange, onVoid }: Pr
         id: 'act',
         header: <span className="sr-only">Change</span>,
         width: 'w-32',
+        under: 'phone',
+        bare: true,
         hidden: onChange === null,
         cell: (row) =>
           row.voidedAt === null &&

@@ -1,6 +1,7 @@
 import { useMemo } from 'react';
 import { Link } from 'react-router-dom';
 import type { EntryRow } from '#shared/contracts/ledger.ts';
+import { capital } from '../../lib/capital.ts';
 import { DataTable } from '../../ui/data-table.tsx';
 import { Money, Nothing } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
@@ -27,17 +28,21 @@ export function EntriesTable({ rows, shopId, ofOne = false, onChange, onVoid }: 
         id: 'day',
         header: 'Day',
         width: 'w-28',
+        under: 'phone',
+        bare: true,
         cell: (row) =>
           row.datedOn ? (
             <span className="whitespace-nowrap">{format.day(row.datedOn)}</span>
           ) : (
-            <span className="text-soft">no day</span>
+            <span className="text-soft">No day</span>
           ),
       },
       {
         id: 'rebuild',
         header: 'Rebuild',
         width: 'w-24',
+        under: 'phone',
+        bare: true,
         hidden: ofOne,
         cell: (row) => <RebuildTag row={row} shopId={shopId} />,
       },
@@ -45,15 +50,26 @@ export function EntriesTable({ rows, shopId, ofOne = false, onChange, onVoid }: 
         id: 'category',
         header: 'Category',
         width: 'w-40',
-        cell: (row) => <span className="block min-w-28">{row.categoryName}</span>,
+        under: 'phone',
+        bare: true,
+        cell: (row) => <span className="block sm:min-w-28">{capital(row.categoryName)}</span>,
       },
-      { id: 'what', header: 'What', width: 'w-72', cell: (row) => <What row={row} /> },
-      { id: 'kind', header: 'Kind', width: 'w-28', cell: (row) => <Kind row={row} /> },
+      { id: 'what', header: 'What', heads: true, width: 'w-72', cell: (row) => <What row={row} /> },
+      {
+        id: 'kind',
+        header: 'Kind',
+        width: 'w-28',
+        under: 'tablet',
+        bare: true,
+        cell: (row) => <Kind row={row} />,
+      },
       { id: 'cents', header: 'Amount', width: 'w-32', number: true, cell: (row) => <Amount row={row} /> },
       {
         id: 'act',
         header: <span className="sr-only">Change</span>,
         width: 'w-32',
+        under: 'phone',
+        bare: true,
         hidden: onChange === null,
         cell: (row) =>
           row.voidedAt === null &&
@@ -80,14 +96,14 @@ export function EntriesTable({ rows, shopId, ofOne = false, onChange, onVoid }: 
 }
 
 function RebuildTag({ row, shopId }: { row: EntryRow; shopId: string }) {
-  if (!row.rebuildId) return <span className="text-soft">overhead</span>;
+  if (!row.rebuildId) return <span className="text-soft">Overhead</span>;
   return <Link to={`/s/${shopId}/rebuilds/${row.rebuildId}`}>{row.rebuildTag}</Link>;
 }
 
 function What({ row }: { row: EntryRow }) {
   const words = [row.what, row.vendor].filter(Boolean).join(' · ');
   return (
-    <span className="block min-w-44">
+    <span className="block sm:min-w-44">
       {words || <Nothing />}
       {row.splitId && <span className="text-soft"> (a share)</span>}
       {row.voidReason && <span className="ml-2 inline-block no-underline">void: {row.voidReason}</span>}
@@ -97,15 +113,15 @@ function What({ row }: { row: EntryRow }) {
 
 function Kind({ row }: { row: EntryRow }) {
   const kind = kindOf(row);
-  if (kind === '') return <span className="text-soft">not said</span>;
-  return kind === 'surprise' ? <strong className="font-[640]">surprise</strong> : kind;
+  if (kind === '') return <span className="text-soft">Not said</span>;
+  return kind === 'surprise' ? <strong className="font-[640]">Surprise</strong> : capital(kind);
 }
 
 function Amount({ row }: { row: EntryRow }) {
   if (row.freeValueCents === null) return <Money cents={row.cents} shown="always" />;
   return (
     <span>
-      free{' '}
+      Free{' '}
       <span className="text-soft">
         (worth <Money cents={row.freeValueCents} shown="always" />)
       </span>

@@ -7,7 +7,8 @@ import { ErrorSummary } from '../../ui/error-summary.tsx';
 import { SelectField, TextField } from '../../ui/text-field.tsx';
 import { InvitationLink } from './invitation-link.tsx';
 import { usePeopleActions } from './mutations.ts';
-import { capital, ROLE_OPTIONS, roleWords } from './roles.ts';
+import { capital } from '../../lib/capital.ts';
+import { ROLE_OPTIONS, roleWords } from './roles.ts';
 
 type Made = Awaited<ReturnType<ReturnType<typeof usePeopleActions>['invite']>>;
 

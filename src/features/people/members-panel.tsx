@@ -9,7 +9,8 @@ import { useFormatter } from '../../ui/formatter-context.tsx';
 import { Panel } from '../../ui/panel.tsx';
 import { SelectField } from '../../ui/text-field.tsx';
 import { AskRole, AskTakeOut } from './member-questions.tsx';
-import { capital, lostPowers, ROLE_OPTIONS, roleWords } from './roles.ts';
+import { capital } from '../../lib/capital.ts';
+import { lostPowers, ROLE_OPTIONS, roleWords } from './roles.ts';
 import { useRoleChange } from './use-role-change.ts';
 
 /** Who belongs to the shop, as what; a change that takes something away is asked about first. */

@@ -1,7 +1,8 @@
 import { ROLES } from '#shared/vocabulary.ts';
 import { Panel } from '../../ui/panel.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
-import { capital, POWERS } from './roles.ts';
+import { capital } from '../../lib/capital.ts';
+import { POWERS } from './roles.ts';
 
 type Power = (typeof POWERS)[number];
 

@@ -1,4 +1,5 @@
 import { ROLES, type Role } from '#shared/vocabulary.ts';
+import { capital } from '../../lib/capital.ts';
 
 type Power = { does: string; roles: readonly Role[] };
 
@@ -32,11 +33,6 @@ export function roleSentence(role: Role): string {
 
 /** Roles as options of a field. */
 export const ROLE_OPTIONS = ROLES.map((role) => ({ value: role, label: capital(role) }));
-
-/** A role, or what it may do, at the start of a line: "Bookkeeper". */
-export function capital(word: string): string {
-  return word.charAt(0).toUpperCase() + word.slice(1);
-}
 
 /** What someone could do as `from` and no longer can as `to`. Empty: the change takes nothing away. */
 export function lostPowers(from: Role, to: Role): string[] {

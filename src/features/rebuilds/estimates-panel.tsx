@@ -92,20 +92,24 @@ function EstimateTable({ estimates }: { estimates: readonly Estimate[] }) {
         {
           id: 'state',
           header: 'State',
+          under: 'phone',
+          bare: true,
           cell: (estimate) =>
-            estimate.lockedAt === null ? 'open' : estimate.isBaseline ? 'locked: overruns are against it' : 'locked',
+            estimate.lockedAt === null ? 'Open' : estimate.isBaseline ? 'Locked: overruns are against it' : 'Locked',
         },
         { id: 'total', header: 'In all', number: true, cell: (estimate) => <Money cents={estimateTotal(estimate)} /> },
         { id: 'hours', header: 'Hours', number: true, cell: (estimate) => <Hours seconds={estimate.plannedSeconds} /> },
         {
           id: 'sale',
           header: 'Sale expected',
+          under: 'phone',
           number: true,
           cell: (estimate) => <Money cents={estimate.expectedSaleCents} />,
         },
         {
           id: 'days',
           header: 'Days expected',
+          under: 'phone',
           number: true,
           cell: (estimate) => <Days days={estimate.expectedDays} />,
         },

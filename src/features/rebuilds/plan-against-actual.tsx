@@ -1,17 +1,21 @@
 import type { CategoryOutcome } from '#shared/contracts/rebuild-outcome.ts';
 import type { RebuildDetail } from '#shared/contracts/rebuilds.ts';
 import { GapBar } from '../../charts/gap-bar.tsx';
+import { capital } from '../../lib/capital.ts';
 import { Money, Nothing } from '../../ui/figures.tsx';
+import { useIsPhone } from '../../ui/fold.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { EmptyState } from '../../ui/states.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
 
 /** Room for the bars of all categories, drawn to one scale. */
 const BAR = 260;
+const PHONE_BAR = 120;
 
 /** Locked plan against actual, category by category, drawn to one scale; then all together. */
 export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
   const format = useFormatter();
+  const bar = useIsPhone() ? PHONE_BAR : BAR;
   const { categories, row } = detail;
   if (categories.length === 0) {
     return (
@@ -23,9 +27,21 @@ export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
   const most = Math.max(...categories.map((one) => Math.max(one.estimateCents ?? 0, one.planningCents, 1)));
   const sum = (field: 'surpriseCents' | 'extraCents') => categories.reduce((total, one) => total + one[field], 0);
   const columns: Column<CategoryOutcome>[] = [
-    { id: 'name', header: 'Category', heads: true, cell: (one) => one.name },
-    { id: 'plan', header: 'Planned', number: true, cell: (one) => <Money cents={one.estimateCents} /> },
-    { id: 'actual', header: 'Actual', number: true, cell: (one) => <Money cents={one.planningCents} /> },
+    { id: 'name', header: 'Category', heads: true, cell: (one) => capital(one.name) },
+    {
+      id: 'plan',
+      header: 'Planned',
+      under: 'phone',
+      number: true,
+      cell: (one) => <Money cents={one.estimateCents} />,
+    },
+    {
+      id: 'actual',
+      header: 'Actual',
+      under: 'phone',
+      number: true,
+      cell: (one) => <Money cents={one.planningCents} />,
+    },
     {
       id: 'bar',
       header: 'Planned | actual',
@@ -37,7 +53,7 @@ export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
           overrunRate={rateOf(one.estimateCents, one.planningCents)}
           format={format}
           maxCents={most}
-          width={BAR}
+          width={bar}
           hideLabel={one.estimateCents === null}
         />
       ),
@@ -45,12 +61,14 @@ export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
     {
       id: 'surprise',
       header: 'Surprises',
+      under: 'phone',
       number: true,
       cell: (one) => (one.surpriseCents === 0 ? <Nothing /> : <Money cents={one.surpriseCents} />),
     },
     {
       id: 'extra',
       header: 'Chosen extras',
+      under: 'tablet',
       number: true,
       cell: (one) => (one.extraCents === 0 ? <Nothing /> : <Money cents={one.extraCents} />),
     },
@@ -72,7 +90,7 @@ export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
             surpriseCents={row.surpriseCents}
             overrunRate={row.overrunRate}
             format={format}
-            width={BAR}
+            width={bar}
           />
         ),
         surprise: <Money cents={sum('surpriseCents')} />,

@@ -37,12 +37,17 @@ export function RebuildsAnswer({
           <>
             {open} and {openCount === 1 ? 'holds' : 'hold'} <Mark>{format.money(openCostCents)}</Mark>.
           </>
+        ) : judged === 1 ? (
+          <>
+            The one that has left {keptCents < 0 ? 'lost' : 'kept'} <Mark>{format.money(Math.abs(keptCents))}</Mark>.
+          </>
         ) : (
           <>
             <Mark>
               {format.number(judged - lossCount)} of {format.number(judged)}
             </Mark>{' '}
-            lost nothing; together they kept <Mark>{format.money(keptCents)}</Mark>.
+            lost nothing; all {format.number(judged)} together {keptCents < 0 ? 'lost' : 'kept'}{' '}
+            <Mark>{format.money(Math.abs(keptCents))}</Mark>.
           </>
         )
       }

@@ -2,6 +2,7 @@ import { useMemo } from 'react';
 import { Link } from 'react-router-dom';
 import type { RebuildRow } from '#shared/contracts/rebuilds.ts';
 import { GapBar } from '../../charts/gap-bar.tsx';
+import { capital } from '../../lib/capital.ts';
 import { DataTable } from '../../ui/data-table.tsx';
 import { Days, Hours, Money, PerHour } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
@@ -19,21 +20,36 @@ export function RebuildsTable({ rows, shopId }: { rows: readonly RebuildRow[]; s
         width: 'w-64',
         cell: (row) => (
           <>
-            <Link to={`/s/${shopId}/rebuilds/${row.id}`} className="whitespace-nowrap text-ink">
+            <Link to={`/s/${shopId}/rebuilds/${row.id}`} className="text-ink sm:whitespace-nowrap">
               {row.tag}
               {row.name && ` · ${row.name}`}
             </Link>
             <span className="block text-label text-soft">
-              {[row.className, row.damageName].filter(Boolean).join(', ')}
+              {capital([row.className, row.damageName].filter(Boolean).join(', '))}
             </span>
           </>
         ),
       },
-      { id: 'stage', header: 'Stage', width: 'w-28', cell: (row) => <StageWords row={row} /> },
-      { id: 'days', header: 'Days', width: 'w-16', number: true, cell: (row) => <Days days={row.daysHeld} /> },
+      {
+        id: 'stage',
+        header: 'Stage',
+        width: 'w-28',
+        under: 'phone',
+        bare: true,
+        cell: (row) => <StageWords row={row} />,
+      },
+      {
+        id: 'days',
+        header: 'Days',
+        width: 'w-16',
+        under: 'tablet',
+        number: true,
+        cell: (row) => <Days days={row.daysHeld} />,
+      },
       {
         id: 'cost',
         header: 'All-in cost',
+        under: 'tablet',
         width: 'w-24',
         number: true,
         cell: (row) => <Money cents={row.costCents} />,
@@ -41,6 +57,7 @@ export function RebuildsTable({ rows, shopId }: { rows: readonly RebuildRow[]; s
       {
         id: 'proceeds',
         header: 'Brought',
+        under: 'tablet',
         width: 'w-24',
         number: true,
         cell: (row) => <Money cents={row.proceedsCents} />,
@@ -55,6 +72,7 @@ export function RebuildsTable({ rows, shopId }: { rows: readonly RebuildRow[]; s
       {
         id: 'hours',
         header: 'Own hours',
+        under: 'phone',
         width: 'w-20',
         number: true,
         cell: (row) => <Hours seconds={row.ownSeconds} />,
@@ -69,6 +87,8 @@ export function RebuildsTable({ rows, shopId }: { rows: readonly RebuildRow[]; s
       {
         id: 'gap',
         header: 'Planned | actual',
+        under: 'phone',
+        bare: true,
         width: 'w-40',
         cell: (row) => (
           <GapBar
@@ -77,7 +97,7 @@ export function RebuildsTable({ rows, shopId }: { rows: readonly RebuildRow[]; s
             surpriseCents={row.surpriseCents}
             overrunRate={row.overrunRate}
             format={format}
-            width={84}
+            width={76}
           />
         ),
       },
@@ -92,7 +112,7 @@ function StageWords({ row }: { row: RebuildRow }) {
   const day = row.leftOn ?? row.boughtOn;
   return (
     <>
-      {row.stage}
+      {capital(row.stage)}
       {day && <span className="block text-label whitespace-nowrap text-soft">{format.day(day)}</span>}
     </>
   );

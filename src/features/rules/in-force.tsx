@@ -8,6 +8,9 @@ type Year = ContingencyAnswer['thisYear'];
 /** The rules of this year and the next, and how this year's has done on what was bought under it and is finished. */
 export function InForce({ years }: { years: readonly Year[] }) {
   const format = useFormatter();
+  if (years.every(({ rule }) => rule === null)) {
+    return <p>No rule is adopted for {years.map(({ year }) => year).join(' or ')} yet.</p>;
+  }
   return (
     <ul className="grid gap-1">
       {years.map((one) => (
@@ -19,7 +22,7 @@ export function InForce({ years }: { years: readonly Year[] }) {
 
 /** `In force for 2026: 18%, adopted 3 Jan 2026. It covered 6 of the 9 bought since and finished; 2 are not finished.` */
 export function inForceText({ year, rule }: Year, format: Formatter): string {
-  if (!rule) return `No rule adopted for ${year} so far.`;
+  if (!rule) return `No rule is adopted for ${year} yet.`;
   const adopted = `In force for ${year}: ${ruleText(rule, format)}, adopted ${format.day(rule.adoptedOn)}.`;
   return `${adopted} ${recordText(rule.record, format)}`;
 }

@@ -28,7 +28,7 @@ export function WordRow({ name, note, acts, onRename }: Props) {
       ) : (
         <>
           <span className="min-w-[7rem] flex-1">
-            <span className="break-words">{name}</span>
+            <span className="inline-block break-words first-letter:uppercase">{name}</span>
             {note && <span className="block text-label text-soft">{note}</span>}
           </span>
           <span className="-mr-2 flex flex-wrap items-center">

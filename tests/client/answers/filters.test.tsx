@@ -40,7 +40,7 @@ test('a filter goes into the address and to the server; show all takes it out', 
   const { place } = openPage(<OverrunsPage />);
   await userEvent.click(await screen.findByRole('button', { name: /All rebuilds/ }));
   const choices = within(await screen.findByRole('dialog', { name: 'Which rebuilds' }));
-  await userEvent.selectOptions(choices.getByLabelText('Damage'), 'hail (12)');
+  await userEvent.selectOptions(choices.getByLabelText('Damage'), 'Hail (12)');
   await userEvent.click(choices.getByLabelText('seen (12)'));
   expect(place()).toBe(`/s/one/page?damage=${idOf('hail')}&seen=yes`);
   expect(asked.at(-1)?.url.search).toBe(`?damage=${idOf('hail')}&seen=yes`);

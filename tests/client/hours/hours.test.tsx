@@ -102,7 +102,7 @@ describe('a mechanic', () => {
     await user.click(await screen.findByRole('button', { name: 'Note a surprise or a receipt' }));
     const dialog = within(await screen.findByRole('dialog'));
     await user.type(dialog.getByLabelText('What'), 'cracked hinge');
-    await user.selectOptions(dialog.getByLabelText('Category'), 'parts');
+    await user.selectOptions(dialog.getByLabelText('Category'), 'Parts');
     await user.type(dialog.getByLabelText('Amount on the receipt'), '45');
     await user.click(dialog.getByRole('button', { name: 'Note it' }));
     await waitFor(() => expect(asked).toHaveLength(1));

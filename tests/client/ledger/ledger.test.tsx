@@ -82,7 +82,7 @@ describe('the fast line', () => {
       isExtra: false,
     });
     expect(form.getByRole('combobox', { name: 'Rebuild' })).toHaveValue('B-062 · 2014 Orrin Vale');
-    expect(form.getByRole('combobox', { name: 'Category' })).toHaveValue('parts');
+    expect(form.getByRole('combobox', { name: 'Category' })).toHaveValue('Parts');
     expect(form.getByLabelText('Day')).toHaveValue('2026-06-15');
     expect(form.getByLabelText('What')).toHaveValue('');
     expect(form.getByLabelText('Amount')).toHaveFocus();

@@ -135,7 +135,7 @@ describe('one rebuild', () => {
   it('shows plan against actual, and what it holds', async () => {
     openOne(buildDetail());
     const plan = await section('Plan against actual');
-    expect(plan.getByRole('row', { name: /^parts \$900 \$1,000/ })).toBeInTheDocument();
+    expect(plan.getByRole('row', { name: /^Parts \$900 \$1,000/ })).toBeInTheDocument();
     expect(screen.getByText('$6,000', { selector: 'mark' })).toBeInTheDocument();
   });
 

@@ -3,7 +3,8 @@ import type { Formatter } from '#shared/formatter.ts';
 import { RangeLines } from '../../../charts/range-lines.tsx';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel } from '../../../ui/panel.tsx';
-import { capital, listed } from '../sentences/parts.ts';
+import { capital } from '../../../lib/capital.ts';
+import { listed } from '../sentences/parts.ts';
 
 /** What each damage type would ask for by itself, from nine rebuilds on. */
 export function DamageRanges({ answer }: { answer: ContingencyAnswer }) {

@@ -56,7 +56,13 @@ const COLUMNS: readonly Column<Score>[] = [
     ),
   },
   { id: 'short', header: 'Short, in all', number: true, cell: (row) => <Money cents={row.shortCents} /> },
-  { id: 'unused', header: 'Unused, in all', number: true, cell: (row) => <Money cents={row.unusedCents} /> },
+  {
+    id: 'unused',
+    header: 'Unused, in all',
+    under: 'phone',
+    number: true,
+    cell: (row) => <Money cents={row.unusedCents} />,
+  },
 ];
 
 function Meanings() {

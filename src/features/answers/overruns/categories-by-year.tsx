@@ -3,13 +3,14 @@ import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel } from '../../../ui/panel.tsx';
 import { type Column, Table } from '../../../ui/table.tsx';
-import { capital } from '../sentences/parts.ts';
+import { capital } from '../../../lib/capital.ts';
 import { byMoneyOver } from './strip-rows.ts';
 
 type YearRate = OverrunsAnswer['hours']['years'][number];
 type Row = { key: string; name: string; years: readonly YearRate[] };
 /** More years than these do not fit beside each other. */
 const YEARS_SHOWN = 8;
+const YEARS_ON_A_PHONE = 2;
 
 /** Where a category took a step, an all-years figure is stale: each category by the year in which the rebuilds left. */
 export function CategoriesByYear({ answer }: { answer: OverrunsAnswer }) {
@@ -39,11 +40,12 @@ function useColumns(years: string): readonly Column<Row>[] {
         id: 'name',
         header: 'Category',
         heads: true,
-        cell: (row) => <span className="block min-w-32">{row.name}</span>,
+        cell: (row) => <span className="block sm:min-w-32">{row.name}</span>,
       },
-      ...years.split(',').map((year) => ({
+      ...years.split(',').map((year, at, all) => ({
         id: year,
         header: year,
+        under: at < all.length - YEARS_ON_A_PHONE ? ('phone' as const) : undefined,
         number: true,
         cell: (row: Row) => <Rate rate={row.years.find((one) => `${one.year}` === year)} />,
       })),

@@ -6,7 +6,7 @@ import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel } from '../../../ui/panel.tsx';
 import { type Column, Table } from '../../../ui/table.tsx';
 import { useShopPath } from '../rebuild-link.tsx';
-import { capital } from '../sentences/parts.ts';
+import { capital } from '../../../lib/capital.ts';
 import { byMoneyOver } from './strip-rows.ts';
 
 type Category = OverrunsAnswer['categories'][number];
@@ -86,10 +86,10 @@ function useRows(answer: OverrunsAnswer): Row[] {
 }
 
 const COLUMNS: readonly Column<Row>[] = [
-  { id: 'name', header: 'Category', heads: true, cell: (row) => <span className="block min-w-32">{row.name}</span> },
-  { id: 'n', header: 'Rebuilds', number: true, cell: (row) => row.n || '' },
-  { id: 'plan', header: 'Planned', number: true, cell: (row) => row.plan },
-  { id: 'actual', header: 'Actual', number: true, cell: (row) => row.actual },
+  { id: 'name', header: 'Category', heads: true, cell: (row) => <span className="block sm:min-w-32">{row.name}</span> },
+  { id: 'n', header: 'Rebuilds', under: 'phone', number: true, cell: (row) => row.n || '' },
+  { id: 'plan', header: 'Planned', under: 'phone', number: true, cell: (row) => row.plan },
+  { id: 'actual', header: 'Actual', under: 'phone', number: true, cell: (row) => row.actual },
   { id: 'over', header: 'Over', number: true, cell: (row) => row.over },
   {
     id: 'pooled',
@@ -102,10 +102,17 @@ const COLUMNS: readonly Column<Row>[] = [
       </>
     ),
   },
-  { id: 'median', header: 'Typical', number: true, cell: (row) => <Percent rate={row.median} signed /> },
+  {
+    id: 'median',
+    header: 'Typical',
+    under: 'phone',
+    number: true,
+    cell: (row) => <Percent rate={row.median} signed />,
+  },
   {
     id: 'unbudgeted',
     header: 'Not planned',
+    under: 'tablet',
     number: true,
     cell: (row) =>
       row.unbudgeted && (

@@ -29,9 +29,21 @@ const COLUMNS: readonly Column<Row>[] = [
     heads: true,
     cell: (row) => <Link to={`?from=${row.year}&to=${row.year}`}>{row.year}</Link>,
   },
-  { id: 'n', header: 'Rebuilds', number: true, cell: (row) => row.n },
-  { id: 'plan', header: 'Planned', number: true, cell: (row) => <Money cents={row.estimateCents} /> },
-  { id: 'actual', header: 'Actual', number: true, cell: (row) => <Money cents={row.actualCents} /> },
+  { id: 'n', header: 'Rebuilds', under: 'phone', number: true, cell: (row) => row.n },
+  {
+    id: 'plan',
+    header: 'Planned',
+    under: 'phone',
+    number: true,
+    cell: (row) => <Money cents={row.estimateCents} />,
+  },
+  {
+    id: 'actual',
+    header: 'Actual',
+    under: 'phone',
+    number: true,
+    cell: (row) => <Money cents={row.actualCents} />,
+  },
   {
     id: 'pooled',
     header: 'All together',
@@ -43,7 +55,13 @@ const COLUMNS: readonly Column<Row>[] = [
       </>
     ),
   },
-  { id: 'median', header: 'Typical', number: true, cell: (row) => <Percent rate={row.median} signed /> },
+  {
+    id: 'median',
+    header: 'Typical',
+    under: 'phone',
+    number: true,
+    cell: (row) => <Percent rate={row.median} signed />,
+  },
   {
     id: 'spread',
     header: '8 in 10 between',

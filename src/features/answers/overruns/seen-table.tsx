@@ -24,7 +24,7 @@ export function SeenTable({ seen }: { seen: OverrunsAnswer['seen'] }) {
 
 const COLUMNS: readonly Column<Row>[] = [
   { id: 'seen', header: 'Bought', heads: true, cell: words },
-  { id: 'n', header: 'Rebuilds', number: true, cell: (row) => row.n },
+  { id: 'n', header: 'Rebuilds', under: 'phone', number: true, cell: (row) => row.n },
   {
     id: 'pooled',
     header: 'All together',
@@ -36,7 +36,13 @@ const COLUMNS: readonly Column<Row>[] = [
       </>
     ),
   },
-  { id: 'median', header: 'Typical', number: true, cell: (row) => <Percent rate={row.median} signed /> },
+  {
+    id: 'median',
+    header: 'Typical',
+    under: 'phone',
+    number: true,
+    cell: (row) => <Percent rate={row.median} signed />,
+  },
   {
     id: 'surprised',
     header: 'Had a surprise',

@@ -1,6 +1,6 @@
 import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
 import type { StripDot, StripRow } from '../../../charts/dot-strip-layout.ts';
-import { capital } from '../sentences/parts.ts';
+import { capital } from '../../../lib/capital.ts';
 
 type Spread = OverrunsAnswer['total'] | OverrunsAnswer['hours'];
 type Path = (id: string) => string;

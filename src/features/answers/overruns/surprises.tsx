@@ -4,7 +4,7 @@ import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel } from '../../../ui/panel.tsx';
 import { type Column, Table } from '../../../ui/table.tsx';
 import { RangeText } from '../range-text.tsx';
-import { capital } from '../sentences/parts.ts';
+import { capital } from '../../../lib/capital.ts';
 
 type Surprises = OverrunsAnswer['surprises'];
 type Row = Surprises['categories'][number];
@@ -48,8 +48,14 @@ export function SurprisesTable({ surprises }: { surprises: Surprises }) {
 
 const COLUMNS: readonly Column<Row>[] = [
   { id: 'name', header: 'Category', heads: true, cell: (row) => capital(row.name) },
-  { id: 'x', header: 'Rebuilds', number: true, cell: (row) => row.x },
+  { id: 'x', header: 'Rebuilds', under: 'phone', number: true, cell: (row) => row.x },
   { id: 'rate', header: 'Rate', number: true, cell: (row) => <Percent rate={row.rate} /> },
-  { id: 'range', header: '95% range', number: true, cell: (row) => <RangeText low={row.lower} high={row.upper} /> },
+  {
+    id: 'range',
+    header: '95% range',
+    under: 'phone',
+    number: true,
+    cell: (row) => <RangeText low={row.lower} high={row.upper} />,
+  },
   { id: 'cost', header: 'Cost in all', number: true, cell: (row) => <Money cents={row.unforeseenCents} /> },
 ];

@@ -60,7 +60,7 @@ function cautions(answer: ContingencyAnswer, format: Formatter): string[] {
     score &&
       score.lower !== null &&
       score.upper !== null &&
-      `The share covered is sure only to lie between ${format.percent(score.lower)} and ${format.percent(score.upper)} (95%, roughly).`,
+      `The share they cover in the long run may lie anywhere between ${format.percent(score.lower)} and ${format.percent(score.upper)} (roughly 95% sure).`,
     percent.uplift !== null && percent.uplift < 0 && 'Estimates ran high; the plan itself is never cut.',
   );
 }

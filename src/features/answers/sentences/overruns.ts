@@ -1,6 +1,7 @@
 import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
 import type { Formatter } from '#shared/formatter.ts';
-import { capital, counted, mark, type Said, type Sentence, said, say, words } from './parts.ts';
+import { capital } from '../../../lib/capital.ts';
+import { counted, mark, type Said, type Sentence, said, say, words } from './parts.ts';
 
 type Category = OverrunsAnswer['categories'][number];
 
@@ -18,7 +19,7 @@ function sentence(answer: OverrunsAnswer, format: Formatter): Sentence {
   if (total.isThin) {
     return say`Too few yet to say where: ${counted(format, total.n, 'finished rebuild')} with an estimate came ${came} so far.`;
   }
-  return say`All together the work comes ${came}${where(answer, format)}.`;
+  return say`All together the work comes ${came}.${where(answer, format)}`;
 }
 
 /** `34% over`, `3% under`, `as estimated`; the figure is marked. */
@@ -45,10 +46,10 @@ function where(answer: OverrunsAnswer, format: Formatter): Sentence {
   const worst = worstCategories(answer);
   if (!worst) return [];
   const { most, furthest } = worst;
-  const dollars = mark(format.signed(over(most)));
-  const rate = mark(format.signedPercent(furthest.pooled ?? 0));
-  if (most === furthest) return say`; ${most.name} most, by ${dollars} and ${rate}`;
-  return say`; ${most.name} most in money (${dollars}), ${furthest.name} furthest (${rate})`;
+  const dollars = mark(format.money(over(most)));
+  const rate = mark(format.percent(furthest.pooled ?? 0));
+  if (most === furthest) return say` The most goes over on ${most.name}: ${dollars}, or ${rate} more than planned.`;
+  return say` The most money goes over on ${most.name}, ${dollars}; the furthest over is ${furthest.name}, by ${rate}.`;
 }
 
 function cautions(answer: OverrunsAnswer, format: Formatter): string[] {
@@ -80,7 +81,7 @@ function seenWords({ seen }: OverrunsAnswer, format: Formatter): string | null {
   const looked = of(true);
   const unseen = of(false);
   if (!looked || !unseen) return null;
-  return `Seen before buying ${format.signedPercent(looked.pooled ?? 0)}, unseen ${format.signedPercent(unseen.pooled ?? 0)}.`;
+  return `Cars seen before buying ran ${format.signedPercent(looked.pooled ?? 0)}, unseen ones ${format.signedPercent(unseen.pooled ?? 0)}.`;
 }
 
 function surpriseWords(surprises: OverrunsAnswer['surprises'], format: Formatter): string {

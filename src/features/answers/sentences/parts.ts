@@ -29,11 +29,6 @@ export function counted(format: Formatter, count: number, one = 'rebuild', many 
   return `${words(format, count)} ${count === 1 ? one : many}`;
 }
 
-/** `Nine`, at the start of a sentence. */
-export function capital(text: string): string {
-  return text.charAt(0).toUpperCase() + text.slice(1);
-}
-
 export function words(format: Formatter, count: number): string {
   return countInWords(count, { locale: format.style.locale });
 }

@@ -1,6 +1,7 @@
 import type { TimeToSellAnswer } from '#shared/contracts/answers-time-to-sell.ts';
 import type { Formatter } from '#shared/formatter.ts';
-import { capital, counted, mark, type Said, type Sentence, said, say } from './parts.ts';
+import { capital } from '../../../lib/capital.ts';
+import { counted, mark, type Said, type Sentence, said, say } from './parts.ts';
 
 /** How long until the money is back? The middle, and what is still unsold after 60 days. */
 export function sayTimeToSell(answer: TimeToSellAnswer, format: Formatter): Said {
@@ -68,7 +69,7 @@ export function between(lower: number, upper: number | null, format: Formatter):
 function comparison({ comparison: test }: TimeToSellAnswer, format: Formatter): string | null {
   if (!test || test.p === null) return null;
   const pair = `${test.classA} and ${test.classB}`;
-  const p = test.p < 0.001 ? 'p below 0.001' : `p ${format.number(test.p, 3)}`;
+  const p = test.p < 0.001 ? 'p below 0.001' : `p = ${format.number(test.p, 3)}`;
   return test.p < 0.05
     ? `${capital(pair)} do not sell alike (${p}).`
     : `Between ${pair} the difference may well be chance (${p}).`;

@@ -1,6 +1,7 @@
 import type { Comparison, WhatPaysAnswer } from '#shared/contracts/answers-what-pays.ts';
 import type { Formatter } from '#shared/formatter.ts';
-import { capital, counted, ENOUGH, listed, mark, type Said, type Sentence, said, say } from './parts.ts';
+import { capital } from '../../../lib/capital.ts';
+import { counted, ENOUGH, listed, mark, type Said, type Sentence, said, say } from './parts.ts';
 import { wageWords } from './year.ts';
 
 export const PAY_VIEWS = ['per-hour', 'on-cost'] as const;
@@ -32,10 +33,10 @@ function sentence(answer: WhatPaysAnswer, view: PayView, format: Formatter): Sen
   if (answer.totals.n === 0) return ['Nothing has been finished yet, so nothing can be said of what pays.'];
   if (cells.n === 0 && view === 'per-hour') return noHours(answer, format);
   const [first, second] = leads(fits);
-  if (first?.by === null) return say`${capital(nameOf(first.found.best))} ${pays(first.found, view, format)}.`;
   if (first) {
-    const rest = second ? say`; ${second.by ?? ''}, ${bestAndLeast(second.found, view, format, false)}` : [];
-    return [`${capital(first.by ?? '')}, `, ...bestAndLeast(first.found, view, format, true), ...rest, '.'];
+    const { best } = first.found;
+    const rest = second ? say` ${capital(second.by ?? '')}, ${bestAndLeast(second.found, view, format)}.` : [];
+    return say`${capital(nameOf(best))} ${bestAndLeast(first.found, view, format, true)}.${rest}`;
   }
   const enough = [...cells.groups, ...classes.groups, ...damages.groups].some((group) => !group.isThin);
   return enough ? noDifference(answer, view, format) : tooFew(answer, format);
@@ -76,19 +77,17 @@ export function nameOf(group: Group): string {
   return [group.className, damage].filter(Boolean).join(' with ');
 }
 
-/** `hail pays best ($64 an hour) and flood least ($5)`; the unit is said once, and the verb only first. */
-function bestAndLeast({ best, worst }: Extremes, view: PayView, format: Formatter, isFirst: boolean): Sentence {
-  const short = (group: Group) => group.className ?? group.damageName ?? '';
-  const value = (group: Group) => group.pulled?.value ?? 0;
-  const bare = (group: Group) => mark(payFigure(value(group), view, format));
-  const top = isFirst ? mark(payText(value(best), view, format)) : bare(best);
-  return say`${short(best)} ${isFirst ? 'pays best' : 'best'} (${top}) and ${short(worst)} least (${bare(worst)})`;
-}
-
-function pays({ best, worst }: Extremes, view: PayView, format: Formatter): Sentence {
+/**
+ * `pays best, at $64 an hour; flood damage brings least, $5`: after the best one's name, with the unit. Without it:
+ * `pickup pays best, at $53; small car loses $4`.
+ */
+function bestAndLeast({ best, worst }: Extremes, view: PayView, format: Formatter, isFirst = false): Sentence {
+  const top = best.pulled?.value ?? 0;
   const low = worst.pulled?.value ?? 0;
-  const verb = low < 0 ? 'loses' : 'brings only';
-  return say`pays best (${mark(payText(best.pulled?.value ?? 0, view, format))}) and ${nameOf(worst)} ${verb} ${mark(payText(Math.abs(low), view, format))}`;
+  const name = isFirst ? '' : `${nameOf(best)} `;
+  const most = mark(isFirst ? payText(top, view, format) : payFigure(top, view, format));
+  const least = mark(payFigure(Math.abs(low), view, format));
+  return say`${name}pays best, at ${most}; ${nameOf(worst)} ${low < 0 ? 'loses' : 'brings least,'} ${least}`;
 }
 
 function noDifference(answer: WhatPaysAnswer, view: PayView, format: Formatter): Sentence {

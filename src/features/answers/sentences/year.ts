@@ -1,6 +1,7 @@
 import type { YearAnswer } from '#shared/contracts/answers-year.ts';
 import type { Formatter } from '#shared/formatter.ts';
-import { areCounted, capital, counted, ENOUGH, mark, type Said, type Sentence, said, say, words } from './parts.ts';
+import { capital } from '../../../lib/capital.ts';
+import { areCounted, counted, ENOUGH, mark, type Said, type Sentence, said, say, words } from './parts.ts';
 
 /** Did the work pay this year? Kept, and by the hour where hours are known. */
 export function sayYear(answer: YearAnswer, format: Formatter): Said {
@@ -24,8 +25,8 @@ function sentence(answer: YearAnswer, format: Formatter): Sentence {
   if (keptCents === 0) return say`${capital(who(answer, format))}${has} come out ${mark('even')}${soFar}.`;
   const verb = keptCents > 0 ? 'kept' : 'lost';
   const amount = mark(format.money(Math.abs(keptCents)));
-  const after = overheadCents === 0 ? '' : ' after overhead';
-  return say`${capital(who(answer, format))}${has} ${verb} ${amount}${after}${soFar}${byTheHour(answer, format)}`;
+  const after = overheadCents === 0 ? '' : `${isRunning ? ',' : ''} after overhead`;
+  return say`${capital(who(answer, format))}${has} ${verb} ${amount}${soFar}${after}${byTheHour(answer, format)}`;
 }
 
 function who(answer: YearAnswer, format: Formatter): string {
@@ -42,7 +43,7 @@ function byTheHour(answer: YearAnswer, format: Formatter): Sentence {
   const hours = `${own.missingCount > 0 ? 'the' : 'your'} ${hoursWord(own.ownSeconds, format)}`;
   const known = own.missingCount > 0 ? ' that are known' : '';
   // The rate is of the rebuilds alone; overhead belongs to the year.
-  if (answer.overheadCents !== 0) return say`; before overhead, ${rate} for each of ${hours}${known}.`;
+  if (answer.overheadCents !== 0) return say`. Before overhead it comes to ${rate} for each of ${hours}${known}.`;
   return say`: ${rate} for each of ${hours}${known}.`;
 }
 

@@ -4,7 +4,7 @@ import { SurvivalCurve } from '../../../charts/survival-curve.tsx';
 import type { SurvivalGroup } from '../../../charts/survival-layout.ts';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel } from '../../../ui/panel.tsx';
-import { capital } from '../sentences/parts.ts';
+import { capital } from '../../../lib/capital.ts';
 
 type Group = TimeToSellAnswer['overall'];
 /** More lines than this cannot be told apart. */

@@ -1,4 +1,5 @@
 import type { TimeToSellAnswer } from '#shared/contracts/answers-time-to-sell.ts';
+import { capital } from '../../../lib/capital.ts';
 import { DataTable } from '../../../ui/data-table.tsx';
 import { Days, Money } from '../../../ui/figures.tsx';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
@@ -33,16 +34,24 @@ const COLUMNS: readonly Column<Row>[] = [
     header: 'Rebuild',
     heads: true,
     cell: (row) => (
-      <span className="block min-w-40">
+      <span className="block sm:min-w-40">
         <RebuildLink rebuild={row} />
       </span>
     ),
     sortBy: (row) => row.tag,
   },
-  { id: 'stage', header: 'Stage', cell: (row) => row.stage, sortBy: (row) => row.stage },
+  {
+    id: 'stage',
+    header: 'Stage',
+    under: 'phone',
+    bare: true,
+    cell: (row) => capital(row.stage),
+    sortBy: (row) => row.stage,
+  },
   {
     id: 'listed',
     header: 'Days listed',
+    under: 'phone',
     number: true,
     cell: (row) => <Days days={row.daysListed} why="not listed" />,
     sortBy: (row) => row.daysListed,
@@ -50,6 +59,7 @@ const COLUMNS: readonly Column<Row>[] = [
   {
     id: 'held',
     header: 'Days since bought',
+    under: 'phone',
     number: true,
     cell: (row) => <Days days={row.daysSinceBought} />,
     sortBy: (row) => row.daysSinceBought,
@@ -57,6 +67,7 @@ const COLUMNS: readonly Column<Row>[] = [
   {
     id: 'asking',
     header: 'Asking',
+    under: 'phone',
     number: true,
     cell: (row) => <Money cents={row.askingCents} />,
     sortBy: (row) => row.askingCents,

@@ -8,7 +8,7 @@ import { Segmented } from '../../../ui/segmented.tsx';
 import { type Column, Table } from '../../../ui/table.tsx';
 import { useAddress } from '../address.ts';
 import { useShopPath } from '../rebuild-link.tsx';
-import { capital } from '../sentences/parts.ts';
+import { capital } from '../../../lib/capital.ts';
 import { fitsOf, type Group, nameOf, type PayView } from '../sentences/what-pays.ts';
 import { figureOf, groupSearch, inRank } from './groups.ts';
 
@@ -70,12 +70,12 @@ function useColumns(view: PayView): readonly Column<Group>[] {
         header: 'Kind',
         heads: true,
         cell: (row) => (
-          <span className="block min-w-32">
+          <span className="block sm:min-w-32">
             <Link to={path(`rebuilds?${groupSearch(row)}`)}>{capital(nameOf(row))}</Link>
           </span>
         ),
       },
-      { id: 'n', header: 'Rebuilds', number: true, cell: (row) => row.n },
+      { id: 'n', header: 'Rebuilds', under: 'phone', number: true, cell: (row) => row.n },
       {
         id: 'value',
         header: isHour ? 'Kept an hour, pulled' : 'On cost, pulled',
@@ -85,6 +85,7 @@ function useColumns(view: PayView): readonly Column<Group>[] {
       {
         id: 'range',
         header: '95% range',
+        under: 'phone',
         number: true,
         cell: (row) => {
           const { low, high } = figureOf(row);
@@ -94,13 +95,32 @@ function useColumns(view: PayView): readonly Column<Group>[] {
       {
         id: 'plain',
         header: 'Plain, sum over sum',
+        under: 'tablet',
         number: true,
         cell: (row) => (row.plain === null ? '' : gray(row, write(row.plain))),
       },
-      { id: 'kept', header: 'Kept in all', number: true, cell: (row) => <Money cents={row.profitCents} tone="kept" /> },
+      {
+        id: 'kept',
+        header: 'Kept in all',
+        under: 'phone',
+        number: true,
+        cell: (row) => <Money cents={row.profitCents} tone="kept" />,
+      },
       isHour
-        ? { id: 'hours', header: 'Own hours', number: true, cell: (row) => <Hours seconds={row.ownSeconds} /> }
-        : { id: 'cost', header: 'All-in cost', number: true, cell: (row) => <Money cents={row.costCents} /> },
+        ? {
+            id: 'hours',
+            header: 'Own hours',
+            under: 'tablet',
+            number: true,
+            cell: (row) => <Hours seconds={row.ownSeconds} />,
+          }
+        : {
+            id: 'cost',
+            header: 'All-in cost',
+            under: 'tablet',
+            number: true,
+            cell: (row) => <Money cents={row.costCents} />,
+          },
     ] satisfies Column<Group>[];
   }, [format, path, isHour]);
 }

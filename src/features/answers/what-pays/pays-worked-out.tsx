@@ -3,7 +3,7 @@ import type { WhatPaysAnswer } from '#shared/contracts/answers-what-pays.ts';
 import type { Formatter } from '#shared/formatter.ts';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { useShopPath } from '../rebuild-link.tsx';
-import { capital } from '../sentences/parts.ts';
+import { capital } from '../../../lib/capital.ts';
 import { fitsOf, type Group, leads, nameOf, type PayView } from '../sentences/what-pays.ts';
 import { groupSearch } from './groups.ts';
 

@@ -8,7 +8,8 @@ import type { WaterfallRow } from '../../../charts/waterfall-layout.ts';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel, Panels } from '../../../ui/panel.tsx';
 import { useRebuildPath } from '../rebuild-link.tsx';
-import { capital, counted } from '../sentences/parts.ts';
+import { capital } from '../../../lib/capital.ts';
+import { counted } from '../sentences/parts.ts';
 
 /** What was kept through the year against the year before, and where the sale money went. */
 export function YearPictures({ answer }: { answer: YearAnswer }) {

@@ -1,5 +1,6 @@
 import { useMemo } from 'react';
 import type { YearAnswer } from '#shared/contracts/answers-year.ts';
+import { capital } from '../../../lib/capital.ts';
 import { DataTable } from '../../../ui/data-table.tsx';
 import { Hours, Money, Nothing, PerHour } from '../../../ui/figures.tsx';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
@@ -22,10 +23,19 @@ export function YearRebuilds({ answer }: { answer: YearAnswer }) {
         cell: (row) => <Named row={row} />,
         sortBy: (row) => row.tag,
       },
-      { id: 'damage', header: 'Damage', cell: (row) => row.damageName ?? <Nothing />, sortBy: (row) => row.damageName },
+      {
+        id: 'damage',
+        header: 'Damage',
+        under: 'tablet',
+        bare: true,
+        cell: (row) => (row.damageName ? capital(row.damageName) : <Nothing />),
+        sortBy: (row) => row.damageName,
+      },
       {
         id: 'left',
         header: 'Left',
+        under: 'tablet',
+        bare: true,
         number: true,
         cell: (row) => format.dayShort(row.exitOn),
         sortBy: (row) => row.exitOn,
@@ -33,6 +43,7 @@ export function YearRebuilds({ answer }: { answer: YearAnswer }) {
       {
         id: 'cost',
         header: 'All-in cost',
+        under: 'tablet',
         number: true,
         cell: (row) => <Money cents={row.costCents} />,
         sortBy: (row) => row.costCents,
@@ -40,6 +51,7 @@ export function YearRebuilds({ answer }: { answer: YearAnswer }) {
       {
         id: 'sold',
         header: 'Sold for',
+        under: 'tablet',
         number: true,
         cell: (row) => <Money cents={row.proceedsCents} />,
         sortBy: (row) => row.proceedsCents,
@@ -48,6 +60,7 @@ export function YearRebuilds({ answer }: { answer: YearAnswer }) {
       {
         id: 'hours',
         header: 'Own hours',
+        under: 'phone',
         number: true,
         cell: (row) => <Hours seconds={row.ownSeconds} />,
         sortBy: (row) => row.ownSeconds,
@@ -59,7 +72,14 @@ export function YearRebuilds({ answer }: { answer: YearAnswer }) {
         cell: (row) => <PerHour cents={row.keptPerHourCents} tone="kept" />,
         sortBy: (row) => row.keptPerHourCents,
       },
-      { id: 'gap', header: 'Planned | actual', cell: (row) => <Gap gap={row.gap} />, sortBy: (row) => row.gap.overrun },
+      {
+        id: 'gap',
+        header: 'Planned | actual',
+        under: 'phone',
+        bare: true,
+        cell: (row) => <Gap gap={row.gap} />,
+        sortBy: (row) => row.gap.overrun,
+      },
     ],
     [format],
   );
@@ -90,7 +110,7 @@ export function YearRebuilds({ answer }: { answer: YearAnswer }) {
 
 function Named({ row }: { row: Row }) {
   return (
-    <span className="block min-w-44">
+    <span className="block sm:min-w-44">
       <RebuildLink rebuild={row} />
       {row.exitKind !== 'sold' && <span className="text-soft"> · {row.exitKind}</span>}
     </span>

@@ -38,21 +38,34 @@ const COLUMNS: readonly Column<Row>[] = [
       </Link>
     ),
   },
-  { id: 'left', header: 'Left', number: true, cell: (row) => row.exitCount },
-  { id: 'sold', header: 'Sold', number: true, cell: (row) => row.soldCount },
+  { id: 'left', header: 'Left', under: 'phone', number: true, cell: (row) => row.exitCount },
+  { id: 'sold', header: 'Sold', under: 'phone', number: true, cell: (row) => row.soldCount },
   {
     id: 'profit',
     header: 'Before overhead',
     number: true,
     cell: (row) => <Money cents={row.profitCents} tone="kept" />,
   },
-  { id: 'overhead', header: 'Overhead', number: true, cell: (row) => <Money cents={row.overheadCents} /> },
+  {
+    id: 'overhead',
+    header: 'Overhead',
+    under: 'phone',
+    number: true,
+    cell: (row) => <Money cents={row.overheadCents} />,
+  },
   { id: 'kept', header: 'Kept', number: true, cell: (row) => <Money cents={row.keptCents} tone="kept" /> },
   {
     id: 'late',
     header: 'Late bills',
+    under: 'phone',
     number: true,
     cell: (row) => (row.lateCount === 0 ? '' : <Money cents={row.lateCents} />),
   },
-  { id: 'tied', header: 'Tied up at its end', number: true, cell: (row) => <Money cents={row.tiedUp.cents} /> },
+  {
+    id: 'tied',
+    header: 'Tied up at its end',
+    under: 'phone',
+    number: true,
+    cell: (row) => <Money cents={row.tiedUp.cents} />,
+  },
 ];

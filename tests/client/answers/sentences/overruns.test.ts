@@ -14,13 +14,13 @@ test('names the category with most money over and the one furthest over', () => 
     category('paint', 20, 0.1),
   ];
   expect(say(20, 0.34, categories)).toBe(
-    'All together the work comes in 34% over the locked estimates; parts most in money (+$4,000), small systems furthest (+40%).',
+    'All together the work comes in 34% over the locked estimates. The most money goes over on parts, $4,000; the furthest over is small systems, by 40%.',
   );
 });
 
 test('one category may be both', () => {
   expect(say(20, 0.34, [category('parts', 20, 0.5), category('paint', 20, 0.1)])).toBe(
-    'All together the work comes in 34% over the locked estimates; parts most, by +$10,000 and +50%.',
+    'All together the work comes in 34% over the locked estimates. The most goes over on parts: $10,000, or 50% more than planned.',
   );
 });
 
@@ -50,7 +50,7 @@ test('seen is set against unseen only where both have enough', () => {
   const group = (seen: boolean, n: number, over: number) => ({ seen, ...category('all', n, over), surprises: rate });
   const cautions = (n: number) =>
     sayOverruns({ ...overrunsReply(20, 0.3), seen: [group(true, 10, 0.19), group(false, n, 0.43)] }, format).cautions;
-  expect(cautions(10)).toContain('Seen before buying +19%, unseen +43%.');
+  expect(cautions(10)).toContain('Cars seen before buying ran +19%, unseen ones +43%.');
   expect(cautions(4).join(' ')).not.toContain('unseen');
 });
 

@@ -14,7 +14,7 @@ const rearVan = group({ class: 'van', damage: 'rear' }, 2, 9_900);
 
 test('kinds with enough rebuilds are named, best and least', () => {
   expect(say(whatPaysReply({ cells: comparison([hailSuv, floodSmall, rearVan]) }))).toBe(
-    'SUV with hail damage pays best ($52 an hour) and small car with flood damage loses $8 an hour.',
+    'SUV with hail damage pays best, at $52 an hour; small car with flood damage loses $8.',
   );
 });
 
@@ -35,7 +35,7 @@ test('where most kinds have too few, damage and class each speak for all', () =>
     classes: comparison([group({ class: 'pickup' }, 10, 5_300), group({ class: 'small car' }, 12, -400)]),
   });
   expect(say(reply)).toBe(
-    'By damage, hail pays best ($64 an hour) and flood least ($5); by class, pickup best ($53) and small car least (−$4).',
+    'Hail damage pays best, at $64 an hour; flood damage brings least, $5. By class, pickup pays best, at $53; small car loses $4.',
   );
 });
 
@@ -73,6 +73,6 @@ test('on cost it speaks in percent', () => {
     group({ class: 'van', damage: 'rear' }, 6, 0.02, 0.1),
   ]);
   expect(say(whatPaysReply({ cells }), 'on-cost')).toBe(
-    'SUV with hail damage pays best (31% on cost) and van with rear damage brings only 2% on cost.',
+    'SUV with hail damage pays best, at 31% on cost; van with rear damage brings least, 2%.',
   );
 });

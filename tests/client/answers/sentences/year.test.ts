@@ -17,7 +17,7 @@ describe('the answer', () => {
 
   test('the rate is of the rebuilds; overhead is the year’s, and the sentence keeps them apart', () => {
     expect(say({ overheadCents: 90_000, keptCents: 1_752_000 })).toBe(
-      'Nine sold rebuilds have kept $17,520 after overhead so far; before overhead, $21.59 for each of your 853 hours.',
+      'Nine sold rebuilds have kept $17,520 so far, after overhead. Before overhead it comes to $21.59 for each of your 853 hours.',
     );
   });
 

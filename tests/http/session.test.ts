@@ -91,6 +91,35 @@ describe('shops of a session', () => {
   });
 });
 
+describe('how long a session lasts', () => {
+  const DAY = 86_400_000;
+
+  it.each([
+    ['seven idle days', { expires_at: Date.now() - 1000 }],
+    ['thirty days in any case', { created_at: Date.now() - 31 * DAY }],
+  ])('%s', async (_, times) => {
+    const api = await testApi();
+    const ada = await api.owner();
+    await api.services.database.writer('sessions').update(times);
+    expect((await ada.get('/api/shop')).status).toBe(401);
+  });
+
+  it('grows while it is used, without a reader waiting for whoever writes', async () => {
+    const api = await testApi();
+    const ada = await api.owner();
+    const { database } = api.services;
+    const soon = Date.now() + 2 * DAY;
+    await database.writer('sessions').update({ expires_at: soon });
+    let finish = () => {};
+    const writing = database.lock(() => new Promise<void>((resolve) => (finish = resolve)));
+    expect((await ada.get('/api/shop')).status).toBe(200);
+    finish();
+    await writing;
+    await database.lock(async () => undefined);
+    expect((await database.reader('sessions').first()).expires_at).toBeGreaterThan(soon);
+  });
+});
+
 describe('requests from elsewhere', () => {
   it('refuses a write that another site made the browser send', async () => {
     const api = await testApi();

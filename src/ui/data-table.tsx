@@ -1,7 +1,7 @@
 import { createSortedRowModel, rowSortingFeature, sortFn_basic, tableFeatures, useTable } from '@tanstack/react-table';
 import { useVirtualizer } from '@tanstack/react-virtual';
-import { useMemo, useRef } from 'react';
-import { useFolded } from './fold.tsx';
+import { Fragment, useMemo, useRef } from 'react';
+import { UnderRow, useFolded } from './fold.tsx';
 import { Cells, type Column, cellClass, Foot, TableFrame, type TableProps } from './table.tsx';
 
 const features = tableFeatures({
@@ -24,8 +24,8 @@ type Sort = { column: string; down: boolean };
 export function DataTable<Row extends object>(
   props: TableProps<Row> & { sort?: Sort; onSort?: (sort: Sort | null) => void },
 ) {
-  const { rows, columns, rowKey, rowProps, sort, onSort } = props;
-  const shape = useFolded(columns, props.foot);
+  const { rows, columns, rowKey, rowProps, foot, sort, onSort } = props;
+  const shape = useFolded(columns);
   const frame = useRef<HTMLDivElement>(null);
   const table = useTable({
     features,
@@ -48,7 +48,7 @@ export function DataTable<Row extends object>(
   const virtual = useVirtualizer({
     count: isVirtual ? ordered.length : 0,
     getScrollElement: () => frame.current,
-    estimateSize: () => (shape.columns === columns ? ROW_HEIGHT : FOLDED_ROW_HEIGHT),
+    estimateSize: () => (shape.moved.length === 0 ? ROW_HEIGHT : FOLDED_ROW_HEIGHT),
     overscan: 6,
   });
   const window = virtual.getVirtualItems();
@@ -65,21 +65,28 @@ export function DataTable<Row extends object>(
 
   return (
     <TableFrame {...props} tall={isVirtual} frameRef={frame} {...(isVirtual ? { rowCount: ordered.length + 1 } : {})}>
-      <SortHead columns={shape.columns} directionOf={(id) => table.getColumn(id)?.getIsSorted() ?? false} onPress={onPress} />
+      <SortHead
+        columns={shape.columns}
+        directionOf={(id) => table.getColumn(id)?.getIsSorted() ?? false}
+        onPress={onPress}
+      />
       <tbody>
         {first > 0 && <Spacer height={window[0]?.start ?? 0} span={shape.columns.length} />}
         {shown.map((row, at) => (
-          <tr
-            key={rowKey(row.original)}
-            aria-rowindex={isVirtual ? first + at + 2 : undefined}
-            {...rowProps?.(row.original)}
-          >
-            <Cells row={row.original} index={first + at} columns={shape.columns} />
-          </tr>
+          <Fragment key={rowKey(row.original)}>
+            <tr aria-rowindex={isVirtual ? first + at + 2 : undefined} {...rowProps?.(row.original)}>
+              <Cells row={row.original} index={first + at} columns={shape.columns} />
+            </tr>
+            <UnderRow
+              {...shape}
+              valueOf={(column) => column.cell(row.original, first + at)}
+              rowProps={rowProps?.(row.original)}
+            />
+          </Fragment>
         ))}
         {after > 0 && <Spacer height={after} span={shape.columns.length} />}
       </tbody>
-      {shape.foot && <Foot columns={shape.columns} foot={shape.foot} />}
+      {foot && <Foot {...shape} foot={foot} />}
     </TableFrame>
   );
 }

@@ -1,64 +1,44 @@
 import { type ReactNode, useMemo, useSyncExternalStore } from 'react';
-import type { Column } from './table.tsx';
+import type { Column, RowProps } from './table.tsx';
 
-/** Below these widths the columns that say so move beneath their row's heading. */
+/** Below these widths the columns that say so move beneath their row. */
 const NARROW = { phone: '(width < 40rem)', tablet: '(width < 64rem)' } as const;
 export type Narrow = keyof typeof NARROW;
 
-type Folded<Row> = { columns: readonly Column<Row>[]; foot: Readonly<Record<string, ReactNode>> | undefined };
+/** Columns that stay, and those whose cells stand on a line of their own beneath each row. */
+type Folded<Row> = { columns: readonly Column<Row>[]; moved: readonly Column<Row>[] };
 
-/** Columns and sums as this window has room for them: what is `under` stands in its row's heading cell (or the first one left). */
-export function useFolded<Row>(
-  columns: readonly Column<Row>[],
-  foot?: Readonly<Record<string, ReactNode>>,
-): Folded<Row> {
+/** Columns as this window has room for them. */
+export function useFolded<Row>(columns: readonly Column<Row>[]): Folded<Row> {
   const isPhone = useMatches(NARROW.phone);
   const isTablet = useMatches(NARROW.tablet);
   return useMemo(() => {
     const isUnder = ({ under }: Column<Row>) => (under === 'phone' && isPhone) || (under === 'tablet' && isTablet);
-    const moved = columns.filter(isUnder);
-    const left = columns.filter((column) => !isUnder(column));
-    const home = left.find((column) => column.heads) ?? left[0];
-    if (moved.length === 0 || !home) return { columns, foot };
-    const withMoved: Column<Row> = {
-      ...home,
-      cell: (row, index) => (
-        <>
-          {home.cell(row, index)}
-          <Under columns={moved} valueOf={(column) => column.cell(row, index)} />
-        </>
-      ),
-    };
-    return {
-      columns: left.map((column) => (column === home ? withMoved : column)),
-      foot: foot && {
-        ...foot,
-        [home.id]: (
-          <>
-            {foot[home.id]}
-            <Under columns={moved} valueOf={(column) => foot[column.id]} />
-          </>
-        ),
-      },
-    };
-  }, [columns, foot, isPhone, isTablet]);
+    return { columns: columns.filter((column) => !isUnder(column)), moved: columns.filter(isUnder) };
+  }, [columns, isPhone, isTablet]);
 }
 
-/** Each value with its column's name before it, where the value does not speak for itself. */
-function Under<Row>(props: { columns: readonly Column<Row>[]; valueOf: (column: Column<Row>) => ReactNode }) {
-  const pairs = props.columns
-    .map((column) => ({ column, value: props.valueOf(column) }))
+type UnderProps<Row> = Folded<Row> & { valueOf: (column: Column<Row>) => ReactNode; rowProps?: RowProps | undefined };
+
+/** The line beneath a row: each value with its column's name before it, where it does not speak for itself. */
+export function UnderRow<Row>({ columns, moved, valueOf, rowProps }: UnderProps<Row>) {
+  const pairs = moved
+    .map((column) => ({ column, value: valueOf(column) }))
     .filter(({ value }) => value !== null && value !== undefined && value !== '' && value !== false);
   if (pairs.length === 0) return null;
   return (
-    <span className="table-under">
-      {pairs.map(({ column, value }) => (
-        <span key={column.id}>
-          {!column.bare && <span className="text-soft">{column.header} </span>}
-          {value}
+    <tr {...rowProps} className="table-under">
+      <td colSpan={columns.length}>
+        <span>
+          {pairs.map(({ column, value }) => (
+            <span key={column.id}>
+              {!column.bare && <span className="text-soft">{column.header} </span>}
+              {value}
+            </span>
+          ))}
         </span>
-      ))}
-    </span>
+      </td>
+    </tr>
   );
 }
 

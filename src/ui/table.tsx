@@ -1,5 +1,5 @@
-import { type HTMLAttributes, type ReactNode, type Ref, useId } from 'react';
-import { type Narrow, useFolded } from './fold.tsx';
+import { Fragment, type HTMLAttributes, type ReactNode, type Ref, useId } from 'react';
+import { type Narrow, UnderRow, useFolded } from './fold.tsx';
 
 /** One column. `cell` draws a row's cell; `number` aligns figures; `heads` makes it the row's heading; `sortBy` lets DataTable sort. */
 export type Column<Row> = {
@@ -12,7 +12,7 @@ export type Column<Row> = {
   sortBy?: (row: Row) => number | string | null;
   /** Tailwind width, such as `w-40`; needed when rows are virtual. */
   width?: string;
-  /** On a window as narrow as this the cell stands beneath the row's heading, after the column's name unless `bare`. */
+  /** On a window as narrow as this the cell stands beneath its row, after the column's name unless `bare`. */
   under?: Narrow | undefined;
   bare?: boolean;
 };
@@ -34,8 +34,9 @@ export type TableProps<Row> = {
 
 /** A table in its own frame that scrolls sideways when it must. `caption`, `rows`, `columns`, `rowKey`, `rowProps`, `foot`. */
 export function Table<Row>(props: TableProps<Row>) {
-  const { rows, rowKey, rowProps } = props;
-  const { columns, foot } = useFolded(props.columns, props.foot);
+  const { rows, rowKey, rowProps, foot } = props;
+  const shape = useFolded(props.columns);
+  const { columns } = shape;
   return (
     <TableFrame {...props}>
       <thead>
@@ -49,12 +50,15 @@ export function Table<Row>(props: TableProps<Row>) {
       </thead>
       <tbody>
         {rows.map((row, index) => (
-          <tr key={rowKey(row)} {...rowProps?.(row)}>
-            <Cells row={row} index={index} columns={columns} />
-          </tr>
+          <Fragment key={rowKey(row)}>
+            <tr {...rowProps?.(row)}>
+              <Cells row={row} index={index} columns={columns} />
+            </tr>
+            <UnderRow {...shape} valueOf={(column) => column.cell(row, index)} rowProps={rowProps?.(row)} />
+          </Fragment>
         ))}
       </tbody>
-      {foot && <Foot columns={columns} foot={foot} />}
+      {foot && <Foot {...shape} foot={foot} />}
     </TableFrame>
   );
 }
@@ -75,13 +79,12 @@ export function Cells<Row>({ row, index, columns }: { row: Row; index: number; c
 }
 
 /** The row of sums. */
-export function Foot<Row>({
-  columns,
-  foot,
-}: {
+export function Foot<Row>(props: {
   columns: readonly Column<Row>[];
+  moved: readonly Column<Row>[];
   foot: Readonly<Record<string, ReactNode>>;
 }) {
+  const { columns, moved, foot } = props;
   return (
     <tfoot>
       <tr>
@@ -91,6 +94,7 @@ export function Foot<Row>({
           </td>
         ))}
       </tr>
+      {moved.some(({ id }) => foot[id]) && <UnderRow {...props} valueOf={({ id }) => foot[id]} />}
     </tfoot>
   );
 }

@@ -44,7 +44,9 @@ function Choices(props: {
   const { options, filter, change } = props;
   const years = options.years.map(({ year, count }) => ({ value: `${year}`, label: `${year} (${count})` }));
   const named = (list: readonly { id: string; name: string; count: number }[]) => [
-    ...list.filter((one) => one.count > 0).map((one) => ({ value: one.id, label: `${capital(one.name)} (${one.count})` })),
+    ...list
+      .filter((one) => one.count > 0)
+      .map((one) => ({ value: one.id, label: `${capital(one.name)} (${one.count})` })),
     { value: 'unknown', label: 'not known' },
   ];
   const verb = options.yearOf === 'listed' ? 'Listed' : 'Left';

@@ -7,6 +7,7 @@ import { createFormatter } from '#shared/formatter.ts';
 import { BackTestBars } from '../../../src/charts/back-test-bars.tsx';
 import { GapBar } from '../../../src/charts/gap-bar.tsx';
 import { type GridCell, GridCells } from '../../../src/charts/grid-cells.tsx';
+import { YearBars } from '../../../src/charts/year-bars.tsx';
 
 const format = createFormatter({ currency: 'USD', locale: 'en-US' });
 
@@ -92,4 +93,21 @@ test('the grid says value, range and count, and too few where it cannot', () => 
     'no rebuilds',
     '$20 /h13 rebuilds',
   ]);
+});
+
+test('every year has its bar, its figure and its name; where there is no room the latest are drawn', async () => {
+  const years = Array.from({ length: 40 }, (_, at) => ({
+    year: `${1987 + at}`,
+    cents: at % 2 === 0 ? 90_000 : -4_000,
+    note: '3 left',
+    isShown: at === 39,
+  }));
+  const { container } = show(<YearBars caption="Half of the years kept money." bars={years} format={format} />);
+  const names = [...container.querySelectorAll('svg text')].map((text) => text.textContent);
+  expect(names).toContain('2026');
+  expect(names).toContain('−$40');
+  expect(names).not.toContain('1987');
+  expect(container.querySelector('.chart')).toHaveAttribute('aria-hidden', 'true');
+  await userEvent.click(screen.getByText('As a table'));
+  expect(screen.getByRole('table', { name: 'Half of the years kept money.' })).toHaveTextContent('1987$9003 left');
 });

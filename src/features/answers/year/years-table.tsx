@@ -1,14 +1,22 @@
+import { lazy, Suspense } from 'react';
 import { Link } from 'react-router-dom';
 import type { YearAnswer } from '#shared/contracts/answers-year.ts';
 import { formatDayRange } from '#shared/format-day.ts';
+import type { Formatter } from '#shared/formatter.ts';
+import { capital } from '../../../lib/capital.ts';
 import { Money } from '../../../ui/figures.tsx';
+import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel } from '../../../ui/panel.tsx';
 import { type Column, Table } from '../../../ui/table.tsx';
+import { words } from '../sentences/parts.ts';
 
 type Row = YearAnswer['years'][number];
 
-/** Every shop year beside the others; a year opens by its number. */
+const YearBars = lazy(async () => ({ default: (await import('../../../charts/year-bars.tsx')).YearBars }));
+
+/** Every shop year beside the others, drawn and as rows; a year opens by its number. */
 export function YearsTable({ answer }: { answer: YearAnswer }) {
+  const format = useFormatter();
   const rows = answer.years.toSorted((a, b) => b.year - a.year);
   return (
     <Panel
@@ -16,6 +24,13 @@ export function YearsTable({ answer }: { answer: YearAnswer }) {
       title="All years"
       subtitle="A handful of rebuilds a year can show any slope by chance, and car prices move too: look at several years before calling it better or worse."
     >
+      {rows.length > 1 && (
+        <div className="mb-5">
+          <Suspense fallback={<div className="h-72" />}>
+            <YearBars caption={yearsCaption(rows, format)} bars={barsOf(answer)} format={format} />
+          </Suspense>
+        </div>
+      )}
       <Table
         caption="All years"
         rows={rows}
@@ -25,6 +40,28 @@ export function YearsTable({ answer }: { answer: YearAnswer }) {
       />
     </Panel>
   );
+}
+
+/** Years in their order; what left in each, and which one is not over. */
+function barsOf({ years, year, asOf }: YearAnswer) {
+  return years
+    .toSorted((a, b) => a.year - b.year)
+    .map((row) => ({
+      year: `${row.year}`,
+      cents: row.keptCents,
+      note: `${row.exitCount} ${row.from <= asOf && asOf <= row.to ? 'so far' : 'left'}`,
+      isShown: row.year === year,
+    }));
+}
+
+/** `Five of six years kept money: $48,147 was kept all together; the best was 2023, with $19,406.` */
+export function yearsCaption(rows: readonly Pick<Row, 'year' | 'keptCents'>[], format: Formatter): string {
+  const kept = rows.filter((row) => row.keptCents > 0).length;
+  const sum = rows.reduce((total, row) => total + row.keptCents, 0);
+  const best = rows.reduce((a, b) => (b.keptCents > a.keptCents ? b : a));
+  const all = `${format.money(Math.abs(sum))} was ${sum < 0 ? 'lost' : 'kept'} all together`;
+  const most = kept === 0 ? '' : `; the best was ${best.year}, with ${format.money(best.keptCents)}`;
+  return `${kept === 0 ? 'None' : capital(words(format, kept))} of ${words(format, rows.length)} years kept money: ${all}${most}.`;
 }
 
 const COLUMNS: readonly Column<Row>[] = [

@@ -1,6 +1,6 @@
 import type { RawDatabase } from '../platform/database.ts';
 import { newId } from '../platform/ids.ts';
-import { type Importing, SHEET } from './imported.ts';
+import type { Importing, Source } from './imported.ts';
 
 export interface ImportedBaseline {
   readonly rebuildId: string;
@@ -29,7 +29,7 @@ export function importedRebuilds(raw: RawDatabase, { shopId, importId, at }: Imp
       for (const [categoryId, cents] of b.lines) estimateLine.run(shopId, id, categoryId, cents);
     },
     /** A rebuild that the file brings: columns of its table → values. */
-    rebuild(id: string, row: number, columns: ReadonlyMap<string, string | number>): void {
+    rebuild(id: string, source: Omit<Source, 'col'>, columns: ReadonlyMap<string, string | number>): void {
       const known = [...columns];
       const names = [
         'id',
@@ -42,7 +42,7 @@ export function importedRebuilds(raw: RawDatabase, { shopId, importId, at }: Imp
       ];
       raw
         .prepare(`INSERT INTO rebuilds (${names.join(', ')}) VALUES (${names.map(() => '?').join(', ')})`)
-        .run(id, shopId, importId, SHEET, row, at, ...known.map(([, value]) => value));
+        .run(id, shopId, importId, source.sheet, source.row, at, ...known.map(([, value]) => value));
     },
     /** Fills what the books did not know of a rebuild. Gives the columns filled, with their values. */
     fill(id: string, columns: ReadonlyMap<string, string | number>): Record<string, string | number> {

@@ -4,6 +4,7 @@ import { newIds } from '../platform/ids.ts';
 
 /** Where a row of a file stands. Text files have one sheet, 1. */
 export interface Source {
+  readonly sheet: number;
   readonly row: number;
   readonly col: number;
 }
@@ -27,6 +28,7 @@ export interface ImportedHours extends Source {
   readonly workedOn: string | null;
   readonly seconds: number;
   readonly task: string | null;
+  readonly isGuess: boolean;
 }
 
 export interface Importing {
@@ -36,14 +38,13 @@ export interface Importing {
   readonly at: string;
 }
 
-export const SHEET = 1;
-const DRAWN = 20_000;
+const DRAWN = 2000;
 const ENTRY =
   'id shop_id rebuild_id category_id dated_on cents vendor what foreseen is_extra is_guess import_id import_sheet import_row import_col created_at created_by'.split(
     ' ',
   );
 const HOURS =
-  'id shop_id rebuild_id worker_id worked_on seconds is_paid task import_id import_sheet import_row import_col created_at created_by'.split(
+  'id shop_id rebuild_id worker_id worked_on seconds is_paid task is_guess import_id import_sheet import_row import_col created_at created_by'.split(
     ' ',
   );
 const RAW_ROW = ['shop_id', 'import_id', 'sheet', 'row', 'cells', 'outcome', 'reason'];
@@ -74,7 +75,7 @@ export function importedBooks(raw: RawDatabase, { shopId, importId, userId, at }
         e.isExtra ? 1 : 0,
         e.isGuess ? 1 : 0,
         importId,
-        SHEET,
+        e.sheet,
         e.row,
         e.col,
         at,
@@ -91,8 +92,9 @@ export function importedBooks(raw: RawDatabase, { shopId, importId, userId, at }
         h.seconds,
         h.isPaid ? 1 : 0,
         h.task,
+        h.isGuess ? 1 : 0,
         importId,
-        SHEET,
+        h.sheet,
         h.row,
         h.col,
         at,
@@ -100,8 +102,8 @@ export function importedBooks(raw: RawDatabase, { shopId, importId, userId, at }
       );
     },
     /** A row of the file as it stood, and how it ended. */
-    row(line: number, cells: readonly string[], outcome: string, reason: string | null): void {
-      rows.add(shopId, importId, SHEET, line, JSON.stringify(cells), outcome, reason);
+    row(at: Omit<Source, 'col'>, cells: readonly string[], outcome: string, reason: string | null): void {
+      rows.add(shopId, importId, at.sheet, at.row, JSON.stringify(cells), outcome, reason);
     },
     /** A person named in a log of hours; unpaid until someone says otherwise. Gives the id. */
     worker(name: string): string {

@@ -1,47 +1,6 @@
 import { z } from 'zod';
 import { FORESEEN, REBUILD_DATES, type RebuildDate } from '../vocabulary.ts';
-
-/** What one row of the file holds. */
-export const SHAPES = ['expenses', 'vehicles', 'hours'] as const;
-export type Shape = (typeof SHAPES)[number];
-
-/** How a row of the file ended; every row ends as exactly one of these. */
-export const OUTCOMES = ['taken', 'put aside', 'not data'] as const;
-export type Outcome = (typeof OUTCOMES)[number];
-
-/** Why a row or a cell was put aside. */
-export const ASIDE_REASONS = [
-  'bad-date',
-  'bad-amount',
-  'missing-amount',
-  'ambiguous-amount',
-  'bad-hours',
-  'missing-vehicle',
-  'ambiguous-vehicle',
-  'duplicate',
-  'malformed-row',
-  'cell-too-long',
-  'currency',
-  'not-a-data-row',
-  'bad-value',
-] as const;
-export type AsideReason = (typeof ASIDE_REASONS)[number];
-
-/** Why a whole file is refused. */
-export const REFUSALS = [
-  'empty',
-  'not-text',
-  'unclosed-quote',
-  'cell-too-long',
-  'too-wide',
-  'currency',
-  'shape',
-] as const;
-export type RefusalKind = (typeof REFUSALS)[number];
-
-/** Kinds of row that hold nothing for the books. */
-export const NOT_DATA = ['blank', 'title', 'heading', 'total', 'note'] as const;
-export type NotData = (typeof NOT_DATA)[number];
+import { ASIDE_REASONS, NOT_DATA, OUTCOMES, REFUSALS, SHAPES } from './import-words.ts';
 
 const DATE_MEANINGS = REBUILD_DATES.map(([field]) => field) as [RebuildDate, ...RebuildDate[]];
 
@@ -86,7 +45,12 @@ export const MEANINGS = [
 export const meaningSchema = z.enum(MEANINGS);
 export type Meaning = z.infer<typeof meaningSchema>;
 
+/** The sheet that something stands on; readings kept from before workbooks could be read name none. */
+const sheetSchema = z.int().default(1);
+
 export const columnChoiceSchema = z.strictObject({
+  /** 1 = the first sheet of a workbook, and the only one of a text file. */
+  sheet: z.int().min(1).max(2000).optional(),
   /** 1 = the first column. */
   col: z.int().min(1).max(1000),
   meaning: meaningSchema,
@@ -95,6 +59,7 @@ export const columnChoiceSchema = z.strictObject({
 export type ColumnChoice = z.infer<typeof columnChoiceSchema>;
 
 export const columnSchema = columnChoiceSchema.extend({
+  sheet: sheetSchema,
   heading: z.string(),
   samples: z.array(z.string()),
   /** Why the column is taken so, in words. */
@@ -104,7 +69,7 @@ export type Column = z.infer<typeof columnSchema>;
 
 export const choiceSchema = z.object({
   id: z.string(),
-  kind: z.enum(['date-order', 'columns', 'vehicle', 'category', 'duplicate', 'amount-column']),
+  kind: z.enum(['date-order', 'columns', 'vehicle', 'category', 'duplicate', 'amount-column', 'sheets', 'overlap']),
   question: z.string(),
   column: z.string().nullable(),
   options: z.array(z.object({ value: z.string(), label: z.string() })),
@@ -131,12 +96,14 @@ export const lineSchema = z.object({
   isExtra: z.boolean(),
   person: z.string().nullable(),
   isGuess: z.boolean(),
+  sheet: sheetSchema,
   row: z.int(),
   col: z.int(),
 });
 export type Line = z.infer<typeof lineSchema>;
 
 export const asideSchema = z.object({
+  sheet: sheetSchema,
   row: z.int(),
   /** The cell at fault; null = the whole row. */
   col: z.int().nullable(),
@@ -173,11 +140,13 @@ export const rebuildFoundSchema = z.object({
   dates: z.record(z.string(), z.string()),
   /** How the file writes it. */
   spellings: z.array(z.string()),
+  sheet: sheetSchema,
   row: z.int(),
 });
 export type RebuildFound = z.infer<typeof rebuildFoundSchema>;
 
 export const statedTotalSchema = z.object({
+  sheet: sheetSchema,
   row: z.int(),
   col: z.int(),
   label: z.string(),
@@ -214,6 +183,7 @@ export const controlSchema = z.object({
 export type Control = z.infer<typeof controlSchema>;
 
 export const firstRowSchema = z.object({
+  sheet: sheetSchema,
   row: z.int(),
   cells: z.array(z.string()),
   outcome: z.enum(OUTCOMES),
@@ -221,6 +191,17 @@ export const firstRowSchema = z.object({
   lines: z.array(lineSchema),
 });
 export type FirstRow = z.infer<typeof firstRowSchema>;
+
+/** One sheet of a workbook, and what its rows are taken for. */
+export const sheetFoundSchema = z.object({
+  number: z.int(),
+  name: z.string(),
+  isHidden: z.boolean(),
+  /** null = it holds no table that could be read; its rows count as notes, or are put aside. */
+  shape: z.enum(SHAPES).nullable(),
+  why: z.string(),
+});
+export type SheetFound = z.infer<typeof sheetFoundSchema>;
 
 export const readingSchema = z.object({
   format: z.object({
@@ -231,6 +212,8 @@ export const readingSchema = z.object({
   }),
   shape: z.enum(SHAPES).nullable(),
   refusal: z.object({ kind: z.enum(REFUSALS), message: z.string(), row: z.int().nullable() }).nullable(),
+  /** The sheets of a workbook; none for a text file. */
+  sheets: z.array(sheetFoundSchema).default([]),
   columns: z.array(columnSchema),
   choices: z.array(choiceSchema),
   rebuilds: z.array(rebuildFoundSchema),

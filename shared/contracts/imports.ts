@@ -1,7 +1,8 @@
 import { z } from 'zod';
 import type { FeatureApi } from '../contract.ts';
 import { cursorSchema, idSchema, nextSchema, yesNoQuerySchema } from '../fields.ts';
-import { columnChoiceSchema, OUTCOMES, readingSchema, SHAPES } from './import-reading.ts';
+import { columnChoiceSchema, readingSchema } from './import-reading.ts';
+import { OUTCOMES, SHAPES } from './import-words.ts';
 
 export const IMPORT_STATES = ['reading', 'ready', 'committing', 'committed', 'undone', 'refused', 'discarded'] as const;
 export type ImportState = (typeof IMPORT_STATES)[number];
@@ -31,6 +32,7 @@ export const importSchema = importSummarySchema.extend({
 export type Import = z.infer<typeof importSchema>;
 
 export const importRowSchema = z.object({
+  sheet: z.int(),
   row: z.int(),
   cells: z.array(z.string()),
   outcome: z.enum(OUTCOMES),
@@ -59,7 +61,7 @@ export const importsApi = {
   upload: {
     method: 'POST',
     path: '/api/imports',
-    summary: 'Upload a spreadsheet as text (field "file"); it is read, nothing is booked yet',
+    summary: 'Upload a workbook or a spreadsheet as text (field "file"); it is read, nothing is booked yet',
     query: z.strictObject({ importAnyway: yesNoQuerySchema.optional() }),
     upload: true,
     response: reply,

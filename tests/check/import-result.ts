@@ -5,6 +5,17 @@ import type { HoursRow } from '#shared/contracts/hours.ts';
 import type { RebuildDetail, RebuildRow } from '#shared/contracts/rebuilds.ts';
 import type { OwnServer } from './own-server.ts';
 
+/** Where a row stands, sheets by their names; a text file's only sheet has none. */
+type From = (at: { sheet: number | null; row: number | null }) => { sheet: string | null; row: number | null };
+const placer = (reading: Reading): From => {
+  const names = new Map(reading.sheets.map(({ number, name }) => [number, name]));
+  return ({ sheet, row }) => ({ sheet: names.get(sheet ?? 1) ?? null, row });
+};
+const imported = (line: { importSheet: number | null; importRow: number | null }) => ({
+  sheet: line.importSheet,
+  row: line.importRow,
+});
+
 type Page<T> = { readonly rows: readonly T[]; readonly next: string | null };
 const ASKED_KINDS = new Set([
   'date-order',
@@ -29,22 +40,25 @@ export async function importResult(server: OwnServer, file: string, done: Import
   const list = await all<RebuildRow>(server, '/api/rebuilds');
   const details: RebuildDetail[] = [];
   for (const { id } of list) details.push(await server.get(`/api/rebuilds/${id}`));
+  const from = placer(reading);
   const isTotal = (line: HoursRow) => line.workedOn === null && line.workerId === null;
   return {
     file,
     status: 'imported',
-    rebuilds: details.map((detail) => rebuildOf(detail, hours.filter(isTotal))),
-    lines: [...entries.map(lineOf), ...purchasesOf(reading, details), ...estimatesOf(details, reading)],
-    hours: hours.filter((line) => !isTotal(line)).map(hoursOf),
-    rejects: reading.asides.map(rejectOf),
-    nonData: rows.filter(({ outcome }) => outcome === 'not data').map(sourceOf),
-    flags: [...entries, ...hours]
-      .filter(({ isGuess }) => isGuess)
-      .map((line) => from(line.importSheet, line.importRow)),
-    importedRows: rows.filter(({ outcome }) => outcome === 'taken').map(sourceOf),
+    rebuilds: details.map((detail) => rebuildOf(from, detail, hours.filter(isTotal))),
+    lines: [
+      ...entries.map((entry) => lineOf(from, entry)),
+      ...purchasesOf(from, reading, details),
+      ...estimatesOf(from, reading, details),
+    ],
+    hours: hours.filter((line) => !isTotal(line)).map((line) => hoursOf(from, line)),
+    rejects: reading.asides.map((aside) => rejectOf(from, aside)),
+    nonData: rows.filter(({ outcome }) => outcome === 'not data').map(from),
+    flags: [...entries, ...hours].filter(({ isGuess }) => isGuess).map((line) => from(imported(line))),
+    importedRows: rows.filter(({ outcome }) => outcome === 'taken').map(from),
     statedTotals: reading.statedTotals
       .filter(({ measure }) => measure === 'money')
-      .map(({ row, stated, imported }) => ({ ...from(null, row), statedCents: stated, importedCents: imported })),
+      .map((total) => ({ ...from(total), statedCents: total.stated, importedCents: total.imported })),
     choicesAsked: asked
       .filter(({ kind, mustAsk }) => ASKED_KINDS.has(kind) && (mustAsk || kind !== 'vehicle'))
       .map(({ kind, column }) => ({ kind, column })),
@@ -69,11 +83,13 @@ async function all<T>(server: OwnServer, url: string): Promise<T[]> {
   return rows;
 }
 
-const from = (_sheet: number | null, row: number | null) => ({ sheet: null, row });
-const sourceOf = ({ row }: ImportRow) => from(null, row);
-const rejectOf = ({ row, col, reason }: Aside) => ({ ...from(null, row), ...(col ? { col } : {}), reason });
+const rejectOf = (from: From, { sheet, row, col, reason }: Aside) => ({
+  ...from({ sheet, row }),
+  ...(col ? { col } : {}),
+  reason,
+});
 
-function rebuildOf(detail: RebuildDetail, totals: readonly HoursRow[]) {
+function rebuildOf(from: From, detail: RebuildDetail, totals: readonly HoursRow[]) {
   const { rebuild, row } = detail;
   const own = totals.filter((line) => line.rebuildId === rebuild.id);
   return {
@@ -92,11 +108,11 @@ function rebuildOf(detail: RebuildDetail, totals: readonly HoursRow[]) {
     salePriceCents: rebuild.saleCents,
     hours: own.length > 0 ? own.reduce((sum, line) => sum + line.seconds, 0) / 3600 : null,
     odometer: rebuild.odometer,
-    source: from(rebuild.importSheet, rebuild.importRow),
+    source: from(imported(rebuild)),
   };
 }
 
-function lineOf(entry: EntryRow) {
+function lineOf(from: From, entry: EntryRow) {
   return {
     rebuildRef: entry.rebuildTag,
     date: entry.datedOn,
@@ -107,12 +123,12 @@ function lineOf(entry: EntryRow) {
     foreseen: entry.foreseen === null ? null : entry.foreseen === 'foreseen',
     estimate: false,
     flagged: entry.isGuess,
-    source: { ...from(entry.importSheet, entry.importRow), ...(entry.importCol ? { col: entry.importCol } : {}) },
+    source: { ...from(imported(entry)), ...(entry.importCol ? { col: entry.importCol } : {}) },
   };
 }
 
 /** Purchases are facts of a rebuild; their rows stand in the reading, as long as it shows all of them. */
-function purchasesOf(reading: Reading, details: readonly RebuildDetail[]) {
+function purchasesOf(from: From, reading: Reading, details: readonly RebuildDetail[]) {
   const lines = reading.firstRows.flatMap((row) => row.lines).filter(({ kind }) => kind === 'purchase');
   return details.flatMap(({ rebuild }) => {
     const own = lines.filter((line) => line.rebuild !== null && reading.rebuilds[line.rebuild]?.tag === rebuild.tag);
@@ -127,12 +143,12 @@ function purchasesOf(reading: Reading, details: readonly RebuildDetail[]) {
       foreseen: null,
       estimate: false,
       flagged: line.isGuess,
-      source: { ...from(null, line.row), col: line.col },
+      source: { ...from(line), col: line.col },
     }));
   });
 }
 
-function estimatesOf(details: readonly RebuildDetail[], reading: Reading) {
+function estimatesOf(from: From, reading: Reading, details: readonly RebuildDetail[]) {
   const shown = reading.firstRows.flatMap((row) => row.lines).filter(({ kind }) => kind === 'estimate');
   return details.flatMap(({ rebuild, categories }) =>
     categories
@@ -151,13 +167,13 @@ function estimatesOf(details: readonly RebuildDetail[], reading: Reading) {
           amountCents: estimateCents,
           foreseen: null,
           estimate: true,
-          source: from(rebuild.importSheet, rebuild.importRow),
+          source: from(imported(rebuild)),
         };
       }),
   );
 }
 
-function hoursOf(line: HoursRow) {
+function hoursOf(from: From, line: HoursRow) {
   return {
     rebuildRef: line.rebuildTag,
     date: line.workedOn,
@@ -165,6 +181,6 @@ function hoursOf(line: HoursRow) {
     hours: line.seconds / 3600,
     task: line.task,
     flagged: line.isGuess,
-    source: from(line.importSheet, line.importRow),
+    source: from(imported(line)),
   };
 }

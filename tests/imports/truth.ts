@@ -5,7 +5,7 @@ import type { Reading } from '#shared/contracts/import-reading.ts';
 import { linesOf } from './support.ts';
 
 /** The truth beside each sample (`NAME.truth.json`), as far as it is compared here. */
-const sourceSchema = z.object({ row: z.int(), col: z.int().optional() });
+const sourceSchema = z.object({ sheet: z.string().nullable(), row: z.int(), col: z.int().optional() });
 const truthSchema = z.object({
   canonical: z.object({
     rebuilds: z.array(
@@ -51,14 +51,14 @@ const truthSchema = z.object({
       }),
     ),
   }),
-  rejects: z.array(z.object({ row: z.int(), col: z.int(), reason: z.string() })),
+  rejects: z.array(z.object({ sheet: z.string().nullable(), row: z.int(), col: z.int(), reason: z.string() })),
   undecidable: z.array(
     z.object({
       source: sourceSchema,
       acceptable: z.array(z.object({ outcome: z.string(), reason: z.array(z.string()).optional() })),
     }),
   ),
-  nonData: z.array(z.object({ row: z.int(), kind: z.string() })),
+  nonData: z.array(z.object({ sheet: z.string().nullable(), row: z.int(), kind: z.string() })),
   blankRows: z.array(z.object({ rows: z.array(z.tuple([z.int(), z.int()])) })),
   statedTotals: z.array(z.object({ statedCents: z.int(), importedCents: z.int(), source: sourceSchema })),
   control: z.object({
@@ -77,17 +77,18 @@ export function truthOf(name: string): Truth {
 }
 
 /** The lines of the truth in the form that `readLines` gives, refs replaced by year and model. */
-export function trueLines(truth: Truth) {
+export function trueLines(truth: Truth, lenient: readonly string[]) {
   const nameOf = new Map(truth.canonical.rebuilds.map((rebuild) => [rebuild.ref, `${rebuild.year} ${rebuild.model}`]));
   return truth.canonical.lines.map((line) => ({
     rebuild: nameOf.get(line.rebuildRef),
     category: line.category,
     cents: line.amountCents,
     isEstimate: line.estimate,
-    ...(line.lenient?.includes('date') ? {} : { date: line.date }),
-    ...(line.lenient?.includes('description') ? {} : { what: line.description }),
-    ...(line.lenient?.includes('vendor') ? {} : { vendor: line.vendor }),
+    ...(lenient.includes('date') ? {} : { date: line.date }),
+    ...(lenient.includes('description') ? {} : { what: line.description }),
+    ...(lenient.includes('vendor') ? {} : { vendor: line.vendor }),
     foreseen: line.foreseen === null ? null : line.foreseen ? 'foreseen' : 'surprise',
+    sheet: line.source.sheet,
     row: line.source.row,
     col: line.source.col,
   }));
@@ -106,6 +107,7 @@ export function readLines(reading: Reading, lenient: readonly string[]) {
       ...(lenient.includes('description') ? {} : { what: line.what }),
       ...(lenient.includes('vendor') ? {} : { vendor: line.vendor }),
       foreseen: line.foreseen,
+      sheet: sheetOf(reading, line),
       row: line.row,
       col: line.col,
     }));
@@ -119,19 +121,28 @@ export function trueHours(truth: Truth) {
     person: line.person,
     seconds: line.hours * 3600,
     what: line.task,
+    sheet: line.source.sheet,
     row: line.source.row,
   }));
 }
 
 export function readHoursLines(reading: Reading) {
-  return linesOf(reading).map(({ rebuild, on, person, seconds, what, row }) => ({
-    rebuild: rebuildName(reading, rebuild),
-    on,
-    person,
-    seconds,
-    what,
-    row,
-  }));
+  return linesOf(reading)
+    .filter(({ kind }) => kind === 'hours')
+    .map(({ rebuild, on, person, seconds, what, sheet, row }) => ({
+      rebuild: rebuildName(reading, rebuild),
+      on,
+      person,
+      seconds,
+      what,
+      sheet: sheetOf(reading, { sheet }),
+      row,
+    }));
+}
+
+/** The name of the sheet that something stands on; null in a text file. */
+export function sheetOf(reading: Reading, at: { readonly sheet: number }): string | null {
+  return reading.sheets.find(({ number }) => number === at.sheet)?.name ?? null;
 }
 
 function rebuildName(reading: Reading, place: number | null): string | null {

@@ -6,7 +6,7 @@ import { refreshOverhead, refreshRollup } from '../../books/rollup.ts';
 import type { Filled } from '../../books/unimport.ts';
 import type { RawDatabase } from '../../platform/database.ts';
 import type { Draft } from './read/draft.ts';
-import type { DraftLine, Plan } from './read/plan.ts';
+import type { DraftLine } from './read/plan.ts';
 import { readRows, type RowsRead } from './read/read-rows.ts';
 import { rebuildColumns } from './rebuild-columns.ts';
 import { shopBooks, wordIds } from './shop-books.ts';
@@ -50,19 +50,18 @@ export function commitRows(
   const books = importedBooks(raw, task);
   const writer = lineWriter(raw, books, task.shopId);
   const read = readRows(
-    source,
     plan,
     {
-      row(cells, line, result) {
-        books.row(line, cells, result.outcome, result.reason);
-        for (const made of result.lines) writer.write(made);
+      row(cells, row, result, sheet) {
+        books.row({ sheet, row }, cells, result.outcome, result.reason);
+        for (const made of result.lines) writer.write(made, sheet);
       },
     },
     onPart,
   );
   if (!isSame(read.control, task.control)) throw new ReadingOutdated();
   books.flush();
-  const filled = writeRebuilds(raw, importedRebuilds(raw, task), read, writer, task, plan);
+  const filled = writeRebuilds(raw, importedRebuilds(raw, task), read, writer, task);
   if (writer.touched.size > 0) refreshRollup(raw, task.shopId, [...writer.touched]);
   if (writer.hasOverhead()) refreshOverhead(raw, task.shopId);
   return { filled, workerIds: writer.workerIds };
@@ -117,12 +116,12 @@ function lineWriter(raw: RawDatabase, books: ImportedBooks, shopId: string) {
 
   const categoryOf = (line: DraftLine) => categories.get((line.category ?? '').toLowerCase()) as string;
 
-  function write(line: DraftLine): void {
+  function write(line: DraftLine, sheet: number): void {
     const { draft, row, col } = line;
     const rebuildId = draft ? idOf(draft) : null;
     if (line.kind === 'entry') {
       isOverhead ||= rebuildId === null;
-      books.entry({ ...line, rebuildId, categoryId: categoryOf(line), datedOn: line.on });
+      books.entry({ ...line, sheet, rebuildId, categoryId: categoryOf(line), datedOn: line.on });
     } else if (line.kind === 'hours' && rebuildId !== null) {
       const workerId = workerOf(line.person);
       books.hours({
@@ -132,6 +131,8 @@ function lineWriter(raw: RawDatabase, books: ImportedBooks, shopId: string) {
         workedOn: line.on,
         seconds: line.seconds,
         task: line.what,
+        isGuess: line.isGuess,
+        sheet,
         row,
         col,
       });
@@ -151,7 +152,6 @@ function writeRebuilds(
   read: RowsRead,
   writer: ReturnType<typeof lineWriter>,
   task: CommitTask,
-  plan: Plan,
 ): Filled {
   const classes = wordIds(raw, task.shopId, 'vehicle_classes');
   const damages = wordIds(raw, task.shopId, 'damage_types');
@@ -162,9 +162,9 @@ function writeRebuilds(
     if (draft.existing) {
       const done = books.fill(id, columns);
       if (Object.keys(done).length > 0) filled[id] = done;
-    } else books.rebuild(id, draft.found.row, columns.set('tag', draft.found.tag));
+    } else books.rebuild(id, draft.found, columns.set('tag', draft.found.tag));
     const planned = writer.plans.get(draft);
-    if (planned && plan.shape === 'vehicles') {
+    if (planned) {
       books.baseline({
         rebuildId: id,
         madeOn: draft.found.dates.boughtOn ?? null,

@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import type { Outcome } from '#shared/contracts/import-reading.ts';
+import type { Outcome } from '#shared/contracts/import-words.ts';
 import type { Import, ImportRow, ImportSummary } from '#shared/contracts/imports.ts';
 import type { ShopScope } from '../../books/scope.ts';
 import { readCursor, writeCursor } from '../../platform/cursor.ts';
@@ -66,16 +66,16 @@ export async function listRows(
   cursor: string | undefined,
 ): Promise<{ rows: ImportRow[]; next: string | null }> {
   await importStore(scope).get(id);
-  const after = readCursor(cursor, z.tuple([z.int()]));
+  const after = readCursor(cursor, z.tuple([z.int(), z.int()]));
   const query = scope
     .table('import_rows')
     .where({ import_id: id })
-    .orderBy('row')
-    .select('row', 'cells', 'outcome', 'reason');
+    .orderBy(['sheet', 'row'])
+    .select('sheet', 'row', 'cells', 'outcome', 'reason');
   if (outcome) query.where({ outcome });
-  if (after) query.where('row', '>', after[0]);
+  if (after) query.whereRaw('(sheet, row) > (?, ?)', after);
   const rows: (Omit<ImportRow, 'cells'> & { cells: string })[] = await query.limit(PAGE + 1);
   const page = rows.slice(0, PAGE).map((row) => ({ ...row, cells: JSON.parse(row.cells) as string[] }));
   const last = page.at(-1);
-  return { rows: page, next: rows.length > PAGE && last ? writeCursor([last.row]) : null };
+  return { rows: page, next: rows.length > PAGE && last ? writeCursor([last.sheet, last.row]) : null };
 }

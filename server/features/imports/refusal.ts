@@ -1,4 +1,4 @@
-import type { RefusalKind } from '#shared/contracts/import-reading.ts';
+import type { RefusalKind } from '#shared/contracts/import-words.ts';
 
 /** The whole file cannot come in: why, in words for the person who holds it, and on which line if one is to blame. */
 export class FileRefusal extends Error {

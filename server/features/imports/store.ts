@@ -1,4 +1,5 @@
-import type { Control, Reading, Shape } from '#shared/contracts/import-reading.ts';
+import type { Control, Reading } from '#shared/contracts/import-reading.ts';
+import type { Shape } from '#shared/contracts/import-words.ts';
 import type { ImportSettings, ImportState } from '#shared/contracts/imports.ts';
 import { fromRow } from '../../platform/rows.ts';
 import type { ShopScope } from '../../books/scope.ts';

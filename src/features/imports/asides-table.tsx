@@ -4,15 +4,22 @@ import { DataTable } from '../../ui/data-table.tsx';
 import { Money } from '../../ui/figures.tsx';
 import { Panel } from '../../ui/panel.tsx';
 import type { Column } from '../../ui/table.tsx';
+import { columnName, rowPlace } from './place.ts';
 import { ASIDE_WORDS } from './words.ts';
 
 /** Every row and cell that does not come in, with its reason and its text, so that nothing is lost in silence. */
 export function AsidesTable({ reading }: { reading: Reading }) {
-  const { asides, asideCount, columns: fileColumns } = reading;
+  const { asides, asideCount } = reading;
   const columns = useMemo((): Column<Aside>[] => {
-    const headings = new Map(fileColumns.map((column) => [column.col, column.heading]));
     return [
-      { id: 'row', header: 'Row', heads: true, sortBy: (one) => one.row, width: 'w-20', cell: (one) => one.row },
+      {
+        id: 'row',
+        header: 'Row',
+        heads: true,
+        sortBy: (one) => one.row,
+        width: 'w-20',
+        cell: (one) => rowPlace(reading, one),
+      },
       {
         id: 'reason',
         header: 'Why',
@@ -24,7 +31,7 @@ export function AsidesTable({ reading }: { reading: Reading }) {
         id: 'column',
         header: 'Column',
         width: 'w-48',
-        cell: (one) => (one.col === null ? 'whole row' : headings.get(one.col) || `Column ${one.col}`),
+        cell: (one) => (one.col === null ? 'whole row' : columnName(reading, { sheet: one.sheet, col: one.col })),
       },
       {
         id: 'text',
@@ -42,7 +49,7 @@ export function AsidesTable({ reading }: { reading: Reading }) {
       },
       { id: 'rest', header: 'Rest of its row', width: 'w-48', cell: (one) => (one.isCell ? 'comes in' : 'put aside') },
     ];
-  }, [fileColumns]);
+  }, [reading]);
   if (asideCount === 0) return null;
   const isCut = asideCount > asides.length;
   return (
@@ -54,7 +61,7 @@ export function AsidesTable({ reading }: { reading: Reading }) {
         caption="Rows and cells put aside"
         rows={asides}
         columns={columns}
-        rowKey={(one) => `${one.row}-${one.col}-${one.reason}`}
+        rowKey={(one) => `${one.sheet}-${one.row}-${one.col}-${one.reason}`}
       />
     </Panel>
   );

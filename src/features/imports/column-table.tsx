@@ -2,6 +2,7 @@ import { type Column as FileColumn, MEANINGS, type Meaning, type Reading } from 
 import { Panel } from '../../ui/panel.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
 import { SelectField } from '../../ui/text-field.tsx';
+import { sheetName } from './place.ts';
 import type { Settings } from './use-settings.ts';
 import { MEANING_WORDS } from './words.ts';
 
@@ -15,6 +16,9 @@ type Props = { reading: Reading; settings: Settings; categories: readonly string
 /** Each column of the file: its first values, what it is taken for, why, and a way to say otherwise. */
 export function ColumnTable({ reading, settings, categories, canChange }: Props) {
   const columns: Column<FileColumn>[] = [
+    ...(reading.sheets.length > 1
+      ? [{ id: 'sheet', header: 'Sheet', cell: (column: FileColumn) => sheetName(reading, column.sheet) }]
+      : []),
     { id: 'heading', header: 'Column', heads: true, cell: (column) => column.heading || `Column ${column.col}` },
     { id: 'samples', header: 'First values', width: 'min-w-48', cell: (column) => <Samples column={column} /> },
     {
@@ -34,7 +38,7 @@ export function ColumnTable({ reading, settings, categories, canChange }: Props)
         caption="Columns of the file"
         rows={reading.columns}
         columns={columns}
-        rowKey={(column) => String(column.col)}
+        rowKey={(column) => `${column.sheet}-${column.col}`}
       />
     </Panel>
   );
@@ -56,9 +60,10 @@ function MeaningField({
   settings,
   categories,
 }: { column: FileColumn } & Pick<Props, 'settings' | 'categories'>) {
-  const chosen = settings.columnOf(column.col) ?? column;
+  const chosen = settings.columnOf(column) ?? column;
   const name = column.heading || `column ${column.col}`;
-  const set = (meaning: Meaning, category: string | null) => settings.setColumn({ col: column.col, meaning, category });
+  const set = (meaning: Meaning, category: string | null) =>
+    settings.setColumn({ sheet: column.sheet, col: column.col, meaning, category });
   const needsCategory = WITH_CATEGORY.includes(chosen.meaning);
   return (
     <div className="grid gap-2">

@@ -3,6 +3,7 @@ import { Hours, Money } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { Panel } from '../../ui/panel.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
+import { columnName, rowPlace } from './place.ts';
 import { NOT_DATA_WORDS } from './words.ts';
 
 /** Counts and sums of what comes in: they add up to the whole file. */
@@ -60,12 +61,15 @@ export function ControlTotals({ reading }: { reading: Reading }) {
 
 /** The totals that the file itself states, each held against what comes in. */
 export function StatedTotals({ reading }: { reading: Reading }) {
-  const headings = new Map(reading.columns.map((column) => [column.col, column.heading]));
   const figure = (total: StatedTotal, value: number) =>
     total.measure === 'hours' ? <Hours seconds={value} exact /> : <Money cents={value} shown="always" />;
   const columns: Column<StatedTotal>[] = [
-    { id: 'column', header: 'Column', heads: true, cell: (total) => headings.get(total.col) || `Column ${total.col}` },
-    { id: 'row', header: 'Row', cell: (total) => `${total.row}${total.label ? `, “${total.label}”` : ''}` },
+    { id: 'column', header: 'Column', heads: true, cell: (total) => columnName(reading, total) },
+    {
+      id: 'row',
+      header: 'Row',
+      cell: (total) => `${rowPlace(reading, total)}${total.label ? `, “${total.label}”` : ''}`,
+    },
     { id: 'stated', header: 'File says', number: true, cell: (total) => figure(total, total.stated) },
     { id: 'in', header: 'Comes in', number: true, cell: (total) => figure(total, total.imported) },
     {
@@ -86,7 +90,7 @@ export function StatedTotals({ reading }: { reading: Reading }) {
           caption="The file’s own totals"
           rows={reading.statedTotals}
           columns={columns}
-          rowKey={(total) => `${total.row}-${total.col}`}
+          rowKey={(total) => `${total.sheet}-${total.row}-${total.col}`}
         />
       )}
     </Panel>

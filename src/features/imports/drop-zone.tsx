@@ -34,15 +34,15 @@ export function DropZone({ onUploaded }: { onUploaded: (importId: string) => voi
         aria-label="Bring a file in"
         className={`panel grid justify-items-start gap-3 border-dashed ${isOver ? 'border-ink bg-paper' : 'border-edge'}`}
       >
-        <h2 className="text-lead font-[660]">Drop an old spreadsheet here, saved as CSV</h2>
+        <h2 className="text-lead font-[660]">Drop an old spreadsheet here</h2>
         <p className="max-w-[42rem] text-soft">
-          A list with one cost per row and the car beside it, a sheet with one car per row, or a log of hours. Nothing
-          is booked before you have seen how it was understood.
+          A workbook (.xlsx, .ods) or a sheet saved as text: lists with one cost per row and the car beside it, sheets
+          with one car per row, logs of hours. Nothing is booked before you have seen how it was understood.
         </p>
         <input
           ref={input}
           type="file"
-          accept=".csv,.tsv,.txt,text/csv,text/plain,text/tab-separated-values"
+          accept=".csv,.tsv,.txt,.xlsx,.ods,text/csv,text/plain,text/tab-separated-values"
           aria-label="File to bring in"
           className="sr-only"
           tabIndex={-1}

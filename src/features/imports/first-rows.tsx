@@ -5,6 +5,7 @@ import { Hours, Money } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { Panel } from '../../ui/panel.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
+import { rowPlace } from './place.ts';
 import { reasonWords } from './words.ts';
 
 const AT_FIRST = 25;
@@ -14,13 +15,18 @@ export function FirstRows({ reading }: { reading: Reading }) {
   const [isAll, setAll] = useState(false);
   const rows = isAll ? reading.firstRows : reading.firstRows.slice(0, AT_FIRST);
   const columns: Column<FirstRow>[] = [
-    { id: 'row', header: 'Row', heads: true, cell: (row) => row.row },
+    { id: 'row', header: 'Row', heads: true, cell: (row) => rowPlace(reading, row) },
     { id: 'cells', header: 'As it stands in the file', width: 'w-1/2 min-w-72', cell: (row) => <Cells row={row} /> },
     { id: 'read', header: 'As it was read', width: 'min-w-64', cell: (row) => <Reads row={row} reading={reading} /> },
   ];
   return (
     <Panel title="The first rows, as they were read">
-      <Table caption="First rows of the file" rows={rows} columns={columns} rowKey={(row) => String(row.row)} />
+      <Table
+        caption="First rows of the file"
+        rows={rows}
+        columns={columns}
+        rowKey={(row) => `${row.sheet}-${row.row}`}
+      />
       {!isAll && reading.firstRows.length > AT_FIRST && (
         <Button className="mt-4" onClick={() => setAll(true)}>
           Show the first {reading.firstRows.length}

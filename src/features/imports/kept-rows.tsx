@@ -1,6 +1,6 @@
 import { useSuspenseInfiniteQuery } from '@tanstack/react-query';
 import { useState } from 'react';
-import type { Outcome } from '#shared/contracts/import-reading.ts';
+import type { Outcome } from '#shared/contracts/import-words.ts';
 import type { ImportRow } from '#shared/contracts/imports.ts';
 import { Panel } from '../../ui/panel.tsx';
 import { Pager } from '../../ui/pager.tsx';
@@ -17,7 +17,12 @@ const FILTERS = [
 ] as const;
 
 const COLUMNS: Column<ImportRow>[] = [
-  { id: 'row', header: 'Row', heads: true, cell: (row) => row.row },
+  {
+    id: 'row',
+    header: 'Row',
+    heads: true,
+    cell: (row) => (row.sheet === 1 ? row.row : `sheet ${row.sheet}, ${row.row}`),
+  },
   {
     id: 'cells',
     header: 'As it stood in the file',
@@ -49,7 +54,7 @@ export function KeptRows({ importId }: { importId: string }) {
       {rows.length === 0 ? (
         <p className="text-soft">No row ended so.</p>
       ) : (
-        <Table caption="Rows of the file" rows={rows} columns={COLUMNS} rowKey={(row) => String(row.row)} />
+        <Table caption="Rows of the file" rows={rows} columns={COLUMNS} rowKey={(row) => `${row.sheet}-${row.row}`} />
       )}
       <Pager
         hasMore={hasNextPage}

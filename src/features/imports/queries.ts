@@ -1,5 +1,5 @@
 import { infiniteQueryOptions, keepPreviousData, queryOptions } from '@tanstack/react-query';
-import type { Outcome } from '#shared/contracts/import-reading.ts';
+import type { Outcome } from '#shared/contracts/import-words.ts';
 import { type ImportState, importsApi } from '#shared/contracts/imports.ts';
 import { call } from '../../lib/api.ts';
 

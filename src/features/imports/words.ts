@@ -1,4 +1,5 @@
-import type { AsideReason, Meaning, NotData } from '#shared/contracts/import-reading.ts';
+import type { Meaning } from '#shared/contracts/import-reading.ts';
+import type { AsideReason, NotData } from '#shared/contracts/import-words.ts';
 import type { ImportState } from '#shared/contracts/imports.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 

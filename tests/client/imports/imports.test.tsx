@@ -118,7 +118,7 @@ describe('one import', () => {
     open();
     await userEvent.selectOptions(await screen.findByLabelText('What What for holds'), 'Vendor');
     await userEvent.click(screen.getByRole('button', { name: 'Read again with 1 change' }));
-    await waitFor(() => expect(asked[0]).toContain('{"col":3,"meaning":"vendor","category":null}'));
+    await waitFor(() => expect(asked[0]).toContain('{"sheet":1,"col":3,"meaning":"vendor","category":null}'));
   });
 
   it('says why a file cannot come in', async () => {

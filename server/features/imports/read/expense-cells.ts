@@ -1,4 +1,4 @@
-import type { AsideReason } from '#shared/contracts/import-reading.ts';
+import type { AsideReason } from '#shared/contracts/import-words.ts';
 import type { Day } from '#shared/day.ts';
 import { remembered } from '../cells/fold.ts';
 import type { VehicleTarget } from '../understand/vehicle-drafts.ts';

@@ -1,30 +1,62 @@
-import type { AsideReason, Choice, Column, Line, NotData, Outcome, Shape } from '#shared/contracts/import-reading.ts';
+import type { Choice, Column, Line, StatedTotal } from '#shared/contracts/import-reading.ts';
+import type { AsideReason, NotData, Outcome, Shape } from '#shared/contracts/import-words.ts';
 import type { Day } from '#shared/day.ts';
 import type { ShopBooks } from '../books.ts';
 import type { DecimalMark, Money } from '../cells/money.ts';
 import type { VehicleTarget } from '../understand/vehicle-drafts.ts';
 import type { CategoryMeaning } from '../words/categories.ts';
-import type { TextFormat } from '../text/rows.ts';
+import type { Sheet } from '../sheets/sheet.ts';
 import type { Draft } from './draft.ts';
 
 /** Everything settled about a file before its rows are read. */
-export interface Plan {
-  readonly format: TextFormat;
+export interface FilePlan {
   readonly decimal: DecimalMark;
+  /** What most of the file holds. */
   readonly shape: Shape;
-  readonly columns: readonly Column[];
-  readonly heading: { readonly line: number; readonly cells: readonly string[] };
   readonly choices: readonly Choice[];
+  /** One for every sheet that holds anything, in the file's order. */
+  readonly tables: readonly Plan[];
+}
+
+/** What the headings of a sheet say. They stand on `line`, and down to `last` when they take several rows; 0 = none. */
+export interface Heading {
+  readonly line: number;
+  readonly last: number;
+  readonly cells: readonly string[];
+}
+
+/** Everything settled about one sheet. */
+export interface Plan {
+  readonly sheet: Sheet;
+  /** null = no table that could be read. */
+  readonly shape: Shape | null;
+  readonly columns: readonly Column[];
+  readonly heading: Heading;
   readonly books: ShopBooks;
   readonly money: (text: string, isCostCell?: boolean) => Money;
   /** Reader of each date column, by column number. */
   readonly days: ReadonlyMap<number, (text: string) => Day | 'bad' | 'blank'>;
   readonly vehicles: ReadonlyMap<string, VehicleTarget>;
+  /** In a workbook: the rebuild of each row of a sheet with one vehicle per row, which other sheets name, too. */
+  readonly rowDrafts: ReadonlyMap<number, Draft>;
+  /** In a workbook: columns that only repeat what other sheets hold in detail. */
+  readonly repeated: readonly RepeatedColumn[];
   readonly categories: ReadonlyMap<string, CategoryMeaning>;
   /** Lines that repeat a block pasted twice, to be put aside. */
   readonly repeats: ReadonlySet<number>;
   /** A cell that names another currency than the shop's. */
   readonly isForeign: (text: string) => boolean;
+}
+
+/** A column of an overview that adds up receipts of other sheets: it is checked against them, never counted. */
+export interface RepeatedColumn {
+  readonly col: number;
+  readonly measure: StatedTotal['measure'];
+  readonly read: (text: string) => number | null;
+  /** Cents or seconds that came in for the vehicle of a row. */
+  readonly of: ReadonlyMap<number, number>;
+  /** Where they stand, in words. */
+  readonly sheets: string;
 }
 
 /** A cell put aside while the rest of its row came in. */
@@ -36,7 +68,7 @@ export interface CellAside {
 }
 
 /** One line of a row, with its rebuild still as a draft; null = overhead. */
-export type DraftLine = Omit<Line, 'rebuild'> & { readonly draft: Draft | null };
+export type DraftLine = Omit<Line, 'rebuild' | 'sheet'> & { readonly draft: Draft | null };
 
 /** How one row of the file ended. */
 export interface RowRead {

@@ -4,7 +4,7 @@ import type { ShopBooks } from '../books.ts';
 import { FileRefusal } from '../refusal.ts';
 import type { ByteSource } from '../text/bytes.ts';
 import { type Understanding, understand } from '../understand/understand.ts';
-import type { DraftLine, Plan } from './plan.ts';
+import type { DraftLine, FilePlan } from './plan.ts';
 import { asidesOf, readRows } from './read-rows.ts';
 
 const FIRST_ROWS = 200;
@@ -19,13 +19,12 @@ export function readFile(
 ): Reading {
   try {
     const understood = understand(source, books, settings);
-    return understood.plan === null
-      ? refusedReading(understood)
-      : previewOf(source, understood, understood.plan, onPart);
+    return understood.plan === null ? refusedReading(understood) : previewOf(understood, understood.plan, onPart);
   } catch (error) {
     if (!(error instanceof FileRefusal)) throw error;
     return refusedReading({
       format: { encoding: '', delimiter: '', decimal: '.', headingRow: null },
+      sheets: [],
       columns: [],
       choices: [],
       plan: null,
@@ -34,24 +33,20 @@ export function readFile(
   }
 }
 
-function previewOf(
-  source: ByteSource,
-  understood: Understanding,
-  plan: Plan,
-  onPart?: (share: number) => void,
-): Reading {
+function previewOf(understood: Understanding, plan: FilePlan, onPart?: (share: number) => void): Reading {
   const firstRows: (Omit<FirstRow, 'lines'> & { lines: readonly DraftLine[] })[] = [];
   const asides: Aside[] = [];
   let asideCount = 0;
   let ragged = 0;
+  const widths = new Map(plan.tables.map(({ sheet, heading }) => [sheet.number, heading.cells.length]));
   const read = readRows(
-    source,
     plan,
     {
-      row(cells, line, result) {
-        if (cells.length > plan.heading.cells.length && result.outcome === 'taken') ragged++;
+      row(cells, line, result, sheet) {
+        if (cells.length > (widths.get(sheet) ?? 0) && result.outcome === 'taken') ragged++;
         if (firstRows.length < FIRST_ROWS && result.reason !== 'blank') {
           firstRows.push({
+            sheet,
             row: line,
             cells: cells.map((cell) => cell.slice(0, 500)),
             outcome: result.outcome,
@@ -60,22 +55,23 @@ function previewOf(
           });
         }
         if (result.outcome === 'taken' && result.cells.length === 0) return;
-        const made = asidesOf(cells, line, result);
+        const made = asidesOf(cells, line, result, sheet);
         asideCount += made.length;
         if (asides.length < MOST_ASIDES) asides.push(...made);
       },
     },
     onPart,
   );
-  const { format, columns, choices } = understood;
+  const { format, sheets, columns, choices } = understood;
   return {
     format,
+    sheets: [...sheets],
     columns: [...columns],
     choices: [...choices],
     shape: plan.shape,
     refusal: null,
     rebuilds: read.drafts.map((draft) => draft.found),
-    firstRows: firstRows.map((row) => ({ ...row, lines: row.lines.map(lineOf) })),
+    firstRows: firstRows.map((row) => ({ ...row, lines: row.lines.map((line) => lineOf(line, row.sheet)) })),
     asides,
     asideCount,
     notData: read.notData,
@@ -90,13 +86,14 @@ function previewOf(
   };
 }
 
-function lineOf({ draft, ...line }: DraftLine): Line {
-  return { ...line, rebuild: draft === null ? null : draft.place };
+function lineOf({ draft, ...line }: DraftLine, sheet: number): Line {
+  return { ...line, sheet, rebuild: draft === null ? null : draft.place };
 }
 
 function refusedReading(understood: Understanding): Reading {
   return {
     format: understood.format,
+    sheets: [...understood.sheets],
     columns: [...understood.columns],
     choices: [],
     shape: null,

@@ -1,19 +1,13 @@
-import type { Aside, Control, NotData, RebuildFound, StatedTotal } from '#shared/contracts/import-reading.ts';
-import { readHours } from '../cells/hours.ts';
-import type { ByteSource } from '../text/bytes.ts';
-import { forEachRow } from '../text/rows.ts';
+import type { Aside, Control, RebuildFound, StatedTotal } from '#shared/contracts/import-reading.ts';
+import type { NotData } from '#shared/contracts/import-words.ts';
 import { PURCHASE } from '../words/categories.ts';
 import type { Draft } from './draft.ts';
-import { expenseRowReader } from './expense-row.ts';
-import { hoursRowReader } from './hours-row.ts';
-import type { DraftLine, Plan, RowRead, RowReader } from './plan.ts';
-import { rowOutsideTable } from './row-kinds.ts';
-import { type ColumnSums, columnSums, type SummedColumn } from './sums.ts';
-import { vehicleRowReader } from './vehicle-row.ts';
+import type { DraftLine, FilePlan, RowRead } from './plan.ts';
+import { tableReader } from './table-reader.ts';
 
 /** What hears of each row as it is read: the preview, or the commit. */
 export interface Sink {
-  row(cells: readonly string[], line: number, read: RowRead): void;
+  row(cells: readonly string[], line: number, read: RowRead, sheet: number): void;
 }
 
 /** What reading all rows came to. */
@@ -25,49 +19,28 @@ export interface RowsRead {
 }
 
 /** Reads every row of a file by its plan. Rebuilds are complete only when all rows are through. */
-export function readRows(source: ByteSource, plan: Plan, sink: Sink, onPart?: (share: number) => void): RowsRead {
-  const sums = columnSums(summedColumns(plan));
-  const read = readerOf(plan, sums);
-  const outside = rowOutsideTable(plan);
+export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) => void): RowsRead {
   const drafts: Draft[] = [];
   const tally = newTally();
-  forEachRow(
-    source,
-    plan.format,
-    (cells, line, isMalformed) => {
-      const result = outside(cells, line, isMalformed) ?? read(cells, line);
-      if (result.draft) place(result.draft, line, drafts);
-      for (const made of result.lines) book(made, line, drafts, tally.control);
-      tally.count(result);
-      sink.row(cells, line, result);
-    },
-    onPart,
-  );
-  tally.control.rebuilds = drafts.length;
-  return { drafts, control: tally.control, notData: tally.notData, statedTotals: sums.stated };
-}
-
-function readerOf(plan: Plan, sums: ColumnSums): RowReader {
-  if (plan.shape === 'vehicles') return vehicleRowReader(plan, sums);
-  return plan.shape === 'hours' ? hoursRowReader(plan, sums) : expenseRowReader(plan, sums);
-}
-
-function summedColumns(plan: Plan): SummedColumn[] {
-  const money = (text: string) => {
-    const value = plan.money(text, true);
-    return typeof value === 'number' ? value : null;
-  };
-  const hours = (text: string) => {
-    const value = readHours(text);
-    return typeof value === 'number' ? value : null;
-  };
-  return plan.columns.flatMap(({ col, meaning, why }): SummedColumn[] => {
-    if (meaning === 'hours' || meaning === 'estimated hours') return [{ col, measure: 'hours', read: hours }];
-    const isCompared =
-      ['amount', 'credit', 'purchase', 'cost', 'estimate', 'sale'].includes(meaning) ||
-      (meaning === 'derived' && why.includes('sum'));
-    return isCompared ? [{ col, measure: 'money', read: money }] : [];
+  const stated: StatedTotal[] = [];
+  plan.tables.forEach((table, done) => {
+    const { number } = table.sheet;
+    const { read, stated: totals } = tableReader(table);
+    table.sheet.forEachRow(
+      (cells, line, isMalformed) => {
+        const result = read(cells, line, isMalformed);
+        const at = { sheet: number, row: line };
+        if (result.draft) place(result.draft, at, drafts);
+        for (const made of result.lines) book(made, at, drafts, tally.control);
+        tally.count(result);
+        sink.row(cells, line, result, number);
+      },
+      onPart && ((share) => onPart((done + share) / plan.tables.length)),
+    );
+    stated.push(...totals);
   });
+  tally.control.rebuilds = drafts.length;
+  return { drafts, control: tally.control, notData: tally.notData, statedTotals: stated };
 }
 
 function newTally() {
@@ -106,17 +79,22 @@ function newTally() {
   };
 }
 
+interface Place {
+  readonly sheet: number;
+  readonly row: number;
+}
+
 /** Puts a rebuild among those that rows came in for, at its first row. */
-function place(draft: Draft, row: number, drafts: Draft[]): void {
+function place(draft: Draft, at: Place, drafts: Draft[]): void {
   if (draft.place >= 0) return;
   draft.place = drafts.push(draft) - 1;
-  if (draft.found.row === 0) draft.found.row = row;
+  if (draft.found.row === 0) Object.assign(draft.found, at);
 }
 
 /** Adds a line to its rebuild and to the control totals. */
-function book(line: DraftLine, row: number, drafts: Draft[], control: Control): void {
+function book(line: DraftLine, at: Place, drafts: Draft[], control: Control): void {
   const { draft, cents } = line;
-  if (draft) place(draft, row, drafts);
+  if (draft) place(draft, at, drafts);
   if (line.kind === 'entry' || line.kind === 'purchase') {
     const key = line.kind === 'purchase' ? PURCHASE : (line.category ?? '');
     control.centsByCategory[key] = (control.centsByCategory[key] ?? 0) + cents;
@@ -146,13 +124,13 @@ function addFact(found: RebuildFound, line: DraftLine): void {
 }
 
 /** The entries of the list of rows and cells put aside that one row makes. */
-export function asidesOf(cells: readonly string[], line: number, read: RowRead): Aside[] {
-  const asides: Aside[] = read.cells.map((cell) => ({ row: line, isCell: true, ...cell }));
+export function asidesOf(cells: readonly string[], line: number, read: RowRead, sheet: number): Aside[] {
+  const asides: Aside[] = read.cells.map((cell) => ({ sheet, row: line, isCell: true, ...cell }));
   if (read.outcome !== 'put aside') return asides;
   const { col, reason, cents } = read;
   const text = col === null ? cells.join(' · ') : (cells[col - 1] ?? '');
   return [
     ...asides,
-    { row: line, col, isCell: false, reason: reason as Aside['reason'], text: text.slice(0, 200), cents },
+    { sheet, row: line, col, isCell: false, reason: reason as Aside['reason'], text: text.slice(0, 200), cents },
   ];
 }

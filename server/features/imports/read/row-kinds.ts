@@ -9,11 +9,11 @@ import { notData, type Plan, putAside, type RowRead } from './plan.ts';
 export function rowOutsideTable(
   plan: Plan,
 ): (cells: readonly string[], line: number, isMalformed: boolean) => RowRead | null {
-  const { line: headingLine, cells: heading } = plan.heading;
+  const { line: headingLine, last, cells: heading } = plan.heading;
   const isAgain = isHeadingAgain(heading);
   return (cells, line, isMalformed) => {
     if (isBlank(cells)) return notData('blank');
-    if (line === headingLine) return notData('heading');
+    if (line >= headingLine && line <= last) return notData('heading');
     if (isMalformed) return putAside('malformed-row', null, null);
     if (line < headingLine) {
       const isTable = filled(cells) > 1 && cells.some(looksLikeMoney);

@@ -21,7 +21,7 @@ const GRAND = /grand|overall|gesamtsumme/i;
  * Adds up what comes in per column, so that the totals that a file states can be held against it: each is compared
  * with the rows since the total before it, or with the whole file so far, whichever it means.
  */
-export function columnSums(columns: readonly SummedColumn[]) {
+export function columnSums(columns: readonly SummedColumn[], sheet = 1) {
   const sums = new Map<number, Sum>(
     columns.map(({ col }) => [col, { taken: 0, aside: 0, takenSince: 0, asideSince: 0 }]),
   );
@@ -53,6 +53,7 @@ export function columnSums(columns: readonly SummedColumn[]) {
       const putAside = isWhole ? sum.aside : sum.asideSince;
       if (stated.length < MOST_KEPT) {
         stated.push({
+          sheet,
           row,
           col,
           label: label.trim(),
@@ -67,6 +68,11 @@ export function columnSums(columns: readonly SummedColumn[]) {
     for (const sum of sums.values()) sum.takenSince = sum.asideSince = 0;
   }
 
+  /** Keeps a difference that was found elsewhere. */
+  function note(total: Omit<StatedTotal, 'sheet'>): void {
+    if (stated.length < MOST_KEPT) stated.push({ sheet, ...total });
+  }
+
   /** Does an unlabelled row only repeat the sums of at least two columns? */
   function isTotal(cells: readonly string[]): boolean {
     let agreeing = 0;
@@ -79,7 +85,7 @@ export function columnSums(columns: readonly SummedColumn[]) {
     return agreeing >= 2;
   }
 
-  return { add, compare, isTotal, stated: stated as readonly StatedTotal[] };
+  return { add, compare, note, isTotal, stated: stated as readonly StatedTotal[] };
 }
 
 function meansWhole(value: number, sum: Sum, label: string): boolean {

@@ -1,4 +1,5 @@
-import type { AsideReason, Column, Meaning, RebuildFound } from '#shared/contracts/import-reading.ts';
+import type { Column, Meaning, RebuildFound } from '#shared/contracts/import-reading.ts';
+import type { AsideReason } from '#shared/contracts/import-words.ts';
 import { readHours } from '../cells/hours.ts';
 import { remembered } from '../cells/fold.ts';
 import { classReader, damageReader, yesOrNo } from '../words/kinds.ts';

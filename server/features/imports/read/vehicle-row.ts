@@ -2,8 +2,8 @@ import type { Column } from '#shared/contracts/import-reading.ts';
 import type { ExistingRebuild } from '../books.ts';
 import { fold } from '../cells/fold.ts';
 import { SUM_OF_COSTS } from '../understand/derived.ts';
-import { placeOf } from '../understand/vehicle-columns.ts';
-import { existingFinder } from '../understand/vehicle-drafts.ts';
+import { existingFinder } from '../understand/existing-finder.ts';
+import { placeOf, vehicleName } from '../understand/vehicle-columns.ts';
 import { type Draft, newDraft, tagMaker } from './draft.ts';
 import { type DraftLine, notData, type Plan, putAside, type RowReader, taken } from './plan.ts';
 import { totalLabel } from './row-kinds.ts';
@@ -26,13 +26,14 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
   return (cells, line) => {
     const name = nameOf(cells);
     const label = totalLabel(cells);
-    if ((label !== undefined && (name === '' || name === label.trim())) || (name === '' && sums.isTotal(cells))) {
+    if ((label !== undefined && (name === '' || name === label.trim())) || sums.isTotal(cells)) {
       sums.compare(cells, line, label ?? '');
       return notData('total');
     }
     const row = read(cells);
     if (name === '' && row.figures.length === 0) return notData('note');
-    const existing = name === '' ? null : findExisting(name, row);
+    const known = plan.rowDrafts.get(line);
+    const existing = known ? known.existing : name === '' ? null : findExisting(name, row);
     const key = hasStock ? fold(name) : null;
     const reason =
       name === ''
@@ -47,13 +48,32 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
     if (key !== null) seen.add(key);
     const sold = settleSale(row, plan.columns);
     addAll(row, true);
-    const draft = newDraft(existing ? existing.tag : tagFor(name), existing, line, {
-      ...sold.known,
-      dates: sold.dates,
-      spellings: [name],
-    });
+    const draft = known ?? newDraft(existing ? existing.tag : tagFor(name), existing, line);
+    Object.assign(draft.found, sold.known, { spellings: [...draft.found.spellings, name] });
+    Object.assign(draft.found.dates, sold.dates);
+    checkRepeated(plan, sums, cells, line);
     return { ...taken(sold.figures.map((figure) => lineOf(figure, draft, row, line))), cells: sold.asides, draft };
   };
+}
+
+/** Holds what an overview repeats of its receipts against what came of those. */
+function checkRepeated(plan: Plan, sums: ColumnSums, cells: readonly string[], line: number): void {
+  for (const { col, measure, read, of, sheets } of plan.repeated) {
+    const value = read(cells[col - 1] ?? '');
+    const imported = of.get(line) ?? 0;
+    sums.add(col, imported, true);
+    if (value === null || value === imported) continue;
+    sums.note({
+      row: line,
+      col,
+      label: plan.heading.cells[col - 1] ?? '',
+      measure,
+      stated: value,
+      imported,
+      putAside: 0,
+      explanation: `The overview differs from what ${sheets} adds up to; what is there came in.`,
+    });
+  }
 }
 
 const isBooked = (existing: ExistingRebuild | null) =>
@@ -63,20 +83,6 @@ const costOf = (row: VehicleCells) =>
     (sum, { column, cents }) => (column.meaning === 'cost' || column.meaning === 'purchase' ? sum + cents : sum),
     0,
   );
-
-function vehicleName(columns: readonly Column[]): (cells: readonly string[]) => string {
-  const single = [placeOf(columns, 'stock number'), placeOf(columns, 'vehicle')].find((place) => place >= 0);
-  if (single !== undefined) return (cells) => (cells[single] ?? '').trim();
-  const model = placeOf(columns, 'model');
-  const parts = [placeOf(columns, 'year'), placeOf(columns, 'make'), model].filter((place) => place >= 0);
-  return (cells) =>
-    (cells[model] ?? '').trim() === ''
-      ? ''
-      : parts
-          .map((place) => (cells[place] ?? '').trim())
-          .join(' ')
-          .trim();
-}
 
 /** The shop's own rebuild by tag; without stock numbers also the only one of the same year and model. */
 function existingOf(plan: Plan): (name: string, row: VehicleCells) => ExistingRebuild | null {

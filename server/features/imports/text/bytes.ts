@@ -45,3 +45,8 @@ export function bytesOfFile(path: string): ByteSource {
     },
   };
 }
+
+/** The whole file in memory, for formats that cannot be read from the start on. */
+export function allBytes(source: ByteSource): Buffer {
+  return Buffer.concat([...source.chunks()]);
+}

@@ -4,16 +4,16 @@ import type { ByteSource } from './bytes.ts';
 
 export type Encoding = 'utf-8' | 'utf-16le' | 'utf-16be' | 'windows-1252';
 
+const PICTURE = 'This is a picture, whatever its name says. Workbooks and spreadsheets saved as text can be read.';
 const SIGNATURES: readonly (readonly [string, string])[] = [
   [
-    '504b0304',
-    'This is a workbook or a zip archive. Save the sheet as CSV in your spreadsheet program and bring that in.',
+    'd0cf11e0',
+    'This is a workbook of the old kind (.xls), or one protected by a password. Open it, save it as .xlsx without a password, and bring that in.',
   ],
-  ['d0cf11e0', 'This is an old or password-protected workbook. Save the sheet as CSV and bring that in.'],
-  ['25504446', 'This is a PDF. Only spreadsheets saved as CSV or text can be read.'],
-  ['89504e47', 'This is a picture, whatever its name says. Only spreadsheets saved as CSV or text can be read.'],
-  ['ffd8ff', 'This is a picture, whatever its name says. Only spreadsheets saved as CSV or text can be read.'],
-  ['47494638', 'This is a picture, whatever its name says. Only spreadsheets saved as CSV or text can be read.'],
+  ['25504446', 'This is a PDF. Workbooks and spreadsheets saved as text can be read.'],
+  ['89504e47', PICTURE],
+  ['ffd8ff', PICTURE],
+  ['47494638', PICTURE],
   ['1f8b', 'This is a compressed file. Unpack it first, then bring in the CSV inside.'],
 ];
 

@@ -1,8 +1,10 @@
-import type { Choice, Column, Shape } from '#shared/contracts/import-reading.ts';
+import type { Choice, Column } from '#shared/contracts/import-reading.ts';
+import type { Shape } from '#shared/contracts/import-words.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import type { ShopBooks } from '../books.ts';
 import { otherCategory } from '../words/categories.ts';
 import { headingMeanings, headingWords, plannedPart } from '../words/headings.ts';
+import { placedId } from './placed-id.ts';
 
 /**
  * Asks about columns of figures that no heading explains: are they costs? When the sheet has a column that adds up
@@ -21,7 +23,7 @@ export function askOfColumns(
   const choices: Choice[] = [];
   const settled = columns.map((column) => {
     if (hasSum || !isUnexplained(column, shape)) return column;
-    const id = `columns:${column.col}`;
+    const id = placedId('columns', column.sheet, column.col);
     const answer = answers.get(id) ?? null;
     choices.push(choiceOf(column, shape, id, answer));
     if (answer !== 'cost') return column;

@@ -1,4 +1,5 @@
-import type { Column, Meaning, Shape } from '#shared/contracts/import-reading.ts';
+import type { Column, Meaning } from '#shared/contracts/import-reading.ts';
+import type { Shape } from '#shared/contracts/import-words.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 import { type CategoryMeaning, PURCHASE, SALE } from '../words/categories.ts';
 import { headingMeanings, plannedPart } from '../words/headings.ts';
@@ -60,13 +61,31 @@ function fits(meaning: Meaning, facts: ColumnFacts): boolean {
 }
 
 /** Guesses what each column holds in a sheet of this shape. Every guess says why. */
-export function guessColumns(all: readonly ColumnFacts[], shape: Shape, categoryOf: CategoryReader): Column[] {
+export function guessColumns(
+  all: readonly ColumnFacts[],
+  shape: Shape,
+  categoryOf: CategoryReader,
+  sheet: number,
+): Column[] {
   const used = new Set<Meaning>();
-  return all.map((facts) => {
+  const columns = all.map((facts): Column => {
     const guess = shape === 'vehicles' ? guessOfVehicles(facts, used, categoryOf) : guessByHeading(facts, used, shape);
     if (!REPEATABLE.has(guess.meaning) && guess.category === null) used.add(guess.meaning);
-    return { col: facts.col, heading: facts.heading, samples: [...facts.samples], ...guess };
+    return { sheet, col: facts.col, heading: facts.heading, samples: [...facts.samples], ...guess };
   });
+  return shape === 'vehicles' ? columns : describedBy(columns, all, shape === 'hours' ? 'task' : 'what');
+}
+
+/** A list without a column that says what each row was for takes the wordiest one that nothing else explains. */
+function describedBy(columns: Column[], all: readonly ColumnFacts[], meaning: 'what' | 'task'): Column[] {
+  if (columns.some((column) => column.meaning === meaning)) return columns;
+  const [wordiest] = all
+    .filter(
+      (facts, i) => columns[i]?.meaning === 'ignore' && facts.filled > 0 && facts.heading !== '' && holdsText(facts),
+    )
+    .sort((a, b) => b.distinct - a.distinct);
+  const why = 'It holds words that no other column explains.';
+  return columns.map((column) => (column.col === wordiest?.col ? { ...column, meaning, why } : column));
 }
 
 type Guess = Pick<Column, 'meaning' | 'category' | 'why'>;

@@ -1,5 +1,6 @@
 import type { Choice, Column } from '#shared/contracts/import-reading.ts';
 import type { DateOrder } from '../cells/days.ts';
+import { placedId } from './placed-id.ts';
 import type { DateEvidence } from './survey.ts';
 
 const ENOUGH = 5;
@@ -12,23 +13,28 @@ export function settledOrder(evidence: DateEvidence): DateOrder | null {
   return monthFirstBack === 0 ? 'MDY' : 'DMY';
 }
 
-/** The order of each date column, and the questions that are left. */
+/** The order that the settled columns of a whole file agree on; null = none, or they differ. */
+export function commonOrder(evidence: Iterable<DateEvidence>): DateOrder | null {
+  const settled = new Set([...evidence].map(settledOrder).filter((order) => order !== null));
+  return settled.size === 1 ? ([...settled][0] ?? null) : null;
+}
+
+/** The order of each date column of a sheet, and the questions that are left. */
 export function dateOrders(
   columns: readonly Column[],
   evidence: ReadonlyMap<number, DateEvidence>,
   locale: string,
   answers: ReadonlyMap<string, string>,
+  common: DateOrder | null,
 ): { orders: Map<number, DateOrder>; choices: Choice[] } {
   const settled = new Map([...evidence].map(([col, found]) => [col, settledOrder(found)]));
-  const ofFile = new Set([...settled.values()].filter((order) => order !== null));
-  const common = ofFile.size === 1 ? ([...ofFile][0] ?? null) : null;
   const usual: DateOrder = locale === 'en-US' ? 'MDY' : 'DMY';
   const orders = new Map<number, DateOrder>();
   const choices: Choice[] = [];
   for (const [col, found] of evidence) {
     const known = settled.get(col) ?? common;
     const column = columns.find((candidate) => candidate.col === col);
-    const id = `date-order:${col}`;
+    const id = placedId('date-order', column?.sheet ?? 1, col);
     const answer = answers.get(id);
     orders.set(col, answer === 'MDY' || answer === 'DMY' ? answer : (known ?? usual));
     if (known !== null || found.unsettled === 0) continue;

@@ -1,7 +1,6 @@
 import { looksLikeDay } from '../cells/days.ts';
 import { looksLikeMoney } from '../cells/money.ts';
-import type { ByteSource } from '../text/bytes.ts';
-import { forEachRow, type TextFormat } from '../text/rows.ts';
+import type { Sheet } from '../sheets/sheet.ts';
 import { tradeMeaning } from '../words/categories.ts';
 import { headingMeanings, plannedPart } from '../words/headings.ts';
 
@@ -23,11 +22,11 @@ export interface Head {
 
 class Enough extends Error {}
 
-/** Reads the first rows of a file and finds its heading row among them. */
-export function readHead(source: ByteSource, format: TextFormat): Head {
+/** Reads the first rows of a sheet and finds its heading row among them. */
+export function readHead(sheet: Sheet): Head {
   const rows: HeadRow[] = [];
   try {
-    forEachRow(source, format, (cells, line) => {
+    sheet.forEachRow((cells, line) => {
       rows.push({ cells, line });
       if (rows.length === LOOKED_AT) throw new Enough();
     });

@@ -1,4 +1,5 @@
-import type { Meaning, Shape } from '#shared/contracts/import-reading.ts';
+import type { Meaning } from '#shared/contracts/import-reading.ts';
+import type { Shape } from '#shared/contracts/import-words.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import { type CategoryMeaning, SALE } from '../words/categories.ts';
 import { headingMeanings, plannedPart } from '../words/headings.ts';
@@ -34,7 +35,7 @@ export function guessShape(
   const means = (meaning: Meaning, holds: (facts: ColumnFacts) => boolean) =>
     all.find((facts) => holds(facts) && headingMeanings(facts.heading).includes(meaning));
   const costs = all.filter((facts) => facts.filled > 0 && holdsMoney(facts) && isCost(facts, categoryOf));
-  const name = means('stock number', () => true) ?? means('vehicle', holdsText) ?? means('model', () => true);
+  const name = means('stock number', () => true) ?? means('vehicle', holdsNames) ?? means('model', () => true);
   const amount = means('amount', holdsMoney);
   if (name && costs.length >= 2 && (name.distinct >= 0.8 || costs.length >= 4 || !amount)) return { shape: 'vehicles' };
   const hasMoney = amount ?? means('credit', holdsMoney);
@@ -48,6 +49,10 @@ export function guessShape(
       : 'No column names the vehicle. Lists of costs need a column that says which car each row belongs to.',
   };
 }
+
+/** Text, or whole numbers, as people number their vehicles. */
+const holdsNames = (facts: ColumnFacts) =>
+  holdsText(facts) || facts.samples.every((cell) => /^\d{1,5}$/.test(cell) || !looksLikeMoney(cell));
 
 // One figure above the headings may be a title's; two rows of them are costs.
 const FIGURES_ABOVE = 2;

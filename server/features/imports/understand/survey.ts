@@ -2,10 +2,9 @@ import type { Column } from '#shared/contracts/import-reading.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 import { currenciesIn, decimalVote, looksLikeMoney } from '../cells/money.ts';
 import { unsettledParts } from '../cells/days.ts';
-import type { ByteSource } from '../text/bytes.ts';
-import { forEachRow, type TextFormat } from '../text/rows.ts';
+import type { Sheet } from '../sheets/sheet.ts';
 import { repeatedRows, rowHash } from './repeats.ts';
-import type { Plan } from '../read/plan.ts';
+import type { Heading } from '../read/plan.ts';
 import { isHeadingAgain } from '../read/row-kinds.ts';
 import { vehicleText } from './vehicle-columns.ts';
 
@@ -46,13 +45,8 @@ const MONEY = new Set<Column['meaning']>([
 ]);
 const DATES = new Set<Column['meaning']>(['date', ...REBUILD_DATES.map(([field]) => field)]);
 
-/** Goes through the whole file once. */
-export function survey(
-  source: ByteSource,
-  format: TextFormat,
-  columns: readonly Column[],
-  heading: Plan['heading'],
-): Survey {
+/** Goes through a whole sheet once. */
+export function survey(sheet: Sheet, columns: readonly Column[], heading: Heading): Survey {
   const money = columns.filter((column) => MONEY.has(column.meaning)).map((column) => column.col - 1);
   const days = columns
     .filter((column) => DATES.has(column.meaning))
@@ -66,8 +60,8 @@ export function survey(
   const hashes: number[] = [];
   const lines: number[] = [];
   let decimalVotes = 0;
-  forEachRow(source, format, (cells, line) => {
-    if (line <= heading.line || isAgain(cells)) return;
+  sheet.forEachRow((cells, line) => {
+    if (line <= heading.last || isAgain(cells)) return;
     for (const at of money) {
       const cell = cells[at];
       if (!cell || !looksLikeMoney(cell)) continue;

@@ -21,3 +21,18 @@ export function vehicleText(columns: readonly Column[]): (cells: readonly string
       .join(' ')
       .trim();
 }
+
+/** What a row with a vehicle of its own calls it: its stock number, else its text, else year, make and model. */
+export function vehicleName(columns: readonly Column[]): (cells: readonly string[]) => string {
+  const single = [placeOf(columns, 'stock number'), placeOf(columns, 'vehicle')].find((place) => place >= 0);
+  if (single !== undefined) return (cells) => (cells[single] ?? '').trim();
+  const model = placeOf(columns, 'model');
+  const parts = [placeOf(columns, 'year'), placeOf(columns, 'make'), model].filter((place) => place >= 0);
+  return (cells) =>
+    (cells[model] ?? '').trim() === ''
+      ? ''
+      : parts
+          .map((place) => (cells[place] ?? '').trim())
+          .join(' ')
+          .trim();
+}

@@ -3,61 +3,106 @@ import type { ExistingRebuild, ShopBooks } from '../books.ts';
 import { fold } from '../cells/fold.ts';
 import { type Draft, newDraft, tagMaker } from '../read/draft.ts';
 import { isOverhead } from '../words/vehicles.ts';
+import { existingFinder } from './existing-finder.ts';
+import type { KnownVehicle } from './known-vehicles.ts';
 import { groupVehicles, type VehicleDoubt, type VehicleGroup } from './vehicle-groups.ts';
-import { modelKey } from './vehicle-text.ts';
 
 /** What a vehicle cell of a list leads to. */
 export type VehicleTarget = Draft | 'overhead' | 'ambiguous' | 'aside';
 
-/** Finds the shop's rebuild for a tag, or for a year and model. Several that fit: all of them. */
-export function existingFinder(rebuilds: readonly ExistingRebuild[]) {
-  const byTag = new Map(rebuilds.map((rebuild) => [fold(rebuild.tag), rebuild]));
-  const byModel = new Map<string, ExistingRebuild[]>();
-  for (const rebuild of rebuilds) {
-    if (rebuild.year === null || !rebuild.model) continue;
-    const key = `${rebuild.year}|${modelKey(rebuild.model)}`;
-    byModel.set(key, [...(byModel.get(key) ?? []), rebuild]);
-  }
-  return {
-    byTag: (tag: string) => byTag.get(fold(tag)) ?? null,
-    byModel: (year: number | null, model: string | null) =>
-      year === null || !model ? [] : (byModel.get(`${year}|${modelKey(model)}`) ?? []),
-  };
-}
-
-/** A draft for every vehicle that a list names, with the questions about spellings that are left. */
+/** A draft for every vehicle that lists name, with the questions about spellings that are left. */
 export function vehicleDrafts(
   counts: ReadonlyMap<string, number>,
   books: ShopBooks,
   answers: ReadonlyMap<string, string>,
+  known: readonly KnownVehicle[],
 ): { of: Map<string, VehicleTarget>; choices: Choice[] } {
-  const named = new Map([...counts].filter(([spelling]) => !isOverhead(spelling)));
+  const of = new Map<string, VehicleTarget>();
+  const byName = new Map(known.map((vehicle) => [nameKey(vehicle.name), vehicle.draft]));
+  const named = new Map<string, number>();
+  for (const [spelling, count] of counts) {
+    const draft = byName.get(nameKey(spelling));
+    if (draft) of.set(spelling, draft);
+    else if (!isOverhead(spelling)) named.set(spelling, count);
+    else of.set(spelling, 'overhead');
+  }
+  for (const { spelling } of known) if (spelling) named.set(spelling, (named.get(spelling) ?? 0) + SURE);
   const grouped = groupVehicles(named, Number(books.today.slice(0, 4)), prefixed(answers, 'vehicle:'));
   const finder = existingFinder(books.rebuilds);
-  const tagFor = tagMaker(books.rebuilds.map((rebuild) => rebuild.tag));
+  const tagFor = tagMaker([...books.rebuilds.map(({ tag }) => tag), ...known.map(({ draft }) => draft.found.tag)]);
   const choices = grouped.doubts.map((doubt) => spellingChoice(doubt, answers));
   const drafts = new Map<VehicleGroup, VehicleTarget>();
   for (const group of grouped.groups) {
-    const sameTag = group.spellings.map((spelling) => finder.byTag(spelling)).find((found) => found !== null);
-    const fits = finder.byModel(group.year, group.model);
-    const { existing, choice } = sameTag ? { existing: sameTag, choice: null } : chooseExisting(group, fits, answers);
+    const rows = known.filter(({ spelling }) => spelling !== null && group.spellings.includes(spelling));
+    const { target, choice } =
+      rows.length > 0 ? ofKnown(group, rows, counts, answers) : ofBooks(group, finder, answers, tagFor);
     if (choice) choices.push(choice);
-    const { year, make, model, spellings } = group;
-    const known = { year, make, model: year === null && make === null ? null : model, spellings };
-    drafts.set(
-      group,
-      existing === 'ambiguous' ? existing : newDraft(existing ? existing.tag : tagFor(group.name), existing, 0, known),
-    );
+    drafts.set(group, target);
   }
-  const of = new Map<string, VehicleTarget>();
   for (const spelling of counts.keys()) {
+    if (of.has(spelling)) continue;
     const target = grouped.of.get(spelling);
-    of.set(
-      spelling,
-      target === undefined ? 'overhead' : typeof target === 'string' ? target : (drafts.get(target) ?? 'ambiguous'),
-    );
+    of.set(spelling, typeof target === 'object' ? (drafts.get(target) ?? 'ambiguous') : (target ?? 'ambiguous'));
   }
   return { of, choices };
+}
+
+// More than any list can mention a vehicle: what a row of its own calls it decides.
+const SURE = 1_000_000;
+/** A stock number without what people leave out of it: case, signs, leading zeros. */
+const nameKey = (name: string) =>
+  fold(name)
+    .replaceAll(' ', '')
+    .replace(/^([a-z]*)0+(?=\d)/, '$1');
+
+interface Settled {
+  readonly target: VehicleTarget;
+  readonly choice: Choice | null;
+}
+
+/** The row of the workbook that a vehicle of its lists is; two rows with the same year and model are asked about. */
+function ofKnown(
+  group: VehicleGroup,
+  rows: readonly KnownVehicle[],
+  counts: ReadonlyMap<string, number>,
+  answers: ReadonlyMap<string, string>,
+): Settled {
+  const [only] = rows;
+  if (rows.length === 1 && only) return { target: only.draft, choice: null };
+  const mentioned = group.spellings.find((spelling) => counts.has(spelling));
+  if (mentioned === undefined) return { target: 'ambiguous', choice: null };
+  const id = `vehicle:${mentioned}`;
+  const answer = answers.get(id) ?? null;
+  const choice: Choice = {
+    id,
+    kind: 'vehicle',
+    column: null,
+    question: `Which vehicle is “${mentioned}”?`,
+    options: [
+      ...rows.map(({ draft, name }) => ({ value: draft.found.tag, label: name })),
+      { value: 'aside', label: 'put its rows aside' },
+    ],
+    preset: 'aside',
+    answer,
+    mustAsk: true,
+    why: 'Two vehicles of this workbook have the same year and model.',
+  };
+  return { target: rows.find(({ draft }) => draft.found.tag === answer)?.draft ?? 'ambiguous', choice };
+}
+
+function ofBooks(
+  group: VehicleGroup,
+  finder: ReturnType<typeof existingFinder>,
+  answers: ReadonlyMap<string, string>,
+  tagFor: (wanted: string) => string,
+): Settled {
+  const fits = finder.byModel(group.year, group.model);
+  const sameTag = group.spellings.map((spelling) => finder.byTag(spelling)).find((found) => found !== null);
+  const { existing, choice } = sameTag ? { existing: sameTag, choice: null } : chooseExisting(group, fits, answers);
+  if (existing === 'ambiguous') return { target: existing, choice };
+  const { year, make, model, spellings } = group;
+  const facts = { year, make, model: year === null && make === null ? null : model, spellings };
+  return { target: newDraft(existing ? existing.tag : tagFor(group.name), existing, 0, facts), choice };
 }
 
 function prefixed(answers: ReadonlyMap<string, string>, prefix: string): Map<string, string> {

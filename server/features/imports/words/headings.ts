@@ -17,7 +17,7 @@ const HEADINGS: Readonly<Partial<Record<Meaning, string>>> = {
   credit:
     'got back|credit|refund|refunds|returned|back|income|received|sale|sales|in|einnahme|einnahmen|gutschrift|erstattung|ingreso|recette|sold for|sale price',
   'stock number':
-    'stock|stock no|stock number|stock nr|id|no|nr|number|tag|ref|unit no|lot|lot no|our no|lagernummer|fahrzeugnr',
+    'stock|car no|car id|car number|vehicle no|vehicle id|vehicle number|auto nr|auto no|wagen nr|kfz nr|fahrzeug nr|coche no|no coche|vehiculo no|voiture no|no voiture|vehicule no|no vehicule|stock no|stock number|stock nr|id|no|nr|number|tag|ref|unit no|lot|lot no|our no|lagernummer|fahrzeugnr',
   year: 'year|yr|model year|my|baujahr|bj|jahr|ano|annee',
   make: 'make|brand|manufacturer|marke|hersteller|marca|marque',
   model: 'model|modell|typ|modelo|modele',
@@ -64,7 +64,7 @@ const PLAN = /\b(?:est|estimate|estimated|budget|budgeted|plan|planned|quote|quo
 
 /** A heading without units and punctuation, as compared. */
 export function headingWords(heading: string): string {
-  return fold(heading.replace(UNIT, ' '));
+  return fold(heading.replace(UNIT, ' ').replace(/#|№|\bn[º°](?!\p{L})/giu, ' no '));
 }
 
 /** Every meaning that this heading is known for. */
@@ -79,9 +79,12 @@ export function plannedPart(heading: string): string | null {
 }
 
 const TOTAL =
-  /^(?:(?:grand|sub|car|month|monthly|year|running|overall)?\s?(?:total|totals|subtotal|sum|sums)|summe|gesamt|gesamtsumme|zwischensumme|ubertrag|suma|total general|somme|carried forward|brought forward|balance)\b|\b(?:total|totals|subtotal|summe|gesamt)$/;
+  /^(?:(?:grand|sub|car|month|monthly|year|running|overall)?\s?(?:total|totals|subtotal|sum|sums)|summe|gesamt|gesamtsumme|zwischensumme|ubertrag|suma|total general|somme|sous total|subtotales?|totaux|totales|carried forward|brought forward|balance)\b|\b(?:total|totals|subtotal|summe|gesamt)$/;
+
+const ALL = new Set(['all', 'all cars', 'alle', 'alles', 'insgesamt', 'todo', 'todos', 'tout', 'tous', 'ensemble']);
 
 /** Does a cell label a total, subtotal or carried-forward line? */
 export function isTotalLabel(cell: string): boolean {
-  return cell.length < 60 && TOTAL.test(fold(cell));
+  const words = cell.length < 60 ? fold(cell) : '';
+  return TOTAL.test(words) || ALL.has(words);
 }

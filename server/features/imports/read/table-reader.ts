@@ -1,0 +1,50 @@
+import type { StatedTotal } from '#shared/contracts/import-reading.ts';
+import { readHours } from '../cells/hours.ts';
+import { expenseRowReader } from './expense-row.ts';
+import { hoursRowReader } from './hours-row.ts';
+import { looseRowReader } from './loose-row.ts';
+import type { Plan, RowRead, RowReader } from './plan.ts';
+import { rowOutsideTable } from './row-kinds.ts';
+import { type ColumnSums, columnSums, type SummedColumn } from './sums.ts';
+import { vehicleRowReader } from './vehicle-row.ts';
+
+/** Reads the rows of one sheet in order, each as what it is; `stated` fills with the totals that the sheet states. */
+export function tableReader(plan: Plan): {
+  read: (cells: readonly string[], line: number, isMalformed: boolean) => RowRead;
+  stated: readonly StatedTotal[];
+} {
+  const sums = columnSums(summedColumns(plan), plan.sheet.number);
+  const inside = readerOf(plan, sums);
+  const outside = rowOutsideTable(plan);
+  return {
+    read: (cells, line, isMalformed) => outside(cells, line, isMalformed) ?? inside(cells, line),
+    stated: sums.stated,
+  };
+}
+
+function readerOf(plan: Plan, sums: ColumnSums): RowReader {
+  if (plan.shape === null) return looseRowReader(plan);
+  if (plan.shape === 'vehicles') return vehicleRowReader(plan, sums);
+  return plan.shape === 'hours' ? hoursRowReader(plan, sums) : expenseRowReader(plan, sums);
+}
+
+function summedColumns(plan: Plan): SummedColumn[] {
+  const money = (text: string) => {
+    const value = plan.money(text, true);
+    return typeof value === 'number' ? value : null;
+  };
+  const hours = (text: string) => {
+    const value = readHours(text);
+    return typeof value === 'number' ? value : null;
+  };
+  const repeated = new Map(plan.repeated.map((column) => [column.col, column]));
+  return plan.columns.flatMap(({ col, meaning, why }): SummedColumn[] => {
+    const repeats = repeated.get(col);
+    if (repeats) return [repeats];
+    if (meaning === 'hours' || meaning === 'estimated hours') return [{ col, measure: 'hours', read: hours }];
+    const isCompared =
+      ['amount', 'credit', 'purchase', 'cost', 'estimate', 'sale'].includes(meaning) ||
+      (meaning === 'derived' && why.includes('sum'));
+    return isCompared ? [{ col, measure: 'money', read: money }] : [];
+  });
+}

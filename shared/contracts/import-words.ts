@@ -1,0 +1,44 @@
+/** What one row of the file holds. */
+export const SHAPES = ['expenses', 'vehicles', 'hours'] as const;
+export type Shape = (typeof SHAPES)[number];
+
+/** How a row of the file ended; every row ends as exactly one of these. */
+export const OUTCOMES = ['taken', 'put aside', 'not data'] as const;
+export type Outcome = (typeof OUTCOMES)[number];
+
+/** Why a row or a cell was put aside. */
+export const ASIDE_REASONS = [
+  'bad-date',
+  'bad-amount',
+  'missing-amount',
+  'ambiguous-amount',
+  'bad-hours',
+  'missing-vehicle',
+  'ambiguous-vehicle',
+  'duplicate',
+  'malformed-row',
+  'cell-too-long',
+  'currency',
+  'not-a-data-row',
+  'bad-value',
+] as const;
+export type AsideReason = (typeof ASIDE_REASONS)[number];
+
+/** Why a whole file is refused. */
+export const REFUSALS = [
+  'empty',
+  'not-text',
+  'unclosed-quote',
+  'cell-too-long',
+  'too-wide',
+  'currency',
+  'shape',
+  'locked',
+  'damaged',
+  'too-large',
+] as const;
+export type RefusalKind = (typeof REFUSALS)[number];
+
+/** Kinds of row that hold nothing for the books. */
+export const NOT_DATA = ['blank', 'title', 'heading', 'total', 'note'] as const;
+export type NotData = (typeof NOT_DATA)[number];

@@ -10,8 +10,10 @@ export const cents = z.int();
 /** A mean, a ratio or an interval's end. */
 export const figure = z.number().nullable();
 export const dayOrNull = daySchema.nullable();
+/** First or last day of a shop year: where that begins in July, the first and last year reach beyond the books' days. */
+export const yearEdge = z.iso.date();
 
-const yearQuery = z.coerce.number().int().min(1950).max(2100);
+const yearQuery = z.coerce.number().int().min(1949).max(2100);
 
 /** A page's filters as they stand in its address. Years are shop years, both ends included. */
 export const filterQuerySchema = z.strictObject({
@@ -29,7 +31,7 @@ export const yearQuerySchema = z.strictObject({ year: yearQuery.optional() });
 export const filterOptionsSchema = z.object({
   /** Is a year that in which a rebuild left the shop, or that in which it was listed? */
   yearOf: z.enum(['left', 'listed']),
-  years: z.array(z.object({ year: z.int(), from: daySchema, to: daySchema, count })),
+  years: z.array(z.object({ year: z.int(), from: yearEdge, to: yearEdge, count })),
   classes: z.array(z.object({ id: idSchema, name: z.string(), count })),
   damages: z.array(z.object({ id: idSchema, name: z.string(), count })),
   seen: z.object({ yes: count, no: count, unknown: count }),

@@ -10,6 +10,7 @@ import {
   headSchema,
   perHourSchema,
   rebuildRefSchema,
+  yearEdge,
 } from './answers-parts.ts';
 
 /** The running total after one rebuild left or overhead was paid; over 300 of these, after each day's or month's sum. */
@@ -26,8 +27,8 @@ const tiedUpSchema = z.object({ on: daySchema, rebuildCount: count, cents });
 /** One shop year (definitions §18.6): kept = profit of the rebuilds that left in it − overhead dated in it. */
 const shopYearSchema = z.object({
   year: z.int(),
-  from: daySchema,
-  to: daySchema,
+  from: yearEdge,
+  to: yearEdge,
   exitCount: count,
   soldCount: count,
   noPurchaseCount: count,
@@ -62,10 +63,10 @@ const yearRebuildSchema = rebuildRefSchema.extend({
 
 export const yearAnswerSchema = headSchema.extend({
   year: z.int(),
-  from: daySchema,
-  to: daySchema,
+  from: yearEdge,
+  to: yearEdge,
   /** The last day counted: `to`, or today while the year runs. */
-  through: daySchema,
+  through: yearEdge,
   isRunning: z.boolean(),
   exitCount: count,
   soldCount: count,
@@ -80,9 +81,9 @@ export const yearAnswerSchema = headSchema.extend({
   before: z
     .object({
       year: z.int(),
-      from: daySchema,
-      to: daySchema,
-      through: daySchema,
+      from: yearEdge,
+      to: yearEdge,
+      through: yearEdge,
       exitCount: count,
       keptCents: cents,
       /** The whole of that year. */

@@ -1,4 +1,5 @@
 import { describe, expect, it } from 'vitest';
+import type { TimeToSellAnswer } from '#shared/contracts/answers-time-to-sell.ts';
 import type { YearAnswer } from '#shared/contracts/answers-year.ts';
 import { openSmallShop, outOf } from '../support/small-shop.ts';
 
@@ -99,6 +100,18 @@ describe('the year', () => {
       [2025, 40_000],
       [2026, -20_000],
     ]);
+  });
+
+  it('answers for the first and last days that the books take, though their shop years reach beyond', async () => {
+    const { ada, books, ask } = await openSmallShop();
+    await ada.patch('/api/shop', 2, { yearStartMonth: 7 });
+    await books.rebuild({ boughtOn: '1950-01-01', purchaseCents: 1, listedOn: '1950-01-02' });
+    await books.rebuild({ boughtOn: '2026-01-01', purchaseCents: 1, listedOn: '2100-12-31' });
+    expect((await ask<YearAnswer>('year')).years[0]).toMatchObject({ year: 1949, from: '1949-07-01' });
+    expect(await ask<YearAnswer>('year?year=1949')).toMatchObject({ to: '1950-06-30' });
+    expect(await ask<YearAnswer>('year?year=2100')).toMatchObject({ to: '2101-06-30', exitCount: 0 });
+    const { filters } = await ask<TimeToSellAnswer>('time-to-sell');
+    expect(filters.years.map(({ year }) => year)).toEqual(expect.arrayContaining([1949, 2100]));
   });
 
   it('is fresh after a change, and the same text until then', async () => {

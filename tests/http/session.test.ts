@@ -55,6 +55,14 @@ describe('sign-up, sign-in and sign-out', () => {
     expect(Number(third.headers['retry-after'])).toBeGreaterThan(0);
   });
 
+  it('slows down guesses that are sent at the same moment, too', async () => {
+    const api = await testApi({ SIGN_IN_FAILURES: '3' });
+    const { email } = await api.owner();
+    const guess = (_: unknown, i: number) => api.anyone.post('/api/session', { email, password: `wrong ${i}` });
+    const replies = await Promise.all(Array.from({ length: 20 }, guess));
+    expect(replies.filter(({ status }) => status !== 429).length).toBeLessThanOrEqual(5);
+  });
+
   it('ends the session at sign-out, on the server too', async () => {
     const api = await testApi();
     const ada = await api.owner();

@@ -28,7 +28,9 @@ export async function joinShop(
     .first<{ id: string; password_hash: string } | undefined>();
   if (account) {
     await throttle.check(invitation.email, from.source);
-    if (!(await passwords.fits(account.password_hash, wish.password))) {
+    const fits = await passwords.fits(account.password_hash, wish.password);
+    await throttle.check(invitation.email, from.source);
+    if (!fits) {
       await throttle.failed(invitation.email, from.source);
       throw wrong('/password', 'This is not the password of your account.');
     }

@@ -17,6 +17,8 @@ export const sessionRoutes: Route[] = [
     const users = userStore(database.reader);
     const user = await users.findByEmail(email);
     const fits = await passwords.fits(user?.passwordHash ?? null, ctx.body.password);
+    // Guesses sent at the same moment all got past the first look; who comes after the limit learns nothing.
+    await throttle.check(email, source);
     if (!user || !fits) {
       await throttle.failed(email, source);
       logger.warn({ requestId: ctx.req.id, source }, 'sign-in refused');

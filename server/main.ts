@@ -1,5 +1,4 @@
 import { createServer } from 'node:http';
-import { seedDemo } from '../seeds/demo.ts';
 import { createApp } from './app.ts';
 import { recoverImports } from './features/imports/background.ts';
 import { readConfig } from './platform/config.ts';
@@ -10,7 +9,8 @@ const services = await openServices(config);
 const { database, sessions, logger } = services;
 
 await recoverImports(services);
-const signIns = await seedDemo(services);
+// Loaded only where it is wanted: the demo's words and parameters are no part of a real shop's server.
+const signIns = config.wantsDemo ? await (await import('../seeds/demo.ts')).seedDemo(services) : null;
 
 const server = createServer(
   { headersTimeout: 10_000, requestTimeout: 300_000, connectionsCheckingInterval: 5000 },

@@ -9,6 +9,13 @@ import { packFlows } from './flows.ts';
  * write that makes them stale. Works on the raw handle, since imports refresh thousands at once.
  */
 export function refreshRollup(raw: RawDatabase, shopId: string, rebuildIds: readonly string[]): void {
+  for (let i = 0; i < rebuildIds.length; i += AT_ONCE) refreshSome(raw, shopId, rebuildIds.slice(i, i + AT_ONCE));
+}
+
+/** Rebuilds whose cash flows are in memory at the same time. */
+const AT_ONCE = 200;
+
+function refreshSome(raw: RawDatabase, shopId: string, rebuildIds: readonly string[]): void {
   const scope = { shop: shopId, ids: JSON.stringify(rebuildIds) };
   for (const table of ['rollup_categories', 'rollup_months', 'rollup_rebuilds']) {
     raw

@@ -10,7 +10,7 @@ import { plainImport, plainWarehouse } from './plain-import.ts';
 import { interleaved, type Measure, timed } from './rounds.ts';
 
 const ROUNDS = 5;
-const POLL_MS = 10;
+const POLL_MS = 50;
 
 /** Upload to durable commit through the API, against a plain script that puts the same rows into the same tables. */
 export async function benchImport(

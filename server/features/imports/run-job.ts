@@ -4,7 +4,8 @@ import type { Done, Job } from './work.ts';
 const ENTRY = new URL('./worker.ts', import.meta.url).href;
 // Node cannot load TypeScript as a worker's entry; a line of JavaScript that registers the loader first can.
 const BOOT = `import('tsx/esm/api').then(({ register }) => { register(); return import(${JSON.stringify(ENTRY)}); })`;
-const MOST_MEGABYTES = 512;
+// A tight young generation keeps what rows leave behind small; the old one is a limit, not a plan.
+const MEMORY = { maxOldGenerationSizeMb: 256, maxYoungGenerationSizeMb: 12 };
 const KEPT_MS = 30_000;
 
 type Message = { readonly share: number } | { readonly done: Done };
@@ -14,8 +15,7 @@ let idle: { readonly worker: Worker; readonly ending: NodeJS.Timeout } | null = 
 
 /** Does a job in a thread of its own, so that no request waits for it. `onPart` hears its share done, 0–1. */
 export async function runJob(job: Job, onPart: (share: number) => void = () => undefined): Promise<Done> {
-  const worker =
-    takeIdle() ?? new Worker(BOOT, { eval: true, resourceLimits: { maxOldGenerationSizeMb: MOST_MEGABYTES } });
+  const worker = takeIdle() ?? new Worker(BOOT, { eval: true, resourceLimits: MEMORY });
   worker.ref();
   try {
     const done = await ask(worker, job, onPart);

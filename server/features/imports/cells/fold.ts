@@ -17,7 +17,7 @@ export function remembered<T>(read: (text: string) => T): (text: string) => T {
     if (found !== undefined || known.has(text)) return found as T;
     const value = read(text);
     // A column of a million different texts must not fill the memory.
-    if (known.size < 50_000) known.set(text, value);
+    if (known.size < 10_000) known.set(text, value);
     return value;
   };
 }

@@ -98,6 +98,13 @@ describe('one vehicle per row', () => {
     expect(reading.control.costCents).toBe(35_500);
   });
 
+  it('takes a vehicle that cost and fetched what those before it did together: only a row without a name is their sum', () => {
+    const same = (stock: string) => `${stock},2014,Focus,1/2/2020,1000,500,100,3/2/2020,2500`;
+    const reading = read(car(same('A1'), same('A2'), `A3,2015,Focus,1/2/2020,2000,1000,200,3/2/2020,5000`));
+    expect(reading.rebuilds.map(({ tag }) => tag)).toEqual(['A1', 'A2', 'A3']);
+    expect(reading.control.saleCents).toBe(1_000_000);
+  });
+
   it('puts aside the cell that it cannot read, and takes the rest of the row', () => {
     const reading = read(
       car('A1,2012,Jetta,2020-02-30,100.00,about 20,5.00,,', 'A2,2013,Golf,2020-01-03,200.00,30.00,-,2020-05-05,'),

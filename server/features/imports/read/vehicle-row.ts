@@ -26,7 +26,7 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
   return (cells, line) => {
     const name = nameOf(cells);
     const label = totalLabel(cells);
-    if ((label !== undefined && (name === '' || name === label.trim())) || sums.isTotal(cells)) {
+    if ((label !== undefined && (name === '' || name === label.trim())) || (name === '' && sums.isTotal(cells))) {
       sums.compare(cells, line, label ?? '');
       return notData('total');
     }

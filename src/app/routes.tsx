@@ -1,28 +1,29 @@
-import { lazy, Suspense } from 'react';
+import { Suspense } from 'react';
 import { Navigate, Route, Routes } from 'react-router-dom';
 import { useSuspenseQuery } from '@tanstack/react-query';
 import { sessionQuery } from '../lib/session.ts';
 import { Doorway, FrameSkeleton } from './doorway.tsx';
+import { lazyPage } from './lazy-page.tsx';
 import { startOf } from './places.ts';
 
-const SignInPage = lazy(async () => ({ default: (await import('../pages/sign-in.tsx')).SignInPage }));
-const SignUpPage = lazy(async () => ({ default: (await import('../pages/sign-up.tsx')).SignUpPage }));
-const JoinPage = lazy(async () => ({ default: (await import('../pages/join.tsx')).JoinPage }));
-const NotFoundPage = lazy(async () => ({ default: (await import('../pages/not-found.tsx')).NotFoundPage }));
-const ShopFrame = lazy(async () => ({ default: (await import('./shop-frame.tsx')).ShopFrame }));
-const YearPage = lazy(async () => ({ default: (await import('../pages/year.tsx')).YearPage }));
-const WhatPaysPage = lazy(async () => ({ default: (await import('../pages/what-pays.tsx')).WhatPaysPage }));
-const OverrunsPage = lazy(async () => ({ default: (await import('../pages/overruns.tsx')).OverrunsPage }));
-const TimeToSellPage = lazy(async () => ({ default: (await import('../pages/time-to-sell.tsx')).TimeToSellPage }));
-const ContingencyPage = lazy(async () => ({ default: (await import('../pages/contingency.tsx')).ContingencyPage }));
-const RebuildsPage = lazy(async () => ({ default: (await import('../pages/rebuilds.tsx')).RebuildsPage }));
-const RebuildPage = lazy(async () => ({ default: (await import('../pages/rebuild.tsx')).RebuildPage }));
-const LedgerPage = lazy(async () => ({ default: (await import('../pages/ledger.tsx')).LedgerPage }));
-const HoursPage = lazy(async () => ({ default: (await import('../pages/hours.tsx')).HoursPage }));
-const ImportsPage = lazy(async () => ({ default: (await import('../pages/imports.tsx')).ImportsPage }));
-const ImportPage = lazy(async () => ({ default: (await import('../pages/import.tsx')).ImportPage }));
-const PeoplePage = lazy(async () => ({ default: (await import('../pages/people.tsx')).PeoplePage }));
-const ShopPage = lazy(async () => ({ default: (await import('../pages/shop.tsx')).ShopPage }));
+const SignInPage = lazyPage(async () => (await import('../pages/sign-in.tsx')).SignInPage);
+const SignUpPage = lazyPage(async () => (await import('../pages/sign-up.tsx')).SignUpPage);
+const JoinPage = lazyPage(async () => (await import('../pages/join.tsx')).JoinPage);
+const NotFoundPage = lazyPage(async () => (await import('../pages/not-found.tsx')).NotFoundPage);
+const ShopFrame = lazyPage(async () => (await import('./shop-frame.tsx')).ShopFrame);
+const YearPage = lazyPage(async () => (await import('../pages/year.tsx')).YearPage);
+const WhatPaysPage = lazyPage(async () => (await import('../pages/what-pays.tsx')).WhatPaysPage);
+const OverrunsPage = lazyPage(async () => (await import('../pages/overruns.tsx')).OverrunsPage);
+const TimeToSellPage = lazyPage(async () => (await import('../pages/time-to-sell.tsx')).TimeToSellPage);
+const ContingencyPage = lazyPage(async () => (await import('../pages/contingency.tsx')).ContingencyPage);
+const RebuildsPage = lazyPage(async () => (await import('../pages/rebuilds.tsx')).RebuildsPage);
+const RebuildPage = lazyPage(async () => (await import('../pages/rebuild.tsx')).RebuildPage);
+const LedgerPage = lazyPage(async () => (await import('../pages/ledger.tsx')).LedgerPage);
+const HoursPage = lazyPage(async () => (await import('../pages/hours.tsx')).HoursPage);
+const ImportsPage = lazyPage(async () => (await import('../pages/imports.tsx')).ImportsPage);
+const ImportPage = lazyPage(async () => (await import('../pages/import.tsx')).ImportPage);
+const PeoplePage = lazyPage(async () => (await import('../pages/people.tsx')).PeoplePage);
+const ShopPage = lazyPage(async () => (await import('../pages/shop.tsx')).ShopPage);
 
 /** Every address and its page. Each page comes in its own file, when its address is first opened. */
 export function AppRoutes() {

@@ -7,6 +7,7 @@ import { ErrorBoundary } from '../ui/error-boundary.tsx';
 import { LoadingState } from '../ui/states.tsx';
 import { BottomBar } from './bottom-bar.tsx';
 import { Interruptions } from './interruptions.tsx';
+import { LeaveGuard } from './leave-guard.tsx';
 import { Rail } from './rail.tsx';
 import { useGlobalKeys } from './use-global-keys.ts';
 
@@ -31,8 +32,8 @@ export function Shell({ session }: { session: Session }) {
       <main id="main" ref={main} tabIndex={-1} className="page">
         {session.shop.isDemo && (
           <p className="no-print mb-4 text-label text-soft">
-            Demo shop: every figure is invented, from a seed chosen so that there is something to find. Its calendar stands at{' '}
-            {formatDayLong(session.shop.today)}.
+            Demo shop: every figure is invented, from a seed chosen so that there is something to find. Its calendar
+            stands at {formatDayLong(session.shop.today)}.
           </p>
         )}
         <ErrorBoundary
@@ -46,6 +47,7 @@ export function Shell({ session }: { session: Session }) {
       </main>
       <BottomBar session={session} />
       <Interruptions session={session} />
+      <LeaveGuard />
       <Suspense>
         <Toasts />
         {open === 'palette' && <Palette session={session} onClose={() => setOpen(null)} />}

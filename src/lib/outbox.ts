@@ -1,6 +1,7 @@
 import { useRef, useState } from 'react';
 import { ApiProblem } from './api-problem.ts';
 import { newIdempotencyKey } from './api.ts';
+import { useUnsaved } from './unsaved.ts';
 
 /** One thing typed and sent but not yet known to be saved. `problem` = it was refused or did not get through. */
 export type Unsent<Typed> = { readonly key: string; readonly typed: Typed; readonly problem: ApiProblem | null };
@@ -13,6 +14,7 @@ export function useOutbox<Typed>(save: (typed: Typed, idempotencyKey: string) =>
   const [unsent, setUnsent] = useState<readonly Unsent<Typed>[]>([]);
   const latest = useRef(save);
   latest.current = save;
+  useUnsaved(unsent.some(({ problem }) => problem !== null));
 
   const drop = (key: string) => setUnsent((all) => all.filter((one) => one.key !== key));
   const mark = (key: string, problem: ApiProblem | null) =>

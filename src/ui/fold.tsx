@@ -1,4 +1,5 @@
-import { type ReactNode, useMemo, useSyncExternalStore } from 'react';
+import { isValidElement, type ReactNode, useMemo, useSyncExternalStore } from 'react';
+import { Nothing } from './figures.tsx';
 import type { Column, RowProps } from './table.tsx';
 
 /** Below these widths the columns that say so move beneath their row. */
@@ -24,7 +25,8 @@ type UnderProps<Row> = Folded<Row> & { valueOf: (column: Column<Row>) => ReactNo
 export function UnderRow<Row>({ columns, moved, valueOf, rowProps }: UnderProps<Row>) {
   const pairs = moved
     .map((column) => ({ column, value: valueOf(column) }))
-    .filter(({ value }) => value !== null && value !== undefined && value !== '' && value !== false);
+    .filter(({ value }) => value !== null && value !== undefined && value !== '' && value !== false)
+    .filter(({ value }) => !(isValidElement(value) && value.type === Nothing));
   if (pairs.length === 0) return null;
   return (
     <tr {...rowProps} className="table-under">

@@ -1,6 +1,7 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useForm } from 'react-hook-form';
 import { TASKS } from '#shared/vocabulary.ts';
+import { useUnsaved } from '../../lib/unsaved.ts';
 import { Button } from '../../ui/button.tsx';
 import { FormPick } from '../../ui/form-fields.tsx';
 import type { PickOption } from '../../ui/pick-field.tsx';
@@ -19,7 +20,8 @@ type Props = {
 export function HoursRowForm({ start, rebuilds, workers, onSend }: Props) {
   const form = useForm({ defaultValues: { ...EMPTY_HOURS, ...start }, resolver: zodResolver(hoursFormSchema) });
   const { register, control, formState } = form;
-  const { errors } = formState;
+  const { errors, dirtyFields } = formState;
+  useUnsaved(Boolean(dirtyFields.seconds));
   const onSubmit = form.handleSubmit(() => {
     const values = form.getValues();
     onSend(values);

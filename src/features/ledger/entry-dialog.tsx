@@ -59,13 +59,7 @@ export function EntryDialog({
     <Dialog open onClose={onClose} title={title} note={note}>
       <form onSubmit={(event) => void onSubmit(event)} noValidate className="grid gap-4">
         <div className="grid gap-4 sm:grid-cols-2">
-          <FormPick
-            control={control}
-            name="rebuildId"
-            label="Rebuild"
-            options={rebuilds}
-            placeholder="None: overhead"
-          />
+          <FormPick control={control} name="rebuildId" label="Rebuild" options={rebuilds} placeholder="Overhead" />
           <FormPick control={control} name="categoryId" label="Category" options={categories} />
           <DayField label="Day" {...register('datedOn')} error={errors.datedOn?.message} />
           {keepsAmount ? (

@@ -1,6 +1,7 @@
 import { zodResolver } from '@hookform/resolvers/zod';
 import { useRef } from 'react';
 import { useForm } from 'react-hook-form';
+import { useUnsaved } from '../../lib/unsaved.ts';
 import { Button } from '../../ui/button.tsx';
 import { FormMoney, FormPick } from '../../ui/form-fields.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
@@ -27,7 +28,8 @@ export function EntryRowForm({ start, rebuilds, categories, vendors, onSend }: P
   const typed = useRef<EntryForm>({ ...EMPTY_ENTRY, ...start });
   const form = useForm({ defaultValues: typed.current, resolver: zodResolver(entryFormSchema(decimal)) });
   const { register, control, formState } = form;
-  const { errors } = formState;
+  const { errors, dirtyFields } = formState;
+  useUnsaved(Boolean(dirtyFields.cents || dirtyFields.what));
 
   // The resolver's output is what the server will make of it; what is sent on is the text, so that it can come back.
   const onSubmit = form.handleSubmit(() => {
@@ -49,7 +51,7 @@ export function EntryRowForm({ start, rebuilds, categories, vendors, onSend }: P
     >
       <DayField label="Day" {...register('datedOn')} error={errors.datedOn?.message} />
       {rebuilds && (
-        <FormPick control={control} name="rebuildId" label="Rebuild" options={rebuilds} placeholder="None: overhead" />
+        <FormPick control={control} name="rebuildId" label="Rebuild" options={rebuilds} placeholder="Overhead" />
       )}
       <FormPick control={control} name="categoryId" label="Category" options={categories} />
       <FormMoney control={control} name="cents" label="Amount" />

@@ -123,7 +123,7 @@ function LockDialog({ estimate, onClose }: { estimate: Estimate; onClose: () => 
   const { mutate, isPending, error } = useMutation({
     mutationFn: () => lockEstimate(estimate),
     onSuccess: () => {
-      notify(`${estimateName(estimate)} locked`);
+      notify(`${estimateName(estimate)} is locked`);
       onClose();
     },
   });

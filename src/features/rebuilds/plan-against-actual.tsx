@@ -5,7 +5,6 @@ import { capital } from '../../lib/capital.ts';
 import { Money, Nothing } from '../../ui/figures.tsx';
 import { useIsPhone } from '../../ui/fold.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
-import { EmptyState } from '../../ui/states.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
 
 /** Room for the bars of all categories, drawn to one scale. */
@@ -18,11 +17,7 @@ export function PlanAgainstActual({ detail }: { detail: RebuildDetail }) {
   const bar = useIsPhone() ? PHONE_BAR : BAR;
   const { categories, row } = detail;
   if (categories.length === 0) {
-    return (
-      <EmptyState title="Plan against actual">
-        Once there is a plan or a first entry, each category stands here with its gap.
-      </EmptyState>
-    );
+    return <p className="text-soft">Once there is a plan or a first entry, each category stands here with its gap.</p>;
   }
   const most = Math.max(...categories.map((one) => Math.max(one.estimateCents ?? 0, one.planningCents, 1)));
   const sum = (field: 'surpriseCents' | 'extraCents') => categories.reduce((total, one) => total + one[field], 0);

@@ -4,7 +4,7 @@ import type { RebuildRow } from '#shared/contracts/rebuilds.ts';
 import { GapBar } from '../../charts/gap-bar.tsx';
 import { capital } from '../../lib/capital.ts';
 import { DataTable } from '../../ui/data-table.tsx';
-import { Days, Hours, Money, PerHour } from '../../ui/figures.tsx';
+import { Days, Hours, Money, Nothing, PerHour } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import type { Column } from '../../ui/table.tsx';
 
@@ -60,7 +60,7 @@ export function RebuildsTable({ rows, shopId }: { rows: readonly RebuildRow[]; s
         under: 'tablet',
         width: 'w-24',
         number: true,
-        cell: (row) => <Money cents={row.proceedsCents} />,
+        cell: (row) => (row.proceedsCents === null ? <Nothing /> : <Money cents={row.proceedsCents} />),
       },
       {
         id: 'kept',
@@ -72,7 +72,7 @@ export function RebuildsTable({ rows, shopId }: { rows: readonly RebuildRow[]; s
       {
         id: 'hours',
         header: 'Own hours',
-        under: 'phone',
+        under: 'tablet',
         width: 'w-20',
         number: true,
         cell: (row) => <Hours seconds={row.ownSeconds} />,

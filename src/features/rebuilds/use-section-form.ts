@@ -3,6 +3,7 @@ import { type DefaultValues, type FieldValues, useForm } from 'react-hook-form';
 import type { z } from 'zod';
 import type { rebuildChangeSchema } from '#shared/contracts/rebuilds.ts';
 import { applyProblem } from '../../lib/apply-problem.ts';
+import { useUnsaved } from '../../lib/unsaved.ts';
 import type { SaveRebuild } from './use-save-rebuild.tsx';
 
 type Change = z.output<typeof rebuildChangeSchema>;
@@ -31,6 +32,7 @@ export function useSectionForm<Values extends FieldValues>(
     }
   });
   const { isDirty, isSubmitting, errors } = form.formState;
+  useUnsaved(isDirty);
   const frame = {
     onSubmit: () => onSubmit(),
     onReset: () => form.reset(values),

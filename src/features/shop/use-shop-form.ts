@@ -4,6 +4,7 @@ import { useForm } from 'react-hook-form';
 import type { Shop } from '#shared/contracts/shop.ts';
 import { ApiProblem } from '../../lib/api-problem.ts';
 import { applyProblem } from '../../lib/apply-problem.ts';
+import { useUnsaved } from '../../lib/unsaved.ts';
 import { notify } from '../../ui/toast.tsx';
 import { type ShopChange, useShopEdit } from './mutations.ts';
 import { changesOf, type ShopFields, type ShopTyped, shopFormSchema, shopTyped, undoOf } from './shop-form.ts';
@@ -20,6 +21,7 @@ export function useShopForm(shop: Shop) {
     setBase(saved);
     form.reset(shopTyped(saved));
   };
+  useUnsaved(form.formState.isDirty);
   // A newer shop shows at once, but never over something half typed: then its version will tell at the save.
   if (!form.formState.isDirty && base.version < shop.version) setBase(shop);
 

@@ -72,9 +72,9 @@ function cautions(answer: YearAnswer, format: Formatter): string[] {
 
 type Before = NonNullable<YearAnswer['before']>;
 
-function against(before: Before, { isRunning }: YearAnswer, format: Formatter): string {
+function against(before: Before, { isRunning, keptCents }: YearAnswer, format: Formatter): string | null {
   const when = isRunning ? `the same day of ${before.year}` : `${before.year}`;
-  if (before.aheadCents === 0) return `The same as on ${when}.`;
+  if (before.aheadCents === 0) return keptCents === 0 ? null : `The same as on ${when}.`;
   const way = before.aheadCents > 0 ? 'ahead of' : 'behind';
   return `${format.money(Math.abs(before.aheadCents))} ${way} ${when}.`;
 }

@@ -1,3 +1,4 @@
+import { Link } from 'react-router-dom';
 import { addDays } from '#shared/day.ts';
 import type { YearAnswer } from '#shared/contracts/answers-year.ts';
 import type { Formatter } from '#shared/formatter.ts';
@@ -16,6 +17,7 @@ export function YearPictures({ answer }: { answer: YearAnswer }) {
   const format = useFormatter();
   const path = useRebuildPath();
   const { steps, before, money } = answer;
+  if (steps.now.length === 0 && steps.before.length === 0) return <NothingYet answer={answer} />;
   const now: StepSeries = {
     points: steps.now.map((step) => pointOf(step, path)),
     start: answer.from,
@@ -48,6 +50,19 @@ export function YearPictures({ answer }: { answer: YearAnswer }) {
         <WaterfallBars caption={moneyCaption(answer, format)} rows={moneyRows(money)} format={format} />
       </Panel>
     </Panels>
+  );
+}
+
+/** A year without a step: the last one that has some. */
+function NothingYet({ answer }: { answer: YearAnswer }) {
+  const last = answer.years
+    .filter((row) => row.year < answer.year && row.exitCount > 0)
+    .reduce<number | null>((latest, { year }) => Math.max(latest ?? year, year), null);
+  if (last === null) return null;
+  return (
+    <p className="mb-6 text-lead">
+      The last year in which a rebuild left is <Link to={`?year=${last}`}>{last}</Link>.
+    </p>
   );
 }
 

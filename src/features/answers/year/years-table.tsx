@@ -17,6 +17,7 @@ const YearBars = lazy(async () => ({ default: (await import('../../../charts/yea
 /** Every shop year beside the others, drawn and as rows; a year opens by its number. */
 export function YearsTable({ answer }: { answer: YearAnswer }) {
   const format = useFormatter();
+  const lived = answer.years.filter((row) => row.exitCount > 0 || row.keptCents !== 0);
   const rows = answer.years.toSorted((a, b) => b.year - a.year);
   return (
     <Panel
@@ -24,10 +25,10 @@ export function YearsTable({ answer }: { answer: YearAnswer }) {
       title="All years"
       subtitle="A handful of rebuilds a year can show any slope by chance, and car prices move too: look at several years before calling it better or worse."
     >
-      {rows.length > 1 && (
+      {lived.length > 1 && (
         <div className="mb-5">
           <Suspense fallback={<div className="h-72" />}>
-            <YearBars caption={yearsCaption(rows, format)} bars={barsOf(answer)} format={format} />
+            <YearBars caption={yearsCaption(lived, format)} bars={barsOf(lived, answer)} format={format} />
           </Suspense>
         </div>
       )}
@@ -43,8 +44,8 @@ export function YearsTable({ answer }: { answer: YearAnswer }) {
 }
 
 /** Years in their order; what left in each, and which one is not over. */
-function barsOf({ years, year, asOf }: YearAnswer) {
-  return years
+function barsOf(rows: readonly Row[], { year, asOf }: YearAnswer) {
+  return rows
     .toSorted((a, b) => a.year - b.year)
     .map((row) => ({
       year: `${row.year}`,

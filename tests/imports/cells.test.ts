@@ -156,6 +156,7 @@ describe('tags given to rebuilds', () => {
     expect(Math.max(...tags.map((tag) => tag.length))).toBeLessThanOrEqual(40);
     expect(new Set(tags).size).toBe(1200);
     expect(tagFor('b-7')).toBe('b-7 (2)');
+    expect(tagFor(`x${'\u{1F697}'.repeat(30)}`)).toBe(`x${'\u{1F697}'.repeat(16)}`);
   });
 });
 

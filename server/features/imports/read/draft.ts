@@ -49,15 +49,18 @@ export function newDraft(
 
 const LONGEST = 40;
 
+/** The first so many characters of a text, never half of one. */
+const cut = (text: string, most: number) => text.slice(0, most).replace(/[\uD800-\uDBFF]$/, '');
+
 /** Gives out tags that neither the shop nor this file has yet: `13 F-150`, then `13 F-150 (2)`. */
 export function tagMaker(taken: Iterable<string>): (wanted: string) => string {
   const used = new Set([...taken].map((tag) => tag.toLowerCase()));
   return (wanted) => {
-    const base = wanted.trim().slice(0, 34).trim() || 'no name';
+    const base = cut(wanted.trim(), 34).trim() || 'no name';
     let tag = base;
     for (let number = 2; used.has(tag.toLowerCase()); number++) {
       const ending = ` (${number})`;
-      tag = base.slice(0, LONGEST - ending.length) + ending;
+      tag = cut(base, LONGEST - ending.length) + ending;
     }
     used.add(tag.toLowerCase());
     return tag;

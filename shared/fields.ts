@@ -16,6 +16,12 @@ export const centsSchema = z
   .min(-MAX_CENTS, { error: 'That amount is too large.' })
   .max(MAX_CENTS, { error: 'That amount is too large.' });
 
+/** The most time that one record holds: a hundred thousand hours, in seconds. */
+export const MAX_SECONDS = 360_000_000;
+
+/** Whole seconds of work. */
+export const secondsSchema = z.int().min(0).max(MAX_SECONDS, { error: 'That is more hours than anyone works.' });
+
 export const positiveCentsSchema = centsSchema.min(0, { error: 'This cannot be below zero.' });
 
 // A NUL or half of a surrogate pair is damage from somewhere else, never something typed.

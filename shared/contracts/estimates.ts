@@ -1,5 +1,5 @@
 import { z } from 'zod';
-import { daySchema, idSchema, optionalTextSchema, positiveCentsSchema } from '../fields.ts';
+import { daySchema, idSchema, optionalTextSchema, positiveCentsSchema, secondsSchema } from '../fields.ts';
 
 /** An estimate: the plan before work starts (the baseline once locked), or a later revision beside it. */
 export const estimateFieldsSchema = z.strictObject({
@@ -9,7 +9,7 @@ export const estimateFieldsSchema = z.strictObject({
     .refine((lines) => new Set(lines.map((line) => line.categoryId)).size === lines.length, {
       error: 'A category stands here twice.',
     }),
-  plannedSeconds: z.int().min(0).nullable(),
+  plannedSeconds: secondsSchema.nullable(),
   expectedSaleCents: positiveCentsSchema.nullable(),
   expectedDays: z.int().min(0).max(10_000).nullable(),
   note: optionalTextSchema(1000),

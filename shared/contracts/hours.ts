@@ -1,6 +1,14 @@
 import { z } from 'zod';
 import type { FeatureApi } from '../contract.ts';
-import { cursorSchema, daySchema, idSchema, nextSchema, optionalTextSchema, textSchema } from '../fields.ts';
+import {
+  cursorSchema,
+  daySchema,
+  idSchema,
+  nextSchema,
+  optionalTextSchema,
+  secondsSchema,
+  textSchema,
+} from '../fields.ts';
 import { STAGES } from '../vocabulary.ts';
 
 /** Hours on a rebuild, kept as whole seconds. Person and day may be unknown (a total from an old sheet). */
@@ -8,7 +16,7 @@ export const hoursFieldsSchema = z.strictObject({
   rebuildId: idSchema,
   workerId: idSchema.nullable(),
   workedOn: daySchema.nullable(),
-  seconds: z.int().min(0).max(360_000_000, { error: 'That is more hours than anyone works.' }),
+  seconds: secondsSchema,
   /** Paid work is in the costs already; "per hour" counts unpaid hours. */
   isPaid: z.boolean(),
   task: optionalTextSchema(200),

@@ -56,6 +56,14 @@ describe('the plan', () => {
     expect((await post([{ categoryId: parts, cents: -1 }])).body.errors[0].pointer).toBe('/lines/0/cents');
   });
 
+  it('refuses more planned hours than hours can be logged', async () => {
+    const { ada, books } = await shop();
+    const { id } = await books.rebuild();
+    const body = { lines: [], expectedSaleCents: null, expectedDays: null, note: null };
+    const reply = await ada.post(`/api/rebuilds/${id}/estimates`, { ...body, plannedSeconds: 2 ** 53 - 1 });
+    expect([reply.status, reply.body.errors[0].pointer]).toEqual([400, '/plannedSeconds']);
+  });
+
   it('belongs to its rebuild: under another it is not there', async () => {
     const { ada, books } = await shop();
     const one = await books.rebuild();

@@ -121,6 +121,8 @@ describe('hours as people type them', () => {
     ['0', 0],
     ['', 'blank'],
     ['half day', 'bad'],
+    ['100000', 360_000_000],
+    ['103197', 'bad'],
     ['1:75', 'bad'],
   ])('%s is %s seconds', (text, seconds) => expect(readHours(text)).toBe(seconds));
 });

@@ -1,5 +1,5 @@
-/** What one row of the file holds. */
-export const SHAPES = ['expenses', 'vehicles', 'hours'] as const;
+/** What one row of the file holds; a vehicle sheet is about one vehicle, or several one below the other. */
+export const SHAPES = ['expenses', 'vehicles', 'hours', 'vehicle sheet'] as const;
 export type Shape = (typeof SHAPES)[number];
 
 /** How a row of the file ended; every row ends as exactly one of these. */

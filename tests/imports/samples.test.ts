@@ -91,10 +91,12 @@ describe('samples with known truth', () => {
     expect(read(sampleBytes('p06_ausgaben_werkstatt.csv')).refusal).toMatchObject({ kind: 'currency' });
   });
 
-  it('a sheet about one car in sections is refused with the line that shows it, and nothing of it is read', () => {
-    const reading = read(sampleBytes('p03_single_car_sheet.csv'));
-    expect(reading.refusal).toMatchObject({ kind: 'shape', row: 4 });
-    expect(reading.control.rowsRead).toBe(0);
+  it('a sheet about one vehicle in sections comes in whole, its hours too', () => {
+    const name = 'p03_single_car_sheet.csv';
+    const reading = read(sampleBytes(name));
+    expectAgreement(reading, truthOf(name));
+    expect(readHoursLines(reading)).toEqual(trueHours(truthOf(name)));
+    expect(reading.choices).toEqual([]);
   });
 
   it('a workbook of an overview, parts and labor comes in with the money counted once', () => {

@@ -4,6 +4,7 @@ import { remembered } from '../cells/fold.ts';
 import type { VehicleTarget } from '../understand/vehicle-drafts.ts';
 import { placeOf, vehicleText } from '../understand/vehicle-columns.ts';
 import { type CategoryMeaning, PURCHASE, SALE } from '../words/categories.ts';
+import { categoryGuesser } from '../words/infer-category.ts';
 import type { Plan } from './plan.ts';
 
 /** Money of a cell: cents, nothing, or why it cannot be taken. */
@@ -57,10 +58,17 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
   const nameOf = vehicleText(plan.columns);
   const dayOf = plan.days.get(cols.date) ?? (() => 'blank' as const);
   const textOf = remembered(kept);
+  const guess = categoryGuesser(plan.books.categories);
+  const guessOf = remembered((what: string) => guess([what], null));
+  const unnamed = plan.categories.get('');
+  // A list without a column for it says in its own words what each cost was, unless a person said where they belong.
+  const meaningOf = (word: string, what: string | null) =>
+    cols.category === 0 && what !== null && !unnamed?.isSure ? guessOf(what) : (plan.categories.get(word) ?? unnamed);
   return (cells) => {
     const cell = (col: number) => (col > 0 ? (cells[col - 1] ?? '') : '');
     const name = nameOf(cells);
     const dateCell = cell(cols.date).trim();
+    const what = textOf(cell(cols.what));
     return {
       name,
       dateCell,
@@ -68,8 +76,8 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
       paid: cellMoney(plan, cell(cols.amount)),
       back: cellMoney(plan, cell(cols.credit)),
       target: plan.vehicles.get(name),
-      meaning: plan.categories.get(cell(cols.category).trim()) ?? plan.categories.get(''),
-      what: textOf(cell(cols.what)),
+      meaning: meaningOf(cell(cols.category).trim(), what),
+      what,
       vendor: textOf(cell(cols.vendor)),
     };
   };

@@ -43,7 +43,7 @@ function previewOf(understood: Understanding, plan: FilePlan, onPart?: (share: n
     plan,
     {
       row(cells, line, result, sheet) {
-        if (cells.length > (widths.get(sheet) ?? 0) && result.outcome === 'taken') ragged++;
+        if (cells.length > (widths.get(sheet) || Number.POSITIVE_INFINITY) && result.outcome === 'taken') ragged++;
         if (firstRows.length < FIRST_ROWS && result.reason !== 'blank') {
           firstRows.push({
             sheet,

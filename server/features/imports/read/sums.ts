@@ -94,7 +94,8 @@ function meansWhole(value: number, sum: Sum, label: string): boolean {
   return fits(sum.taken, sum.aside) || GRAND.test(label) || sum.takenSince + sum.asideSince === 0;
 }
 
-function explain(value: number, imported: number, putAside: number): string {
+/** Why a stated total and what came in agree or differ, in words. */
+export function explain(value: number, imported: number, putAside: number): string {
   if (value === imported) return 'Agrees exactly.';
   if (value === imported + putAside) return 'The difference stands on rows that were put aside.';
   return putAside === 0

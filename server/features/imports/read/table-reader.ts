@@ -7,6 +7,7 @@ import type { Plan, RowRead, RowReader } from './plan.ts';
 import { rowOutsideTable } from './row-kinds.ts';
 import { type ColumnSums, columnSums, type SummedColumn } from './sums.ts';
 import { vehicleRowReader } from './vehicle-row.ts';
+import { vehicleSheetReader } from './vehicle-sheet.ts';
 
 /** Reads the rows of one sheet in order, each as what it is; `stated` fills with the totals that the sheet states. */
 export function tableReader(plan: Plan): {
@@ -24,6 +25,7 @@ export function tableReader(plan: Plan): {
 
 function readerOf(plan: Plan, sums: ColumnSums): RowReader {
   if (plan.shape === null) return looseRowReader(plan);
+  if (plan.shape === 'vehicle sheet') return vehicleSheetReader(plan, sums);
   if (plan.shape === 'vehicles') return vehicleRowReader(plan, sums);
   return plan.shape === 'hours' ? hoursRowReader(plan, sums) : expenseRowReader(plan, sums);
 }

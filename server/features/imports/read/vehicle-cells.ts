@@ -112,7 +112,7 @@ function factTaker(plan: Plan, meaning: Meaning): Take | null {
 }
 
 /** `103,197`, `103.197 km`, `103k` into whole miles or kilometers as written; null = neither. */
-function readOdometer(cell: string): number | null {
+export function readOdometer(cell: string): number | null {
   const match = /^(\d{1,3}(?:[., ’']?\d{3})*|\d{1,7})\s*(k)?\s*(?:mi|miles|km)?\.?$/i.exec(cell);
   if (!match) return null;
   const number = Number((match[1] ?? '').replace(/\D/g, '')) * (match[2] ? 1000 : 1);

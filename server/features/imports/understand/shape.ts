@@ -4,6 +4,7 @@ import { looksLikeMoney } from '../cells/money.ts';
 import { type CategoryMeaning, SALE } from '../words/categories.ts';
 import { headingMeanings, plannedPart } from '../words/headings.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
+import { isFigure, namesVehicle, titleOf } from '../read/sheet-words.ts';
 import type { Head } from './head.ts';
 
 /** What one row stands for, or why the sheet cannot be read. */
@@ -16,20 +17,14 @@ export function guessShape(
   head: Head,
   all: readonly ColumnFacts[],
   categoryOf: (text: string) => CategoryMeaning | null,
+  { sheetName, thisYear }: { readonly sheetName: string | null; readonly thisYear: number },
 ): ShapeGuess {
+  if (isVehicleSheet(head, all, sheetName, thisYear)) return { shape: 'vehicle sheet' };
   if (!head.heading) {
     return {
       shape: null,
       row: null,
       why: 'No row reads like headings. Put a row of headings (date, car, what, amount) above the list and bring it in again.',
-    };
-  }
-  const paid = head.above.filter((row) => row.cells.some(looksPaid));
-  if (paid.length >= FIGURES_ABOVE) {
-    return {
-      shape: null,
-      row: paid[0]?.line ?? null,
-      why: 'There are figures above the headings: this looks like one sheet about one car, in sections. Such sheets cannot be read yet; list its costs one per row with the car beside each.',
     };
   }
   const means = (meaning: Meaning, holds: (facts: ColumnFacts) => boolean) =>
@@ -38,6 +33,8 @@ export function guessShape(
   const name = means('stock number', () => true) ?? means('vehicle', holdsNames) ?? means('model', () => true);
   const amount = means('amount', holdsMoney);
   if (name && costs.length >= 2 && (name.distinct >= 0.8 || costs.length >= 4 || !amount)) return { shape: 'vehicles' };
+  const isOverview = name && name.distinct >= 0.8 && means('sale', holdsMoney) && !means('date', holdsDays);
+  if (isOverview && !amount && !means('category', holdsText)) return { shape: 'vehicles' };
   const hasMoney = amount ?? means('credit', holdsMoney);
   if (name && hasMoney) return { shape: 'expenses' };
   if (name && means('hours', holdsHours) && means('date', holdsDays)) return { shape: 'hours' };
@@ -54,9 +51,19 @@ export function guessShape(
 const holdsNames = (facts: ColumnFacts) =>
   holdsText(facts) || facts.samples.every((cell) => /^\d{1,5}$/.test(cell) || !looksLikeMoney(cell));
 
-// One figure above the headings may be a title's; two rows of them are costs.
-const FIGURES_ABOVE = 2;
-const looksPaid = (cell: string) => looksLikeMoney(cell) && /[.,]\d\d(?!\d)|[$€£]/.test(cell);
+/** A sheet that names its vehicle in a title or by its own name, and in no column. */
+function isVehicleSheet(head: Head, all: readonly ColumnFacts[], sheetName: string | null, thisYear: number): boolean {
+  const names: readonly Meaning[] = ['vehicle', 'stock number', 'model', 'year'];
+  if (
+    all.some((facts) => facts.filled > 1 && headingMeanings(facts.heading).some((meaning) => names.includes(meaning)))
+  )
+    return false;
+  const rows = [...head.above, ...(head.heading ? [head.heading] : []), ...head.below];
+  const hasTitle = rows.slice(0, TITLE_WITHIN).some((row) => titleOf(row.cells, thisYear) !== null);
+  return (hasTitle || namesVehicle(sheetName ?? '', thisYear)) && rows.some((row) => row.cells.some(isFigure));
+}
+
+const TITLE_WITHIN = 12;
 
 function isCost(facts: ColumnFacts, categoryOf: (text: string) => CategoryMeaning | null): boolean {
   const category = categoryOf(plannedPart(facts.heading) ?? facts.heading);

@@ -3,6 +3,7 @@ import { REBUILD_DATES } from '#shared/vocabulary.ts';
 import { currenciesIn, decimalVote, looksLikeMoney } from '../cells/money.ts';
 import { unsettledParts } from '../cells/days.ts';
 import type { Sheet } from '../sheets/sheet.ts';
+import { isFigure, namesVehicle, titleOf } from '../read/sheet-words.ts';
 import { repeatedRows, rowHash } from './repeats.ts';
 import type { Heading } from '../read/plan.ts';
 import { isHeadingAgain } from '../read/row-kinds.ts';
@@ -86,6 +87,35 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
     repeats,
     dates: new Map(days.map(({ at, see }) => [at + 1, see.evidence])),
   };
+}
+
+/** Goes through a whole sheet about one vehicle, or several: its days stand under column 1 of the evidence. */
+export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
+  const currencies = new Map<string, number>();
+  const vehicles = new Map<string, number>();
+  const days = dateWatcher();
+  const hashes: number[] = [];
+  const lines: number[] = [];
+  let decimalVotes = 0;
+  if (namesVehicle(sheet.name ?? '', thisYear)) count(vehicles, sheet.name ?? '');
+  sheet.forEachRow((cells, line) => {
+    const title = titleOf(cells, thisYear);
+    if (title) count(vehicles, title.text);
+    let isData = false;
+    for (const cell of cells) {
+      if (cell === '') continue;
+      days.cell(cell);
+      if (!isFigure(cell)) continue;
+      isData = true;
+      decimalVotes += decimalVote(cell);
+      for (const currency of currenciesIn(cell) ?? []) count(currencies, currency);
+    }
+    if (!isData) return;
+    hashes.push(rowHash(cells));
+    lines.push(line);
+  });
+  const repeats = new Set([...repeatedRows(hashes)].map((place) => lines[place] as number));
+  return { decimalVotes, currencies, vehicles, categories: new Map(), repeats, dates: new Map([[1, days.evidence]]) };
 }
 
 function count(counts: Map<string, number>, key: string): void {

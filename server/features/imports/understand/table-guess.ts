@@ -39,27 +39,30 @@ const NO_HEADING: Heading = { line: 0, last: 0, cells: [] };
 export function guessTable(sheet: Sheet, { books, settings, decimal, answers }: Asked): TableGuess {
   const head = readHead(sheet);
   const said = (settings.columns ?? []).filter((column) => (column.sheet ?? 1) === sheet.number);
-  const guess = guessAll(head, sheet.number, books, said, decimal);
+  const guess = guessAll(head, sheet, books, said, decimal);
   const hasRows = head.heading !== null || head.below.length > 0;
   const heading = head.heading
     ? { line: head.heading.line, last: head.heading.line, cells: head.heading.cells }
     : NO_HEADING;
   if (guess.shape === null) return { sheet, hasRows, heading, choices: [], ...guess };
+  if (guess.shape === 'vehicle sheet') return { sheet, hasRows, heading: NO_HEADING, choices: [], ...guess };
   const asked = askOfColumns(guess.columns, guess.shape, answers, books);
   return { sheet, hasRows, heading, ...guess, columns: asked.columns, choices: asked.choices };
 }
 
 function guessAll(
   head: Head,
-  sheet: number,
+  sheet: Sheet,
   books: ShopBooks,
   said: NonNullable<ImportSettings['columns']>,
   decimal: DecimalMark,
 ) {
   const facts = columnFacts(head);
   const categoryOf = categoryReader(books.categories);
-  const guessed = guessShape(head, facts, categoryOf);
-  const columns = guessColumns(facts, guessed.shape ?? 'expenses', categoryOf, sheet);
+  const thisYear = Number(books.today.slice(0, 4));
+  const guessed = guessShape(head, facts, categoryOf, { sheetName: sheet.name, thisYear });
+  if (guessed.shape === 'vehicle sheet') return { columns: [], why: '', row: null, ...guessed };
+  const columns = guessColumns(facts, guessed.shape ?? 'expenses', categoryOf, sheet.number);
   const derived = guessed.shape === 'vehicles' ? markDerived(columns, head, moneyReader(decimal)) : columns;
   if (said.length === 0) return { columns: derived, why: '', row: null, ...guessed };
   const changed = new Map(said.map((column) => [column.col, column]));

@@ -7,7 +7,7 @@ import { openFile } from '../sheets/open-file.ts';
 import type { ByteSource } from '../text/bytes.ts';
 import { makeFilePlan, type SurveyedTable, usualDecimal } from './file-plan.ts';
 import { guessTable, type TableGuess } from './table-guess.ts';
-import { type Survey, survey } from './survey.ts';
+import { type Survey, survey, surveyVehicleSheet } from './survey.ts';
 
 /** What could be understood of a file that is not refused outright. `plan` is null when its shape cannot be read. */
 export interface Understanding {
@@ -45,9 +45,7 @@ export function understand(source: ByteSource, books: ShopBooks, settings: Impor
   if (first.shape === null) {
     return { ...base, choices: [], plan: null, refusal: { kind: 'shape', message: first.why, row: first.row } };
   }
-  const surveyed = guesses.map(
-    (guess): SurveyedTable => ({ guess, found: survey(guess.sheet, guess.columns, guess.heading) }),
-  );
+  const surveyed = guesses.map((guess): SurveyedTable => ({ guess, found: surveyOf(guess, books) }));
   refuseForeign(
     surveyed.map(({ found }) => found),
     books.currency,
@@ -62,6 +60,11 @@ export function understand(source: ByteSource, books: ShopBooks, settings: Impor
     refusal: null,
   };
 }
+
+const surveyOf = ({ sheet, shape, columns, heading }: TableGuess, books: ShopBooks): Survey =>
+  shape === 'vehicle sheet'
+    ? surveyVehicleSheet(sheet, Number(books.today.slice(0, 4)))
+    : survey(sheet, columns, heading);
 
 const sheetFound = ({ sheet, shape, why }: TableGuess): SheetFound => ({
   number: sheet.number,

@@ -18,7 +18,7 @@ const PHRASES: Readonly<Record<string, string>> = {
   'outside labor (sublet)':
     'outside labor|outside labour|body|outside work|outside|sublet|sublets|subcontract|subcontractor|body shop|bodyshop|body work|bodywork|frame|frame work|machine shop|machine work|welding|mechanic|shop labor|fremdleistung|fremdleistungen|fremdarbeit|werkstatt|karosserie|mano de obra externa|sous traitance',
   'paint & body materials':
-    'paint|paints|painting|paint body|paint and body|paint materials|body materials|paint supplies|primer|clear coat|filler|lack|lackierung|lackmaterial|farbe|pintura|peinture',
+    'paint|paints|painting|paint body|paint and body|paint materials|body materials|paint supplies|primer|primer and filler|clear coat|clear coat kit|base coat|filler|body filler|sandpaper|masking tape|spray paint|hardener|thinner|spachtel|schleifpapier|klarlack|basislack|lija|masilla|barniz|papier de verre|mastic|vernis|lack|lackierung|lackmaterial|farbe|pintura|peinture',
   'restraints (SRS)': 'srs|airbag|airbags|air bag|air bags|restraint|restraints|seat belts|belts|gurte|gurt',
   'small systems':
     'glass|windshield|windscreen|key|keys|ac|a c|alignment|scan|scans|calibration|electronics|glas|scheibe|schlussel|klima|achsvermessung',
@@ -28,7 +28,7 @@ const PHRASES: Readonly<Record<string, string>> = {
     'inspection|inspections|inspect|rebuilt inspection|state inspection|safety inspection|smog|emissions|tuv|hu|hauptuntersuchung|hu au|itv|controle technique|mot',
   insurance: 'insurance|ins|versicherung|seguro|assurance',
   supplies:
-    'supplies|supply|shop supplies|consumables|materials|material|fluids|verbrauchsmaterial|hilfsmittel|material werkstatt|suministros|fournitures',
+    'supplies|supply|shop supplies|consumables|engine oil|motor oil|brake fluid|shop rags|welding wire|cutting discs|zip ties|shop rags and gloves|motorol|handschuhe|lappen|aceite de motor|huile moteur|materials|material|fluids|verbrauchsmaterial|hilfsmittel|material werkstatt|suministros|fournitures',
   detail: 'detail|detailing|cleaning|clean|wash|car wash|interior detail|aufbereitung|reinigung|limpieza|nettoyage',
   'selling costs':
     'ad|ads|advert|advertising|listing|listing fee|selling|selling cost|selling costs|sales cost|commission|photos|marketing|verkaufskosten|inserat|anzeige|anuncio|annonce',

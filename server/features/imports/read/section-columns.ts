@@ -1,0 +1,54 @@
+import type { Meaning } from '#shared/contracts/import-reading.ts';
+import { looksLikeDay } from '../cells/days.ts';
+import { looksLikeMoney } from '../cells/money.ts';
+import { headingMeanings } from '../words/headings.ts';
+import { filled } from './row-kinds.ts';
+
+/** Where the columns of a section stand, from 0. */
+export type SectionColumns = ReadonlyMap<Meaning, number>;
+
+const WANTED: readonly Meaning[] = [
+  'date',
+  'hours',
+  'amount',
+  'credit',
+  'category',
+  'person',
+  'what',
+  'vendor',
+  'foreseen',
+  'task',
+];
+const OF_WORK: readonly Meaning[] = ['date', 'hours', 'person', 'task', 'what', 'amount'];
+
+/** The columns that a row of headings inside a sheet names; null = the row is no such row. */
+export function sectionColumns(cells: readonly string[], isOwnWork: boolean): SectionColumns | null {
+  if (filled(cells) < 2) return null;
+  const columns = new Map<Meaning, number>();
+  const wanted = isOwnWork ? OF_WORK : WANTED;
+  let known = 0;
+  for (const [at, cell] of cells.entries()) {
+    if (cell.trim() === '') continue;
+    if (looksLikeMoney(cell) || looksLikeDay(cell)) return null;
+    const meanings = headingMeanings(cell);
+    if (meanings.length > 0) known++;
+    const meaning = wanted.find((one) => meanings.includes(one) && !columns.has(one));
+    if (meaning) columns.set(meaning, at);
+  }
+  const isTable = columns.has('amount') || columns.has('hours') || columns.has('credit');
+  return known >= 2 && known >= filled(cells) / 2 && isTable ? columns : null;
+}
+
+/** Where a row without headings above it holds its parts: the first day, the last amount, the texts in order. */
+export function looseColumns(cells: readonly string[]): SectionColumns {
+  const columns = new Map<Meaning, number>();
+  for (const [at, cell] of cells.entries()) {
+    if (cell.trim() === '') continue;
+    if (looksLikeDay(cell)) {
+      if (!columns.has('date')) columns.set('date', at);
+    } else if (looksLikeMoney(cell)) columns.set('amount', at);
+    else if (!columns.has('what')) columns.set('what', at);
+    else if (!columns.has('vendor')) columns.set('vendor', at);
+  }
+  return columns;
+}

@@ -1,0 +1,64 @@
+import { fold } from '../cells/fold.ts';
+import { looksLikeDay } from '../cells/days.ts';
+import { looksLikeMoney } from '../cells/money.ts';
+import { readVehicle } from '../understand/vehicle-text.ts';
+import { isColor, makeOf } from '../words/vehicles.ts';
+import { headingMeanings } from '../words/headings.ts';
+import { tradeMeaning } from '../words/categories.ts';
+import { filled } from './row-kinds.ts';
+
+/** A row that opens the part of a sheet about one vehicle. */
+export interface VehicleTitle {
+  /** As it names the vehicle: `2011 Subaru Outback`. */
+  readonly text: string;
+  /** What else it says: a damage, a color, a title brand. */
+  readonly besides: readonly string[];
+}
+
+const MOST_IN_TITLE = 4;
+const LONGEST_TITLE = 90;
+const BREAKS = /\s+[-–—|•]+\s+|\s*[;(),]\s*|:\s+/;
+
+/** Does a row name a vehicle and hold no figures of its own? null = it does not. */
+export function titleOf(cells: readonly string[], thisYear: number): VehicleTitle | null {
+  if (filled(cells) > MOST_IN_TITLE || cells.some((cell) => isFigure(cell) || looksLikeDay(cell))) return null;
+  for (const cell of cells) {
+    if (cell.length < 4 || cell.length > LONGEST_TITLE || !/\d\d/.test(cell)) continue;
+    const parts = cell.replace(/^[\s=*#-]+|[\s=*#-]+$/g, '').split(BREAKS);
+    const at = parts.findIndex((part) => namesVehicle(part, thisYear));
+    if (at < 0) continue;
+    const others = cells.filter((other) => other !== cell && other.trim() !== '');
+    return {
+      text: parts[at] ?? '',
+      besides: [...parts.filter((_, i) => i !== at), ...others].map((part) => part.trim()),
+    };
+  }
+  return null;
+}
+
+/** A year beside a known make, or a year of four digits beside a word that is no cost, month or heading. */
+export function namesVehicle(text: string, thisYear: number): boolean {
+  const { year, make, model } = readVehicle(text, thisYear);
+  if (year === null || model === null || text.split(/\s+/).length > 6) return false;
+  if (make !== null) return true;
+  const isOther = headingMeanings(model).length > 0 || tradeMeaning(model) !== null || makeOf(model) !== null;
+  return /\b(?:19|20)\d\d\b/.test(text) && !isOther && /\p{L}{2}/u.test(model) && model.split(' ').length <= 2;
+}
+
+/** An amount with its decimals or a sign, not just any number. */
+export const isFigure = (cell: string) =>
+  looksLikeMoney(cell) && (/[.,]\d\d(?!\d)|[$€£]/.test(cell) || /^\s*\(/.test(cell));
+
+const OWN_WORK =
+  /^(?:(?:my|own|our|shop)\s)?(?:labou?r|hours|hrs|time|work|time spent|arbeit|arbeitszeit|eigenleistung|stunden|zeit|mano de obra|horas|trabajo|main d oeuvre|heures|travail|temps)(?:\s(?:log|hours|spent|own|propia|eigene))?$/;
+
+/** Does a section's title say that own work follows? */
+export const isOwnWork = (text: string) => OWN_WORK.test(fold(text));
+
+const BRAND = /\b(?:salvage|rebuilt|reconstructed|clean|clear|flood|junk|branded|certificate)\b/i;
+
+/** Does a text say what the vehicle's title is branded? */
+export const isTitleBrand = (text: string) => BRAND.test(text) && text.length < 40;
+
+/** Is everything in a text the name of a color? */
+export const isOnlyColor = (text: string) => text.split(/\s+/).every((word) => isColor(word));

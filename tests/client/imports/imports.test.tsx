@@ -122,10 +122,10 @@ describe('one import', () => {
   });
 
   it('says why a file cannot come in', async () => {
-    const reading = read(sampleBytes('p03_single_car_sheet.csv'));
+    const reading = read('Date,What for,Paid\n2020-01-02,Parts,10.00');
     serve(buildImport(reading, { state: 'refused', refusal: reading.refusal?.message ?? null }));
     open();
-    expect(await screen.findByText(/one sheet about one car/)).toBeInTheDocument();
+    expect(await screen.findByText(/No column names the vehicle/)).toBeInTheDocument();
     expect(screen.queryByRole('button', { name: /^Book/ })).not.toBeInTheDocument();
   });
 

@@ -118,6 +118,18 @@ describe('one vehicle per row', () => {
     expect(reading.rebuilds[1]).toMatchObject({ saleCents: null, dates: { boughtOn: '2020-01-03' } });
   });
 
+  it('makes nothing that the books could not show again: notes, headings and names may be long', () => {
+    const long = (most: number) => 'x'.repeat(most);
+    const heads = `Stock,Model,Bought,Bid,Parts ${long(600)},Notes,Comments`;
+    const reading = read(`${heads}\nA1,Focus,1/2/2020,1000,50,${long(3000)},${long(3000)}`);
+    expect(reading.asides).toMatchObject([{ row: 2, col: 7, reason: 'cell-too-long' }]);
+    expect(reading.rebuilds[0]?.notes).toHaveLength(3000);
+    expect(linesOf(reading).filter(({ kind }) => kind === 'entry')).toMatchObject([{ cents: 5000, what: null }]);
+    expect(read(list(`2020-01-02,13 ${long(90)},Parts,door,10.00`)).rebuilds).toMatchObject([
+      { year: 2013, model: null },
+    ]);
+  });
+
   it('takes one vehicle once, and says so when it stands there twice', () => {
     const reading = read(
       car('A1,2012,Jetta,2020-01-02,100.00,20.00,5.00,,', 'A1,2012,Jetta,2020-01-02,100.00,21.00,5.00,,'),

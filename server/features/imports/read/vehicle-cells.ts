@@ -88,11 +88,10 @@ function hoursTaker(column: Column): Take {
 
 function textTaker(field: keyof RebuildFound): Take {
   return (cell, row) => {
-    if (cell.length > (LONGEST[field] ?? 60)) return 'cell-too-long';
     const before = row.known[field];
-    Object.assign(row.known, {
-      [field]: field === 'notes' && before ? `${String(before)}\n${cell}` : cell.normalize('NFC'),
-    });
+    const text = (field === 'notes' && before ? `${String(before)}\n${cell}` : cell).normalize('NFC');
+    if (text.length > (LONGEST[field] ?? 60)) return 'cell-too-long';
+    Object.assign(row.known, { [field]: text });
     return null;
   };
 }

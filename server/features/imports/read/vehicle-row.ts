@@ -103,6 +103,8 @@ function settleSale(row: VehicleCells, columns: readonly Column[]): VehicleCells
   return { ...row, dates, asides: [...row.asides, { col, reason: 'missing-amount', text: soldOn, cents: null }] };
 }
 
+// A heading longer than an entry's text is left to the row that the entry links to.
+const LONGEST_WHAT = 500;
 const KINDS = {
   purchase: 'purchase',
   cost: 'entry',
@@ -125,7 +127,7 @@ function lineOf({ column, cents, seconds }: Figure, draft: Draft, row: VehicleCe
     cents,
     seconds,
     vendor: null,
-    what: column.heading || null,
+    what: column.heading.length > LONGEST_WHAT ? null : column.heading || null,
     foreseen: null,
     person: null,
     isExtra: false,

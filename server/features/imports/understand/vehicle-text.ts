@@ -10,6 +10,8 @@ export interface VehicleText {
   readonly key: string;
 }
 
+// Whoever wrote more than this told a story, not a model; it stays with the row.
+const LONGEST_MODEL = 60;
 const FOUR = /^(19[3-9]\d|20\d\d)$/;
 const TWO = /^\d\d$/;
 
@@ -23,7 +25,8 @@ export function readVehicle(text: string, thisYear: number): VehicleText {
   const make = takeMake(words);
   const left = words.filter((word) => !isColor(word));
   const model = (left.length > 0 ? left : words).join(' ') || null;
-  return { year, make, model, key: modelKey(model ?? make ?? text) };
+  const key = modelKey(model ?? make ?? text);
+  return { year, make, model: model !== null && model.length > LONGEST_MODEL ? null : model, key };
 }
 
 /** What of a model's name is compared: letters and digits alone. */

@@ -3,6 +3,7 @@ import { Dialog } from '@base-ui/react/dialog';
 import { useQueries } from '@tanstack/react-query';
 import { useNavigate } from 'react-router-dom';
 import type { Session } from '#shared/contracts/session.ts';
+import { leaveBy } from '../lib/unsaved.ts';
 import { signOut } from '../lib/session.ts';
 import { placesOf } from './places.ts';
 import { type PaletteItem, paletteSources } from './palette-sources.ts';
@@ -13,7 +14,8 @@ export function Palette({ session, onClose }: { session: Session; onClose: () =>
   const items = usePaletteItems(session);
   const onPick = (item: PaletteItem) => {
     onClose();
-    if (item.to) void navigate(item.to);
+    const { to } = item;
+    if (to) leaveBy(() => void navigate(to));
     item.run?.();
   };
   return (

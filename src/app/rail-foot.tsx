@@ -1,5 +1,6 @@
 import type { Session } from '#shared/contracts/session.ts';
 import { useNavigate } from 'react-router-dom';
+import { leaveBy } from '../lib/unsaved.ts';
 import { signOut } from '../lib/session.ts';
 import { Menu } from '../ui/menu.tsx';
 import { SCHEMES, useScheme } from './scheme.ts';
@@ -26,7 +27,7 @@ export function RailFoot({ session, className = 'rail-foot' }: { session: Sessio
             items={others.map((shop) => ({
               label: shop.name,
               note: shop.role,
-              onSelect: () => navigate(`/s/${shop.id}`),
+              onSelect: () => leaveBy(() => void navigate(`/s/${shop.id}`)),
             }))}
           />
         )}

@@ -14,6 +14,8 @@ const FIGURE = 20;
 const NAMES = 44;
 /** A year takes this much; where there is no room for all, the latest are drawn. */
 const YEAR = 56;
+/** And no more than this: a bar is not a wall. */
+const YEAR_AT_MOST = 150;
 const BAND = { type: 'band', paddingInner: 0.4, paddingOuter: 0.2 } as const;
 const yearOf = (bar: YearBar) => bar.year;
 const centsOf = (bar: YearBar) => bar.cents;
@@ -30,7 +32,7 @@ export function YearBars({ caption, bars, format }: Props) {
         return (
           <div className="chart" aria-hidden="true">
             <XYChart
-              width={width}
+              width={Math.min(width, drawn.length * YEAR_AT_MOST)}
               height={HEIGHT}
               margin={margin}
               xScale={BAND}

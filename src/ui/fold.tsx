@@ -3,7 +3,7 @@ import { Nothing } from './figures.tsx';
 import type { Column, RowProps } from './table.tsx';
 
 /** Below these widths the columns that say so move beneath their row. */
-const NARROW = { phone: '(width < 40rem)', tablet: '(width < 64rem)' } as const;
+const NARROW = { phone: '(width < 40rem)', tablet: '(width < 80rem)' } as const;
 export type Narrow = keyof typeof NARROW;
 
 /** Columns that stay, and those whose cells stand on a line of their own beneath each row. */

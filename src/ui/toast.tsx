@@ -23,7 +23,7 @@ export function Toasts() {
   return (
     <Toast.Provider toastManager={manager} limit={3}>
       <Toast.Portal>
-        <Toast.Viewport className="fixed inset-x-4 bottom-20 z-50 grid gap-2 sm:left-auto sm:w-[24rem] md:bottom-6">
+        <Toast.Viewport className="no-print fixed inset-x-4 bottom-20 z-50 grid gap-2 sm:left-auto sm:w-[24rem] md:bottom-6">
           <ToastList />
         </Toast.Viewport>
       </Toast.Portal>

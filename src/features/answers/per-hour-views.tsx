@@ -58,7 +58,7 @@ const COLUMNS: readonly Column<Row>[] = [
     header: 'View, and what it is made of',
     heads: true,
     cell: (row) => (
-      <span className="block min-w-40">
+      <span className="block sm:min-w-40">
         {row.view}
         <span className="block text-label text-soft">
           {unbroken(row.made)}

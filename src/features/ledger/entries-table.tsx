@@ -103,7 +103,7 @@ function RebuildTag({ row, shopId }: { row: EntryRow; shopId: string }) {
 function What({ row }: { row: EntryRow }) {
   const words = [row.what, row.vendor].filter(Boolean).join(' · ');
   return (
-    <span className="block sm:min-w-44">
+    <span className="block sm:min-w-36">
       {words || <Nothing />}
       {row.splitId && <span className="text-soft"> (a share)</span>}
       {row.voidReason && <span className="ml-2 inline-block no-underline">void: {row.voidReason}</span>}

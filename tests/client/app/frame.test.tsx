@@ -90,7 +90,9 @@ test('an owner sees every place; the demo says on which day its calendar stands'
   serve(buildSession('owner'));
   open(`/s/one/${NOWHERE}`);
   expect(await places()).toHaveLength(11);
-  expect(screen.getByText(/every figure is invented, from a seed chosen .* calendar stands at 15 December 2026\./)).toBeInTheDocument();
+  expect(
+    screen.getByText(/every figure is invented, from a seed chosen .* calendar stands at 15 December 2026\./),
+  ).toBeInTheDocument();
 });
 
 test('an address of another of my shops opens in that shop', async () => {

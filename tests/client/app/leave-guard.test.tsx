@@ -1,7 +1,7 @@
 import { render, screen } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { useState } from 'react';
-import { createMemoryRouter, Link, Outlet, RouterProvider } from 'react-router-dom';
+import { BrowserRouter, Link, Route, Routes } from 'react-router-dom';
 import { expect, test } from 'vitest';
 import { lazyPage } from '../../../src/app/lazy-page.tsx';
 import { LeaveGuard } from '../../../src/app/leave-guard.tsx';
@@ -14,19 +14,19 @@ function Typing() {
 }
 
 function open() {
-  const frame = (
-    <>
+  history.replaceState({ idx: 0 }, '', '/');
+  render(
+    <BrowserRouter>
       <Link to="/other">Other page</Link>
+      <Link to="/">Typing page</Link>
       <Link to="?year=2024">Another year</Link>
-      <Outlet />
+      <Routes>
+        <Route path="/" element={<Typing />} />
+        <Route path="/other" element={<p>the other page</p>} />
+      </Routes>
       <LeaveGuard />
-    </>
+    </BrowserRouter>,
   );
-  const children = [
-    { path: '/', element: <Typing /> },
-    { path: '/other', element: <p>the other page</p> },
-  ];
-  render(<RouterProvider router={createMemoryRouter([{ element: frame, children }])} />);
 }
 
 const leaving = () => {
@@ -43,6 +43,19 @@ test('what is typed and not saved is asked about before the page is left, and st
   await userEvent.click(await screen.findByRole('button', { name: 'Stay here' }));
   expect(screen.getByLabelText('Lessons')).toHaveValue('look twice');
   await userEvent.click(screen.getByRole('link', { name: 'Other page' }));
+  await userEvent.click(await screen.findByRole('button', { name: 'Leave' }));
+  expect(await screen.findByText('the other page')).toBeInTheDocument();
+});
+
+test('the way back asks too', async () => {
+  open();
+  await userEvent.click(screen.getByRole('link', { name: 'Other page' }));
+  await userEvent.click(screen.getByRole('link', { name: 'Typing page' }));
+  await userEvent.type(screen.getByLabelText('Lessons'), 'look twice');
+  history.back();
+  await userEvent.click(await screen.findByRole('button', { name: 'Stay here' }));
+  expect(screen.getByLabelText('Lessons')).toHaveValue('look twice');
+  history.back();
   await userEvent.click(await screen.findByRole('button', { name: 'Leave' }));
   expect(await screen.findByText('the other page')).toBeInTheDocument();
 });

@@ -59,7 +59,7 @@ const COLUMNS: readonly Column<Score>[] = [
   {
     id: 'unused',
     header: 'Unused, in all',
-    under: 'phone',
+    under: 'tablet',
     number: true,
     cell: (row) => <Money cents={row.unusedCents} />,
   },

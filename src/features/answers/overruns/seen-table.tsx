@@ -24,7 +24,7 @@ export function SeenTable({ seen }: { seen: OverrunsAnswer['seen'] }) {
 
 const COLUMNS: readonly Column<Row>[] = [
   { id: 'seen', header: 'Bought', heads: true, cell: words },
-  { id: 'n', header: 'Rebuilds', under: 'phone', number: true, cell: (row) => row.n },
+  { id: 'n', header: 'Rebuilds', under: 'tablet', number: true, cell: (row) => row.n },
   {
     id: 'pooled',
     header: 'All together',

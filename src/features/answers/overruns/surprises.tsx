@@ -53,7 +53,7 @@ const COLUMNS: readonly Column<Row>[] = [
   {
     id: 'range',
     header: '95% range',
-    under: 'phone',
+    under: 'tablet',
     number: true,
     cell: (row) => <RangeText low={row.lower} high={row.upper} />,
   },

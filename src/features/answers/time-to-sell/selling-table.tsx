@@ -44,7 +44,7 @@ const COLUMNS: readonly Column<Row>[] = [
   { id: 'range', header: '95% range', under: 'phone', number: true, cell: (row) => <MiddleRange row={row} /> },
   { id: 'at30', header: 'After 30', under: 'phone', number: true, cell: (row) => <Share at={row.at30} /> },
   { id: 'at60', header: 'After 60', number: true, cell: (row) => <Share at={row.at60} /> },
-  { id: 'at90', header: 'After 90', under: 'phone', number: true, cell: (row) => <Share at={row.at90} /> },
+  { id: 'at90', header: 'After 90', under: 'tablet', number: true, cell: (row) => <Share at={row.at90} /> },
 ];
 
 const WITHOUT_OTHER = COLUMNS.filter(({ id }) => id !== 'other');

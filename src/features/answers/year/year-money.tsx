@@ -48,7 +48,7 @@ const COLUMNS: readonly Column<Row>[] = [
     header: 'Measure, and what it is made of',
     heads: true,
     cell: (row) => (
-      <span className="block min-w-44">
+      <span className="block sm:min-w-44">
         {row.what}
         <span className="block text-label text-soft">{row.note}</span>
       </span>

@@ -1,8 +1,21 @@
 import { describe, expect, it } from 'vitest';
 import { testApi } from '../support/api.ts';
-import { broughtIn, expenseList, upload, uploaded } from './imports-support.ts';
+import { broughtIn, expenseList, settled, upload, uploaded } from './imports-support.ts';
 
 const PNG = Buffer.from('89504e470d0a1a0a0000000d49484452', 'hex');
+
+it('a booking that fails says so, leaves nothing, and can be tried again', async () => {
+  const api = await testApi();
+  const ada = await api.owner();
+  const { writer } = api.services.database;
+  await writer.raw(`CREATE TRIGGER broken BEFORE INSERT ON entries BEGIN SELECT RAISE(ABORT, 'broken'); END`);
+  const failed = await broughtIn(ada, expenseList('1/22/2020,13 F-150,Parts,door,10.00'));
+  expect(failed).toMatchObject({ state: 'ready', refusal: expect.stringContaining('nothing of it stands') });
+  expect((await ada.get('/api/rebuilds')).body.rows).toEqual([]);
+  await writer.raw('DROP TRIGGER broken');
+  await ada.post(`/api/imports/${failed.id}/commit`);
+  expect(await settled(ada, failed.id)).toMatchObject({ state: 'committed', refusal: null });
+});
 
 describe('files that cannot come in', () => {
   it.each([

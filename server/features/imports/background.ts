@@ -10,6 +10,9 @@ const shares = new Map<string, number>();
 /** How far an import is, 0–1; null = nothing is being done with it. */
 export const progressOf = (importId: string) => shares.get(importId) ?? null;
 
+const NOT_BOOKED =
+  'Booking it failed, and nothing of it stands in the books. Try again; if it fails once more, the server’s log says why.';
+
 interface Asker {
   readonly services: Services;
   readonly shopId: string;
@@ -83,7 +86,7 @@ export function startCommit(
           await store.move(record.id, 'committing', 'reading');
           startReading(asker, record);
         } catch (error) {
-          await store.move(record.id, 'committing', 'ready');
+          await store.move(record.id, 'committing', 'ready', NOT_BOOKED);
           throw error;
         }
       }),

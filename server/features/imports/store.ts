@@ -75,9 +75,9 @@ export function importStore(scope: ShopScope) {
     async refuse(id: string, message: string): Promise<void> {
       await only(id, 'reading').update({ state: 'refused', refusal: message });
     },
-    /** From one state to another; false = it was not in that state. */
-    async move(id: string, from: ImportState, to: ImportState): Promise<boolean> {
-      return (await only(id, from).update({ state: to })) === 1;
+    /** From one state to another, and why if it is a step back; false = it was not in that state. */
+    async move(id: string, from: ImportState, to: ImportState, refusal: string | null = null): Promise<boolean> {
+      return (await only(id, from).update({ state: to, refusal })) === 1;
     },
     async discard(id: string): Promise<void> {
       await scope

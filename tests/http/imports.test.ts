@@ -98,10 +98,12 @@ describe('bringing a file in', () => {
     const file = expenseList('1/22/2020,overhead,Other,rent,10.00');
     const both = [await uploaded(ada, file), await uploaded(ada, file)];
     const replies = await Promise.all(both.map(({ id }) => ada.post(`/api/imports/${id}/commit`)));
-    expect(replies.map(({ status }) => status).sort()).toEqual([200, 409]);
+    expect(new Set(replies.map(({ status }) => status))).toEqual(new Set([200, 409]));
     for (const { id } of both) await settled(ada, id);
     const later = await Promise.all(both.map(({ id }) => ada.post(`/api/imports/${id}/commit`)));
-    expect(later.map(({ body }) => body.state ?? body.type).sort()).toEqual(['/problems/already-in', 'committed']);
+    expect(new Set(later.map(({ body }) => body.state ?? body.type))).toEqual(
+      new Set(['/problems/already-in', 'committed']),
+    );
     expect((await ada.get('/api/entries')).body.totals).toMatchObject({ count: 1, cents: 1000 });
   });
 

@@ -64,7 +64,7 @@ describe('joining a shop by a link', () => {
     const replies = await Promise.all(
       links.map(({ token }) => api.anyone.post('/api/join', { token, name: 'Bea', password: PASSWORD })),
     );
-    expect(replies.map(({ status }) => status).sort()).toEqual([204, 409]);
+    expect(new Set(replies.map(({ status }) => status))).toEqual(new Set([204, 409]));
     const left = links[replies.findIndex(({ status }) => status === 409)];
     const again = await api.anyone.post('/api/join', { token: left?.token, password: PASSWORD });
     expect(again.status).toBe(204);

@@ -16,6 +16,7 @@ type Expense = typeof expense extends fc.Arbitrary<infer T> ? T : never;
 
 const isoOf = (day: number) => new Date(Date.UTC(2018, 0, 13) + day * 86_400_000).toISOString().slice(0, 10);
 const money = (amount: Expense['amount']) => (typeof amount === 'number' ? (amount / 100).toFixed(2) : amount);
+const centsOf = (amount: Expense['amount']) => (typeof amount === 'number' ? amount : amount === '~200' ? 20_000 : 0);
 const HEADINGS = ['Date', 'Car', 'What for', 'Details', 'Paid'];
 const cellsOf = (row: Expense, dateOf = isoOf) => [dateOf(row.day), row.car, row.word, row.what, money(row.amount)];
 
@@ -50,7 +51,7 @@ describe('laws of any list', () => {
         expect(control.taken + control.putAside + control.notData).toBe(rows.length + 1);
         expect(control.rowsRead + notData.blank).toBe(rows.length + 1);
         expect(new Set(firstRows.map((row) => row.row)).size).toBe(rows.length + 1);
-        const inFile = rows.reduce((sum, row) => sum + (typeof row.amount === 'number' ? row.amount : 0), 0);
+        const inFile = rows.reduce((sum, row) => sum + centsOf(row.amount), 0);
         expect(control.costCents + control.saleCents + control.putAsideCents).toBe(inFile);
       }),
       { numRuns: 150 },

@@ -55,7 +55,16 @@ const truthSchema = z.object({
   undecidable: z.array(
     z.object({
       source: sourceSchema,
-      acceptable: z.array(z.object({ outcome: z.string(), reason: z.array(z.string()).optional() })),
+      acceptable: z.array(
+        z.object({
+          outcome: z.string(),
+          reason: z.array(z.string()).optional(),
+          flagged: z.boolean().optional(),
+          lines: z
+            .array(z.object({ amountCents: z.int(), category: z.string(), date: z.string().nullable() }))
+            .optional(),
+        }),
+      ),
     }),
   ),
   nonData: z.array(z.object({ sheet: z.string().nullable(), row: z.int(), kind: z.string() })),

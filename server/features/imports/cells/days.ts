@@ -1,4 +1,4 @@
-import { type Day, dayFromParts, isDay } from '#shared/day.ts';
+import { calendarYearOf, type Day, dayFromNumber, dayFromParts, daysBetween, isDay } from '#shared/day.ts';
 
 export type DateOrder = 'MDY' | 'DMY';
 
@@ -22,6 +22,13 @@ const ISO = /^(\d{4})[-/.](\d{1,2})[-/.](\d{1,2})(?:[T ].*)?$/;
 const NUMERIC = /^(\d{1,2})([-/.])(\d{1,2})\2(\d{4}|\d{2})(?:,? \d{1,2}:\d{2}.*)?$/;
 const DAY_FIRST = /^(\d{1,2})(?:st|nd|rd|th)?[-. /]*([\p{L}]{3,})[-., /]*(\d{4}|\d{2})$/u;
 const MONTH_FIRST = /^([\p{L}]{3,})[-. /]*(\d{1,2})(?:st|nd|rd|th)?[-, /]+(\d{4}|\d{2})$/u;
+
+const SERIAL = /^(\d{5})(?:\.\d+)?$/;
+const FIRST_SERIAL = 25_569;
+const YEARLESS = /^(\d{1,2})([-/.])(\d{1,2})\.?$/;
+const YEARLESS_DAY_FIRST = /^(\d{1,2})(?:st|nd|rd|th)?[-. /]*([\p{L}]{3,})\.?$/u;
+const YEARLESS_MONTH_FIRST = /^([\p{L}]{3,})[-. /]*(\d{1,2})(?:st|nd|rd|th)?$/u;
+const HALF_YEAR = 183;
 
 const plain = (text: string) =>
   text
@@ -55,12 +62,40 @@ export function dayReader(order: DateOrder, today: Day): (text: string) => Day |
       const isDayFirst = mark === '.' || order === 'DMY';
       return isDayFirst ? made(year, Number(second), first) : made(year, Number(first), second);
     }
+    if (looksLikeSerial(trimmed)) return dayFromNumber(Math.floor(Number(trimmed)) - FIRST_SERIAL);
     const words = plain(trimmed);
     const dayFirst = DAY_FIRST.exec(words);
     if (dayFirst) return made(dayFirst[3] ?? '', MONTH_OF.get(dayFirst[2] ?? ''), dayFirst[1] ?? '');
     const monthFirst = MONTH_FIRST.exec(words);
     return monthFirst ? made(monthFirst[3] ?? '', MONTH_OF.get(monthFirst[1] ?? ''), monthFirst[2] ?? '') : 'bad';
   };
+}
+
+/** A number that stands for a day of 1995 to 2040 when a date lost its format: `43900`. */
+export function looksLikeSerial(text: string): boolean {
+  const serial = Number(SERIAL.exec(text)?.[1] ?? 0);
+  return serial >= 34_700 && serial <= 51_500;
+}
+
+/** Month and day of a cell that leaves the year out (`3/4`, `4-Mar`); null = it is no such cell. */
+export function yearlessParts(text: string, order: DateOrder): { month: number; day: number } | null {
+  const numeric = YEARLESS.exec(text.trim());
+  if (numeric) {
+    const [first, second] = [Number(numeric[1]), Number(numeric[3])];
+    return numeric[2] === '.' || order === 'DMY' ? { month: second, day: first } : { month: first, day: second };
+  }
+  const words = plain(text);
+  const dayFirst = YEARLESS_DAY_FIRST.exec(words);
+  const monthFirst = dayFirst ? null : YEARLESS_MONTH_FIRST.exec(words);
+  const month = MONTH_OF.get(dayFirst?.[2] ?? monthFirst?.[1] ?? '');
+  return month === undefined ? null : { month, day: Number(dayFirst?.[1] ?? monthFirst?.[2]) };
+}
+
+/** The day with this month and day that lies nearest to another; null = there is none. */
+export function nearestDay({ month, day }: { month: number; day: number }, near: Day): Day | null {
+  const year = calendarYearOf(near);
+  const all = [year - 1, year, year + 1].map((each) => dayFromParts(each, month, day));
+  return all.find((each) => each !== null && Math.abs(daysBetween(near, each)) <= HALF_YEAR) ?? null;
 }
 
 /** Does a cell look like a day, whether or not that day exists? */
@@ -74,6 +109,6 @@ export function looksLikeDay(text: string): boolean {
 
 /** The two numbers of `3/12/2018` that may be month and day; null where the text itself settles them. */
 export function unsettledParts(text: string): [first: number, second: number] | null {
-  const match = NUMERIC.exec(text.trim());
+  const match = NUMERIC.exec(text.trim()) ?? YEARLESS.exec(text.trim());
   return match && match[2] !== '.' ? [Number(match[1]), Number(match[3])] : null;
 }

@@ -6,7 +6,8 @@ export type DecimalMark = '.' | ',';
 export type Money = number | 'blank' | 'bad' | 'rough';
 
 const NOTHING = new Set(['-', '–', '—', 'n/a', 'na', 'free', 'none', 'gratis', 'umsonst', 'kostenlos', 'nil']);
-const ROUGH = /^(~|ca\.?|about|approx\.?)|(ish|\?|k)$|\d\s*[x×*]\s*\d/i;
+const ROUGH =
+  /^(?:~|≈|ca\.?|circa|about|approx\.?|around|roughly|etwa|rund|ungefähr|unos|aprox\.?|environ|env\.?)|(?:ish|\?|k|or so)$|\d\s*[x×*@]\s*\d/i;
 const SIGN = /[$€£¥]|\b(?:USD|EUR|GBP|CAD|AUD|NZD|CHF|SEK|NOK|DKK|PLN|CZK|MXN|Kč|kr|zł)\b\.?/gi;
 
 /** Reads money as typed, with this decimal mark. `isCostCell`: `-`, `n/a`, `free` mean that nothing was spent. */
@@ -21,6 +22,27 @@ export function moneyReader(decimal: DecimalMark): (text: string, isCostCell?: b
     if (cents !== null) return cents;
     return /\d/.test(trimmed) && ROUGH.test(trimmed) ? 'rough' : 'bad';
   };
+}
+
+const BEFORE =
+  /^(?:~|≈|ca\.?|circa|about|approx\.?|around|roughly|etwa|rund|ungefähr|unos|aprox\.?|environ|env\.?)\s*/i;
+const AFTER = /\s*(?:-?ish|\?+|or so|circa|ca\.?|approx\.?|k)$/i;
+const TIMES = /^(\d{1,3})\s*(?:[x×*@]|\bà)\s*(.+)$/i;
+
+/**
+ * Money that is only said roughly (`~200`, `1,300 ish`, `$1.2k`, `2x45`), in cents; null = not even that. What comes
+ * in by it is marked as a guess.
+ */
+export function aboutCents(text: string, decimal: DecimalMark): number | null {
+  const bare = text.trim().replace(SIGN, '').trim().replace(BEFORE, '').trim();
+  const times = TIMES.exec(bare);
+  if (times) {
+    const each = parseCents((times[2] ?? '').replace(AFTER, ''), decimal);
+    return each === null || Number(times[1]) === 0 ? null : Number(times[1]) * each;
+  }
+  const thousands = /^(\d{1,3})(?:[.,](\d{1,3}))?\s*k$/i.exec(bare);
+  if (thousands) return (Number(thousands[1]) * 1000 + Number((thousands[2] ?? '').padEnd(3, '0'))) * 100;
+  return parseCents(bare.replace(AFTER, '').replace(AFTER, ''), decimal);
 }
 
 /** `1234`, `1,234.5`, `$1,234.56` without a regular expression: most cells of a long file. −1 = another form. */

@@ -5,6 +5,7 @@ import type { VehicleTarget } from '../understand/vehicle-drafts.ts';
 import { placeOf, vehicleText } from '../understand/vehicle-columns.ts';
 import { type CategoryMeaning, PURCHASE, SALE } from '../words/categories.ts';
 import { categoryGuesser } from '../words/infer-category.ts';
+import { daysInOrder } from './days-in-order.ts';
 import type { Plan } from './plan.ts';
 
 /** Money of a cell: cents, nothing, or why it cannot be taken. */
@@ -17,6 +18,8 @@ export interface ExpenseCells {
   readonly on: Day | 'bad' | 'blank';
   readonly paid: CellMoney;
   readonly back: CellMoney;
+  /** An amount or a day is only said roughly. */
+  readonly isRough: boolean;
   readonly target: VehicleTarget | undefined;
   readonly meaning: CategoryMeaning | undefined;
   readonly what: string | null;
@@ -48,15 +51,19 @@ export type ExpenseColumns = ReturnType<typeof expenseColumns>;
 export function cellMoney(plan: Plan, cell: string): CellMoney {
   const value = plan.money(cell);
   if (typeof value === 'number') return plan.isForeign(cell) ? 'currency' : value;
-  return value === 'blank' ? 'blank' : value === 'rough' ? 'ambiguous-amount' : 'bad-amount';
+  if (value !== 'rough') return value === 'blank' ? 'blank' : 'bad-amount';
+  const about = plan.about(cell);
+  return about === null ? 'ambiguous-amount' : plan.isForeign(cell) ? 'currency' : about;
 }
+
+const isRough = (plan: Plan, cell: string) => cell !== '' && plan.money(cell) === 'rough';
 
 const kept = (cell: string) => cell.trim().normalize('NFC') || null;
 
 /** Reads the cells of one row, each on its own. */
 export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: readonly string[]) => ExpenseCells {
   const nameOf = vehicleText(plan.columns);
-  const dayOf = plan.days.get(cols.date) ?? (() => 'blank' as const);
+  const days = daysInOrder(plan, cols.date);
   const textOf = remembered(kept);
   const guess = categoryGuesser(plan.books.categories);
   const guessOf = remembered((what: string) => guess([what], null));
@@ -72,9 +79,10 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
     return {
       name,
       dateCell,
-      on: dayOf(dateCell),
+      on: days.next(dateCell),
       paid: cellMoney(plan, cell(cols.amount)),
       back: cellMoney(plan, cell(cols.credit)),
+      isRough: days.isGuess || isRough(plan, cell(cols.amount)) || isRough(plan, cell(cols.credit)),
       target: plan.vehicles.get(name),
       meaning: meaningOf(cell(cols.category).trim(), what),
       what,

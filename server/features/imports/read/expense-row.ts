@@ -1,6 +1,7 @@
 import { remembered } from '../cells/fold.ts';
 import { PURCHASE, SALE } from '../words/categories.ts';
 import { foreseenOf } from '../words/kinds.ts';
+import { isRefund } from '../words/refunds.ts';
 import { type ExpenseCells, expenseCellReader, expenseColumns, expenseFault } from './expense-cells.ts';
 import { type DraftLine, notData, type Plan, putAside, type RowRead, type RowReader, taken } from './plan.ts';
 import { filled, totalLabel } from './row-kinds.ts';
@@ -22,16 +23,25 @@ export function expenseRowReader(plan: Plan, sums: ColumnSums): RowReader {
     if (fault) return putAside(fault.reason, fault.col, readableCents(row));
     const came = said(cols.foreseen > 0 ? (cells[cols.foreseen - 1] ?? '').trim() : '');
     const lines: DraftLine[] = [];
-    if (typeof row.paid === 'number') lines.push(lineOf(row, row.paid, { line, col: cols.amount, ...came }));
-    if (typeof row.back === 'number') lines.push(lineOf(row, -row.back, { line, col: cols.credit, ...came }));
+    const isBack = row.back === 'blank' && isTypedPositive(row);
+    if (typeof row.paid === 'number')
+      lines.push(lineOf(row, isBack ? -row.paid : row.paid, { line, col: cols.amount, isBack, ...came }));
+    if (typeof row.back === 'number')
+      lines.push(lineOf(row, -row.back, { line, col: cols.credit, isBack: false, ...came }));
     return taken(lines);
   };
+}
+
+/** A refund whose words say so while its amount says nothing of it. */
+function isTypedPositive({ paid, what, meaning }: ExpenseCells): boolean {
+  const isFact = meaning?.category === PURCHASE || meaning?.category === SALE;
+  return typeof paid === 'number' && paid > 0 && !isFact && isRefund(what);
 }
 
 function lineOf(
   row: ExpenseCells,
   cents: number,
-  from: Pick<DraftLine, 'col' | 'foreseen' | 'isExtra'> & { line: number },
+  from: Pick<DraftLine, 'col' | 'foreseen' | 'isExtra'> & { line: number; isBack: boolean },
 ): DraftLine {
   const category = row.meaning?.category ?? '';
   const kind = category === PURCHASE ? 'purchase' : category === SALE ? 'sale' : 'entry';
@@ -48,7 +58,7 @@ function lineOf(
     foreseen: from.foreseen,
     isExtra: from.isExtra,
     person: null,
-    isGuess: !(row.meaning?.isSure ?? false),
+    isGuess: from.isBack || row.isRough || !(row.meaning?.isSure ?? false),
     row: from.line,
     col: from.col,
   };

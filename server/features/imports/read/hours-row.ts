@@ -1,5 +1,6 @@
-import { readHours } from '../cells/hours.ts';
+import { aboutHours, readHours } from '../cells/hours.ts';
 import { placeOf, vehicleText } from '../understand/vehicle-columns.ts';
+import { daysInOrder } from './days-in-order.ts';
 import { notData, type Plan, putAside, type RowReader, taken } from './plan.ts';
 import { filled, totalLabel } from './row-kinds.ts';
 import type { ColumnSums } from './sums.ts';
@@ -12,13 +13,15 @@ export function hoursRowReader(plan: Plan, sums: ColumnSums): RowReader {
   const [date, person, hours, task] = [at('date'), at('person'), at('hours'), at('task')];
   const nameCol = Math.max(at('vehicle'), at('stock number'), at('model')) + 1;
   const nameOf = vehicleText(plan.columns);
-  const dayOf = plan.days.get(date + 1) ?? (() => 'blank' as const);
+  const days = daysInOrder(plan, date + 1);
   const textAt = (cells: readonly string[], place: number) =>
     place < 0 ? null : (cells[place] ?? '').trim().normalize('NFC') || null;
   return (cells, line) => {
     const name = nameOf(cells);
     const dateCell = (cells[date] ?? '').trim();
-    const seconds = readHours(cells[hours] ?? '');
+    const exact = readHours(cells[hours] ?? '');
+    const about = exact === 'bad' ? aboutHours(cells[hours] ?? '') : null;
+    const seconds = about ?? exact;
     const label = dateCell === '' || name === '' ? totalLabel(cells) : undefined;
     if (label !== undefined) {
       sums.compare(cells, line, label);
@@ -26,7 +29,7 @@ export function hoursRowReader(plan: Plan, sums: ColumnSums): RowReader {
     }
     if (filled(cells) === 1 && seconds === 'blank') return notData('note');
     const target = plan.vehicles.get(name);
-    const on = dayOf(dateCell);
+    const on = days.next(dateCell);
     const [who, what] = [textAt(cells, person), textAt(cells, task)];
     const fault = plan.repeats.has(line)
       ? (['duplicate', hours + 1] as const)
@@ -59,7 +62,7 @@ export function hoursRowReader(plan: Plan, sums: ColumnSums): RowReader {
         foreseen: null,
         person: who,
         isExtra: false,
-        isGuess: false,
+        isGuess: about !== null || days.isGuess,
         row: line,
         col: hours + 1,
       },

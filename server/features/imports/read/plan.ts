@@ -2,6 +2,7 @@ import type { Choice, Column, Line, StatedTotal } from '#shared/contracts/import
 import type { AsideReason, NotData, Outcome, Shape } from '#shared/contracts/import-words.ts';
 import type { Day } from '#shared/day.ts';
 import type { ShopBooks } from '../books.ts';
+import type { DateOrder } from '../cells/days.ts';
 import type { DecimalMark, Money } from '../cells/money.ts';
 import type { VehicleTarget } from '../understand/vehicle-drafts.ts';
 import type { CategoryMeaning } from '../words/categories.ts';
@@ -34,6 +35,10 @@ export interface Plan {
   readonly heading: Heading;
   readonly books: ShopBooks;
   readonly money: (text: string, isCostCell?: boolean) => Money;
+  /** Money that is only said roughly; null = not even that. */
+  readonly about: (text: string) => number | null;
+  /** The order of day and month in each date column, by column number. */
+  readonly orders: ReadonlyMap<number, DateOrder>;
   /** Reader of each date column, by column number. */
   readonly days: ReadonlyMap<number, (text: string) => Day | 'bad' | 'blank'>;
   readonly vehicles: ReadonlyMap<string, VehicleTarget>;

@@ -1,6 +1,6 @@
 import type { Column, Meaning, RebuildFound } from '#shared/contracts/import-reading.ts';
 import type { AsideReason } from '#shared/contracts/import-words.ts';
-import { readHours } from '../cells/hours.ts';
+import { aboutHours, readHours } from '../cells/hours.ts';
 import { remembered } from '../cells/fold.ts';
 import { classReader, damageReader, yesOrNo } from '../words/kinds.ts';
 import type { CellAside, Plan } from './plan.ts';
@@ -10,6 +10,8 @@ export interface Figure {
   readonly column: Column;
   readonly cents: number;
   readonly seconds: number;
+  /** It is only said roughly. */
+  readonly isGuess: boolean;
 }
 
 /** What the cells of one vehicle's row say. */
@@ -71,19 +73,25 @@ function take<T>(value: T | 'bad' | 'blank' | null, keep: (value: T) => void, re
 
 function moneyTaker(plan: Plan, column: Column): Take {
   return (cell, row) => {
-    const cents = plan.money(cell, true);
+    const exact = plan.money(cell, true);
+    const isGuess = exact === 'rough';
+    const cents = isGuess ? (plan.about(cell) ?? 'rough') : exact;
     if (cents === 'blank') return null;
     if (cents === 'rough') return 'ambiguous-amount';
     if (cents === 'bad' || (cents < 0 && !MAY_BE_CREDIT.has(column.meaning))) return 'bad-amount';
     if (plan.isForeign(cell)) return 'currency';
-    if (cents !== 0) row.figures.push({ column, cents, seconds: 0 });
+    if (cents !== 0) row.figures.push({ column, cents, seconds: 0, isGuess });
     return null;
   };
 }
 
 function hoursTaker(column: Column): Take {
-  return (cell, row) =>
-    take(readHours(cell), (seconds) => row.figures.push({ column, cents: 0, seconds }), 'bad-hours');
+  return (cell, row) => {
+    const exact = readHours(cell);
+    const about = exact === 'bad' ? aboutHours(cell) : null;
+    const keep = (seconds: number) => row.figures.push({ column, cents: 0, seconds, isGuess: about !== null });
+    return take(about ?? exact, keep, 'bad-hours');
+  };
 }
 
 function textTaker(field: keyof RebuildFound): Take {

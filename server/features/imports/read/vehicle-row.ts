@@ -116,7 +116,7 @@ const KINDS = {
   'expected sale': 'expected sale',
 } as const;
 
-function lineOf({ column, cents, seconds }: Figure, draft: Draft, row: VehicleCells, line: number): DraftLine {
+function lineOf({ column, cents, seconds, isGuess }: Figure, draft: Draft, row: VehicleCells, line: number): DraftLine {
   const kind = KINDS[column.meaning as keyof typeof KINDS];
   const on = kind === 'purchase' ? row.dates.boughtOn : kind === 'sale' ? row.dates.soldOn : undefined;
   return {
@@ -131,7 +131,7 @@ function lineOf({ column, cents, seconds }: Figure, draft: Draft, row: VehicleCe
     foreseen: null,
     person: null,
     isExtra: false,
-    isGuess: false,
+    isGuess,
     row: line,
     col: column.col,
   };

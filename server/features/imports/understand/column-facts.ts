@@ -1,4 +1,4 @@
-import { looksLikeDay } from '../cells/days.ts';
+import { looksLikeDay, looksLikeSerial, yearlessParts } from '../cells/days.ts';
 import { readHours } from '../cells/hours.ts';
 import { looksLikeMoney, saysNothing } from '../cells/money.ts';
 import type { Head } from './head.ts';
@@ -11,6 +11,8 @@ export interface ColumnFacts {
   readonly filled: number;
   readonly money: number;
   readonly day: number;
+  /** Days without a year, and numbers that may be days: they count where the heading speaks of days. */
+  readonly maybeDay: number;
   readonly modelYear: number;
   readonly hours: number;
   /** Share of different texts among the filled cells. */
@@ -34,6 +36,7 @@ export function columnFacts(head: Head): ColumnFacts[] {
       filled: cells.length,
       money: share((cell) => looksLikeMoney(cell) && !looksLikeDay(cell)),
       day: share(looksLikeDay),
+      maybeDay: share((cell) => looksLikeSerial(cell) || yearlessParts(cell, 'MDY') !== null),
       modelYear: share((cell) => MODEL_YEAR.test(cell)),
       hours: share((cell) => typeof readHours(cell) === 'number'),
       distinct: cells.length ? new Set(cells).size / cells.length : 0,
@@ -45,6 +48,6 @@ export function columnFacts(head: Head): ColumnFacts[] {
 const MOSTLY = 0.5;
 
 export const holdsMoney = (facts: ColumnFacts) => facts.filled === 0 || facts.money >= MOSTLY;
-export const holdsDays = (facts: ColumnFacts) => facts.filled === 0 || facts.day >= MOSTLY;
+export const holdsDays = (facts: ColumnFacts) => facts.filled === 0 || facts.day + facts.maybeDay >= MOSTLY;
 export const holdsHours = (facts: ColumnFacts) => facts.filled === 0 || facts.hours >= MOSTLY;
 export const holdsText = (facts: ColumnFacts) => facts.filled === 0 || (facts.money < MOSTLY && facts.day < MOSTLY);

@@ -3,7 +3,7 @@ import type { Shape } from '#shared/contracts/import-words.ts';
 import type { ShopBooks } from '../books.ts';
 import { type DateOrder, dayReader } from '../cells/days.ts';
 import { remembered } from '../cells/fold.ts';
-import { currenciesIn, type DecimalMark, moneyReader } from '../cells/money.ts';
+import { aboutCents, currenciesIn, type DecimalMark, moneyReader } from '../cells/money.ts';
 import type { FilePlan, Plan } from '../read/plan.ts';
 import { categoryWords } from './category-words.ts';
 import { commonOrder, dateOrders } from './date-order.ts';
@@ -47,6 +47,8 @@ export function makeFilePlan(tables: readonly SurveyedTable[], shape: Shape, { b
       heading: guess.heading,
       books,
       money: moneyReader(decimal),
+      about: (text) => aboutCents(text, decimal),
+      orders: settled.orders,
       days: settled.days,
       vehicles: vehicles.of,
       rowDrafts: new Map(
@@ -83,7 +85,7 @@ function mentioned(tables: readonly SurveyedTable[]): Map<string, number> {
 /** Days, categories and repeats of one sheet. */
 function settle(guess: TableGuess, found: Survey, { books, answers }: Known, order: DateOrder | null) {
   if (guess.shape === null) {
-    return { days: new Map(), categories: new Map(), repeats: new Set<number>(), choices: [] };
+    return { orders: new Map(), days: new Map(), categories: new Map(), repeats: new Set<number>(), choices: [] };
   }
   const dates = dateOrders(guess.columns, found.dates, books.locale, answers, order);
   const words =
@@ -93,6 +95,7 @@ function settle(guess: TableGuess, found: Survey, { books, answers }: Known, ord
   const id = guess.sheet.number === 1 ? 'duplicate' : `duplicate:${guess.sheet.number}`;
   const repeat = repeatChoice(id, found.repeats.size, guess.sheet.name, answers);
   return {
+    orders: dates.orders,
     days: new Map([...dates.orders].map(([col, each]) => [col, remembered(dayReader(each, books.today))])),
     categories: words.of,
     repeats: answers.get(id) === 'twice' ? new Set<number>() : found.repeats,

@@ -1,0 +1,116 @@
+import type { Meaning } from '#shared/contracts/import-reading.ts';
+import { aboutHours, readHours } from '../cells/hours.ts';
+import { PURCHASE, SALE, tradeMeaning } from '../words/categories.ts';
+import { categoryGuesser } from '../words/infer-category.ts';
+import { isRefund } from '../words/refunds.ts';
+import { daysInOrder } from './days-in-order.ts';
+import type { Draft } from './draft.ts';
+import { cellMoney } from './expense-cells.ts';
+import { type DraftLine, notData, type Plan, putAside, type RowRead, taken } from './plan.ts';
+import { filled } from './row-kinds.ts';
+import { looseColumns, type SectionColumns } from './section-columns.ts';
+
+/** The part of a sheet that a row stands in. */
+export interface Section {
+  readonly category: string | null;
+  readonly isOwnWork: boolean;
+  /** null = no headings stand above its rows. */
+  readonly columns: SectionColumns | null;
+}
+
+const LONGEST = 200;
+
+/** Reads one row of a section as a cost, a piece of own work, or the sale of its vehicle. */
+export function sectionLineReader(plan: Plan) {
+  const categoryFor = categoryGuesser(plan.books.categories);
+  const days = daysInOrder(plan, 1);
+  const cellsOf = sectionCellReader(plan);
+
+  return (cells: readonly string[], line: number, section: Section, draft: Draft): RowRead => {
+    const row = cellsOf(cells, section);
+    const on = days.next(row.date);
+    const fault = faultOf(row, on === 'bad');
+    if (plan.repeats.has(line)) return putAside('duplicate', row.amountCol, row.cents);
+    if (fault) return fault;
+    if (row.cents === null && row.seconds === null) return unread(cells, row, section);
+    const { category, isSure } = categoryFor([row.category, row.what], section.category);
+    const kind = row.isWork ? 'hours' : row.isSale ? 'sale' : kindOf(category);
+    const cents = row.isWork ? 0 : (row.cents ?? 0);
+    const isBack = kind === 'entry' && cents > 0 && isRefund(row.what);
+    const made: DraftLine = {
+      kind,
+      draft,
+      category: kind === 'entry' ? category : null,
+      on: on === 'blank' || on === 'bad' ? null : on,
+      cents: kind === 'sale' ? Math.abs(cents) : isBack ? -cents : cents,
+      seconds: row.isWork ? (row.seconds ?? 0) : 0,
+      vendor: row.isWork ? null : row.vendor,
+      what: row.what,
+      foreseen: null,
+      isExtra: false,
+      person: row.isWork ? row.person : null,
+      isGuess: row.isRough || days.isGuess || isBack || (kind === 'entry' && !isSure),
+      row: line,
+      col: row.col,
+    };
+    return taken([made]);
+  };
+}
+
+const kindOf = (category: string) => (category === SALE ? 'sale' : category === PURCHASE ? 'purchase' : 'entry');
+type SectionCells = ReturnType<ReturnType<typeof sectionCellReader>>;
+
+function sectionCellReader(plan: Plan) {
+  return (cells: readonly string[], { columns, isOwnWork }: Section) => {
+    const isSale = isSaleRow(cells);
+    const at = (isSale ? null : columns) ?? looseColumns(cells);
+    const cell = (meaning: Meaning) => (cells[at.get(meaning) ?? -1] ?? '').trim();
+    const text = (meaning: Meaning) => cell(meaning).normalize('NFC') || null;
+    const col = (meaning: Meaning) => (at.get(meaning) ?? -1) + 1;
+    const time = at.has('hours') ? cell('hours') : isOwnWork ? cell('amount') : '';
+    const exact = readHours(time);
+    const seconds = exact === 'bad' ? aboutHours(time) : exact;
+    const paid = cellMoney(plan, cell('amount'));
+    const back = cellMoney(plan, cell('credit'));
+    const isWork = !isSale && (isOwnWork || (at.has('hours') && typeof paid !== 'number' && time !== ''));
+    const amountCol = (typeof paid === 'number' || paid !== 'blank' ? col('amount') : col('credit')) || null;
+    return {
+      isSale,
+      isWork,
+      date: cell('date'),
+      seconds: typeof seconds === 'number' ? seconds : null,
+      isBadTime: exact === 'bad' && seconds === null,
+      cents: typeof paid === 'number' ? paid : typeof back === 'number' ? -back : null,
+      badMoney: typeof paid === 'string' && paid !== 'blank' ? paid : null,
+      isRough: isWork ? exact === 'bad' : plan.money(cell('amount')) === 'rough',
+      what: text(isWork ? 'task' : 'what') ?? text(isWork ? 'what' : 'task'),
+      category: text('category'),
+      vendor: text('vendor'),
+      person: text('person') ?? (at.has('hours') ? null : text('vendor')),
+      amountCol,
+      col: (isWork && at.has('hours') ? col('hours') : amountCol) ?? 1,
+    };
+  };
+}
+
+function faultOf(row: SectionCells, isBadDay: boolean): RowRead | null {
+  if (!row.isWork && row.badMoney) return putAside(row.badMoney, row.amountCol, null);
+  if (row.isWork && row.isBadTime) return putAside('bad-hours', row.col, null);
+  if (row.cents === null && row.seconds === null) return null;
+  if (isBadDay) return putAside('bad-date', null, row.isWork ? null : row.cents);
+  const isLong = Math.max(row.what?.length ?? 0, row.vendor?.length ?? 0, row.person?.length ?? 0) > LONGEST;
+  return isLong ? putAside('cell-too-long', null, row.cents) : null;
+}
+
+/** Does the first word of a row say that it is the sale? */
+function isSaleRow(cells: readonly string[]): boolean {
+  const first = cells.find((cell) => cell.trim() !== '') ?? '';
+  const meaning = tradeMeaning(first.replace(/:\s*$/, ''));
+  return meaning?.meaning === SALE && meaning.isExact;
+}
+
+/** A row without figures is a note, unless it stands in a table and names a day. */
+function unread(cells: readonly string[], row: SectionCells, { columns }: Section): RowRead {
+  const isMeant = columns !== null && filled(cells) > 1 && row.date !== '';
+  return isMeant ? putAside(row.isWork ? 'bad-hours' : 'missing-amount', row.col, null) : notData('note');
+}

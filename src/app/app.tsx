@@ -1,6 +1,7 @@
 import { QueryClientProvider } from '@tanstack/react-query';
 import { useState } from 'react';
 import { BrowserRouter } from 'react-router-dom';
+import '../lib/step-gate.ts';
 import { createQueryClient } from '../lib/query-client.ts';
 import { ErrorBoundary } from '../ui/error-boundary.tsx';
 import { Doorway } from './doorway.tsx';

@@ -1,3 +1,4 @@
+import { gateSteps } from '../lib/step-gate.ts';
 import { hasUnsaved, leaveBy } from '../lib/unsaved.ts';
 
 type Place = { pathname: string; index: number };
@@ -41,11 +42,11 @@ export function watchLeaving(navigate: (to: string) => void, shown: () => Place)
     if (hasUnsaved()) event.preventDefault();
   };
   document.addEventListener('click', onClick, true);
-  window.addEventListener('popstate', onStep, true);
+  const endGate = gateSteps(onStep);
   window.addEventListener('beforeunload', onUnload);
   return () => {
     document.removeEventListener('click', onClick, true);
-    window.removeEventListener('popstate', onStep, true);
+    endGate();
     window.removeEventListener('beforeunload', onUnload);
   };
 }

@@ -38,7 +38,11 @@ export function listStore(scope: ShopScope) {
 
   /** Numbers a list anew from 0, with the moved word at its place. The others only make room: their version stays. */
   async function makeRoom(table: string, moved: ListItem): Promise<void> {
-    const others: { id: string }[] = await scope.table(table).whereNot({ id: moved.id }).orderBy('position').select('id');
+    const others: { id: string }[] = await scope
+      .table(table)
+      .whereNot({ id: moved.id })
+      .orderBy('position')
+      .select('id');
     const order = others.toSpliced(moved.position, 0, moved);
     for (const [position, { id }] of order.entries()) await scope.table(table).where({ id }).update({ position });
   }

@@ -57,7 +57,12 @@ describe('the shop', () => {
     const api = await testApi();
     const ada = await api.owner();
     const classes = async () =>
-      (await ada.get('/api/shop/lists')).body.classes as { id: string; name: string; position: number; version: number }[];
+      (await ada.get('/api/shop/lists')).body.classes as {
+        id: string;
+        name: string;
+        position: number;
+        version: number;
+      }[];
     const [first, second, third, fourth] = await classes();
     await ada.patch(`/api/shop/lists/classes/${second?.id}`, 1, { isRetired: true });
     const moved = await ada.patch(`/api/shop/lists/classes/${first?.id}`, 1, { position: 2 });

@@ -66,6 +66,8 @@ export const rebuildChangeSchema = rebuildFieldsSchema.partial();
 
 export const rebuildSchema = z.object({
   ...rebuildFieldsSchema.shape,
+  /** Nobody may type one below zero, but a file may hold more refunds of a price than price; then it is shown so. */
+  purchaseCents: centsSchema.nullable(),
   id: idSchema,
   importId: idSchema.nullable(),
   importSheet: z.int().nullable(),

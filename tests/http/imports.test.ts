@@ -107,6 +107,21 @@ describe('bringing a file in', () => {
     expect((await ada.get('/api/entries')).body.totals).toMatchObject({ count: 1, cents: 1000 });
   });
 
+  it('shows a price of which more came back than was paid, so that it can be put right', async () => {
+    const api = await testApi();
+    const ada = await api.owner();
+    await broughtIn(
+      ada,
+      expenseList('1/22/2020,13 F-150,Purchase,refund,-10.00', '1/23/2020,13 F-150,Parts,door,5.00'),
+    );
+    const [row] = (await ada.get('/api/rebuilds')).body.rows;
+    const { status, body } = await ada.get(`/api/rebuilds/${row.id}`);
+    expect([status, body.rebuild.purchaseCents]).toEqual([200, -1000]);
+    expect((await ada.patch(`/api/rebuilds/${row.id}`, body.rebuild.version, { purchaseCents: 1000 })).status).toBe(
+      200,
+    );
+  });
+
   it('asks what the file cannot tell, and books nothing before it is answered', async () => {
     const api = await testApi();
     const ada = await api.owner();

@@ -66,11 +66,14 @@ function Words({ bars, format }: Omit<Props, 'caption'>) {
     <g>
       <line x1={0} x2={width} y1={zero} y2={zero} className="zero-line" shapeRendering="crispEdges" />
       {bars.map((bar) => {
+        const middle = Number(xScale(bar.year)) + half;
         const end = Number(yScale(bar.cents));
+        // Before its bars are known the chart has no place for a year.
+        if (!Number.isFinite(middle) || !Number.isFinite(end)) return null;
         return (
           <g
             key={bar.year}
-            transform={`translate(${Number(xScale(bar.year)) + half} 0)`}
+            transform={`translate(${middle} 0)`}
             textAnchor="middle"
             className={bar.isShown ? 'strong' : ''}
           >

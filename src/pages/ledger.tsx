@@ -46,7 +46,7 @@ export function LedgerPage() {
             ) : (
               <EmptyState
                 title="Every cost and credit will stand here"
-                action={<LinkButton to={`/s/${shop.id}/import`}>Bring in an old spreadsheet</LinkButton>}
+                action={<LinkButton to={`/s/${shop.id}/import`}>Import a spreadsheet</LinkButton>}
               >
                 Type the first line above, or bring in what you have kept so far.
               </EmptyState>

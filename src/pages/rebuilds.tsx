@@ -66,7 +66,7 @@ function RebuildList() {
           action={
             canWrite && (
               <LinkButton kind="main" to={`/s/${shop.id}/import`}>
-                Bring in an old spreadsheet
+                Import a spreadsheet
               </LinkButton>
             )
           }

@@ -160,8 +160,5 @@ describe('an entry of the list', () => {
 it('an empty ledger says what will stand there and leads to the import', async () => {
   await openLedger();
   expect(await screen.findByText('Every cost and credit will stand here')).toBeInTheDocument();
-  expect(screen.getByRole('link', { name: 'Bring in an old spreadsheet' })).toHaveAttribute(
-    'href',
-    `/s/${idOf('s')}/import`,
-  );
+  expect(screen.getByRole('link', { name: 'Import a spreadsheet' })).toHaveAttribute('href', `/s/${idOf('s')}/import`);
 });

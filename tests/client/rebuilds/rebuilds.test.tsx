@@ -66,7 +66,7 @@ describe('the list of rebuilds', () => {
 
   it('leads an empty shop to the import, and an empty filter back to everything', async () => {
     openList([], {});
-    expect(await screen.findByRole('link', { name: 'Bring in an old spreadsheet' })).toBeInTheDocument();
+    expect(await screen.findByRole('link', { name: 'Import a spreadsheet' })).toBeInTheDocument();
   });
 
   it('shows that nothing matches a filter of the address', async () => {

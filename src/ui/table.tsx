@@ -94,7 +94,7 @@ export function Foot<Row>(props: {
           </td>
         ))}
       </tr>
-      {moved.some(({ id }) => foot[id]) && <UnderRow {...props} valueOf={({ id }) => foot[id]} />}
+      {moved.some(({ id }) => Boolean(foot[id])) && <UnderRow {...props} valueOf={({ id }) => foot[id]} />}
     </tfoot>
   );
 }

@@ -38,7 +38,8 @@ function ToastList() {
       <Toast.Content className="flex items-center gap-4 py-2 pr-2 pl-4">
         <div className="min-w-0 flex-1">
           <Toast.Title className="font-semibold">
-            {toast.type === 'wrong' ? `Not done: ${toast.title}` : toast.title}
+            {toast.type === 'wrong' && 'Not done: '}
+            {toast.title}
           </Toast.Title>
           <Toast.Description className="text-label" />
         </div>

@@ -52,7 +52,7 @@ export async function duckDb(rebuilds: readonly InventedRebuild[], lines: readon
   return {
     /** Runs every query of a question and fetches its rows. */
     async ask(question: keyof typeof DUCK_QUESTIONS): Promise<void> {
-      for (const sql of DUCK_QUESTIONS[question]) await (await db.runAndReadAll(sql)).getRows();
+      for (const sql of DUCK_QUESTIONS[question]) (await db.runAndReadAll(sql)).getRows();
     },
     close(): void {
       db.closeSync();

@@ -89,7 +89,7 @@ describe('overruns', () => {
       surpriseShare: 1,
     });
     expect(answer.marks).toBe('each');
-    expect(answer.total.dots.map(({ tag, over, rate }) => [tag, over, rate]).toSorted()).toEqual([
+    expect(answer.total.dots.map(({ tag, over, rate }) => [tag, over, rate])).toEqual([
       ['S-1', 0, 0],
       ['S-2', 100_000, 1],
       ['S-3', 40_000, 0.5],

@@ -33,7 +33,7 @@ test('a press on a heading sorts, a second one turns it round, and nothing stays
   const first = head.getAttribute('aria-sort');
   const once = order();
   await userEvent.click(within(head).getByRole('button'));
-  expect([first, head.getAttribute('aria-sort')].sort()).toEqual(['ascending', 'descending']);
+  expect(new Set([first, head.getAttribute('aria-sort')])).toEqual(new Set(['ascending', 'descending']));
   expect(once.at(-1)).toBe('B-1');
   expect(order()).toEqual([once[1], once[0], 'B-1']);
 });

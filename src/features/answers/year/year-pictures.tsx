@@ -87,6 +87,7 @@ function stepCaption({ keptCents, before, isRunning, year }: YearAnswer, format:
 }
 
 function moneySubtitle({ n }: YearAnswer, format: Formatter): string {
+  if (n === 0) return 'No rebuild left';
   return n === 1 ? 'The one rebuild that left' : `${capital(counted(format, n))} that left, all together`;
 }
 

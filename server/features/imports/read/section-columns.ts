@@ -39,11 +39,20 @@ export function sectionColumns(cells: readonly string[], isOwnWork: boolean): Se
   return known >= 2 && known >= filled(cells) / 2 && isTable ? columns : null;
 }
 
-/** Where a row without headings above it holds its parts: the first day, the last amount, the texts in order. */
+/**
+ * Where a row without headings above it holds its parts: the first day, the last amount, the texts in order. A label
+ * right before the amount (`Buyer fee:`) says what it was.
+ */
 export function looseColumns(cells: readonly string[]): SectionColumns {
   const columns = new Map<Meaning, number>();
+  let label = -1;
   for (const [at, cell] of cells.entries()) {
     if (cell.trim() === '') continue;
+    if (looksLikeMoney(cell) && !looksLikeDay(cell) && label > 0) {
+      columns.set('what', label);
+      if (columns.get('vendor') === label) columns.delete('vendor');
+    }
+    label = /:\s*$/.test(cell) ? at : -1;
     if (looksLikeDay(cell)) {
       if (!columns.has('date')) columns.set('date', at);
     } else if (looksLikeMoney(cell)) columns.set('amount', at);

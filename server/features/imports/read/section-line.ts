@@ -33,7 +33,7 @@ export function sectionLineReader(plan: Plan) {
     if (plan.repeats.has(line)) return putAside('duplicate', row.amountCol, row.cents);
     if (fault) return fault;
     if (row.cents === null && row.seconds === null) return unread(cells, row, section);
-    const { category, isSure } = categoryFor([row.category, row.what], section.category);
+    const { category, isSure } = categoryFor([row.category, row.what, row.first], section.category);
     const kind = row.isWork ? 'hours' : row.isSale ? 'sale' : kindOf(category);
     const cents = row.isWork ? 0 : (row.cents ?? 0);
     const isBack = kind === 'entry' && cents > 0 && isRefund(row.what);
@@ -77,7 +77,7 @@ function sectionCellReader(plan: Plan) {
     return {
       isSale,
       isWork,
-      date: cell('date'),
+      date: cell('date') || (columns ? '' : dayInside(cells)),
       seconds: typeof seconds === 'number' ? seconds : null,
       isBadTime: exact === 'bad' && seconds === null,
       cents: typeof paid === 'number' ? paid : typeof back === 'number' ? -back : null,
@@ -85,6 +85,7 @@ function sectionCellReader(plan: Plan) {
       isRough: isWork ? exact === 'bad' : plan.money(cell('amount')) === 'rough',
       what: text(isWork ? 'task' : 'what') ?? text(isWork ? 'what' : 'task'),
       category: text('category'),
+      first: columns ? null : (cells.find((one) => one.trim() !== '')?.trim() ?? null),
       vendor: text('vendor'),
       person: text('person') ?? (at.has('hours') ? null : text('vendor')),
       amountCol,
@@ -102,10 +103,16 @@ function faultOf(row: SectionCells, isBadDay: boolean): RowRead | null {
   return isLong ? putAside('cell-too-long', null, row.cents) : null;
 }
 
+/** A day that stands beside words in one cell: `sold 6/19/2019`. '' = none. */
+function dayInside(cells: readonly string[]): string {
+  const first = cells.find((cell) => cell.trim() !== '') ?? '';
+  return /\d{4}-\d\d-\d\d|\d{1,2}[-/.]\d{1,2}[-/.]\d{2,4}/.exec(first)?.[0] ?? '';
+}
+
 /** Does the first word of a row say that it is the sale? */
 function isSaleRow(cells: readonly string[]): boolean {
   const first = cells.find((cell) => cell.trim() !== '') ?? '';
-  const meaning = tradeMeaning(first.replace(/:\s*$/, ''));
+  const meaning = tradeMeaning(first.replace(/[\d/.:-]+/g, ' '));
   return meaning?.meaning === SALE && meaning.isExact;
 }
 

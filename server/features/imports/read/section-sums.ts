@@ -1,6 +1,7 @@
 import { readHours } from '../cells/hours.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import { fold } from '../cells/fold.ts';
+import { isFigure } from './sheet-words.ts';
 import type { Plan, RowRead } from './plan.ts';
 import { type ColumnSums, explain } from './sums.ts';
 
@@ -34,8 +35,8 @@ export function sectionSums(plan: Plan, sums: ColumnSums) {
       }
     },
     /** Holds a row of totals against what came in since the last one, or for the whole vehicle. */
-    compare(cells: readonly string[], row: number, label: string): void {
-      const isHours = HOURS.test(fold(label));
+    compare(cells: readonly string[], row: number, label: string, isOwnWork: boolean): void {
+      const isHours = HOURS.test(fold(label)) || (isOwnWork && !cells.some(isFigure));
       const col = cells.findLastIndex((cell) => looksLikeMoney(cell)) + 1;
       const value = isHours ? readHours(cells[col - 1] ?? '') : plan.money(cells[col - 1] ?? '');
       const sum = isHours ? hours : money;

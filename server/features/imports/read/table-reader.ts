@@ -1,6 +1,7 @@
 import type { StatedTotal } from '#shared/contracts/import-reading.ts';
 import { readHours } from '../cells/hours.ts';
 import { expenseRowReader } from './expense-row.ts';
+import { hoursGridReader, weekdayColumns } from './hours-grid.ts';
 import { hoursRowReader } from './hours-row.ts';
 import { looseRowReader } from './loose-row.ts';
 import type { Plan, RowRead, RowReader } from './plan.ts';
@@ -27,7 +28,8 @@ function readerOf(plan: Plan, sums: ColumnSums): RowReader {
   if (plan.shape === null) return looseRowReader(plan);
   if (plan.shape === 'vehicle sheet') return vehicleSheetReader(plan, sums);
   if (plan.shape === 'vehicles') return vehicleRowReader(plan, sums);
-  return plan.shape === 'hours' ? hoursRowReader(plan, sums) : expenseRowReader(plan, sums);
+  if (plan.shape === 'expenses') return expenseRowReader(plan, sums);
+  return weekdayColumns(plan).length > 1 ? hoursGridReader(plan, sums) : hoursRowReader(plan, sums);
 }
 
 function summedColumns(plan: Plan): SummedColumn[] {

@@ -4,6 +4,7 @@ import { fold } from '../cells/fold.ts';
 import { SUM_OF_COSTS } from '../understand/derived.ts';
 import { existingFinder } from '../understand/existing-finder.ts';
 import { placeOf, vehicleName } from '../understand/vehicle-columns.ts';
+import { readVehicle } from '../understand/vehicle-text.ts';
 import { type Draft, newDraft, tagMaker } from './draft.ts';
 import { type DraftLine, notData, type Plan, putAside, type RowReader, taken } from './plan.ts';
 import { totalLabel } from './row-kinds.ts';
@@ -17,6 +18,7 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
   const findExisting = existingOf(plan);
   const tagFor = tagMaker(plan.books.rebuilds.map((rebuild) => rebuild.tag));
   const seen = new Set<string>();
+  const named = namer(plan);
   const hasStock = placeOf(plan.columns, 'stock number') >= 0;
   const summing = plan.columns.filter((column) => column.meaning === 'derived' && column.why === SUM_OF_COSTS);
   const addAll = (row: VehicleCells, isTaken: boolean) => {
@@ -49,10 +51,20 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
     const sold = settleSale(row, plan.columns);
     addAll(row, true);
     const draft = known ?? newDraft(existing ? existing.tag : tagFor(name), existing, line);
-    Object.assign(draft.found, sold.known, { spellings: [...draft.found.spellings, name] });
+    Object.assign(draft.found, named(name, sold.known), sold.known, { spellings: [...draft.found.spellings, name] });
     Object.assign(draft.found.dates, sold.dates);
     checkRepeated(plan, sums, cells, line);
     return { ...taken(sold.figures.map((figure) => lineOf(figure, draft, row, line))), cells: sold.asides, draft };
+  };
+}
+
+/** Year, make and model out of what a row calls its vehicle, when no column of their own holds them. */
+function namer(plan: Plan): (name: string, known: VehicleCells['known']) => Partial<VehicleCells['known']> {
+  const thisYear = Number(plan.books.today.slice(0, 4));
+  return (name, known) => {
+    if (known.model || known.year) return {};
+    const { year, make, model } = readVehicle(name, thisYear);
+    return year === null || model === null ? {} : { year, make, model };
   };
 }
 

@@ -44,7 +44,7 @@ export function vehicleSheetReader(plan: Plan, sums: ColumnSums): RowReader {
     const label = totalLabel(cells);
     const [first = ''] = cells.filter((cell) => cell.trim() !== '');
     if (label !== undefined || headingMeanings(first).includes('derived')) {
-      totals.compare(cells, line, label ?? first);
+      totals.compare(cells, line, label ?? first, state.section.isOwnWork);
       return notData('total');
     }
     if (filled(cells) === 1 && !isFigure(first) && first.length <= LONGEST_SECTION) {

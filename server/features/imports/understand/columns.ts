@@ -2,7 +2,8 @@ import type { Column, Meaning } from '#shared/contracts/import-reading.ts';
 import type { Shape } from '#shared/contracts/import-words.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 import { type CategoryMeaning, PURCHASE, SALE } from '../words/categories.ts';
-import { headingMeanings, plannedPart } from '../words/headings.ts';
+import { weekdayOf } from '../words/weekdays.ts';
+import { headingMeanings, likelyMeanings, plannedPart } from '../words/headings.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
 
 type CategoryReader = (text: string) => CategoryMeaning | null;
@@ -54,7 +55,7 @@ const REPEATABLE = new Set<Meaning>(['ignore', 'derived', 'notes']);
 /** Do the cells of a column suit what its heading says? */
 function fits(meaning: Meaning, facts: ColumnFacts): boolean {
   if (DATES.has(meaning)) return holdsDays(facts);
-  if (HOURS.has(meaning)) return holdsHours(facts);
+  if (HOURS.has(meaning)) return holdsHours(facts) || weekdayOf(facts.heading) !== null;
   if (meaning === 'year') return facts.filled === 0 || facts.modelYear >= 0.6;
   if (NUMBERS.has(meaning)) return meaning === 'vin' || facts.day < 0.6 || meaning === 'derived';
   return MONEY.has(meaning) ? holdsMoney(facts) : holdsText(facts);
@@ -70,18 +71,23 @@ export function guessColumns(
   const used = new Set<Meaning>();
   const columns = all.map((facts): Column => {
     const guess = shape === 'vehicles' ? guessOfVehicles(facts, used, categoryOf) : guessByHeading(facts, used, shape);
-    if (!REPEATABLE.has(guess.meaning) && guess.category === null) used.add(guess.meaning);
+    const isRepeatable = REPEATABLE.has(guess.meaning) || weekdayOf(facts.heading) !== null;
+    if (!isRepeatable && guess.category === null) used.add(guess.meaning);
     return { sheet, col: facts.col, heading: facts.heading, samples: [...facts.samples], ...guess };
   });
   return shape === 'vehicles' ? columns : describedBy(columns, all, shape === 'hours' ? 'task' : 'what');
 }
+
+// No list has a place of its own for notes.
+const UNREAD = new Set<Meaning>(['ignore', 'notes']);
 
 /** A list without a column that says what each row was for takes the wordiest one that nothing else explains. */
 function describedBy(columns: Column[], all: readonly ColumnFacts[], meaning: 'what' | 'task'): Column[] {
   if (columns.some((column) => column.meaning === meaning)) return columns;
   const [wordiest] = all
     .filter(
-      (facts, i) => columns[i]?.meaning === 'ignore' && facts.filled > 0 && facts.heading !== '' && holdsText(facts),
+      (facts, i) =>
+        UNREAD.has(columns[i]?.meaning ?? 'ignore') && facts.filled > 0 && facts.heading !== '' && holdsText(facts),
     )
     .sort((a, b) => b.distinct - a.distinct);
   const why = 'It holds words that no other column explains.';
@@ -91,9 +97,14 @@ function describedBy(columns: Column[], all: readonly ColumnFacts[], meaning: 'w
 type Guess = Pick<Column, 'meaning' | 'category' | 'why'>;
 const ignored = (why: string): Guess => ({ meaning: 'ignore', category: null, why });
 
-function guessByHeading(facts: ColumnFacts, used: Set<Meaning>, shape: Shape): Guess {
+function guessByHeading(
+  facts: ColumnFacts,
+  used: Set<Meaning>,
+  shape: Shape,
+  meaningsOf: (heading: string) => readonly Meaning[] = shape === 'vehicles' ? headingMeanings : likelyMeanings,
+): Guess {
   const allowed = shape === 'expenses' ? OF_EXPENSES : shape === 'hours' ? OF_HOURS : null;
-  const known = headingMeanings(facts.heading).filter((meaning) =>
+  const known = meaningsOf(facts.heading).filter((meaning) =>
     allowed ? allowed.includes(meaning) : !NOT_OF_VEHICLES.has(meaning),
   );
   const ordered = allowed ? allowed.filter((meaning) => known.includes(meaning)) : known;
@@ -112,12 +123,14 @@ function guessOfVehicles(facts: ColumnFacts, used: Set<Meaning>, categoryOf: Cat
     if (guess) return guess;
   }
   const byHeading = guessByHeading(facts, used, 'vehicles');
-  if (byHeading.meaning !== 'ignore' || !holdsMoney(facts) || facts.filled === 0) return byHeading;
+  if (byHeading.meaning !== 'ignore' || facts.filled === 0) return byHeading;
+  if (!holdsMoney(facts)) return guessByHeading(facts, used, 'vehicles', likelyMeanings);
   const category = categoryOf(facts.heading);
   if (category?.category === PURCHASE && !used.has('purchase')) {
     return { meaning: 'purchase', category: null, why: 'The heading names the purchase, and the cells hold money.' };
   }
-  if (!category || category.category === PURCHASE || category.category === SALE) return byHeading;
+  if (!category || category.category === PURCHASE || category.category === SALE)
+    return guessByHeading(facts, used, 'vehicles', likelyMeanings);
   return {
     meaning: 'cost',
     category: category.category,

@@ -3,6 +3,8 @@ import { looksLikeMoney } from '../cells/money.ts';
 import type { Sheet } from '../sheets/sheet.ts';
 import { tradeMeaning } from '../words/categories.ts';
 import { headingMeanings, plannedPart } from '../words/headings.ts';
+import { madeHeadings } from './made-headings.ts';
+import { underGroups, withUnits } from './two-row-headings.ts';
 
 const LOOKED_AT = 500;
 const DEEPEST_HEADING = 40;
@@ -17,13 +19,15 @@ export interface Head {
   readonly above: readonly HeadRow[];
   /** null = no row reads like headings. */
   readonly heading: HeadRow | null;
+  /** The line of its last row, when the headings take two. */
+  readonly last: number;
   readonly below: readonly HeadRow[];
 }
 
 class Enough extends Error {}
 
 /** Reads the first rows of a sheet and finds its heading row among them. */
-export function readHead(sheet: Sheet): Head {
+export function readHead(sheet: Sheet, thisYear: number): Head {
   const rows: HeadRow[] = [];
   try {
     sheet.forEachRow((cells, line) => {
@@ -33,19 +37,32 @@ export function readHead(sheet: Sheet): Head {
   } catch (error) {
     if (!(error instanceof Enough)) throw error;
   }
-  return cutAtHeading(rows);
+  return cutAtHeading(rows, thisYear);
 }
 
 /** The heading row is the one with most known words and no figures; a table needs at least three cells of it filled. */
-export function cutAtHeading(rows: readonly HeadRow[]): Head {
+export function cutAtHeading(rows: readonly HeadRow[], thisYear: number): Head {
   let best = -1;
   let most = 1.5;
   for (let i = 0; i < Math.min(rows.length, DEEPEST_HEADING); i++) {
     const found = headingScore(rows[i]?.cells ?? []);
     if (found > most) [best, most] = [i, found];
   }
-  if (best < 0) return { above: [], heading: null, below: rows };
-  return { above: rows.slice(0, best), heading: rows[best] ?? null, below: rows.slice(best + 1) };
+  const row = rows[best];
+  if (!row) {
+    const cells = madeHeadings(rows, thisYear);
+    return { above: [], heading: cells && { cells, line: 0 }, last: 0, below: rows };
+  }
+  const upper = rows[best - 1];
+  const grouped = upper ? underGroups(upper.cells, row.cells) : null;
+  const lower = rows[best + 1];
+  const measured = lower ? withUnits(grouped ?? row.cells, lower.cells) : null;
+  return {
+    above: rows.slice(0, grouped ? best - 1 : best),
+    heading: { cells: measured ?? grouped ?? row.cells, line: (grouped ? upper : row)?.line ?? row.line },
+    last: (measured ? lower : row)?.line ?? row.line,
+    below: rows.slice(measured ? best + 2 : best + 1),
+  };
 }
 
 function headingScore(cells: readonly string[]): number {

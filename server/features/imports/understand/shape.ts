@@ -2,6 +2,7 @@ import type { Meaning } from '#shared/contracts/import-reading.ts';
 import type { Shape } from '#shared/contracts/import-words.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import { type CategoryMeaning, SALE } from '../words/categories.ts';
+import { weekdayOf } from '../words/weekdays.ts';
 import { headingMeanings, plannedPart } from '../words/headings.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
 import { isFigure, namesVehicle, titleOf } from '../read/sheet-words.ts';
@@ -32,6 +33,8 @@ export function guessShape(
   const costs = all.filter((facts) => facts.filled > 0 && holdsMoney(facts) && isCost(facts, categoryOf));
   const name = means('stock number', () => true) ?? means('vehicle', holdsNames) ?? means('model', () => true);
   const amount = means('amount', holdsMoney);
+  const weekdays = all.filter((facts) => weekdayOf(facts.heading) !== null);
+  if (name && weekdays.length >= FEWEST_WEEKDAYS && weekdays.some(holdsHours)) return { shape: 'hours' };
   if (name && costs.length >= 2 && (name.distinct >= 0.8 || costs.length >= 4 || !amount)) return { shape: 'vehicles' };
   const isOverview = name && name.distinct >= 0.8 && means('sale', holdsMoney) && !means('date', holdsDays);
   if (isOverview && !amount && !means('category', holdsText)) return { shape: 'vehicles' };
@@ -64,6 +67,7 @@ function isVehicleSheet(head: Head, all: readonly ColumnFacts[], sheetName: stri
 }
 
 const TITLE_WITHIN = 12;
+const FEWEST_WEEKDAYS = 4;
 
 function isCost(facts: ColumnFacts, categoryOf: (text: string) => CategoryMeaning | null): boolean {
   const category = categoryOf(plannedPart(facts.heading) ?? facts.heading);

@@ -37,13 +37,11 @@ const NO_HEADING: Heading = { line: 0, last: 0, cells: [] };
 
 /** Guesses what a sheet holds from its first rows and what a person said of its columns. */
 export function guessTable(sheet: Sheet, { books, settings, decimal, answers }: Asked): TableGuess {
-  const head = readHead(sheet);
+  const head = readHead(sheet, Number(books.today.slice(0, 4)));
   const said = (settings.columns ?? []).filter((column) => (column.sheet ?? 1) === sheet.number);
   const guess = guessAll(head, sheet, books, said, decimal);
   const hasRows = head.heading !== null || head.below.length > 0;
-  const heading = head.heading
-    ? { line: head.heading.line, last: head.heading.line, cells: head.heading.cells }
-    : NO_HEADING;
+  const heading = head.heading ? { line: head.heading.line, last: head.last, cells: head.heading.cells } : NO_HEADING;
   if (guess.shape === null) return { sheet, hasRows, heading, choices: [], ...guess };
   if (guess.shape === 'vehicle sheet') return { sheet, hasRows, heading: NO_HEADING, choices: [], ...guess };
   const asked = askOfColumns(guess.columns, guess.shape, answers, books);

@@ -7,25 +7,26 @@ export const SALE = 'sale';
 // Meaning | whole phrases, folded. Longer phrases win over shorter ones inside the same text.
 const PHRASES: Readonly<Record<string, string>> = {
   [PURCHASE]:
-    'purchase|purchase price|bid|hammer|hammer price|winning bid|buy|bought|bought for|buy price|vehicle cost|car price|vehicle price|cost of car|kauf|kaufpreis|einkauf|ankauf|zuschlag|compra|achat',
-  [SALE]: 'sale|sold|sale price|sold for|sold price|selling price|verkauf|verkauft|verkaufspreis|erlos|venta|vente',
+    'purchase|purchased|purchase price|bid|hammer|hammer price|winning bid|buy|bought|bought for|buy price|vehicle cost|car price|vehicle price|cost of car|kauf|kaufpreis|einkauf|ankauf|zuschlag|compra|comprado|subasta|puja|achat|achete|enchere',
+  [SALE]:
+    'sale|sold|sale price|sold for|sold price|selling price|verkauf|verkauft|verkaufspreis|erlos|venta|vendido|vendida|vente|vendu|vendue',
   'auction fees':
-    'auction fee|auction fees|auction|buyer fee|buyers fee|buyer s fee|buyer fees|fee|fees|gate fee|bid fee|broker fee|aufgeld|auktionsgebuhr|auktionsgebuhren|auktion|gebuhr|gebuhren|comision subasta|frais encheres',
+    'auction fee|auction fees|auction|buyer fee|buyers fee|buyer s fee|buyer fees|fee|fees|gate fee|bid fee|broker fee|aufgeld|auktionsgebuhr|auktionsgebuhren|auktion|gebuhr|gebuhren|comision subasta|tasas subasta|comision|frais encheres|frais d encheres|frais de vente aux encheres',
   transport:
-    'transport|transportation|tow|towing|tow fee|tows|haul|hauling|delivery|freight|shipping|storage|yard storage|trailer|pickup fee|abschleppen|abschleppkosten|uberfuhrung|grua|transporte|remorquage',
+    'transport|transportation|tow|towing|tow fee|tows|haul|hauling|delivery|freight|shipping|storage|yard storage|trailer|pickup fee|abschleppen|abschleppkosten|uberfuhrung|grua|traslado|transporte|remorquage|depannage',
   parts:
     'part|parts|used parts|new parts|body parts|mechanical parts|teile|ersatzteil|ersatzteile|gebrauchtteile|tires|tyres|tire|wheels|battery|reifen|repuestos|piezas|pieces|donor|donor car',
   'outside labor (sublet)':
-    'outside labor|outside labour|body|outside work|outside|sublet|sublets|subcontract|subcontractor|body shop|bodyshop|body work|bodywork|frame|frame work|machine shop|machine work|welding|mechanic|shop labor|fremdleistung|fremdleistungen|fremdarbeit|werkstatt|karosserie|mano de obra externa|sous traitance',
+    'outside labor|outside labour|body|outside work|outside|sublet|sublets|subcontract|subcontractor|body shop|bodyshop|body work|bodywork|frame|frame work|machine shop|machine work|welding|mechanic|shop labor|fremdleistung|fremdleistungen|fremdarbeit|werkstatt|karosserie|mano de obra externa|mano de obra|chapa|chapista|soldadura|taller externo|trabajo externo|sous traitance|carrosserie|redressage|soudure|main d oeuvre externe',
   'paint & body materials':
     'paint|paints|painting|paint body|paint and body|paint materials|body materials|paint supplies|primer|primer and filler|clear coat|clear coat kit|base coat|filler|body filler|sandpaper|masking tape|spray paint|hardener|thinner|spachtel|schleifpapier|klarlack|basislack|lija|masilla|barniz|papier de verre|mastic|vernis|lack|lackierung|lackmaterial|farbe|pintura|peinture',
   'restraints (SRS)': 'srs|airbag|airbags|air bag|air bags|restraint|restraints|seat belts|belts|gurte|gurt',
   'small systems':
     'glass|windshield|windscreen|key|keys|ac|a c|alignment|scan|scans|calibration|electronics|glas|scheibe|schlussel|klima|achsvermessung',
   'title & registration':
-    'title|titles|title dmv|title plates|title and plates|title fees|dmv|registration|reg|plates|tags|tag title|license plates|zulassung|anmeldung|kennzeichen|matriculacion|immatriculation|carte grise',
+    'title|titles|title dmv|title plates|title and plates|title fees|dmv|registration|reg|plates|tags|tag title|license plates|zulassung|anmeldung|kennzeichen|matriculacion|papeles|gestoria|immatriculation|papiers|carte grise',
   inspection:
-    'inspection|inspections|inspect|rebuilt inspection|state inspection|safety inspection|smog|emissions|tuv|hu|hauptuntersuchung|hu au|itv|controle technique|mot',
+    'inspection|inspections|inspect|rebuilt inspection|state inspection|safety inspection|smog|emissions|tuv|hu|hauptuntersuchung|hu au|itv|controle technique|controle|inspeccion|mot',
   insurance: 'insurance|ins|versicherung|seguro|assurance',
   supplies:
     'supplies|supply|shop supplies|consumables|engine oil|motor oil|brake fluid|shop rags|welding wire|cutting discs|zip ties|shop rags and gloves|motorol|handschuhe|lappen|aceite de motor|huile moteur|materials|material|fluids|verbrauchsmaterial|hilfsmittel|material werkstatt|suministros|fournitures',

@@ -1,13 +1,14 @@
 import type { Meaning } from '#shared/contracts/import-reading.ts';
 import { fold } from '../cells/fold.ts';
+import { weekdayOf } from './weekdays.ts';
 
 /** What a heading may mean, the likelier first; which it is, the cells below decide. */
 const HEADINGS: Readonly<Partial<Record<Meaning, string>>> = {
-  date: 'date|day|when|paid on|date paid|invoice date|datum|tag|belegdatum|fecha|date achat',
+  date: 'week of|week|week starting|week ending|woche|woche vom|semana|semaine|date|day|when|paid on|date paid|invoice date|datum|tag|belegdatum|fecha|date achat',
   vehicle:
     'vehicle|car|unit|truck|which car|vehicle year model|car name|year make model|auto|fahrzeug|wagen|kfz|pkw|coche|vehiculo|voiture|vehicule|rebuild|project|job',
   category:
-    'category|type|what for|kind|cost type|expense type|account|class of cost|art|kategorie|kostenart|categoria|categorie|tipo',
+    'category|cat|catg|rubrik|rubro|rubrique|poste|type|what for|kind|cost type|expense type|account|class of cost|art|kategorie|kostenart|categoria|categorie|tipo',
   what: 'what|description|item|details|detail|desc|memo|for|purpose|beschreibung|artikel|bezeichnung|text|descripcion|concepto|designation',
   vendor:
     'vendor|from|bought from|supplier|seller|store|shop|who from|payee|paid to|where|handler|lieferant|verkaufer|proveedor|fournisseur',
@@ -24,34 +25,36 @@ const HEADINGS: Readonly<Partial<Record<Meaning, string>>> = {
   trim: 'trim|version|ausstattung',
   vin: 'vin|vin no|vin number|fahrgestellnummer|fin|bastidor',
   class: 'class|type|body|body type|body style|vehicle type|vehicle class|klasse|bauart',
-  damage: 'damage|dmg|hit|primary damage|loss|damage type|schaden|dano|dommage',
+  damage: 'damage|golpe|choc|dmg|hit|primary damage|loss|damage type|schaden|dano|dommage',
   'second damage': 'second damage|secondary damage|other damage|damage 2',
-  'title brand': 'title|title type|title status|title brand|brand on title|papiere',
+  'title brand': 'title|title type|title status|title brand|brand on title|papiere|titulo|papeles',
   odometer: 'miles|mileage|odometer|odo|km|kilometer|kilometerstand|kms',
   seen: 'seen|inspected before|seen in person|looked at|seen before',
   'bought from': 'bought from|auction|source|bought at|from',
   notes: 'notes|note|comments|comment|remarks|bemerkung|bemerkungen|notiz|notas|remarques',
   boughtOn:
-    'bought|bought on|purchased|purchase date|date bought|buy date|gekauft|gekauft am|kaufdatum|comprado|achete',
+    'bought|bought on|purchased|date purchase|date of purchase|date purchased|fecha compra|fecha de compra|date d achat|comprado el|purchase date|date bought|buy date|gekauft|gekauft am|kaufdatum|comprado|achete',
   paidOn: 'paid|paid on|date paid|bezahlt',
   pickedUpOn: 'picked up|pick up|pickup|arrived|abgeholt',
   startedOn: 'started|start|start date|begun|work started|begonnen',
-  roadworthyOn: 'ready|roadworthy|done|finished|completed|road ready|fertig|listo|pret',
+  roadworthyOn: 'ready|roadworthy|done|finished|completed|road ready|fertig|listo|pret|terminado|fini',
   inspectedOn: 'inspected|inspected on|inspection date|tuv am',
   titleIssuedOn: 'title issued|title date|title received|titled',
   listedOn: 'listed|listed on|list date|advertised|inseriert',
-  soldOn: 'sold on|sold|date sold|sale date|sold date|verkauft|verkauft am|verkaufsdatum|vendido|vendu',
+  soldOn:
+    'sold on|sold|date sold|sale date|sold date|verkauft|verkauft am|verkaufsdatum|vendido|vendu|fecha venta|fecha de venta|date vente|date de vente|vendido el|vendu le',
   settledOn: 'settled|settled on|closed|abgerechnet',
-  purchase: 'bid|purchase|purchase price|price|paid|bought for|cost of car|hammer|buy price|kaufpreis|zuschlag|einkauf',
-  hours: 'hours|hrs|hrs worked|labor hours|my hours|time|std|stunden|horas|heures|hour|total hours',
+  purchase:
+    'bid|precio compra|precio de compra|compra|prix achat|prix d achat|achat|einkaufspreis|price paid|purchase|purchase price|price|paid|bought for|cost of car|hammer|buy price|kaufpreis|zuschlag|einkauf',
+  hours: 'hours|hrs|own hours|hrs worked|labor hours|my hours|time|std|stunden|horas|heures|hour|total hours',
   'estimated hours': 'est hours|est hrs|estimated hours|hours est|hrs est|planned hours|budget hours|stunden geplant',
-  sale: 'sold for|sale|sale price|sold|selling price|sold price|verkaufspreis|verkauft fur|erlos|precio venta',
+  sale: 'sold for|sale|sale price|sold|selling price|sold price|verkaufspreis|verkauft fur|erlos|precio venta|precio de venta|prix vente|prix de vente|venta|vente|verkauf',
   asking: 'asking|asking price|list price|ask',
   'expected sale': 'expected sale|est sale|expected price|arv|target sale|target price',
-  person: 'who|person|worker|mechanic|name|by|wer|mitarbeiter|quien|qui',
-  task: 'task|job|work|what done|work done|tatigkeit|arbeit|tarea|tache',
+  person: 'who|person|worker|mechanic|name|by|wer|mitarbeiter|nombre|nom|operario|mecanico|mecanicien|quien|qui',
+  task: 'task|did what|job|work|what done|work done|tatigkeit|arbeit|tarea|trabajo|tache|travail',
   derived:
-    'total in|total|all in|total cost|total costs|total spent|cost total|total invested|invested|profit|net profit|gain|loss|profit loss|p l|margin|roi|days|days held|days to sell|balance|running total|running balance|saldo|gesamt|gesamtkosten|gewinn|summe|marge|beneficio|benefice|per hour|profit per hour',
+    'total in|total|all in|total cost|total costs|total spent|cost total|total invested|invested|profit|ganancia|benefice net|resultado|resultat|net profit|gain|loss|profit loss|p l|margin|roi|days|days held|days to sell|balance|running total|running balance|saldo|gesamt|gesamtkosten|gewinn|summe|marge|beneficio|benefice|per hour|profit per hour',
 };
 
 const BY_WORDS = new Map<string, Meaning[]>();
@@ -69,7 +72,43 @@ export function headingWords(heading: string): string {
 
 /** Every meaning that this heading is known for. */
 export function headingMeanings(heading: string): readonly Meaning[] {
+  if (weekdayOf(heading) !== null) return ['hours'];
   return BY_WORDS.get(headingWords(heading)) ?? BY_WORDS.get(headingWords(heading.replace(/[([].*[)\]]/g, ' '))) ?? [];
+}
+
+const SMALL = new Set([
+  'de',
+  'del',
+  'la',
+  'el',
+  'los',
+  'of',
+  'the',
+  'for',
+  'du',
+  'des',
+  'le',
+  'der',
+  'die',
+  'das',
+  'in',
+]);
+const MOST_WORDS = 3;
+
+/** What a heading may mean by a part of it, when the whole is not known: `Tipo de gasto`, `Date of bill`. */
+export function likelyMeanings(heading: string): readonly Meaning[] {
+  const exact = headingMeanings(heading);
+  if (exact.length > 0) return exact;
+  const words = headingWords(heading)
+    .split(' ')
+    .filter((word) => !SMALL.has(word));
+  const found = new Set<Meaning>(BY_WORDS.get(words.join(' ')) ?? []);
+  for (let size = Math.min(MOST_WORDS, words.length - 1); size > 0; size--) {
+    for (let at = 0; at + size <= words.length; at++) {
+      for (const meaning of BY_WORDS.get(words.slice(at, at + size).join(' ')) ?? []) found.add(meaning);
+    }
+  }
+  return [...found];
 }
 
 /** The heading of a planned figure without the word that says so (`Parts est.` → `parts`); null = no such word. */

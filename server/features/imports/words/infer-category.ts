@@ -1,3 +1,4 @@
+import { namesPart } from './parts.ts';
 import { type CategoryMeaning, categoryReader, otherCategory, tradeMeaning } from './categories.ts';
 
 const PARTS = /[,;+&]|\s(?:and|und|y|et)\s/;
@@ -9,13 +10,16 @@ const PARTS = /[,;+&]|\s(?:and|und|y|et)\s/;
 export function categoryGuesser(shopCategories: readonly string[]) {
   const categoryOf = categoryReader(shopCategories);
   const other = otherCategory(shopCategories);
+  const parts = categoryOf('parts') ?? { category: other };
   return (texts: readonly (string | null)[], section: string | null): CategoryMeaning => {
     const known = texts.filter((text) => text !== null);
-    const parts = known.flatMap((text) => [text, ...text.split(PARTS)]);
-    const exact = parts.find((part) => tradeMeaning(part)?.isExact);
+    const pieces = known.flatMap((text) => [text, ...text.split(PARTS)]);
+    const exact = pieces.find((part) => tradeMeaning(part)?.isExact);
     const found = exact === undefined ? null : categoryOf(exact);
     if (found) return found;
     if (section !== null) return { category: section, isSure: true };
-    return known.map(categoryOf).find((guess) => guess !== null) ?? { category: other, isSure: false };
+    const guess = known.map(categoryOf).find((one) => one !== null);
+    if (guess) return { category: guess.category, isSure: false };
+    return { category: known.some(namesPart) ? parts.category : other, isSure: false };
   };
 }

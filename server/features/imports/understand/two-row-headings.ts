@@ -1,0 +1,37 @@
+import { fold } from '../cells/fold.ts';
+import { looksLikeDay } from '../cells/days.ts';
+import { looksLikeMoney } from '../cells/money.ts';
+import { tradeMeaning } from '../words/categories.ts';
+import { headingMeanings } from '../words/headings.ts';
+
+const QUALIFIER =
+  /^(?:est|estim|estimate|estimated|plan|planned|budget|quote|actual|act|real|spent|ist|soll|geplant|tatsachlich|previsto|presupuesto|prevu|reel|paid|cost|kosten)$/;
+const UNIT =
+  /^[([]?\s*(?:usd|eur|gbp|\$|€|£|h|hrs?|hours|std|km|mi|miles|y\/n|d{1,2}[./-]m{1,2}[./-]y{2,4}|m{1,2}[./-]d{1,2}[./-]y{2,4})\s*[)\]]?$/i;
+
+/** Headings under a row of groups: `Parts` above `est` and `actual` makes `Parts est`, `Parts actual`. null = no groups. */
+export function underGroups(upper: readonly string[], lower: readonly string[]): string[] | null {
+  const groups = upper.filter((cell) => cell.trim() !== '');
+  const isGroups = groups.length > 0 && !upper.some((cell) => looksLikeMoney(cell) || looksLikeDay(cell));
+  const known = groups.filter((cell) => tradeMeaning(cell) !== null || headingMeanings(cell).length > 0);
+  if (!isGroups || known.length < groups.length / 2) return null;
+  let group = '';
+  let merged = 0;
+  const cells = lower.map((cell, at) => {
+    group = (upper[at] ?? '').trim() || group;
+    if (group === '' || !QUALIFIER.test(fold(cell))) return cell;
+    merged++;
+    return `${group} ${cell.trim()}`;
+  });
+  return merged >= 2 ? cells : null;
+}
+
+/** Headings with the units that a row of their own gives below them; null = that row holds something else. */
+export function withUnits(headings: readonly string[], below: readonly string[]): string[] | null {
+  const filled = below.filter((cell) => cell.trim() !== '');
+  if (filled.length === 0 || !filled.every((cell) => UNIT.test(cell.trim()))) return null;
+  return headings.map((heading, at) => {
+    const unit = (below[at] ?? '').trim().replace(/^[([]|[)\]]$/g, '');
+    return unit === '' ? heading : `${heading} (${unit})`;
+  });
+}

@@ -77,6 +77,46 @@ describe('a sheet about one vehicle', () => {
     expect(reading.control).toMatchObject({ costCents: 119_950 + 234_950, saleCents: 600_000, rebuilds: 2 });
   });
 
+  it('a tab names its vehicle where no title does', () => {
+    const rows = car('').slice(1);
+    const reading = read(xlsxOf({ '2011 Miata': rows, '09 Civic': rows, Notes: [['call Dov']] }));
+    expect(reading.rebuilds.map(({ year, model }) => [year, model])).toEqual([
+      [2011, 'Miata'],
+      [2009, 'Civic'],
+    ]);
+    expect(reading.control.costCents).toBe(2 * 119_950);
+  });
+
+  it('an estimate beside the actual cost is planned money, also where nothing came of it', () => {
+    const file = text([
+      ['Estimate for 2013 Ford Escape'],
+      ['Item', 'Category', 'Estimate', 'Actual'],
+      ['front bumper', 'Parts', '180', '165.50'],
+      ['hood', 'Parts', '220', ''],
+      ['Total', '', '400', '165.50'],
+    ]);
+    expect(short(file).map((line) => line.slice(0, 3))).toEqual([
+      ['Escape', 'estimate', 180],
+      ['Escape', 'parts', 165.5],
+      ['Escape', 'estimate', 220],
+    ]);
+    expect(read(file).control).toMatchObject({ costCents: 16_550, estimateCents: 40_000 });
+  });
+
+  it('labels before values say what an amount was', () => {
+    const file = text([
+      ['Vehicle:', '2014 Honda Fit'],
+      ['Purchased:', '5/6/2020', 'Price:', '2,100.00'],
+      ['Auction:', 'Larkfield', 'Buyer fee:', '210.00'],
+      ['Sold:', '8/20/2020', 'Price:', '3,900.00'],
+    ]);
+    expect(short(file)).toEqual([
+      ['Fit', 'purchase', 2100, '2020-05-06'],
+      ['Fit', 'auction fees', 210, null],
+      ['Fit', 'sale', 3900, '2020-08-20'],
+    ]);
+  });
+
   it('a subtotal that differs from its rows is shown', () => {
     const rows = car('2011 Subaru Outback');
     rows[8] = ['Parts subtotal', '', '', '210.00'];

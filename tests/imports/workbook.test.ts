@@ -83,6 +83,28 @@ describe('sheets of a workbook', () => {
     );
   });
 
+  it('a vehicle that a later year sheet carries on counts once; what changed meanwhile is put aside', () => {
+    const reading = read(
+      xlsxOf({
+        '2019': [
+          ['Car', 'Bid', 'Fees', 'Parts', 'Sold for'],
+          ['2011 Miata', 2870, 150, 221.07, 5200],
+          ['2012 Caravan', 900, 50, 100, null],
+        ],
+        '2020': [
+          ['Vehicle', 'Bid', 'Buyer fee', 'Tow', 'Parts', 'Sale price'],
+          ['2012 Caravan', 900, 50, 30, 140, 1900],
+          ['2010 Altima', 1100, 60, 90, 300, 2300],
+        ],
+      }),
+    );
+    expect(reading.rebuilds.map(({ model }) => model)).toEqual(['Miata', 'Caravan', 'Altima']);
+    expect(reading.control).toMatchObject({ costCents: 324_107 + 105_000 + 3000 + 155_000, saleCents: 940_000 });
+    expect(reading.asides).toMatchObject([
+      { sheet: 2, row: 2, col: 5, isCell: true, reason: 'duplicate', cents: 14_000 },
+    ]);
+  });
+
   it('a sheet of notes is counted and left out; figures on it are put aside, never lost', () => {
     const reading = read(xlsxOf({ Costs: PARTS, Notes: [['call the tow yard'], ['owed to Dov', '$45.00']] }));
     expect(reading.sheets.map(({ name, shape }) => [name, shape])).toEqual([

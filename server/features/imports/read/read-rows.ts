@@ -4,6 +4,7 @@ import { PURCHASE } from '../words/categories.ts';
 import type { Draft } from './draft.ts';
 import type { DraftLine, FilePlan, RowRead } from './plan.ts';
 import { tableReader } from './table-reader.ts';
+import type { CarriedFigures } from './vehicle-row.ts';
 
 /** What hears of each row as it is read: the preview, or the commit. */
 export interface Sink {
@@ -23,9 +24,10 @@ export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) =>
   const drafts: Draft[] = [];
   const tally = newTally();
   const stated: StatedTotal[] = [];
+  const carried: CarriedFigures = new Map();
   plan.tables.forEach((table, done) => {
     const { number } = table.sheet;
-    const { read, stated: totals } = tableReader(table);
+    const { read, stated: totals } = tableReader(table, carried);
     table.sheet.forEachRow(
       (cells, line, isMalformed) => {
         const result = read(cells, line, isMalformed);

@@ -1,7 +1,7 @@
 import type { Meaning } from '#shared/contracts/import-reading.ts';
 import { looksLikeDay } from '../cells/days.ts';
 import { looksLikeMoney } from '../cells/money.ts';
-import { headingMeanings } from '../words/headings.ts';
+import { headingMeanings, plannedPart } from '../words/headings.ts';
 import { filled } from './row-kinds.ts';
 
 /** Where the columns of a section stand, from 0. */
@@ -9,6 +9,7 @@ export type SectionColumns = ReadonlyMap<Meaning, number>;
 
 const WANTED: readonly Meaning[] = [
   'date',
+  'estimate',
   'hours',
   'amount',
   'credit',
@@ -30,12 +31,12 @@ export function sectionColumns(cells: readonly string[], isOwnWork: boolean): Se
   for (const [at, cell] of cells.entries()) {
     if (cell.trim() === '') continue;
     if (looksLikeMoney(cell) || looksLikeDay(cell)) return null;
-    const meanings = headingMeanings(cell);
+    const meanings = plannedPart(cell) === '' ? (['estimate'] as const) : headingMeanings(cell);
     if (meanings.length > 0) known++;
-    const meaning = wanted.find((one) => meanings.includes(one) && !columns.has(one));
+    const meaning = wanted.find((one) => (meanings as readonly Meaning[]).includes(one) && !columns.has(one));
     if (meaning) columns.set(meaning, at);
   }
-  const isTable = columns.has('amount') || columns.has('hours') || columns.has('credit');
+  const isTable = columns.has('amount') || columns.has('hours') || columns.has('credit') || columns.has('estimate');
   return known >= 2 && known >= filled(cells) / 2 && isTable ? columns : null;
 }
 

@@ -32,8 +32,9 @@ export function sectionLineReader(plan: Plan) {
     const fault = faultOf(row, on === 'bad');
     if (plan.repeats.has(line)) return putAside('duplicate', row.amountCol, row.cents);
     if (fault) return fault;
-    if (row.cents === null && row.seconds === null) return unread(cells, row, section);
     const { category, isSure } = categoryFor([row.category, row.what, row.first], section.category);
+    const planned = plannedLine(row, category, draft, line);
+    if (row.cents === null && row.seconds === null) return planned ? taken([planned]) : unread(cells, row, section);
     const kind = row.isWork ? 'hours' : row.isSale ? 'sale' : kindOf(category);
     const cents = row.isWork ? 0 : (row.cents ?? 0);
     const isBack = kind === 'entry' && cents > 0 && isRefund(row.what);
@@ -53,9 +54,32 @@ export function sectionLineReader(plan: Plan) {
       row: line,
       col: row.col,
     };
-    return taken([made]);
+    return taken(planned ? [planned, made] : [made]);
   };
 }
+
+/** What a row had planned beside what it came to; null = nothing, or for no category of the shop. */
+function plannedLine(
+  { planned, plannedCol, what }: SectionCells,
+  category: string,
+  draft: Draft,
+  row: number,
+): DraftLine | null {
+  const isCost = category !== SALE && category !== PURCHASE;
+  if (planned === null || planned <= 0 || !isCost) return null;
+  return { ...PLANNED, draft, category, cents: planned, what, row, col: plannedCol };
+}
+
+const PLANNED = {
+  kind: 'estimate',
+  on: null,
+  seconds: 0,
+  vendor: null,
+  foreseen: null,
+  isExtra: false,
+  person: null,
+  isGuess: false,
+} as const satisfies Partial<DraftLine>;
 
 const kindOf = (category: string) => (category === SALE ? 'sale' : category === PURCHASE ? 'purchase' : 'entry');
 type SectionCells = ReturnType<ReturnType<typeof sectionCellReader>>;
@@ -73,9 +97,12 @@ function sectionCellReader(plan: Plan) {
     const paid = cellMoney(plan, cell('amount'));
     const back = cellMoney(plan, cell('credit'));
     const isWork = !isSale && (isOwnWork || (at.has('hours') && typeof paid !== 'number' && time !== ''));
+    const planned = cellMoney(plan, cell('estimate'));
     const amountCol = (typeof paid === 'number' || paid !== 'blank' ? col('amount') : col('credit')) || null;
     return {
       isSale,
+      planned: typeof planned === 'number' ? planned : null,
+      plannedCol: col('estimate'),
       isWork,
       date: cell('date') || (columns ? '' : dayInside(cells)),
       seconds: typeof seconds === 'number' ? seconds : null,

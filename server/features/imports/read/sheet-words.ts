@@ -17,6 +17,8 @@ export interface VehicleTitle {
 
 const MOST_IN_TITLE = 4;
 const LONGEST_TITLE = 90;
+const OPENING =
+  /^\s*(?:(?:estimate|budget|costs?|receipts?|expenses|rebuild|sheet|kosten|belege|gastos|frais)\s+(?:for|of|für|de|pour)|vehicle|car|fahrzeug|coche|voiture)\b\s*:?\s*/i;
 const BREAKS = /\s+[-–—|•]+\s+|\s*[;(),]\s*|:\s+/;
 
 /** Does a row name a vehicle and hold no figures of its own? null = it does not. */
@@ -24,7 +26,10 @@ export function titleOf(cells: readonly string[], thisYear: number): VehicleTitl
   if (filled(cells) > MOST_IN_TITLE || cells.some((cell) => isFigure(cell) || looksLikeDay(cell))) return null;
   for (const cell of cells) {
     if (cell.length < 4 || cell.length > LONGEST_TITLE || !/\d\d/.test(cell)) continue;
-    const parts = cell.replace(/^[\s=*#-]+|[\s=*#-]+$/g, '').split(BREAKS);
+    const parts = cell
+      .replace(OPENING, '')
+      .replace(/^[\s=*#-]+|[\s=*#-]+$/g, '')
+      .split(BREAKS);
     const at = parts.findIndex((part) => namesVehicle(part, thisYear));
     if (at < 0) continue;
     const others = cells.filter((other) => other !== cell && other.trim() !== '');
@@ -45,9 +50,20 @@ export function namesVehicle(text: string, thisYear: number): boolean {
   return /\b(?:19|20)\d\d\b/.test(text) && !isOther && /\p{L}{2}/u.test(model) && model.split(' ').length <= 2;
 }
 
+const GENERIC =
+  /^(?:sheet|tab|table|tabelle|blatt|hoja|feuil|summary|overview|list|data|notes?|total|totals|misc|old|copy)\b/i;
+
+/** Does the tab of a sheet name its vehicle: `2011 Miata`, `09 Civic`, or `Civic` when it is no word of the trade? */
+export function tabNamesVehicle(name: string, thisYear: number): boolean {
+  if (namesVehicle(name, thisYear) || /^['’]?\d\d\s+\p{L}{2}/u.test(name)) return true;
+  const isWord =
+    tradeMeaning(name) !== null || headingMeanings(name).length > 0 || isOwnWork(name) || GENERIC.test(name);
+  return /\p{L}{3}/u.test(name) && name.length <= 30 && !isWord;
+}
+
 /** An amount with its decimals or a sign, not just any number. */
 export const isFigure = (cell: string) =>
-  looksLikeMoney(cell) && (/[.,]\d\d(?!\d)|[$€£]/.test(cell) || /^\s*\(/.test(cell));
+  looksLikeMoney(cell) && (/[.,]\d{1,2}(?!\d)|[$€£]/.test(cell) || /^\s*\(/.test(cell));
 
 const OWN_WORK =
   /^(?:(?:my|own|our|shop)\s)?(?:labou?r|hours|hrs|time|work|time spent|arbeit|arbeitszeit|eigenleistung|stunden|zeit|mano de obra|horas|trabajo|main d oeuvre|heures|travail|temps)(?:\s(?:log|hours|spent|own|propia|eigene))?$/;

@@ -7,16 +7,22 @@ import { looseRowReader } from './loose-row.ts';
 import type { Plan, RowRead, RowReader } from './plan.ts';
 import { rowOutsideTable } from './row-kinds.ts';
 import { type ColumnSums, columnSums, type SummedColumn } from './sums.ts';
-import { vehicleRowReader } from './vehicle-row.ts';
+import { type CarriedFigures, vehicleRowReader } from './vehicle-row.ts';
 import { vehicleSheetReader } from './vehicle-sheet.ts';
 
-/** Reads the rows of one sheet in order, each as what it is; `stated` fills with the totals that the sheet states. */
-export function tableReader(plan: Plan): {
+/**
+ * Reads the rows of one sheet in order, each as what it is; `stated` fills with the totals that the sheet states.
+ * `carried` is shared by the sheets of a file: what earlier ones said of vehicles that a later one carries on.
+ */
+export function tableReader(
+  plan: Plan,
+  carried: CarriedFigures = new Map(),
+): {
   read: (cells: readonly string[], line: number, isMalformed: boolean) => RowRead;
   stated: readonly StatedTotal[];
 } {
   const sums = columnSums(summedColumns(plan), plan.sheet.number);
-  const inside = readerOf(plan, sums);
+  const inside = readerOf(plan, sums, carried);
   const outside = rowOutsideTable(plan);
   return {
     read: (cells, line, isMalformed) => outside(cells, line, isMalformed) ?? inside(cells, line),
@@ -24,10 +30,10 @@ export function tableReader(plan: Plan): {
   };
 }
 
-function readerOf(plan: Plan, sums: ColumnSums): RowReader {
+function readerOf(plan: Plan, sums: ColumnSums, carried: CarriedFigures): RowReader {
   if (plan.shape === null) return looseRowReader(plan);
   if (plan.shape === 'vehicle sheet') return vehicleSheetReader(plan, sums);
-  if (plan.shape === 'vehicles') return vehicleRowReader(plan, sums);
+  if (plan.shape === 'vehicles') return vehicleRowReader(plan, sums, carried);
   if (plan.shape === 'expenses') return expenseRowReader(plan, sums);
   return weekdayColumns(plan).length > 1 ? hoursGridReader(plan, sums) : hoursRowReader(plan, sums);
 }

@@ -2,6 +2,7 @@ import type { Column, Meaning, RebuildFound } from '#shared/contracts/import-rea
 import type { AsideReason } from '#shared/contracts/import-words.ts';
 import { aboutHours, readHours } from '../cells/hours.ts';
 import { remembered } from '../cells/fold.ts';
+import { makeOf } from '../words/vehicles.ts';
 import { classReader, damageReader, yesOrNo } from '../words/kinds.ts';
 import type { CellAside, Plan } from './plan.ts';
 
@@ -97,7 +98,9 @@ function hoursTaker(column: Column): Take {
 function textTaker(field: keyof RebuildFound): Take {
   return (cell, row) => {
     const before = row.known[field];
-    const text = (field === 'notes' && before ? `${String(before)}\n${cell}` : cell).normalize('NFC');
+    // `VW` and `Chevy` stand for one make each.
+    const own = field === 'make' ? (makeOf(cell) ?? cell) : cell;
+    const text = (field === 'notes' && before ? `${String(before)}\n${cell}` : own).normalize('NFC');
     if (text.length > (LONGEST[field] ?? 60)) return 'cell-too-long';
     Object.assign(row.known, { [field]: text });
     return null;

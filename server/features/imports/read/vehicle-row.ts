@@ -12,7 +12,7 @@ import type { ColumnSums } from './sums.ts';
 import { type Figure, type VehicleCells, vehicleCellReader } from './vehicle-cells.ts';
 
 /** Reads rows of a sheet with one vehicle each: its facts, its costs by column, its plan, its sale. */
-export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
+export function vehicleRowReader(plan: Plan, sums: ColumnSums, carried: CarriedFigures): RowReader {
   const read = vehicleCellReader(plan);
   const nameOf = vehicleName(plan.columns);
   const findExisting = existingOf(plan);
@@ -48,7 +48,7 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
       return putAside(reason, placeOf(plan.columns, 'stock number') + 1 || null, costOf(row));
     }
     if (key !== null) seen.add(key);
-    const sold = settleSale(row, plan.columns);
+    const sold = settleSale(known ? withoutCarried(row, known, carried) : row, plan.columns);
     addAll(row, true);
     const draft = known ?? newDraft(existing ? existing.tag : tagFor(name), existing, line);
     Object.assign(draft.found, named(name, sold.known), sold.known, { spellings: [...draft.found.spellings, name] });
@@ -56,6 +56,34 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums): RowReader {
     checkRepeated(plan, sums, cells, line);
     return { ...taken(sold.figures.map((figure) => lineOf(figure, draft, row, line))), cells: sold.asides, draft };
   };
+}
+
+/** What sheets said of a vehicle so far: cents or seconds by what the column holds. */
+export type CarriedFigures = Map<Draft, Map<string, number>>;
+
+/**
+ * A vehicle that a later sheet carries on, as year sheets do: figures that an earlier sheet gave already are not counted
+ * again; those that changed meanwhile are put aside.
+ */
+function withoutCarried(row: VehicleCells, draft: Draft, carried: CarriedFigures): VehicleCells {
+  const before = carried.get(draft);
+  const now = new Map(before);
+  carried.set(draft, now);
+  const keyOf = ({ column }: Figure) => `${column.meaning} ${column.category ?? ''}`;
+  const asides = [...row.asides];
+  const figures = row.figures.filter((figure) => {
+    const value = figure.cents + figure.seconds;
+    const said = before?.get(keyOf(figure));
+    if (said === undefined) {
+      now.set(keyOf(figure), (now.get(keyOf(figure)) ?? 0) + value);
+      return true;
+    }
+    const { cents, column } = figure;
+    if (said !== value)
+      asides.push({ col: column.col, reason: 'duplicate', text: column.heading, cents: cents || null });
+    return false;
+  });
+  return { ...row, figures, asides };
 }
 
 /** Year, make and model out of what a row calls its vehicle, when no column of their own holds them. */

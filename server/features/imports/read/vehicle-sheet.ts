@@ -58,8 +58,10 @@ export function vehicleSheetReader(plan: Plan, sums: ColumnSums): RowReader {
       return notData('title');
     }
     const columns = sectionColumns(cells, state.section.isOwnWork);
-    if (columns) state.section = { ...state.section, columns };
-    return columns ? notData('heading') : null;
+    if (!columns) return null;
+    state.section = { ...state.section, columns };
+    totals.section();
+    return notData('heading');
   }
 
   return (cells, line) => {

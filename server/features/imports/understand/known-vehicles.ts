@@ -1,8 +1,8 @@
 import type { ShopBooks } from '../books.ts';
+import { fold } from '../cells/fold.ts';
 import { type Draft, newDraft, tagMaker } from '../read/draft.ts';
 import { isBlank, isHeadingAgain, totalLabel } from '../read/row-kinds.ts';
-import { vehicleName } from './vehicle-columns.ts';
-import { placeOf } from './vehicle-columns.ts';
+import { placeOf, vehicleName } from './vehicle-columns.ts';
 import { existingFinder } from './existing-finder.ts';
 import type { SurveyedTable } from './file-plan.ts';
 import { readVehicle } from './vehicle-text.ts';
@@ -38,6 +38,11 @@ export function knownVehicles(tables: readonly SurveyedTable[], books: ShopBooks
       const words = [at(cells, 'year'), at(cells, 'make'), at(cells, 'model')].filter((word) => word !== '');
       const text = at(cells, 'vehicle') || (at(cells, 'model') ? words.join(' ') : '');
       const { year, make, model } = readVehicle(text, thisYear);
+      const earlier = known.find((one) => one.sheet !== sheet.number && isSame(one, name, text));
+      if (earlier) {
+        known.push({ ...earlier, sheet: sheet.number, row });
+        return;
+      }
       const existing = finder.byTag(name);
       const facts = text === '' ? {} : { year, make, model: year === null && make === null ? null : model };
       const draft = newDraft(existing ? existing.tag : tagFor(name), existing, row, { ...facts, sheet: sheet.number });
@@ -45,4 +50,13 @@ export function knownVehicles(tables: readonly SurveyedTable[], books: ShopBooks
     });
   }
   return known;
+}
+
+/** Is it the vehicle of an earlier sheet? Numbers alone tell nothing: every year may count from 1. */
+function isSame(earlier: KnownVehicle, name: string, spelling: string): boolean {
+  const isNumber = /^\d{1,3}$/.test(name);
+  if (spelling !== '' && earlier.spelling !== null) {
+    return fold(spelling) === fold(earlier.spelling) && (isNumber || fold(name) === fold(earlier.name));
+  }
+  return !isNumber && fold(name) === fold(earlier.name);
 }

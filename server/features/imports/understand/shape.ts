@@ -5,8 +5,9 @@ import { type CategoryMeaning, SALE } from '../words/categories.ts';
 import { weekdayOf } from '../words/weekdays.ts';
 import { headingMeanings, plannedPart } from '../words/headings.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
-import { isFigure, namesVehicle, titleOf } from '../read/sheet-words.ts';
-import type { Head } from './head.ts';
+import { sectionColumns } from '../read/section-columns.ts';
+import { isFigure, tabNamesVehicle, titleOf } from '../read/sheet-words.ts';
+import type { Head, HeadRow } from './head.ts';
 
 /** What one row stands for, or why the sheet cannot be read. */
 export type ShapeGuess =
@@ -63,8 +64,13 @@ function isVehicleSheet(head: Head, all: readonly ColumnFacts[], sheetName: stri
     return false;
   const rows = [...head.above, ...(head.heading ? [head.heading] : []), ...head.below];
   const hasTitle = rows.slice(0, TITLE_WITHIN).some((row) => titleOf(row.cells, thisYear) !== null);
-  return (hasTitle || namesVehicle(sheetName ?? '', thisYear)) && rows.some((row) => row.cells.some(isFigure));
+  const isNamed = sheetName !== null && tabNamesVehicle(sheetName, thisYear);
+  const hasCosts = rows.some((row) => sectionColumns(row.cells, false) !== null) || rows.some(isCostRow);
+  return (hasTitle || isNamed) && hasCosts;
 }
+
+/** A row of words and an amount: `towing, 3/16/2019, Blue Heron, 185.00`. */
+const isCostRow = ({ cells }: HeadRow) => cells.some(isFigure) && cells.some((cell) => /\p{L}{3}/u.test(cell));
 
 const TITLE_WITHIN = 12;
 const FEWEST_WEEKDAYS = 4;

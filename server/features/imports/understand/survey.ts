@@ -97,7 +97,6 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
   const hashes: number[] = [];
   const lines: number[] = [];
   let decimalVotes = 0;
-  if (namesVehicle(sheet.name ?? '', thisYear)) count(vehicles, sheet.name ?? '');
   sheet.forEachRow((cells, line) => {
     const title = titleOf(cells, thisYear);
     if (title) count(vehicles, title.text);
@@ -115,6 +114,9 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
     lines.push(line);
   });
   const repeats = new Set([...repeatedRows(hashes)].map((place) => lines[place] as number));
+  // A tab's name speaks where no title does.
+  const isTab = sheet.name !== null && (vehicles.size === 0 || namesVehicle(sheet.name, thisYear));
+  if (isTab) count(vehicles, sheet.name ?? '');
   return { decimalVotes, currencies, vehicles, categories: new Map(), repeats, dates: new Map([[1, days.evidence]]) };
 }
 

@@ -68,7 +68,7 @@ function ofKnown(
   answers: ReadonlyMap<string, string>,
 ): Settled {
   const [only] = rows;
-  if (rows.length === 1 && only) return { target: only.draft, choice: null };
+  if (only && rows.every(({ draft }) => draft === only.draft)) return { target: only.draft, choice: null };
   const mentioned = group.spellings.find((spelling) => counts.has(spelling));
   if (mentioned === undefined) return { target: 'ambiguous', choice: null };
   const id = `vehicle:${mentioned}`;

@@ -14,7 +14,7 @@ const HEADINGS: Readonly<Partial<Record<Meaning, string>>> = {
     'vendor|from|bought from|supplier|seller|store|shop|who from|payee|paid to|where|handler|lieferant|verkaufer|proveedor|fournisseur',
   foreseen: 'planned|planned y n|foreseen|expected|in estimate|in budget|surprise|geplant|previsto|prevu',
   amount:
-    'amount|amt|cost|paid|price|total|sum|spent|expense|debit|out|money|cost usd|net cost|betrag|ausgabe|ausgaben|preis|kosten|summe|importe|coste|gasto|montant|depense',
+    'amount|actual|actual cost|real cost|amt|cost|paid|price|total|sum|spent|expense|debit|out|money|cost usd|net cost|betrag|ausgabe|ausgaben|preis|kosten|summe|importe|coste|gasto|montant|depense',
   credit:
     'got back|credit|refund|refunds|returned|back|income|received|sale|sales|in|einnahme|einnahmen|gutschrift|erstattung|ingreso|recette|sold for|sale price',
   'stock number':

@@ -110,6 +110,9 @@ it('no mutation of a sample makes it crash: each is read, or refused in words', 
     'p02_expense_ledger_us.csv',
     'p03_single_car_sheet.csv',
     'p06_ausgaben_werkstatt.csv',
+    'p04_workbook_2021.xlsx',
+    'p05_hours_log.tsv',
+    'p07_receipts_messy.csv',
     'p08_notes_and_junk.csv',
   ];
   fc.assert(

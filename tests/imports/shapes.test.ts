@@ -119,3 +119,20 @@ describe('a weekly grid of hours', () => {
     expect(reading.asides).toMatchObject([{ row: 3, col: 8, reason: 'bad-hours', isCell: true }]);
   });
 });
+
+describe('own work in a list of costs', () => {
+  it('at a rate becomes hours, no money; paid work stays money', () => {
+    const text = [
+      'Date,Car,What,Kind,Hrs,Rate,Amount',
+      '2019-03-14,11 Miata,bid,Purchase,,,2870.00',
+      '2019-03-16,11 Miata,weld floor,Labor,4,25,100.00',
+      '2019-03-18,11 Miata,frame pull,Outside labor,3,80,240.00',
+    ].join('\n');
+    const reading = read(text);
+    expect(linesOf(reading).map(({ kind, cents, seconds }) => [kind, cents, seconds / 3600])).toEqual([
+      ['purchase', 287_000, 0],
+      ['hours', 0, 4],
+      ['entry', 24_000, 0],
+    ]);
+  });
+});

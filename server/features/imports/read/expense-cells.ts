@@ -1,12 +1,14 @@
 import type { AsideReason } from '#shared/contracts/import-words.ts';
 import type { Day } from '#shared/day.ts';
 import { remembered } from '../cells/fold.ts';
+import { readHours } from '../cells/hours.ts';
 import type { VehicleTarget } from '../understand/vehicle-drafts.ts';
 import { placeOf, vehicleText } from '../understand/vehicle-columns.ts';
 import { type CategoryMeaning, PURCHASE, SALE } from '../words/categories.ts';
 import { categoryGuesser } from '../words/infer-category.ts';
 import { daysInOrder } from './days-in-order.ts';
 import type { Plan } from './plan.ts';
+import { isOwnWork } from './sheet-words.ts';
 
 /** Money of a cell: cents, nothing, or why it cannot be taken. */
 export type CellMoney = number | 'blank' | AsideReason;
@@ -22,6 +24,9 @@ export interface ExpenseCells {
   readonly isRough: boolean;
   readonly target: VehicleTarget | undefined;
   readonly meaning: CategoryMeaning | undefined;
+  /** Own work, in seconds: hours beside words that say so. Then its amount is only hours times a rate. */
+  readonly ownSeconds: number | null;
+  readonly person: string | null;
   readonly what: string | null;
   readonly vendor: string | null;
 }
@@ -42,6 +47,8 @@ export function expenseColumns(plan: Plan) {
     foreseen: col('foreseen'),
     amount: col('amount'),
     credit: col('credit'),
+    hours: col('hours'),
+    person: col('person'),
     name: col('vehicle') || col('stock number') || col('model'),
   };
 }
@@ -56,7 +63,9 @@ export function cellMoney(plan: Plan, cell: string): CellMoney {
   return about === null ? 'ambiguous-amount' : plan.isForeign(cell) ? 'currency' : about;
 }
 
-const isRough = (plan: Plan, cell: string) => cell !== '' && plan.money(cell) === 'rough';
+// Most cells are plain figures: they need no second look.
+const MAY_BE_ROUGH = /[a-z~≈?×*@]/i;
+const isRough = (plan: Plan, cell: string) => MAY_BE_ROUGH.test(cell) && plan.money(cell) === 'rough';
 
 const kept = (cell: string) => cell.trim().normalize('NFC') || null;
 
@@ -85,10 +94,17 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
       isRough: days.isGuess || isRough(plan, cell(cols.amount)) || isRough(plan, cell(cols.credit)),
       target: plan.vehicles.get(name),
       meaning: meaningOf(cell(cols.category).trim(), what),
+      ownSeconds: cols.hours > 0 ? ownSeconds(cell(cols.hours), [cell(cols.category), what ?? '']) : null,
+      person: textOf(cell(cols.person)),
       what,
       vendor: textOf(cell(cols.vendor)),
     };
   };
+}
+
+function ownSeconds(cell: string, words: readonly string[]): number | null {
+  const seconds = readHours(cell);
+  return typeof seconds === 'number' && seconds > 0 && words.some(isOwnWork) ? seconds : null;
 }
 
 const LONGEST = { what: 500, vendor: 200 };
@@ -103,7 +119,8 @@ export function expenseFault(row: ExpenseCells, cols: ExpenseColumns, isRepeat: 
   if (on === 'bad' || (on === 'blank' && target === 'overhead')) return { reason: 'bad-date', col: cols.date };
   if (typeof paid === 'string' && paid !== 'blank') return { reason: paid, col: cols.amount };
   if (typeof back === 'string' && back !== 'blank') return { reason: back, col: cols.credit };
-  if (paid === 'blank' && back === 'blank') return { reason: 'missing-amount', col: cols.amount || cols.credit };
+  if (paid === 'blank' && back === 'blank' && row.ownSeconds === null)
+    return { reason: 'missing-amount', col: cols.amount || cols.credit };
   if ((row.what?.length ?? 0) > LONGEST.what) return { reason: 'cell-too-long', col: cols.what };
   if ((row.vendor?.length ?? 0) > LONGEST.vendor) return { reason: 'cell-too-long', col: cols.vendor };
   return factFault(row, cols);

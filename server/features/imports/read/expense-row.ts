@@ -18,9 +18,11 @@ export function expenseRowReader(plan: Plan, sums: ColumnSums): RowReader {
     if (beside?.reason === 'total') sums.compare(cells, line, totalLabel(cells) ?? '');
     if (beside) return beside;
     const fault = expenseFault(row, cols, plan.repeats.has(line));
-    if (typeof row.paid === 'number') sums.add(cols.amount, row.paid, fault === null);
+    const isWork = row.ownSeconds !== null && typeof row.target === 'object';
+    if (typeof row.paid === 'number') sums.add(cols.amount, row.paid, fault === null && !isWork);
     if (typeof row.back === 'number') sums.add(cols.credit, row.back, fault === null);
     if (fault) return putAside(fault.reason, fault.col, readableCents(row));
+    if (isWork) return taken([workOf(row, line, cols.hours)]);
     const came = said(cols.foreseen > 0 ? (cells[cols.foreseen - 1] ?? '').trim() : '');
     const lines: DraftLine[] = [];
     const isBack = row.back === 'blank' && isTypedPositive(row);
@@ -29,6 +31,21 @@ export function expenseRowReader(plan: Plan, sums: ColumnSums): RowReader {
     if (typeof row.back === 'number')
       lines.push(lineOf(row, -row.back, { line, col: cols.credit, isBack: false, ...came }));
     return taken(lines);
+  };
+}
+
+/** Own time at a rate is hours, no money. */
+function workOf(row: ExpenseCells, line: number, col: number): DraftLine {
+  const from = { line, col, foreseen: null, isExtra: false, isBack: false };
+  const { ownSeconds, person } = row;
+  return {
+    ...lineOf(row, 0, from),
+    kind: 'hours',
+    category: null,
+    seconds: ownSeconds ?? 0,
+    vendor: null,
+    person,
+    isGuess: false,
   };
 }
 

@@ -35,6 +35,8 @@ const OF_EXPENSES: readonly Meaning[] = [
   'foreseen',
   'credit',
   'amount',
+  'hours',
+  'person',
   'notes',
   'derived',
 ];

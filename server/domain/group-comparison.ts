@@ -39,15 +39,27 @@ export interface GroupComparison {
  * Nothing to compare: no groups. The best of many small groups is mostly luck; do not test pairs.
  */
 export function groupComparison(values: readonly GroupedValue[]): GroupComparison {
-  const groups = groupValues(values);
-  const plain = groups.map(([group, members]) => ({ group, members, mean: mean(members) ?? 0 }));
+  const groups = new Map<string, number[]>();
+  for (const { group, value } of values) {
+    const members = groups.get(group);
+    if (members) members.push(value);
+    else groups.set(group, [value]);
+  }
+  return compareGroups(groups);
+}
+
+/** The same of values that are grouped already. */
+export function compareGroups(groups: ReadonlyMap<string, readonly number[]>): GroupComparison {
+  const plain = [...groups]
+    .sort(([a], [b]) => byCodePoint(a, b))
+    .map(([group, members]) => ({ group, members, mean: mean(members) ?? 0 }));
   const withinVariance = pooledVariance(plain);
   const variances = plain.map(({ members }) => (withinVariance === null ? null : withinVariance / members.length));
   const fit = withinVariance
     ? randomEffects(plain.map((one, i) => ({ mean: one.mean, variance: variances[i] ?? 0 })))
     : null;
   return {
-    n: values.length,
+    n: sum(plain.map(({ members }) => members.length)),
     withinVariance,
     pooled: fit && withoutGroups(fit),
     groups: plain.map(({ group, members, mean: center }, i) => {
@@ -64,16 +76,6 @@ export function groupComparison(values: readonly GroupedValue[]): GroupCompariso
       };
     }),
   };
-}
-
-function groupValues(values: readonly GroupedValue[]): [string, number[]][] {
-  const groups = new Map<string, number[]>();
-  for (const { group, value } of values) {
-    const members = groups.get(group);
-    if (members) members.push(value);
-    else groups.set(group, [value]);
-  }
-  return [...groups].sort(([a], [b]) => byCodePoint(a, b));
 }
 
 function pooledVariance(groups: readonly { members: readonly number[]; mean: number }[]): number | null {

@@ -1,14 +1,8 @@
 import type { z } from 'zod';
 import type { FilterQuery } from '#shared/contracts/answers-parts.ts';
 import type { Comparison, whatPaysAnswerSchema } from '#shared/contracts/answers-what-pays.ts';
-import {
-  type ComparedGroup,
-  type GroupComparison,
-  type GroupedValue,
-  groupComparison,
-} from '../../domain/group-comparison.ts';
+import { type ComparedGroup, compareGroups, type GroupComparison } from '../../domain/group-comparison.ts';
 import { profit, rebuildProfit } from '../../domain/profit.ts';
-import { profitPerOwnHour, worked } from '../../domain/profit-per-hour.ts';
 import { type Priced, priced } from '../../domain/sets.ts';
 import { ratio } from '../../domain/statistics.ts';
 import { cellOf } from '../../domain/what-pays.ts';
@@ -26,11 +20,9 @@ export function whatPaysAnswer(input: AnswerInput, query: FilterQuery): Answer {
   const done = rebuilds.filter(({ exit }) => exit !== null);
   const { noPurchaseCount: _, ...totals } = profit(rebuilds);
   const keyOf = cellKeys();
-  const hours = worked(rebuilds).map((one) => valued(one, keyOf(one), profitPerOwnHour(one)));
-  const returns = priced(rebuilds).flatMap((one) => {
-    const { returnOnCost: value } = rebuildProfit(one);
-    return value === null ? [] : [valued(one, keyOf(one), value)];
-  });
+  const all = priced(rebuilds).map((one) => counted(one, keyOf(one)));
+  const hours = all.filter(({ ownSeconds }) => ownSeconds > 0);
+  const returns = all.filter(({ costCents }) => costCents > 0);
   return {
     asOf: today,
     rebuildCount: rebuilds.length,
@@ -48,23 +40,22 @@ export function whatPaysAnswer(input: AnswerInput, query: FilterQuery): Answer {
   };
 }
 
-interface Valued {
-  readonly cell: Cell;
-  /** Of the cell; holds both names, so that no two cells meet in one. null = a name is not known. */
-  readonly key: string | null;
-  readonly value: number;
-  readonly sums: Sums;
-}
 interface Sums {
   profitCents: number;
   ownSeconds: number;
   costCents: number;
 }
-type Plain = (sums: Sums) => number | null;
 interface Cell {
   readonly class: string | null;
   readonly damage: string | null;
 }
+/** A rebuild's cell and what it adds to the sums, worked out once for all fits. */
+interface Counted extends Readonly<Sums>, Cell {
+  /** Of the cell; holds both names, so that no two cells meet in one. null = a name is not known. */
+  readonly key: string | null;
+}
+/** The figure of one rebuild, and of a group's sums: sum over sum. */
+type Figure = (sums: Readonly<Sums>) => number | null;
 
 /**
  * Gives a rebuild's cell its key, each made once: a text that is put together anew for every rebuild costs more to
@@ -82,47 +73,36 @@ function cellKeys(): (rebuild: Priced) => string | null {
   };
 }
 
-/** A rebuild's cell and what it adds to the sums, worked out once for all fits. */
-function valued(rebuild: Priced, key: string | null, value: number): Valued {
+function counted(rebuild: Priced, key: string | null): Counted {
   const { profitCents, costCents } = rebuildProfit(rebuild);
-  return {
-    cell: { class: rebuild.class, damage: rebuild.damage },
-    key,
-    value,
-    sums: { profitCents, costCents, ownSeconds: rebuild.ownSeconds ?? 0 },
-  };
+  const { class: name, damage, ownSeconds } = rebuild;
+  return { class: name, damage, key, profitCents, costCents, ownSeconds: ownSeconds ?? 0 };
 }
 
 /** How a fit groups: the key of a rebuild's group (null = in none), and the part of its cell that names it. */
 interface Grouping {
-  readonly keyOf: (one: Valued) => string | null;
+  readonly keyOf: (one: Counted) => string | null;
   readonly nameOf: (cell: Cell) => Cell;
 }
-const BY_CELL: Grouping = { keyOf: ({ key }) => key, nameOf: (cell) => cell };
-const BY_CLASS: Grouping = { keyOf: ({ cell }) => cell.class, nameOf: (cell) => ({ ...cell, damage: null }) };
-const BY_DAMAGE: Grouping = { keyOf: ({ cell }) => cell.damage, nameOf: (cell) => ({ ...cell, class: null }) };
+const BY_CELL: Grouping = { keyOf: ({ key }) => key, nameOf: ({ class: name, damage }) => ({ class: name, damage }) };
+const BY_CLASS: Grouping = {
+  keyOf: ({ class: name }) => name,
+  nameOf: ({ class: name }) => ({ class: name, damage: null }),
+};
+const BY_DAMAGE: Grouping = { keyOf: ({ damage }) => damage, nameOf: ({ damage }) => ({ class: null, damage }) };
 
-function threeFits(input: AnswerInput, values: readonly Valued[], plain: Plain): Answer['perHour'] {
+function threeFits(input: AnswerInput, members: readonly Counted[], figure: Figure): Answer['perHour'] {
   return {
-    cells: fit(input, values, plain, BY_CELL),
-    classes: fit(input, values, plain, BY_CLASS),
-    damages: fit(input, values, plain, BY_DAMAGE),
+    cells: fit(input, members, figure, BY_CELL),
+    classes: fit(input, members, figure, BY_CLASS),
+    damages: fit(input, members, figure, BY_DAMAGE),
   };
 }
 
 /** One fit on its own. */
-function fit({ shop }: AnswerInput, values: readonly Valued[], plain: Plain, { keyOf, nameOf }: Grouping): Comparison {
-  const cells = new Map<string, { cell: Cell; sums: Sums }>();
-  const grouped: GroupedValue[] = [];
-  for (const one of values) {
-    const group = keyOf(one);
-    if (group === null) continue;
-    const known = cells.get(group);
-    if (known) add(known.sums, one.sums);
-    else cells.set(group, { cell: nameOf(one.cell), sums: { ...one.sums } });
-    grouped.push({ group, value: one.value });
-  }
-  const comparison = groupComparison(grouped);
+function fit({ shop }: AnswerInput, members: readonly Counted[], figure: Figure, grouping: Grouping): Comparison {
+  const { cells, values } = gathered(members, figure, grouping);
+  const comparison = compareGroups(values);
   const idIn = (list: readonly { id: string; name: string }[], name: string | null) =>
     list.find((item) => item.name === name)?.id ?? null;
   const groups = comparison.groups.map((group): Group => {
@@ -132,17 +112,36 @@ function fit({ shop }: AnswerInput, values: readonly Valued[], plain: Plain, { k
       className: cell.class,
       damageId: idIn(shop.damages, cell.damage),
       damageName: cell.damage,
-      plain: plain(sums),
+      plain: figure(sums),
       ...figuresOf(group),
       ...sums,
     };
   });
-  return { ...heading(comparison), ungroupedCount: values.length - grouped.length, groups: ranked(groups) };
+  return { ...heading(comparison), ungroupedCount: members.length - comparison.n, groups: ranked(groups) };
+}
+
+/** Each group's cell, sums and single figures. */
+function gathered(members: readonly Counted[], figure: Figure, { keyOf, nameOf }: Grouping) {
+  const cells = new Map<string, { cell: Cell; sums: Sums }>();
+  const values = new Map<string, number[]>();
+  for (const one of members) {
+    const group = keyOf(one);
+    if (group === null) continue;
+    let known = cells.get(group);
+    if (!known) {
+      known = { cell: nameOf(one), sums: { ...NOTHING } };
+      cells.set(group, known);
+      values.set(group, []);
+    }
+    add(known.sums, one);
+    values.get(group)?.push(figure(one) ?? 0);
+  }
+  return { cells, values };
 }
 
 const NOTHING: Sums = { profitCents: 0, ownSeconds: 0, costCents: 0 };
 
-function add(sums: Sums, more: Sums): void {
+function add(sums: Sums, more: Readonly<Sums>): void {
   sums.profitCents += more.profitCents;
   sums.costCents += more.costCents;
   sums.ownSeconds += more.ownSeconds;

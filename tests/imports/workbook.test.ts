@@ -83,6 +83,15 @@ describe('sheets of a workbook', () => {
     );
   });
 
+  it('a copy of a sheet is asked about and put aside meanwhile; only what is new on it comes in', () => {
+    const book = xlsxOf({ Parts: PARTS, 'Parts (2)': [...PARTS, ['2021-05-09', '101', 'Parts', 5]] });
+    const reading = read(book);
+    const [choice] = reading.choices.filter(({ kind }) => kind === 'sheets');
+    expect(choice).toMatchObject({ mustAsk: true, preset: 'copy' });
+    expect(reading.control).toMatchObject({ costCents: 20_775 + 500, putAside: 3 });
+    expect(read(book, { answers: { [choice?.id ?? '']: 'both' } }).control.costCents).toBe(2 * 20_775 + 500);
+  });
+
   it('a vehicle that a later year sheet carries on counts once; what changed meanwhile is put aside', () => {
     const reading = read(
       xlsxOf({

@@ -38,7 +38,9 @@ export function clockText(days: number): string {
 /** A number as people would type it: without the noise of binary fractions, amounts to the cent where they are shown so. */
 export function numberText(value: number, decimals: number | null): string {
   if (decimals !== null && decimals >= 2) return trimmed(value.toFixed(decimals));
-  const text = String(Number(value.toPrecision(14)));
+  // Numbers that short carry no noise, and most are.
+  const plain = String(value);
+  const text = plain.length <= 12 ? plain : String(Number(value.toPrecision(14)));
   return text.includes('e') ? trimmed(value.toFixed(decimals ?? 10)) : text;
 }
 

@@ -42,7 +42,7 @@ export function sheetKeeper() {
       let text = cells[0] ?? '';
       for (let at = 1; at < end; at++) text += BETWEEN + (cells[at] ?? '');
       size += text.length;
-      if (cells.some((cell) => (cell?.length ?? 0) > LONGEST_CELL))
+      if (text.length > LONGEST_CELL && cells.some((cell) => (cell?.length ?? 0) > LONGEST_CELL))
         throw new FileRefusal(
           'cell-too-long',
           `A cell of row ${line} of “${name}” holds more than a million characters.`,

@@ -6,6 +6,7 @@ import { remembered } from '../cells/fold.ts';
 import { aboutCents, currenciesIn, type DecimalMark, moneyReader } from '../cells/money.ts';
 import type { FilePlan, Plan } from '../read/plan.ts';
 import { categoryWords } from './category-words.ts';
+import { copiedSheets } from './copied-sheets.ts';
 import { commonOrder, dateOrders } from './date-order.ts';
 import { knownVehicles } from './known-vehicles.ts';
 import { markRepeated } from './overview.ts';
@@ -36,7 +37,8 @@ export function makeFilePlan(tables: readonly SurveyedTable[], shape: Shape, { b
   const isMixed = tables.filter(({ guess }) => guess.shape !== null).length > 1;
   const known = isMixed ? knownVehicles(tables, books) : [];
   const vehicles = vehicleDrafts(mentioned(tables), books, answers, known);
-  const choices: Choice[] = tables.flatMap(({ guess }) => guess.choices);
+  const copied = copiedSheets(tables, answers);
+  const choices: Choice[] = [...tables.flatMap(({ guess }) => guess.choices), ...copied.choices];
   const plans = tables.map(({ guess, found }): Plan => {
     const settled = settle(guess, found, { books, answers }, order);
     choices.push(...settled.choices);
@@ -56,7 +58,7 @@ export function makeFilePlan(tables: readonly SurveyedTable[], shape: Shape, { b
       ),
       repeated: [],
       categories: settled.categories,
-      repeats: settled.repeats,
+      repeats: new Set([...settled.repeats, ...(copied.lines.get(guess.sheet.number) ?? [])]),
       isForeign: (text) => {
         const named = currenciesIn(text);
         return named !== null && !named.includes(books.currency);

@@ -21,6 +21,8 @@ export interface Survey {
   readonly categories: ReadonlyMap<string, number>;
   /** Lines on which a block pasted twice stands. */
   readonly repeats: ReadonlySet<number>;
+  /** A hash of each row that holds data, and its line. */
+  readonly rows: { readonly hashes: readonly number[]; readonly lines: readonly number[] };
 }
 
 export interface DateEvidence {
@@ -85,6 +87,7 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
     vehicles,
     categories,
     repeats,
+    rows: { hashes, lines },
     dates: new Map(days.map(({ at, see }) => [at + 1, see.evidence])),
   };
 }
@@ -117,7 +120,15 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
   // A tab's name speaks where no title does.
   const isTab = sheet.name !== null && (vehicles.size === 0 || namesVehicle(sheet.name, thisYear));
   if (isTab) count(vehicles, sheet.name ?? '');
-  return { decimalVotes, currencies, vehicles, categories: new Map(), repeats, dates: new Map([[1, days.evidence]]) };
+  return {
+    decimalVotes,
+    currencies,
+    vehicles,
+    categories: new Map(),
+    repeats,
+    rows: { hashes, lines },
+    dates: new Map([[1, days.evidence]]),
+  };
 }
 
 function count(counts: Map<string, number>, key: string): void {

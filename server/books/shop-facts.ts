@@ -73,6 +73,9 @@ const OVERHEAD = `
   GROUP BY dated_on ORDER BY dated_on`;
 const CHANGED = `SELECT rebuild_id FROM rollup_rebuilds WHERE shop_id = ? AND refreshed_version > ?`;
 
+/** With more than this to read again, reading everything is no slower. */
+const MOST_PATCHED = 500;
+
 type Lists = Pick<ShopFacts, 'classes' | 'damages' | 'categories'>;
 
 /** The earlier rebuilds with the changed ones read anew. null = a name of a list changed, or a rebuild is gone: read all. */
@@ -80,9 +83,14 @@ function refreshed(raw: RawDatabase, earlier: ShopFacts, lists: Lists): readonly
   const { shopId, classes, damages, categories } = earlier;
   if (JSON.stringify(lists) !== JSON.stringify({ classes, damages, categories })) return null;
   const changed = raw.prepare(CHANGED).pluck().all(shopId, earlier.booksVersion) as string[];
+  if (changed.length > MOST_PATCHED) return null;
   const news = changed.length > 0 ? readRebuilds(raw, shopId, categories, changed) : [];
-  const byId = new Map(earlier.rebuilds.map((one) => [one.id, one]));
-  for (const one of news) byId.set(one.id, one);
+  const byId = new Map(news.map((one) => [one.id, one]));
+  const rebuilds = earlier.rebuilds.map((one) => {
+    const anew = byId.get(one.id);
+    byId.delete(one.id);
+    return anew ?? one;
+  });
   const count = raw.prepare('SELECT count(*) FROM rebuilds WHERE shop_id = ?').pluck().get(shopId);
-  return byId.size === count ? [...byId.values()] : null;
+  return rebuilds.length + byId.size === count ? [...rebuilds, ...byId.values()] : null;
 }

@@ -71,10 +71,14 @@ function keptShop(raw: RawDatabase, shops: KeptShops, shopId: string): KeptShop 
 /** What the answers are worked out from, on this connection. Only valid inside its transaction. */
 export function inputOf(raw: RawDatabase, facts: ShopFacts, today: Day): AnswerInput {
   const shop = asOf(facts, today);
+  let byId: AnswerInput['byId'] | undefined;
   return {
     shop,
     today,
-    byId: new Map(shop.rebuilds.map((rebuild) => [rebuild.id, rebuild])),
+    get byId() {
+      byId ??= new Map(shop.rebuilds.map((rebuild) => [rebuild.id, rebuild]));
+      return byId;
+    },
     tiedUpOn: (on) => tiedUpOn(raw, shop.shopId, shop.rebuilds, on),
     spentBy: (ids, on) => spentBy(raw, shop.shopId, ids, on),
     flowsOf: (ids) => pooledFlows(raw, shop.shopId, ids),

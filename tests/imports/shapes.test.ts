@@ -102,6 +102,20 @@ describe('headings', () => {
   });
 });
 
+describe('a vehicle in one column beside its number', () => {
+  it('is read out of that column', () => {
+    const text = [
+      'Unit,Yr/Make/Model,Purchase price,Auction fees,Sale price',
+      'V1,2014 Honda Civic,3200,310,6500',
+      'V2,2016 Mazda 3,4100,390,',
+    ].join('\n');
+    expect(read(text).rebuilds).toMatchObject([
+      { tag: 'V1', year: 2014, make: 'Honda', model: 'Civic' },
+      { tag: 'V2', year: 2016, make: 'Mazda', model: '3' },
+    ]);
+  });
+});
+
 describe('a weekly grid of hours', () => {
   it('is taken day by day; its sums per week are not', () => {
     const text = [

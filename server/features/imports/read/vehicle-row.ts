@@ -19,6 +19,8 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums, carried: CarriedF
   const tagFor = tagMaker(plan.books.rebuilds.map((rebuild) => rebuild.tag));
   const seen = new Set<string>();
   const named = namer(plan);
+  const vehicle = placeOf(plan.columns, 'vehicle');
+  const vehicleAt = (cells: readonly string[]) => (cells[vehicle] ?? '').trim();
   const hasStock = placeOf(plan.columns, 'stock number') >= 0;
   const summing = plan.columns.filter((column) => column.meaning === 'derived' && column.why === SUM_OF_COSTS);
   const addAll = (row: VehicleCells, isTaken: boolean) => {
@@ -51,7 +53,9 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums, carried: CarriedF
     const sold = settleSale(known ? withoutCarried(row, known, carried) : row, plan.columns);
     addAll(row, true);
     const draft = known ?? newDraft(existing ? existing.tag : tagFor(name), existing, line);
-    Object.assign(draft.found, named(name, sold.known), sold.known, { spellings: [...draft.found.spellings, name] });
+    Object.assign(draft.found, named(vehicleAt(cells) || name, sold.known), sold.known, {
+      spellings: [...draft.found.spellings, name],
+    });
     Object.assign(draft.found.dates, sold.dates);
     checkRepeated(plan, sums, cells, line);
     return { ...taken(sold.figures.map((figure) => lineOf(figure, draft, row, line))), cells: sold.asides, draft };

@@ -96,6 +96,7 @@ function describedBy(columns: Column[], all: readonly ColumnFacts[], meaning: 'w
   return columns.map((column) => (column.col === wordiest?.col ? { ...column, meaning, why } : column));
 }
 
+const STOCK_NUMBER = /^[a-z]{0,3}[- ]?\d{1,5}$/i;
 type Guess = Pick<Column, 'meaning' | 'category' | 'why'>;
 const ignored = (why: string): Guess => ({ meaning: 'ignore', category: null, why });
 
@@ -110,7 +111,10 @@ function guessByHeading(
     allowed ? allowed.includes(meaning) : !NOT_OF_VEHICLES.has(meaning),
   );
   const ordered = allowed ? allowed.filter((meaning) => known.includes(meaning)) : known;
-  const meaning = ordered.find((candidate) => !used.has(candidate) && fits(candidate, facts));
+  const found = ordered.find((candidate) => !used.has(candidate) && fits(candidate, facts));
+  const isNumber =
+    found === 'vehicle' && shape === 'vehicles' && facts.samples.every((cell) => STOCK_NUMBER.test(cell));
+  const meaning = isNumber && !used.has('stock number') ? 'stock number' : found;
   if (meaning) return { meaning, category: null, why: `The heading says so, and the cells below suit it.` };
   if (facts.filled === 0) return ignored('The column is empty.');
   return ignored(

@@ -19,7 +19,7 @@ const PHRASES: Readonly<Record<string, string>> = {
   'outside labor (sublet)':
     'outside labor|outside labour|body|outside work|outside|sublet|sublets|subcontract|subcontractor|body shop|bodyshop|body work|bodywork|frame|frame work|machine shop|machine work|welding|mechanic|shop labor|fremdleistung|fremdleistungen|fremdarbeit|werkstatt|karosserie|mano de obra externa|mano de obra|chapa|chapista|soldadura|taller externo|trabajo externo|sous traitance|carrosserie|redressage|soudure|main d oeuvre externe',
   'paint & body materials':
-    'paint|paints|painting|paint body|paint and body|paint materials|body materials|paint supplies|primer|primer and filler|clear coat|clear coat kit|base coat|filler|body filler|sandpaper|masking tape|spray paint|hardener|thinner|spachtel|schleifpapier|klarlack|basislack|lija|masilla|barniz|papier de verre|mastic|vernis|lack|lackierung|lackmaterial|farbe|pintura|peinture',
+    'paint|paints|painting|paint body|paint and body|body paint|body and paint|paint materials|body materials|paint supplies|primer|primer and filler|clear coat|clear coat kit|base coat|filler|body filler|sandpaper|masking tape|spray paint|hardener|thinner|spachtel|schleifpapier|klarlack|basislack|lija|masilla|barniz|papier de verre|mastic|vernis|lack|lackierung|lackmaterial|farbe|pintura|peinture',
   'restraints (SRS)': 'srs|airbag|airbags|air bag|air bags|restraint|restraints|seat belts|belts|gurte|gurt',
   'small systems':
     'glass|windshield|windscreen|key|keys|ac|a c|alignment|scan|scans|calibration|electronics|glas|scheibe|schlussel|klima|achsvermessung',

@@ -108,7 +108,8 @@ export function likelyMeanings(heading: string): readonly Meaning[] {
       for (const meaning of BY_WORDS.get(words.slice(at, at + size).join(' ')) ?? []) found.add(meaning);
     }
   }
-  return [...found];
+  const named = (['year', 'make', 'model'] as const).filter((meaning) => found.has(meaning));
+  return named.length >= 2 ? ['vehicle'] : [...found];
 }
 
 /** The heading of a planned figure without the word that says so (`Parts est.` → `parts`); null = no such word. */

@@ -1,3 +1,4 @@
+import type { Day } from '#shared/day.ts';
 import type { ExitKind } from '#shared/vocabulary.ts';
 import type { CategoryFacts } from '../domain/facts.ts';
 import type { RawDatabase } from '../platform/database.ts';
@@ -18,7 +19,7 @@ export function readRebuilds(
   const among = ids ? 'AND r.id IN (SELECT value FROM json_each(@ids))' : '';
   const scope = ids ? { shop: shopId, ids: JSON.stringify(ids) } : { shop: shopId };
   const rows = raw.prepare(`${REBUILDS} ${among}`).raw().all(scope) as RebuildRow[];
-  return rows.map((row) => shopRebuild(row, nameOf));
+  return rows.map((row) => new ReadRebuild(row, nameOf));
 }
 
 type NameOf = ReadonlyMap<string, string>;
@@ -46,29 +47,6 @@ function readPlan(text: string, nameOf: NameOf): ReadonlyMap<string, number> {
   return new Map((JSON.parse(text) as [string, number][]).map(([id, cents]) => [nameOf.get(id) ?? id, cents]));
 }
 
-/** A rebuild's categories are opened when a measure first asks: most ask for their totals only. */
-class Opened {
-  readonly #sums: string;
-  readonly #plan: string;
-  readonly #nameOf: NameOf;
-  #categories: ReadonlyMap<string, CategoryFacts> | undefined;
-  #estimates: ReadonlyMap<string, number> | undefined;
-
-  constructor(sums: string, plan: string, nameOf: NameOf) {
-    this.#sums = sums;
-    this.#plan = plan;
-    this.#nameOf = nameOf;
-  }
-  get categories(): ReadonlyMap<string, CategoryFacts> {
-    this.#categories ??= readSums(this.#sums, this.#nameOf);
-    return this.#categories;
-  }
-  get estimates(): ReadonlyMap<string, number> {
-    this.#estimates ??= readPlan(this.#plan, this.#nameOf);
-    return this.#estimates;
-  }
-}
-
 type Text = string | null;
 type Whole = number | null;
 type RebuildRow = [
@@ -94,46 +72,95 @@ const REBUILDS = `
   LEFT JOIN damage_types d ON d.shop_id = r.shop_id AND d.id = r.damage_id
   WHERE r.shop_id = @shop`;
 
-function shopRebuild(row: RebuildRow, nameOf: NameOf): ShopRebuild {
-  const [id, tag, name, className, damage, seen, purchaseCents, askingCents, ...dates] = row;
-  const [boughtOn, pickedUpOn, startedOn, readyOn, titleIssuedOn, listedOn, leftOn, kind, proceeds, ...kept] = dates;
-  const [undated, unknown, lateCount, lateCents, ownSeconds, paidSeconds, xirr, ...totals] = kept;
-  const [paid, planning, surprise, labor, estimate, sums, plan, plannedSeconds] = totals;
-  const opened = new Opened(sums ?? '[]', plan ?? '[]', nameOf);
-  return {
-    id,
-    tag,
-    name,
-    class: className,
-    damage,
-    seen: seen === null ? null : seen === 1,
-    boughtOn,
-    pickedUpOn,
-    startedOn,
-    readyOn,
-    titleIssuedOn,
-    listedOn,
-    exit: leftOn === null || kind === null ? null : { kind, on: leftOn, proceedsCents: proceeds ?? 0 },
-    purchaseCents,
-    askingCents,
-    ownSeconds,
-    paidSeconds,
-    plannedSeconds,
-    get estimates() {
-      return opened.estimates;
-    },
-    get categories() {
-      return opened.categories;
-    },
-    paidCents: paid ?? 0,
-    planningCents: planning ?? 0,
-    estimateCents: estimate ?? 0,
-    paidLaborCents: labor ?? 0,
-    hasUnknownForeseen: (unknown ?? 0) > 0,
-    hasUndated: (undated ?? 0) > 0,
-    surprisePlanningCents: surprise ?? 0,
-    lateCount: lateCount ?? 0,
-    lateCents: lateCents ?? 0,
-    xirr,
-  };
+/**
+ * A rebuild as it was read. A class, since thousands are made at once: its categories and estimates are opened when a
+ * measure first asks (most ask for their totals only), and a getter on each single object would cost more than the rest.
+ */
+class ReadRebuild implements ShopRebuild {
+  readonly id: string;
+  readonly tag: string;
+  readonly name: string;
+  readonly class: string | null;
+  readonly damage: string | null;
+  readonly seen: boolean | null;
+  readonly boughtOn: Day | null;
+  readonly pickedUpOn: Day | null;
+  readonly startedOn: Day | null;
+  readonly readyOn: Day | null;
+  readonly titleIssuedOn: Day | null;
+  readonly listedOn: Day | null;
+  exit: ShopRebuild['exit'];
+  readonly purchaseCents: number | null;
+  readonly askingCents: number | null;
+  readonly ownSeconds: number | null;
+  readonly paidSeconds: number | null;
+  readonly plannedSeconds: number | null;
+  readonly paidCents: number;
+  readonly planningCents: number;
+  readonly estimateCents: number;
+  readonly paidLaborCents: number;
+  readonly hasUnknownForeseen: boolean;
+  readonly hasUndated: boolean;
+  readonly surprisePlanningCents: number;
+  readonly lateCount: number;
+  readonly lateCents: number;
+  readonly xirr: number | null;
+  readonly #row: RebuildRow;
+  readonly #nameOf: NameOf;
+  #categories: ReadonlyMap<string, CategoryFacts> | undefined;
+  #estimates: ReadonlyMap<string, number> | undefined;
+
+  constructor(row: RebuildRow, nameOf: NameOf) {
+    this.#row = row;
+    this.#nameOf = nameOf;
+    this.id = row[0];
+    this.tag = row[1];
+    this.name = row[2];
+    this.class = row[3];
+    this.damage = row[4];
+    this.seen = row[5] === null ? null : row[5] === 1;
+    this.purchaseCents = row[6];
+    this.askingCents = row[7];
+    this.boughtOn = row[8];
+    this.pickedUpOn = row[9];
+    this.startedOn = row[10];
+    this.readyOn = row[11];
+    this.titleIssuedOn = row[12];
+    this.listedOn = row[13];
+    const [on, kind, proceedsCents] = [row[14], row[15], row[16] ?? 0];
+    this.exit = on === null || kind === null ? null : { kind, on, proceedsCents };
+    this.hasUndated = (row[17] ?? 0) > 0;
+    this.hasUnknownForeseen = (row[18] ?? 0) > 0;
+    this.lateCount = row[19] ?? 0;
+    this.lateCents = row[20] ?? 0;
+    this.ownSeconds = row[21];
+    this.paidSeconds = row[22];
+    this.xirr = row[23];
+    this.paidCents = row[24] ?? 0;
+    this.planningCents = row[25] ?? 0;
+    this.surprisePlanningCents = row[26] ?? 0;
+    this.paidLaborCents = row[27] ?? 0;
+    this.estimateCents = row[28] ?? 0;
+    this.plannedSeconds = row[31];
+  }
+
+  get categories(): ReadonlyMap<string, CategoryFacts> {
+    this.#categories ??= readSums(this.#row[29] ?? '[]', this.#nameOf);
+    return this.#categories;
+  }
+
+  get estimates(): ReadonlyMap<string, number> {
+    this.#estimates ??= readPlan(this.#row[30] ?? '[]', this.#nameOf);
+    return this.#estimates;
+  }
+
+  /** The same rebuild as it stood before it left. */
+  static notYetLeft(rebuild: ShopRebuild): ShopRebuild {
+    if (!(rebuild instanceof ReadRebuild)) return { ...rebuild, exit: null };
+    const held = new ReadRebuild(rebuild.#row, rebuild.#nameOf);
+    held.exit = null;
+    return held;
+  }
 }
+
+export const { notYetLeft } = ReadRebuild;

@@ -3,10 +3,12 @@ import { readShopFacts, type ShopFacts } from '../../server/books/shop-facts.ts'
 import { rawHandle } from '../../server/platform/database.ts';
 import { openSmallShop } from '../support/small-shop.ts';
 
-/** Facts without the order of their rebuilds, which means nothing. */
+/** Facts whole, categories and estimates opened, without the order of their rebuilds, which means nothing. */
 const inOrder = (facts: ShopFacts) => ({
   ...facts,
-  rebuilds: facts.rebuilds.toSorted((a, b) => (a.id < b.id ? -1 : 1)),
+  rebuilds: facts.rebuilds
+    .toSorted((a, b) => (a.id < b.id ? -1 : 1))
+    .map((rebuild) => ({ ...rebuild, categories: rebuild.categories, estimates: rebuild.estimates })),
 });
 
 describe('the facts of a shop', () => {

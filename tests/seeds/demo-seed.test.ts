@@ -55,7 +55,11 @@ function asMeasured({ rebuilds }: ShopFacts): Measured {
   );
   const known = Object.keys(measured(book).facts[0] ?? {});
   const facts = rebuilds
-    .map((rebuild) => ({ ...rebuild, id: rebuild.tag }))
+    // Categories and estimates are opened only when asked for, so they are named.
+    .map((rebuild) => {
+      const { categories, estimates } = rebuild;
+      return { ...rebuild, categories, estimates, id: rebuild.tag };
+    })
     .map((rebuild) => Object.fromEntries(Object.entries(rebuild).filter(([field]) => known.includes(field))))
     .map((rebuild) => rebuild as unknown as RebuildFacts)
     .sort((one, other) => (one.id < other.id ? -1 : 1));

@@ -2,6 +2,7 @@ import type { LeftOut, LeftOutReason, RebuildRef } from '#shared/contracts/answe
 import { LEFT_OUT_LISTED } from '#shared/contracts/answers-parts.ts';
 import type { Rule } from '#shared/contracts/rules.ts';
 import type { Day } from '#shared/day.ts';
+import { notYetLeft } from '../../books/shop-facts-rows.ts';
 import type { ShopFacts, ShopRebuild } from '../../books/shop-facts.ts';
 import type { NetFlows } from '../../domain/net-flows.ts';
 import type { TiedUp } from '../../domain/years.ts';
@@ -22,7 +23,7 @@ export interface AnswerInput {
 export function asOf(shop: ShopFacts, today: Day): ShopFacts {
   return {
     ...shop,
-    rebuilds: shop.rebuilds.map((one) => (one.exit && one.exit.on > today ? { ...one, exit: null } : one)),
+    rebuilds: shop.rebuilds.map((one) => (one.exit && one.exit.on > today ? notYetLeft(one) : one)),
     overhead: shop.overhead.filter(({ on }) => on <= today),
   };
 }

@@ -3,5 +3,5 @@ import './setup.mjs';
 import { run } from './child.mjs';
 
 // Where memory is plenty, Node lets garbage pile up; with a limit named, it stays under 300 MB in all.
-const memory = ['--max-old-space-size=512', '--max-semi-space-size=8'];
+const memory = ['--max-old-space-size=512', '--max-semi-space-size=4'];
 process.exitCode = await run(process.execPath, [...memory, '--import', 'tsx', 'server/main.ts']);

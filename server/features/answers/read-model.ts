@@ -8,8 +8,8 @@ import { type Database, type RawDatabase, rawHandle } from '../../platform/datab
 import { type AnswerInput, asOf } from './input.ts';
 
 /** Shops whose facts stay in memory, and answers kept for each. */
-const SHOPS_KEPT = 4;
-const ANSWERS_KEPT = 64;
+const SHOPS_KEPT = 2;
+const ANSWERS_KEPT = 24;
 
 /** A reply as text and, once it was asked for again, compressed: doing that anew each time costs more than the rest. */
 export interface KeptReply {

@@ -29,11 +29,11 @@ export function timeToSellAnswer(input: AnswerInput, query: FilterQuery): Answer
       ['sold without a listing day', rebuilds.filter((one) => one.listedOn === null && isSold(one))],
       ['not listed yet', rebuilds.filter((one) => one.exit === null && !(one.listedOn && one.listedOn <= today))],
     ]),
-    overall: timeOf(selling.overall),
+    overall: timeOf(selling.overall, MARKS_AT_MOST),
     classes: selling.classes.map(({ class: name, ...one }) => ({
       classId: idOf.get(name) ?? '',
       name,
-      ...timeOf(one),
+      ...timeOf(one, CLASS_MARKS_AT_MOST),
     })),
     comparison: selling.comparison,
     waits: WAITS.map((wait) => waitOf(rebuilds, wait)),
@@ -41,8 +41,11 @@ export function timeToSellAnswer(input: AnswerInput, query: FilterQuery): Answer
   };
 }
 
-function timeOf({ curve, ...time }: SellingTime): Answer['overall'] {
-  const every = Math.ceil(curve.points.length / MARKS_AT_MOST);
+/** Several curves share one picture; none of them needs more steps than this. */
+const CLASS_MARKS_AT_MOST = 100;
+
+function timeOf({ curve, ...time }: SellingTime, most: number): Answer['overall'] {
+  const every = Math.ceil(curve.points.length / most);
   const steps = curve.points.filter((_, i) => i % every === 0 || i === curve.points.length - 1);
   return {
     ...time,

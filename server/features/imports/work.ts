@@ -41,7 +41,7 @@ export type Done =
   | { readonly kind: 'undone'; readonly obstacle: string | null };
 
 // The indexes on an import's rows grow at random places; with SQLite's usual 2 MB they are read again and again.
-const CACHE_KB = 12 * 1024;
+const CACHE_KB = 8 * 1024;
 
 /** Does a job on a connection of its own. Whoever calls holds the write lock for a commit or an undo. */
 export function work(job: Job, onPart: (share: number) => void): Done {

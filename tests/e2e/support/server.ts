@@ -26,7 +26,7 @@ export async function startServer(options: { demo: boolean }): Promise<RunningSe
   const port = await freePort();
   const dataDir = mkdtempSync(join(tmpdir(), 'panelgap-data-'));
   const { NODE_ENV: _, ...environment } = process.env;
-  const memory = ['--max-old-space-size=512', '--max-semi-space-size=8'];
+  const memory = ['--max-old-space-size=512', '--max-semi-space-size=4'];
   const child = spawn(process.execPath, [...memory, '--import', 'tsx', 'server/main.ts'], {
     cwd: top,
     env: { ...environment, PORT: String(port), HOST: '127.0.0.1', DATA_DIR: dataDir, DEMO: options.demo ? '1' : '0' },

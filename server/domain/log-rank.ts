@@ -19,7 +19,10 @@ export interface LogRank {
  * p = erfc(√(χ²/2)). null = no sale. Example: the 6-MP trial (9 of 21 against 21 of 21) gives χ² 16.79.
  */
 export function logRank(a: readonly Observation[], b: readonly Observation[]): LogRank | null {
-  const all = [...a.map((one) => ({ ...one, inA: 1 })), ...b.map((one) => ({ ...one, inA: 0 }))];
+  const marked =
+    (inA: number) =>
+    ({ days, isSold }: Observation) => ({ days, isSold, inA });
+  const all = [...a.map(marked(1)), ...b.map(marked(0))];
   all.sort((x, y) => x.days - y.days);
   let atRiskA = a.length;
   let expectedA = 0;

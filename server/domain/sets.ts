@@ -107,6 +107,11 @@ export function marketSet(facts: readonly RebuildFacts[], asOf: Day): MarketSet 
 /** Is one of the known days bought, ready, listed, exit before an earlier stage? Equal days are in order. */
 export function hasOddDates(rebuild: RebuildFacts): boolean {
   const { boughtOn, readyOn, listedOn, exit } = rebuild;
-  const days = [boughtOn, readyOn, listedOn, exit?.on ?? null].filter((day) => day !== null);
-  return days.some((day, i) => i > 0 && day < (days[i - 1] ?? day));
+  let latest: Day | null = null;
+  for (const day of [boughtOn, readyOn, listedOn, exit?.on ?? null]) {
+    if (day === null) continue;
+    if (latest !== null && day < latest) return true;
+    latest = day;
+  }
+  return false;
 }

@@ -65,10 +65,11 @@ const ENDS: Record<Wait, (rebuild: ShopRebuild) => readonly [Day | null, Day | n
 };
 
 function waitOf(rebuilds: readonly ShopRebuild[], wait: Wait): Answer['waits'][number] {
-  const days = rebuilds.flatMap((rebuild) => {
+  const days: number[] = [];
+  for (const rebuild of rebuilds) {
     const [from, to] = ENDS[wait](rebuild);
-    return from === null || to === null || to < from ? [] : [daysBetween(from, to)];
-  });
+    if (from !== null && to !== null && to >= from) days.push(daysBetween(from, to));
+  }
   const figures = { median: median(days), q10: quantile(days, 0.1), q90: quantile(days, 0.9) };
   return { wait, n: days.length, ...figures, isThin: days.length < FEW };
 }

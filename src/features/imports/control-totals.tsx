@@ -1,4 +1,5 @@
 import type { Reading, StatedTotal } from '#shared/contracts/import-reading.ts';
+import { capital } from '../../lib/capital.ts';
 import { Hours, Money } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { Panel } from '../../ui/panel.tsx';
@@ -16,12 +17,12 @@ export function ControlTotals({ reading }: { reading: Reading }) {
     { name: 'Rows that come in', value: format.number(control.taken) },
     { name: 'Rows put aside', value: format.number(control.putAside) },
     {
-      name: `Rows that hold no data${beside.length ? ` (${beside.map(([kind, count]) => `${count} ${NOT_DATA_WORDS[kind as keyof typeof NOT_DATA_WORDS]}`).join(', ')})` : ''}`,
+      name: `Rows that hold no data${beside.length ? ` (${beside.map(([kind, count]) => `${format.count(count, NOT_DATA_WORDS[kind as keyof typeof NOT_DATA_WORDS])}`).join(', ')})` : ''}`,
       value: format.number(control.notData),
     },
   ];
   const money = (cents: number) => <Money cents={cents} shown="always" />;
-  const costs = kinds.map(([name, cents]) => ({ name: name === 'purchase' ? 'Purchase' : name, value: money(cents) }));
+  const costs = kinds.map(([name, cents]) => ({ name: capital(name), value: money(cents) }));
   const others = [
     { name: 'Sales', amount: control.saleCents, value: money(control.saleCents) },
     { name: 'Planned costs', amount: control.estimateCents, value: money(control.estimateCents) },

@@ -37,7 +37,9 @@ function InSentence({ reading, isBooked }: { reading: Reading; isBooked: boolean
       ? 'the file states no totals to hold it against'
       : differ === 0
         ? 'it agrees with every total that the file states'
-        : `${differ} of the ${statedTotals.length} totals that the file states differ`;
+        : statedTotals.length === 1
+          ? 'the one total that the file states differs'
+          : `${differ} of the ${statedTotals.length} totals that the file states ${differ === 1 ? 'differs' : 'differ'}`;
   return (
     <>
       {isBooked ? 'In the books:' : 'Ready to come in:'}{' '}

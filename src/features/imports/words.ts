@@ -63,10 +63,10 @@ export const ASIDE_WORDS: Readonly<Record<AsideReason, string>> = {
 
 export const NOT_DATA_WORDS: Readonly<Record<NotData, string>> = {
   blank: 'blank',
-  title: 'titles',
-  heading: 'headings',
-  total: 'totals',
-  note: 'notes',
+  title: 'title',
+  heading: 'heading',
+  total: 'total',
+  note: 'note',
 };
 
 export const STATE_WORDS: Readonly<Record<ImportState, string>> = {

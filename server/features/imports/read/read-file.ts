@@ -4,6 +4,7 @@ import type { ShopBooks } from '../books.ts';
 import { FileRefusal } from '../refusal.ts';
 import type { ByteSource } from '../text/bytes.ts';
 import { type Understanding, understand } from '../understand/understand.ts';
+import { emptyControl } from './empty-control.ts';
 import type { DraftLine, FilePlan } from './plan.ts';
 import { asidesOf, readRows } from './read-rows.ts';
 
@@ -104,22 +105,7 @@ function refusedReading(understood: Understanding): Reading {
     asideCount: 0,
     notData: { blank: 0, title: 0, heading: 0, total: 0, note: 0 },
     statedTotals: [],
-    control: {
-      rowsRead: 0,
-      taken: 0,
-      putAside: 0,
-      notData: 0,
-      blankRows: 0,
-      rebuilds: 0,
-      entries: 0,
-      centsByCategory: {},
-      costCents: 0,
-      creditCents: 0,
-      saleCents: 0,
-      estimateCents: 0,
-      putAsideCents: 0,
-      hoursSeconds: 0,
-    },
+    control: emptyControl(),
     remarks: [],
   };
 }

@@ -1,6 +1,7 @@
 import type { Aside, Control, RebuildFound, StatedTotal } from '#shared/contracts/import-reading.ts';
 import type { NotData } from '#shared/contracts/import-words.ts';
 import { PURCHASE } from '../words/categories.ts';
+import { emptyControl } from './empty-control.ts';
 import type { Draft } from './draft.ts';
 import type { DraftLine, FilePlan, RowRead } from './plan.ts';
 import { tableReader } from './table-reader.ts';
@@ -46,22 +47,7 @@ export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) =>
 }
 
 function newTally() {
-  const control: Control = {
-    rowsRead: 0,
-    taken: 0,
-    putAside: 0,
-    notData: 0,
-    blankRows: 0,
-    rebuilds: 0,
-    entries: 0,
-    centsByCategory: {},
-    costCents: 0,
-    creditCents: 0,
-    saleCents: 0,
-    estimateCents: 0,
-    putAsideCents: 0,
-    hoursSeconds: 0,
-  };
+  const control = emptyControl();
   const notData: Record<NotData, number> = { blank: 0, title: 0, heading: 0, total: 0, note: 0 };
   return {
     control,

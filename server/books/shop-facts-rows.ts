@@ -55,7 +55,7 @@ type RebuildRow = [
   ...[listed: Text, leftOn: Text, kind: ExitKind | null, proceeds: Whole, undated: Whole, unknown: Whole],
   ...[lateCount: Whole, lateCents: Whole, own: Whole, paidSeconds: Whole, xirr: Whole],
   ...[paid: Whole, planning: Whole, surprise: Whole, labor: Whole, estimate: Whole, sums: Text, plan: Text],
-  planned: Whole,
+  ...[planned: Whole, expectedSale: Whole],
 ];
 
 const REBUILDS = `
@@ -64,7 +64,7 @@ const REBUILDS = `
     CASE WHEN r.sold_on IS NOT NULL THEN 'sold' ELSE r.exit_kind END, coalesce(r.sale_cents, r.exit_cents),
     k.undated_count, k.unknown_foreseen_count, k.late_count, k.late_cents, k.own_seconds, k.paid_seconds, k.xirr,
     k.paid_cents, k.planning_cents, k.surprise_planning_cents, k.paid_labor_cents, k.estimate_cents,
-    k.category_sums, k.baseline, e.planned_seconds
+    k.category_sums, k.baseline, e.planned_seconds, e.expected_sale_cents
   FROM rebuilds r
   LEFT JOIN rollup_rebuilds k ON k.shop_id = r.shop_id AND k.rebuild_id = r.id
   LEFT JOIN estimates e ON e.shop_id = r.shop_id AND e.rebuild_id = r.id AND e.is_baseline = 1
@@ -95,6 +95,7 @@ class ReadRebuild implements ShopRebuild {
   readonly ownSeconds: number | null;
   readonly paidSeconds: number | null;
   readonly plannedSeconds: number | null;
+  readonly expectedSaleCents: number | null;
   readonly paidCents: number;
   readonly planningCents: number;
   readonly estimateCents: number;
@@ -142,6 +143,7 @@ class ReadRebuild implements ShopRebuild {
     this.paidLaborCents = row[27] ?? 0;
     this.estimateCents = row[28] ?? 0;
     this.plannedSeconds = row[31];
+    this.expectedSaleCents = row[32];
   }
 
   get categories(): ReadonlyMap<string, CategoryFacts> {

@@ -15,6 +15,8 @@ export interface ShopRebuild extends RebuildFacts {
   readonly askingCents: number | null;
   /** Hours of the locked estimate, in seconds. null = none planned. */
   readonly plannedSeconds: number | null;
+  /** Sale expected when the estimate was locked, cents. null = not said. */
+  readonly expectedSaleCents: number | null;
 }
 
 export interface Named {

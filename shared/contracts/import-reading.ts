@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { FORESEEN, REBUILD_DATES, type RebuildDate } from '../vocabulary.ts';
-import { ASIDE_REASONS, NOT_DATA, OUTCOMES, REFUSALS, SHAPES } from './import-words.ts';
+import { ASIDE_REASONS, CHOICE_KINDS, HINTS, NOT_DATA, OUTCOMES, REFUSALS, SHAPES } from './import-words.ts';
 
 const DATE_MEANINGS = REBUILD_DATES.map(([field]) => field) as [RebuildDate, ...RebuildDate[]];
 
@@ -69,7 +69,7 @@ export type Column = z.infer<typeof columnSchema>;
 
 export const choiceSchema = z.object({
   id: z.string(),
-  kind: z.enum(['date-order', 'columns', 'vehicle', 'category', 'duplicate', 'amount-column', 'sheets', 'overlap']),
+  kind: z.enum(CHOICE_KINDS),
   question: z.string(),
   column: z.string().nullable(),
   options: z.array(z.object({ value: z.string(), label: z.string() })),
@@ -116,6 +116,17 @@ export const asideSchema = z.object({
 });
 export type Aside = z.infer<typeof asideSchema>;
 
+/** Something worth knowing about a place in the file that is no datum: a comment on a cell, a hidden row. */
+export const hintSchema = z.object({
+  sheet: sheetSchema,
+  row: z.int(),
+  /** null = the whole row, or the whole column where `row` is 0. */
+  col: z.int().nullable(),
+  kind: z.enum(HINTS),
+  text: z.string(),
+});
+export type Hint = z.infer<typeof hintSchema>;
+
 export const rebuildFoundSchema = z.object({
   tag: z.string(),
   /** The rebuild of the books that these rows belong to; null = a new one. */
@@ -140,6 +151,8 @@ export const rebuildFoundSchema = z.object({
   dates: z.record(z.string(), z.string()),
   /** How the file writes it. */
   spellings: z.array(z.string()),
+  /** Its plan equals what it came to in every category, so it was written over and says nothing of overrun. */
+  isOverwritten: z.boolean().default(false),
   sheet: sheetSchema,
   row: z.int(),
 });
@@ -192,9 +205,22 @@ export const firstRowSchema = z.object({
 });
 export type FirstRow = z.infer<typeof firstRowSchema>;
 
+/** An earlier import whose rows stand in this file, too: they are not taken again. */
+export const earlierSchema = z.object({
+  importId: z.string(),
+  fileName: z.string(),
+  committedAt: z.string(),
+  /** Rows of this file that came in then, and rows that look like one of then with something changed. */
+  sameRows: z.int(),
+  changedRows: z.int(),
+});
+export type Earlier = z.infer<typeof earlierSchema>;
+
 /** One sheet of a workbook, and what its rows are taken for. */
 export const sheetFoundSchema = z.object({
   number: z.int(),
+  /** Which of the files of this import it stands in; 1 = the first. */
+  file: z.int().default(1),
   name: z.string(),
   isHidden: z.boolean(),
   /** null = it holds no table that could be read; its rows count as notes, or are put aside. */
@@ -212,7 +238,7 @@ export const readingSchema = z.object({
   }),
   shape: z.enum(SHAPES).nullable(),
   refusal: z.object({ kind: z.enum(REFUSALS), message: z.string(), row: z.int().nullable() }).nullable(),
-  /** The sheets of a workbook; none for a text file. */
+  /** The sheets of a workbook or of several files; none for a single text file. */
   sheets: z.array(sheetFoundSchema).default([]),
   columns: z.array(columnSchema),
   choices: z.array(choiceSchema),
@@ -220,9 +246,13 @@ export const readingSchema = z.object({
   firstRows: z.array(firstRowSchema),
   asides: z.array(asideSchema),
   asideCount: z.int(),
-  notData: z.record(z.enum(NOT_DATA), z.int()),
+  notData: z.partialRecord(z.enum(NOT_DATA), z.int()),
   statedTotals: z.array(statedTotalSchema),
   control: controlSchema,
   remarks: z.array(z.string()),
+  hints: z.array(hintSchema).default([]),
+  earlier: z.array(earlierSchema).default([]),
+  /** The file whose columns and answers were taken over, since its headings are the same; null = none. */
+  rememberedFrom: z.object({ importId: z.string(), fileName: z.string() }).nullable().default(null),
 });
 export type Reading = z.infer<typeof readingSchema>;

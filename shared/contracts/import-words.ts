@@ -39,6 +39,28 @@ export const REFUSALS = [
 ] as const;
 export type RefusalKind = (typeof REFUSALS)[number];
 
-/** Kinds of row that hold nothing for the books. */
-export const NOT_DATA = ['blank', 'title', 'heading', 'total', 'note'] as const;
+/** What a file may leave open. */
+export const CHOICE_KINDS = [
+  'date-order',
+  'columns',
+  'vehicle',
+  'category',
+  'duplicate',
+  'amount-column',
+  'sheets',
+  'overlap',
+  'own-labor',
+  'sale',
+  'changed-row',
+] as const;
+export type ChoiceKind = (typeof CHOICE_KINDS)[number];
+
+/** What may be worth knowing about a place in a file. */
+export const HINTS = ['comment', 'hidden row', 'hidden column', 'formula without a value', 'link'] as const;
+
+/**
+ * Kinds of row that hold nothing for the books. `carried`: a balance brought over from another sheet; `already in`: it
+ * came with an earlier import; `left out`: a person said so.
+ */
+export const NOT_DATA = ['blank', 'title', 'heading', 'total', 'note', 'carried', 'already in', 'left out'] as const;
 export type NotData = (typeof NOT_DATA)[number];

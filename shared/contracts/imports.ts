@@ -1,11 +1,33 @@
 import { z } from 'zod';
 import type { FeatureApi } from '../contract.ts';
 import { cursorSchema, idSchema, nextSchema, yesNoQuerySchema } from '../fields.ts';
-import { columnChoiceSchema, readingSchema } from './import-reading.ts';
+import { columnChoiceSchema, lineSchema, readingSchema } from './import-reading.ts';
 import { OUTCOMES, SHAPES } from './import-words.ts';
 
 export const IMPORT_STATES = ['reading', 'ready', 'committing', 'committed', 'undone', 'refused', 'discarded'] as const;
 export type ImportState = (typeof IMPORT_STATES)[number];
+
+/** One cell as a person corrected it; the raw cell is kept beside it. */
+export const cellEditSchema = z.strictObject({
+  sheet: z.int().min(1).max(2000),
+  row: z.int().min(1).max(10_000_000),
+  col: z.int().min(1).max(1000),
+  text: z.string().max(2000),
+});
+export type CellEdit = z.infer<typeof cellEditSchema>;
+
+/** What a person says about a file: what columns hold, answers to its questions (id → value), cells put right, rows left out. */
+export const importSettingsSchema = z.strictObject({
+  columns: z.array(columnChoiceSchema).max(1000).optional(),
+  answers: z.record(z.string().max(400), z.string().max(400)).optional(),
+  /** All corrections so far: the list sent takes the place of the one before. */
+  cells: z.array(cellEditSchema).max(5000).optional(),
+  leftOut: z
+    .array(cellEditSchema.pick({ sheet: true, row: true }))
+    .max(5000)
+    .optional(),
+});
+export type ImportSettings = z.infer<typeof importSettingsSchema>;
 
 export const importSummarySchema = z.object({
   id: idSchema,
@@ -28,6 +50,10 @@ export const importSchema = importSummarySchema.extend({
   /** Share of the file gone through, 0–1, while it is read or committed. */
   progress: z.number().nullable(),
   reading: readingSchema.nullable(),
+  /** Every file of this import; pasted cells count as one. */
+  files: z.array(z.object({ number: z.int(), name: z.string(), byteSize: z.int() })),
+  /** What people said of it so far. */
+  settings: importSettingsSchema,
 });
 export type Import = z.infer<typeof importSchema>;
 
@@ -37,15 +63,14 @@ export const importRowSchema = z.object({
   cells: z.array(z.string()),
   outcome: z.enum(OUTCOMES),
   reason: z.string().nullable(),
+  /** What was read from it, by cell. Booked entries carry their id. */
+  lines: z.array(lineSchema.extend({ entryId: idSchema.nullable() })),
 });
 export type ImportRow = z.infer<typeof importRowSchema>;
 
-/** What a person says about a file: what columns hold, and answers to its questions (id → value). */
-export const importSettingsSchema = z.strictObject({
-  columns: z.array(columnChoiceSchema).max(1000).optional(),
-  answers: z.record(z.string().max(400), z.string().max(400)).optional(),
-});
-export type ImportSettings = z.infer<typeof importSettingsSchema>;
+/** One event of the stream: the state, and the share of the file gone through, 0–1. */
+export const progressSchema = z.object({ state: z.enum(IMPORT_STATES), progress: z.number().nullable() });
+export type Progress = z.infer<typeof progressSchema>;
 
 const params = z.strictObject({ importId: idSchema });
 const reply = importSchema;
@@ -61,7 +86,8 @@ export const importsApi = {
   upload: {
     method: 'POST',
     path: '/api/imports',
-    summary: 'Upload a workbook or a spreadsheet as text (field "file"); it is read, nothing is booked yet',
+    summary:
+      'Upload workbooks or spreadsheets as text (field "file", up to twenty); they are read as one, nothing is booked yet',
     query: z.strictObject({ importAnyway: yesNoQuerySchema.optional() }),
     upload: true,
     response: reply,
@@ -77,9 +103,15 @@ export const importsApi = {
   rows: {
     method: 'GET',
     path: '/api/imports/:importId/rows',
-    summary: 'Rows of a file that came in, each with how it ended',
+    summary: 'Rows of a file, booked or only read, each with how it ended and what was read from it',
     params,
-    query: z.strictObject({ cursor: cursorSchema, outcome: z.enum(OUTCOMES).optional() }),
+    query: z.strictObject({
+      cursor: cursorSchema,
+      outcome: z.enum(OUTCOMES).optional(),
+      /** Start at this row of this sheet. */
+      sheet: z.coerce.number().int().min(1).max(2000).optional(),
+      row: z.coerce.number().int().min(1).max(10_000_000).optional(),
+    }),
     response: z.object({ rows: z.array(importRowSchema), next: nextSchema }),
   },
   change: {

@@ -42,7 +42,7 @@ function expectAgreement(reading: Reading, truth: Truth): void {
     .filter((row) => row.outcome === 'not data')
     .map((row) => ({ sheet: sheetOf(reading, row), row: row.row }));
   expect(notData).toEqual(truth.nonData.map(({ sheet, row }) => ({ sheet, row })));
-  expect(reading.notData.blank).toBe(
+  expect(reading.notData.blank ?? 0).toBe(
     truth.blankRows.flatMap(({ rows }) => rows).reduce((sum, [from, to]) => sum + to - from + 1, 0),
   );
   const stated = reading.statedTotals.map(({ row, stated: statedCents, imported }) => ({ row, statedCents, imported }));

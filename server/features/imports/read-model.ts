@@ -5,7 +5,7 @@ import type { ShopScope } from '../../books/scope.ts';
 import { readCursor, writeCursor } from '../../platform/cursor.ts';
 import { fromRow } from '../../platform/rows.ts';
 import { progressOf } from './background.ts';
-import { importStore, readingOf } from './store.ts';
+import { importStore, readingOf, settingsOf } from './store.ts';
 
 const PAGE = 100;
 
@@ -55,7 +55,13 @@ function summaries(scope: ShopScope) {
 export async function showImport(scope: ShopScope, id: string): Promise<Import> {
   const record = await importStore(scope).get(id);
   const row: object = await summaries(scope).where('imports.id', id).first();
-  return { ...fromRow<ImportSummary>(row), progress: progressOf(id), reading: readingOf(record) };
+  return {
+    ...fromRow<ImportSummary>(row),
+    progress: progressOf(id),
+    reading: readingOf(record),
+    files: [{ number: 1, name: record.fileName, byteSize: record.byteSize }],
+    settings: settingsOf(record),
+  };
 }
 
 /** Rows of a file that came in, in the file's order. */
@@ -74,8 +80,8 @@ export async function listRows(
     .select('sheet', 'row', 'cells', 'outcome', 'reason');
   if (outcome) query.where({ outcome });
   if (after) query.whereRaw('(sheet, row) > (?, ?)', after);
-  const rows: (Omit<ImportRow, 'cells'> & { cells: string })[] = await query.limit(PAGE + 1);
-  const page = rows.slice(0, PAGE).map((row) => ({ ...row, cells: JSON.parse(row.cells) as string[] }));
+  const rows: (Omit<ImportRow, 'cells' | 'lines'> & { cells: string })[] = await query.limit(PAGE + 1);
+  const page = rows.slice(0, PAGE).map((row) => ({ ...row, cells: JSON.parse(row.cells) as string[], lines: [] }));
   const last = page.at(-1);
   return { rows: page, next: rows.length > PAGE && last ? writeCursor([last.sheet, last.row]) : null };
 }

@@ -67,6 +67,9 @@ export const NOT_DATA_WORDS: Readonly<Record<NotData, string>> = {
   heading: 'heading',
   total: 'total',
   note: 'note',
+  carried: 'brought over from another sheet',
+  'already in': 'came in before',
+  'left out': 'left out by you',
 };
 
 export const STATE_WORDS: Readonly<Record<ImportState, string>> = {

@@ -32,6 +32,8 @@ function buildImport(reading: Reading | null, change: Partial<Import> = {}): Imp
     version: 1,
     progress: null,
     reading,
+    files: [{ number: 1, name: 'old.csv', byteSize: 100 }],
+    settings: {},
     ...change,
   };
 }

@@ -40,6 +40,7 @@ export function newDraft(
       expectedSaleCents: null,
       dates: {},
       spellings: [],
+      isOverwritten: false,
       sheet: 1,
       row,
       ...known,

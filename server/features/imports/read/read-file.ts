@@ -84,6 +84,9 @@ function previewOf(understood: Understanding, plan: FilePlan, onPart?: (share: n
         : [
             `${ragged} rows have more cells than there are headings; what stands beyond the headings is kept with the rows and not booked.`,
           ],
+    hints: [],
+    earlier: [],
+    rememberedFrom: null,
   };
 }
 
@@ -103,9 +106,12 @@ function refusedReading(understood: Understanding): Reading {
     firstRows: [],
     asides: [],
     asideCount: 0,
-    notData: { blank: 0, title: 0, heading: 0, total: 0, note: 0 },
+    notData: {},
     statedTotals: [],
     control: emptyControl(),
     remarks: [],
+    hints: [],
+    earlier: [],
+    rememberedFrom: null,
   };
 }

@@ -16,7 +16,7 @@ export interface Sink {
 export interface RowsRead {
   readonly drafts: readonly Draft[];
   readonly control: Control;
-  readonly notData: Record<NotData, number>;
+  readonly notData: Partial<Record<NotData, number>>;
   readonly statedTotals: readonly StatedTotal[];
 }
 
@@ -48,12 +48,12 @@ export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) =>
 
 function newTally() {
   const control = emptyControl();
-  const notData: Record<NotData, number> = { blank: 0, title: 0, heading: 0, total: 0, note: 0 };
+  const notData: Partial<Record<NotData, number>> = {};
   return {
     control,
     notData,
     count(read: RowRead): void {
-      if (read.outcome === 'not data') notData[read.reason as NotData]++;
+      if (read.outcome === 'not data') notData[read.reason as NotData] = (notData[read.reason as NotData] ?? 0) + 1;
       if (read.reason === 'blank') {
         control.blankRows++;
         return;

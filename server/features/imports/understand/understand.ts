@@ -68,6 +68,7 @@ const surveyOf = ({ sheet, shape, columns, heading }: TableGuess, books: ShopBoo
 
 const sheetFound = ({ sheet, shape, why }: TableGuess): SheetFound => ({
   number: sheet.number,
+  file: 1,
   name: sheet.name ?? '',
   isHidden: sheet.isHidden,
   shape,

@@ -13,6 +13,15 @@ export const FEWEST_ON_RUNG = 9;
 /** The car that a rule is wanted for. */
 export type Car = Pick<RebuildFacts, 'class' | 'damage' | 'seen'>;
 
+/** A rung as the car found it, whether or not it carries the rule. */
+export interface TriedRung {
+  readonly rung: Rung;
+  readonly n: number;
+  readonly k: number;
+  /** n ≥ 9 and k ≤ n: the rule could stand on it. */
+  readonly carries: boolean;
+}
+
 /** What the rule for a car is based on. */
 export interface Footing {
   /** null = too few yet on every rung; `n` and `k` are then those of "all", so that the page can say how many lack. */
@@ -21,6 +30,8 @@ export interface Footing {
   readonly k: number;
   /** The rebuilds on the rung, in the order in which they left the shop. None = too few yet. */
   readonly outcomes: readonly PlannedOutcome[];
+  /** Every rung, from the finest to the widest: why it was this one. */
+  readonly tried: readonly TriedRung[];
 }
 
 /** The percent rule on the rung that carries it. `taken`, `uplift` and `guarantee` as in `contingency`; null = too few yet. */
@@ -48,12 +59,16 @@ export function twoPartOnLadder(facts: readonly RebuildFacts[], car: Car, level:
 }
 
 function footingOf(set: readonly Completed[], car: Car, level: Level): Footing {
-  for (const rung of RUNGS) {
+  const rungs = RUNGS.map((rung) => {
     const members = set.filter((rebuild) => isOnRung(rung, rebuild, car));
     const [n, k] = [members.length, rankAt(members.length, level)];
-    if (n >= FEWEST_ON_RUNG && k <= n) return { rung, n, k, outcomes: plannedOutcomes(members) };
-  }
-  return { rung: null, n: set.length, k: rankAt(set.length, level), outcomes: [] };
+    return { members, tried: { rung, n, k, carries: n >= FEWEST_ON_RUNG && k <= n } };
+  });
+  const tried = rungs.map((one) => one.tried);
+  const found = rungs.find((one) => one.tried.carries);
+  if (!found) return { rung: null, n: set.length, k: rankAt(set.length, level), outcomes: [], tried };
+  const { rung, n, k } = found.tried;
+  return { rung, n, k, outcomes: plannedOutcomes(found.members), tried };
 }
 
 /** Is the past rebuild like the car in what the rung looks at? What is not known of either is like nothing. */

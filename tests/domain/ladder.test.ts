@@ -45,9 +45,9 @@ describe('the ladder', () => {
 
   it('says too few yet with the n and k of all, and gives no figure', () => {
     const nothing = { rung: null, taken: null, uplift: null, guarantee: null, outcomes: [] };
-    expect(percentOnLadder(past(8, 10), CAR, HALF)).toEqual({ ...nothing, n: 8, k: 5 });
-    expect(percentOnLadder(past(9, 10), CAR, { p: 19, q: 20 })).toEqual({ ...nothing, n: 9, k: 10 });
-    expect(percentOnLadder([], CAR, HALF)).toEqual({ ...nothing, n: 0, k: 1 });
+    expect(percentOnLadder(past(8, 10), CAR, HALF)).toMatchObject({ ...nothing, n: 8, k: 5 });
+    expect(percentOnLadder(past(9, 10), CAR, { p: 19, q: 20 })).toMatchObject({ ...nothing, n: 9, k: 10 });
+    expect(percentOnLadder([], CAR, HALF)).toMatchObject({ ...nothing, n: 0, k: 1 });
     expect(twoPartOnLadder(past(8, 10), CAR, HALF)).toMatchObject({
       rung: null,
       n: 8,
@@ -55,6 +55,17 @@ describe('the ladder', () => {
       creepPercent: null,
       flatCents: null,
     });
+  });
+
+  it('lists every rung tried, so that a reader sees why it was that one', () => {
+    const { tried } = percentOnLadder([...past(8, 10), ...others], CAR, { p: 19, q: 20 });
+    expect(tried).toEqual([
+      { rung: 'class+damage+seen', n: 8, k: 9, carries: false },
+      // Enough of them, but 18 × 19/20 = 17.1, raised: the 18th of 17.
+      { rung: 'damage+seen', n: 17, k: 18, carries: false },
+      { rung: 'seen', n: 26, k: 26, carries: true },
+      { rung: 'all', n: 35, k: 35, carries: true },
+    ]);
   });
 
   it('takes what is not known as like nothing', () => {

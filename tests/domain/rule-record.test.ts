@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest';
-import { ruleRecord } from '../../server/domain/rule-record.ts';
+import { ruleDays, ruleRecord } from '../../server/domain/rule-record.ts';
 import { buildOutcome } from '../support/facts.ts';
 
 // Source: worked out by hand. 10 % on a plan of 1,000.00 allows a cost of 1,100.00.
@@ -35,5 +35,52 @@ describe('the record of an adopted rule', () => {
       shortCents: 0,
       unusedCents: 0,
     });
+  });
+
+  it('names each rebuild that it judged, and those that it could not', () => {
+    const facts = [
+      buildOutcome('short', 112_000, 100_000, bought('2025-02-01')),
+      buildOutcome('no-plan', 90_000, 0, bought('2025-02-02')),
+      buildOutcome('open', 0, 100_000, { ...bought('2025-02-03'), exit: null }),
+    ];
+    const { trials, openIds, noEstimateIds } = ruleRecord(facts, RULE, YEAR);
+    expect(trials).toEqual([
+      {
+        id: 'short',
+        boughtOn: '2025-02-01',
+        exitOn: '2025-04-01',
+        estimateCents: 100_000,
+        overrunCents: 12_000,
+        reserveCents: 10_000,
+        isCovered: false,
+        shortCents: 2_000,
+        unusedCents: 0,
+      },
+    ]);
+    expect({ openIds, noEstimateIds }).toEqual({ openIds: ['open'], noEstimateIds: ['no-plan'] });
+  });
+});
+
+describe('the days of a revision', () => {
+  const revision = (number: number, adoptedOn: string) => ({ year: 2025, revision: number, adoptedOn });
+  const all = [revision(1, '2024-12-20'), revision(2, '2025-06-10'), revision(3, '2025-06-10')];
+
+  it('end when a later one takes its place, so that no rebuild is judged twice', () => {
+    const spans = all.map((rule) => ruleDays(rule, all, YEAR));
+    expect(spans.map(({ to }) => to)).toEqual(['2025-06-10', '2025-06-10', '2025-12-31']);
+    const facts = ['2025-06-09', '2025-06-10', '2025-06-11'].map((day) =>
+      buildOutcome(day, 100_000, 100_000, bought(day)),
+    );
+    const judged = all.map((rule, i) => {
+      const days = spans[i] ?? YEAR;
+      return ruleRecord(facts, { ...RULE, adoptedOn: rule.adoptedOn }, days).trials.map(({ id }) => id);
+    });
+    // The second was replaced on its own day: it judged nothing.
+    expect(judged).toEqual([['2025-06-09', '2025-06-10'], [], ['2025-06-11']]);
+  });
+
+  it('are the whole year where none follows, or only after its end', () => {
+    expect(ruleDays(revision(1, '2024-12-20'), [revision(1, '2024-12-20')], YEAR)).toEqual(YEAR);
+    expect(ruleDays(revision(1, '2024-12-20'), [revision(2, '2026-02-01')], YEAR)).toEqual(YEAR);
   });
 });

@@ -1,20 +1,11 @@
 import { ceilProduct, compareFractions } from '#shared/exact.ts';
+import { type Level, levelOf, rankAt } from '#shared/measures/level.ts';
 import type { Overran } from '#shared/measures/reserves.ts';
-import { LEVELS as LEVEL_NAMES, type LevelName } from '#shared/vocabulary.ts';
+import { LEVELS as LEVEL_NAMES } from '#shared/vocabulary.ts';
 import type { RebuildFacts } from './facts.ts';
 import { planned, plannedOutcomes } from './sets.ts';
 
-/** A level as a fraction p/q, 0 < p < q, never by way of a percentage: 2/3 is not 67 %. */
-export interface Level {
-  readonly p: number;
-  readonly q: number;
-}
-
-/** A level by its name: '4/5' is 4 of 5. */
-export function levelOf(name: LevelName): Level {
-  const [p = 0, q = 0] = name.split('/').map(Number);
-  return { p, q };
-}
+export { type Level, levelOf, rankAt };
 
 /** The levels shown: half, two thirds, four fifths, nine tenths. */
 export const LEVELS: readonly Level[] = LEVEL_NAMES.map(levelOf);
@@ -30,11 +21,6 @@ export interface Contingency {
   readonly taken: Overran | null;
   /** `taken` as a fraction of the estimate; may be negative. null = too few yet. */
   readonly uplift: number | null;
-}
-
-/** k = ceil((n + 1)·p/q), in whole numbers. Example: n 35 at 4/5 gives 29. */
-export function rankAt(n: number, { p, q }: Level): number {
-  return ceilProduct(n + 1, p, q);
 }
 
 /** Order of two overruns by their fraction, exactly. */

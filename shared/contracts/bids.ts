@@ -60,7 +60,7 @@ export const bidFieldsSchema = feeTableFieldsSchema.extend({
 export type BidFields = z.output<typeof bidFieldsSchema>;
 
 /** What the browser showed when the sheet was kept: compared with what the server works out, and never kept itself. */
-const shownSchema = bidFiguresSchema.pick({ repairBudgetCents: true, roomCents: true, bidCents: true });
+export const shownSchema = bidFiguresSchema.pick({ repairBudgetCents: true, roomCents: true, bidCents: true });
 
 export const bidSchema = z.object({
   ...bidFieldsSchema.shape,
@@ -107,7 +107,7 @@ export const bidRowSchema = bidSchema
 export type BidRow = z.output<typeof bidRowSchema>;
 
 /** `agrees`: did the figures that the browser showed come out the same here? null = it sent none. */
-const keptSchema = z.object({ bid: bidSchema, agrees: z.boolean().nullable() });
+export const keptSchema = z.object({ bid: bidSchema, agrees: z.boolean().nullable() });
 
 const bidParams = z.strictObject({ bidId: idSchema });
 

@@ -3,7 +3,7 @@ import { addDays } from '#shared/day.ts';
 import { reserve, twoPartReserve } from '#shared/measures/reserves.ts';
 import { byOverrun, contingency, LEVELS, type Level, rankAt } from '../../server/domain/contingency.ts';
 import { drift } from '../../server/domain/drift.ts';
-import { seeded } from '../../server/domain/seeded.ts';
+import { seeded } from '#shared/measures/seeded.ts';
 import type { PlannedOutcome } from '../../server/domain/sets.ts';
 import { twoPartRule } from '../../server/domain/two-part-rule.ts';
 import { inventPast, normal } from '../support/invented-past.ts';

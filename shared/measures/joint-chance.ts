@@ -1,6 +1,7 @@
-import { divideRounded } from '#shared/money.ts';
+import { divideRounded } from '../money.ts';
+import { quantileOfSorted } from './quantile.ts';
 import { seeded } from './seeded.ts';
-import { type Interval, median, quantiles, type Rate, wilson } from './statistics.ts';
+import { type Rate, wilson } from './wilson.ts';
 
 /** How one past rebuild came out against what was expected of it. Cents; both expectations are above 0. */
 export interface PastPair {
@@ -32,7 +33,7 @@ export interface JointChance {
   /** Profit beyond the wanted one, cents: 10th percentile, median, 90th. null = no past rebuild. */
   readonly beyondCents: { readonly p10: number; readonly p50: number; readonly p90: number } | null;
   /** 95 % interval of that median by resampling. null = fewer than two. */
-  readonly medianInterval: Interval | null;
+  readonly medianInterval: { readonly lower: number; readonly upper: number } | null;
   readonly seed: number;
   readonly resampleCount: number;
 }
@@ -50,8 +51,8 @@ export function jointChance(pairs: readonly PastPair[], sheet: BidSheet, seed: n
   const outcomes = pairs.map((pair) => onSheet(pair, sheet));
   const rateOf = (holds: (one: (typeof outcomes)[number]) => boolean): Rate =>
     wilson(outcomes.filter(holds).length, outcomes.length);
-  const beyond = outcomes.map((one) => one.beyondCents);
-  const [p10, p50, p90] = quantiles(beyond, [0.1, 0.5, 0.9]);
+  const beyond = Float64Array.from(outcomes, (one) => one.beyondCents).sort();
+  const [p10, p50, p90] = [0.1, 0.5, 0.9].map((p) => quantileOfSorted(beyond, p));
   return {
     repair: rateOf((one) => one.isRepairHeld),
     sale: rateOf((one) => one.isSaleHeld),
@@ -64,23 +65,36 @@ export function jointChance(pairs: readonly PastPair[], sheet: BidSheet, seed: n
   };
 }
 
+/** Past rebuilds whose sale would have reached the figure of the sheet: the chance that this figure stands for. */
+export function saleChance(
+  pairs: readonly PastPair[],
+  { expectedSaleCents, saleCents }: Pick<BidSheet, 'expectedSaleCents' | 'saleCents'>,
+): Rate {
+  return wilson(pairs.filter((pair) => saleOf(pair, expectedSaleCents) >= saleCents).length, pairs.length);
+}
+
 /** The past rebuild's fortune on this sheet's figures, to the nearest cent. */
 function onSheet(pair: PastPair, sheet: BidSheet) {
   const overCents = scaled(sheet.planCents, pair.overrunCents, pair.estimateCents);
-  const saleCents = scaled(sheet.expectedSaleCents, pair.proceedsCents, pair.expectedSaleCents);
   const spared = sheet.repairBudgetCents - sheet.planCents - overCents;
-  const gained = saleCents - sheet.saleCents;
+  const gained = saleOf(pair, sheet.expectedSaleCents) - sheet.saleCents;
   return { isRepairHeld: spared >= 0, isSaleHeld: gained >= 0, beyondCents: sheet.leftCents + spared + gained };
+}
+
+function saleOf(pair: PastPair, expectedSaleCents: number): number {
+  return scaled(expectedSaleCents, pair.proceedsCents, pair.expectedSaleCents);
 }
 
 function scaled(cents: number, part: number, whole: number): number {
   return Number(divideRounded(BigInt(cents) * BigInt(part), BigInt(whole)));
 }
 
-function medianInterval(values: readonly number[], chance: () => number): Interval | null {
-  const medians = Array.from({ length: RESAMPLES }, () =>
-    median(values.map(() => values[Math.floor(chance() * values.length)] ?? 0)),
-  ).filter((one) => one !== null);
-  const [lower, upper] = quantiles(medians, [0.025, 0.975]);
+function medianInterval(values: Float64Array, chance: () => number): JointChance['medianInterval'] {
+  const drawn = new Float64Array(values.length);
+  const medians = Float64Array.from({ length: RESAMPLES }, () => {
+    for (let i = 0; i < drawn.length; i += 1) drawn[i] = values[Math.floor(chance() * values.length)] ?? 0;
+    return quantileOfSorted(drawn.sort(), 0.5) ?? 0;
+  }).sort();
+  const [lower, upper] = [0.025, 0.975].map((p) => quantileOfSorted(medians, p));
   return lower == null || upper == null ? null : { lower, upper };
 }

@@ -1,5 +1,5 @@
 import { expect, it } from 'vitest';
-import { seeded } from '../../server/domain/seeded.ts';
+import { seeded } from '#shared/measures/seeded.ts';
 
 // By hand, from the three shifts (Marsaglia 2003): 1 ^ 1·2^13 = 8,193; >> 17 leaves it; ^ 8,193·32 = 270,369.
 it('begins as worked out by hand, and is the same for the same seed', () => {

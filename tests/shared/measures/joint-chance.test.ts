@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { type BidSheet, jointChance, type PastPair } from '../../server/domain/joint-chance.ts';
+import { type BidSheet, jointChance, type PastPair } from '#shared/measures/joint-chance.ts';
 
 const SHEET: BidSheet = {
   planCents: 100_000,

@@ -27,6 +27,7 @@ export function readFile(
       format: { encoding: '', delimiter: '', decimal: '.', headingRow: null },
       sheets: [],
       columns: [],
+      hints: [],
       choices: [],
       plan: null,
       refusal: { kind: error.kind, message: error.message, row: error.row },
@@ -63,7 +64,7 @@ function previewOf(understood: Understanding, plan: FilePlan, onPart?: (share: n
     },
     onPart,
   );
-  const { format, sheets, columns, choices } = understood;
+  const { format, sheets, columns, choices, hints } = understood;
   return {
     format,
     sheets: [...sheets],
@@ -84,7 +85,7 @@ function previewOf(understood: Understanding, plan: FilePlan, onPart?: (share: n
         : [
             `${ragged} rows have more cells than there are headings; what stands beyond the headings is kept with the rows and not booked.`,
           ],
-    hints: [],
+    hints: [...hints],
     earlier: [],
     rememberedFrom: null,
   };
@@ -110,7 +111,7 @@ function refusedReading(understood: Understanding): Reading {
     statedTotals: [],
     control: emptyControl(),
     remarks: [],
-    hints: [],
+    hints: [...understood.hints],
     earlier: [],
     rememberedFrom: null,
   };

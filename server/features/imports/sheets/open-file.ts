@@ -40,6 +40,7 @@ function openText(source: ByteSource, format: TextFormat): OpenFile {
     number: 1,
     name: null,
     isHidden: false,
+    hints: [],
     forEachRow: (onRow, onPart) => forEachRow(source, format, onRow, onPart),
   };
   return { encoding, delimiter, sheets: [sheet] };

@@ -1,3 +1,4 @@
+import type { Hint } from '#shared/contracts/import-reading.ts';
 import { FileRefusal } from '../refusal.ts';
 import type { OnRow } from '../text/rows.ts';
 
@@ -8,9 +9,17 @@ export interface Sheet {
   /** null = a text file: its sheet has no name. */
   readonly name: string | null;
   readonly isHidden: boolean;
+  /** What stands beside its cells: comments, hidden rows and columns, formulas without a value. */
+  readonly hints: readonly SheetHint[];
   /** Gives every row in order; `onPart` hears the share gone through, 0–1. */
   forEachRow(onRow: OnRow, onPart?: (share: number) => void): void;
 }
+
+export type SheetHint = Omit<Hint, 'sheet'>;
+
+/** The hints of all sheets, as a reading tells them. */
+export const hintsOf = (sheets: readonly Sheet[]): Hint[] =>
+  sheets.flatMap(({ number, hints }) => hints.map((hint) => ({ sheet: number, ...hint })));
 
 // A character that no cell can hold: XML forbids it.
 const BETWEEN = '\u001f';
@@ -57,6 +66,7 @@ export function sheetKeeper() {
       number,
       name,
       isHidden,
+      hints: [],
       forEachRow(onRow, onPart) {
         let before = 0;
         for (let i = 0; i < lines.length; i++) {

@@ -1,9 +1,10 @@
-import type { Choice, Column, Reading, SheetFound } from '#shared/contracts/import-reading.ts';
+import type { Choice, Column, Hint, Reading, SheetFound } from '#shared/contracts/import-reading.ts';
 import type { ImportSettings } from '#shared/contracts/imports.ts';
 import type { ShopBooks } from '../books.ts';
 import type { FilePlan } from '../read/plan.ts';
 import { FileRefusal } from '../refusal.ts';
 import { openFile } from '../sheets/open-file.ts';
+import { hintsOf } from '../sheets/sheet.ts';
 import type { ByteSource } from '../text/bytes.ts';
 import { makeFilePlan, type SurveyedTable, usualDecimal } from './file-plan.ts';
 import { guessTable, type TableGuess } from './table-guess.ts';
@@ -14,6 +15,7 @@ export interface Understanding {
   readonly format: Reading['format'];
   readonly sheets: readonly SheetFound[];
   readonly columns: readonly Column[];
+  readonly hints: readonly Hint[];
   readonly choices: readonly Choice[];
   readonly plan: FilePlan | null;
   readonly refusal: Reading['refusal'];
@@ -41,6 +43,7 @@ export function understand(source: ByteSource, books: ShopBooks, settings: Impor
     },
     sheets: guesses.filter(({ sheet }) => sheet.name !== null).map(sheetFound),
     columns: guesses.flatMap(({ columns }) => columns),
+    hints: hintsOf(file.sheets),
   };
   if (first.shape === null) {
     return { ...base, choices: [], plan: null, refusal: { kind: 'shape', message: first.why, row: first.row } };

@@ -1,6 +1,7 @@
 import { z } from 'zod';
 import { FORESEEN, REBUILD_DATES, type RebuildDate } from '../vocabulary.ts';
-import { ASIDE_REASONS, CHOICE_KINDS, HINTS, NOT_DATA, OUTCOMES, REFUSALS, SHAPES } from './import-words.ts';
+import { earlierSchema, hintSchema } from './import-beside.ts';
+import { ASIDE_REASONS, CHOICE_KINDS, NOT_DATA, OUTCOMES, REFUSALS, SHAPES } from './import-words.ts';
 
 const DATE_MEANINGS = REBUILD_DATES.map(([field]) => field) as [RebuildDate, ...RebuildDate[]];
 
@@ -116,17 +117,6 @@ export const asideSchema = z.object({
 });
 export type Aside = z.infer<typeof asideSchema>;
 
-/** Something worth knowing about a place in the file that is no datum: a comment on a cell, a hidden row. */
-export const hintSchema = z.object({
-  sheet: sheetSchema,
-  row: z.int(),
-  /** null = the whole row, or the whole column where `row` is 0. */
-  col: z.int().nullable(),
-  kind: z.enum(HINTS),
-  text: z.string(),
-});
-export type Hint = z.infer<typeof hintSchema>;
-
 export const rebuildFoundSchema = z.object({
   tag: z.string(),
   /** The rebuild of the books that these rows belong to; null = a new one. */
@@ -204,17 +194,6 @@ export const firstRowSchema = z.object({
   lines: z.array(lineSchema),
 });
 export type FirstRow = z.infer<typeof firstRowSchema>;
-
-/** An earlier import whose rows stand in this file, too: they are not taken again. */
-export const earlierSchema = z.object({
-  importId: z.string(),
-  fileName: z.string(),
-  committedAt: z.string(),
-  /** Rows of this file that came in then, and rows that look like one of then with something changed. */
-  sameRows: z.int(),
-  changedRows: z.int(),
-});
-export type Earlier = z.infer<typeof earlierSchema>;
 
 /** One sheet of a workbook, and what its rows are taken for. */
 export const sheetFoundSchema = z.object({

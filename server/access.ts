@@ -77,6 +77,10 @@ export const access: AccessTable = {
   'GET /api/answers/overruns': READS_BOOKS,
   'GET /api/answers/time-to-sell': READS_BOOKS,
   'GET /api/answers/contingency': READS_BOOKS,
+  'GET /api/answers/rule-for-car': READS_BOOKS,
+  'GET /api/answers/rule-review': READS_BOOKS,
+  'GET /api/checks': READS_BOOKS,
+  'PUT /api/checks/settled': BOOKS,
   'GET /api/rules': READS_BOOKS,
   'POST /api/rules': BOOKS,
 };

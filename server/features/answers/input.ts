@@ -2,7 +2,6 @@ import type { LeftOut, LeftOutReason, RebuildRef } from '#shared/contracts/answe
 import { LEFT_OUT_LISTED } from '#shared/contracts/answers-parts.ts';
 import type { Rule } from '#shared/contracts/rules.ts';
 import type { Day } from '#shared/day.ts';
-import { notYetLeft } from '../../books/shop-facts-rows.ts';
 import type { ShopFacts, ShopRebuild } from '../../books/shop-facts.ts';
 import type { NetFlows } from '../../domain/net-flows.ts';
 import type { TiedUp } from '../../domain/years.ts';
@@ -17,15 +16,6 @@ export interface AnswerInput {
   /** Cash flows of these rebuilds together, by day. */
   flowsOf(ids: readonly string[]): NetFlows;
   rules(): Rule[];
-}
-
-/** The facts as they stand at the end of a day: who leaves later has not left, overhead of later days is not paid. */
-export function asOf(shop: ShopFacts, today: Day): ShopFacts {
-  return {
-    ...shop,
-    rebuilds: shop.rebuilds.map((one) => (one.exit && one.exit.on > today ? notYetLeft(one) : one)),
-    overhead: shop.overhead.filter(({ on }) => on <= today),
-  };
 }
 
 export function refOf({ id, tag, name }: ShopRebuild): RebuildRef {

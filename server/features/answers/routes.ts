@@ -1,7 +1,8 @@
 import type { z } from 'zod';
 import type { Contract } from '#shared/contract.ts';
 import { answersApi } from '#shared/contracts/answers.ts';
-import { type Context, Ready, type Route, route } from '../../platform/http.ts';
+import { sendKept } from '../../books/kept-replies.ts';
+import { type Context, type Ready, type Route, route } from '../../platform/http.ts';
 import { contingencyAnswer } from './contingency.ts';
 import type { AnswerInput } from './input.ts';
 import { overrunsAnswer } from './overruns.ts';
@@ -29,12 +30,8 @@ async function reply<C extends Contract>(
     today: await ctx.today(),
     question: `${contract.path} ${JSON.stringify(query)}`,
   };
-  const { text, gzip } = await keptAnswer(services.database, asked, (input) =>
+  const kept = await keptAnswer(services.database, asked, (input) =>
     JSON.stringify(contract.response.parse(workOut(input))),
   );
-  ctx.res.vary('Accept-Encoding');
-  if (gzip !== null && ctx.req.acceptsEncodings('gzip')) {
-    ctx.res.set('Content-Encoding', 'gzip').type('application/json').send(gzip);
-  }
-  return new Ready(200, text);
+  return sendKept(ctx, kept);
 }

@@ -1,4 +1,4 @@
-import type { Hint } from '#shared/contracts/import-reading.ts';
+import type { Hint } from '#shared/contracts/import-beside.ts';
 import { FileRefusal } from '../refusal.ts';
 import type { OnRow } from '../text/rows.ts';
 

@@ -1,4 +1,5 @@
-import type { Choice, Column, Hint, Reading, SheetFound } from '#shared/contracts/import-reading.ts';
+import type { Hint } from '#shared/contracts/import-beside.ts';
+import type { Choice, Column, Reading, SheetFound } from '#shared/contracts/import-reading.ts';
 import type { ImportSettings } from '#shared/contracts/imports.ts';
 import type { ShopBooks } from '../books.ts';
 import type { FilePlan } from '../read/plan.ts';

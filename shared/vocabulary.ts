@@ -41,6 +41,13 @@ export type Foreseen = (typeof FORESEEN)[number];
 export const LEVELS = ['1/2', '2/3', '4/5', '9/10'] as const;
 export type LevelName = (typeof LEVELS)[number];
 
+/**
+ * Ways to say what a rebuild pays: kept by own hour, by anybody's hour, what a wage for own hours leaves of it, and kept
+ * for each dollar of cost.
+ */
+export const PAY_VIEWS = ['per-hour', 'all-hours', 'after-wage', 'on-cost'] as const;
+export type PayView = (typeof PAY_VIEWS)[number];
+
 /** Damage, as a shop starts out with it. A shop edits its own list. */
 export const DEFAULT_DAMAGES = [
   'front',

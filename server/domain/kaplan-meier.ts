@@ -36,7 +36,7 @@ export interface UnsoldAt {
 }
 
 /** Within this of one half counts as one half (definitions §7). */
-const HALF_TOLERANCE = 1.5e-8;
+export const HALF_TOLERANCE = 1.5e-8;
 
 /**
  * Share still unsold by days on the market, unsold vehicles included (Kaplan & Meier 1958; definitions §7):

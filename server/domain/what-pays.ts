@@ -1,46 +1,143 @@
+import type { PayView } from '#shared/vocabulary.ts';
 import type { RebuildFacts } from './facts.ts';
-import { type ComparedGroup, type GroupComparison, groupComparison } from './group-comparison.ts';
+import { type ComparedGroup, compareGroups, type GroupComparison, groupComparison } from './group-comparison.ts';
+import { withoutFurthest } from './group-without-one.ts';
 import { rebuildOverrun } from './overrun.ts';
-import { profitPerOwnHour, type Worked, worked } from './profit-per-hour.ts';
+import { addPay, NO_PAY, type PayFigure, type PaySums, payFigure, paySums } from './pay-figure.ts';
 import { rebuildProfit } from './profit.ts';
-import { completed, priced } from './sets.ts';
-import { sum } from './statistics.ts';
+import type { WithoutOne } from './ratio-without-one.ts';
+import { completed, type Priced, priced } from './sets.ts';
+
+/** The kind of wreck that a group stands for; of a margin one of the two is null. */
+export interface Kind {
+  readonly class: string | null;
+  readonly damage: string | null;
+}
+
+export interface PaidGroup extends ComparedGroup, Kind {
+  /** Σ ÷ Σ: beside the pulled mean, never in its place. */
+  readonly plain: number | null;
+  readonly sums: Readonly<PaySums>;
+  /** The pulled figure without its furthest rebuild; null = thin, or it is alone. */
+  readonly withoutOne: WithoutOne | null;
+}
+
+export interface PayFit extends Omit<GroupComparison, 'groups'> {
+  readonly groups: readonly PaidGroup[];
+  /** Rebuilds with a figure that are in no group: class or damage is not known. */
+  readonly ungroupedCount: number;
+}
+
+export interface PayFits {
+  readonly cells: PayFit;
+  readonly classes: PayFit;
+  readonly damages: PayFit;
+}
 
 /** Key of a class × damage cell; null = one of the two is not known, so the rebuild is in no cell. */
 export function cellOf(rebuild: RebuildFacts): string | null {
   return rebuild.class === null || rebuild.damage === null ? null : `${rebuild.class}|${rebuild.damage}`;
 }
 
-export interface PaidGroup extends ComparedGroup {
-  /** Σ profit ÷ Σ own hours, cents per hour: beside the pulled mean, never in its place. */
-  readonly plainCents: number;
-  readonly profitCents: number;
-  readonly ownSeconds: number;
+/**
+ * Which wrecks pay (definitions §9, §18.2, decisions 26): a view's figure of each rebuild, compared by class × damage, by
+ * class and by damage; three fits, each on its own. Nobody has a figure: no groups.
+ */
+export function whatPays(facts: readonly RebuildFacts[], view: PayView, wantedCentsPerHour: number | null): PayFits {
+  const figure = payFigure(view, wantedCentsPerHour);
+  const members: Counted[] = [];
+  const keyOf = cellKeys();
+  for (const rebuild of priced(facts)) {
+    const sums = paySums(rebuild);
+    const value = figure(sums);
+    if (value === null) continue;
+    const { id, class: name, damage } = rebuild;
+    members.push({ id, class: name, damage, cell: keyOf(rebuild), sums, value });
+  }
+  return {
+    cells: fit(members, figure, {
+      keyOf: ({ cell }) => cell,
+      kindOf: ({ class: name, damage }) => ({ class: name, damage }),
+    }),
+    classes: fit(members, figure, { keyOf: (one) => one.class, kindOf: (one) => ({ class: one.class, damage: null }) }),
+    damages: fit(members, figure, {
+      keyOf: (one) => one.damage,
+      kindOf: (one) => ({ class: null, damage: one.damage }),
+    }),
+  };
 }
 
-export interface PerHourComparison extends Omit<GroupComparison, 'groups'> {
-  readonly groups: readonly PaidGroup[];
-  /** Rebuilds with hours that are in no group: class or damage is not known. */
-  readonly ungroupedCount: number;
-}
-
-export interface WhatPays {
-  readonly cells: PerHourComparison;
-  readonly classes: PerHourComparison;
-  readonly damages: PerHourComparison;
+/** A rebuild as every fit sees it, worked out once. */
+interface Counted extends Kind {
+  readonly id: string;
+  /** Holds both names, so that no two cells meet in one. null = a name is not known. */
+  readonly cell: string | null;
+  readonly sums: PaySums;
+  readonly value: number;
 }
 
 /**
- * Which wrecks pay (definitions §18.2, decisions 26): profit ÷ own hours per rebuild, cents per hour, compared by
- * class × damage, by class and by damage; three fits, each on its own. No hours known: no groups.
+ * Gives a rebuild's cell its key, each made once: a text that is put together anew for every rebuild costs more to look
+ * up than all the sums.
  */
-export function whatPays(facts: readonly RebuildFacts[]): WhatPays {
-  const set = worked(facts);
-  return {
-    cells: perHour(set, cellOf),
-    classes: perHour(set, (rebuild) => rebuild.class),
-    damages: perHour(set, (rebuild) => rebuild.damage),
+function cellKeys(): (rebuild: Priced) => string | null {
+  const keys = new Map<string, Map<string, string>>();
+  return ({ class: name, damage }) => {
+    if (name === null || damage === null) return null;
+    const row = keys.get(name) ?? new Map<string, string>();
+    keys.set(name, row);
+    const key = row.get(damage) ?? `${name}\0${damage}`;
+    row.set(damage, key);
+    return key;
   };
+}
+
+/** How a fit groups: the key of a rebuild's group (null = in none), and the kind that the group is. */
+interface Grouping {
+  readonly keyOf: (one: Counted) => string | null;
+  readonly kindOf: (one: Counted) => Kind;
+}
+
+interface Gathered {
+  readonly kind: Kind;
+  readonly sums: PaySums;
+  readonly members: { readonly id: string; readonly value: number }[];
+}
+
+/** One fit on its own. */
+function fit(members: readonly Counted[], figure: PayFigure, grouping: Grouping): PayFit {
+  const gathered = gather(members, grouping);
+  const values = new Map<string, number[]>();
+  for (const [key, one] of gathered)
+    values.set(
+      key,
+      one.members.map(({ value }) => value),
+    );
+  const comparison = compareGroups(values);
+  const groups = comparison.groups.flatMap((group, at): PaidGroup[] => {
+    const own = gathered.get(group.group);
+    if (!own) return [];
+    const { kind, sums } = own;
+    const withoutOne = group.isThin ? null : withoutFurthest(comparison, at, own.members);
+    return [{ ...group, ...kind, plain: figure(sums), sums, withoutOne }];
+  });
+  return { ...comparison, groups, ungroupedCount: members.length - comparison.n };
+}
+
+function gather(members: readonly Counted[], { keyOf, kindOf }: Grouping): Map<string, Gathered> {
+  const groups = new Map<string, Gathered>();
+  for (const one of members) {
+    const key = keyOf(one);
+    if (key === null) continue;
+    let group = groups.get(key);
+    if (!group) {
+      group = { kind: kindOf(one), sums: { ...NO_PAY }, members: [] };
+      groups.set(key, group);
+    }
+    addPay(group.sums, one.sums);
+    group.members.push(one);
+  }
+  return groups;
 }
 
 /** Overrun by class × damage (§9), over the rebuilds that have one. */
@@ -59,21 +156,4 @@ function byCell<T extends RebuildFacts>(set: readonly T[], valueOf: (rebuild: T)
     return group === null || value === null ? [] : [{ group, value }];
   });
   return groupComparison(values);
-}
-
-function perHour(set: readonly Worked[], groupOf: (rebuild: Worked) => string | null): PerHourComparison {
-  const grouped = set.flatMap((rebuild) => {
-    const group = groupOf(rebuild);
-    return group === null ? [] : [{ group, rebuild }];
-  });
-  const comparison = groupComparison(
-    grouped.map(({ group, rebuild }) => ({ group, value: profitPerOwnHour(rebuild) })),
-  );
-  const groups = comparison.groups.map((compared) => {
-    const members = grouped.filter(({ group }) => group === compared.group).map(({ rebuild }) => rebuild);
-    const profitCents = sum(members.map((rebuild) => rebuildProfit(rebuild).profitCents));
-    const ownSeconds = sum(members.map((rebuild) => rebuild.ownSeconds));
-    return { ...compared, profitCents, ownSeconds, plainCents: (profitCents * 3600) / ownSeconds };
-  });
-  return { ...comparison, groups, ungroupedCount: set.length - grouped.length };
 }

@@ -138,7 +138,7 @@ function perHourViewsEntry({ facts, wantedCentsPerHour }: DocumentInput): Entry 
 }
 
 function whatPaysEntry(facts: readonly RebuildFacts[]): Entry {
-  const { cells, classes, damages } = whatPays(facts);
+  const { cells, classes, damages } = whatPays(facts, 'per-hour', null);
   return { cell: paidGroupsEntry(cells), class: paidGroupsEntry(classes), damage: paidGroupsEntry(damages) };
 }
 

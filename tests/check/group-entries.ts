@@ -1,17 +1,17 @@
 import type { ComparedGroup, GroupComparison } from '../../server/domain/group-comparison.ts';
-import type { PerHourComparison } from '../../server/domain/what-pays.ts';
+import { byCodePoint } from '../../server/domain/text-order.ts';
+import type { PayFit } from '../../server/domain/what-pays.ts';
 import type { Entry } from './answers-document.ts';
 
 export function groupsEntry(comparison: GroupComparison): Entry {
   return entry(comparison, comparison.groups.map(groupEntry));
 }
 
-export function paidGroupsEntry(comparison: PerHourComparison): Entry {
-  const groups = comparison.groups.map((one) => ({
-    ...groupEntry(one),
-    plain: one.plainCents,
-    few_data: one.isThin,
-  }));
+export function paidGroupsEntry(comparison: PayFit): Entry {
+  const nameOf = (one: PayFit['groups'][number]) => [one.class, one.damage].filter((name) => name !== null).join('|');
+  const groups = comparison.groups
+    .toSorted((a, b) => byCodePoint(nameOf(a), nameOf(b)))
+    .map((one) => ({ ...groupEntry(one), group: nameOf(one), plain: one.plain, few_data: one.isThin }));
   return entry(comparison, groups);
 }
 

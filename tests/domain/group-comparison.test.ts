@@ -81,16 +81,16 @@ describe('what pays', () => {
   ];
 
   it('compares cells, classes and damages by profit per own hour, the plain quotient beside', () => {
-    const { cells, classes, damages } = whatPays(facts);
-    expect(cells.groups.map(({ group, n, mean, plainCents }) => [group, n, mean, plainCents])).toEqual([
-      ['SUV|front', 2, 3500, 3200],
-      ['SUV|hail', 1, 5000, 5000],
+    const { cells, classes, damages } = whatPays(facts, 'per-hour', null);
+    expect(cells.groups.map(({ class: name, damage, n, mean, plain }) => [name, damage, n, mean, plain])).toEqual([
+      ['SUV', 'front', 2, 3500, 3200],
+      ['SUV', 'hail', 1, 5000, 5000],
     ]);
     expect(classes.groups.map(({ group, n }) => [group, n])).toEqual([
       ['SUV', 3],
       ['van', 1],
     ]);
-    expect(damages.groups.map(({ group, n, profitCents }) => [group, n, profitCents])).toEqual([
+    expect(damages.groups.map(({ group, n, sums }) => [group, n, sums.profitCents])).toEqual([
       ['front', 2, 400_000],
       ['hail', 1, 50_000],
     ]);

@@ -1,4 +1,4 @@
-import type { Rule } from '#shared/contracts/rules.ts';
+import { type Rule, ruleEvidenceSchema } from '#shared/contracts/rules.ts';
 import type { RawDatabase } from '../platform/database.ts';
 import { newId } from '../platform/ids.ts';
 import { fromRow } from '../platform/rows.ts';
@@ -8,7 +8,7 @@ export type NewRule = Omit<Rule, 'id' | 'revision' | 'adoptedAt' | 'adoptedByNam
 
 const RULES = `
   SELECT r.id, r.year, r.revision, r.kind, r.level, r.percent, r.flat_cents, r.rebuild_count, r.data_until, r.evidence,
-    r.note, r.adopted_on, r.adopted_at, u.name AS adopted_by_name
+    r.note, r.review, r.adopted_on, r.adopted_at, u.name AS adopted_by_name
   FROM contingency_rules r JOIN users u ON u.id = r.adopted_by
   WHERE r.shop_id = ? ORDER BY r.year DESC, r.revision DESC`;
 
@@ -16,8 +16,12 @@ const RULES = `
 export function readRules(raw: RawDatabase, shopId: string): Rule[] {
   const rows = raw.prepare(RULES).all(shopId) as object[];
   return rows.map((row) => {
-    const rule = fromRow<Rule & { evidence: unknown }>(row);
-    return { ...rule, evidence: JSON.parse(String(rule.evidence)) as Rule['evidence'] };
+    const rule = fromRow<Omit<Rule, 'evidence' | 'review'> & { evidence: string; review: string | null }>(row);
+    return {
+      ...rule,
+      evidence: ruleEvidenceSchema.parse(JSON.parse(rule.evidence)),
+      review: rule.review === null ? null : (JSON.parse(rule.review) as Rule['review']),
+    };
   });
 }
 
@@ -36,6 +40,7 @@ export function ruleStore(scope: ShopScope, userId: string) {
         id,
         revision: (last?.most ?? 0) + 1,
         evidence: JSON.stringify(rule.evidence),
+        review: rule.review && JSON.stringify(rule.review),
         adoptedAt: new Date().toISOString(),
         adoptedBy: userId,
       });

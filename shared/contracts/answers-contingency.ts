@@ -1,14 +1,34 @@
 import { z } from 'zod';
 import { daySchema, idSchema } from '../fields.ts';
 import { LEVELS } from '../vocabulary.ts';
-import { cents, count, figure, filterQuerySchema, headSchema, rateSchema, rebuildRefSchema } from './answers-parts.ts';
+import {
+  cents,
+  count,
+  figure,
+  filterQuerySchema,
+  headSchema,
+  leftOutSchema,
+  MARKS_AT_MOST,
+  rateSchema,
+  rebuildRefSchema,
+} from './answers-parts.ts';
 import { ruleSchema } from './rules.ts';
 
 /** The level as a fraction: 4/5 = holds four times in five. */
 export const contingencyQuerySchema = filterQuerySchema.extend({ level: z.enum(LEVELS).default('4/5') });
 
 /** k = ceil((n + 1)·level): the overrun taken from n sorted ones. Too few yet (k > n): every figure null. */
-const ranked = { n: count, k: count, isAttainable: z.boolean(), guarantee: figure };
+const ranked = {
+  n: count,
+  k: count,
+  isAttainable: z.boolean(),
+  guarantee: figure,
+  /** What the level may truly come to with so few rebuilds: 10th and 90th percentile. Two-part: roughly. */
+  band: z.object({ lower: z.number(), upper: z.number() }).nullable(),
+};
+
+/** Between what a figure moves when any one rebuild is left out. */
+const moves = <T extends z.ZodType>(value: T) => z.object({ lowest: value, highest: value });
 
 const percentRuleSchema = z.object({
   ...ranked,
@@ -18,6 +38,8 @@ const percentRuleSchema = z.object({
   percent: z.int().nullable(),
   /** The rebuild whose overrun it is. */
   taken: rebuildRefSchema.extend({ estimateCents: cents, overrunCents: cents }).nullable(),
+  /** Without any one rebuild: the overrun taken, and that as a whole percent. null = too few without one of them. */
+  without: z.object({ uplift: moves(z.number()), percent: moves(z.int()) }).nullable(),
 });
 
 const twoPartRuleSchema = z.object({
@@ -29,6 +51,7 @@ const twoPartRuleSchema = z.object({
   /** For surprises: as computed, and raised to whole units of money to adopt. */
   flatCents: cents.nullable(),
   adoptFlatCents: cents.nullable(),
+  without: z.object({ creepPercent: moves(z.int()), flatCents: moves(cents) }).nullable(),
 });
 
 /** How a rule did on rebuilds whose outcome it could not know. `rate` = covered x ÷ scored n, interval approximate. */
@@ -47,7 +70,12 @@ const backTestSchema = z.object({
   scores: z.array(scoreSchema),
 });
 
-/** One rebuild against the rule it would have had. Rule fields null = too few yet. */
+/** What a rule asked for one rebuild, as known when it was bought. null = too few yet. */
+const askedSchema = z
+  .object({ reserveCents: cents, isCovered: z.boolean(), shortCents: cents, unusedCents: cents })
+  .nullable();
+
+/** One rebuild against the rules it would have had. */
 const trailSchema = rebuildRefSchema.extend({
   exitOn: daySchema,
   year: z.int(),
@@ -55,12 +83,65 @@ const trailSchema = rebuildRefSchema.extend({
   overrunCents: cents,
   /** overrun ÷ estimate. */
   overrun: z.number(),
+  /** Its place among all overruns in order, the smallest 1. */
+  place: count,
   knownCount: count,
+  /** The overrun that the percent rule took then. */
   uplift: figure,
-  reserveCents: cents.nullable(),
-  isCovered: z.boolean().nullable(),
-  shortCents: cents.nullable(),
-  unusedCents: cents.nullable(),
+  asked: askedSchema,
+  /** null = foreseen is not said of every entry, so the two-part rule leaves it out. */
+  twoPart: z
+    .object({
+      surpriseCents: cents,
+      /** Beyond estimate and creep of today's rule, and its place in that order. */
+      leftCents: cents,
+      place: count,
+      asked: askedSchema,
+    })
+    .nullable(),
+});
+
+const driftFigureSchema = z.object({ n: count, k: count, uplift: figure, percent: z.int().nullable() });
+
+/** Do the last 24 months agree with the years before? */
+const driftSchema = z.object({
+  /** The last 24 months are the days after this one. */
+  after: z.iso.date(),
+  all: driftFigureSchema,
+  recent: driftFigureSchema,
+  before: driftFigureSchema,
+  /** Recent rebuilds within the figure of the years before, and how many would be. null = no such figure. */
+  withinCount: count.nullable(),
+  expectedCount: figure,
+  /** null = too few yet to say. */
+  verdict: z.enum(['costs more', 'costs less', 'agrees']).nullable(),
+});
+
+export const BIDS_LISTED = 50;
+const judgedBidSchema = rebuildRefSchema.extend({
+  paidCents: cents,
+  limitCents: cents,
+  reserveCents: cents,
+  profitCents: cents,
+});
+const bidGroupSchema = z.object({
+  count,
+  lostCount: count,
+  /** Σ profit of those that lost, and of those that did not. */
+  lostCents: cents,
+  gainedCount: count,
+  gainedCents: cents,
+  /** The first fifty. */
+  rebuilds: z.array(judgedBidSchema),
+});
+
+/** What the rules of the day would have done to past bids. */
+const pastBidsSchema = z.object({
+  n: count,
+  reserveCents: cents,
+  skipped: bidGroupSchema,
+  aboveAnyway: bidGroupSchema,
+  leftOut: z.array(leftOutSchema),
 });
 
 const damageSchema = z.object({
@@ -91,9 +172,13 @@ export const contingencyAnswerSchema = headSchema.extend({
   backTest: backTestSchema,
   /** The same with the two-part rule, over those where each entry says whether it was foreseen. */
   twoPartBackTest: backTestSchema,
-  /** In the order in which they left; the latest 300. */
-  trail: z.array(trailSchema),
+  /** In the order in which they left; the latest so many. */
+  trail: z.array(trailSchema).max(MARKS_AT_MOST),
   trailTotal: count,
+  drift: driftSchema,
+  /** null = own hours ask for nothing. */
+  wantedCentsPerHour: figure,
+  pastBids: z.object({ percent: pastBidsSchema, twoPart: pastBidsSchema }),
   damages: z.array(damageSchema),
   thisYear: z.object({ year: z.int(), rule: ruleInForceSchema.nullable() }),
   nextYear: z.object({ year: z.int(), rule: ruleInForceSchema.nullable() }),

@@ -58,6 +58,8 @@ export const LEFT_OUT_REASONS = [
   'not listed yet',
   'fewer than five known when it was bought',
   'too few known for this level when it was bought',
+  'no sale expected in its estimate',
+  'no hours planned',
 ] as const;
 export type LeftOutReason = (typeof LEFT_OUT_REASONS)[number];
 

@@ -1,9 +1,12 @@
 import { z } from 'zod';
 import type { FeatureApi } from '../contract.ts';
-import { daySchema, idSchema, optionalTextSchema } from '../fields.ts';
+import { daySchema, idSchema, optionalTextSchema, positiveCentsSchema } from '../fields.ts';
 import { LEVELS } from '../vocabulary.ts';
 
 export const RULE_KINDS = ['percent', 'two-part'] as const;
+
+/** A rule holds at most so many percent: an estimate that is off by more is no plan to put a cushion on. */
+export const MOST_PERCENT = 1000;
 
 /** The sums that the figure was taken from, kept as they were on the day. */
 export const ruleEvidenceSchema = z.object({
@@ -15,10 +18,27 @@ export const ruleEvidenceSchema = z.object({
   uplift: z.number().nullable(),
   /** Two-part: the flat part before rounding up to whole units of money. */
   flatCents: z.int().nullable(),
+  /** What the books asked for, rounded up: the rule itself may be set otherwise. null = an old rule, adopted as asked. */
+  askedPercent: z.int().nullable().default(null),
+  askedFlatCents: z.int().nullable().default(null),
   /** Rules set this way, on what was known at the time: covered x of n. */
   covered: z.int(),
   scored: z.int(),
   booksVersion: z.int(),
+});
+
+/** What was seen of the rule before when this one was adopted: it was kept as it was, or changed. */
+export const ruleReviewedSchema = z.object({
+  ruleId: idSchema,
+  year: z.int(),
+  revision: z.int(),
+  decision: z.enum(['kept', 'changed']),
+  /** Held x of n bought under it and finished; so many were not finished. */
+  x: z.int(),
+  n: z.int(),
+  openCount: z.int(),
+  shortCents: z.int(),
+  unusedCents: z.int(),
 });
 
 /** A contingency rule as adopted for a shop year. Later revisions stand beside it; the highest is in force. */
@@ -37,6 +57,8 @@ export const ruleSchema = z.object({
   dataUntil: daySchema,
   evidence: ruleEvidenceSchema,
   note: z.string().nullable(),
+  /** null = adopted without looking at an earlier one. */
+  review: ruleReviewedSchema.nullable(),
   adoptedOn: daySchema,
   adoptedAt: z.string(),
   adoptedByName: z.string(),
@@ -48,7 +70,12 @@ export const newRuleSchema = z.strictObject({
   year: z.int().min(1950).max(2101),
   level: z.enum(LEVELS),
   kind: z.enum(RULE_KINDS),
+  /** Set otherwise than the books ask: above it freely, below it only with a note that says why, or as kept. */
+  percent: z.int({ error: 'Give a whole percent.' }).min(0).max(MOST_PERCENT).optional(),
+  flatCents: positiveCentsSchema.optional(),
   note: optionalTextSchema(1000).optional(),
+  /** The rule whose record was looked at. The same figures again are kept, others are a change. */
+  reviewedRuleId: idSchema.optional(),
 });
 
 export const rulesApi = {
@@ -61,7 +88,7 @@ export const rulesApi = {
   adopt: {
     method: 'POST',
     path: '/api/rules',
-    summary: 'Adopt the contingency rule that the books ask for, for one shop year',
+    summary: 'Adopt a contingency rule for one shop year: as the books ask, above it, or below it with a reason',
     body: newRuleSchema,
     response: ruleSchema,
     once: true,

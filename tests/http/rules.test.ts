@@ -92,4 +92,51 @@ describe('adopting a rule', () => {
     const bo = await api.owner('Bo Lund');
     expect((await bo.get('/api/rules')).body.rules).toEqual([]);
   });
+
+  it('may be set above what the books ask, and keeps both figures', async () => {
+    const { ada } = await openSmallShop();
+    const more = { year: 2026, level: '1/2', kind: 'two-part', percent: 5, flatCents: 50_000 };
+    const { status, body } = await ada.post('/api/rules', more);
+    expect(status).toBe(201);
+    expect(body).toMatchObject({ percent: 5, flatCents: 50_000, review: null });
+    expect(body.evidence).toMatchObject({ askedPercent: 0, askedFlatCents: 40_000, flatCents: 40_000 });
+  });
+
+  it('is set below it only with a reason', async () => {
+    const { ada } = await openSmallShop();
+    const less = { year: 2026, level: '1/2', kind: 'percent', percent: 49 };
+    const bare = await ada.post('/api/rules', less);
+    expect([bare.status, bare.body.errors[0].pointer]).toEqual([422, '/note']);
+    expect((await ada.post('/api/rules', { ...less, note: '   ' })).status).toBe(422);
+    const said = await ada.post('/api/rules', { ...less, note: 'We stopped buying flood cars' });
+    expect(said.body).toMatchObject({ percent: 49, evidence: { askedPercent: 50 } });
+    const part = { year: 2026, level: '1/2', kind: 'two-part', percent: 9, flatCents: 39_999 };
+    expect((await ada.post('/api/rules', part)).body.errors[0].pointer).toBe('/note');
+  });
+
+  it('refuses figures that are no rule', async () => {
+    const { ada } = await openSmallShop();
+    const wish = { year: 2026, level: '1/2', kind: 'percent' };
+    expect((await ada.post('/api/rules', { ...wish, percent: 50.5 })).status).toBe(400);
+    expect((await ada.post('/api/rules', { ...wish, percent: 1001 })).status).toBe(400);
+    expect((await ada.post('/api/rules', { ...wish, percent: -1 })).status).toBe(400);
+    const flat = await ada.post('/api/rules', { ...wish, flatCents: 100 });
+    expect([flat.status, flat.body.errors[0].pointer]).toEqual([422, '/flatCents']);
+    const unknown = await ada.post('/api/rules', { ...wish, reviewedRuleId: 'A'.repeat(22) });
+    expect([unknown.status, unknown.body.errors[0].pointer]).toEqual([422, '/reviewedRuleId']);
+  });
+
+  it('refuses a rule that no plan could carry', async () => {
+    const { ada, books } = await openSmallShop();
+    for (const i of [0, 1, 2, 3, 4, 5]) {
+      const { id } = await books.rebuild({ boughtOn: `2023-01-0${i + 1}`, soldOn: '2023-05-01', saleCents: 1 });
+      await books.lock(await books.plan(id, { parts: 100 }));
+      await books.entry({ rebuildId: id, cents: 2_000 });
+    }
+    const wild = await ada.post('/api/rules', { year: 2026, level: '4/5', kind: 'percent' });
+    expect([wild.status, wild.body.errors[0].detail]).toEqual([
+      422,
+      'The books ask for 1900%: no plan can carry that. Look at the estimates first.',
+    ]);
+  });
 });

@@ -1,25 +1,27 @@
 import type { z } from 'zod';
 import type { contingencyAnswerSchema, contingencyQuerySchema } from '#shared/contracts/answers-contingency.ts';
-import { MARKS_AT_MOST } from '#shared/contracts/answers-parts.ts';
 import type { Rule } from '#shared/contracts/rules.ts';
 import type { ShopRebuild } from '../../books/shop-facts.ts';
 import { type Trial, walkForward } from '../../domain/back-test.ts';
 import { contingency, type Level, levelOf, rankAt, wholePercent } from '../../domain/contingency.ts';
 import { ruleRecord } from '../../domain/rule-record.ts';
-import { type Completed, isOverwritten, type PlannedOutcome, plannedOutcomes } from '../../domain/sets.ts';
+import { type Completed, isOverwritten, plannedOutcomes } from '../../domain/sets.ts';
 import { median, quantile, sum } from '../../domain/statistics.ts';
-import { twoPartRule } from '../../domain/two-part-rule.ts';
 import { shopYearOf, yearSpan } from '../../domain/years.ts';
+import { driftOf } from './contingency-drift.ts';
+import { pastBidsOf } from './contingency-past-bids.ts';
+import { percentOf, twoPartOf } from './contingency-rules.ts';
 import { backTestOf, FLAT_RULES } from './contingency-scores.ts';
+import { trailOf } from './contingency-trail.ts';
 import { filtered, filterOptions } from './filter.ts';
-import { type AnswerInput, leftOut, rebuildOf, refOf } from './input.ts';
+import { type AnswerInput, leftOut, rebuildOf } from './input.ts';
 
 type Answer = z.input<typeof contingencyAnswerSchema>;
 
 /** From this many rebuilds on a damage type gets a figure of its own (decisions 27). */
 const OWN_FIGURE_FROM = 9;
 
-/** How much cushion should next year's budgets carry? (definitions §10, §11, §11b, §18.3) */
+/** How much cushion should next year's budgets carry? (definitions §10, §11, §11b, §18.3; trade: drift, past bids) */
 export function contingencyAnswer(input: AnswerInput, query: z.output<typeof contingencyQuerySchema>): Answer {
   const { level: name, ...filter } = query;
   const level = levelOf(name);
@@ -35,6 +37,9 @@ export function contingencyAnswer(input: AnswerInput, query: z.output<typeof con
       ? [twoPartTest]
       : walkForward(outcomes, { levels: [level], knowledge: 'asKnown', withTwoPart: false });
   const trials = test?.trials.percent ?? [];
+  const twoPartTrials = twoPartTest?.trials.twoPart ?? [];
+  const twoPart = twoPartOf(told, level);
+  const { creepPercent } = twoPart;
   return {
     asOf: input.today,
     rebuildCount: rebuilds.length,
@@ -50,11 +55,14 @@ export function contingencyAnswer(input: AnswerInput, query: z.output<typeof con
     estimateCents: sum(outcomes.map((one) => one.estimateCents)),
     overrunCents: sum(outcomes.map((one) => one.overrunCents)),
     percent: percentOf(input, outcomes, level),
-    twoPart: twoPartOf(told, level),
+    twoPart,
     backTest: backTestOf(test, ['percent', ...FLAT_RULES]),
     twoPartBackTest: backTestOf(twoPartTest, ['percent', 'twoPart', ...FLAT_RULES]),
-    trail: trials.slice(-MARKS_AT_MOST).map((trial) => trailOf(input, trial)),
+    trail: trailOf(input, { outcomes, told, trials, twoPartTrials, creepPercent }),
     trailTotal: trials.length,
+    drift: driftOf(outcomes, level, input.today),
+    wantedCentsPerHour: input.shop.wantedCentsPerHour,
+    pastBids: { percent: pastBidsOf(input, trials), twoPart: pastBidsOf(input, twoPartTrials) },
     damages: damagesOf(input, set, level),
     ...rulesOf(input),
   };
@@ -69,60 +77,6 @@ function unscored(input: AnswerInput, trials: readonly Trial[]) {
     ['fewer than five known when it was bought', few(true)],
     ['too few known for this level when it was bought', few(false)],
   ] as const;
-}
-
-function percentOf(input: AnswerInput, outcomes: readonly PlannedOutcome[], level: Level): Answer['percent'] {
-  const { n, k, guarantee, uplift, taken } = contingency(outcomes, level);
-  // The measure hands back the very outcome that it took.
-  const outcome = outcomes.find((one) => one === taken);
-  return {
-    n,
-    k,
-    isAttainable: taken !== null,
-    guarantee,
-    uplift,
-    percent: taken && wholePercent(taken),
-    taken: outcome
-      ? {
-          ...refOf(rebuildOf(input, outcome.id)),
-          estimateCents: outcome.estimateCents,
-          overrunCents: outcome.overrunCents,
-        }
-      : null,
-  };
-}
-
-function twoPartOf(outcomes: readonly PlannedOutcome[], level: Level): Answer['twoPart'] {
-  const { n, k, creepPercent, flatCents } = twoPartRule(outcomes, level);
-  return {
-    n,
-    k,
-    isAttainable: flatCents !== null,
-    guarantee: flatCents === null ? null : k / (n + 1),
-    creepPercent,
-    creepCents: sum(outcomes.map((one) => one.overrunCents - one.surpriseCents)),
-    estimateCents: sum(outcomes.map((one) => one.estimateCents)),
-    flatCents,
-    adoptFlatCents: flatCents === null ? null : Math.ceil(flatCents / 100) * 100,
-  };
-}
-
-function trailOf(input: AnswerInput, trial: Trial): Answer['trail'][number] {
-  const { id, exitOn, estimateCents: plan, overrunCents, historySize, asked } = trial;
-  return {
-    ...refOf(rebuildOf(input, id)),
-    exitOn,
-    year: shopYearOf(exitOn, input.shop.startMonth),
-    estimateCents: plan,
-    overrunCents,
-    overrun: overrunCents / plan,
-    knownCount: historySize,
-    uplift: asked?.uplift ?? null,
-    reserveCents: asked?.reserveCents ?? null,
-    isCovered: asked?.isCovered ?? null,
-    shortCents: asked?.shortCents ?? null,
-    unusedCents: asked?.unusedCents ?? null,
-  };
 }
 
 function damagesOf({ shop }: AnswerInput, set: readonly Completed[], level: Level): Answer['damages'] {

@@ -7,6 +7,8 @@ import { contingencyAnswer } from './contingency.ts';
 import type { AnswerInput } from './input.ts';
 import { overrunsAnswer } from './overruns.ts';
 import { keptAnswer } from './read-model.ts';
+import { ruleForCar } from './rule-for-car.ts';
+import { ruleReview } from './rule-review.ts';
 import { timeToSellAnswer } from './time-to-sell.ts';
 import { whatPaysAnswer } from './what-pays.ts';
 import { yearAnswer } from './year.ts';
@@ -17,6 +19,8 @@ export const answersRoutes: Route[] = [
   route(answersApi.overruns, (ctx) => reply(ctx, (input) => overrunsAnswer(input, ctx.query))),
   route(answersApi.timeToSell, (ctx) => reply(ctx, (input) => timeToSellAnswer(input, ctx.query))),
   route(answersApi.contingency, (ctx) => reply(ctx, (input) => contingencyAnswer(input, ctx.query))),
+  route(answersApi.ruleForCar, (ctx) => reply(ctx, (input) => ruleForCar(input, ctx.query))),
+  route(answersApi.ruleReview, (ctx) => reply(ctx, (input) => ruleReview(input, ctx.query))),
 ];
 
 /** The kept text of this question, or the answer worked out now and checked by its contract. */

@@ -19,7 +19,7 @@ export function BackTestPanel({ answer }: { answer: ContingencyAnswer }) {
     year: one.year,
     rate: one.overrun,
     ruleRate: one.uplift,
-    shortCents: one.shortCents,
+    shortCents: one.asked?.shortCents ?? null,
   }));
   const latest =
     answer.trailTotal > bars.length ? ` The latest ${bars.length} of ${format.number(answer.trailTotal)}.` : '';

@@ -7,7 +7,8 @@ import { contingencyReply, score } from '../replies.ts';
 
 const format = createFormatter({ currency: 'USD', locale: 'en-US' });
 const say = (...changes: Parameters<typeof contingencyReply>) => sayContingency(contingencyReply(...changes), format);
-const tooFew = { k: 6, isAttainable: false, guarantee: null, uplift: null, percent: null, taken: null };
+const nothing = { guarantee: null, band: null, uplift: null, percent: null, taken: null, without: null };
+const tooFew = { k: 6, isAttainable: false, ...nothing };
 
 describe('the answer', () => {
   test('says what to add and how rules set this way did, never how this rule did', () => {

@@ -15,6 +15,7 @@ export const PLACES: readonly Place[] = [
   { path: 'ledger', label: 'Ledger', group: 'Books', roles: BOOKS },
   { path: 'hours', label: 'Hours', group: 'Books', roles: [...BOOKS, 'mechanic'] },
   { path: 'import', label: 'Import', group: 'Books', roles: ['owner', 'bookkeeper'] },
+  { path: 'data-check', label: 'Data check', group: 'Books', roles: BOOKS },
   { path: 'people', label: 'People', group: 'Shop', roles: ['owner'] },
   { path: 'shop', label: 'Shop', group: 'Shop', roles: BOOKS },
 ];

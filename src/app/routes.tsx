@@ -22,6 +22,7 @@ const LedgerPage = lazyPage(async () => (await import('../pages/ledger.tsx')).Le
 const HoursPage = lazyPage(async () => (await import('../pages/hours.tsx')).HoursPage);
 const ImportsPage = lazyPage(async () => (await import('../pages/imports.tsx')).ImportsPage);
 const ImportPage = lazyPage(async () => (await import('../pages/import.tsx')).ImportPage);
+const DataCheckPage = lazyPage(async () => (await import('../pages/data-check.tsx')).DataCheckPage);
 const PeoplePage = lazyPage(async () => (await import('../pages/people.tsx')).PeoplePage);
 const ShopPage = lazyPage(async () => (await import('../pages/shop.tsx')).ShopPage);
 
@@ -50,6 +51,7 @@ export function AppRoutes() {
           <Route path="hours" element={<HoursPage />} />
           <Route path="import" element={<ImportsPage />} />
           <Route path="import/:importId" element={<ImportPage />} />
+          <Route path="data-check" element={<DataCheckPage />} />
           <Route path="people" element={<PeoplePage />} />
           <Route path="shop" element={<ShopPage />} />
           <Route path="*" element={<NotFoundPage />} />

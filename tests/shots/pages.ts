@@ -23,6 +23,7 @@ export const PAGES: readonly PageToShoot[] = [
   { name: 'own-hours', path: 'hours?view=mine' },
   { name: 'import', path: 'import' },
   { name: 'one-import', path: 'import', follow: 'main a[href*="/import/"]' },
+  { name: 'data-check', path: 'data-check' },
   { name: 'people', path: 'people' },
   { name: 'shop', path: 'shop' },
 ];

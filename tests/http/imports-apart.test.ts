@@ -40,7 +40,7 @@ describe('an import and everything else', () => {
       control: read.reading?.control,
       at: new Date().toISOString(),
       requestId: 'x',
-      file: importPath(config.dataDir, read.id),
+      files: [{ name: 'old.csv', path: importPath(config.dataDir, read.id) }],
     };
     const entry = new URL('../../server/features/imports/work.ts', import.meta.url).href;
     const child = spawn(

@@ -15,6 +15,23 @@ export const upload = (
     .set('Idempotency-Key', key)
     .attach('file', Buffer.isBuffer(bytes) ? bytes : Buffer.from(bytes), name);
 
+export type NamedFile = readonly [name: string, content: Buffer | string];
+
+/** Uploads several files as one import. */
+export function uploadFiles(member: Member, files: readonly NamedFile[], query = '') {
+  const request = member.request('post', `/api/imports${query}`).set('Idempotency-Key', randomUUID());
+  for (const [name, content] of files)
+    request.attach('file', Buffer.isBuffer(content) ? content : Buffer.from(content), name);
+  return request;
+}
+
+/** Uploads, reads and books several files as one import. */
+export async function filesBroughtIn(member: Member, files: readonly NamedFile[]): Promise<Import> {
+  const reply = await uploadFiles(member, files);
+  if (reply.status !== 201) throw new Error(`upload answered ${reply.status}: ${reply.text}`);
+  return booked(member, await settled(member, reply.body.id));
+}
+
 /** Waits until nothing is being done with an import, as the page does by asking again. */
 export async function settled(member: Member, id: string): Promise<Import> {
   for (let tries = 0; tries < 200; tries++) {
@@ -34,7 +51,11 @@ export async function uploaded(member: Member, bytes: Buffer | string, name = 'o
 
 /** Uploads, reads and books a file. */
 export async function broughtIn(member: Member, bytes: Buffer | string, name = 'old.csv'): Promise<Import> {
-  const { id } = await uploaded(member, bytes, name);
+  return booked(member, await uploaded(member, bytes, name));
+}
+
+/** Books a file that was read. */
+export async function booked(member: Member, { id }: Pick<Import, 'id'>): Promise<Import> {
   const reply = await member.post(`/api/imports/${id}/commit`);
   if (reply.status >= 300) throw new Error(`commit answered ${reply.status}: ${reply.text}`);
   return settled(member, id);

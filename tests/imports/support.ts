@@ -27,7 +27,20 @@ export const sampleBytes = (name: string): Buffer => readFileSync(path.join(SAMP
 
 /** Reads text (or bytes) as a file for an empty shop. */
 export function read(file: string | Buffer, settings: ImportSettings = {}, books: Partial<ShopBooks> = {}): Reading {
-  return readFile(bytesOf(Buffer.isBuffer(file) ? file : Buffer.from(file)), emptyBooks(books), settings);
+  return readFiles([['old.csv', file]], settings, books);
+}
+
+/** Reads several files as one import. */
+export function readFiles(
+  files: readonly (readonly [name: string, content: string | Buffer])[],
+  settings: ImportSettings = {},
+  books: Partial<ShopBooks> = {},
+): Reading {
+  const given = files.map(([name, content]) => ({
+    name,
+    source: bytesOf(Buffer.isBuffer(content) ? content : Buffer.from(content)),
+  }));
+  return readFile(given, emptyBooks(books), settings);
 }
 
 /** All lines that a file of at most 200 rows came to. */

@@ -1,7 +1,8 @@
 import { shopScope } from '../../books/scope.ts';
 import type { Services } from '../../platform/http.ts';
-import { dropFile, importPath } from './files.ts';
+import { dropFile, importPath, sweepFiles } from './files.ts';
 import { runJob } from './run-job.ts';
+import type { FileAt } from './work.ts';
 import { controlOf, type ImportRecord, importStore, settingsOf } from './store.ts';
 
 /** Share done of the imports under way, by id. Gone after a restart, as they are. */
@@ -18,6 +19,12 @@ interface Asker {
   readonly shopId: string;
 }
 
+/** The files of an import, and where they lie. */
+async function filesAt({ services, shopId }: Asker, importId: string): Promise<FileAt[]> {
+  const files = await importStore(shopScope(services.database.reader, shopId)).files(importId);
+  return files.map(({ name, number }) => ({ name, path: importPath(services.config.dataDir, importId, number) }));
+}
+
 const tracked = async (id: string, work: () => Promise<void>, { services }: Asker) => {
   shares.set(id, 0);
   try {
@@ -32,7 +39,7 @@ const tracked = async (id: string, work: () => Promise<void>, { services }: Aske
 /** Reads a file in a worker and keeps what was understood. Returns at once; the import tells how it is going. */
 export function startReading(asker: Asker, record: ImportRecord): void {
   const { services, shopId } = asker;
-  const { database, config, now } = services;
+  const { database, now } = services;
   const write = (work: (store: ReturnType<typeof importStore>) => Promise<unknown>) =>
     database.lock(() => work(importStore(shopScope(database.writer, shopId))));
   void tracked(
@@ -41,7 +48,7 @@ export function startReading(asker: Asker, record: ImportRecord): void {
       const job = { databaseFile: database.file, shopId, importId: record.id, now: now() };
       try {
         const done = await runJob(
-          { ...job, kind: 'read', file: importPath(config.dataDir, record.id), settings: settingsOf(record) },
+          { ...job, kind: 'read', files: await filesAt(asker, record.id), settings: settingsOf(record) },
           (share) => shares.set(record.id, share),
         );
         if (done.kind === 'read') await write((store) => store.keepReading(record.id, done.reading));
@@ -62,7 +69,7 @@ export function startCommit(
   record: ImportRecord,
 ): void {
   const { services, shopId, userId, requestId } = asker;
-  const { database, config, now } = services;
+  const { database, now } = services;
   void tracked(
     record.id,
     () =>
@@ -74,7 +81,7 @@ export function startCommit(
             {
               ...common,
               kind: 'commit',
-              file: importPath(config.dataDir, record.id),
+              files: await filesAt(asker, record.id),
               settings: settingsOf(record),
               control: controlOf(record),
               at: new Date().toISOString(),
@@ -95,7 +102,7 @@ export function startCommit(
 }
 
 /** Puts imports straight that a stop of the server cut off: nothing of them was booked. */
-export async function recoverImports({ database }: Services): Promise<void> {
+export async function recoverImports({ config, database }: Services): Promise<void> {
   await database.lock(async () => {
     await database.writer('imports').where({ state: 'committing' }).update({ state: 'ready' });
     await database
@@ -103,7 +110,15 @@ export async function recoverImports({ database }: Services): Promise<void> {
       .where({ state: 'reading' })
       .update({ state: 'refused', refusal: 'The server stopped while it read this file. Bring it in again.' });
   });
+  const needed = await database
+    .reader('import_files')
+    .join('imports', (join) => join.on('imports.id', 'import_id').on('imports.shop_id', 'import_files.shop_id'))
+    .whereNot('state', 'discarded')
+    .select('import_id as importId', 'number');
+  await sweepFiles(config.dataDir, needed);
 }
 
-/** Removes the file of an import that was dropped. */
-export const forgetFile = ({ config }: Services, importId: string) => dropFile(importPath(config.dataDir, importId));
+/** Removes the files of an import that was dropped. */
+export async function forgetFiles(asker: Asker, importId: string): Promise<void> {
+  for (const { path } of await filesAt(asker, importId)) await dropFile(path);
+}

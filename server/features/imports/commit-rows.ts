@@ -9,8 +9,8 @@ import type { Draft } from './read/draft.ts';
 import type { DraftLine } from './read/plan.ts';
 import { readRows, type RowsRead } from './read/read-rows.ts';
 import { rebuildColumns } from './rebuild-columns.ts';
+import type { GivenFile } from './sheets/open-files.ts';
 import { shopBooks, wordIds } from './shop-books.ts';
-import type { ByteSource } from './text/bytes.ts';
 import { understand } from './understand/understand.ts';
 
 /** The books changed since the file was read, so that it would now come in differently. */
@@ -40,11 +40,11 @@ interface Planned {
  */
 export function commitRows(
   raw: RawDatabase,
-  source: ByteSource,
+  files: readonly GivenFile[],
   task: CommitTask,
   onPart?: (share: number) => void,
 ): Brought {
-  const { plan } = understand(source, shopBooks(raw, task.shopId, task.now), task.settings);
+  const { plan } = understand(files, shopBooks(raw, task.shopId, task.now), task.settings);
   if (!plan) throw new ReadingOutdated();
   raw.pragma('defer_foreign_keys = ON');
   const books = importedBooks(raw, task);

@@ -1,14 +1,18 @@
 import { createHash } from 'node:crypto';
 import { createReadStream } from 'node:fs';
-import { mkdir, open, rename, rm } from 'node:fs/promises';
+import { mkdir, open, readdir, rename, rm } from 'node:fs/promises';
 import path from 'node:path';
 import { pipeline } from 'node:stream/promises';
 
 /** Where uploaded files lie, below everything else that the server writes. */
 export const importFolder = (dataDir: string) => path.join(dataDir, 'imports');
 
-/** The file of an import, under its random id: the name that it was given is only text. */
-export const importPath = (dataDir: string, importId: string) => path.join(importFolder(dataDir), importId);
+/** A file of an import, under its random id and its number: the name that it was given is only text. */
+export const importPath = (dataDir: string, importId: string, number = 1) =>
+  path.join(importFolder(dataDir), fileKey(importId, number));
+
+/** What the file is called in the folder of uploads. */
+const fileKey = (importId: string, number: number) => (number === 1 ? importId : `${importId}.${number}`);
 
 /** Makes the folder of uploads, if need be. */
 export async function makeImportFolder(dataDir: string): Promise<string> {
@@ -35,6 +39,17 @@ async function syncToDisk(place: string, flags: string): Promise<void> {
 
 export async function dropFile(file: string): Promise<void> {
   await rm(file, { force: true });
+}
+
+/** Removes every uploaded file that no import needs: a stop of the server may have left some. */
+export async function sweepFiles(
+  dataDir: string,
+  needed: readonly { importId: string; number: number }[],
+): Promise<void> {
+  const folder = await makeImportFolder(dataDir);
+  const kept = new Set(needed.map(({ importId, number }) => fileKey(importId, number)));
+  const orphans = (await readdir(folder)).filter((name) => !kept.has(name));
+  await Promise.all(orphans.map((name) => dropFile(path.join(folder, name))));
 }
 
 /** SHA-256 of a file, as hex. */

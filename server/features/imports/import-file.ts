@@ -32,15 +32,15 @@ export async function importFile(file: FileToImport): Promise<{ importId: string
   await makeImportFolder(config.dataDir);
   const kept = importPath(config.dataDir, importId);
   await writeFile(kept, bytes);
-  const common = { databaseFile: database.file, shopId, importId, now, userId, requestId, file: kept, settings };
+  const files = [{ name: file.fileName, path: kept }];
+  const common = { databaseFile: database.file, shopId, importId, now, userId, requestId, files, settings };
   return database.lock(async () => {
     const store = importStore(shopScope(database.writer, shopId));
     await store.create({
       id: importId,
-      fileName: file.fileName,
-      fileSha256: sha256(bytes),
-      byteSize: bytes.length,
       createdBy: userId,
+      files: [{ number: 1, name: file.fileName, sha256: sha256(bytes), byteSize: bytes.length }],
+      settings,
     });
     const read = doJob({ ...common, kind: 'read' });
     if (read.kind !== 'read') throw new Error('The file was not read');

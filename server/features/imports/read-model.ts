@@ -53,13 +53,15 @@ function summaries(scope: ShopScope) {
 
 /** One import with how it was understood. Another shop's id and an unknown one answer the same 404. */
 export async function showImport(scope: ShopScope, id: string): Promise<Import> {
-  const record = await importStore(scope).get(id);
+  const store = importStore(scope);
+  const record = await store.get(id);
+  const files = await store.files(id);
   const row: object = await summaries(scope).where('imports.id', id).first();
   return {
     ...fromRow<ImportSummary>(row),
     progress: progressOf(id),
     reading: readingOf(record),
-    files: [{ number: 1, name: record.fileName, byteSize: record.byteSize }],
+    files,
     settings: settingsOf(record),
   };
 }

@@ -3,7 +3,7 @@ import { shopScope } from '../../books/scope.ts';
 import { write } from '../../books/write.ts';
 import { type Context, type Route, route } from '../../platform/http.ts';
 import { ProblemError } from '../../platform/problems.ts';
-import { forgetFile, startCommit, startReading } from './background.ts';
+import { forgetFiles, startCommit, startReading } from './background.ts';
 import { listImports, listRows, showImport } from './read-model.ts';
 import { runJob } from './run-job.ts';
 import { type ImportRecord, importStore, readingOf, settingsOf } from './store.ts';
@@ -111,6 +111,6 @@ async function discardImport(ctx: Context<typeof importsApi.discard>) {
     const reply: Import = await showImport(books.scope, importId);
     return { id: importId, before: { state: before.state }, after: { state: 'discarded' }, reply };
   });
-  await forgetFile(ctx.services, importId);
+  await forgetFiles({ services: ctx.services, shopId: ctx.actor.shopId }, importId);
   return ready;
 }

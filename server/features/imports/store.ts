@@ -22,39 +22,74 @@ export interface ImportRecord {
   readonly version: number;
 }
 
+export interface NewFile {
+  /** 1 = the first. */
+  readonly number: number;
+  readonly name: string;
+  readonly sha256: string;
+  readonly byteSize: number;
+}
+
 export interface NewImport {
   readonly id: string;
-  readonly fileName: string;
-  readonly fileSha256: string;
-  readonly byteSize: number;
   readonly createdBy: string;
+  readonly files: readonly NewFile[];
+  readonly settings?: ImportSettings;
 }
 
 /** The only writer of `imports`, beside the worker that commits and undoes. */
 export function importStore(scope: ShopScope) {
   const only = (id: string, state: ImportState) => scope.table('imports').where({ id, state });
+  const importsWith = (sha256: string) => scope.table('import_files').where({ sha256 }).select('import_id');
   return {
     get: (id: string) => scope.get<ImportRecord>('imports', id),
     /** An import of the same file whose rows stand in the books; null = none. */
     async findCommitted(sha256: string): Promise<ImportRecord | null> {
       const row: object | undefined = await scope
         .table('imports')
-        .where({ file_sha256: sha256, state: 'committed' })
+        .whereIn('id', importsWith(sha256))
+        .where({ state: 'committed' })
         .first();
       return row ? fromRow<ImportRecord>(row) : null;
     },
+    /** The files of an import, in their order. */
+    async files(id: string): Promise<NewFile[]> {
+      const rows: object[] = await scope
+        .table('import_files')
+        .where({ import_id: id })
+        .orderBy('number')
+        .select('number', 'name', 'sha256', 'byte_size');
+      return rows.map((row) => fromRow<NewFile>(row));
+    },
     /** Did the same file go into the books, or is it about to, after this one was brought in? */
-    async cameInMeanwhile({ id, fileSha256, createdAt }: ImportRecord): Promise<boolean> {
+    async cameInMeanwhile({ id, createdAt }: ImportRecord): Promise<boolean> {
+      const own = scope.table('import_files').where({ import_id: id }).select('sha256');
       const other: object | undefined = await scope
         .table('imports')
-        .where({ file_sha256: fileSha256 })
+        .whereIn('id', scope.table('import_files').whereIn('sha256', own).select('import_id'))
         .whereNot({ id })
         .whereRaw(`(state = 'committing' OR (state = 'committed' AND committed_at > ?))`, [createdAt])
         .first('id');
       return other !== undefined;
     },
-    create: (fields: NewImport) =>
-      scope.insert('imports', { ...fields, state: 'reading', createdAt: new Date().toISOString() }),
+    async create({ id, createdBy, files, settings = {} }: NewImport): Promise<void> {
+      const [first] = files;
+      if (!first) throw new Error('An import has at least one file');
+      await scope.insert('imports', {
+        id,
+        createdBy,
+        state: 'reading',
+        fileName: files.length === 1 ? first.name : `${first.name} and ${files.length - 1} more`,
+        fileSha256: first.sha256,
+        byteSize: files.reduce((sum, file) => sum + file.byteSize, 0),
+        mapping: JSON.stringify(settings),
+        createdAt: new Date().toISOString(),
+      });
+      await scope.insert(
+        'import_files',
+        files.map((file) => ({ ...file, importId: id })),
+      );
+    },
     /** Starts another reading with what a person said of the file. */
     readAgain: (id: string, version: number, settings: ImportSettings) =>
       scope.update<ImportRecord>('imports', id, version, {

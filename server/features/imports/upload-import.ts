@@ -7,45 +7,56 @@ import { ProblemError } from '../../platform/problems.ts';
 import { startReading } from './background.ts';
 import { dropFile, fileHash, importPath, keepFile } from './files.ts';
 import { showImport } from './read-model.ts';
-import { receiveFile } from './receive.ts';
-import { importStore } from './store.ts';
+import { dropReceived, receiveFiles } from './receive.ts';
+import { importStore, type NewFile } from './store.ts';
 
 /**
- * Takes a file in and starts reading it. A file whose rows stand in the books already is refused, unless the person
- * says that it shall come in once more.
+ * Takes files in and starts reading them as one import. A file whose rows stand in the books already is refused, unless
+ * the person says that it shall come in once more.
  */
 export async function uploadImport(ctx: Context<typeof importsApi.upload>): Promise<Ready> {
   const { config, database } = ctx.services;
   const { shopId, userId } = ctx.actor;
-  const received = await receiveFile(ctx.req, ctx.res, { dataDir: config.dataDir, mostBytes: config.importMaxBytes });
+  const received = await receiveFiles(ctx.req, ctx.res, { dataDir: config.dataDir, mostBytes: config.importMaxBytes });
   const id = newId();
-  const kept = importPath(config.dataDir, id);
+  const kept = received.map((_, at) => importPath(config.dataDir, id, at + 1));
   let isNew = false;
   try {
-    const fileSha256 = await fileHash(received.path);
-    await keepFile(received.path, kept);
-    const once = ctx.once && { ...ctx.once, fingerprint: sha256(`${ctx.once.fingerprint} ${fileSha256}`) };
+    const files: NewFile[] = [];
+    for (const [at, { path, name, size }] of received.entries()) {
+      files.push({ number: at + 1, name, sha256: await fileHash(path), byteSize: size });
+      await keepFile(path, kept[at] as string);
+    }
+    const content = files.map((file) => file.sha256).join(' ');
+    const once = ctx.once && { ...ctx.once, fingerprint: sha256(`${ctx.once.fingerprint} ${content}`) };
     const ready = await write({ ...ctx, once }, { action: 'upload file', subject: 'import' }, async (books) => {
       const store = importStore(books.scope);
-      const earlier = ctx.query.importAnyway ? null : await store.findCommitted(fileSha256);
-      if (earlier) throw alreadyIn(earlier.committedAt);
-      await store.create({ id, fileName: received.name, fileSha256, byteSize: received.size, createdBy: userId });
+      const isAnyway = ctx.query.importAnyway ?? false;
+      if (!isAnyway) await refuseKnown(store, files);
+      await store.create({ id, createdBy: userId, files, settings: isAnyway ? { answers: { earlier: 'twice' } } : {} });
       const reply: Import = await showImport(books.scope, id);
       isNew = true;
-      return { id, before: null, after: { fileName: received.name, fileSha256 }, reply, version: reply.version };
+      return { id, before: null, after: { files }, reply, version: reply.version };
     });
     if (isNew)
       startReading({ services: ctx.services, shopId }, await importStore(shopScope(database.reader, shopId)).get(id));
     return ready;
   } finally {
-    if (!isNew) await Promise.all([dropFile(kept), dropFile(received.path)]);
+    if (!isNew) await Promise.all([...kept.map(dropFile), dropReceived(received)]);
   }
 }
 
-function alreadyIn(committedAt: string | null): ProblemError {
-  const day = committedAt?.slice(0, 10) ?? 'an earlier day';
-  return new ProblemError(409, {
-    name: 'already-in',
-    detail: `This very file came in on ${day}: there is nothing new in it.`,
-  });
+/** Refuses files that came in before, and the same file twice. */
+async function refuseKnown(store: ReturnType<typeof importStore>, files: readonly NewFile[]): Promise<void> {
+  for (const [at, { name, sha256: content }] of files.entries()) {
+    const twin = files.slice(0, at).find((other) => other.sha256 === content);
+    if (twin) throw alreadyIn(`“${name}” and “${twin.name}” are the same file: leave one out.`);
+    const earlier = await store.findCommitted(content);
+    if (!earlier) continue;
+    const day = earlier.committedAt?.slice(0, 10) ?? 'an earlier day';
+    const which = files.length === 1 ? 'This very file' : `“${name}”`;
+    throw alreadyIn(`${which} came in on ${day}: there is nothing new in it.`);
+  }
 }
+
+const alreadyIn = (detail: string) => new ProblemError(409, { name: 'already-in', detail });

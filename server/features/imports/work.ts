@@ -16,14 +16,19 @@ interface Task {
   readonly importId: string;
   readonly now: Date;
 }
+/** A file of the import, by its place on disk. */
+export interface FileAt {
+  readonly name: string;
+  readonly path: string;
+}
 export interface ReadTask extends Task {
   readonly kind: 'read';
-  readonly file: string;
+  readonly files: readonly FileAt[];
   readonly settings: ImportSettings;
 }
 export interface CommitJob extends Task, Omit<CommitTask, 'now'> {
   readonly kind: 'commit';
-  readonly file: string;
+  readonly files: readonly FileAt[];
   readonly requestId: string;
 }
 export interface UndoTask extends Task {
@@ -52,7 +57,7 @@ export function work(job: Job, onPart: (share: number) => void): Done {
     if (job.kind === 'read') {
       return {
         kind: 'read',
-        reading: readFile(bytesOfFile(job.file), shopBooks(raw, job.shopId, job.now), job.settings, onPart),
+        reading: readFile(given(job.files), shopBooks(raw, job.shopId, job.now), job.settings, onPart),
       };
     }
     return job.kind === 'commit' ? commitJob(raw, job, onPart) : undoJob(raw, job);
@@ -61,10 +66,12 @@ export function work(job: Job, onPart: (share: number) => void): Done {
   }
 }
 
+const given = (files: readonly FileAt[]) => files.map(({ name, path }) => ({ name, source: bytesOfFile(path) }));
+
 function commitJob(raw: RawDatabase, job: CommitJob, onPart: (share: number) => void): Done {
   try {
     const commit = raw.transaction(() => {
-      const brought = commitRows(raw, bytesOfFile(job.file), job, onPart);
+      const brought = commitRows(raw, given(job.files), job, onPart);
       const version = raiseBooksVersion(raw, job.shopId);
       const { changes } = raw
         .prepare(

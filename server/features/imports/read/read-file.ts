@@ -2,7 +2,7 @@ import type { Aside, FirstRow, Line, Reading } from '#shared/contracts/import-re
 import type { ImportSettings } from '#shared/contracts/imports.ts';
 import type { ShopBooks } from '../books.ts';
 import { FileRefusal } from '../refusal.ts';
-import type { ByteSource } from '../text/bytes.ts';
+import type { GivenFile } from '../sheets/open-files.ts';
 import { type Understanding, understand } from '../understand/understand.ts';
 import { emptyControl } from './empty-control.ts';
 import type { DraftLine, FilePlan } from './plan.ts';
@@ -11,15 +11,15 @@ import { asidesOf, readRows } from './read-rows.ts';
 const FIRST_ROWS = 200;
 const MOST_ASIDES = 5_000;
 
-/** Reads a file for people to look at: nothing is booked. A refusal is part of the reading, never thrown. */
+/** Reads files for people to look at: nothing is booked. A refusal is part of the reading, never thrown. */
 export function readFile(
-  source: ByteSource,
+  files: readonly GivenFile[],
   books: ShopBooks,
   settings: ImportSettings = {},
   onPart?: (share: number) => void,
 ): Reading {
   try {
-    const understood = understand(source, books, settings);
+    const understood = understand(files, books, settings);
     return understood.plan === null ? refusedReading(understood) : previewOf(understood, understood.plan, onPart);
   } catch (error) {
     if (!(error instanceof FileRefusal)) throw error;

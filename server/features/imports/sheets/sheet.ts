@@ -6,6 +6,8 @@ import type { OnRow } from '../text/rows.ts';
 export interface Sheet {
   /** 1 = the first sheet of the file. */
   readonly number: number;
+  /** Which of the files of an import it stands in; left out = the first. */
+  readonly file?: number;
   /** null = a text file: its sheet has no name. */
   readonly name: string | null;
   readonly isHidden: boolean;

@@ -4,9 +4,8 @@ import type { ImportSettings } from '#shared/contracts/imports.ts';
 import type { ShopBooks } from '../books.ts';
 import type { FilePlan } from '../read/plan.ts';
 import { FileRefusal } from '../refusal.ts';
-import { openFile } from '../sheets/open-file.ts';
+import { type GivenFile, openFiles } from '../sheets/open-files.ts';
 import { hintsOf } from '../sheets/sheet.ts';
-import type { ByteSource } from '../text/bytes.ts';
 import { makeFilePlan, type SurveyedTable, usualDecimal } from './file-plan.ts';
 import { guessTable, type TableGuess } from './table-guess.ts';
 import { type Survey, survey, surveyVehicleSheet } from './survey.ts';
@@ -23,11 +22,11 @@ export interface Understanding {
 }
 
 /**
- * Understands a file before its rows are read: how it is written, where its headings are, what its columns hold, in
- * which order its dates stand, which spellings are one vehicle. Throws a FileRefusal for what is no table.
+ * Understands the files of an import before their rows are read: how they are written, where their headings are, what
+ * their columns hold, in which order their dates stand, which spellings are one vehicle. Throws a FileRefusal for what is no table.
  */
-export function understand(source: ByteSource, books: ShopBooks, settings: ImportSettings): Understanding {
-  const file = openFile(source);
+export function understand(files: readonly GivenFile[], books: ShopBooks, settings: ImportSettings): Understanding {
+  const file = openFiles(files);
   const answers = new Map(Object.entries(settings.answers ?? {}));
   const decimal = usualDecimal(books.locale);
   const guesses = file.sheets
@@ -72,7 +71,7 @@ const surveyOf = ({ sheet, shape, columns, heading }: TableGuess, books: ShopBoo
 
 const sheetFound = ({ sheet, shape, why }: TableGuess): SheetFound => ({
   number: sheet.number,
-  file: 1,
+  file: sheet.file ?? 1,
   name: sheet.name ?? '',
   isHidden: sheet.isHidden,
   shape,

@@ -1,4 +1,5 @@
 import type { Services } from '../server/platform/http.ts';
+import { adoptRules, areRulesAdopted } from './demo/adopt-rules.ts';
 import { bookLedger, isLedgerBooked } from './demo/book-ledger.ts';
 import { bringInSheets } from './demo/bring-in-sheets.ts';
 import { demoBook } from './demo/generate.ts';
@@ -27,6 +28,7 @@ export async function seedDemo(services: Services): Promise<DemoSignIns | null> 
     await bringInSheets(services, shop);
     await bookLedger(services, shop, demoBook());
   }
+  if (!(await areRulesAdopted(services, shop))) await adoptRules(services, shop);
   return { people: [DEMO_OWNER, ...DEMO_MEMBERS], password: DEMO_PASSWORD };
 }
 

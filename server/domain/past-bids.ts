@@ -11,8 +11,9 @@ export interface PastBid {
   readonly estimateCents: number;
   /** What the rule known when it was bought puts on top of the estimate. */
   readonly reserveCents: number;
-  /** What it left in the end. */
+  /** What it left in the end, and the own hours that took. */
   readonly profitCents: number;
+  readonly ownSeconds: number | null;
 }
 
 export interface JudgedBid {
@@ -22,6 +23,7 @@ export interface JudgedBid {
   readonly limitCents: number;
   readonly reserveCents: number;
   readonly profitCents: number;
+  readonly ownSeconds: number | null;
 }
 
 export interface PastBids {
@@ -53,7 +55,7 @@ export function pastBids(bids: readonly PastBid[], wantedCentsPerHour: number | 
   const judged: (JudgedBid & { readonly withoutCents: number })[] = [];
   const out = { noPurchaseIds: [] as string[], noSaleIds: [] as string[], noHoursIds: [] as string[] };
   for (const bid of bids) {
-    const { id, purchaseCents, expectedSaleCents, reserveCents, profitCents } = bid;
+    const { id, purchaseCents, expectedSaleCents, reserveCents, profitCents, ownSeconds } = bid;
     const payCents = ownPay(bid.plannedSeconds, wantedCentsPerHour);
     if (purchaseCents === null) out.noPurchaseIds.push(id);
     else if (expectedSaleCents === null) out.noSaleIds.push(id);
@@ -61,7 +63,7 @@ export function pastBids(bids: readonly PastBid[], wantedCentsPerHour: number | 
     else {
       const withoutCents = expectedSaleCents - bid.estimateCents - payCents;
       const limitCents = withoutCents - reserveCents;
-      judged.push({ id, paidCents: purchaseCents, limitCents, reserveCents, profitCents, withoutCents });
+      judged.push({ id, paidCents: purchaseCents, limitCents, reserveCents, profitCents, ownSeconds, withoutCents });
     }
   }
   return {

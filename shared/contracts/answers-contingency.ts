@@ -123,6 +123,7 @@ const judgedBidSchema = rebuildRefSchema.extend({
   limitCents: cents,
   reserveCents: cents,
   profitCents: cents,
+  ownSeconds: count.nullable(),
 });
 const bidGroupSchema = z.object({
   count,
@@ -131,6 +132,10 @@ const bidGroupSchema = z.object({
   lostCents: cents,
   gainedCount: count,
   gainedCents: cents,
+  /** Those with known own hours: how many, their hours, and Σ of what they left. */
+  timedCount: count,
+  ownSeconds: count,
+  timedCents: cents,
   /** The first fifty. */
   rebuilds: z.array(judgedBidSchema),
 });

@@ -10,6 +10,7 @@ const bid = (id: string, changes: Partial<PastBid> = {}): PastBid => ({
   estimateCents: 300_000,
   reserveCents: 70_000,
   profitCents: 100_000,
+  ownSeconds: 180_000,
   ...changes,
 });
 const ids = (list: readonly { id: string }[]) => list.map(({ id }) => id);

@@ -12,10 +12,10 @@ type Shown = Answer['pastBids']['percent'];
 export function pastBidsOf(input: AnswerInput, trials: readonly Trial[]): Shown {
   const bids = trials.flatMap(({ id, estimateCents, asked }): PastBid[] => {
     if (asked === null) return [];
-    const { purchaseCents, expectedSaleCents, plannedSeconds, paidCents, exit } = rebuildOf(input, id);
+    const { purchaseCents, expectedSaleCents, plannedSeconds, paidCents, ownSeconds, exit } = rebuildOf(input, id);
     const profitCents = (exit?.proceedsCents ?? 0) - (purchaseCents ?? 0) - paidCents;
-    const { reserveCents } = asked;
-    return [{ id, purchaseCents, expectedSaleCents, plannedSeconds, estimateCents, reserveCents, profitCents }];
+    const locked = { purchaseCents, expectedSaleCents, plannedSeconds, estimateCents };
+    return [{ id, ...locked, reserveCents: asked.reserveCents, profitCents, ownSeconds }];
   });
   const found = pastBids(bids, input.shop.wantedCentsPerHour);
   const named = (ids: readonly string[]) => ids.map((id) => rebuildOf(input, id));
@@ -35,12 +35,16 @@ export function pastBidsOf(input: AnswerInput, trials: readonly Trial[]): Shown 
 function groupOf(input: AnswerInput, group: readonly JudgedBid[]): Shown['skipped'] {
   const lost = group.filter(({ profitCents }) => profitCents < 0);
   const gained = group.filter(({ profitCents }) => profitCents >= 0);
+  const timed = group.filter(({ ownSeconds }) => ownSeconds !== null);
   return {
     count: group.length,
     lostCount: lost.length,
     lostCents: sum(lost.map(({ profitCents }) => profitCents)),
     gainedCount: gained.length,
     gainedCents: sum(gained.map(({ profitCents }) => profitCents)),
+    timedCount: timed.length,
+    ownSeconds: sum(timed.map(({ ownSeconds }) => ownSeconds ?? 0)),
+    timedCents: sum(timed.map(({ profitCents }) => profitCents)),
     rebuilds: group.slice(0, BIDS_LISTED).map((one) => ({ ...one, ...refOf(rebuildOf(input, one.id)) })),
   };
 }

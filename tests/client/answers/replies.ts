@@ -208,7 +208,8 @@ export function drift(changes: Partial<Drift> = {}): Drift {
 }
 
 type PastBids = ContingencyAnswer['pastBids']['percent'];
-const NO_BIDS = { count: 0, lostCount: 0, lostCents: 0, gainedCount: 0, gainedCents: 0, rebuilds: [] };
+const NO_OUTCOME = { lostCount: 0, lostCents: 0, gainedCount: 0, gainedCents: 0 };
+const NO_BIDS = { count: 0, ...NO_OUTCOME, timedCount: 0, ownSeconds: 0, timedCents: 0, rebuilds: [] };
 export function pastBids(changes: Partial<PastBids> = {}): PastBids {
   return { n: 33, reserveCents: 3_000_000, skipped: NO_BIDS, aboveAnyway: NO_BIDS, leftOut: [], ...changes };
 }

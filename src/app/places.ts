@@ -1,6 +1,11 @@
 import type { Role } from '#shared/vocabulary.ts';
 
-export type Place = { path: string; label: string; group: 'Answers' | 'Books' | 'Shop'; roles: readonly Role[] };
+export type Place = {
+  path: string;
+  label: string;
+  group: 'Answers' | 'Next car' | 'Books' | 'Shop';
+  roles: readonly Role[];
+};
 
 const BOOKS: readonly Role[] = ['owner', 'bookkeeper', 'accountant'];
 
@@ -11,6 +16,8 @@ export const PLACES: readonly Place[] = [
   { path: 'overruns', label: 'Overruns', group: 'Answers', roles: BOOKS },
   { path: 'time-to-sell', label: 'Time to sell', group: 'Answers', roles: BOOKS },
   { path: 'contingency', label: 'Contingency', group: 'Answers', roles: BOOKS },
+  { path: 'pre-bid', label: 'Pre-bid sheet', group: 'Next car', roles: BOOKS },
+  { path: 'pre-bids', label: 'Kept sheets', group: 'Next car', roles: BOOKS },
   { path: 'rebuilds', label: 'Rebuilds', group: 'Books', roles: [...BOOKS, 'mechanic', 'partner'] },
   { path: 'ledger', label: 'Ledger', group: 'Books', roles: BOOKS },
   { path: 'hours', label: 'Hours', group: 'Books', roles: [...BOOKS, 'mechanic'] },
@@ -20,7 +27,7 @@ export const PLACES: readonly Place[] = [
   { path: 'shop', label: 'Shop', group: 'Shop', roles: BOOKS },
 ];
 
-export const GROUPS = ['Answers', 'Books', 'Shop'] as const;
+export const GROUPS = ['Answers', 'Next car', 'Books', 'Shop'] as const;
 
 /** What a role sees in the rail. */
 export function placesOf(role: Role): readonly Place[] {

@@ -1,7 +1,10 @@
-import type { Session } from '#shared/contracts/session.ts';
+import { useState } from 'react';
 import { useNavigate } from 'react-router-dom';
+import type { Session } from '#shared/contracts/session.ts';
+import { forgetPerson, keptNames } from '../lib/kept.ts';
 import { leaveBy } from '../lib/unsaved.ts';
 import { signOut } from '../lib/session.ts';
+import { ConfirmDialog } from '../ui/confirm-dialog.tsx';
 import { Menu } from '../ui/menu.tsx';
 import { SCHEMES, useScheme } from './scheme.ts';
 
@@ -10,7 +13,14 @@ export function RailFoot({ session, className = 'rail-foot' }: { session: Sessio
   const navigate = useNavigate();
   const [scheme, setScheme] = useScheme();
   const others = session.shops.filter((shop) => shop.id !== session.shop.id);
-  const onSignOut = () => signOut().finally(() => location.assign('/sign-in'));
+  const [isAsking, setAsking] = useState(false);
+  const { id } = session.user;
+  const isWaiting = () => keptNames(`${id}.`).some((name) => name.endsWith('.waiting'));
+  const onSignOut = () =>
+    signOut().finally(() => {
+      forgetPerson(id);
+      location.assign('/sign-in');
+    });
   return (
     <div className={className}>
       <div>
@@ -36,10 +46,20 @@ export function RailFoot({ session, className = 'rail-foot' }: { session: Sessio
           plain
           items={SCHEMES.map((one) => ({ label: one.label, onSelect: () => setScheme(one.value) }))}
         />
-        <button type="button" className="rail-act" onClick={onSignOut}>
+        <button type="button" className="rail-act" onClick={() => (isWaiting() ? setAsking(true) : void onSignOut())}>
           Sign out
         </button>
       </div>
+      {isAsking && (
+        <ConfirmDialog
+          title="Sign out before it is sent?"
+          note="A pre-bid sheet waits in this browser for a signal. When you sign out, it is gone."
+          act="Sign out all the same"
+          isDanger
+          onAct={onSignOut}
+          onClose={() => setAsking(false)}
+        />
+      )}
     </div>
   );
 }

@@ -16,6 +16,8 @@ const WhatPaysPage = lazyPage(async () => (await import('../pages/what-pays.tsx'
 const OverrunsPage = lazyPage(async () => (await import('../pages/overruns.tsx')).OverrunsPage);
 const TimeToSellPage = lazyPage(async () => (await import('../pages/time-to-sell.tsx')).TimeToSellPage);
 const ContingencyPage = lazyPage(async () => (await import('../pages/contingency.tsx')).ContingencyPage);
+const PreBidPage = lazyPage(async () => (await import('../pages/pre-bid.tsx')).PreBidPage);
+const PreBidsPage = lazyPage(async () => (await import('../pages/pre-bids.tsx')).PreBidsPage);
 const RebuildsPage = lazyPage(async () => (await import('../pages/rebuilds.tsx')).RebuildsPage);
 const RebuildPage = lazyPage(async () => (await import('../pages/rebuild.tsx')).RebuildPage);
 const LedgerPage = lazyPage(async () => (await import('../pages/ledger.tsx')).LedgerPage);
@@ -45,6 +47,8 @@ export function AppRoutes() {
           <Route path="overruns" element={<OverrunsPage />} />
           <Route path="time-to-sell" element={<TimeToSellPage />} />
           <Route path="contingency" element={<ContingencyPage />} />
+          <Route path="pre-bid/:bidId?" element={<PreBidPage />} />
+          <Route path="pre-bids" element={<PreBidsPage />} />
           <Route path="rebuilds" element={<RebuildsPage />} />
           <Route path="rebuilds/:rebuildId" element={<RebuildPage />} />
           <Route path="ledger" element={<LedgerPage />} />

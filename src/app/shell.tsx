@@ -3,6 +3,7 @@ import { lazy, Suspense, useEffect, useRef, useState } from 'react';
 import { Outlet, useLocation } from 'react-router-dom';
 import type { Session } from '#shared/contracts/session.ts';
 import { formatDayLong } from '#shared/format-day.ts';
+import { keptNames, mine } from '../lib/kept.ts';
 import { ErrorBoundary } from '../ui/error-boundary.tsx';
 import { LoadingState } from '../ui/states.tsx';
 import { BottomBar } from './bottom-bar.tsx';
@@ -13,6 +14,7 @@ import { useGlobalKeys } from './use-global-keys.ts';
 
 const Palette = lazy(async () => ({ default: (await import('./palette.tsx')).Palette }));
 const KeysHelp = lazy(async () => ({ default: (await import('./keys-help.tsx')).KeysHelp }));
+const SendWaiting = lazy(async () => ({ default: (await import('../features/bids/send-waiting.tsx')).SendWaiting }));
 const Toasts = lazy(async () => ({ default: (await import('../ui/toast.tsx')).Toasts }));
 
 /** The frame of a shop's pages: rail or bottom bar, the page, and what may come over it. */
@@ -22,6 +24,7 @@ export function Shell({ session }: { session: Session }) {
   const main = useRouteFocus(pathname);
   const client = useQueryClient();
   const openPalette = () => setOpen('palette');
+  const home = mine(session);
   useGlobalKeys({ onFind: openPalette, onHelp: () => setOpen('keys') });
   return (
     <div className="frame">
@@ -50,6 +53,7 @@ export function Shell({ session }: { session: Session }) {
       <LeaveGuard />
       <Suspense>
         <Toasts />
+        {keptNames(`${home}waiting`).length > 0 && <SendWaiting home={home} />}
         {open === 'palette' && <Palette session={session} onClose={() => setOpen(null)} />}
         {open === 'keys' && <KeysHelp onClose={() => setOpen(null)} />}
       </Suspense>

@@ -7,9 +7,16 @@ export function mayRetry(failures: number, error: unknown): boolean {
   return passing && failures < 2;
 }
 
-/** The cache of server data. Answers stay fresh for half a minute; every save invalidates what it changed. */
+/**
+ * The cache of server data. Answers stay fresh for half a minute; every save invalidates what it changed. Without signal
+ * everything is tried all the same, so that a page says what is wrong, or uses what it kept, and never waits in silence.
+ */
 export function createQueryClient(): QueryClient {
+  const networkMode = 'always';
   return new QueryClient({
-    defaultOptions: { queries: { retry: mayRetry, staleTime: 30_000 }, mutations: { retry: false } },
+    defaultOptions: {
+      queries: { retry: mayRetry, staleTime: 30_000, networkMode, refetchOnReconnect: true },
+      mutations: { retry: false, networkMode },
+    },
   });
 }

@@ -1,15 +1,39 @@
 import { queryOptions, useQueryClient, useSuspenseQuery } from '@tanstack/react-query';
 import type { Session } from '#shared/contracts/session.ts';
 import { ApiProblem } from './api-problem.ts';
+import { drop, KEPT_SESSION, keep, kept } from './kept.ts';
 import { send } from './send.ts';
 
-/** Who is signed in and which shop the session is in; null when nobody is. */
+/** How long a weak signal may take, once a session is kept that can stand in. */
+const PATIENCE_MS = 4000;
+
+/**
+ * Who is signed in and which shop the session is in; null when nobody is. Without signal it is the one that a page kept
+ * for that (`keepSession`).
+ */
 async function readSession(): Promise<Session | null> {
-  const reply = await send({ method: 'GET', url: '/api/session', isAboutSession: true });
-  if (reply === null) return null;
+  const stored = kept(KEPT_SESSION);
+  const patience = stored === null ? {} : { signal: AbortSignal.timeout(PATIENCE_MS) };
+  const reply = await send({ method: 'GET', url: '/api/session', isAboutSession: true, ...patience }).catch(
+    (problem: unknown) => {
+      if (stored !== null && problem instanceof ApiProblem && problem.status === 0) return stored;
+      throw problem;
+    },
+  );
+  if (reply === null) {
+    drop(KEPT_SESSION);
+    return null;
+  }
   // Loaded only here: a visitor who is not signed in never pays for the schemas.
   const { sessionApi } = await import('#shared/contracts/session.ts');
-  return sessionApi.get.response.parse(reply);
+  const session = sessionApi.get.response.parse(reply);
+  if (stored !== null) keepSession(session);
+  return session;
+}
+
+/** From now on this browser opens for this person without signal too, until they sign out. */
+export function keepSession(session: Session | null): void {
+  keep(KEPT_SESSION, session);
 }
 
 /**

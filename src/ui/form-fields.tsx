@@ -1,3 +1,4 @@
+import type { ReactNode } from 'react';
 import { type Control, Controller, type FieldPath, type FieldValues } from 'react-hook-form';
 import { MoneyField } from './money-field.tsx';
 import { PickField, type PickOption } from './pick-field.tsx';
@@ -13,7 +14,11 @@ type InForm<V extends FieldValues> = {
 };
 
 /** A MoneyField of a form, emptied when the form is reset. `control`, `name`, and the props of MoneyField. */
-export function FormMoney<V extends FieldValues>({ control, name, ...props }: InForm<V> & { placeholder?: string }) {
+export function FormMoney<V extends FieldValues>({
+  control,
+  name,
+  ...props
+}: InForm<V> & { placeholder?: string; note?: ReactNode }) {
   return (
     <Controller
       control={control as Control<V>}

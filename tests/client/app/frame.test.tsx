@@ -89,7 +89,7 @@ test('a mechanic sees the rebuilds and the hours, and nothing else', async () =>
 test('an owner sees every place; the demo says on which day its calendar stands', async () => {
   serve(buildSession('owner'));
   open(`/s/one/${NOWHERE}`);
-  expect(await places()).toHaveLength(11);
+  expect(await places()).toHaveLength(14);
   expect(
     screen.getByText(/every figure is invented, from a seed chosen .* calendar stands at 15 December 2026\./),
   ).toBeInTheDocument();

@@ -1,0 +1,68 @@
+import type { BidFigures } from '#shared/contracts/bids-parts.ts';
+import { useFormatter } from '../../ui/formatter-context.tsx';
+import { Panel } from '../../ui/panel.tsx';
+import { type Column, Table } from '../../ui/table.tsx';
+import { rungWords, timesInTen } from './words.ts';
+
+type Rate = BidFigures['saleChance'];
+type Line = { readonly what: string; readonly rate: Rate };
+
+const REASONS = {
+  'too few past pairs':
+    'Too few yet: it needs nine finished rebuilds with an estimate and an expected sale to put on this sheet.',
+  'no bid': 'There is no bid to try.',
+  'no plan': 'Plan the repair first; then past rebuilds can be put on this sheet.',
+  'no expected sale': 'Put in the sale expected first.',
+} as const;
+
+/** Past rebuilds put on this sheet: how often repair and sale, each and together, would have held. */
+export function Chances({ figures, isSeen }: { figures: BidFigures; isSeen: boolean | null }) {
+  const format = useFormatter();
+  const { joint, jointReason } = figures;
+  if (!joint) {
+    return (
+      <Panel title="How likely all of it holds">
+        <p className="text-soft">{jointReason && REASONS[jointReason]}</p>
+      </Panel>
+    );
+  }
+  const rows: Line[] = [
+    { what: 'The repair stays within its budget', rate: joint.repair },
+    { what: 'The sale reaches what is counted on', rate: joint.sale },
+    { what: 'Both at once', rate: joint.both },
+    { what: 'It brings what you want, one way or the other', rate: joint.wanted },
+  ];
+  const beyond = joint.beyondCents;
+  return (
+    <Panel
+      title="How likely all of it holds"
+      subtitle={`${format.count(joint.wanted.n, 'past rebuild')} ${rungWords(joint.rung, isSeen)}, put on this sheet as they came out.`}
+    >
+      <p className="mb-3 text-lead font-[640]">
+        {joint.wanted.rate !== null && `All of it together holds ${timesInTen(joint.wanted.rate)}.`}
+      </p>
+      <Table caption="How often it would have held" rows={rows} columns={COLUMNS} rowKey={(row) => row.what} />
+      {beyond && (
+        <p className="mt-3">
+          Against what you want, half end above {format.signed(Math.round(beyond.p50))}; one in ten above{' '}
+          {format.signed(Math.round(beyond.p90))}, one in ten below {format.signed(Math.round(beyond.p10))}.
+        </p>
+      )}
+      <p className="mt-2 text-soft">
+        Cushions stack: a careful sale and a careful repair together are more careful than either alone. And these are
+        lots you won, under the way you bid until now.
+      </p>
+    </Panel>
+  );
+}
+
+const COLUMNS: readonly Column<Line>[] = [
+  { id: 'what', header: 'What holds', heads: true, cell: (row) => row.what },
+  { id: 'of', header: 'Of past', number: true, cell: ({ rate }) => `${rate.x} of ${rate.n}` },
+  { id: 'range', header: 'Could be', number: true, cell: ({ rate }) => <Range rate={rate} /> },
+];
+
+function Range({ rate: { lower, upper } }: { rate: Rate }) {
+  const format = useFormatter();
+  return lower === null || upper === null ? null : `${format.percent(lower)} to ${format.percent(upper)}`;
+}

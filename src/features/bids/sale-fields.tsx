@@ -1,0 +1,35 @@
+import type { BidFigures } from '#shared/contracts/bids-parts.ts';
+import { FormMoney } from '../../ui/form-fields.tsx';
+import { useFormatter } from '../../ui/formatter-context.tsx';
+import { Panel } from '../../ui/panel.tsx';
+import type { SheetFormApi } from './use-sheet.ts';
+
+/** What it should sell for, and the more careful sale that the bid counts on, with the chance that past sales give it. */
+export function SaleFields({ form, figures }: { form: SheetFormApi; figures: BidFigures | null }) {
+  const format = useFormatter();
+  const chance = figures?.saleChance;
+  const reached =
+    chance && chance.n > 0
+      ? `Past sales came to this share of what was expected ${format.number(chance.x)} times in ${format.number(chance.n)}.`
+      : '';
+  return (
+    <Panel title="The sale">
+      <div className="grid grid-cols-2 gap-4">
+        <FormMoney
+          control={form.control}
+          name="expectedSaleCents"
+          label="Sale expected"
+          note="Rebuilt, with its brand."
+        />
+        <FormMoney
+          control={form.control}
+          name="countedSaleCents"
+          label="The bid counts on"
+          placeholder="The same"
+          note="Less, to be careful."
+        />
+      </div>
+      {reached && <p className="mt-3 text-label text-soft">{reached}</p>}
+    </Panel>
+  );
+}

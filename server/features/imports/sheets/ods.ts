@@ -1,6 +1,7 @@
 import { type Sheet, type SheetKeeper, sheetKeeper } from './sheet.ts';
 import { clockText } from './number-formats.ts';
 import { readXml } from './xml.ts';
+import type { Attributes } from './xml-scanner.ts';
 import { damaged, locked, type Zip } from './zip.ts';
 
 const MOST_COLUMNS = 1_000;
@@ -30,24 +31,24 @@ function sheetReader(keep: SheetKeeper, sheets: Sheet[]) {
   let cell: { readonly value: string | null; readonly times: number; text: string; paragraphs: number } | null = null;
   let besides = 0;
   return {
-    open(name: string, attributes: Readonly<Record<string, string>>) {
-      if (name === 'style') style = attributes['style:name'] ?? '';
-      else if (name === 'table-properties' && attributes['table:display'] === 'false') hidden.add(style);
+    open(name: string, attributes: Attributes) {
+      if (name === 'style') style = attributes.get('style:name') ?? '';
+      else if (name === 'table-properties' && attributes.get('table:display') === 'false') hidden.add(style);
       else if (name === 'table') {
-        const isHidden = hidden.has(attributes['table:style-name'] ?? '');
-        current = keep(sheets.length + 1, attributes['table:name'] ?? '', isHidden);
+        const isHidden = hidden.has(attributes.get('table:style-name') ?? '');
+        current = keep(sheets.length + 1, attributes.get('table:name') ?? '', isHidden);
         sheets.push(current.sheet);
         line = 0;
       } else if (name === 'table-row') {
-        rowTimes = times(attributes['table:number-rows-repeated']);
+        rowTimes = times(attributes.get('table:number-rows-repeated'));
         cells = [];
       } else if (name === 'table-cell' || name === 'covered-table-cell') {
-        const repeated = times(attributes['table:number-columns-repeated']);
+        const repeated = times(attributes.get('table:number-columns-repeated'));
         cell = { value: storedValue(attributes), times: repeated, text: '', paragraphs: 0 };
       } else if (name === 'annotation') besides++;
       else if (name === 'p' && cell && besides === 0 && cell.paragraphs++ > 0) cell.text += '\n';
       else if (name === 's' && cell && besides === 0)
-        cell.text += ' '.repeat(Math.min(100, times(attributes['text:c'])));
+        cell.text += ' '.repeat(Math.min(100, times(attributes.get('text:c'))));
     },
     text(piece: string) {
       if (cell && besides === 0 && cell.paragraphs > 0) cell.text += piece;
@@ -78,13 +79,13 @@ function lastFilled(cells: readonly (string | undefined)[]): number {
 const times = (attribute: string | undefined) => Math.max(1, Math.min(1_048_576, Number(attribute ?? 1) || 1));
 
 /** The value that a cell stores beside what it shows; null = it stores none, and its text is the value. */
-function storedValue(attributes: Readonly<Record<string, string>>): string | null {
-  const type = attributes['office:value-type'];
-  if (type === 'date') return attributes['office:date-value']?.slice(0, 10) ?? null;
-  if (type === 'boolean') return attributes['office:boolean-value']?.toUpperCase() ?? null;
-  if (type === 'time') return timeText(attributes['office:time-value'] ?? '');
+function storedValue(attributes: Attributes): string | null {
+  const type = attributes.get('office:value-type');
+  if (type === 'date') return attributes.get('office:date-value')?.slice(0, 10) ?? null;
+  if (type === 'boolean') return attributes.get('office:boolean-value')?.toUpperCase() ?? null;
+  if (type === 'time') return timeText(attributes.get('office:time-value') ?? '');
   if (type !== 'float' && type !== 'currency') return null;
-  const value = Number(attributes['office:value']);
+  const value = Number(attributes.get('office:value'));
   return Number.isFinite(value) ? String(Number(value.toPrecision(14))) : null;
 }
 

@@ -11,6 +11,10 @@ export interface Sheet {
   /** null = a text file: its sheet has no name. */
   readonly name: string | null;
   readonly isHidden: boolean;
+  /** A row that a person put right, as it stood in the file; undefined = nobody touched it. */
+  rawRow?(line: number): readonly string[] | undefined;
+  /** Rows that a person left out: they are given as blank. */
+  readonly leftOut?: ReadonlySet<number>;
   /** What stands beside its cells: comments, hidden rows and columns, formulas without a value. */
   readonly hints: readonly SheetHint[];
   /** Gives every row in order; `onPart` hears the share gone through, 0–1. */

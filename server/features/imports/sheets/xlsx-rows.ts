@@ -32,13 +32,13 @@ export function readSheetRows(
   return readXml(zip, part, {
     open(name, attributes) {
       if (name === 'c') {
-        const place = columnOf(attributes['r']);
+        const place = columnOf(attributes.get('r'));
         col = place > 0 ? place : col + 1;
-        type = attributes['t'] ?? 'n';
-        style = known.styles[Number(attributes['s'] ?? 0)] ?? PLAIN;
+        type = attributes.get('t') ?? 'n';
+        style = known.styles[Number(attributes.get('s') ?? 0)] ?? PLAIN;
         text = '';
       } else if (name === 'row') {
-        line = Number(attributes['r'] ?? line + 1);
+        line = Number(attributes.get('r') ?? line + 1);
         col = 0;
         cells = [];
       } else isValue = name === 'v' || (name === 't' && type === 'inlineStr');

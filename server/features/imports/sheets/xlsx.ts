@@ -35,19 +35,24 @@ export function readXlsx(zip: Zip): Sheet[] {
 function sheetEntries(zip: Zip): { entries: SheetEntry[]; is1904: boolean } {
   const targets = new Map<string, string>();
   readXml(zip, 'xl/_rels/workbook.xml.rels', {
-    open(name, { Id = '', Target = '', TargetMode }) {
+    open(name, attributes) {
       // A link out of the workbook is never followed.
-      if (name === 'Relationship' && TargetMode !== 'External') targets.set(Id, placeOf(Target));
+      if (name === 'Relationship' && attributes.get('TargetMode') !== 'External')
+        targets.set(attributes.get('Id') ?? '', placeOf(attributes.get('Target') ?? ''));
     },
   });
   const entries: SheetEntry[] = [];
   let is1904 = false;
   const isBook = readXml(zip, BOOK, {
     open(name, attributes) {
-      if (name === 'workbookPr') is1904 = /^(?:1|true)$/.test(attributes['date1904'] ?? '');
+      if (name === 'workbookPr') is1904 = /^(?:1|true)$/.test(attributes.get('date1904') ?? '');
       if (name !== 'sheet') return;
-      const part = targets.get(attributes['r:id'] ?? '') ?? `xl/worksheets/sheet${entries.length + 1}.xml`;
-      entries.push({ name: attributes['name'] ?? '', part, isHidden: /hidden/i.test(attributes['state'] ?? '') });
+      const part = targets.get(attributes.get('r:id') ?? '') ?? `xl/worksheets/sheet${entries.length + 1}.xml`;
+      entries.push({
+        name: attributes.get('name') ?? '',
+        part,
+        isHidden: /hidden/i.test(attributes.get('state') ?? ''),
+      });
     },
   });
   if (!isBook) throw damaged();
@@ -86,10 +91,10 @@ function cellStyles(zip: Zip): CellStyle[] {
   let isCells = false;
   readXml(zip, 'xl/styles.xml', {
     open(name, attributes) {
-      if (name === 'numFmt') codes.set(Number(attributes['numFmtId']), attributes['formatCode'] ?? '');
+      if (name === 'numFmt') codes.set(Number(attributes.get('numFmtId')), attributes.get('formatCode') ?? '');
       if (name === 'cellXfs') isCells = true;
       if (name !== 'xf' || !isCells) return;
-      const id = Number(attributes['numFmtId'] ?? 0);
+      const id = Number(attributes.get('numFmtId') ?? 0);
       styles.push({ kind: numberKind(id, codes.get(id)), decimals: decimalsOf(codes.get(id), id) });
     },
     close(name) {

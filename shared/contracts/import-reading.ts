@@ -114,6 +114,8 @@ export const asideSchema = z.object({
   text: z.string(),
   /** Readable money on it, in cents; null = none. */
   cents: z.int().nullable(),
+  /** The columns in which another text may mend it; none = it can only be left out, or asked about. */
+  cols: z.array(z.int()).default([]),
 });
 export type Aside = z.infer<typeof asideSchema>;
 

@@ -12,7 +12,10 @@ export const cellEditSchema = z.strictObject({
   sheet: z.int().min(1).max(2000),
   row: z.int().min(1).max(10_000_000),
   col: z.int().min(1).max(1000),
-  text: z.string().max(2000),
+  text: z
+    .string()
+    .max(2000)
+    .refine((text) => !/\p{Surrogate}/u.test(text), 'This text is damaged.'),
 });
 export type CellEdit = z.infer<typeof cellEditSchema>;
 

@@ -3,10 +3,12 @@ import { shopScope } from '../../books/scope.ts';
 import { write } from '../../books/write.ts';
 import { type Context, type Route, route } from '../../platform/http.ts';
 import { ProblemError } from '../../platform/problems.ts';
-import { forgetFiles, startCommit, startReading } from './background.ts';
+import { forgetFiles, startCommit } from './background.ts';
+import { changeImport } from './change-import.ts';
+import { wrongState } from './problems.ts';
 import { listImports, listRows, showImport } from './read-model.ts';
 import { runJob } from './run-job.ts';
-import { type ImportRecord, importStore, readingOf, settingsOf } from './store.ts';
+import { importStore, readingOf } from './store.ts';
 import { uploadImport } from './upload-import.ts';
 
 type OnImport = Context & { readonly params: { readonly importId: string } };
@@ -18,7 +20,6 @@ const shown = async (ctx: OnImport) => {
   const reply = await showImport(readScope(ctx), ctx.params.importId);
   return { versioned: reply, version: reply.version };
 };
-const wrongState = (detail: string) => new ProblemError(409, { name: 'wrong-state', detail });
 
 // Two people, or two presses, may bring in one file before either books it.
 const alreadyIn = () =>
@@ -32,25 +33,11 @@ export const importRoutes: Route[] = [
   route(importsApi.upload, uploadImport),
   route(importsApi.show, (ctx) => shown(ctx as unknown as OnImport)),
   route(importsApi.rows, (ctx) => listRows(readScope(ctx), ctx.params.importId, ctx.query.outcome, ctx.query.cursor)),
-  route(importsApi.change, async (ctx) => changeImport(ctx)),
+  route(importsApi.change, changeImport),
   route(importsApi.commit, async (ctx) => commitImport(ctx as unknown as OnImport)),
   route(importsApi.undo, async (ctx) => undoImport(ctx as unknown as OnImport)),
   route(importsApi.discard, async (ctx) => discardImport(ctx)),
 ];
-
-async function changeImport(ctx: Context<typeof importsApi.change>) {
-  const { database } = ctx.services;
-  const { shopId } = ctx.actor;
-  const before = await current(ctx as unknown as OnImport);
-  if (before.state !== 'ready' && before.state !== 'refused') throw wrongState('This file is not waiting for answers.');
-  const settings = { ...settingsOf(before), ...(ctx.body.columns ? { columns: ctx.body.columns } : {}) };
-  const answers = { ...settings.answers, ...ctx.body.answers };
-  const after: ImportRecord = await database.lock(() =>
-    importStore(shopScope(database.writer, shopId)).readAgain(before.id, ctx.ifMatch ?? 0, { ...settings, answers }),
-  );
-  startReading({ services: ctx.services, shopId }, after);
-  return shown(ctx as unknown as OnImport);
-}
 
 /** Starts the commit. Asking again while it runs, or after, changes nothing: it books once. */
 async function commitImport(ctx: OnImport) {

@@ -5,8 +5,9 @@ import { FileRefusal } from '../refusal.ts';
 import type { GivenFile } from '../sheets/open-files.ts';
 import { type Understanding, understand } from '../understand/understand.ts';
 import { emptyControl } from './empty-control.ts';
-import type { DraftLine, FilePlan } from './plan.ts';
-import { asidesOf, readRows } from './read-rows.ts';
+import type { DraftLine, FilePlan, Plan } from './plan.ts';
+import { asidesOf } from './asides.ts';
+import { readRows } from './read-rows.ts';
 
 const FIRST_ROWS = 200;
 const MOST_ASIDES = 5_000;
@@ -40,24 +41,25 @@ function previewOf(understood: Understanding, plan: FilePlan, onPart?: (share: n
   const asides: Aside[] = [];
   let asideCount = 0;
   let ragged = 0;
+  const tables = new Map(plan.tables.map((table) => [table.sheet.number, table]));
   const widths = new Map(plan.tables.map(({ sheet, heading }) => [sheet.number, heading.cells.length]));
   const read = readRows(
     plan,
     {
-      row(cells, line, result, sheet) {
+      row(raw, line, result, sheet, cells) {
         if (cells.length > (widths.get(sheet) || Number.POSITIVE_INFINITY) && result.outcome === 'taken') ragged++;
         if (firstRows.length < FIRST_ROWS && result.reason !== 'blank') {
           firstRows.push({
             sheet,
             row: line,
-            cells: cells.map((cell) => cell.slice(0, 500)),
+            cells: raw.map((cell) => cell.slice(0, 500)),
             outcome: result.outcome,
             reason: result.reason,
             lines: result.lines,
           });
         }
         if (result.outcome === 'taken' && result.cells.length === 0) return;
-        const made = asidesOf(cells, line, result, sheet);
+        const made = asidesOf(cells, line, result, tables.get(sheet) as Plan);
         asideCount += made.length;
         if (asides.length < MOST_ASIDES) asides.push(...made);
       },

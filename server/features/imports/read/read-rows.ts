@@ -1,4 +1,4 @@
-import type { Aside, Control, RebuildFound, StatedTotal } from '#shared/contracts/import-reading.ts';
+import type { Control, RebuildFound, StatedTotal } from '#shared/contracts/import-reading.ts';
 import type { NotData } from '#shared/contracts/import-words.ts';
 import { PURCHASE } from '../words/categories.ts';
 import { emptyControl } from './empty-control.ts';
@@ -7,9 +7,9 @@ import type { DraftLine, FilePlan, RowRead } from './plan.ts';
 import { tableReader } from './table-reader.ts';
 import type { CarriedFigures } from './vehicle-row.ts';
 
-/** What hears of each row as it is read: the preview, or the commit. */
+/** What hears of each row as it is read: the preview, or the commit. `raw` = its cells as they stood in the file. */
 export interface Sink {
-  row(cells: readonly string[], line: number, read: RowRead, sheet: number): void;
+  row(raw: readonly string[], line: number, read: RowRead, sheet: number, cells: readonly string[]): void;
 }
 
 /** What reading all rows came to. */
@@ -36,7 +36,7 @@ export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) =>
         if (result.draft) place(result.draft, at, drafts);
         for (const made of result.lines) book(made, at, drafts, tally.control);
         tally.count(result);
-        sink.row(cells, line, result, number);
+        sink.row(table.sheet.rawRow?.(line) ?? cells, line, result, number, cells);
       },
       onPart && ((share) => onPart((done + share) / plan.tables.length)),
     );
@@ -109,16 +109,4 @@ function addFact(found: RebuildFound, line: DraftLine): void {
       found.dates.soldOn = line.on;
   } else if (line.kind === 'asking') found.askingCents = line.cents;
   else if (line.kind === 'expected sale') found.expectedSaleCents = line.cents;
-}
-
-/** The entries of the list of rows and cells put aside that one row makes. */
-export function asidesOf(cells: readonly string[], line: number, read: RowRead, sheet: number): Aside[] {
-  const asides: Aside[] = read.cells.map((cell) => ({ sheet, row: line, isCell: true, ...cell }));
-  if (read.outcome !== 'put aside') return asides;
-  const { col, reason, cents } = read;
-  const text = col === null ? cells.join(' · ') : (cells[col - 1] ?? '');
-  return [
-    ...asides,
-    { sheet, row: line, col, isCell: false, reason: reason as Aside['reason'], text: text.slice(0, 200), cents },
-  ];
 }

@@ -4,8 +4,8 @@ import { expenseRowReader } from './expense-row.ts';
 import { hoursGridReader, weekdayColumns } from './hours-grid.ts';
 import { hoursRowReader } from './hours-row.ts';
 import { looseRowReader } from './loose-row.ts';
-import type { Plan, RowRead, RowReader } from './plan.ts';
-import { rowOutsideTable } from './row-kinds.ts';
+import { notData, type Plan, type RowRead, type RowReader } from './plan.ts';
+import { isBlank, rowOutsideTable } from './row-kinds.ts';
 import { type ColumnSums, columnSums, type SummedColumn } from './sums.ts';
 import { type CarriedFigures, vehicleRowReader } from './vehicle-row.ts';
 import { vehicleSheetReader } from './vehicle-sheet.ts';
@@ -25,10 +25,14 @@ export function tableReader(
   const inside = readerOf(plan, sums, carried);
   const outside = rowOutsideTable(plan);
   return {
-    read: (cells, line, isMalformed) => outside(cells, line, isMalformed) ?? inside(cells, line),
+    read: (cells, line, isMalformed) => leftOut(plan, line) ?? outside(cells, line, isMalformed) ?? inside(cells, line),
     stated: sums.stated,
   };
 }
+
+/** A row that a person left out; blank ones stay blank. */
+const leftOut = ({ sheet }: Plan, line: number): RowRead | null =>
+  sheet.leftOut?.has(line) && !isBlank(sheet.rawRow?.(line) ?? []) ? notData('left out') : null;
 
 function readerOf(plan: Plan, sums: ColumnSums, carried: CarriedFigures): RowReader {
   if (plan.shape === null) return looseRowReader(plan);

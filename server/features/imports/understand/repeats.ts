@@ -4,7 +4,11 @@ const SHORTEST_BLOCK = 3;
 export function rowHash(cells: readonly string[]): number {
   let high = 0x811c9dc5;
   let low = 0x1b873593;
-  for (const cell of cells) {
+  let end = cells.length;
+  // Blank cells at the end come and go with the program that wrote the file.
+  while (end > 0 && cells[end - 1] === '') end--;
+  for (let at = 0; at < end; at++) {
+    const cell = cells[at] as string;
     for (let i = 0; i < cell.length; i++) {
       const code = cell.charCodeAt(i);
       high = Math.imul(high ^ code, 0x01000193);

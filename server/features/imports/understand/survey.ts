@@ -22,7 +22,14 @@ export interface Survey {
   /** Lines on which a block pasted twice stands. */
   readonly repeats: ReadonlySet<number>;
   /** A hash of each row that holds data, and its line. */
-  readonly rows: { readonly hashes: readonly number[]; readonly lines: readonly number[] };
+  readonly rows: SurveyedRows;
+}
+
+export interface SurveyedRows {
+  readonly hashes: readonly number[];
+  readonly lines: readonly number[];
+  /** As they stood in the file, before anyone put them right; what later files are held against. */
+  readonly prints: readonly number[];
 }
 
 export interface DateEvidence {
@@ -87,7 +94,7 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
     vehicles,
     categories,
     repeats,
-    rows: { hashes, lines },
+    rows: { hashes, lines, prints: rawPrints(sheet, hashes, lines) },
     dates: new Map(days.map(({ at, see }) => [at + 1, see.evidence])),
   };
 }
@@ -99,10 +106,12 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
   const days = dateWatcher();
   const hashes: number[] = [];
   const lines: number[] = [];
+  const owners: string[] = [];
+  let owner = sheet.name ?? '';
   let decimalVotes = 0;
   sheet.forEachRow((cells, line) => {
     const title = titleOf(cells, thisYear);
-    if (title) count(vehicles, title.text);
+    if (title) count(vehicles, (owner = title.text));
     let isData = false;
     for (const cell of cells) {
       if (cell === '') continue;
@@ -115,6 +124,7 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
     if (!isData) return;
     hashes.push(rowHash(cells));
     lines.push(line);
+    owners.push(owner);
   });
   const repeats = new Set([...repeatedRows(hashes)].map((place) => lines[place] as number));
   // A tab's name speaks where no title does.
@@ -126,10 +136,16 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
     vehicles,
     categories: new Map(),
     repeats,
-    rows: { hashes, lines },
+    rows: { hashes, lines, prints: rawPrints(sheet, hashes, lines).map((hash, i) => ownPrint(hash, owners[i] ?? '')) },
     dates: new Map([[1, days.evidence]]),
   };
 }
+
+const rawPrints = ({ rawRow }: Sheet, hashes: readonly number[], lines: readonly number[]) =>
+  rawRow ? hashes.map((hash, i) => ofRaw(rawRow(lines[i] as number)) ?? hash) : hashes;
+const ofRaw = (cells: readonly string[] | undefined) => cells && rowHash(cells);
+/** The same bill may stand under two vehicles: whose it is belongs to its print. */
+const ownPrint = (hash: number, owner: string) => rowHash([String(hash), owner]);
 
 function count(counts: Map<string, number>, key: string): void {
   counts.set(key, (counts.get(key) ?? 0) + 1);

@@ -5,6 +5,7 @@ import type { ShopBooks } from '../books.ts';
 import type { FilePlan } from '../read/plan.ts';
 import { FileRefusal } from '../refusal.ts';
 import { type GivenFile, openFiles } from '../sheets/open-files.ts';
+import { editedSheets } from '../sheets/edited-sheet.ts';
 import { hintsOf } from '../sheets/sheet.ts';
 import { makeFilePlan, type SurveyedTable, usualDecimal } from './file-plan.ts';
 import { guessTable, type TableGuess } from './table-guess.ts';
@@ -29,7 +30,7 @@ export function understand(files: readonly GivenFile[], books: ShopBooks, settin
   const file = openFiles(files);
   const answers = new Map(Object.entries(settings.answers ?? {}));
   const decimal = usualDecimal(books.locale);
-  const guesses = file.sheets
+  const guesses = editedSheets(file.sheets, settings)
     .map((sheet) => guessTable(sheet, { books, settings, decimal, answers }))
     .filter(({ hasRows, sheet }) => hasRows || sheet.name === null);
   const first = guesses.find((guess) => guess.shape !== null) ?? guesses[0];

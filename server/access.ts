@@ -83,4 +83,14 @@ export const access: AccessTable = {
   'PUT /api/checks/settled': BOOKS,
   'GET /api/rules': READS_BOOKS,
   'POST /api/rules': BOOKS,
+
+  'GET /api/bids/basis': READS_BOOKS,
+  'GET /api/fee-table': READS_BOOKS,
+  'PUT /api/fee-table': OWNER,
+  'GET /api/bids': READS_BOOKS,
+  'GET /api/bids/:bidId': READS_BOOKS,
+  'POST /api/bids': BOOKS,
+  'PATCH /api/bids/:bidId': BOOKS,
+  'POST /api/bids/:bidId/outcome': BOOKS,
+  'POST /api/bids/:bidId/buy': BOOKS,
 };

@@ -4,6 +4,7 @@ import express, { type Express } from 'express';
 import helmet from 'helmet';
 import { access } from './access.ts';
 import { answersRoutes } from './features/answers/routes.ts';
+import { bidsRoutes } from './features/bids/routes.ts';
 import { checksRoutes } from './features/checks/routes.ts';
 import { healthRoutes } from './features/health/routes.ts';
 import { hoursRoutes } from './features/hours/routes.ts';
@@ -33,6 +34,7 @@ const routes: Route[] = [
   ...hoursRoutes,
   ...answersRoutes,
   ...rulesRoutes,
+  ...bidsRoutes,
   ...checksRoutes,
 ];
 

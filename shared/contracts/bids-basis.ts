@@ -44,7 +44,7 @@ export const startSchema = z.object({
 });
 export type Start = z.output<typeof startSchema>;
 
-/** Surprises by damage and seen, damage, or all, by category, the most frequent first. */
+/** Surprises by damage and seen, damage, or all, by category: the five most frequent at most, those first. */
 export const surprisesSchema = z.object({
   damageId: idSchema.nullable(),
   isSeen: z.boolean().nullable(),
@@ -59,7 +59,7 @@ export const surprisesSchema = z.object({
       x: count,
       /** Median of what they cost a rebuild that had one. */
       medianCents: z.number(),
-      /** What was written most often, at most four; x = rebuilds. */
+      /** What was written most often, at most three; x = rebuilds. */
       whats: z.array(z.object({ what: z.string(), x: count, medianCents: z.number() })),
     }),
   ),
@@ -87,7 +87,7 @@ const sellingSchema = z.object({
 });
 
 /** At most this many past rebuilds go to the browser: the last that left. */
-export const PAST_AT_MOST = 200;
+export const PAST_AT_MOST = 100;
 
 /** A past rebuild (set K: finished, its estimate not written over) as sheets look back at it. */
 export const pastSchema = rebuildRefSchema.extend({
@@ -107,6 +107,19 @@ export const pastSchema = rebuildRefSchema.extend({
 });
 export type Past = z.output<typeof pastSchema>;
 
+/** What a sheet needs of an adopted rule. */
+const ruleInForceSchema = ruleSchema.pick({
+  id: true,
+  year: true,
+  revision: true,
+  kind: true,
+  level: true,
+  percent: true,
+  flatCents: true,
+  rebuildCount: true,
+  adoptedOn: true,
+});
+
 export const bidBasisSchema = z.object({
   asOf: daySchema,
   booksVersion: z.int(),
@@ -116,7 +129,7 @@ export const bidBasisSchema = z.object({
   damages: z.array(wordSchema),
   categories: z.array(categoryWordSchema),
   /** For this shop year. null = none adopted. */
-  ruleInForce: ruleSchema.nullable(),
+  ruleInForce: ruleInForceSchema.nullable(),
   /** From the finest rung to "all". */
   ladder: z.array(ladderRungSchema),
   starts: z.array(startSchema),

@@ -55,7 +55,7 @@ export const usedRuleSchema = z.object({
   year: z.int().nullable(),
   /** "Based on". null = no rung of past rebuilds, or too few yet on every rung. */
   rung: z.enum(LADDER_RUNGS).nullable(),
-  /** Past rebuilds behind it; k of them in order is the one taken. null = it rests on none. */
+  /** Past rebuilds behind it; the k-th of them in order is the one taken. null = it rests on none, or was adopted. */
   n: count.nullable(),
   k: count.nullable(),
   /** Whole percent (two-part, flat, adopted). null = see `overrunCents`. */

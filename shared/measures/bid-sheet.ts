@@ -126,8 +126,8 @@ function ruleOfSheet({ rule, ...car }: BidInputs, basis: Past): SheetRuleFound {
 /** An adopted rule was set on all finished rebuilds together. */
 function adoptedRule(adopted: BidBasis['ruleInForce']): SheetRuleFound {
   if (adopted === null) return { used: { ...NOTHING, kind: 'in force', isMissing: true }, rule: null };
-  const { level, year, percent, flatCents, rebuildCount: n, evidence } = adopted;
-  const used = { ...NOTHING, kind: 'in force' as const, level, year, rung: 'all' as const, n, k: evidence.k };
+  const { level, year, percent, flatCents, rebuildCount: n } = adopted;
+  const used = { ...NOTHING, kind: 'in force' as const, level, year, rung: 'all' as const, n };
   return {
     used: { ...used, percent, flatCents },
     rule: { kind: 'two-part', creepPercent: percent, flatCents: flatCents ?? 0 },

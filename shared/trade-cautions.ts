@@ -1,3 +1,5 @@
+import { tradeChecks } from './trade-checks.ts';
+
 /** What of a car can bring up a caution: words of its damage, its cost categories and its entries. */
 export interface CautionFacts {
   readonly damages: readonly string[];
@@ -18,6 +20,9 @@ export const FOLLOW_PROCEDURE = 'Follow the maker’s procedure, local inspectio
 const RESTRAINTS =
   'Airbags and belts: note new or used, part number and the donor’s VIN; check for recalls; the lamp must go off at key-on. Beware of counterfeit inflators.';
 
+const STRUCTURE =
+  'Structure: rails, pillars and roof carry the next crash. Have it measured, and repaired where the maker allows it.';
+
 interface Trigger extends TradeCaution {
   readonly words: RegExp;
   readonly of: keyof CautionFacts;
@@ -36,12 +41,8 @@ const TRIGGERS: readonly Trigger[] = [
     of: 'entries',
     text: RESTRAINTS,
   },
-  {
-    about: 'structure',
-    words: /roll|roof|frame|structur/i,
-    of: 'damages',
-    text: 'Structure: rails, pillars and roof carry the next crash. Have it measured, and repaired where the maker allows it.',
-  },
+  { about: 'structure', words: /roll|roof|frame|structur/i, of: 'damages', text: STRUCTURE },
+  { about: 'structure', words: /\b(rail|apron|pillar|strut tower|frame)s?\b/i, of: 'entries', text: STRUCTURE },
   {
     about: 'flood and underbody',
     words: /flood|water|under ?body/i,
@@ -75,6 +76,12 @@ export function tradeCautions(facts: CautionFacts): TradeCaution[] {
     if (facts[of].some((word) => words.test(word))) raised.set(about, { about, text: `${text} ${FOLLOW_PROCEDURE}` });
   }
   return [...raised.values()];
+}
+
+/** Cautions for a car that is only looked at yet: by its damages and what hides behind them, and what is planned. */
+export function bidCautions({ damages, categories }: Pick<CautionFacts, 'damages' | 'categories'>): TradeCaution[] {
+  const hidden = tradeChecks(damages).map(({ surprise }) => surprise);
+  return tradeCautions({ damages, categories, entries: hidden });
 }
 
 /** On the walk round a car, before anybody works on it: what may hurt on the spot, whatever hit it. */

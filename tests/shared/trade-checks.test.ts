@@ -1,6 +1,6 @@
 import { describe, expect, it } from 'vitest';
 import { DAMAGE_FAMILIES, GOES_TOGETHER, ANY_DAMAGE, tradeChecks } from '#shared/trade-checks.ts';
-import { tradeCautions } from '#shared/trade-cautions.ts';
+import { bidCautions, tradeCautions } from '#shared/trade-cautions.ts';
 import { DEFAULT_DAMAGES } from '#shared/vocabulary.ts';
 
 const keys = (...damages: (string | null)[]) => tradeChecks(damages).map(({ key }) => key);
@@ -30,4 +30,11 @@ it('a caution stands once, and ends with the maker’s procedure', () => {
   const found = tradeCautions({ damages: ['rollover'], categories: ['restraints (SRS)'], entries: ['driver airbag'] });
   expect(found.map(({ about }) => about)).toEqual(['restraints', 'structure']);
   for (const { text } of found) expect(text).toMatch(/maker’s procedure/);
+});
+
+it('a car that is only looked at yet has the cautions of what hides behind its damage', () => {
+  const about = (...damages: string[]) => bidCautions({ damages, categories: [] }).map((caution) => caution.about);
+  expect(about('front')).toEqual(['restraints', 'structure', 'refrigerant']);
+  expect(about('flood')).toEqual(['restraints', 'flood and underbody']);
+  expect(about('hail')).toEqual([]);
 });

@@ -1,7 +1,9 @@
-import type { ChecksAnswer } from '#shared/contracts/checks.ts';
+import { type ChecksAnswer, checksAnswerSchema, checksApi } from '#shared/contracts/checks.ts';
 import type { Day } from '#shared/day.ts';
-import { readShopFacts } from '../../books/shop-facts.ts';
-import { type Database, type RawDatabase, rawHandle } from '../../platform/database.ts';
+import { asOf } from '../../books/facts-as-of.ts';
+import { type KeptReply, keptReply } from '../../books/kept-replies.ts';
+import type { ShopFacts } from '../../books/shop-facts.ts';
+import type { Database, RawDatabase } from '../../platform/database.ts';
 import {
   beforePurchase,
   guesses,
@@ -14,30 +16,23 @@ import {
 import { findFaults, type RowFinding } from './find-faults.ts';
 import type { NumberedVehicle } from './vehicle-numbers.ts';
 
-interface Kept {
-  readonly key: string;
-  readonly answer: ChecksAnswer;
+/** What is missing or odd in a shop's books, as text kept like the answers until the books change. */
+export function keptChecks(database: Database, shopId: string, today: Day): Promise<KeptReply> {
+  const question = `${today} ${checksApi.show.path}`;
+  return keptReply(database, { shopId, question }, (raw, facts) =>
+    JSON.stringify(checksAnswerSchema.parse(checksOf(raw, facts, today))),
+  );
 }
-// The last answer of each warehouse: looking for doubled receipts goes through every entry of the shop.
-const memory = new WeakMap<Database, Kept>();
 
-/** What is missing or odd in a shop's books, all read at one moment; kept until the books change. */
+/** The same, to go on with. */
 export async function readChecks(database: Database, shopId: string, today: Day): Promise<ChecksAnswer> {
-  const raw = await rawHandle(database.reader);
-  return raw.transaction(() => {
-    const version = raw.prepare('SELECT books_version FROM shops WHERE id = ?').pluck().get(shopId);
-    const key = `${shopId} ${version} ${today}`;
-    const kept = memory.get(database);
-    if (kept?.key === key) return kept.answer;
-    const answer = checksOf(raw, shopId, today);
-    memory.set(database, { key, answer });
-    return answer;
-  })();
+  return checksAnswerSchema.parse(JSON.parse((await keptChecks(database, shopId, today)).text));
 }
 
-function checksOf(raw: RawDatabase, shopId: string, today: Day): ChecksAnswer {
+function checksOf(raw: RawDatabase, facts: ShopFacts, today: Day): ChecksAnswer {
+  const { shopId } = facts;
   const asked = { shopId, today };
-  const { rebuilds } = readShopFacts(raw, shopId);
+  const { rebuilds } = asOf(facts, today);
   const rows: RowFinding[] = [
     {
       kind: 'receipt twice',

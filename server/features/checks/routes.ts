@@ -1,12 +1,15 @@
 import { checksApi } from '#shared/contracts/checks.ts';
+import { sendKept } from '../../books/kept-replies.ts';
 import { settledChecks } from '../../books/settled-checks.ts';
 import { write } from '../../books/write.ts';
 import { type Route, route } from '../../platform/http.ts';
 import { impossible } from '../../platform/problems.ts';
-import { readChecks } from './read-model.ts';
+import { keptChecks, readChecks } from './read-model.ts';
 
 export const checksRoutes: Route[] = [
-  route(checksApi.show, async (ctx) => readChecks(ctx.services.database, ctx.actor.shopId, await ctx.today())),
+  route(checksApi.show, async (ctx) =>
+    sendKept(ctx, await keptChecks(ctx.services.database, ctx.actor.shopId, await ctx.today())),
+  ),
 
   route(checksApi.settle, async (ctx) => {
     const { kind, key, isSettled, note } = ctx.body;

@@ -3,6 +3,7 @@ import { adoptRules, areRulesAdopted } from './demo/adopt-rules.ts';
 import { bookLedger, isLedgerBooked } from './demo/book-ledger.ts';
 import { bringInSheets } from './demo/bring-in-sheets.ts';
 import { demoBook } from './demo/generate.ts';
+import { areSheetsKept, keepSheets } from './demo/keep-sheets.ts';
 import { findDemoShop, gatherPeople, openDemoShop } from './demo/open-demo-shop.ts';
 import { DEMO_MEMBERS, DEMO_OWNER, DEMO_PASSWORD, type DemoPerson } from './demo/people.ts';
 
@@ -29,6 +30,7 @@ export async function seedDemo(services: Services): Promise<DemoSignIns | null> 
     await bookLedger(services, shop, demoBook());
   }
   if (!(await areRulesAdopted(services, shop))) await adoptRules(services, shop);
+  if (!(await areSheetsKept(services, shop))) await keepSheets(services, shop);
   return { people: [DEMO_OWNER, ...DEMO_MEMBERS], password: DEMO_PASSWORD };
 }
 

@@ -1,14 +1,10 @@
+import { FEWEST_ON_RUNG, LADDER_RUNGS, type Rung } from '#shared/measures/ladder-rungs.ts';
 import { contingency, type Level, rankAt } from './contingency.ts';
 import type { RebuildFacts } from './facts.ts';
 import { type Completed, type PlannedOutcome, planned, plannedAndTold, plannedOutcomes } from './sets.ts';
 import { twoPartRule } from './two-part-rule.ts';
 
-/** Rungs from the finest to the widest. */
-export const RUNGS = ['class+damage+seen', 'damage+seen', 'seen', 'all'] as const;
-export type Rung = (typeof RUNGS)[number];
-
-/** With fewer past rebuilds than this, no rung carries a rule. */
-export const FEWEST_ON_RUNG = 9;
+export { FEWEST_ON_RUNG, type Rung };
 
 /** The car that a rule is wanted for. */
 export type Car = Pick<RebuildFacts, 'class' | 'damage' | 'seen'>;
@@ -59,7 +55,7 @@ export function twoPartOnLadder(facts: readonly RebuildFacts[], car: Car, level:
 }
 
 function footingOf(set: readonly Completed[], car: Car, level: Level): Footing {
-  const rungs = RUNGS.map((rung) => {
+  const rungs = LADDER_RUNGS.map((rung) => {
     const members = set.filter((rebuild) => isOnRung(rung, rebuild, car));
     const [n, k] = [members.length, rankAt(members.length, level)];
     return { members, tried: { rung, n, k, carries: n >= FEWEST_ON_RUNG && k <= n } };

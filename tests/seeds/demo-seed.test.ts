@@ -38,6 +38,10 @@ async function seeded({ isBrokenOff }: { isBrokenOff: boolean }) {
       .whereNotNull('import_id')
       .orderBy('tag')
       .pluck('tag'),
+    sheets: await reader('bid_sheets')
+      .where({ shop_id: shopId })
+      .orderBy('made_on')
+      .select('state', 'reason', 'figures'),
     aside: await reader('import_rows').where({ shop_id: shopId, outcome: 'put aside' }).pluck('cells'),
   };
 }
@@ -126,4 +130,18 @@ test('nothing is seeded where somebody has an account, in production, or on an o
     expect(await seedDemo(services)).toBeNull();
     expect(await services.database.reader('shops').first()).toBeUndefined();
   }
+});
+
+test('four sheets are kept: one bought, two left to others with a reason, one open', () => {
+  const kept = demo.sheets.map(({ state, reason, figures }) => [
+    state,
+    reason !== null,
+    JSON.parse(figures).bidCents > 0,
+  ]);
+  expect(kept).toEqual([
+    ['bought', false, true],
+    ['not bought', true, true],
+    ['not bought', true, true],
+    ['open', false, true],
+  ]);
 });

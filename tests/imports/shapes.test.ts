@@ -60,10 +60,12 @@ describe('headings', () => {
     expect(linesOf(reading).at(-1)).toMatchObject({ category: 'parts', what: 'grille', on: '2019-04-15' });
   });
 
-  it('none of which anybody knows: refused, since words above a list are no data', () => {
-    expect(
-      read('Aa,Bb,Cc,Dd\n3/14/2019,11 Miata,x,1.00\n3/15/2019,11 Miata,y,2.00\n3/16/2019,11 Miata,z,3.00').refusal,
-    ).not.toBeNull();
+  it('none of which anybody knows: the columns are known by what they hold, the words above are headings', () => {
+    const reading = read(
+      'Aa,Bb,Cc,Dd\n3/14/2019,11 Miata,x,1.00\n3/15/2019,11 Miata,y,2.00\n3/16/2019,11 Miata,z,3.00',
+    );
+    expect(reading.columns.map(({ meaning }) => meaning)).toEqual(['date', 'vehicle', 'what', 'amount']);
+    expect(reading.control).toMatchObject({ taken: 3, notData: 1, costCents: 600 });
   });
 
   it('in two rows: groups above planned and actual', () => {

@@ -1,3 +1,4 @@
+import { weekdayOf } from '../words/weekdays.ts';
 import { calendarYearOf, type Day, dayFromNumber, dayFromParts, daysBetween, isDay } from '#shared/day.ts';
 
 export type DateOrder = 'MDY' | 'DMY';
@@ -20,8 +21,9 @@ const MONTH_OF = new Map(MONTHS.flatMap((names, index) => names.split(' ').map((
 
 const ISO = /^(\d{4})[-/.](\d{1,2})[-/.](\d{1,2})(?:[T ].*)?$/;
 const NUMERIC = /^(\d{1,2})([-/.])(\d{1,2})\2(\d{4}|\d{2})(?:,? \d{1,2}:\d{2}.*)?$/;
-const DAY_FIRST = /^(\d{1,2})(?:st|nd|rd|th)?[-. /]*([\p{L}]{3,})[-., /]*(\d{4}|\d{2})$/u;
-const MONTH_FIRST = /^([\p{L}]{3,})[-. /]*(\d{1,2})(?:st|nd|rd|th)?[-, /]+(\d{4}|\d{2})$/u;
+const DAY_FIRST =
+  /^(?:le |el )?(\d{1,2})(?:st|nd|rd|th|er)?[-. /]*(?:of |de )?([\p{L}]{3,})[-., /]*(?:de |del )?['’]?(\d{4}|\d{2})$/u;
+const MONTH_FIRST = /^([\p{L}]{3,})[-. /]*(\d{1,2})(?:st|nd|rd|th)?[-, /]+['’]?(\d{4}|\d{2})$/u;
 
 const SERIAL = /^(\d{5})(?:\.\d+)?$/;
 const FIRST_SERIAL = 25_569;
@@ -29,6 +31,20 @@ const YEARLESS = /^(\d{1,2})([-/.])(\d{1,2})\.?$/;
 const YEARLESS_DAY_FIRST = /^(\d{1,2})(?:st|nd|rd|th)?[-. /]*([\p{L}]{3,})\.?$/u;
 const YEARLESS_MONTH_FIRST = /^([\p{L}]{3,})[-. /]*(\d{1,2})(?:st|nd|rd|th)?$/u;
 const HALF_YEAR = 183;
+// `Tue 1/5/16`, `Mo., 04.05.20`, `5/3/21 (Mon)`: a weekday beside the day itself.
+const WEEKDAY_BEFORE = /^(\p{L}{2,10})[.,]*[ ,]+(?=\d|\p{L}{3,}[-. /]*\d)/u;
+const WEEKDAY_AFTER = /[ ,]+\(?(\p{L}{2,10})\.?\)?$/u;
+
+/** The text of a day without the weekday that stands beside it, and that weekday (0 = Monday); null = none does. */
+function withoutWeekday(text: string): { text: string; weekday: number | null } {
+  const trimmed = text.trim();
+  if (!/\p{L}/u.test(trimmed)) return { text: trimmed, weekday: null };
+  const found = WEEKDAY_BEFORE.exec(trimmed) ?? WEEKDAY_AFTER.exec(trimmed);
+  const weekday = found ? weekdayOf(found[1] ?? '') : null;
+  return weekday === null
+    ? { text: trimmed, weekday }
+    : { text: trimmed.replace(found?.[0] ?? '', '').trim(), weekday };
+}
 
 const plain = (text: string) =>
   text
@@ -51,9 +67,7 @@ export function dayReader(order: DateOrder, today: Day): (text: string) => Day |
     const found = month === undefined ? null : dayFromParts(fullYear(year, thisYear), month, Number(day));
     return found !== null && isDay(found) ? found : 'bad';
   };
-  return (text) => {
-    const trimmed = text.trim();
-    if (trimmed === '') return 'blank';
+  const dayOf = (trimmed: string): Day | 'bad' => {
     const iso = ISO.exec(trimmed);
     if (iso) return made(iso[1] ?? '', Number(iso[2]), iso[3] ?? '');
     const numeric = NUMERIC.exec(trimmed);
@@ -68,6 +82,14 @@ export function dayReader(order: DateOrder, today: Day): (text: string) => Day |
     if (dayFirst) return made(dayFirst[3] ?? '', MONTH_OF.get(dayFirst[2] ?? ''), dayFirst[1] ?? '');
     const monthFirst = MONTH_FIRST.exec(words);
     return monthFirst ? made(monthFirst[3] ?? '', MONTH_OF.get(monthFirst[1] ?? ''), monthFirst[2] ?? '') : 'bad';
+  };
+  return (text) => {
+    const trimmed = text.trim();
+    if (trimmed === '') return 'blank';
+    const day = dayOf(trimmed);
+    if (day !== 'bad') return day;
+    const { text: bare, weekday } = withoutWeekday(trimmed);
+    return weekday === null ? 'bad' : dayOf(bare);
   };
 }
 
@@ -102,13 +124,43 @@ export function nearestDay({ month, day }: { month: number; day: number }, near:
 export function looksLikeDay(text: string): boolean {
   const trimmed = text.trim();
   if (ISO.test(trimmed) || NUMERIC.test(trimmed)) return true;
+  const { text: bare, weekday } = withoutWeekday(trimmed);
+  if (weekday !== null && looksLikeDay(bare)) return true;
   const words = plain(trimmed);
   const month = DAY_FIRST.exec(words)?.[2] ?? MONTH_FIRST.exec(words)?.[1];
   return month !== undefined && MONTH_OF.has(month);
 }
 
-/** The two numbers of `3/12/2018` that may be month and day; null where the text itself settles them. */
-export function unsettledParts(text: string): [first: number, second: number] | null {
-  const match = NUMERIC.exec(text.trim()) ?? YEARLESS.exec(text.trim());
-  return match && match[2] !== '.' ? [Number(match[1]), Number(match[3])] : null;
+/** A day in numbers whose order the text does not settle: `3/12/2018`. */
+export interface UnsettledDay {
+  readonly first: number;
+  readonly second: number;
+  /** Its last two digits; '' = it names no year. */
+  readonly year: string;
+  /** The weekday that stands beside it, 0 = Monday; null = none. */
+  readonly weekday: number | null;
 }
+
+/** The two numbers of `3/12/2018` that may be month and day; null where the text itself settles them. */
+export function unsettledDay(text: string): UnsettledDay | null {
+  const { text: bare, weekday } = withoutWeekday(text);
+  const match = NUMERIC.exec(bare) ?? YEARLESS.exec(bare);
+  if (!match || match[2] === '.') return null;
+  return { first: Number(match[1]), second: Number(match[3]), year: (match[4] ?? '').slice(-2), weekday };
+}
+
+/** `12.3.2018`: written with points, the day stands first. */
+export function isDotted(text: string): boolean {
+  return NUMERIC.exec(text.trim())?.[2] === '.';
+}
+
+const NOT_YET = new Set(
+  `-|–|—|n/a|na|none|tbd|not yet|in shop|in the shop|in work|in progress|wip|unsold|not sold|for sale|listed|pending|open|still here|have
+it|keeping|noch nicht|offen|in arbeit|steht noch|nicht verkauft|pendiente|en venta|en taller|sin vender|no vendido|en cours|a vendre|à
+vendre|invendu|non vendu|en vente`
+    .replace(/\n/g, ' ')
+    .split('|'),
+);
+
+/** Does a cell say in words that the day has not come yet? */
+export const isNotYet = (text: string) => NOT_YET.has(text.trim().toLowerCase());

@@ -78,7 +78,8 @@ export function looksLikeMoney(text: string): boolean {
     .trim()
     .replace(/^(?:~|ca\.?|about|approx\.?)|(?:ish|\?|k)$/gi, '')
     .replace(SIGN, '')
-    .replace(/[\s'’()+\-−–]/g, '');
+    .replace(/[\s'’()+]|^[-−–]|[-−–]+$/g, '')
+    .replace(/^[-−–]/, '');
   return bare !== '' && /^\d[\d.,]*$/.test(bare);
 }
 

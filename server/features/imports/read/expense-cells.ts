@@ -8,7 +8,7 @@ import { type CategoryMeaning, PURCHASE, SALE } from '../words/categories.ts';
 import { categoryGuesser } from '../words/infer-category.ts';
 import { daysInOrder } from './days-in-order.ts';
 import type { Plan } from './plan.ts';
-import { isOwnWork } from './sheet-words.ts';
+import { isOwnWork } from '../words/own-work.ts';
 
 /** Money of a cell: cents, nothing, or why it cannot be taken. */
 export type CellMoney = number | 'blank' | AsideReason;

@@ -4,6 +4,7 @@ import { looksLikeMoney } from '../cells/money.ts';
 import { readVehicle } from '../understand/vehicle-text.ts';
 import { isColor, makeOf } from '../words/vehicles.ts';
 import { headingMeanings } from '../words/headings.ts';
+import { isOwnWork } from '../words/own-work.ts';
 import { tradeMeaning } from '../words/categories.ts';
 import { filled } from './row-kinds.ts';
 
@@ -64,12 +65,6 @@ export function tabNamesVehicle(name: string, thisYear: number): boolean {
 /** An amount with its decimals or a sign, not just any number. */
 export const isFigure = (cell: string) =>
   looksLikeMoney(cell) && (/[.,]\d{1,2}(?!\d)|[$€£]/.test(cell) || /^\s*\(/.test(cell));
-
-const OWN_WORK =
-  /^(?:(?:my|own|our|shop)\s)?(?:labou?r|hours|hrs|time|work|time spent|arbeit|arbeitszeit|eigenleistung|stunden|zeit|mano de obra|horas|trabajo|main d oeuvre|heures|travail|temps)(?:\s(?:log|hours|spent|own|propia|eigene))?$/;
-
-/** Does a section's title say that own work follows? */
-export const isOwnWork = (text: string) => OWN_WORK.test(fold(text));
 
 const BRAND = /\b(?:salvage|rebuilt|reconstructed|clean|clear|flood|junk|branded|certificate)\b/i;
 

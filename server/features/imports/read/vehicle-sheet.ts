@@ -7,7 +7,8 @@ import { sectionColumns } from './section-columns.ts';
 import { type Section, sectionLineReader } from './section-line.ts';
 import { sectionSums } from './section-sums.ts';
 import { factReader } from './sheet-facts.ts';
-import { isFigure, isOwnWork, titleOf } from './sheet-words.ts';
+import { isFigure, titleOf } from './sheet-words.ts';
+import { isOwnWork } from '../words/own-work.ts';
 import type { ColumnSums } from './sums.ts';
 
 /** Where the reader stands in the sheet. */

@@ -1,16 +1,33 @@
 import type { Choice, Column } from '#shared/contracts/import-reading.ts';
 import type { DateOrder } from '../cells/days.ts';
 import { placedId } from './placed-id.ts';
-import type { DateEvidence } from './survey.ts';
+import type { DateEvidence } from './date-evidence.ts';
 
 const ENOUGH = 5;
+const FEWEST_WEEKS = 3;
 
 /** Month or day first, by what the whole column holds; null = it cannot be told. */
 export function settledOrder(evidence: DateEvidence): DateOrder | null {
   const { firstOver12, secondOver12, unsettled, monthFirstBack, dayFirstBack } = evidence;
   if (firstOver12 !== secondOver12) return firstOver12 > secondOver12 ? 'DMY' : 'MDY';
+  const byWeekday = weekdayOrder(evidence) ?? rhythmOrder(evidence);
+  if (byWeekday !== null) return byWeekday;
+  if (unsettled > 0 && evidence.dotted > 0) return 'DMY';
   if (unsettled < ENOUGH || monthFirstBack > 0 === dayFirstBack > 0) return null;
   return monthFirstBack === 0 ? 'MDY' : 'DMY';
+}
+
+/** The order with which the weekdays beside the days agree. */
+function weekdayOrder({ weekdays, monthFirstWeekdays, dayFirstWeekdays }: DateEvidence): DateOrder | null {
+  if (weekdays === 0 || monthFirstWeekdays === dayFirstWeekdays) return null;
+  return monthFirstWeekdays > dayFirstWeekdays ? 'MDY' : 'DMY';
+}
+
+/** A weekly sheet names the same weekday in every row: three weeks are enough, if only one order gives it so. */
+function rhythmOrder({ unsettled, monthFirstOn, dayFirstOn }: DateEvidence): DateOrder | null {
+  const [monthFirst, dayFirst] = [Math.max(...monthFirstOn) === unsettled, Math.max(...dayFirstOn) === unsettled];
+  if (unsettled < FEWEST_WEEKS || monthFirst === dayFirst) return null;
+  return monthFirst ? 'MDY' : 'DMY';
 }
 
 /** The order that the settled columns of a whole file agree on; null = none, or they differ. */

@@ -4,7 +4,7 @@ import type { Sheet } from '../sheets/sheet.ts';
 import { tradeMeaning } from '../words/categories.ts';
 import { headingMeanings, plannedPart } from '../words/headings.ts';
 import { madeHeadings } from './made-headings.ts';
-import { underGroups, withUnits } from './two-row-headings.ts';
+import { overQualifiers, underGroups, withUnits } from './two-row-headings.ts';
 
 const LOOKED_AT = 500;
 const DEEPEST_HEADING = 40;
@@ -48,21 +48,38 @@ export function cutAtHeading(rows: readonly HeadRow[], thisYear: number): Head {
     const found = headingScore(rows[i]?.cells ?? []);
     if (found > most) [best, most] = [i, found];
   }
-  const row = rows[best];
-  if (!row) {
-    const cells = madeHeadings(rows, thisYear);
-    return { above: [], heading: cells && { cells, line: 0 }, last: 0, below: rows };
-  }
+  const made = best < 0 ? madeHeadings(rows, thisYear) : null;
+  const at = best >= 0 || made ? best : unknownHeadings(rows);
+  const row = rows[at];
+  if (!row) return { above: [], heading: made && { cells: made, line: 0 }, last: 0, below: rows };
+  return cutAt(rows, row, at);
+}
+
+function cutAt(rows: readonly HeadRow[], row: HeadRow, best: number): Head {
   const upper = rows[best - 1];
   const grouped = upper ? underGroups(upper.cells, row.cells) : null;
   const lower = rows[best + 1];
-  const measured = lower ? withUnits(grouped ?? row.cells, lower.cells) : null;
+  const measured = lower
+    ? (withUnits(grouped ?? row.cells, lower.cells) ?? overQualifiers(grouped ?? row.cells, lower.cells))
+    : null;
   return {
     above: rows.slice(0, grouped ? best - 1 : best),
     heading: { cells: measured ?? grouped ?? row.cells, line: (grouped ? upper : row)?.line ?? row.line },
     last: (measured ? lower : row)?.line ?? row.line,
     below: rows.slice(measured ? best + 2 : best + 1),
   };
+}
+
+/** A row of at least three words above rows with figures holds headings, if in words that nobody knows; −1 = there is none. */
+function unknownHeadings(rows: readonly HeadRow[]): number {
+  const isFigure = (cell: string) => looksLikeMoney(cell) || looksLikeDay(cell);
+  const filledOf = ({ cells }: HeadRow) => cells.filter((cell) => cell.trim() !== '');
+  return rows.slice(0, DEEPEST_HEADING).findIndex((row, at) => {
+    const words = filledOf(row);
+    const below = rows.slice(at + 1, at + 4).map(filledOf);
+    const isTable = below.length > 1 && below.every((cells) => cells.length > 2 && cells.some(isFigure));
+    return words.length >= 3 && new Set(words).size === words.length && !words.some(isFigure) && isTable;
+  });
 }
 
 function headingScore(cells: readonly string[]): number {

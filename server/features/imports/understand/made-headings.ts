@@ -1,11 +1,13 @@
 import { looksLikeDay } from '../cells/days.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import { tradeMeaning } from '../words/categories.ts';
+import { namesPart } from '../words/parts.ts';
 import type { HeadRow } from './head.ts';
-import { readVehicle } from './vehicle-text.ts';
+import { looksLikeVehicle } from './vehicle-text.ts';
 
 const MOST = 0.7;
 const FEWEST_ROWS = 3;
+const SOME = 0.4;
 
 /**
  * Headings for a list that has none, by what its columns hold: days, vehicles, amounts, kinds of cost, words. null = it
@@ -30,14 +32,17 @@ export function madeHeadings(rows: readonly HeadRow[], thisYear: number): string
     if (found >= 0) headings[found] = heading;
     return found >= 0;
   };
-  const isVehicle = (cell: string) => {
-    const { year, model } = readVehicle(cell, thisYear);
-    return year !== null && model !== null && /\p{L}{2}/u.test(model) && !isFigures(cell);
-  };
+  const isVehicle = (cell: string) => looksLikeVehicle(cell, thisYear);
   const isWord = (cell: string) => !isFigures(cell);
   const isList = name('Date', looksLikeDay) && name('Vehicle', isVehicle) && name('Amount', looksLikeMoney, 'last');
   if (!isList) return null;
-  name('Category', (cell) => tradeMeaning(cell)?.isExact ?? false);
+  // A second column of words may say what each row was for, or from whom; the first is a kind of cost only beside the former.
+  const words = columns.filter((cells, at) => headings[at] === '' && cells.some(isWord));
+  const saysWhat = (cells: readonly string[]) =>
+    cells.filter((cell) => tradeMeaning(cell) !== null || namesPart(cell)).length >= cells.length * SOME;
+  if (words.length > 2 || words.filter(saysWhat).length > 1) {
+    name('Category', (cell) => tradeMeaning(cell)?.isExact ?? false);
+  }
   name('What', isWord);
   name('Vendor', isWord);
   return headings;

@@ -3,8 +3,10 @@ import type { Shape } from '#shared/contracts/import-words.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import { type CategoryMeaning, SALE } from '../words/categories.ts';
 import { weekdayOf } from '../words/weekdays.ts';
-import { headingMeanings, plannedPart } from '../words/headings.ts';
+import { actualPart, dealOf, headingMeanings, plannedPart } from '../words/headings.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
+import type { Guess } from './columns.ts';
+import { guessOfList } from './list-columns.ts';
 import { sectionColumns } from '../read/section-columns.ts';
 import { isFigure, tabNamesVehicle, titleOf } from '../read/sheet-words.ts';
 import type { Head, HeadRow } from './head.ts';
@@ -29,19 +31,26 @@ export function guessShape(
       why: 'No row reads like headings. Put a row of headings (date, car, what, amount) above the list and bring it in again.',
     };
   }
+  const asList = guessOfList(all, 'expenses', thisYear);
+  const column = (...meanings: Meaning[]) => all.find((_, i) => meanings.includes(asList[i]?.meaning ?? 'ignore'));
   const means = (meaning: Meaning, holds: (facts: ColumnFacts) => boolean) =>
     all.find((facts) => holds(facts) && headingMeanings(facts.heading).includes(meaning));
   const costs = all.filter((facts) => facts.filled > 0 && holdsMoney(facts) && isCost(facts, categoryOf));
-  const name = means('stock number', () => true) ?? means('vehicle', holdsNames) ?? means('model', () => true);
+  const name =
+    means('stock number', holdsNames) ??
+    means('vehicle', holdsNames) ??
+    means('model', () => true) ??
+    column('vehicle', 'stock number', 'model');
   const amount = means('amount', holdsMoney);
   const weekdays = all.filter((facts) => weekdayOf(facts.heading) !== null);
   if (name && weekdays.length >= FEWEST_WEEKDAYS && weekdays.some(holdsHours)) return { shape: 'hours' };
   if (name && costs.length >= 2 && (name.distinct >= 0.8 || costs.length >= 4 || !amount)) return { shape: 'vehicles' };
-  const isOverview = name && name.distinct >= 0.8 && means('sale', holdsMoney) && !means('date', holdsDays);
-  if (isOverview && !amount && !means('category', holdsText)) return { shape: 'vehicles' };
-  const hasMoney = amount ?? means('credit', holdsMoney);
-  if (name && hasMoney) return { shape: 'expenses' };
-  if (name && means('hours', holdsHours) && means('date', holdsDays)) return { shape: 'hours' };
+  const isOverview = name && name.distinct >= 0.8 && isSaleOf(all) && !means('category', holdsText);
+  if (isOverview && (!amount || !means('what', holdsText)) && !means('date', isPlainDate)) return { shape: 'vehicles' };
+  const hours = means('hours', holdsHours);
+  const isLog = hours && column('date') && (!amount || isOnlyPay(hours, all, asList));
+  if (name && isLog) return { shape: 'hours' };
+  if (name && column('amount', 'credit', 'estimate')) return { shape: 'expenses' };
   return {
     shape: null,
     row: head.heading.line,
@@ -49,6 +58,26 @@ export function guessShape(
       ? 'No column of amounts was found under the headings.'
       : 'No column names the vehicle. Lists of costs need a column that says which car each row belongs to.',
   };
+}
+
+const DEALS = new Set<Meaning>(['boughtOn', 'soldOn']);
+
+/** A column of days that is not just the day of a deal: `Date`, not `Date bought`. */
+const isPlainDate = (facts: ColumnFacts) =>
+  holdsDays(facts) && !headingMeanings(facts.heading).some((meaning) => DEALS.has(meaning));
+
+const isSaleOf = (all: readonly ColumnFacts[]) =>
+  all.some(
+    (facts) =>
+      facts.filled > 0 &&
+      holdsMoney(facts) &&
+      (dealOf(facts.heading) === 'selling' || headingMeanings(facts.heading).includes('sale')),
+  );
+
+/** Do hours stand on every row, and is nothing said of a vendor or a kind of cost? Then amounts are hours at a rate. */
+function isOnlyPay(hours: ColumnFacts, all: readonly ColumnFacts[], asList: readonly Guess[]): boolean {
+  const most = Math.max(...all.map(({ filled }) => filled));
+  return hours.filled >= most * 0.9 && !asList.some(({ meaning }) => meaning === 'vendor' || meaning === 'category');
 }
 
 /** Text, or whole numbers, as people number their vehicles. */
@@ -76,6 +105,7 @@ const TITLE_WITHIN = 12;
 const FEWEST_WEEKDAYS = 4;
 
 function isCost(facts: ColumnFacts, categoryOf: (text: string) => CategoryMeaning | null): boolean {
-  const category = categoryOf(plannedPart(facts.heading) ?? facts.heading);
+  const planned = plannedPart(facts.heading);
+  const category = categoryOf(planned ?? (actualPart(facts.heading) || facts.heading));
   return category !== null && category.category !== SALE;
 }

@@ -1,7 +1,7 @@
 import type { Column } from '#shared/contracts/import-reading.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 import { currenciesIn, decimalVote, looksLikeMoney } from '../cells/money.ts';
-import { unsettledParts } from '../cells/days.ts';
+import { type DateEvidence, dateWatcher } from './date-evidence.ts';
 import type { Sheet } from '../sheets/sheet.ts';
 import { isFigure, namesVehicle, titleOf } from '../read/sheet-words.ts';
 import { repeatedRows, rowHash } from './repeats.ts';
@@ -32,16 +32,6 @@ export interface SurveyedRows {
   readonly prints: readonly number[];
 }
 
-export interface DateEvidence {
-  firstOver12: number;
-  secondOver12: number;
-  /** Cells that a number order matters to. */
-  unsettled: number;
-  /** Steps back in time when read as month first, and as day first. */
-  monthFirstBack: number;
-  dayFirstBack: number;
-}
-
 const MONEY = new Set<Column['meaning']>([
   'amount',
   'credit',
@@ -56,11 +46,11 @@ const MONEY = new Set<Column['meaning']>([
 const DATES = new Set<Column['meaning']>(['date', ...REBUILD_DATES.map(([field]) => field)]);
 
 /** Goes through a whole sheet once. */
-export function survey(sheet: Sheet, columns: readonly Column[], heading: Heading): Survey {
+export function survey(sheet: Sheet, columns: readonly Column[], heading: Heading, thisYear: number): Survey {
   const money = columns.filter((column) => MONEY.has(column.meaning)).map((column) => column.col - 1);
   const days = columns
     .filter((column) => DATES.has(column.meaning))
-    .map((column) => ({ at: column.col - 1, see: dateWatcher() }));
+    .map((column) => ({ at: column.col - 1, see: dateWatcher(thisYear) }));
   const nameOf = vehicleText(columns);
   const isAgain = isHeadingAgain(heading.cells);
   const category = columns.find((column) => column.meaning === 'category');
@@ -103,7 +93,7 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
 export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
   const currencies = new Map<string, number>();
   const vehicles = new Map<string, number>();
-  const days = dateWatcher();
+  const days = dateWatcher(thisYear);
   const hashes: number[] = [];
   const lines: number[] = [];
   const owners: string[] = [];
@@ -149,26 +139,4 @@ const ownPrint = (hash: number, owner: string) => rowHash([String(hash), owner])
 
 function count(counts: Map<string, number>, key: string): void {
   counts.set(key, (counts.get(key) ?? 0) + 1);
-}
-
-function dateWatcher() {
-  const evidence: DateEvidence = { firstOver12: 0, secondOver12: 0, unsettled: 0, monthFirstBack: 0, dayFirstBack: 0 };
-  let before: readonly [number, number, string] | null = null;
-  return {
-    evidence,
-    cell(text: string) {
-      const parts = unsettledParts(text);
-      if (!parts) return;
-      const [first, second] = parts;
-      const year = text.trim().slice(-2);
-      evidence.unsettled++;
-      if (first > 12) evidence.firstOver12++;
-      if (second > 12) evidence.secondOver12++;
-      if (before && before[2] === year) {
-        if (first * 31 + second < before[0] * 31 + before[1]) evidence.monthFirstBack++;
-        if (second * 31 + first < before[1] * 31 + before[0]) evidence.dayFirstBack++;
-      }
-      before = [first, second, year];
-    },
-  };
 }

@@ -60,7 +60,10 @@ function guessAll(
   const thisYear = Number(books.today.slice(0, 4));
   const guessed = guessShape(head, facts, categoryOf, { sheetName: sheet.name, thisYear });
   if (guessed.shape === 'vehicle sheet') return { columns: [], why: '', row: null, ...guessed };
-  const columns = guessColumns(facts, guessed.shape ?? 'expenses', categoryOf, sheet.number);
+  const columns = guessColumns(facts, guessed.shape ?? 'expenses', categoryOf, {
+    sheet: sheet.number,
+    thisYear,
+  });
   const derived = guessed.shape === 'vehicles' ? markDerived(columns, head, moneyReader(decimal)) : columns;
   if (said.length === 0) return { columns: derived, why: '', row: null, ...guessed };
   const changed = new Map(said.map((column) => [column.col, column]));

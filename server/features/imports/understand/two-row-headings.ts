@@ -5,7 +5,7 @@ import { tradeMeaning } from '../words/categories.ts';
 import { headingMeanings } from '../words/headings.ts';
 
 const QUALIFIER =
-  /^(?:est|estim|estimate|estimated|plan|planned|budget|quote|actual|act|real|spent|ist|soll|geplant|tatsachlich|previsto|presupuesto|prevu|reel|paid|cost|kosten)$/;
+  /^(?:est|estim|estimate|estimated|plan|planned|budget|budgeted|bud|quote|quoted|actual|act|real|spent|ist|soll|kva|geplant|gepl|tatsachlich|prev|previsto|presupuesto|presup|gastado|prevu|devis|reel|paid|cost|kosten|diff|difference|differenz|abweichung|ecart|diferencia)$/;
 const UNIT =
   /^[([]?\s*(?:usd|eur|gbp|\$|€|£|h|hrs?|hours|std|km|mi|miles|y\/n|d{1,2}[./-]m{1,2}[./-]y{2,4}|m{1,2}[./-]d{1,2}[./-]y{2,4})\s*[)\]]?$/i;
 
@@ -24,6 +24,18 @@ export function underGroups(upper: readonly string[], lower: readonly string[]):
     return `${group} ${cell.trim()}`;
   });
   return merged >= 2 ? cells : null;
+}
+
+/** Headings above a row that only says which figure is which: `Parts` over two columns, `est` and `actual` below. null = none. */
+export function overQualifiers(upper: readonly string[], lower: readonly string[]): string[] | null {
+  const filled = lower.filter((cell) => cell.trim() !== '');
+  if (filled.length < 2 || !filled.every((cell) => QUALIFIER.test(fold(cell)))) return null;
+  let group = '';
+  return Array.from({ length: Math.max(upper.length, lower.length) }, (_, at) => {
+    group = (upper[at] ?? '').trim() || group;
+    const below = (lower[at] ?? '').trim();
+    return below === '' ? (upper[at] ?? '') : `${group} ${below}`;
+  });
 }
 
 /** Headings with the units that a row of their own gives below them; null = that row holds something else. */

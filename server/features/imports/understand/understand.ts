@@ -68,7 +68,7 @@ export function understand(files: readonly GivenFile[], books: ShopBooks, settin
 const surveyOf = ({ sheet, shape, columns, heading }: TableGuess, books: ShopBooks): Survey =>
   shape === 'vehicle sheet'
     ? surveyVehicleSheet(sheet, Number(books.today.slice(0, 4)))
-    : survey(sheet, columns, heading);
+    : survey(sheet, columns, heading, Number(books.today.slice(0, 4)));
 
 const sheetFound = ({ sheet, shape, why }: TableGuess): SheetFound => ({
   number: sheet.number,

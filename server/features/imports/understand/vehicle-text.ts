@@ -1,5 +1,6 @@
 import { fold } from '../cells/fold.ts';
-import { fullYear } from '../cells/days.ts';
+import { fullYear, looksLikeDay } from '../cells/days.ts';
+import { looksLikeMoney } from '../cells/money.ts';
 import { isColor, makeOf } from '../words/vehicles.ts';
 
 /** A vehicle as someone typed it, taken apart. `key` = the model's letters and digits, by which spellings are compared. */
@@ -27,6 +28,12 @@ export function readVehicle(text: string, thisYear: number): VehicleText {
   const model = (left.length > 0 ? left : words).join(' ') || null;
   const key = modelKey(model ?? make ?? text);
   return { year, make, model: model !== null && model.length > LONGEST_MODEL ? null : model, key };
+}
+
+/** Does a cell read as a vehicle: a year beside a model? */
+export function looksLikeVehicle(cell: string, thisYear: number): boolean {
+  const { year, model } = readVehicle(cell, thisYear);
+  return year !== null && model !== null && /\p{L}{2}/u.test(model) && !looksLikeMoney(cell) && !looksLikeDay(cell);
 }
 
 /** What of a model's name is compared: letters and digits alone. */

@@ -3,23 +3,32 @@ import { fold } from '../cells/fold.ts';
 
 // Meaning | words, tried in this order.
 const DAMAGES: readonly (readonly [string, string])[] = [
-  ['flood', 'flood water flooded wasser hochwasser'],
-  ['fire', 'fire burn burnt burned brand feuer'],
-  ['hail', 'hail hagel'],
-  ['roof', 'roof roll rolled rollover dach uberschlag'],
-  ['theft/vandalism', 'theft vandal vandalism stolen recovery stripped diebstahl'],
-  ['mechanical', 'mechanical engine motor transmission blown trans electrical motorschaden getriebe'],
-  ['front', 'front nose front end frontal front hit vorne'],
-  ['rear', 'rear rear end ended back tail heck hinten'],
-  ['side', 'side sides side swipe sideswipe t bone tboned door left right seite'],
+  ['flood', 'flood water flooded wasser hochwasser wasserschaden inundado inundacion agua inonde inondation eau'],
+  ['fire', 'fire burn burnt burned brand feuer brandschaden incendio quemado incendie brule'],
+  ['hail', 'hail hagel hagelschaden granizo grele'],
+  ['roof', 'roof roll rolled rollover dach dachschaden uberschlag vuelco volcado techo toit tonneau'],
+  [
+    'theft/vandalism',
+    'theft vandal vandalism vandalized stolen recovery stripped diebstahl gestohlen robo robado vol vole',
+  ],
+  [
+    'mechanical',
+    'mechanical engine motor transmission blown trans electrical motorschaden getriebe getriebeschaden mecanico averia mecanique moteur panne',
+  ],
+  ['front', 'front nose frontal vorne frontschaden delantero delantera frente avant frontale'],
+  ['rear', 'rear rearend rearended back tail heck hinten heckschaden trasero trasera arriere'],
+  [
+    'side',
+    'side sides swipe sideswipe tbone tboned bone door left right seite seitenschaden lateral laterales lado cote laterale gauche droite',
+  ],
 ];
 const CLASSES: readonly (readonly [string, string])[] = [
   ['pickup', 'pickup truck pick up pritsche'],
-  ['SUV', 'suv crossover 4x4 gelandewagen'],
-  ['van', 'van minivan bus transporter'],
+  ['SUV', 'suv crossover 4x4 gelandewagen todoterreno'],
+  ['van', 'van minivan bus transporter furgoneta monospace fourgon utilitaire kastenwagen monovolumen'],
   ['sports', 'sports sport sportscar coupe roadster convertible sportwagen'],
-  ['small car', 'small compact subcompact hatchback kleinwagen'],
-  ['midsize car', 'midsize mid medium sedan mittelklasse'],
+  ['small car', 'small compact subcompact hatchback hatch kleinwagen utilitario citadine pequeno'],
+  ['midsize car', 'midsize mid medium sedan mittelklasse berlina berline kombi break'],
   ['large car', 'large full fullsize limousine'],
 ];
 
@@ -50,11 +59,15 @@ export const damageReader = (damages: readonly string[]) => reader(damages, DAMA
 /** Reads class words into the shop's own; null = none of them. */
 export const classReader = (classes: readonly string[]) => reader(classes, CLASSES);
 
-const YES = new Set(['y', 'yes', 'x', 'true', '1', 'ja', 'j', 'si', 'oui', 'o']);
+const YES = new Set(['y', 'yes', 'x', 'true', '1', 'ja', 'j', 'si', 's', 'oui', 'o', 'ok', 'sure', 'yep']);
 const NO = new Set(['n', 'no', 'false', '0', 'nein', 'non']);
-const SURPRISE = new Set(['surprise', 'unplanned', 'unforeseen', 'hidden', 'unexpected']);
+const SURPRISE = new Set(
+  'surprise unplanned unforeseen hidden unexpected ungeplant uberraschung sorpresa imprevisto imprevu surprise!'.split(
+    ' ',
+  ),
+);
 const EXTRA = new Set(['extra', 'chosen extra', 'upgrade', 'want', 'optional']);
-const PLANNED = new Set(['planned', 'foreseen', 'expected', 'estimated']);
+const PLANNED = new Set('planned foreseen expected estimated geplant vorgesehen previsto planeado prevu'.split(' '));
 
 /** Yes or no; null = neither. */
 export function yesOrNo(text: string): boolean | null {

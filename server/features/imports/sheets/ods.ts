@@ -1,12 +1,14 @@
-import { type Sheet, type SheetKeeper, sheetKeeper } from './sheet.ts';
-import { clockText } from './number-formats.ts';
+import { OdsCell, timesOf } from './ods-cell.ts';
+import { type KeptSheet, type Sheet, sheetKeeper } from './sheet.ts';
 import { readXml } from './xml.ts';
 import type { Attributes } from './xml-scanner.ts';
-import { damaged, locked, type Zip } from './zip.ts';
+import { damaged, locked } from './faulty.ts';
+import type { Zip } from './zip.ts';
 
 const MOST_COLUMNS = 1_000;
 // A sheet is filled to its end with one empty row, repeated; only rows that hold something count.
 const MOST_REPEATED = 10_000;
+const LINK = /'file:[^']*?([^'/]+)'#/;
 
 /** Reads every sheet of an .ods workbook: stored values only; no formula, link or macro is ever run. */
 export function readOds(zip: Zip): Sheet[] {
@@ -15,82 +17,92 @@ export function readOds(zip: Zip): Sheet[] {
       if (name === 'encryption-data') throw locked();
     },
   });
-  const sheets: Sheet[] = [];
-  if (!readXml(zip, 'content.xml', sheetReader(sheetKeeper(), sheets))) throw damaged();
-  return sheets;
+  const hearer = new OdsHearer();
+  if (!readXml(zip, 'content.xml', hearer)) throw damaged();
+  return hearer.sheets;
 }
 
-function sheetReader(keep: SheetKeeper, sheets: Sheet[]) {
+class OdsHearer {
+  readonly sheets: Sheet[] = [];
+  private readonly keep = sheetKeeper();
   // Styles stand before the sheets that they hide.
-  const hidden = new Set<string>();
-  let style = '';
-  let current: ReturnType<SheetKeeper> | null = null;
-  let line = 0;
-  let rowTimes = 1;
-  let cells: (string | undefined)[] = [];
-  let cell: { readonly value: string | null; readonly times: number; text: string; paragraphs: number } | null = null;
-  let besides = 0;
-  return {
-    open(name: string, attributes: Attributes) {
-      if (name === 'style') style = attributes.get('style:name') ?? '';
-      else if (name === 'table-properties' && attributes.get('table:display') === 'false') hidden.add(style);
-      else if (name === 'table') {
-        const isHidden = hidden.has(attributes.get('table:style-name') ?? '');
-        current = keep(sheets.length + 1, attributes.get('table:name') ?? '', isHidden);
-        sheets.push(current.sheet);
-        line = 0;
-      } else if (name === 'table-row') {
-        rowTimes = times(attributes.get('table:number-rows-repeated'));
-        cells = [];
-      } else if (name === 'table-cell' || name === 'covered-table-cell') {
-        const repeated = times(attributes.get('table:number-columns-repeated'));
-        cell = { value: storedValue(attributes), times: repeated, text: '', paragraphs: 0 };
-      } else if (name === 'annotation') besides++;
-      else if (name === 'p' && cell && besides === 0 && cell.paragraphs++ > 0) cell.text += '\n';
-      else if (name === 's' && cell && besides === 0)
-        cell.text += ' '.repeat(Math.min(100, times(attributes.get('text:c'))));
-    },
-    text(piece: string) {
-      if (cell && besides === 0 && cell.paragraphs > 0) cell.text += piece;
-    },
-    close(name: string) {
-      if (name === 'annotation') besides--;
-      else if (cell && (name === 'table-cell' || name === 'covered-table-cell')) {
-        const text = cell.value ?? cell.text;
-        if (text === '') cells.length += Math.min(cell.times, MOST_COLUMNS + 1);
-        else for (let i = 0; i < Math.min(cell.times, MOST_COLUMNS + 1); i++) cells.push(text);
-        if (cells.length > 2 * MOST_COLUMNS) cells.length = lastFilled(cells);
-        cell = null;
-      } else if (name === 'table-row') {
-        const isFilled = lastFilled(cells) > 0;
-        for (let i = 0; isFilled && i < Math.min(rowTimes, MOST_REPEATED); i++) current?.add(line + 1 + i, cells);
-        line += rowTimes;
-      }
-    },
-  };
+  private readonly hiding = new Set<string>();
+  private style = '';
+  private sheet: KeptSheet | null = null;
+  private column = 0;
+  private line = 0;
+  private rowTimes = 1;
+  private isHiddenRow = false;
+  private cells: (string | undefined)[] = [];
+  private cell: OdsCell | null = null;
+
+  open(name: string, attributes: Attributes): void {
+    if (name === 'table-cell' || name === 'covered-table-cell') this.cell = new OdsCell(attributes);
+    else if (this.cell) this.cell.open(name, attributes);
+    else if (name === 'table-row') {
+      this.rowTimes = timesOf(attributes.get('table:number-rows-repeated'));
+      this.isHiddenRow = isHidden(attributes);
+      this.cells = [];
+    } else if (name === 'table-column') this.openColumns(attributes);
+    else if (name === 'table') this.openSheet(attributes);
+    else if (name === 'style') this.style = attributes.get('style:name') ?? '';
+    else if (name === 'table-properties' && attributes.get('table:display') === 'false') this.hiding.add(this.style);
+  }
+
+  text(piece: string): void {
+    this.cell?.hear(piece);
+  }
+
+  close(name: string): void {
+    if (this.cell && (name === 'table-cell' || name === 'covered-table-cell')) this.closeCell(this.cell);
+    else if (this.cell) this.cell.close(name);
+    else if (name === 'table-row') this.closeRow();
+    else if (name === 'table') this.sheet?.finish();
+  }
+
+  private openSheet(attributes: Attributes): void {
+    const isHiddenSheet = this.hiding.has(attributes.get('table:style-name') ?? '');
+    this.sheet = this.keep(this.sheets.length + 1, attributes.get('table:name') ?? '', isHiddenSheet);
+    this.sheets.push(this.sheet.sheet);
+    this.line = 0;
+    this.column = 0;
+  }
+
+  private openColumns(attributes: Attributes): void {
+    const times = timesOf(attributes.get('table:number-columns-repeated'));
+    const last = Math.min(this.column + times, MOST_COLUMNS);
+    if (isHidden(attributes)) for (let col = this.column; col < last; col++) this.sheet?.beside.hiddenColumn(col + 1);
+    this.column += times;
+  }
+
+  private closeCell(cell: OdsCell): void {
+    const col = this.cells.length + 1;
+    const line = this.line + 1;
+    const text = cell.content;
+    const times = Math.min(cell.times, MOST_COLUMNS + 1);
+    if (text === '') this.cells.length += times;
+    else for (let i = 0; i < times; i++) this.cells.push(text);
+    if (this.cells.length > 2 * MOST_COLUMNS) this.cells.length = lastFilled(this.cells);
+    this.cell = null;
+    if (cell.comment !== '') this.sheet?.beside.comment(line, col, cell.comment);
+    if (cell.formula === undefined) return;
+    if (cell.isWithoutValue) this.sheet?.beside.formula(line, col, text.slice(1));
+    const linked = LINK.exec(cell.formula)?.[1];
+    if (linked !== undefined) this.sheet?.beside.link(line, col, linked);
+  }
+
+  private closeRow(): void {
+    const times = lastFilled(this.cells) > 0 ? Math.min(this.rowTimes, MOST_REPEATED) : 0;
+    for (let i = 0; i < times; i++) this.sheet?.add(this.line + 1 + i, this.cells, this.isHiddenRow);
+    this.line += this.rowTimes;
+  }
 }
+
+// `collapse` is hidden by hand, `filter` by a filter.
+const isHidden = (attributes: Attributes) => /collapse|filter/.test(attributes.get('table:visibility') ?? '');
 
 function lastFilled(cells: readonly (string | undefined)[]): number {
   let end = cells.length;
   while (end > 0 && !cells[end - 1]) end--;
   return end;
-}
-
-const times = (attribute: string | undefined) => Math.max(1, Math.min(1_048_576, Number(attribute ?? 1) || 1));
-
-/** The value that a cell stores beside what it shows; null = it stores none, and its text is the value. */
-function storedValue(attributes: Attributes): string | null {
-  const type = attributes.get('office:value-type');
-  if (type === 'date') return attributes.get('office:date-value')?.slice(0, 10) ?? null;
-  if (type === 'boolean') return attributes.get('office:boolean-value')?.toUpperCase() ?? null;
-  if (type === 'time') return timeText(attributes.get('office:time-value') ?? '');
-  if (type !== 'float' && type !== 'currency') return null;
-  const value = Number(attributes.get('office:value'));
-  return Number.isFinite(value) ? String(Number(value.toPrecision(14))) : null;
-}
-
-/** `PT03H30M00S` → `3:30`. */
-function timeText(text: string): string | null {
-  const parts = /^PT(\d+)H(\d+)M(\d+)/.exec(text);
-  return parts ? clockText((Number(parts[1]) * 60 + Number(parts[2])) / 1440) : null;
 }

@@ -4,6 +4,7 @@ import { findFormat, forEachRow, type TextFormat } from '../text/rows.ts';
 import { readOds } from './ods.ts';
 import type { Sheet } from './sheet.ts';
 import { readXlsx } from './xlsx.ts';
+import { bookPart } from './xlsx-relations.ts';
 import { openZip } from './zip.ts';
 
 /** A file as sheets of rows, whatever it was written as. */
@@ -24,7 +25,8 @@ export function openFile(source: ByteSource): OpenFile {
     throw new FileRefusal('too-large', 'A workbook may have 50 MB at most. Save the sheet as CSV and bring that in.');
   }
   const zip = openZip(allBytes(source));
-  if (zip.has('xl/workbook.xml')) return { encoding: '.xlsx', delimiter: '', sheets: readXlsx(zip) };
+  const book = bookPart(zip);
+  if (book !== null) return { encoding: '.xlsx', delimiter: '', sheets: readXlsx(zip, book) };
   if (zip.has('content.xml')) return { encoding: '.ods', delimiter: '', sheets: readOds(zip) };
   throw new FileRefusal('not-text', otherZip(zip.names));
 }

@@ -1,6 +1,7 @@
 import type { Hint } from '#shared/contracts/import-beside.ts';
 import { FileRefusal } from '../refusal.ts';
 import type { OnRow } from '../text/rows.ts';
+import { hintKeeper } from './hints.ts';
 
 /** One sheet of a file; a text file has one. Its rows can be gone through as often as needed. */
 export interface Sheet {
@@ -33,7 +34,7 @@ const MOST_CELLS = 1000;
 const MOST_ROWS = 1_048_576;
 const LONGEST_CELL = 1024 * 1024;
 // What all cells together may hold: workbooks are kept in memory while they are read.
-const MOST_TEXT = 256 * 1024 * 1024;
+const MOST_TEXT = 96 * 1024 * 1024;
 const LONGEST_GAP = 50;
 
 /** Keeps the rows of a workbook's sheets: each as one text, which is a fifth of what arrays of cells would take. */
@@ -42,8 +43,10 @@ export function sheetKeeper() {
   return (number: number, name: string, isHidden: boolean) => {
     const lines: number[] = [];
     const texts: string[] = [];
+    const beside = hintKeeper();
+    let widest = 0;
     /** Adds a row; rows come in order. `cells` may have holes. */
-    function add(line: number, cells: readonly (string | undefined)[]): void {
+    function add(line: number, cells: readonly (string | undefined)[], isHiddenRow = false): void {
       let end = cells.length;
       while (end > 0 && !cells[end - 1]) end--;
       if (end === 0) return;
@@ -65,6 +68,8 @@ export function sheetKeeper() {
         );
       if (size > MOST_TEXT)
         throw new FileRefusal('too-large', 'This workbook holds more text than can be read at once.');
+      beside.row(line, isHiddenRow);
+      if (end > widest) widest = end;
       lines.push(line);
       texts.push(text);
     }
@@ -72,7 +77,7 @@ export function sheetKeeper() {
       number,
       name,
       isHidden,
-      hints: [],
+      hints: beside.hints,
       forEachRow(onRow, onPart) {
         let before = 0;
         for (let i = 0; i < lines.length; i++) {
@@ -84,7 +89,9 @@ export function sheetKeeper() {
         }
       },
     };
-    return { add, sheet };
+    return { add, beside, sheet, finish: () => beside.finish(widest) };
   };
 }
 export type SheetKeeper = ReturnType<typeof sheetKeeper>;
+/** One sheet while it is read. */
+export type KeptSheet = ReturnType<SheetKeeper>;

@@ -13,11 +13,11 @@ export interface XmlHearer {
 
 /** What is wrong with a document; whoever scans says it in words for people. */
 export class XmlFault extends Error {
-  readonly isDoctype: boolean;
+  readonly kind: 'malformed' | 'document type' | 'too long';
 
-  constructor(isDoctype = false) {
-    super('The XML is malformed');
-    this.isDoctype = isDoctype;
+  constructor(kind: XmlFault['kind'] = 'malformed') {
+    super(`XML: ${kind}`);
+    this.kind = kind;
   }
 }
 
@@ -59,7 +59,7 @@ export class XmlScanner {
       at = end;
     }
     this.source = source.slice(at);
-    if (this.source.length > LONGEST) throw new XmlFault();
+    if (this.source.length > LONGEST) throw new XmlFault('too long');
   }
 
   /** Says that nothing follows. */
@@ -116,7 +116,7 @@ export class XmlScanner {
       return end;
     }
     if (source.length - from < 9) return -1;
-    throw new XmlFault(true);
+    throw new XmlFault('document type');
   }
 
   private after(mark: string, from: number): number {

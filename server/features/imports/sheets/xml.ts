@@ -1,7 +1,8 @@
 import { isAscii } from 'node:buffer';
 import { FileRefusal } from '../refusal.ts';
 import { XmlFault, type XmlHearer, XmlScanner } from './xml-scanner.ts';
-import { damaged, type Zip } from './zip.ts';
+import { damaged, tooLarge } from './faulty.ts';
+import type { Zip } from './zip.ts';
 
 // What XML forbids, control characters above all; one of them stands between the cells that are kept of a workbook.
 const FORBIDDEN = /[^\t\n\r -\ufffd]/;
@@ -24,6 +25,9 @@ export function readXml(zip: Zip, part: string, hearer: XmlHearer): boolean {
     return true;
   });
 }
+
+/** Is an attribute of yes or no set? */
+export const isYes = (value: string | undefined) => value === '1' || value === 'true';
 
 /** Decodes pieces, with every line end as `\n`; called without one, gives what is left. */
 function decoderFor(first: Uint8Array): (piece?: Uint8Array) => string {
@@ -60,12 +64,13 @@ function orRefuse(read: () => boolean): boolean {
     return read();
   } catch (error) {
     if (error instanceof FileRefusal) throw error;
-    if (error instanceof XmlFault && error.isDoctype) {
+    if (error instanceof XmlFault && error.kind === 'document type') {
       throw new FileRefusal(
         'damaged',
         'This workbook carries a document type definition; no spreadsheet program writes one.',
       );
     }
+    if (error instanceof XmlFault && error.kind === 'too long') throw tooLarge();
     const isBroken = error instanceof XmlFault || (error instanceof TypeError && 'code' in error);
     throw isBroken ? damaged() : error;
   }

@@ -29,9 +29,13 @@ const STATEMENTS = [
     kind TEXT NOT NULL, rebuild_id TEXT NOT NULL, category_id TEXT, dated_on TEXT, cents INTEGER NOT NULL,
     seconds INTEGER NOT NULL,
     -- The later import that took another figure in its place.
-    replaced_by TEXT, PRIMARY KEY (shop_id, import_id, sheet, row, col, kind),
-    FOREIGN KEY (shop_id, rebuild_id) REFERENCES rebuilds (shop_id, id), ${OF_IMPORT}) STRICT, WITHOUT ROWID`,
+    replaced_by TEXT, FOREIGN KEY (shop_id, rebuild_id) REFERENCES rebuilds (shop_id, id), ${OF_IMPORT}) STRICT`,
+  `CREATE INDEX import_facts_by_row ON import_facts (shop_id, import_id, sheet, row)`,
   `CREATE INDEX import_facts_by_rebuild ON import_facts (shop_id, rebuild_id)`,
+  // Versions that an undo gave back: what a person changed is told from what an import changed and took back.
+  ...['rebuilds', 'entries', 'hours'].map(
+    (table) => `ALTER TABLE ${table} ADD COLUMN undone_versions INTEGER NOT NULL DEFAULT 0`,
+  ),
   `CREATE INDEX entries_by_import ON entries (import_id, import_sheet, import_row) WHERE import_id IS NOT NULL`,
   `CREATE INDEX hours_by_import ON hours (import_id, import_sheet, import_row) WHERE import_id IS NOT NULL`,
 ];

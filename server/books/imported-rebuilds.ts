@@ -1,6 +1,7 @@
 import type { RawDatabase } from '../platform/database.ts';
 import { newId } from '../platform/ids.ts';
 import type { Importing, Source } from './imported.ts';
+import type { Replaced } from './replaced.ts';
 
 export interface ImportedBaseline {
   readonly rebuildId: string;
@@ -9,6 +10,14 @@ export interface ImportedBaseline {
   readonly expectedSaleCents: number | null;
   /** Category id → cents. */
   readonly lines: ReadonlyMap<string, number>;
+}
+
+type Columns = ReadonlyMap<string, string | number>;
+
+export interface FilledRebuild {
+  readonly filled: Readonly<Record<string, string | number>>;
+  /** Column → what it held before, and what it holds now. */
+  readonly replaced: Replaced['facts'][string];
 }
 
 /** Writes the rebuilds that an import brings or fills, and their locked plans, in the caller's transaction. */
@@ -44,21 +53,28 @@ export function importedRebuilds(raw: RawDatabase, { shopId, importId, at }: Imp
         .prepare(`INSERT INTO rebuilds (${names.join(', ')}) VALUES (${names.map(() => '?').join(', ')})`)
         .run(id, shopId, importId, source.sheet, source.row, at, ...known.map(([, value]) => value));
     },
-    /** Fills what the books did not know of a rebuild. Gives the columns filled, with their values. */
-    fill(id: string, columns: ReadonlyMap<string, string | number>): Record<string, string | number> {
+    /** Fills what the books did not know of a rebuild, and writes over what it shall. Gives the columns by both. */
+    fill(id: string, columns: Columns, over: ReadonlySet<string>): FilledRebuild {
       const before = raw.prepare('SELECT * FROM rebuilds WHERE shop_id = ? AND id = ?').get(shopId, id) as Record<
         string,
-        unknown
+        string | number | null
       >;
       const filled = Object.fromEntries([...columns].filter(([name]) => before[name] === null));
-      const names = Object.keys(filled);
-      if (names.length === 0) return {};
+      const replaced = Object.fromEntries(
+        [...columns]
+          .filter(([name, value]) => over.has(name) && before[name] !== null && before[name] !== value)
+          .map(([name, value]) => [name, [before[name] ?? null, value] as const]),
+      );
+      const written = new Map(
+        [...columns].filter(([name]) => Object.hasOwn(filled, name) || Object.hasOwn(replaced, name)),
+      );
+      if (written.size === 0) return { filled, replaced };
       raw
         .prepare(
-          `UPDATE rebuilds SET ${names.map((name) => `${name} = ?`).join(', ')}, version = version + 1 WHERE shop_id = ? AND id = ?`,
+          `UPDATE rebuilds SET ${[...written.keys()].map((name) => `${name} = ?`).join(', ')}, version = version + 1 WHERE shop_id = ? AND id = ?`,
         )
-        .run(...Object.values(filled), shopId, id);
-      return filled;
+        .run(...written.values(), shopId, id);
+      return { filled, replaced };
     },
   };
 }

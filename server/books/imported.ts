@@ -31,6 +31,25 @@ export interface ImportedHours extends Source {
   readonly isGuess: boolean;
 }
 
+/** A figure of a rebuild that stands in no entry: its purchase, its sale, a line of its plan. */
+export interface ImportedFact extends Source {
+  readonly kind: string;
+  readonly rebuildId: string;
+  readonly categoryId: string | null;
+  readonly on: string | null;
+  readonly cents: number;
+  readonly seconds: number;
+}
+
+export interface ImportedSheet {
+  readonly sheet: number;
+  readonly name: string | null;
+  readonly shape: string;
+  readonly headings: readonly string[] | null;
+  readonly headingPrint: string | null;
+  readonly prints: Buffer;
+}
+
 export interface Importing {
   readonly shopId: string;
   readonly importId: string;
@@ -47,6 +66,8 @@ const HOURS =
   'id shop_id rebuild_id worker_id worked_on seconds is_paid task is_guess import_id import_sheet import_row import_col created_at created_by'.split(
     ' ',
   );
+const FACT = 'shop_id import_id sheet row col kind rebuild_id category_id dated_on cents seconds'.split(' ');
+const SHEET = 'shop_id import_id sheet name shape headings heading_print prints'.split(' ');
 const RAW_ROW = ['shop_id', 'import_id', 'sheet', 'row', 'cells', 'outcome', 'reason'];
 
 /**
@@ -57,6 +78,8 @@ export function importedBooks(raw: RawDatabase, { shopId, importId, userId, at }
   const entries = bulkInsert(raw, 'entries', ENTRY);
   const hours = bulkInsert(raw, 'hours', HOURS);
   const rows = bulkInsert(raw, 'import_rows', RAW_ROW);
+  const facts = bulkInsert(raw, 'import_facts', FACT);
+  const sheets = bulkInsert(raw, 'import_sheets', SHEET);
   const nextId = idSupply();
   const worker = raw.prepare('INSERT INTO workers (id, shop_id, name, is_paid) VALUES (?, ?, ?, 0)');
 
@@ -105,6 +128,14 @@ export function importedBooks(raw: RawDatabase, { shopId, importId, userId, at }
     row(at: Omit<Source, 'col'>, cells: readonly string[], outcome: string, reason: string | null): void {
       rows.add(shopId, importId, at.sheet, at.row, JSON.stringify(cells), outcome, reason);
     },
+    fact(f: ImportedFact): void {
+      const { sheet, row, col, kind, rebuildId, categoryId, on, cents, seconds } = f;
+      facts.add(shopId, importId, sheet, row, col, kind, rebuildId, categoryId, on, cents, seconds);
+    },
+    /** What a later, longer file is held against. */
+    sheet({ sheet, name, shape, headings, headingPrint, prints }: ImportedSheet): void {
+      sheets.add(shopId, importId, sheet, name, shape, headings && JSON.stringify(headings), headingPrint, prints);
+    },
     /** A person named in a log of hours; unpaid until someone says otherwise. Gives the id. */
     worker(name: string): string {
       const id = nextId();
@@ -116,6 +147,8 @@ export function importedBooks(raw: RawDatabase, { shopId, importId, userId, at }
       entries.flush();
       hours.flush();
       rows.flush();
+      facts.flush();
+      sheets.flush();
     },
   };
 }

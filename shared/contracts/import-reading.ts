@@ -197,6 +197,8 @@ export const firstRowSchema = z.object({
 });
 export type FirstRow = z.infer<typeof firstRowSchema>;
 
+export type Earlier = z.infer<typeof earlierSchema>;
+
 /** One sheet of a workbook, and what its rows are taken for. */
 export const sheetFoundSchema = z.object({
   number: z.int(),

@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto';
 import type { Import } from '#shared/contracts/imports.ts';
-import type { Member } from '../support/api.ts';
+import type { Member, TestApi } from '../support/api.ts';
 
 /** Uploads a file as the page does. */
 export const upload = (
@@ -63,3 +63,35 @@ export async function booked(member: Member, { id }: Pick<Import, 'id'>): Promis
 
 /** A list of expenses with these rows under the usual headings. */
 export const expenseList = (...rows: string[]) => ['Date,Car,What for,Details,Paid', ...rows].join('\n');
+
+const BOOKS = [
+  'rebuilds',
+  'entries',
+  'hours',
+  'estimates',
+  'estimate_lines',
+  'workers',
+  'rollup_categories',
+  'rollup_months',
+  'rollup_rebuilds',
+  'rollup_overhead',
+  'import_facts',
+  'import_sheets',
+];
+
+const VERSIONS = new Set(['version', 'undone_versions', 'refreshed_version']);
+
+/** Every row of the books in one order, but for the versions that editing raises. */
+export async function everything(api: TestApi) {
+  const tables = await Promise.all(
+    BOOKS.map(async (table) => [table, await api.services.database.reader(table)] as const),
+  );
+  return tables.map(([table, rows]) => [
+    table,
+    rows
+      .map((row: Record<string, unknown>) =>
+        Object.fromEntries(Object.entries(row).filter(([column]) => !VERSIONS.has(column))),
+      )
+      .toSorted((a: object, b: object) => JSON.stringify(a).localeCompare(JSON.stringify(b))),
+  ]);
+}

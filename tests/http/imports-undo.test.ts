@@ -1,31 +1,7 @@
 import { describe, expect, it } from 'vitest';
 import { sampleBytes } from '../imports/support.ts';
-import { type TestApi, testApi } from '../support/api.ts';
-import { broughtIn, expenseList } from './imports-support.ts';
-
-const BOOKS = [
-  'rebuilds',
-  'entries',
-  'hours',
-  'estimates',
-  'estimate_lines',
-  'workers',
-  'rollup_categories',
-  'rollup_months',
-  'rollup_rebuilds',
-  'rollup_overhead',
-];
-
-/** Every row of the books, but for the versions that editing raises. */
-async function everything(api: TestApi) {
-  const tables = await Promise.all(
-    BOOKS.map(async (table) => [table, await api.services.database.reader(table)] as const),
-  );
-  return tables.map(([table, rows]) => [
-    table,
-    rows.map(({ version: _, refreshed_version: _again, ...row }: Record<string, unknown>) => row),
-  ]);
-}
+import { testApi } from '../support/api.ts';
+import { broughtIn, everything, expenseList } from './imports-support.ts';
 
 describe('undo', () => {
   it.each(['p01_rebuild_summary_us.csv', 'p02_expense_ledger_us.csv', 'p07_receipts_messy.csv'])(

@@ -19,6 +19,7 @@ export function emptyBooks(changes: Partial<ShopBooks> = {}): ShopBooks {
     classes: [...DEFAULT_CLASSES],
     damages: [...DEFAULT_DAMAGES],
     rebuilds: [],
+    past: [],
     ...changes,
   };
 }

@@ -1,4 +1,5 @@
 import type { Day } from '#shared/day.ts';
+import type { PastSheet } from './earlier/past.ts';
 
 /** A rebuild that the shop already has, as far as an import must know it. */
 export interface ExistingRebuild {
@@ -23,4 +24,6 @@ export interface ShopBooks {
   readonly classes: readonly string[];
   readonly damages: readonly string[];
   readonly rebuilds: readonly ExistingRebuild[];
+  /** The sheets whose rows stand in the books, oldest import first. */
+  readonly past: readonly PastSheet[];
 }

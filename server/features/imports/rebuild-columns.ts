@@ -1,4 +1,5 @@
 import type { RebuildFound } from '#shared/contracts/import-reading.ts';
+import { type Draft, newDraft } from './read/draft.ts';
 
 type Words = ReadonlyMap<string, string>;
 
@@ -39,4 +40,12 @@ export function rebuildColumns(found: RebuildFound, classes: Words, damages: Wor
     );
   }
   return columns;
+}
+
+/** The columns of the facts that shall take the place of what the books hold. */
+export function overwrittenColumns({ found, overwrites }: Draft, classes: Words, damages: Words): Set<string> {
+  if (overwrites.size === 0) return new Set();
+  const chosen = <T extends object>(facts: T) => Object.entries(facts).filter(([field]) => overwrites.has(field));
+  const only = { ...newDraft('', null, 0).found, ...Object.fromEntries(chosen(found)) };
+  return new Set(rebuildColumns({ ...only, dates: Object.fromEntries(chosen(found.dates)) }, classes, damages).keys());
 }

@@ -1,6 +1,7 @@
 import type { Day } from '#shared/day.ts';
 import { dayInZone } from '#shared/day.ts';
 import type { RawDatabase } from '../../platform/database.ts';
+import { pastSheets } from './earlier/past-sheets.ts';
 import type { ExistingRebuild, ShopBooks } from './books.ts';
 
 interface ShopRow {
@@ -38,6 +39,7 @@ export function shopBooks(raw: RawDatabase, shopId: string, now: Date): ShopBook
     categories: names('categories'),
     classes: names('vehicle_classes'),
     damages: names('damage_types'),
+    past: pastSheets(raw, shopId),
     rebuilds: rebuilds.map(({ has_purchase, has_left, has_baseline, has_entries, ...rebuild }) => ({
       ...rebuild,
       hasPurchase: has_purchase === 1,

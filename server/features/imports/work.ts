@@ -101,7 +101,7 @@ function undoJob(raw: RawDatabase, job: UndoTask): Done {
     // Someone else took it out while this one waited its turn.
     if (kept === undefined) return { kind: 'undone', obstacle: null };
     const brought = JSON.parse(kept) as Brought;
-    const obstacle = undoObstacle(raw, job.shopId, job.importId, brought.filled);
+    const obstacle = undoObstacle(raw, job.shopId, job.importId, brought);
     if (obstacle !== null) return { kind: 'undone', obstacle };
     removeImported(raw, job.shopId, job.importId, brought);
     raiseBooksVersion(raw, job.shopId);

@@ -5,6 +5,8 @@ import type { ExistingRebuild } from '../books.ts';
 export interface Draft {
   readonly found: RebuildFound;
   readonly existing: ExistingRebuild | null;
+  /** Facts that take the place of those that the books hold; all others only fill what they do not know. */
+  readonly overwrites: Set<string>;
   place: number;
 }
 
@@ -18,6 +20,7 @@ export function newDraft(
   return {
     place: -1,
     existing,
+    overwrites: new Set(),
     found: {
       tag: existing?.tag ?? tag,
       existingId: existing?.id ?? null,

@@ -31,19 +31,20 @@ export function hoursRowReader(plan: Plan, sums: ColumnSums): RowReader {
     const target = plan.vehicles.get(name);
     const on = days.next(dateCell);
     const [who, what] = [textAt(cells, person), textAt(cells, task)];
-    const fault = plan.repeats.has(line)
-      ? (['duplicate', hours + 1] as const)
-      : name === '' || target === 'overhead'
-        ? (['missing-vehicle', nameCol] as const)
-        : typeof target !== 'object'
-          ? (['ambiguous-vehicle', nameCol] as const)
-          : on === 'bad'
-            ? (['bad-date', date + 1] as const)
-            : typeof seconds !== 'number'
-              ? (['bad-hours', hours + 1] as const)
-              : Math.max(who?.length ?? 0, what?.length ?? 0) > LONGEST
-                ? (['cell-too-long', task + 1] as const)
-                : null;
+    const fault =
+      plan.repeats.has(line) && !plan.earlier.has(line)
+        ? (['duplicate', hours + 1] as const)
+        : name === '' || target === 'overhead'
+          ? (['missing-vehicle', nameCol] as const)
+          : typeof target !== 'object'
+            ? (['ambiguous-vehicle', nameCol] as const)
+            : on === 'bad'
+              ? (['bad-date', date + 1] as const)
+              : typeof seconds !== 'number'
+                ? (['bad-hours', hours + 1] as const)
+                : Math.max(who?.length ?? 0, what?.length ?? 0) > LONGEST
+                  ? (['cell-too-long', task + 1] as const)
+                  : null;
     if (typeof seconds === 'number') sums.add(hours + 1, seconds, fault === null);
     if (fault || typeof target !== 'object' || typeof seconds !== 'number') {
       const [reason, col] = fault ?? (['bad-hours', hours + 1] as const);

@@ -1,9 +1,12 @@
-import type { Choice, Column, Line, StatedTotal } from '#shared/contracts/import-reading.ts';
+import type { Choice, Column, Earlier, Line, StatedTotal } from '#shared/contracts/import-reading.ts';
 import type { AsideReason, NotData, Outcome, Shape } from '#shared/contracts/import-words.ts';
 import type { Day } from '#shared/day.ts';
 import type { ShopBooks } from '../books.ts';
 import type { DateOrder } from '../cells/days.ts';
 import type { DecimalMark, Money } from '../cells/money.ts';
+import type { PastCell } from '../earlier/past.ts';
+import type { EarlierRows } from '../earlier/settle-earlier.ts';
+import type { SurveyedRows } from '../understand/survey.ts';
 import type { VehicleTarget } from '../understand/vehicle-drafts.ts';
 import type { CategoryMeaning } from '../words/categories.ts';
 import type { Sheet } from '../sheets/sheet.ts';
@@ -15,6 +18,8 @@ export interface FilePlan {
   /** What most of the file holds. */
   readonly shape: Shape;
   readonly choices: readonly Choice[];
+  /** The imports that these files carry on. */
+  readonly earlier: readonly Earlier[];
   /** One for every sheet that holds anything, in the file's order. */
   readonly tables: readonly Plan[];
 }
@@ -49,6 +54,10 @@ export interface Plan {
   readonly categories: ReadonlyMap<string, CategoryMeaning>;
   /** Lines that repeat a block pasted twice, to be put aside. */
   readonly repeats: ReadonlySet<number>;
+  /** What the rows hold that sheets are known by later; see `SurveyedRows`. */
+  readonly rows: SurveyedRows;
+  /** Rows that came in with an earlier import, by line. */
+  readonly earlier: EarlierRows;
   /** A cell that names another currency than the shop's. */
   readonly isForeign: (text: string) => boolean;
 }
@@ -87,6 +96,8 @@ export interface RowRead {
   readonly cells: readonly CellAside[];
   /** The rebuild that the whole row stands for, in a sheet with one vehicle per row. */
   readonly draft?: Draft;
+  /** What is booked of an earlier import, and makes way for this row. */
+  readonly replaces?: readonly PastCell[];
 }
 
 export const notData = (reason: NotData): RowRead => ({

@@ -88,7 +88,7 @@ function previewOf(understood: Understanding, plan: FilePlan, onPart?: (share: n
             `${ragged} rows have more cells than there are headings; what stands beyond the headings is kept with the rows and not booked.`,
           ],
     hints: [...hints],
-    earlier: [],
+    earlier: [...plan.earlier],
     rememberedFrom: null,
   };
 }

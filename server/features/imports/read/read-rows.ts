@@ -1,5 +1,6 @@
 import type { Control, RebuildFound, StatedTotal } from '#shared/contracts/import-reading.ts';
 import type { NotData } from '#shared/contracts/import-words.ts';
+import { asBefore } from '../earlier/as-before.ts';
 import { PURCHASE } from '../words/categories.ts';
 import { emptyControl } from './empty-control.ts';
 import type { Draft } from './draft.ts';
@@ -31,7 +32,8 @@ export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) =>
     const { read, stated: totals } = tableReader(table, carried);
     table.sheet.forEachRow(
       (cells, line, isMalformed) => {
-        const result = read(cells, line, isMalformed);
+        const all = read(cells, line, isMalformed);
+        const result = table.shape === 'vehicles' ? all : asBefore(table.earlier.get(line), all);
         const at = { sheet: number, row: line };
         if (result.draft) place(result.draft, at, drafts);
         for (const made of result.lines) book(made, at, drafts, tally.control);

@@ -1,5 +1,6 @@
 import type { Column } from '#shared/contracts/import-reading.ts';
 import type { ExistingRebuild } from '../books.ts';
+import type { EarlierRow } from '../earlier/settle-earlier.ts';
 import { fold } from '../cells/fold.ts';
 import { SUM_OF_COSTS } from '../understand/derived.ts';
 import { existingFinder } from '../understand/existing-finder.ts';
@@ -10,12 +11,15 @@ import { type DraftLine, notData, type Plan, putAside, type RowReader, taken } f
 import { totalLabel } from './row-kinds.ts';
 import type { ColumnSums } from './sums.ts';
 import { type Figure, type VehicleCells, vehicleCellReader } from './vehicle-cells.ts';
+import { freshCells } from './vehicle-row-before.ts';
 
 /** Reads rows of a sheet with one vehicle each: its facts, its costs by column, its plan, its sale. */
 export function vehicleRowReader(plan: Plan, sums: ColumnSums, carried: CarriedFigures): RowReader {
   const read = vehicleCellReader(plan);
   const nameOf = vehicleName(plan.columns);
   const findExisting = existingOf(plan);
+  const rebuilds = new Map(plan.books.rebuilds.map((rebuild) => [rebuild.id, rebuild]));
+  const bookedAs = (earlier: EarlierRow | undefined) => rebuilds.get(earlier?.rebuildId ?? '') ?? null;
   const tagFor = tagMaker(plan.books.rebuilds.map((rebuild) => rebuild.tag));
   const seen = new Set<string>();
   const named = namer(plan);
@@ -37,12 +41,14 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums, carried: CarriedF
     const row = read(cells);
     if (name === '' && row.figures.length === 0) return notData('note');
     const known = plan.rowDrafts.get(line);
-    const existing = known ? known.existing : name === '' ? null : findExisting(name, row);
+    const earlier = plan.earlier.get(line);
+    const existing = known ? known.existing : (bookedAs(earlier) ?? (name === '' ? null : findExisting(name, row)));
+    const before = earlier && existing ? { earlier, existing } : null;
     const key = hasStock ? fold(name) : null;
     const reason =
       name === ''
         ? 'missing-vehicle'
-        : plan.repeats.has(line) || (key !== null && seen.has(key)) || isBooked(existing)
+        : !before && (plan.repeats.has(line) || (key !== null && seen.has(key)) || isBooked(existing))
           ? 'duplicate'
           : null;
     if (reason) {
@@ -50,15 +56,21 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums, carried: CarriedF
       return putAside(reason, placeOf(plan.columns, 'stock number') + 1 || null, costOf(row));
     }
     if (key !== null) seen.add(key);
-    const sold = settleSale(known ? withoutCarried(row, known, carried) : row, plan.columns);
+    const own = known ? withoutCarried(row, known, carried) : row;
     addAll(row, true);
+    checkRepeated(plan, sums, cells, line);
+    const fresh = before && freshCells(plan, read, cells, before);
+    if (fresh?.isEmpty) return notData('already in');
+    const hasPrice = row.figures.some(({ column }) => column.meaning === 'sale') || (before?.existing.hasLeft ?? false);
+    const sold = settleSale(fresh?.row ?? own, plan.columns, hasPrice);
     const draft = known ?? newDraft(existing ? existing.tag : tagFor(name), existing, line);
+    for (const field of fresh?.overwrites ?? []) draft.overwrites.add(field);
     Object.assign(draft.found, named(vehicleAt(cells) || name, sold.known), sold.known, {
       spellings: [...draft.found.spellings, name],
     });
     Object.assign(draft.found.dates, sold.dates);
-    checkRepeated(plan, sums, cells, line);
-    return { ...taken(sold.figures.map((figure) => lineOf(figure, draft, row, line))), cells: sold.asides, draft };
+    const lines = sold.figures.map((figure) => lineOf(figure, draft, row, line));
+    return { ...taken(lines), cells: sold.asides, draft, ...(fresh ? { replaces: fresh.replaces } : {}) };
   };
 }
 
@@ -139,9 +151,9 @@ function existingOf(plan: Plan): (name: string, row: VehicleCells) => ExistingRe
 }
 
 /** A sale date without a price cannot stand in the books: the date is put aside, and the rebuild stays unsold. */
-function settleSale(row: VehicleCells, columns: readonly Column[]): VehicleCells {
+function settleSale(row: VehicleCells, columns: readonly Column[], hasPrice: boolean): VehicleCells {
   const soldOn = row.dates.soldOn;
-  if (soldOn === undefined || row.figures.some(({ column }) => column.meaning === 'sale')) return row;
+  if (soldOn === undefined || hasPrice) return row;
   const { soldOn: _, ...dates } = row.dates;
   const col = columns.find((column) => column.meaning === 'soldOn')?.col ?? 1;
   return { ...row, dates, asides: [...row.asides, { col, reason: 'missing-amount', text: soldOn, cents: null }] };

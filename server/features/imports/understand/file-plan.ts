@@ -4,6 +4,8 @@ import type { ShopBooks } from '../books.ts';
 import { type DateOrder, dayReader } from '../cells/days.ts';
 import { remembered } from '../cells/fold.ts';
 import { aboutCents, currenciesIn, type DecimalMark, moneyReader } from '../cells/money.ts';
+import { matchEarlier, spelledBefore } from '../earlier/match-rows.ts';
+import { earlierRows, settleEarlier } from '../earlier/settle-earlier.ts';
 import type { FilePlan, Plan } from '../read/plan.ts';
 import { categoryWords } from './category-words.ts';
 import { copiedSheets } from './copied-sheets.ts';
@@ -35,8 +37,10 @@ export function makeFilePlan(tables: readonly SurveyedTable[], shape: Shape, { b
   const decimal: DecimalMark = votes === 0 ? usualDecimal(books.locale) : votes > 0 ? '.' : ',';
   const order = commonOrder(tables.flatMap(({ found }) => [...found.dates.values()]));
   const isMixed = tables.filter(({ guess }) => guess.shape !== null).length > 1;
-  const known = isMixed ? knownVehicles(tables, books) : [];
-  const vehicles = vehicleDrafts(mentioned(tables), books, answers, known);
+  const matched = matchEarlier(tables, books.past);
+  const spelled = spelledBefore(matched, books.rebuilds);
+  const known = isMixed ? knownVehicles(tables, books, matched) : [];
+  const vehicles = vehicleDrafts(mentioned(tables), books, answers, { known, spelled });
   const copied = copiedSheets(tables, answers);
   const choices: Choice[] = [...tables.flatMap(({ guess }) => guess.choices), ...copied.choices];
   const plans = tables.map(({ guess, found }): Plan => {
@@ -59,6 +63,8 @@ export function makeFilePlan(tables: readonly SurveyedTable[], shape: Shape, { b
       repeated: [],
       categories: settled.categories,
       repeats: new Set([...settled.repeats, ...(copied.lines.get(guess.sheet.number) ?? [])]),
+      rows: found.rows,
+      earlier: earlierRows(matched, guess.sheet.number, answers),
       isForeign: (text) => {
         const named = currenciesIn(text);
         return named !== null && !named.includes(books.currency);
@@ -67,8 +73,9 @@ export function makeFilePlan(tables: readonly SurveyedTable[], shape: Shape, { b
   });
   choices.push(...vehicles.choices);
   const overview = isMixed ? markRepeated(plans, answers) : { plans, choices: [] };
-  choices.push(...overview.choices);
-  return { decimal, shape, choices: distinct(choices), tables: overview.plans };
+  const before = settleEarlier(overview.plans, matched, answers);
+  choices.push(...overview.choices, ...before.choices);
+  return { decimal, shape, choices: distinct(choices), earlier: before.earlier, tables: before.plans };
 }
 
 /** The same word may be asked about on several sheets. */

@@ -1,4 +1,5 @@
 import type { ShopBooks } from '../books.ts';
+import type { Matched } from '../earlier/match-rows.ts';
 import { fold } from '../cells/fold.ts';
 import { type Draft, newDraft, tagMaker } from '../read/draft.ts';
 import { isBlank, isHeadingAgain, totalLabel } from '../read/row-kinds.ts';
@@ -19,7 +20,7 @@ export interface KnownVehicle {
 }
 
 /** The vehicles of the sheets with one vehicle per row, made before any row is read so that lists can refer to them. */
-export function knownVehicles(tables: readonly SurveyedTable[], books: ShopBooks): KnownVehicle[] {
+export function knownVehicles(tables: readonly SurveyedTable[], books: ShopBooks, { twins }: Matched): KnownVehicle[] {
   const tagFor = tagMaker(books.rebuilds.map((rebuild) => rebuild.tag));
   const finder = existingFinder(books.rebuilds);
   const thisYear = Number(books.today.slice(0, 4));
@@ -43,7 +44,8 @@ export function knownVehicles(tables: readonly SurveyedTable[], books: ShopBooks
         known.push({ ...earlier, sheet: sheet.number, row });
         return;
       }
-      const existing = finder.byTag(name);
+      const rebuildId = twins.get(sheet.number)?.get(row)?.rebuildId;
+      const existing = books.rebuilds.find(({ id }) => id === rebuildId) ?? finder.byTag(name);
       const facts = text === '' ? {} : { year, make, model: year === null && make === null ? null : model };
       const draft = newDraft(existing ? existing.tag : tagFor(name), existing, row, { ...facts, sheet: sheet.number });
       known.push({ sheet: sheet.number, row, draft, name, spelling: text || null });

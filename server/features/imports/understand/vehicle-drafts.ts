@@ -15,13 +15,14 @@ export function vehicleDrafts(
   counts: ReadonlyMap<string, number>,
   books: ShopBooks,
   answers: ReadonlyMap<string, string>,
-  known: readonly KnownVehicle[],
+  { known, spelled }: { known: readonly KnownVehicle[]; spelled: ReadonlyMap<string, ExistingRebuild> },
 ): { of: Map<string, VehicleTarget>; choices: Choice[] } {
   const of = new Map<string, VehicleTarget>();
   const byName = new Map(known.map((vehicle) => [nameKey(vehicle.name), vehicle.draft]));
   const named = new Map<string, number>();
+  const draftOf = draftsOfBooks(known);
   for (const [spelling, count] of counts) {
-    const draft = byName.get(nameKey(spelling));
+    const draft = byName.get(nameKey(spelling)) ?? draftOf(spelled.get(fold(spelling)));
     if (draft) of.set(spelling, draft);
     else if (!isOverhead(spelling)) named.set(spelling, count);
     else of.set(spelling, 'overhead');
@@ -45,6 +46,17 @@ export function vehicleDrafts(
     of.set(spelling, typeof target === 'object' ? (drafts.get(target) ?? 'ambiguous') : (target ?? 'ambiguous'));
   }
   return { of, choices };
+}
+
+/** One draft for each rebuild of the books that the file names in words of before. */
+function draftsOfBooks(known: readonly KnownVehicle[]) {
+  const drafts = new Map(known.map(({ draft }) => [draft.existing?.id, draft]));
+  return (existing: ExistingRebuild | undefined): Draft | null => {
+    if (!existing) return null;
+    const draft = drafts.get(existing.id) ?? newDraft(existing.tag, existing, 0);
+    drafts.set(existing.id, draft);
+    return draft;
+  };
 }
 
 // More than any list can mention a vehicle: what a row of its own calls it decides.

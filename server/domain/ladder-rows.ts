@@ -1,5 +1,5 @@
 import { FEWEST_ON_RUNG, type Rung } from '#shared/measures/ladder-rungs.ts';
-import { contingency, type Level } from './contingency.ts';
+import { byOverrun, contingency, type Level } from './contingency.ts';
 import type { RebuildFacts } from './facts.ts';
 import type { Car } from './ladder.ts';
 import { grouped } from './grouped.ts';
@@ -48,7 +48,8 @@ function groupsOf(set: readonly Completed[], rung: Rung, keyOf: (car: Car) => Ke
 }
 
 function rulesOf(members: readonly Completed[], levels: readonly Level[]): Pick<LadderRow, 'percent' | 'twoPart'> {
-  const outcomes = plannedOutcomes(members);
+  // In order once: each level sorts anew, which costs next to nothing then.
+  const outcomes = plannedOutcomes(members).sort(byOverrun);
   const told = plannedOutcomes(members.filter(({ hasUnknownForeseen }) => !hasUnknownForeseen));
   const twoPart = levels.map((level) => twoPartRule(told, level));
   return {

@@ -1,5 +1,4 @@
 import type { RebuildFacts } from './facts.ts';
-import { type Completed, planned } from './sets.ts';
 import { median } from './statistics.ts';
 
 /** A rebuild with the hours of its locked estimate, own and paid together. null = none planned. */
@@ -24,11 +23,10 @@ export interface PlanStart {
 
 /**
  * Where the plan of the next like car may start: medians of plan and actual per category and of hours, over finished
- * rebuilds with an estimate (set K). Actual is the planning actual of §18.1. Example: parts planned at 900, 1,000 and
- * 1,400 that came to 1,000, 1,300 and 1,300: n 3, 1,000 planned, 1,300 actual.
+ * rebuilds with an estimate (of set K). Actual is the planning actual of definitions §18.1. Example: parts planned at
+ * 900, 1,000 and 1,400 that came to 1,000, 1,300 and 1,300: n 3, 1,000 planned, 1,300 actual.
  */
-export function planStart(rebuilds: readonly PlannedFacts[]): PlanStart {
-  const set = planned(rebuilds) as (PlannedFacts & Completed)[];
+export function planStart(set: readonly PlannedFacts[]): PlanStart {
   const pairs = new Map<string, { plan: number[]; actual: number[] }>();
   for (const { estimates, categories } of set) {
     for (const [category, cents] of estimates) {

@@ -38,6 +38,7 @@ export function startsOf(past: readonly PlannedFacts[], ids: Ids): BidBasis['sta
 /** What surprised: by damage and seen, by damage, over all; kinds with fewer than five are left out. */
 export function surprisesOf({ shop, surprises }: BasisInput, ids: Ids): BidBasis['surprises'] {
   const told = completed(shop.rebuilds).filter(({ hasUnknownForeseen }) => !hasUnknownForeseen);
+  const surprised = new Set(surprises.map(({ rebuildId }) => rebuildId));
   const known = told.filter(({ damage }) => damage !== null);
   const kinds = [
     ...kindsOf(
@@ -48,14 +49,11 @@ export function surprisesOf({ shop, surprises }: BasisInput, ids: Ids): BidBasis
   ].filter(([, members]) => members.length >= FEWEST_ALIKE);
   return [...kinds, [[null, null], told] as const].map(([[damage, seen], members]) => {
     const groups = surpriseGroups(surprises, new Set(members.map(({ id }) => id)));
-    const surprised = members.filter(({ categories }) =>
-      [...categories.values()].some(({ surpriseCount }) => surpriseCount > 0),
-    );
     return {
       damageId: ids.damageId(damage),
       isSeen: seen,
       n: members.length,
-      x: surprised.length,
+      x: members.filter(({ id }) => surprised.has(id)).length,
       categories: groups.map(({ category, x, medianCents, whats }) => {
         return { categoryId: ids.categoryId(category) ?? '', x, medianCents, whats: [...whats] };
       }),

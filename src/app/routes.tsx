@@ -18,6 +18,7 @@ const TimeToSellPage = lazyPage(async () => (await import('../pages/time-to-sell
 const ContingencyPage = lazyPage(async () => (await import('../pages/contingency.tsx')).ContingencyPage);
 const PreBidPage = lazyPage(async () => (await import('../pages/pre-bid.tsx')).PreBidPage);
 const PreBidsPage = lazyPage(async () => (await import('../pages/pre-bids.tsx')).PreBidsPage);
+const RuleReviewPage = lazyPage(async () => (await import('../pages/rule-review.tsx')).RuleReviewPage);
 const RebuildsPage = lazyPage(async () => (await import('../pages/rebuilds.tsx')).RebuildsPage);
 const RebuildPage = lazyPage(async () => (await import('../pages/rebuild.tsx')).RebuildPage);
 const LedgerPage = lazyPage(async () => (await import('../pages/ledger.tsx')).LedgerPage);
@@ -47,6 +48,7 @@ export function AppRoutes() {
           <Route path="overruns" element={<OverrunsPage />} />
           <Route path="time-to-sell" element={<TimeToSellPage />} />
           <Route path="contingency" element={<ContingencyPage />} />
+          <Route path="contingency/review" element={<RuleReviewPage />} />
           <Route path="pre-bid/:bidId?" element={<PreBidPage />} />
           <Route path="pre-bids" element={<PreBidsPage />} />
           <Route path="rebuilds" element={<RebuildsPage />} />

@@ -5,19 +5,23 @@ import { AnswerFrame } from '../features/answers/answer-frame.tsx';
 import { BackTestPanel } from '../features/answers/contingency/back-test-panel.tsx';
 import { ContingencyWorkedOut } from '../features/answers/contingency/contingency-worked-out.tsx';
 import { DamageRanges } from '../features/answers/contingency/damage-ranges.tsx';
-import { RulesOfThumb } from '../features/answers/contingency/rules-of-thumb.tsx';
-import { TwoPartPanel } from '../features/answers/contingency/two-part-panel.tsx';
+import { DriftPanel } from '../features/answers/contingency/drift-panel.tsx';
+import { type Kind, kindOf } from '../features/answers/contingency/kind.ts';
+import { PastBidsPanel } from '../features/answers/contingency/past-bids-panel.tsx';
+import { RuleForCarPanel } from '../features/answers/contingency/rule-for-car-panel.tsx';
+import { SideBySide } from '../features/answers/contingency/side-by-side.tsx';
 import { EmptyAnswer } from '../features/answers/empty-answer.tsx';
 import { FilterBar } from '../features/answers/filter-bar.tsx';
 import { isFiltered } from '../features/answers/filter-words.ts';
 import { LeftOutList } from '../features/answers/left-out.tsx';
 import { useMayWrite } from '../features/answers/may-write.ts';
 import { ANSWERS_KEY, contingencyQuery } from '../features/answers/queries.ts';
+import { useShopPath } from '../features/answers/rebuild-link.tsx';
 import { sayContingency } from '../features/answers/sentences/contingency.ts';
-import { cardOf, proposalOf } from '../features/rules/proposal.ts';
+import { printedOf, proposalOf } from '../features/rules/proposal.ts';
 import { RuleActs } from '../features/rules/rule-acts.tsx';
 import { RuleCard } from '../features/rules/rule-card.tsx';
-import { RulesHistory } from '../features/rules/rules-history.tsx';
+import { RuleSheet } from '../features/rules/rule-sheet.tsx';
 import { useSession } from '../lib/session.ts';
 import { useFormatter } from '../ui/formatter-context.tsx';
 import { Panels } from '../ui/panel.tsx';
@@ -26,9 +30,10 @@ import { Panels } from '../ui/panel.tsx';
 export function ContingencyPage() {
   const format = useFormatter();
   const { search, filter } = useAddress();
+  const path = useShopPath();
   const mayAdopt = useMayWrite();
+  const kind = kindOf(search);
   const result = useQuery({ ...contingencyQuery(filter, levelOf(search)), placeholderData: keepPreviousData });
-  const answer = result.data;
   return (
     <>
       <AnswerFrame
@@ -43,42 +48,52 @@ export function ContingencyPage() {
           />
         }
         filters={(one) => <FilterBar options={one.filters} />}
-        say={(one) => sayContingency(one, format)}
-        howWorkedOut={(one) => <ContingencyWorkedOut answer={one} />}
+        say={(one) => sayContingency(one, format, kind)}
+        howWorkedOut={(one) => <ContingencyWorkedOut answer={one} kind={kind} />}
       >
         {(one) => (
           <>
-            <BackTestPanel answer={one} />
+            <BackTestPanel answer={one} kind={kind} />
             <RuleActs
               answer={one}
               proposal={proposalOf(one, format)}
+              kind={kind}
               mayAdopt={mayAdopt}
               isFiltered={isFiltered(filter)}
+              reviewPath={path('contingency/review')}
               alsoOld={[ANSWERS_KEY]}
             />
             <Panels>
-              <RulesOfThumb test={one.backTest} />
+              <SideBySide answer={one} kind={kind} />
+              <div className="grid content-start gap-6">
+                <RuleForCarPanel options={one.filters} level={one.level} kind={kind} />
+                <DriftPanel drift={one.drift} />
+              </div>
+            </Panels>
+            <Panels>
+              <PastBidsPanel answer={one} kind={kind} />
               <DamageRanges answer={one} />
             </Panels>
-            <TwoPartPanel answer={one} />
-            <RulesHistory />
             <LeftOutList leftOut={one.leftOut} />
           </>
         )}
       </AnswerFrame>
-      {answer && <Card answer={answer} />}
+      {result.data && <OnPaper answer={result.data} kind={kind} />}
     </>
   );
 }
 
-function Card({ answer }: { answer: ContingencyAnswer }) {
+/** The card and the sheet: seen on paper only. */
+function OnPaper({ answer, kind }: { answer: ContingencyAnswer; kind: Kind }) {
   const format = useFormatter();
   const { shop } = useSession();
-  const card = cardOf(answer, proposalOf(answer, format));
-  if (!card) return null;
-  const { percent } = answer;
-  const basis = card.rule
-    ? `Based on ${format.count(card.rule.rebuildCount, 'finished rebuild')} up to ${format.day(card.rule.dataUntil)}.`
-    : `Based on ${format.count(percent.n, 'finished rebuild')} up to ${format.day(answer.asOf)}.`;
-  return <RuleCard {...card} shopName={shop.name} basis={basis} />;
+  const printed = printedOf(answer, { proposal: proposalOf(answer, format), kind, shopName: shop.name }, format);
+  return (
+    printed && (
+      <>
+        <RuleCard {...printed} />
+        <RuleSheet {...printed} />
+      </>
+    )
+  );
 }

@@ -95,7 +95,7 @@ test('a rule is adopted for next year, with what it rested on', async ({ page })
   await dialog.getByLabel('Note (optional)').fill('Agreed at the kitchen table');
   await dialog.getByRole('button', { name: `Adopt ${percent}% for 2027`, exact: true }).click();
   await expect(dialog).toBeHidden();
-  await page.reload();
+  await page.getByRole('link', { name: 'Did the last rule hold?' }).click();
   const history = page.getByRole('table', { name: 'Rules adopted' });
   await expect(history.getByRole('row', { name: /2027/ }).first()).toContainText(`${percent}%`);
   await expect(history.getByRole('row', { name: /2027/ }).first()).toContainText('Wren Hollis');

@@ -16,6 +16,7 @@ export const PAGES: readonly PageToShoot[] = [
   { name: 'overruns', path: 'overruns' },
   { name: 'time-to-sell', path: 'time-to-sell' },
   { name: 'contingency', path: 'contingency' },
+  { name: 'rule-review', path: 'contingency/review' },
   { name: 'rebuilds', path: 'rebuilds' },
   { name: 'one-rebuild', path: 'rebuilds', follow: 'main a[href*="/rebuilds/"]' },
   { name: 'ledger', path: 'ledger' },

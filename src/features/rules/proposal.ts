@@ -1,7 +1,7 @@
 import type { ContingencyAnswer } from '#shared/contracts/answers-contingency.ts';
 import type { Formatter } from '#shared/formatter.ts';
-import type { Proposal } from './adopt-dialog.tsx';
-import type { RuleFigures } from './rule-words.ts';
+import type { Proposal, RuleKind } from './adopt-dialog.tsx';
+import type { PrintedRule } from './printed-rule.ts';
 
 /** What the books ask for at the answer's level, in each kind, with the rounding said. */
 export function proposalOf({ level, percent, twoPart }: ContingencyAnswer, format: Formatter): Proposal {
@@ -29,11 +29,44 @@ export function proposalOf({ level, percent, twoPart }: ContingencyAnswer, forma
   };
 }
 
-/** What the card shows: the rule of next year, or of this one, or what would be adopted. */
-export function cardOf(answer: ContingencyAnswer, proposal: Proposal) {
+/** What is put on paper: the rule of next year, or of this one, or what would be adopted. null = nothing yet. */
+export function printedOf(
+  answer: ContingencyAnswer,
+  { proposal, kind, shopName }: { proposal: Proposal; kind: RuleKind; shopName: string },
+  format: Formatter,
+): PrintedRule | null {
   const adopted = answer.nextYear.rule ? answer.nextYear : answer.thisYear;
-  const rule = adopted.rule;
-  const figures: RuleFigures | null = rule ?? proposal.percent ?? proposal['two-part'];
+  const { rule } = adopted;
+  if (rule) {
+    const { covered, scored } = rule.evidence;
+    return {
+      shopName,
+      year: adopted.year,
+      figures: rule,
+      level: rule.level,
+      basis: `Based on ${format.count(rule.rebuildCount, 'finished rebuild')} up to ${format.day(rule.dataUntil)}.`,
+      record: recordText(covered, scored),
+      rule,
+    };
+  }
+  const figures = proposal[kind] ?? proposal.percent ?? proposal['two-part'];
   if (!figures) return null;
-  return { year: rule ? adopted.year : answer.nextYear.year, figures, rule, level: rule?.level ?? answer.level };
+  const isPercent = figures.flatCents === null;
+  const score = (isPercent ? answer.backTest : answer.twoPartBackTest).scores.find(
+    (one) => one.rule === (isPercent ? 'percent' : 'two-part'),
+  );
+  const { n } = isPercent ? answer.percent : answer.twoPart;
+  return {
+    shopName,
+    year: answer.nextYear.year,
+    figures,
+    level: answer.level,
+    basis: `Based on ${format.count(n, 'finished rebuild')} up to ${format.day(answer.asOf)}.`,
+    record: score ? recordText(score.x, score.n) : null,
+    rule: null,
+  };
+}
+
+function recordText(covered: number, scored: number): string | null {
+  return scored === 0 ? null : `Rules set this way would have covered ${covered} of ${scored}.`;
 }

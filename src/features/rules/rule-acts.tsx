@@ -1,27 +1,30 @@
 import { useState } from 'react';
 import type { ContingencyAnswer } from '#shared/contracts/answers-contingency.ts';
-import { Button } from '../../ui/button.tsx';
+import { Button, LinkButton } from '../../ui/button.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
-import { AdoptDialog, type Proposal } from './adopt-dialog.tsx';
+import { AdoptDialog, type Proposal, type RuleKind } from './adopt-dialog.tsx';
 import { InForce } from './in-force.tsx';
-import { printRuleCard } from './rule-card.tsx';
+import { printAlone } from './print-alone.ts';
 import { ruleText } from './rule-words.ts';
 
 type Props = {
   answer: ContingencyAnswer;
   proposal: Proposal;
+  kind: RuleKind;
   /** Owner or bookkeeper. */
   mayAdopt: boolean;
   /** Rules are adopted over all rebuilds: not while a filter is set. */
   isFiltered: boolean;
+  /** Where the yearly review stands. */
+  reviewPath: string;
   alsoOld: readonly (readonly string[])[];
 };
 
-/** Adopt, print, and what is in force. */
-export function RuleActs({ answer, proposal, mayAdopt, isFiltered, alsoOld }: Props) {
+/** Adopt, print, look back, and what is in force. */
+export function RuleActs({ answer, proposal, kind, mayAdopt, isFiltered, reviewPath, alsoOld }: Props) {
   const format = useFormatter();
   const [isOpen, setOpen] = useState(false);
-  const best = proposal.percent ?? proposal['two-part'];
+  const best = proposal[kind] ?? proposal.percent ?? proposal['two-part'];
   const years = [answer.thisYear, answer.nextYear];
   const canPrint = best !== null || years.some((one) => one.rule !== null);
   return (
@@ -33,10 +36,18 @@ export function RuleActs({ answer, proposal, mayAdopt, isFiltered, alsoOld }: Pr
           </Button>
         )}
         {canPrint && (
-          <Button size="large" onClick={printRuleCard}>
-            Print the rule card
-          </Button>
+          <>
+            <Button size="large" onClick={() => printAlone('card')}>
+              Print the wallet card
+            </Button>
+            <Button size="large" onClick={() => printAlone('sheet')}>
+              Print the sheet
+            </Button>
+          </>
         )}
+        <LinkButton size="large" to={reviewPath}>
+          Did the last rule hold?
+        </LinkButton>
       </div>
       {mayAdopt && isFiltered && (
         <p className="text-soft">A rule is adopted over all rebuilds: show all of them to adopt one.</p>
@@ -45,6 +56,7 @@ export function RuleActs({ answer, proposal, mayAdopt, isFiltered, alsoOld }: Pr
       {isOpen && (
         <AdoptDialog
           proposal={proposal}
+          kind={kind}
           years={years.map(({ year, rule }) => ({ year, inForce: rule }))}
           alsoOld={alsoOld}
           onClose={() => setOpen(false)}

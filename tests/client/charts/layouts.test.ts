@@ -2,6 +2,7 @@ import { describe, expect, test } from 'vitest';
 import { type BackTestBar, backTestLayout, ruleRuns } from '../../../src/charts/back-test-layout.ts';
 import { cellTone } from '../../../src/charts/cell-tone.ts';
 import { dotStripLayout, stripDomain } from '../../../src/charts/dot-strip-layout.ts';
+import { GRADE_MARGIN, gradeLineLayout } from '../../../src/charts/grade-line-layout.ts';
 import { rangeLinesLayout } from '../../../src/charts/range-lines-layout.ts';
 import { stepLineLayout } from '../../../src/charts/step-line-layout.ts';
 import { survivalLayout } from '../../../src/charts/survival-layout.ts';
@@ -211,4 +212,33 @@ test('still unsold: every curve begins at all of them, and labels keep apart', (
   expect((places[1] ?? 0) - (places[0] ?? 0)).toBeGreaterThanOrEqual(17);
   expect((places[2] ?? 0) - (places[1] ?? 0)).toBeGreaterThanOrEqual(17);
   expect(groups[0]?.band).toEqual([]);
+});
+
+describe('the line of grades', () => {
+  const grade = (label: string, rate: number | null) => ({
+    label,
+    note: '',
+    share: 0.8,
+    rate,
+    ...(rate === null ? { low: null, high: null } : { low: rate - 0.2, high: Math.min(1, rate + 0.1) }),
+  });
+  const size = { width: 458, height: 258 };
+
+  test('is always drawn over the whole of 0 to 100 %', () => {
+    const { y } = gradeLineLayout([grade('2025', 0.75)], size);
+    expect([y(0), y(1)]).toEqual([258 - GRADE_MARGIN.bottom, GRADE_MARGIN.top]);
+  });
+
+  test('joins the years that were judged and leaves out one with nothing to judge', () => {
+    const { grades, line } = gradeLineLayout([grade('2024', 0.5), grade('2025', null), grade('2026', 1)], size);
+    // 400 pixels for three: at most 150 each, so 133⅓, and their middles.
+    expect(grades.map(({ x }) => Math.round(x))).toEqual([113, 246, 379]);
+    expect(line.map(({ x }) => Math.round(x))).toEqual([113, 379]);
+    expect(grades[1]).toMatchObject({ rateY: null, lowY: null, highY: null });
+  });
+
+  test('keeps its marks in a window without room', () => {
+    expect(gradeLineLayout([grade('2025', 0.5)], { width: 20, height: 100 }).dash).toBeGreaterThan(0);
+    expect(gradeLineLayout([], size).line).toEqual([]);
+  });
 });

@@ -1,6 +1,7 @@
 import type { ContingencyAnswer } from '#shared/contracts/answers-contingency.ts';
 import type { Formatter } from '#shared/formatter.ts';
 import type { LevelName } from '#shared/vocabulary.ts';
+import type { Kind } from '../contingency/kind.ts';
 import { counted, mark, type Said, type Sentence, said, say, words } from './parts.ts';
 
 type Score = ContingencyAnswer['backTest']['scores'][number];
@@ -26,46 +27,83 @@ export function scoreOf(test: ContingencyAnswer['backTest'], rule: Score['rule']
   return test.scores.find((score) => score.rule === rule) ?? null;
 }
 
-/** How much cushion should next year's budgets carry? */
-export function sayContingency(answer: ContingencyAnswer, format: Formatter): Said {
-  return { answer: sentence(answer, format), cautions: cautions(answer, format) };
+/** `8 in 10, could be 7 to 9`: what a level may truly come to with so few rebuilds. */
+export function bandWords({ lower, upper }: { lower: number; upper: number }): string {
+  const from = Math.round(lower * 10);
+  // "10 in 10" would be a promise.
+  const to = upper >= 0.95 ? 'nearly 10' : `${Math.round(upper * 10)}`;
+  return `${from}` === to ? `about ${to} in 10` : `${from} to ${to} in 10`;
 }
 
-function sentence(answer: ContingencyAnswer, format: Formatter): Sentence {
-  const { percent, level } = answer;
-  if (percent.n === 0) return ['No finished rebuild has a locked estimate yet, so no cushion can be worked out.'];
-  if (percent.percent === null) {
-    const has = counted(format, percent.n);
-    return [
-      `Too few yet for ${levelWords(level)}: it needs ${counted(format, leastFor(level), 'finished rebuild')} with an estimate, and there ${percent.n === 1 ? 'is' : 'are'} ${has} so far.`,
-    ];
+/** How much cushion should next year's budgets carry? Of the kind of rule that the page shows. */
+export function sayContingency(answer: ContingencyAnswer, format: Formatter, kind: Kind = 'percent'): Said {
+  return { answer: sentence(answer, format, kind), cautions: cautions(answer, format, kind) };
+}
+
+function sentence(answer: ContingencyAnswer, format: Formatter, kind: Kind): Sentence {
+  const { level } = answer;
+  const { n } = answer[kind === 'percent' ? 'percent' : 'twoPart'];
+  if (answer.percent.n === 0) {
+    return ['No finished rebuild has a locked estimate yet, so no cushion can be worked out.'];
   }
-  const add =
-    percent.percent === 0
-      ? say`${mark('No cushion')} is needed on top of the repair estimate`
-      : say`Add ${mark(format.percent(percent.percent / 100))} to the repair estimate`;
-  const score = scoreOf(answer.backTest, 'percent');
+  const add = addWords(answer, format, kind);
+  if (add === null) return [tooFewWords(n, level, format, kind)];
+  const score = scoreOf(kind === 'percent' ? answer.backTest : answer.twoPartBackTest, kind);
   if (!score || score.n === 0) return say`${add}; there are too few rebuilds yet to try out rules set this way.`;
   return say`${add}: rules set this way would have covered ${mark(`${format.number(score.x)} of ${format.number(score.n)}`)} rebuilds.`;
 }
 
-function cautions(answer: ContingencyAnswer, format: Formatter): string[] {
-  const { percent, level, backTest } = answer;
-  const score = scoreOf(backTest, 'percent');
+/** null = too few yet. */
+function addWords({ percent, twoPart }: ContingencyAnswer, format: Formatter, kind: Kind): Sentence | null {
+  if (kind === 'two-part') {
+    const { creepPercent, adoptFlatCents } = twoPart;
+    if (creepPercent === null || adoptFlatCents === null) return null;
+    return say`Add ${mark(format.percent(creepPercent / 100))} for known work costing more and ${mark(format.money(adoptFlatCents))} for surprises`;
+  }
+  if (percent.percent === null) return null;
+  if (percent.percent === 0) return say`${mark('No cushion')} is needed on top of the repair estimate`;
+  return say`Add ${mark(format.percent(percent.percent / 100))} to the repair estimate`;
+}
+
+function tooFewWords(n: number, level: LevelName, format: Formatter, kind: Kind): string {
+  const needed = leastFor(level);
+  const what = kind === 'percent' ? 'with an estimate' : 'whose entries all say whether they were foreseen';
+  const has = n === 0 ? 'none so far' : `${words(format, n)} so far`;
+  return `Too few yet for ${levelWords(level)}: it needs ${counted(format, needed, 'finished rebuild')} ${what}. There ${n === 1 ? 'is' : 'are'} ${has}; ${words(format, needed - n)} more will do.`;
+}
+
+function cautions(answer: ContingencyAnswer, format: Formatter, kind: Kind): string[] {
+  const { percent, level, drift } = answer;
+  const figure = answer[kind === 'percent' ? 'percent' : 'twoPart'];
+  const score = scoreOf(kind === 'percent' ? answer.backTest : answer.twoPartBackTest, kind);
   const short = score ? score.n - score.x : 0;
+  const rough = kind === 'percent' ? 'at least' : 'roughly';
+  const band = figure.band ? ` With that many to go by, the true share could be ${bandWords(figure.band)}.` : '';
   return said(
-    percent.percent !== null &&
-      `With ${counted(format, percent.n, 'finished rebuild')}, a rule set this way covers the next one at least ${levelTimes(level)}, so long as next year's cars are like these.`,
+    figure.isAttainable &&
+      `With ${counted(format, figure.n, 'finished rebuild')}, a rule set this way covers the next one ${rough} ${levelTimes(level)}, so long as next year's cars are like these.${band}`,
     score && score.n > 0 && short > 0 && shortWords(short, score.shortCents, format),
-    score &&
-      score.lower !== null &&
-      score.upper !== null &&
-      `The share they cover in the long run may lie anywhere between ${format.percent(score.lower)} and ${format.percent(score.upper)} (roughly 95% sure).`,
-    percent.uplift !== null && percent.uplift < 0 && 'Estimates ran high; the plan itself is never cut.',
+    (drift.verdict === 'costs more' || drift.verdict === 'costs less') && sayDrift(drift, format),
+    kind === 'percent' &&
+      percent.uplift !== null &&
+      percent.uplift < 0 &&
+      'Estimates ran high; the plan itself is never cut.',
   );
 }
 
 function shortWords(short: number, cents: number, format: Formatter): string {
   const who = short === 1 ? 'The one not covered' : `The ${words(format, short)} not covered`;
   return `${who} ran short by ${format.money(cents)}${short === 1 ? '' : ' in all'}.`;
+}
+
+/** Do the last 24 months agree with the years before, and which did the proposal use? null = too few to say. */
+export function sayDrift(drift: ContingencyAnswer['drift'], format: Formatter): string | null {
+  const { verdict, withinCount, expectedCount, before, recent, all } = drift;
+  if (verdict === null || withinCount === null || expectedCount === null || before.percent === null) return null;
+  const held = `Of ${format.count(recent.n, 'rebuild')} in the last 24 months ${words(format, withinCount)} stayed within the ${format.percent(before.percent / 100)} that the years before ask for; about ${format.number(Math.round(expectedCount))} were to be expected`;
+  if (verdict === 'agrees') return `${held}: no sign that the past is a poor guide.`;
+  const used = `The proposal uses all years${all.percent === null ? '' : ` (${format.percent(all.percent / 100)})`}`;
+  const alone =
+    recent.percent === null ? '' : `; the last 24 months alone ask for ${format.percent(recent.percent / 100)}`;
+  return `${held}. Work ${verdict} now. ${used}${alone}.`;
 }

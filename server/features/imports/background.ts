@@ -20,7 +20,7 @@ interface Asker {
 }
 
 /** The files of an import, and where they lie. */
-async function filesAt({ services, shopId }: Asker, importId: string): Promise<FileAt[]> {
+export async function filesAt({ services, shopId }: Asker, importId: string): Promise<FileAt[]> {
   const files = await importStore(shopScope(services.database.reader, shopId)).files(importId);
   return files.map(({ name, number }) => ({ name, path: importPath(services.config.dataDir, importId, number) }));
 }

@@ -29,6 +29,8 @@ export interface CommitTask extends Importing {
 export interface Brought extends BroughtBooks {
   /** How the files spelled vehicles → the rebuilds that they are. */
   readonly vehicles: Readonly<Record<string, string>>;
+  /** In the order of the reading's list. */
+  readonly rebuildIds: readonly string[];
 }
 
 /**
@@ -75,6 +77,7 @@ export function commitRows(
     workerIds: writer.workerIds,
     replaced: { ...replaced.done, facts },
     vehicles: spellings(plan, writer),
+    rebuildIds: read.drafts.map((draft) => writer.idOf(draft)),
   };
 }
 

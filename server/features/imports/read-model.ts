@@ -1,6 +1,5 @@
 import { z } from 'zod';
-import type { Outcome } from '#shared/contracts/import-words.ts';
-import type { Import, ImportRow, ImportSummary } from '#shared/contracts/imports.ts';
+import type { Import, ImportSummary } from '#shared/contracts/imports.ts';
 import type { ShopScope } from '../../books/scope.ts';
 import { readCursor, writeCursor } from '../../platform/cursor.ts';
 import { fromRow } from '../../platform/rows.ts';
@@ -64,26 +63,4 @@ export async function showImport(scope: ShopScope, id: string): Promise<Import> 
     files,
     settings: settingsOf(record),
   };
-}
-
-/** Rows of a file that came in, in the file's order. */
-export async function listRows(
-  scope: ShopScope,
-  id: string,
-  outcome: Outcome | undefined,
-  cursor: string | undefined,
-): Promise<{ rows: ImportRow[]; next: string | null }> {
-  await importStore(scope).get(id);
-  const after = readCursor(cursor, z.tuple([z.int(), z.int()]));
-  const query = scope
-    .table('import_rows')
-    .where({ import_id: id })
-    .orderBy(['sheet', 'row'])
-    .select('sheet', 'row', 'cells', 'outcome', 'reason');
-  if (outcome) query.where({ outcome });
-  if (after) query.whereRaw('(sheet, row) > (?, ?)', after);
-  const rows: (Omit<ImportRow, 'cells' | 'lines'> & { cells: string })[] = await query.limit(PAGE + 1);
-  const page = rows.slice(0, PAGE).map((row) => ({ ...row, cells: JSON.parse(row.cells) as string[], lines: [] }));
-  const last = page.at(-1);
-  return { rows: page, next: rows.length > PAGE && last ? writeCursor([last.sheet, last.row]) : null };
 }

@@ -6,7 +6,8 @@ import { ProblemError } from '../../platform/problems.ts';
 import { forgetFiles, startCommit } from './background.ts';
 import { changeImport } from './change-import.ts';
 import { wrongState } from './problems.ts';
-import { listImports, listRows, showImport } from './read-model.ts';
+import { listRows } from './list-rows.ts';
+import { listImports, showImport } from './read-model.ts';
 import { runJob } from './run-job.ts';
 import { importStore, readingOf } from './store.ts';
 import { uploadImport } from './upload-import.ts';
@@ -32,7 +33,7 @@ export const importRoutes: Route[] = [
   route(importsApi.list, (ctx) => listImports(readScope(ctx), ctx.query.cursor)),
   route(importsApi.upload, uploadImport),
   route(importsApi.show, (ctx) => shown(ctx as unknown as OnImport)),
-  route(importsApi.rows, (ctx) => listRows(readScope(ctx), ctx.params.importId, ctx.query.outcome, ctx.query.cursor)),
+  route(importsApi.rows, listRows),
   route(importsApi.change, changeImport),
   route(importsApi.commit, async (ctx) => commitImport(ctx as unknown as OnImport)),
   route(importsApi.undo, async (ctx) => undoImport(ctx as unknown as OnImport)),

@@ -1,11 +1,12 @@
 import BetterSqlite3 from 'better-sqlite3';
 import { chainedAfterLast } from './trail-record.ts';
-import type { Reading } from '#shared/contracts/import-reading.ts';
+import type { FirstRow, Reading } from '#shared/contracts/import-reading.ts';
 import type { ImportSettings } from '#shared/contracts/imports.ts';
 import { removeImported, undoObstacle } from '../../books/unimport.ts';
 import { preparePragmas, type RawDatabase } from '../../platform/database.ts';
 import { type Brought, type CommitTask, commitRows, ReadingOutdated } from './commit-rows.ts';
 import { readFile } from './read/read-file.ts';
+import { type RowsWanted, rowWindow } from './read/row-window.ts';
 import { shopBooks } from './shop-books.ts';
 import { bytesOfFile } from './text/bytes.ts';
 
@@ -26,6 +27,12 @@ export interface ReadTask extends Task {
   readonly files: readonly FileAt[];
   readonly settings: ImportSettings;
 }
+export interface RowsTask extends Task {
+  readonly kind: 'rows';
+  readonly files: readonly FileAt[];
+  readonly settings: ImportSettings;
+  readonly wanted: RowsWanted;
+}
 export interface CommitJob extends Task, Omit<CommitTask, 'now'> {
   readonly kind: 'commit';
   readonly files: readonly FileAt[];
@@ -36,11 +43,12 @@ export interface UndoTask extends Task {
   readonly userId: string;
   readonly requestId: string;
 }
-export type Job = ReadTask | CommitJob | UndoTask;
+export type Job = ReadTask | RowsTask | CommitJob | UndoTask;
 
 /** How a job ended. 'outdated': the books changed, so the file must be read again; `obstacle`: why undo is refused. */
 export type Done =
   | { readonly kind: 'read'; readonly reading: Reading }
+  | { readonly kind: 'rows'; readonly rows: readonly FirstRow[] }
   | { readonly kind: 'committed' }
   | { readonly kind: 'outdated' }
   | { readonly kind: 'undone'; readonly obstacle: string | null };
@@ -55,10 +63,12 @@ export function work(job: Job, onPart: (share: number) => void): Done {
     preparePragmas(raw);
     raw.pragma(`cache_size = -${CACHE_KB}`);
     if (job.kind === 'read') {
-      return {
-        kind: 'read',
-        reading: readFile(given(job.files), shopBooks(raw, job.shopId, job.now), job.settings, onPart),
-      };
+      const books = shopBooks(raw, job.shopId, job.now);
+      return { kind: 'read', reading: readFile(given(job.files), books, job.settings, onPart) };
+    }
+    if (job.kind === 'rows') {
+      const books = shopBooks(raw, job.shopId, job.now);
+      return { kind: 'rows', rows: rowWindow(given(job.files), books, job.settings, job.wanted) };
     }
     return job.kind === 'commit' ? commitJob(raw, job, onPart) : undoJob(raw, job);
   } finally {

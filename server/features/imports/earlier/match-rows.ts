@@ -162,7 +162,7 @@ function pairChanged(side: Side): void {
     const then = new Map(
       [...match.past.cellsOf(rows)].map(([row, cells]) => [row, byToday(cells, oldCol, width)] as const),
     );
-    if (side.guess.shape === 'vehicles') pairVehicles(side, match, { then, now, oldCol });
+    if (side.guess.shape === 'vehicles') pairVehicles(side, match, { past: then, now, oldCol });
     else
       for (const [line, row] of pairRows(then, now, same)) {
         keepPair(side, match, { line, row, old: then.get(row) ?? [], oldCol, rebuildId: null });
@@ -175,10 +175,10 @@ function pairVehicles(
   side: Side,
   match: SheetMatch,
   {
-    then,
+    past: then,
     now,
     oldCol,
-  }: { then: ReadonlyMap<number, readonly string[]>; now: ReadonlyMap<number, readonly string[]> } & Pick<
+  }: { past: ReadonlyMap<number, readonly string[]>; now: ReadonlyMap<number, readonly string[]> } & Pick<
     Twin,
     'oldCol'
   >,

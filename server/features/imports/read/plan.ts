@@ -84,6 +84,13 @@ export interface CellAside {
 /** One line of a row, with its rebuild still as a draft; null = overhead. */
 export type DraftLine = Omit<Line, 'rebuild' | 'sheet'> & { readonly draft: Draft | null };
 
+/** A line as people see it: its rebuild by its place in the list of those that came in. */
+export const lineOf = ({ draft, ...line }: DraftLine, sheet: number): Line => ({
+  ...line,
+  sheet,
+  rebuild: draft === null ? null : draft.place,
+});
+
 /** How one row of the file ended. */
 export interface RowRead {
   readonly outcome: Outcome;

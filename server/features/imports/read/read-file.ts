@@ -1,11 +1,11 @@
-import type { Aside, FirstRow, Line, Reading } from '#shared/contracts/import-reading.ts';
+import type { Aside, FirstRow, Reading } from '#shared/contracts/import-reading.ts';
 import type { ImportSettings } from '#shared/contracts/imports.ts';
 import type { ShopBooks } from '../books.ts';
 import { FileRefusal } from '../refusal.ts';
 import type { GivenFile } from '../sheets/open-files.ts';
 import { type Understanding, understand } from '../understand/understand.ts';
 import { emptyControl } from './empty-control.ts';
-import type { DraftLine, FilePlan, Plan } from './plan.ts';
+import { type DraftLine, type FilePlan, lineOf, type Plan } from './plan.ts';
 import { asidesOf } from './asides.ts';
 import { readRows } from './read-rows.ts';
 
@@ -91,10 +91,6 @@ function previewOf(understood: Understanding, plan: FilePlan, onPart?: (share: n
     earlier: [...plan.earlier],
     rememberedFrom: null,
   };
-}
-
-function lineOf({ draft, ...line }: DraftLine, sheet: number): Line {
-  return { ...line, sheet, rebuild: draft === null ? null : draft.place };
 }
 
 function refusedReading(understood: Understanding): Reading {

@@ -1,6 +1,16 @@
 import { z } from 'zod';
 import { idSchema } from '../fields.ts';
-import { cents, count, figure, headSchema, rateSchema, rebuildRefSchema } from './answers-parts.ts';
+import {
+  cents,
+  count,
+  differenceSchema,
+  figure,
+  headSchema,
+  rateSchema,
+  rebuildRefSchema,
+  trendSchema,
+  withoutOneSchema,
+} from './answers-parts.ts';
 
 /** One rebuild against its plan. `over` in cents (of hours: seconds), `rate` = over ÷ plan. */
 const dotSchema = rebuildRefSchema.omit({ name: true }).extend({ over: z.int(), rate: z.number() });
@@ -46,8 +56,28 @@ const categorySchema = z.object({
   /** Spent without having been planned: never in a ratio. */
   unbudgetedCount: count,
   unbudgetedCents: cents,
+  /** Chosen extras: paid, but in no overrun and no surprise. */
+  extraCents: cents,
   /** Does it change? The earliest first. */
   years: z.array(yearRateSchema),
+});
+
+/** Some rebuilds as the comparison by damage shows them: their overrun, sum over sum, and how many had a surprise. */
+const lookedAtSchema = z.object({ n: count, pooled: figure, isThin: z.boolean(), surprises: rateSchema });
+const differenceOrNull = differenceSchema.nullable();
+
+/** One damage against all others, each split by whether it was seen before buying. Differences of the overrun. */
+const damageLookSchema = z.object({
+  damageId: idSchema,
+  name: z.string(),
+  own: z.object({ seen: lookedAtSchema, unseen: lookedAtSchema }),
+  others: z.object({ seen: lookedAtSchema, unseen: lookedAtSchema }),
+  /** Unseen − seen: among this damage, and among all others. */
+  look: differenceOrNull,
+  lookOthers: differenceOrNull,
+  /** This damage − all others: among the seen, and among the unseen. */
+  damageSeen: differenceOrNull,
+  damageUnseen: differenceOrNull,
 });
 
 export const overrunsAnswerSchema = headSchema.extend({
@@ -72,8 +102,28 @@ export const overrunsAnswerSchema = headSchema.extend({
     shareOfWork: figure,
     categories: z.array(rateSchema.extend({ categoryId: idSchema, name: z.string(), unforeseenCents: cents })),
   }),
+  /** Paid for scope that was added by choice: counts in cost and profit, never here. */
+  extras: z.object({ rebuildCount: count, cents }),
   /** Seen before buying, not seen, not said. */
-  seen: z.array(z.object({ seen: z.boolean().nullable(), ...planned, surprises: rateSchema })),
+  seen: z.array(
+    z.object({
+      seen: z.boolean().nullable(),
+      ...planned,
+      surprises: rateSchema,
+      /** Σ profit ÷ Σ own hours. */
+      perHour: z.object({ n: count, pooledCents: figure }),
+    }),
+  ),
+  /** Unseen − seen: overrun, share with a surprise, kept by own hour (cents). null = too few to compare. */
+  seenDifference: z.object({ overrun: differenceOrNull, surprised: differenceOrNull, perHour: differenceOrNull }),
+  /** The most frequent first. */
+  damages: z.array(damageLookSchema),
+  /** By the day each left: overrun of the rebuild, and of its hours, as fractions. */
+  trends: z.object({ overrun: trendSchema, hours: trendSchema }),
+  /** Of the total's pooled overrun. */
+  withoutOne: withoutOneSchema.nullable(),
+  /** What leaving out every other way out would have said. */
+  soldOnly: z.object({ n: count, pooled: figure }),
   /** By the shop year in which they left. */
   years: z.array(z.object({ year: z.int(), ...planned })),
 });

@@ -25,7 +25,13 @@ export const filterQuerySchema = z.strictObject({
 });
 export type FilterQuery = z.output<typeof filterQuerySchema>;
 
-export const yearQuerySchema = z.strictObject({ year: yearQuery.optional() });
+/** `sold`: count as an old sheet would, without any other way out. Never what a page shows by itself. */
+const exitsQuery = z.literal('sold').optional();
+export const answerQuerySchema = filterQuerySchema.extend({ exits: exitsQuery });
+export type AnswerQuery = z.output<typeof answerQuerySchema>;
+
+export const yearQuerySchema = z.strictObject({ year: yearQuery.optional(), exits: exitsQuery });
+export type YearQuery = z.output<typeof yearQuerySchema>;
 
 /** What can be filtered by, with how many rebuilds each holds when nothing is filtered. */
 export const filterOptionsSchema = z.object({
@@ -45,6 +51,7 @@ export type RebuildRef = z.output<typeof rebuildRefSchema>;
 /** Why rebuilds are not in a figure; the words can stand on a page: "3 left out: no estimate". */
 export const LEFT_OUT_REASONS = [
   'not sold yet',
+  'left otherwise than by sale',
   'purchase not known',
   'own hours not known',
   'planned or worked hours not known',
@@ -74,6 +81,33 @@ export type LeftOut = z.output<typeof leftOutSchema>;
 
 /** x of n with its 95 % Wilson interval. */
 export const rateSchema = z.object({ n: count, x: count, rate: figure, lower: figure, upper: figure });
+
+/** First − second, with its 95 % interval; one that holds 0 could be luck. `isThin`: fewer than five on a side. */
+export const differenceSchema = z.object({
+  difference: z.number(),
+  lower: z.number(),
+  upper: z.number(),
+  isThin: z.boolean(),
+});
+export type Difference = z.output<typeof differenceSchema>;
+
+/** The latest so many rebuilds are what a trend is read from. */
+export const TREND_AT_MOST = 200;
+/** Change a year: median of the slopes between every two rebuilds, with its 95 % interval. null = nothing apart in time. */
+export const trendSchema = z.object({
+  n: count,
+  /** More had left than the latest that are looked at. */
+  isCapped: z.boolean(),
+  slope: figure,
+  lower: figure,
+  upper: figure,
+  isThin: z.boolean(),
+});
+export type Trend = z.output<typeof trendSchema>;
+
+/** The rebuild without which a figure changes most, and the figure then. */
+export const withoutOneSchema = z.object({ rebuild: rebuildRefSchema, value: z.number() });
+export type WithoutOne = z.output<typeof withoutOneSchema>;
 
 /** Above this many marks a picture gets bands or the latest only, and says so. */
 export const MARKS_AT_MOST = 300;

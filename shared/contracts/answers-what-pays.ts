@@ -1,6 +1,19 @@
 import { z } from 'zod';
 import { idSchema } from '../fields.ts';
-import { cents, count, figure, headSchema, perHourSchema } from './answers-parts.ts';
+import { PAY_VIEWS } from '../vocabulary.ts';
+import {
+  answerQuerySchema,
+  cents,
+  count,
+  figure,
+  headSchema,
+  perHourSchema,
+  withoutOneSchema,
+} from './answers-parts.ts';
+
+/** `view`: what a rebuild's figure is; by own hour unless asked. */
+export const whatPaysQuerySchema = answerQuerySchema.extend({ view: z.enum(PAY_VIEWS).optional() });
+export type WhatPaysQuery = z.output<typeof whatPaysQuerySchema>;
 
 /** The mean pulled toward the shop's average; `weight` 1 = its own mean alone, 0 = the shop's. 95 % interval. */
 const pulledSchema = z.object({
@@ -31,10 +44,14 @@ const groupSchema = z.object({
   isThin: z.boolean(),
   /** 1 = highest lower end of the pulled interval. null = thin, or not pooled. */
   rank: z.int().nullable(),
-  /** The sums behind `plain`: profit over own hours, or over cost. */
+  /** The sums behind `plain`; seconds 0 = not known. `allSeconds` = own + paid. */
   profitCents: cents,
+  laborCents: cents,
   ownSeconds: count,
+  allSeconds: count,
   costCents: cents,
+  /** The pulled figure without its furthest rebuild. null = thin. */
+  withoutOne: withoutOneSchema.nullable(),
 });
 
 /** One fit: cells, or one margin. `average` null = nothing to pool. `betweenVariance` 0 = no difference shown. */
@@ -59,6 +76,29 @@ export type Comparison = z.output<typeof comparisonSchema>;
 /** `classes` = all damage per class, `damages` = all classes per damage. */
 const threeFits = z.object({ cells: comparisonSchema, classes: comparisonSchema, damages: comparisonSchema });
 
+const keptSchema = z.object({ n: count, keptCents: cents });
+const oldSheetGroupSchema = z.object({
+  id: idSchema.nullable(),
+  name: z.string(),
+  old: keptSchema,
+  whole: keptSchema,
+  unsoldCount: count,
+  /** By kept a rebuild, among groups of five or more. */
+  oldRank: z.int().nullable(),
+  wholeRank: z.int().nullable(),
+});
+
+/** What a sheet of one row per sold vehicle would claim: sale − purchase − `bills`; then with more and more of the truth. */
+const oldSheetSchema = z.object({
+  bills: z.array(z.string()),
+  old: keptSchema,
+  /** Every entry, but sold ones only. */
+  soldOnly: keptSchema,
+  whole: keptSchema,
+  classes: z.array(oldSheetGroupSchema),
+  damages: z.array(oldSheetGroupSchema),
+});
+
 export const whatPaysAnswerSchema = headSchema.extend({
   /** Finished rebuilds with a known purchase, all together. */
   totals: z.object({
@@ -72,9 +112,11 @@ export const whatPaysAnswerSchema = headSchema.extend({
     returnOnCost: z.object({ n: count, pooled: figure, median: figure, mean: figure }),
   }),
   views: perHourSchema,
-  /** Profit ÷ own hours, cents per hour. */
-  perHour: threeFits,
-  /** Profit ÷ cost, a fraction. */
-  returnOnCost: threeFits,
+  view: z.enum(PAY_VIEWS),
+  /** The view's figure: cents per hour, cents a rebuild, or a fraction of cost. */
+  fits: threeFits,
+  /** Of all together by own hour: Σ profit ÷ Σ own hours. */
+  withoutOne: withoutOneSchema.nullable(),
+  oldSheet: oldSheetSchema,
 });
 export type WhatPaysAnswer = z.output<typeof whatPaysAnswerSchema>;

@@ -10,6 +10,8 @@ import {
   headSchema,
   perHourSchema,
   rebuildRefSchema,
+  trendSchema,
+  withoutOneSchema,
   yearEdge,
 } from './answers-parts.ts';
 
@@ -126,5 +128,11 @@ export const yearAnswerSchema = headSchema.extend({
   rebuilds: z.array(yearRebuildSchema),
   rebuildTotal: count,
   years: z.array(shopYearSchema),
+  /** Over all years, by the day each left, cents a year: kept by own hour, and kept a rebuild. */
+  trends: z.object({ perHour: trendSchema, perRebuild: trendSchema }),
+  /** Of what the year kept, and of that by own hour: the rebuild that moves it most. */
+  withoutOne: z.object({ kept: withoutOneSchema.nullable(), perHour: withoutOneSchema.nullable() }),
+  /** What leaving out every other way out would have said. */
+  soldOnly: z.object({ n: count, keptCents: cents }),
 });
 export type YearAnswer = z.output<typeof yearAnswerSchema>;

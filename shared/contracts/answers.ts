@@ -3,9 +3,9 @@ import { contingencyAnswerSchema, contingencyQuerySchema } from './answers-conti
 import { ruleForCarQuerySchema, ruleForCarSchema } from './answers-rule-for-car.ts';
 import { ruleReviewQuerySchema, ruleReviewSchema } from './answers-rule-review.ts';
 import { overrunsAnswerSchema } from './answers-overruns.ts';
-import { filterQuerySchema, yearQuerySchema } from './answers-parts.ts';
+import { answerQuerySchema, yearQuerySchema } from './answers-parts.ts';
 import { timeToSellAnswerSchema } from './answers-time-to-sell.ts';
-import { whatPaysAnswerSchema } from './answers-what-pays.ts';
+import { whatPaysAnswerSchema, whatPaysQuerySchema } from './answers-what-pays.ts';
 import { yearAnswerSchema } from './answers-year.ts';
 
 /** The answers, each with all its figures, how many rebuilds they rest on, and what is left out and why. */
@@ -21,21 +21,21 @@ export const answersApi = {
     method: 'GET',
     path: '/api/answers/what-pays',
     summary: 'Which wrecks pay?',
-    query: filterQuerySchema,
+    query: whatPaysQuerySchema,
     response: whatPaysAnswerSchema,
   },
   overruns: {
     method: 'GET',
     path: '/api/answers/overruns',
     summary: 'Where does the money run over?',
-    query: filterQuerySchema,
+    query: answerQuerySchema,
     response: overrunsAnswerSchema,
   },
   timeToSell: {
     method: 'GET',
     path: '/api/answers/time-to-sell',
     summary: 'How long until the money is back?',
-    query: filterQuerySchema,
+    query: answerQuerySchema,
     response: timeToSellAnswerSchema,
   },
   contingency: {

@@ -19,6 +19,7 @@ const ContingencyPage = lazyPage(async () => (await import('../pages/contingency
 const PreBidPage = lazyPage(async () => (await import('../pages/pre-bid.tsx')).PreBidPage);
 const PreBidsPage = lazyPage(async () => (await import('../pages/pre-bids.tsx')).PreBidsPage);
 const RuleReviewPage = lazyPage(async () => (await import('../pages/rule-review.tsx')).RuleReviewPage);
+const DefinitionsPage = lazyPage(async () => (await import('../pages/definitions.tsx')).DefinitionsPage);
 const RebuildsPage = lazyPage(async () => (await import('../pages/rebuilds.tsx')).RebuildsPage);
 const RebuildPage = lazyPage(async () => (await import('../pages/rebuild.tsx')).RebuildPage);
 const LedgerPage = lazyPage(async () => (await import('../pages/ledger.tsx')).LedgerPage);
@@ -51,6 +52,7 @@ export function AppRoutes() {
           <Route path="contingency/review" element={<RuleReviewPage />} />
           <Route path="pre-bid/:bidId?" element={<PreBidPage />} />
           <Route path="pre-bids" element={<PreBidsPage />} />
+          <Route path="definitions" element={<DefinitionsPage />} />
           <Route path="rebuilds" element={<RebuildsPage />} />
           <Route path="rebuilds/:rebuildId" element={<RebuildPage />} />
           <Route path="ledger" element={<LedgerPage />} />

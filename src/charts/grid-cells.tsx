@@ -131,7 +131,7 @@ function Cell({
           </span>{' '}
           {unit}
         </span>
-        {!isMargin && cell.low !== null && cell.high !== null && (
+        {cell.low !== null && cell.high !== null && (
           <span className="block whitespace-nowrap tabular-nums">
             {write(cell.low)} to {write(cell.high)}
           </span>

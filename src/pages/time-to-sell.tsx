@@ -6,20 +6,21 @@ import { FilterBar } from '../features/answers/filter-bar.tsx';
 import { LeftOutList } from '../features/answers/left-out.tsx';
 import { useMayWrite } from '../features/answers/may-write.ts';
 import { timeToSellQuery } from '../features/answers/queries.ts';
-import { sayTimeToSell } from '../features/answers/sentences/time-to-sell.ts';
+import { oldSheetSelling, sayTimeToSell } from '../features/answers/sentences/time-to-sell.ts';
+import { ClassStages } from '../features/answers/time-to-sell/class-stages.tsx';
 import { SellingCurve } from '../features/answers/time-to-sell/selling-curve.tsx';
 import { SellingTable } from '../features/answers/time-to-sell/selling-table.tsx';
 import { SellingWorkedOut } from '../features/answers/time-to-sell/selling-worked-out.tsx';
+import { StagesTable } from '../features/answers/time-to-sell/stages-table.tsx';
 import { UnsoldList } from '../features/answers/time-to-sell/unsold-list.tsx';
-import { WaitsTable } from '../features/answers/time-to-sell/waits-table.tsx';
 import { useFormatter } from '../ui/formatter-context.tsx';
 import { Panels } from '../ui/panel.tsx';
 
 /** How long until the money is back? Unsold ones count as waiting, not as absent. */
 export function TimeToSellPage() {
   const format = useFormatter();
-  const { filter } = useAddress();
-  const result = useQuery({ ...timeToSellQuery(filter), placeholderData: keepPreviousData });
+  const { asked } = useAddress();
+  const result = useQuery({ ...timeToSellQuery(asked), placeholderData: keepPreviousData });
   return (
     <AnswerFrame
       question="How long until the money is back?"
@@ -34,15 +35,17 @@ export function TimeToSellPage() {
       }
       filters={(answer) => <FilterBar options={answer.filters} />}
       say={(answer) => sayTimeToSell(answer, format)}
+      oldSheet={(answer) => oldSheetSelling(answer, format)}
       howWorkedOut={(answer) => <SellingWorkedOut answer={answer} />}
     >
       {(answer) => (
         <>
           <Panels wide>
             <SellingCurve answer={answer} />
-            <WaitsTable waits={answer.waits} />
+            <StagesTable answer={answer} />
           </Panels>
           {answer.overall.n > 0 && <SellingTable answer={answer} />}
+          <ClassStages rows={answer.classStages} />
           <UnsoldList unsold={answer.unsold} />
           <LeftOutList leftOut={answer.leftOut} />
         </>

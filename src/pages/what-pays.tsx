@@ -1,5 +1,5 @@
 import { keepPreviousData, useQuery } from '@tanstack/react-query';
-import { useAddress } from '../features/answers/address.ts';
+import { payViewOf, useAddress } from '../features/answers/address.ts';
 import { AnswerFrame } from '../features/answers/answer-frame.tsx';
 import { EmptyAnswer } from '../features/answers/empty-answer.tsx';
 import { FilterBar } from '../features/answers/filter-bar.tsx';
@@ -7,7 +7,8 @@ import { LeftOutList } from '../features/answers/left-out.tsx';
 import { useMayWrite } from '../features/answers/may-write.ts';
 import { PerHourViews } from '../features/answers/per-hour-views.tsx';
 import { whatPaysQuery } from '../features/answers/queries.ts';
-import { PAY_VIEWS, sayWhatPays } from '../features/answers/sentences/what-pays.ts';
+import { oldSheetPays, sayWhatPays } from '../features/answers/sentences/what-pays.ts';
+import { OldSheetPanel } from '../features/answers/what-pays/old-sheet-panel.tsx';
 import { PaysGrid } from '../features/answers/what-pays/pays-grid.tsx';
 import { PaysRanking } from '../features/answers/what-pays/pays-ranking.tsx';
 import { PaysTotals } from '../features/answers/what-pays/pays-totals.tsx';
@@ -18,9 +19,11 @@ import { Panel, Panels } from '../ui/panel.tsx';
 /** Which wrecks pay? By the hour or on cost, each with its range and its count. */
 export function WhatPaysPage() {
   const format = useFormatter();
-  const { search, filter } = useAddress();
-  const view = PAY_VIEWS.find((one) => one === search.get('view')) ?? 'per-hour';
-  const result = useQuery({ ...whatPaysQuery(filter), placeholderData: keepPreviousData });
+  const { search, asked } = useAddress();
+  const result = useQuery({
+    ...whatPaysQuery({ ...asked, view: payViewOf(search) }),
+    placeholderData: keepPreviousData,
+  });
   return (
     <AnswerFrame
       question="Which wrecks pay?"
@@ -34,13 +37,15 @@ export function WhatPaysPage() {
         />
       }
       filters={(answer) => <FilterBar options={answer.filters} />}
-      say={(answer) => sayWhatPays(answer, view, format)}
-      howWorkedOut={(answer) => <PaysWorkedOut answer={answer} view={view} />}
+      say={(answer) => sayWhatPays(answer, format)}
+      oldSheet={(answer) => oldSheetPays(answer, format)}
+      howWorkedOut={(answer) => <PaysWorkedOut answer={answer} />}
     >
       {(answer) => (
         <>
-          <PaysGrid answer={answer} view={view} />
-          <PaysRanking answer={answer} view={view} />
+          <PaysGrid answer={answer} />
+          <PaysRanking answer={answer} />
+          <OldSheetPanel answer={answer} />
           <Panels>
             <Panel title="By the hour, three ways" subtitle="The headline counts own, unpaid hours.">
               <PerHourViews views={answer.views} />

@@ -1,11 +1,11 @@
 import { keepPreviousData, useQuery } from '@tanstack/react-query';
-import { useAddress, yearOf } from '../features/answers/address.ts';
+import { exitsOf, useAddress, yearOf } from '../features/answers/address.ts';
 import { AnswerFrame } from '../features/answers/answer-frame.tsx';
 import { EmptyAnswer } from '../features/answers/empty-answer.tsx';
 import { LeftOutList } from '../features/answers/left-out.tsx';
 import { PerHourViews } from '../features/answers/per-hour-views.tsx';
 import { yearQuery } from '../features/answers/queries.ts';
-import { sayYear } from '../features/answers/sentences/year.ts';
+import { oldSheetYear, sayYear } from '../features/answers/sentences/year.ts';
 import { LateBills } from '../features/answers/year/late-bills.tsx';
 import { YearMoney } from '../features/answers/year/year-money.tsx';
 import { YearPictures } from '../features/answers/year/year-pictures.tsx';
@@ -22,7 +22,9 @@ export function YearPage() {
   const format = useFormatter();
   const { search } = useAddress();
   const year = yearOf(search);
-  const result = useQuery({ ...yearQuery(year), placeholderData: keepPreviousData });
+  const exits = exitsOf(search);
+  const query = { ...(year !== null && { year }), ...(exits && { exits }) };
+  const result = useQuery({ ...yearQuery(query), placeholderData: keepPreviousData });
   const isPast = result.data && !result.data.isRunning;
   return (
     <AnswerFrame
@@ -38,6 +40,7 @@ export function YearPage() {
       }
       filters={(answer) => <YearSwitch answer={answer} />}
       say={(answer) => sayYear(answer, format)}
+      oldSheet={(answer) => oldSheetYear(answer, format)}
       howWorkedOut={(answer) => <YearWorkedOut answer={answer} />}
     >
       {(answer) => (

@@ -1,11 +1,18 @@
 import type { ReactNode } from 'react';
 
-type Props = { title: string; subtitle?: ReactNode; actions?: ReactNode; children: ReactNode; className?: string };
+type Props = {
+  title: string;
+  subtitle?: ReactNode;
+  actions?: ReactNode;
+  children: ReactNode;
+  className?: string;
+  id?: string;
+};
 
-/** A sheet with a title. `title`, `subtitle`, `actions` (at the right of the title), `className` (grid placement). */
-export function Panel({ title, subtitle, actions, children, className }: Props) {
+/** A sheet with a title. `title`, `subtitle`, `actions` (at the right of the title), `className` (grid placement), `id` (to lead to it). */
+export function Panel({ title, subtitle, actions, children, className, id }: Props) {
   return (
-    <section className={`panel ${className ?? ''}`}>
+    <section id={id} className={`panel ${className ?? ''}`}>
       <div className="mb-4 flex flex-wrap items-start justify-between gap-x-6 gap-y-2">
         <div className="min-w-[14rem] flex-1">
           <h2 className="text-lead leading-snug font-[660]">{title}</h2>
@@ -15,6 +22,19 @@ export function Panel({ title, subtitle, actions, children, className }: Props) 
       </div>
       {children}
     </section>
+  );
+}
+
+/** A sheet that opens by its title: for what proves more than most visits ask. Closed, it is not printed. */
+export function FoldedPanel({ title, subtitle, children }: Omit<Props, 'actions' | 'className'>) {
+  return (
+    <details className="panel disclosure mb-6">
+      <summary className="min-h-6">
+        <h2 className="inline text-lead leading-snug font-[660]">{title}</h2>
+        {subtitle && <span className="block text-soft">{subtitle}</span>}
+      </summary>
+      <div className="mt-4">{children}</div>
+    </details>
   );
 }
 

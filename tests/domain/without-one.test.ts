@@ -21,8 +21,8 @@ describe('the middle of the selling curve without one', () => {
           return days === null || middle === null ? [] : [Math.abs(days - middle)];
         });
         const found = medianDaysWithoutOne(members);
-        if (middle === null || moves.length === 0) expect(found).toBeNull();
-        else expect(Math.abs((found?.value ?? 0) - middle)).toBeCloseTo(Math.max(...moves), 9);
+        expect(found === null).toBe(moves.length === 0);
+        expect(Math.abs((found?.value ?? 0) - (found ? (middle ?? 0) : 0))).toBeCloseTo(Math.max(0, ...moves), 9);
       }),
     );
   });

@@ -54,6 +54,25 @@ describe('the year', () => {
     expect(returns.n).toBe(2);
   });
 
+  it('says what one rebuild, a trend and sold ones alone would change', async () => {
+    const { ask } = await openSmallShop();
+    const { withoutOne, trends, soldOnly } = await ask<YearAnswer>('year');
+    // S-4 lost 2,500: without it −800 is 1,700. By the hour S-3 moves more: without it −2,500 over 10.
+    expect(withoutOne.kept).toMatchObject({ rebuild: { tag: 'S-4' }, value: 170_000 });
+    expect(withoutOne.perHour).toMatchObject({ rebuild: { tag: 'S-3' }, value: -25_000 });
+    expect(soldOnly).toEqual({ n: 1, keptCents: 170_000 });
+    expect(trends.perRebuild).toMatchObject({ n: 4, isThin: true });
+    expect(trends.perHour.slope).toBeLessThan(0);
+  });
+
+  it('leaves every other way out aside when asked, money tied up excepted', async () => {
+    const { ask } = await openSmallShop();
+    const [whole, sold] = [await ask<YearAnswer>('year'), await ask<YearAnswer>('year?exits=sold')];
+    expect(sold).toMatchObject({ keptCents: 170_000, exitCount: 2, lossCount: 0 });
+    expect(sold.tiedUp).toEqual(whole.tiedUp);
+    expect(outOf(sold)).toMatchObject({ 'left otherwise than by sale': ['S-4'] });
+  });
+
   it('shows money tied up today and at each year end, without what is paid later', async () => {
     const { ask } = await openSmallShop();
     const { tiedUp, years } = await ask<YearAnswer>('year');

@@ -9,20 +9,20 @@ import { openSmallShop, outOf } from '../support/small-shop.ts';
 describe('what pays', () => {
   it('gives each cell its plain and its pulled figure per own hour', async () => {
     const { ask } = await openSmallShop();
-    const { perHour } = await ask<WhatPaysAnswer>('what-pays');
-    const cell = (name: string) => perHour.cells.groups.find(({ className }) => className === name);
+    const { fits } = await ask<WhatPaysAnswer>('what-pays');
+    const cell = (name: string) => fits.cells.groups.find(({ className }) => className === name);
     expect(cell('SUV')).toMatchObject({ damageName: 'hail', n: 2, mean: 3500, isThin: true, rank: null });
     expect(cell('SUV')?.plain).toBeCloseTo(400_000 / 150, 9);
     expect(cell('pickup')).toMatchObject({ damageName: 'front', n: 2, mean: -10_000, profitCents: -20_000 });
     // Within groups the figures differ by more than between them: no difference shown, both at the average.
-    expect(perHour.cells.average).toMatchObject({ betweenVariance: 0 });
-    expect(perHour.cells.average?.mean).toBeCloseTo(-3250, 9);
+    expect(fits.cells.average).toMatchObject({ betweenVariance: 0 });
+    expect(fits.cells.average?.mean).toBeCloseTo(-3250, 9);
     expect(cell('SUV')?.pulled?.value).toBeCloseTo(-3250, 9);
-    expect(perHour.classes.groups.map(({ className, damageName, n }) => [className, damageName, n])).toEqual([
+    expect(fits.classes.groups.map(({ className, damageName, n }) => [className, damageName, n])).toEqual([
       ['SUV', null, 2],
       ['pickup', null, 2],
     ]);
-    expect(perHour.damages.groups.map(({ damageName, n }) => [damageName, n])).toEqual([
+    expect(fits.damages.groups.map(({ damageName, n }) => [damageName, n])).toEqual([
       ['front', 2],
       ['hail', 2],
     ]);
@@ -59,8 +59,8 @@ describe('what pays', () => {
       await sell('van', hours, 800_000);
       await sell('sports', hours, 400_000);
     }
-    const { perHour, filters } = await ask<WhatPaysAnswer>('what-pays?from=2024&to=2024');
-    expect(perHour.cells.groups.map(({ className, rank }) => [className, rank])).toEqual([
+    const { fits, filters } = await ask<WhatPaysAnswer>('what-pays?from=2024&to=2024');
+    expect(fits.cells.groups.map(({ className, rank }) => [className, rank])).toEqual([
       ['sports', 1],
       ['van', 2],
     ]);
@@ -136,6 +136,25 @@ describe('overruns', () => {
     ]);
   });
 
+  it('sets seen against unseen, split by damage, with what moves the figure', async () => {
+    const { ask } = await openSmallShop();
+    const answer = await ask<OverrunsAnswer>('overruns');
+    expect(answer.seenDifference.overrun?.difference).toBeCloseTo(0.25 - 40 / 280, 12);
+    expect(answer.seenDifference.surprised).toMatchObject({ difference: 1, isThin: true });
+    // Kept by own hour: unseen −1,500 over 110 hours, seen 5,300 over 96.
+    expect(answer.seenDifference.perHour?.difference).toBeCloseTo(-150_000 / 110 - 530_000 / 96, 9);
+    expect(answer.damages.map(({ name, own, others }) => [name, own.seen.pooled, others.unseen.pooled])).toEqual([
+      ['front', 0.5, 1],
+      ['hail', 0, -0.5],
+    ]);
+    // Without S-2 (planned 1,000, over by 1,000) 100 less of 3,800.
+    expect(answer.withoutOne).toMatchObject({ rebuild: { tag: 'S-2' } });
+    expect(answer.withoutOne?.value).toBeCloseTo(-10 / 380, 12);
+    expect(answer.soldOnly.pooled).toBeCloseTo(140 / 380, 12);
+    expect(answer.trends.overrun).toMatchObject({ n: 4, isThin: true, isCapped: false });
+    expect(answer.extras).toEqual({ rebuildCount: 0, cents: 0 });
+  });
+
   it('answers for the rebuilds that the filters let through', async () => {
     const { books, ask } = await openSmallShop();
     const one = await ask<OverrunsAnswer>(`overruns?class=${books.classId('pickup')}&seen=no`);
@@ -162,15 +181,34 @@ describe('time to sell', () => {
 
   it('shows what is still in hand, with the money in it as of today', async () => {
     const { ask } = await openSmallShop();
-    const { unsold, waits } = await ask<TimeToSellAnswer>('time-to-sell');
+    const { unsold } = await ask<TimeToSellAnswer>('time-to-sell');
     expect(unsold).toMatchObject({ on: '2026-06-15', total: 1, cents: 235_000 });
     expect(unsold.rebuilds[0]).toMatchObject({ tag: 'S-5', stage: 'listed', daysListed: 14, daysSinceBought: 106 });
-    expect(waits.map(({ wait, n, median }) => [wait, n, median])).toEqual([
+    expect(unsold.ages.map(({ fromDays, count, cents, oldest }) => [fromDays, count, cents, oldest?.tag])).toEqual([
+      [0, 0, 0, undefined],
+      [31, 0, 0, undefined],
+      [91, 1, 235_000, 'S-5'],
+      [181, 0, 0, undefined],
+      [366, 0, 0, undefined],
+    ]);
+  });
+
+  it('gives the days of each stage, and what one rebuild and an old sheet change', async () => {
+    const { ask } = await openSmallShop();
+    const { stages, classStages, soldOnly, withoutOne } = await ask<TimeToSellAnswer>('time-to-sell');
+    expect(stages.map(({ stage, n, median }) => [stage, n, median])).toEqual([
+      ['haul', 1, 2],
       ['queue', 1, 8],
       ['build', 1, 21],
       ['paper', 0, null],
+      ['listing', 0, null],
+      ['sell', 4, 30],
       ['held', 4, (70 + 89) / 2],
     ]);
+    expect(classStages.map(({ name }) => name)).toEqual(expect.arrayContaining(['SUV', 'pickup']));
+    expect(soldOnly).toEqual({ n: 3, median: 30 });
+    // Without one of those sold after 30 days exactly half are left then, and none after 70: half way between.
+    expect(withoutOne?.value).toBe(50);
   });
 
   it('filters years by the day of listing, so that the unsold stay in', async () => {

@@ -25,6 +25,7 @@ export const PAGES: readonly PageToShoot[] = [
   { name: 'import', path: 'import' },
   { name: 'one-import', path: 'import', follow: 'main a[href*="/import/"]' },
   { name: 'data-check', path: 'data-check' },
+  { name: 'definitions', path: 'definitions' },
   { name: 'people', path: 'people' },
   { name: 'shop', path: 'shop' },
 ];

@@ -1,6 +1,6 @@
 import type { FilterOptions, FilterQuery } from '#shared/contracts/answers-parts.ts';
 import type { Day } from '#shared/day.ts';
-import type { Named, ShopRebuild } from '../../books/shop-facts.ts';
+import type { Named, ShopFacts, ShopRebuild } from '../../books/shop-facts.ts';
 import { shopYearOf, yearSpan } from '../../domain/years.ts';
 import type { AnswerInput } from './input.ts';
 
@@ -13,12 +13,30 @@ const DAY: Record<YearOf, (rebuild: ShopRebuild) => Day | null> = {
 
 /** The rebuilds that a page's filters let through. With years asked for, one that is in no year yet stays out. */
 export function filtered({ shop }: AnswerInput, query: FilterQuery, yearOf: YearOf): ShopRebuild[] {
+  return letThrough(shop.rebuilds, shop, query, yearOf);
+}
+
+/** Those that left otherwise and that the filters would let through, where the address leaves them out. */
+export function otherExitsLeftOut(
+  { shop, otherExits }: AnswerInput,
+  query: FilterQuery,
+  yearOf: YearOf,
+): ShopRebuild[] {
+  return letThrough(otherExits, shop, query, yearOf);
+}
+
+function letThrough(
+  rebuilds: readonly ShopRebuild[],
+  shop: ShopFacts,
+  query: FilterQuery,
+  yearOf: YearOf,
+): ShopRebuild[] {
   const className = nameFor(shop.classes, query.class);
   const damageName = nameFor(shop.damages, query.damage);
   const [from, to] = [query.from ?? -Infinity, query.to ?? Infinity];
   const asksYears = query.from !== undefined || query.to !== undefined;
   const seen = { yes: true, no: false, unknown: null };
-  return shop.rebuilds.filter((rebuild) => {
+  return rebuilds.filter((rebuild) => {
     if (className !== undefined && rebuild.class !== className) return false;
     if (damageName !== undefined && rebuild.damage !== damageName) return false;
     if (query.seen !== undefined && rebuild.seen !== seen[query.seen]) return false;

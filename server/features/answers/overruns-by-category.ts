@@ -16,6 +16,7 @@ interface Found {
   readonly told: AgainstPlan[];
   readonly surprises: number[];
   readonly unbudgeted: number[];
+  extraCents: number;
 }
 
 /**
@@ -34,7 +35,7 @@ export function categoryOverruns(input: AnswerInput, rebuilds: readonly ShopRebu
   const idOf = new Map(input.shop.categories.map(({ id, name }) => [name, id]));
   return [...found]
     .sort(([a], [b]) => byCodePoint(a, b))
-    .map(([name, { planned, told, surprises, unbudgeted }]) => {
+    .map(([name, { planned, told, surprises, unbudgeted, extraCents }]) => {
       const { planSum, actualSum, ...spread } = spreadOf(planned);
       return {
         categoryId: idOf.get(name) ?? '',
@@ -46,6 +47,7 @@ export function categoryOverruns(input: AnswerInput, rebuilds: readonly ShopRebu
         parts: partsOf(told, sum(surprises)),
         unbudgetedCount: unbudgeted.length,
         unbudgetedCents: sum(unbudgeted),
+        extraCents,
         years: ratesByYear(planned, yearOf),
       };
     });
@@ -54,7 +56,7 @@ export function categoryOverruns(input: AnswerInput, rebuilds: readonly ShopRebu
 function categoryIn(found: Map<string, Found>, name: string): Found {
   const known = found.get(name);
   if (known) return known;
-  const category: Found = { planned: [], told: [], surprises: [], unbudgeted: [] };
+  const category: Found = { planned: [], told: [], surprises: [], unbudgeted: [], extraCents: 0 };
   found.set(name, category);
   return category;
 }
@@ -63,6 +65,7 @@ function take(category: Found, rebuild: ShopRebuild, name: string): void {
   const plan = rebuild.estimates.get(name) ?? 0;
   const spent = rebuild.categories.get(name);
   const actual = spent?.planningCents ?? 0;
+  category.extraCents += spent?.extraCents ?? 0;
   if (plan === 0) {
     if (actual !== 0) category.unbudgeted.push(actual);
     return;

@@ -1,22 +1,27 @@
 import type { z } from 'zod';
 import type { overrunsAnswerSchema } from '#shared/contracts/answers-overruns.ts';
-import { type FilterQuery, MARKS_AT_MOST } from '#shared/contracts/answers-parts.ts';
+import { type AnswerQuery, MARKS_AT_MOST } from '#shared/contracts/answers-parts.ts';
 import type { ShopRebuild } from '../../books/shop-facts.ts';
 import { isOverwritten } from '../../domain/sets.ts';
-import { sum, wilson } from '../../domain/statistics.ts';
+import { rebuildOverrun } from '../../domain/overrun.ts';
+import { ratioWithoutOne } from '../../domain/ratio-without-one.ts';
+import { ratio, sum, wilson } from '../../domain/statistics.ts';
 import { surpriseRate } from '../../domain/surprise-rate.ts';
 import { shopYearOf } from '../../domain/years.ts';
-import { filtered, filterOptions } from './filter.ts';
-import { type AnswerInput, leftOut } from './input.ts';
+import { filtered, filterOptions, otherExitsLeftOut } from './filter.ts';
+import { type AnswerInput, countedBy, leftOut, namedWithoutOne } from './input.ts';
 import { categoryOverruns } from './overruns-by-category.ts';
 import { exitYears, ratesByYear } from './overruns-by-year.ts';
 import { marksOf, partsOf } from './overruns-parts.ts';
+import { byDamage, keptByHour, lookedAt, seenDifference } from './overruns-seen.ts';
 import { type AgainstPlan, spreadOf } from './spread.ts';
+import { latestFirst, yearlyTrend } from './trends.ts';
 
 type Answer = z.input<typeof overrunsAnswerSchema>;
 
 /** Where does the money run over? (definitions §5, §6) */
-export function overrunsAnswer(input: AnswerInput, query: FilterQuery): Answer {
+export function overrunsAnswer(whole: AnswerInput, query: AnswerQuery): Answer {
+  const input = countedBy(whole, query.exits);
   const { shop, today } = input;
   const rebuilds = filtered(input, query, 'left');
   const done = rebuilds.filter(({ exit }) => exit !== null);
@@ -33,6 +38,7 @@ export function overrunsAnswer(input: AnswerInput, query: FilterQuery): Answer {
     filters: filterOptions(input, 'left'),
     leftOut: leftOut([
       ['not sold yet', rebuilds.filter(({ exit }) => exit === null)],
+      ['left otherwise than by sale', otherExitsLeftOut(input, query, 'left')],
       ['no estimate', kept.filter((one) => one.estimateCents === 0)],
       ['estimate written over with what it came to', overwritten],
       ['foreseen or surprise not said', done.filter(({ hasUnknownForeseen }) => hasUnknownForeseen)],
@@ -47,12 +53,60 @@ export function overrunsAnswer(input: AnswerInput, query: FilterQuery): Answer {
     categories: categoryOverruns(input, kept, isBinned),
     hours: hoursOf(input, timed, isBinned),
     surprises: surprisesOf(input, done),
-    seen: [true, false, null].map((seen) => {
-      const some = (list: readonly ShopRebuild[]) => list.filter((one) => one.seen === seen);
-      return { seen, ...inCents(some(set).map(againstPlan)), surprises: surpriseShare(some(done)) };
-    }),
+    extras: extrasOf(done),
+    seen: seenRows(set, done),
+    seenDifference: seenDifference(set, done),
+    damages: byDamage(input, set, done),
     years: byYear(set, shop.startMonth),
+    trends: trendsOf(set, timed),
+    withoutOne: namedWithoutOne(
+      input,
+      ratioWithoutOne(total.map(({ id, plan, actual }) => ({ id, x: plan, y: actual - plan }))),
+    ),
+    soldOnly: soldOnlyOf(set),
   };
+}
+
+function seenRows(set: readonly ShopRebuild[], done: readonly ShopRebuild[]): Answer['seen'] {
+  return [true, false, null].map((seen) => {
+    const some = (list: readonly ShopRebuild[]) => list.filter((one) => one.seen === seen);
+    const finished = some(done);
+    const { told, surprised } = lookedAt([], finished);
+    return {
+      seen,
+      ...inCents(some(set).map(againstPlan)),
+      surprises: wilson(surprised, told),
+      perHour: keptByHour(finished),
+    };
+  });
+}
+
+function extrasOf(done: readonly ShopRebuild[]): Answer['extras'] {
+  let [rebuildCount, cents] = [0, 0];
+  for (const { categories } of done) {
+    let own = 0;
+    for (const { extraCents } of categories.values()) own += extraCents;
+    if (own === 0) continue;
+    rebuildCount += 1;
+    cents += own;
+  }
+  return { rebuildCount, cents };
+}
+
+function trendsOf(set: readonly ShopRebuild[], timed: readonly ShopRebuild[]): Answer['trends'] {
+  return {
+    overrun: yearlyTrend(latestFirst(set), rebuildOverrun),
+    hours: yearlyTrend(latestFirst(timed), (one) => {
+      const { plan, actual } = hoursAgainstPlan(one);
+      return (actual - plan) / plan;
+    }),
+  };
+}
+
+function soldOnlyOf(set: readonly ShopRebuild[]): Answer['soldOnly'] {
+  const sold = set.filter(({ exit }) => exit?.kind === 'sold');
+  const plan = sum(sold.map((one) => one.estimateCents));
+  return { n: sold.length, pooled: ratio(sum(sold.map((one) => one.planningCents)) - plan, plan) };
 }
 
 function againstPlan(rebuild: ShopRebuild): AgainstPlan {
@@ -68,10 +122,12 @@ function hasBothHours({ plannedSeconds, ownSeconds, paidSeconds }: ShopRebuild):
   return !!plannedSeconds && ownSeconds !== null && paidSeconds !== null;
 }
 
+function hoursAgainstPlan({ id, plannedSeconds, ownSeconds, paidSeconds }: ShopRebuild): AgainstPlan {
+  return { id, plan: plannedSeconds ?? 0, actual: (ownSeconds ?? 0) + (paidSeconds ?? 0) };
+}
+
 function hoursOf(input: AnswerInput, timed: readonly ShopRebuild[], isBinned: boolean): Answer['hours'] {
-  const each = timed.map(({ id, plannedSeconds, ownSeconds, paidSeconds }) => {
-    return { id, plan: plannedSeconds ?? 0, actual: (ownSeconds ?? 0) + (paidSeconds ?? 0) };
-  });
+  const each = timed.map(hoursAgainstPlan);
   const { planSum, actualSum, ...spread } = spreadOf(each);
   const years = ratesByYear(each, exitYears(timed, input.shop.startMonth));
   return { ...spread, plannedSeconds: planSum, actualSeconds: actualSum, ...marksOf(input, each, isBinned), years };
@@ -93,12 +149,6 @@ function surprisesOf({ shop }: AnswerInput, done: readonly ShopRebuild[]): Answe
 
 function paidOn(rebuilds: readonly ShopRebuild[]): number {
   return sum(rebuilds.map(({ categories }) => sum([...categories.values()].map(({ paidCents }) => paidCents))));
-}
-
-function surpriseShare(done: readonly ShopRebuild[]): Answer['seen'][number]['surprises'] {
-  const told = done.filter(({ hasUnknownForeseen }) => !hasUnknownForeseen);
-  const surprised = told.filter(({ categories }) => [...categories.values()].some((one) => one.surpriseCount > 0));
-  return wilson(surprised.length, told.length);
 }
 
 function byYear(set: readonly ShopRebuild[], startMonth: number): Answer['years'] {

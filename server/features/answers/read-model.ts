@@ -34,5 +34,6 @@ export function inputOf(raw: RawDatabase, facts: ShopFacts, today: Day): AnswerI
     spentBy: (ids, on) => spentBy(raw, shop.shopId, ids, on),
     flowsOf: (ids) => pooledFlows(raw, shop.shopId, ids),
     rules: () => readRules(raw, shop.shopId),
+    otherExits: [],
   };
 }

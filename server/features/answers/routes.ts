@@ -14,7 +14,7 @@ import { whatPaysAnswer } from './what-pays.ts';
 import { yearAnswer } from './year.ts';
 
 export const answersRoutes: Route[] = [
-  route(answersApi.year, (ctx) => reply(ctx, (input) => yearAnswer(input, ctx.query.year))),
+  route(answersApi.year, (ctx) => reply(ctx, (input) => yearAnswer(input, ctx.query))),
   route(answersApi.whatPays, (ctx) => reply(ctx, (input) => whatPaysAnswer(input, ctx.query))),
   route(answersApi.overruns, (ctx) => reply(ctx, (input) => overrunsAnswer(input, ctx.query))),
   route(answersApi.timeToSell, (ctx) => reply(ctx, (input) => timeToSellAnswer(input, ctx.query))),

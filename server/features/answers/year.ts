@@ -1,5 +1,5 @@
 import type { z } from 'zod';
-import { MARKS_AT_MOST } from '#shared/contracts/answers-parts.ts';
+import { MARKS_AT_MOST, type YearQuery } from '#shared/contracts/answers-parts.ts';
 import type { yearAnswerSchema } from '#shared/contracts/answers-year.ts';
 import { type Day, dayFromParts } from '#shared/day.ts';
 import type { ShopFacts } from '../../books/shop-facts.ts';
@@ -8,15 +8,17 @@ import { completed } from '../../domain/sets.ts';
 import { sum } from '../../domain/statistics.ts';
 import { shopYearOf, shopYears, yearSpan, yearSpans } from '../../domain/years.ts';
 import { filterOptions } from './filter.ts';
-import { type AnswerInput, leftOut, rebuildOf } from './input.ts';
+import { type AnswerInput, countedBy, leftOut, rebuildOf } from './input.ts';
 import { perHourViews } from './per-hour-views.ts';
+import { soldOnlyOf, yearTrends, yearWithoutOne } from './year-judged.ts';
 import { lateOf, moneyOf, returnsOf, rowOf } from './year-parts.ts';
 import { yearSteps } from './year-steps.ts';
 
 type Answer = z.input<typeof yearAnswerSchema>;
 
-/** Did the work pay this year? `asked` = a shop year; without one, the year of today. */
-export function yearAnswer(input: AnswerInput, asked?: number): Answer {
+/** Did the work pay this year? The query asks for a shop year; without one, the year of today. */
+export function yearAnswer(whole: AnswerInput, { year: asked, exits: counted }: YearQuery): Answer {
+  const input = countedBy(whole, counted);
   const { shop, today, byId } = input;
   const year = asked ?? shopYearOf(today, shop.startMonth);
   const span = yearSpan(year, shop.startMonth);
@@ -33,6 +35,10 @@ export function yearAnswer(input: AnswerInput, asked?: number): Answer {
     rebuildCount: exits.length,
     filters: filterOptions(input, 'left'),
     leftOut: leftOut([
+      [
+        'left otherwise than by sale',
+        input.otherExits.filter(({ exit }) => exit && exit.on >= span.from && exit.on <= through),
+      ],
       ['purchase not known', exits.filter(({ purchaseCents }) => purchaseCents === null)],
       ['own hours not known', exits.filter(({ ownSeconds }) => !ownSeconds)],
       ['entry without a date', exits.filter(({ hasUndated }) => hasUndated)],
@@ -61,6 +67,9 @@ export function yearAnswer(input: AnswerInput, asked?: number): Answer {
       .map((one) => rowOf(rebuildOf(input, one.id), one.exit)),
     rebuildTotal: exits.length,
     years,
+    trends: yearTrends(shop.rebuilds),
+    withoutOne: yearWithoutOne(input, exits, keptCents),
+    soldOnly: soldOnlyOf(exits, own?.overheadCents ?? 0),
   };
 }
 

@@ -1,6 +1,11 @@
 import { useSearchParams } from 'react-router-dom';
-import { type FilterQuery, filterQuerySchema, yearQuerySchema } from '#shared/contracts/answers-parts.ts';
-import { LEVELS, type LevelName } from '#shared/vocabulary.ts';
+import {
+  type AnswerQuery,
+  type FilterQuery,
+  filterQuerySchema,
+  yearQuerySchema,
+} from '#shared/contracts/answers-parts.ts';
+import { LEVELS, type LevelName, PAY_VIEWS, type PayView } from '#shared/vocabulary.ts';
 
 const FILTERS = ['from', 'to', 'class', 'damage', 'seen'] as const;
 export type FilterName = (typeof FILTERS)[number];
@@ -19,6 +24,16 @@ export function filterOf(search: URLSearchParams): FilterQuery {
 export function yearOf(search: URLSearchParams): number | null {
   const read = yearQuerySchema.safeParse({ year: search.get('year') ?? undefined });
   return (read.success && read.data.year) || null;
+}
+
+/** `sold` where an address asks to count as an old sheet would. */
+export function exitsOf(search: URLSearchParams): AnswerQuery['exits'] {
+  return search.get('exits') === 'sold' ? 'sold' : undefined;
+}
+
+/** What an address asks to compare kinds of wreck by. */
+export function payViewOf(search: URLSearchParams): PayView {
+  return PAY_VIEWS.find((one) => one === search.get('view')) ?? 'per-hour';
 }
 
 /** The contingency level that an address asks for, written `4-5`. */
@@ -41,5 +56,7 @@ export function useAddress() {
       },
       { replace: true, preventScrollReset: true },
     );
-  return { search, filter: filterOf(search), change };
+  const filter = filterOf(search);
+  const exits = exitsOf(search);
+  return { search, filter, asked: exits === undefined ? filter : { ...filter, exits }, change };
 }

@@ -6,6 +6,7 @@ import { AnswerHeader } from '../../ui/answer-header.tsx';
 import { HowWorkedOut } from '../../ui/panel.tsx';
 import { usePageTitle } from '../../ui/page-title.ts';
 import { ErrorState, LoadingState } from '../../ui/states.tsx';
+import { OldSheetLine } from './old-sheet-line.tsx';
 import type { Said } from './sentences/parts.ts';
 import { Spoken } from './spoken.tsx';
 
@@ -19,6 +20,8 @@ type Props<Answer extends Head> = {
   filters: (answer: Answer) => ReactNode;
   say: (answer: Answer) => Said;
   howWorkedOut: (answer: Answer) => ReactNode;
+  /** What leaving out all but the sold would have said; a page without it has no such switch. */
+  oldSheet?: (answer: Answer) => string | null;
   children: (answer: Answer) => ReactNode;
 };
 
@@ -54,6 +57,7 @@ function Answered<Answer extends Head>(props: Props<Answer> & { answer: Answer }
         answer={<Spoken sentence={sentence} />}
         caution={cautions.length > 0 && unbroken(cautions.join(' '))}
       >
+        {props.oldSheet && <OldSheetLine says={props.oldSheet(answer)} />}
         <HowWorkedOut>{props.howWorkedOut(answer)}</HowWorkedOut>
       </AnswerHeader>
       {result.error && <ErrorState error={result.error} onRetry={() => void result.refetch()} />}

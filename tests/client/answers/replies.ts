@@ -1,6 +1,6 @@
 import type { ContingencyAnswer } from '#shared/contracts/answers-contingency.ts';
 import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
-import type { Head } from '#shared/contracts/answers-parts.ts';
+import type { Head, Trend } from '#shared/contracts/answers-parts.ts';
 import type { TimeToSellAnswer } from '#shared/contracts/answers-time-to-sell.ts';
 import type { YearAnswer } from '#shared/contracts/answers-year.ts';
 
@@ -28,6 +28,8 @@ export function head(rebuildCount = 12): Head {
 }
 
 const hours = (own: number) => own * 3600;
+/** Nothing to read a slope from. */
+export const NO_TREND: Trend = { n: 0, isCapped: false, slope: null, lower: null, upper: null, isThin: true };
 
 export function yearReply(changes: Partial<YearAnswer> = {}): YearAnswer {
   const kept = 1_842_000;
@@ -77,6 +79,9 @@ export function yearReply(changes: Partial<YearAnswer> = {}): YearAnswer {
       lateCents: 0,
       tiedUp,
     })),
+    trends: { perHour: NO_TREND, perRebuild: NO_TREND },
+    withoutOne: { kept: null, perHour: null },
+    soldOnly: { n: 9, keptCents: kept },
     ...changes,
   };
 }
@@ -108,6 +113,7 @@ export function category(name: string, n: number, rate: number, planned = 100_00
     parts: { n, overCents: Math.round(estimateCents * rate), surpriseCents: 0, knownCents: 0, surpriseShare: null },
     unbudgetedCount: 0,
     unbudgetedCents: 0,
+    extraCents: 0,
     years: [],
   };
 }
@@ -147,7 +153,13 @@ export function overrunsReply(n: number, rate: number, categories: Category[] = 
       shareOfWork: null,
       categories: [],
     },
+    extras: { rebuildCount: 0, cents: 0 },
     seen: [],
+    seenDifference: { overrun: null, surprised: null, perHour: null },
+    damages: [],
+    trends: { overrun: NO_TREND, hours: NO_TREND },
+    withoutOne: null,
+    soldOnly: { n, pooled: n === 0 ? null : rate },
     years: [],
   };
 }
@@ -173,8 +185,11 @@ export function timeToSellReply(overall: Partial<TimeToSellAnswer['overall']> = 
     },
     classes: [],
     comparison: null,
-    waits: [],
-    unsold: { on: '2026-11-30', total: 0, cents: 0, rebuilds: [] },
+    stages: [],
+    classStages: [],
+    withoutOne: null,
+    soldOnly: { n: 10, median: 26 },
+    unsold: { on: '2026-11-30', total: 0, cents: 0, ages: [], rebuilds: [] },
   };
 }
 

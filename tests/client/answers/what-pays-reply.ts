@@ -19,9 +19,12 @@ export function group(names: { class?: string; damage?: string }, n: number, val
     pulled: { weight: 0.8, value, standardError: half / 1.96, lower: value - half, upper: value + half },
     isThin: n < 5,
     rank: null,
-    profitCents: value * n * 10,
+    profitCents: Math.round(value * n * 10),
+    laborCents: 0,
     ownSeconds: 36_000 * n,
+    allSeconds: 36_000 * n,
     costCents: 100_000 * n,
+    withoutOne: null,
   };
 }
 
@@ -40,7 +43,11 @@ export function comparison(groups: readonly Group[], between = 1000): Comparison
 
 const NONE: Comparison = { n: 0, ungroupedCount: 0, withinVariance: null, average: null, groups: [] };
 
-export function whatPaysReply(fits: Partial<WhatPaysAnswer['perHour']>, n = 20): WhatPaysAnswer {
+export function whatPaysReply(
+  fits: Partial<WhatPaysAnswer['fits']>,
+  n = 20,
+  view: WhatPaysAnswer['view'] = 'per-hour',
+): WhatPaysAnswer {
   const three = { cells: NONE, classes: NONE, damages: NONE, ...fits };
   return {
     ...head(),
@@ -55,7 +62,16 @@ export function whatPaysReply(fits: Partial<WhatPaysAnswer['perHour']>, n = 20):
       returnOnCost: { n, pooled: 0.13, median: 0.12, mean: 0.14 },
     },
     views: perHour(n, 20_000 * n, 10 * n),
-    perHour: three,
-    returnOnCost: three,
+    view,
+    fits: three,
+    withoutOne: null,
+    oldSheet: {
+      bills: ['parts'],
+      old: { n, keptCents: 30_000 * n },
+      soldOnly: { n, keptCents: 20_000 * n },
+      whole: { n, keptCents: 20_000 * n },
+      classes: [],
+      damages: [],
+    },
   };
 }

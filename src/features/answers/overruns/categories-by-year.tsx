@@ -1,7 +1,7 @@
 import { useMemo } from 'react';
 import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
-import { Panel } from '../../../ui/panel.tsx';
+import { FoldedPanel } from '../../../ui/panel.tsx';
 import { type Column, Table } from '../../../ui/table.tsx';
 import { capital } from '../../../lib/capital.ts';
 import { byMoneyOver } from './strip-rows.ts';
@@ -23,13 +23,12 @@ export function CategoriesByYear({ answer }: { answer: OverrunsAnswer }) {
   const columns = useColumns(years.slice(-YEARS_SHOWN).join());
   if (years.length < 2) return null;
   return (
-    <Panel
-      className="mb-6"
+    <FoldedPanel
       title="Each category, year by year"
       subtitle="Sum over sum of the rebuilds that left in the year. A step that stays makes the figure over all years stale; gray rests on fewer than five: too few yet."
     >
       <Table caption="Overrun of each category by year" rows={rows} columns={columns} rowKey={(row) => row.key} />
-    </Panel>
+    </FoldedPanel>
   );
 }
 

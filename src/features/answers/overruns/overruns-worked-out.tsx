@@ -2,6 +2,7 @@ import { Link } from 'react-router-dom';
 import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { useShopPath } from '../rebuild-link.tsx';
+import { WorkedOutBasis } from '../worked-out-basis.tsx';
 import { worstCategories } from '../sentences/overruns.ts';
 
 /** Overrun in words, then with this shop's sums. */
@@ -43,6 +44,14 @@ export function OverrunsWorkedOut({ answer }: { answer: OverrunsAnswer }) {
         The rows: <a href="#rows">category by category</a>,{' '}
         <Link to={path('rebuilds?sort=overrun&order=down')}>rebuilds by overrun</Link>.
       </p>
+      <WorkedOutBasis
+        answer={answer}
+        n={total.n}
+        headline="the overrun of all together"
+        withoutOne={answer.withoutOne}
+        write={(rate) => format.signedPercent(rate, 2)}
+        definition="overrun"
+      />
     </>
   );
 }

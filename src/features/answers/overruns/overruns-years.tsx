@@ -1,7 +1,7 @@
 import { Link } from 'react-router-dom';
 import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
 import { Money, Percent } from '../../../ui/figures.tsx';
-import { Panel } from '../../../ui/panel.tsx';
+import { FoldedPanel } from '../../../ui/panel.tsx';
 import { type Column, Table } from '../../../ui/table.tsx';
 import { RangeText } from '../range-text.tsx';
 
@@ -12,13 +12,12 @@ export function OverrunsYears({ years }: { years: OverrunsAnswer['years'] }) {
   const rows = years.filter((row) => row.n > 0);
   if (rows.length < 2) return null;
   return (
-    <Panel
-      className="mb-6"
+    <FoldedPanel
       title="Year by year"
       subtitle="Is it getting better? Where the spreads of two years overlap, the step between them may be chance. A year opens with its own categories."
     >
       <Table caption="Overrun by year" rows={rows} columns={COLUMNS} rowKey={(row) => `${row.year}`} />
-    </Panel>
+    </FoldedPanel>
   );
 }
 

@@ -1,23 +1,42 @@
 import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
-import { Percent } from '../../../ui/figures.tsx';
+import { PerHour, Percent } from '../../../ui/figures.tsx';
+import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel } from '../../../ui/panel.tsx';
 import { type Column, Table } from '../../../ui/table.tsx';
 import { RangeText } from '../range-text.tsx';
+import { differenceWords, points } from '../sentences/judged.ts';
 
 type Row = OverrunsAnswer['seen'][number];
 
 const words = (row: Row) => (row.seen === null ? 'Not said' : row.seen ? 'Seen before buying' : 'Bought unseen');
 
-/** Does a look before buying go with fewer overruns and surprises? */
-export function SeenTable({ seen }: { seen: OverrunsAnswer['seen'] }) {
-  const rows = seen.filter((row) => row.n > 0);
+/** Does a look before buying go with fewer overruns and surprises, and with more by the hour? */
+export function SeenTable({ answer }: { answer: OverrunsAnswer }) {
+  const format = useFormatter();
+  const rows = answer.seen.filter((row) => row.n > 0);
+  const { overrun, surprised, perHour } = answer.seenDifference;
+  const inPoints = (rate: number) => points(rate, format);
+  const gaps = [
+    ['Overrun', differenceWords(overrun, inPoints)],
+    ['Had a surprise', differenceWords(surprised, inPoints)],
+    ['Kept an own hour', differenceWords(perHour, (cents) => format.signed(cents, 'never'))],
+  ] as const;
   if (rows.length === 0) return null;
   return (
     <Panel
       title="Seen against unseen"
-      subtitle="Goes with, not proves: cars that were looked at may differ in other ways too. Filter by damage to compare like with like."
+      subtitle="Goes with, not proves: cars that were looked at may differ in other ways too. Below, like is compared with like."
     >
       <Table caption="Seen against unseen" rows={rows} columns={COLUMNS} rowKey={words} />
+      <h3 className="mt-4 font-[660]">Unseen less seen, with its 95% range</h3>
+      <dl className="mt-1 grid gap-1 tabular-nums">
+        {gaps.map(([what, text]) => (
+          <div key={what} className="flex flex-wrap gap-x-2">
+            <dt className="text-soft">{what}</dt>
+            <dd>{text}</dd>
+          </div>
+        ))}
+      </dl>
     </Panel>
   );
 }
@@ -37,11 +56,11 @@ const COLUMNS: readonly Column<Row>[] = [
     ),
   },
   {
-    id: 'median',
-    header: 'Typical',
+    id: 'per-hour',
+    header: 'Kept an own hour',
     under: 'phone',
     number: true,
-    cell: (row) => <Percent rate={row.median} signed />,
+    cell: (row) => <PerHour cents={row.perHour.pooledCents} tone="kept" why="no hours" />,
   },
   {
     id: 'surprised',

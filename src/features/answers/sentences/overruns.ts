@@ -1,6 +1,7 @@
 import type { OverrunsAnswer } from '#shared/contracts/answers-overruns.ts';
 import type { Formatter } from '#shared/formatter.ts';
 import { capital } from '../../../lib/capital.ts';
+import { couldBeLuck, differenceWords, points } from './judged.ts';
 import { counted, mark, type Said, type Sentence, said, say, words } from './parts.ts';
 
 type Category = OverrunsAnswer['categories'][number];
@@ -76,12 +77,39 @@ function hoursWords(hours: OverrunsAnswer['hours'], format: Formatter): string |
   return `Hours run ${rate} ${way} plan${hours.isThin ? `, on ${counted(format, hours.n)}: too few yet` : ''}.`;
 }
 
-function seenWords({ seen }: OverrunsAnswer, format: Formatter): string | null {
+type Damage = OverrunsAnswer['damages'][number];
+
+/** `Front damage ran +29% seen and +42% unseen; all other +22% and +38%. …`: which of the two goes with the overrun. */
+export function lookOrDamage({ name, own, others, damageSeen, damageUnseen }: Damage, format: Formatter): string {
+  const rates = [own.seen, own.unseen, others.seen, others.unseen].map(({ pooled }) => pooled);
+  const [seen, unseen, otherSeen, otherUnseen] = rates.map((rate) =>
+    rate === null ? 'unknown' : format.signedPercent(rate),
+  );
+  const figures = `${capital(name)} damage ran ${seen} when seen before buying and ${unseen} unseen; all other ${otherSeen} and ${otherUnseen}.`;
+  const [a, b, c, d] = rates;
+  if (a == null || b == null || c == null || d == null) return `${figures} Too few to tell the look from the damage.`;
+  const isLuck = [damageSeen, damageUnseen].every((gap) => gap === null || couldBeLuck(gap));
+  const look = Math.min(b - a, d - c);
+  if (look > 0 && isLuck) {
+    return `${figures} In both the unseen bid runs further over; that ${name} damage differs from the rest could be luck.`;
+  }
+  return isLuck ? `${figures} That ${name} damage differs from the rest could be luck.` : figures;
+}
+
+/** What sold ones alone would have said, where it differs. */
+export function oldSheetOverruns({ soldOnly, total }: OverrunsAnswer, format: Formatter): string | null {
+  if (soldOnly.pooled === null || total.pooled === null || soldOnly.n === total.n) return null;
+  return `An old sheet, with sold ones only, would have said ${format.signedPercent(soldOnly.pooled)} over ${format.count(soldOnly.n, 'rebuild')}.`;
+}
+
+function seenWords({ seen, seenDifference }: OverrunsAnswer, format: Formatter): string | null {
   const of = (value: boolean) => seen.find((one) => one.seen === value && !one.isThin && one.pooled !== null);
   const looked = of(true);
   const unseen = of(false);
   if (!looked || !unseen) return null;
-  return `Cars seen before buying ran ${format.signedPercent(looked.pooled ?? 0)}, unseen ones ${format.signedPercent(unseen.pooled ?? 0)}.`;
+  const { overrun } = seenDifference;
+  const gap = overrun ? `: ${differenceWords(overrun, (rate) => points(rate, format))}` : '';
+  return `Cars seen before buying ran ${format.signedPercent(looked.pooled ?? 0)}, unseen ones ${format.signedPercent(unseen.pooled ?? 0)}${gap}.`;
 }
 
 function surpriseWords(surprises: OverrunsAnswer['surprises'], format: Formatter): string {

@@ -1,6 +1,7 @@
 import type { TimeToSellAnswer } from '#shared/contracts/answers-time-to-sell.ts';
 import type { Formatter } from '#shared/formatter.ts';
 import { capital } from '../../../lib/capital.ts';
+import { longestStage, whereTheDaysGo } from './stages.ts';
 import { counted, mark, type Said, type Sentence, said, say } from './parts.ts';
 
 /** How long until the money is back? The middle, and what is still unsold after 60 days. */
@@ -32,6 +33,13 @@ function noneSold({ overall }: TimeToSellAnswer, format: Formatter): Sentence {
   return say`None of the ${counted(format, overall.n, 'listed rebuild')} has sold so far${waited}.`;
 }
 
+/** What leaving out the unsold, and every other way out, would have said. null = nothing to say. */
+export function oldSheetSelling({ soldOnly, overall }: TimeToSellAnswer, format: Formatter): string | null {
+  const left = overall.n - soldOnly.n;
+  if (soldOnly.median === null || left <= 0) return null;
+  return `An old sheet, with sold ones only, would have said ${format.days(soldOnly.median)}: it leaves out the ${left === 1 ? 'one' : format.number(left)} that did not sell.`;
+}
+
 /** The first of 60 and 90 days at which some are still there. */
 function later({ overall }: TimeToSellAnswer, format: Formatter): Sentence {
   const share = overall.at60.unsold;
@@ -47,6 +55,7 @@ function cautions(answer: TimeToSellAnswer, format: Formatter): string[] {
     overall.median.days !== null && lower !== null && `The middle lies, 95% sure, ${between(lower, upper, format)}.`,
     unsold.total > 0 &&
       `${capital(counted(format, unsold.total))} in hand ${unsold.total === 1 ? 'holds' : 'hold'} ${format.money(unsold.cents)}.`,
+    overall.n > 0 && longestStage(answer.stages) !== null && whereTheDaysGo(answer, format),
     comparison(answer, format),
   );
 }
@@ -71,6 +80,6 @@ function comparison({ comparison: test }: TimeToSellAnswer, format: Formatter): 
   const pair = `${test.classA} and ${test.classB}`;
   const p = test.p < 0.001 ? 'p below 0.001' : `p = ${format.number(test.p, 3)}`;
   return test.p < 0.05
-    ? `${capital(pair)} do not sell alike (${p}).`
-    : `Between ${pair} the difference may well be chance (${p}).`;
+    ? `${capital(pair)} do not sell at the same speed: that is hardly luck (log-rank test, ${p}).`
+    : `That ${pair} sell at different speeds could be luck (log-rank test, ${p}).`;
 }

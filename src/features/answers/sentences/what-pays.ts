@@ -1,37 +1,40 @@
 import type { Comparison, WhatPaysAnswer } from '#shared/contracts/answers-what-pays.ts';
 import type { Formatter } from '#shared/formatter.ts';
+import type { PayView } from '#shared/vocabulary.ts';
 import { capital } from '../../../lib/capital.ts';
 import { counted, ENOUGH, listed, mark, type Said, type Sentence, said, say } from './parts.ts';
 import { wageWords } from './year.ts';
 
-export const PAY_VIEWS = ['per-hour', 'on-cost'] as const;
-export type PayView = (typeof PAY_VIEWS)[number];
 export type Group = Comparison['groups'][number];
 
-/** The fits that a view shows. */
-export function fitsOf(answer: WhatPaysAnswer, view: PayView) {
-  return view === 'per-hour' ? answer.perHour : answer.returnOnCost;
-}
+const PER: Record<PayView, string> = {
+  'per-hour': 'an hour',
+  'all-hours': "for each hour, anybody's",
+  'after-wage': 'a rebuild after the wage for own hours',
+  'on-cost': 'on cost',
+};
 
 /** A value of a view: `$21 an hour`, `14% on cost`. */
 export function payText(value: number, view: PayView, format: Formatter): string {
-  return `${payFigure(value, view, format)} ${view === 'per-hour' ? 'an hour' : 'on cost'}`;
+  return `${payFigure(value, view, format)} ${PER[view]}`;
 }
 
-function payFigure(value: number, view: PayView, format: Formatter): string {
-  return view === 'per-hour' ? format.money(value, 'never') : format.percent(value);
+/** A value of a view without what it is of. */
+export function payFigure(value: number, view: PayView, format: Formatter): string {
+  return view === 'on-cost' ? format.percent(value) : format.money(value, 'never');
 }
 
 /** Which wrecks pay? Kinds where there are enough of them, else damage and class each by itself. */
-export function sayWhatPays(answer: WhatPaysAnswer, view: PayView, format: Formatter): Said {
-  return { answer: sentence(answer, view, format), cautions: cautions(answer, view, format) };
+export function sayWhatPays(answer: WhatPaysAnswer, format: Formatter): Said {
+  return { answer: sentence(answer, format), cautions: cautions(answer, format) };
 }
 
-function sentence(answer: WhatPaysAnswer, view: PayView, format: Formatter): Sentence {
-  const fits = fitsOf(answer, view);
+function sentence(answer: WhatPaysAnswer, format: Formatter): Sentence {
+  const { fits, view } = answer;
   const { cells, classes, damages } = fits;
   if (answer.totals.n === 0) return ['Nothing has been finished yet, so nothing can be said of what pays.'];
-  if (cells.n === 0 && view === 'per-hour') return noHours(answer, format);
+  if (view === 'after-wage' && answer.views.afterWage.wantedCentsPerHour === null) return noWage(answer, format);
+  if (cells.n === 0 && view !== 'on-cost') return noHours(answer, format);
   const [first, second] = leads(fits);
   if (first) {
     const { best } = first.found;
@@ -39,7 +42,7 @@ function sentence(answer: WhatPaysAnswer, view: PayView, format: Formatter): Sen
     return say`${capital(nameOf(best))} ${bestAndLeast(first.found, view, format, true)}.${rest}`;
   }
   const enough = [...cells.groups, ...classes.groups, ...damages.groups].some((group) => !group.isThin);
-  return enough ? noDifference(answer, view, format) : tooFew(answer, format);
+  return enough ? noDifference(answer, format) : tooFew(answer, format);
 }
 
 type Extremes = { best: Group; worst: Group };
@@ -47,7 +50,7 @@ type Extremes = { best: Group; worst: Group };
 type Lead = { by: string | null; fit: Comparison; found: Extremes };
 
 /** What the answer quotes: kinds where they speak for most rebuilds, else the margins; nothing where no difference shows. */
-export function leads({ cells, classes, damages }: WhatPaysAnswer['perHour']): Lead[] {
+export function leads({ cells, classes, damages }: WhatPaysAnswer['fits']): Lead[] {
   const lead = (by: string | null, fit: Comparison) => {
     const found = extremes(fit);
     return found ? [{ by, fit, found }] : [];
@@ -90,12 +93,26 @@ function bestAndLeast({ best, worst }: Extremes, view: PayView, format: Formatte
   return say`${name}pays best, at ${most}; ${nameOf(worst)} ${low < 0 ? 'loses' : 'brings least,'} ${least}`;
 }
 
-function noDifference(answer: WhatPaysAnswer, view: PayView, format: Formatter): Sentence {
-  const { average } = fitsOf(answer, view).cells;
-  const value =
-    average?.mean ?? (view === 'per-hour' ? answer.views.own.pooledCents : answer.totals.returnOnCost.pooled);
+function noDifference(answer: WhatPaysAnswer, format: Formatter): Sentence {
+  const { view } = answer;
+  const value = answer.fits.cells.average?.mean ?? allTogether(answer);
   if (value === null) return ['No kind of wreck can be told from another yet.'];
   return say`No kind of wreck can be told from another yet: all together they bring ${mark(payText(value, view, format))}.`;
+}
+
+/** A view's figure of all finished rebuilds, sum over sum. */
+function allTogether({ view, views, totals }: WhatPaysAnswer): number | null {
+  const figures: Record<PayView, number | null> = {
+    'per-hour': views.own.pooledCents,
+    'all-hours': views.all.pooledCents,
+    'after-wage': views.afterWage.leftPerRebuildCents,
+    'on-cost': totals.returnOnCost.pooled,
+  };
+  return figures[view];
+}
+
+function noWage(answer: WhatPaysAnswer, format: Formatter): Sentence {
+  return say`No wanted pay per hour is set on the Shop page, so nothing can be said after a wage. ${inAll(answer, format)}`;
 }
 
 function noHours(answer: WhatPaysAnswer, format: Formatter): Sentence {
@@ -116,8 +133,9 @@ function inAll({ totals }: WhatPaysAnswer, format: Formatter): Sentence {
   return say`${all} ${verb} ${amount} so far.`;
 }
 
-function cautions(answer: WhatPaysAnswer, view: PayView, format: Formatter): string[] {
-  const { cells } = fitsOf(answer, view);
+function cautions(answer: WhatPaysAnswer, format: Formatter): string[] {
+  const { view } = answer;
+  const { cells } = answer.fits;
   if (cells.n === 0) return [];
   const thin = cells.groups.filter((group) => group.isThin).length;
   return said(
@@ -125,17 +143,31 @@ function cautions(answer: WhatPaysAnswer, view: PayView, format: Formatter): str
       `Figures are pulled toward the shop's average of ${payText(cells.average.mean, view, format)} where there are few rebuilds; ranges are 95% intervals of the mean, and the order goes by their lower end.`,
     thin > 0 &&
       `${capital(counted(format, thin, 'kind'))} of wreck ${thin === 1 ? 'has' : 'have'} fewer than ${format.number(ENOUGH)} rebuilds: too few yet.`,
-    surelyLosing(answer, view),
-    view === 'per-hour' ? wageWords(answer.views.afterWage, format) : 'Your own hours are not a cost here.',
+    surelyLosing(answer),
+    view === 'on-cost' ? 'Your own hours are not a cost here.' : wageWords(answer.views.afterWage, format),
     `Every way out counts, parted out and scrapped too; unsold ones do not.`,
   );
 }
 
 /** Margins and cells whose whole interval lies below zero. */
-function surelyLosing(answer: WhatPaysAnswer, view: PayView): string | null {
-  const { cells, classes, damages } = fitsOf(answer, view);
+function surelyLosing({ fits: { cells, classes, damages } }: WhatPaysAnswer): string | null {
   const losing = [...damages.groups, ...classes.groups, ...cells.groups].filter(
     (group) => group.rank !== null && (group.pulled?.upper ?? 0) < 0,
   );
   return losing.length === 0 ? null : `${capital(listed(losing.map(nameOf)))}: the whole range lies below zero.`;
+}
+
+const perCar = ({ n, keptCents }: WhatPaysAnswer['oldSheet']['old']) => keptCents / n;
+
+/** What a rebuild kept by the old sheet, by the whole books, and after a wage for own hours. null = nothing sold. */
+export function oldSheetPays({ oldSheet, views }: WhatPaysAnswer, format: Formatter): string | null {
+  const { old, whole, bills } = oldSheet;
+  if (old.n === 0 || whole.n === 0) return null;
+  const { wantedCentsPerHour: wage, leftPerRebuildCents: left } = views.afterWage;
+  const money = (cents: number) => format.money(cents, 'never');
+  const paid = wage === null || left === null ? '' : `; after ${format.money(wage)} for each own hour, ${money(left)}`;
+  return (
+    `An old sheet, with sold ones only and ${listed(['purchase', ...bills])} as their cost, would have said ` +
+    `${money(perCar(old))} a rebuild. Every bill and every way out leave ${money(perCar(whole))}${paid}.`
+  );
 }

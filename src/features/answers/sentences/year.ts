@@ -62,6 +62,7 @@ function cautions(answer: YearAnswer, format: Formatter): string[] {
     lossCount > 0 && lossWords(lossCount, n, format),
     late.count > 0 &&
       `${capital(counted(format, late.count, 'bill'))} came after the sale (${format.money(late.cents)}) and ${late.count === 1 ? 'is' : 'are'} counted here.`,
+    perRebuildWords(answer, format),
     wageWords(perHour.afterWage, format),
     perHour.own.missingCount > 0 &&
       perHour.own.n > 0 &&
@@ -93,6 +94,26 @@ function stillIn({ tiedUp, isRunning, to }: YearAnswer, format: Formatter): stri
 function lossWords(losses: number, n: number, format: Formatter): string {
   if (losses === n) return n === 1 ? 'It lost money.' : 'Every one of them lost money.';
   return `${capital(words(format, losses))} of the ${words(format, n)} lost money.`;
+}
+
+/** What the year would be said to have kept if only sales counted; null = nothing left otherwise. */
+export function oldSheetYear({ soldOnly, n, keptCents, year }: YearAnswer, format: Formatter): string | null {
+  if (soldOnly.n === n || soldOnly.n === 0) return null;
+  const verb = (cents: number) => (cents < 0 ? 'lost' : 'kept');
+  const amount = (cents: number) => format.money(Math.abs(cents));
+  return (
+    `An old sheet, with sold ones only, would have said that ${year} ${verb(soldOnly.keptCents)} ${amount(soldOnly.keptCents)}; ` +
+    `with every way out it ${verb(keptCents)} ${amount(keptCents)}.`
+  );
+}
+
+/** `$1,364 a rebuild; after $25 for each own hour, −$216.` null = nothing to divide. */
+export function perRebuildWords({ n, profitCents, perHour }: YearAnswer, format: Formatter): string | null {
+  if (n === 0) return null;
+  const { wantedCentsPerHour: wage, leftPerRebuildCents: left } = perHour.afterWage;
+  const money = (cents: number) => format.money(cents, 'never');
+  const paid = wage === null || left === null ? '' : `; after ${format.money(wage)} for each own hour, ${money(left)}`;
+  return `Before overhead it is ${money(profitCents / n)} a rebuild${paid}.`;
 }
 
 /** What the wanted pay for own hours would leave; nothing without a wage or hours. */

@@ -3,6 +3,7 @@ import type { TimeToSellAnswer } from '#shared/contracts/answers-time-to-sell.ts
 import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { type Column, Table } from '../../../ui/table.tsx';
 import { useShopPath } from '../rebuild-link.tsx';
+import { WorkedOutBasis } from '../worked-out-basis.tsx';
 
 type Step = TimeToSellAnswer['overall']['steps'][number];
 /** So many first steps are enough to see how it goes on. */
@@ -43,6 +44,14 @@ export function SellingWorkedOut({ answer }: { answer: TimeToSellAnswer }) {
         <Link to={path('rebuilds?stage=sold')}>sold rebuilds</Link>,{' '}
         <Link to={path('rebuilds?stage=listed')}>those listed now</Link>.
       </p>
+      <WorkedOutBasis
+        answer={answer}
+        n={overall.n}
+        headline="the middle"
+        withoutOne={answer.withoutOne}
+        write={(days) => `${format.number(days, days % 1 === 0 ? 0 : 1)} days`}
+        definition="days-to-sell"
+      />
     </>
   );
 }

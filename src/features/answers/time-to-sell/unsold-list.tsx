@@ -4,7 +4,7 @@ import { DataTable } from '../../../ui/data-table.tsx';
 import { Days, Money } from '../../../ui/figures.tsx';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel } from '../../../ui/panel.tsx';
-import type { Column } from '../../../ui/table.tsx';
+import { type Column, Table } from '../../../ui/table.tsx';
 import { RebuildLink } from '../rebuild-link.tsx';
 
 type Row = TimeToSellAnswer['unsold']['rebuilds'][number];
@@ -23,10 +23,41 @@ export function UnsoldList({ unsold }: { unsold: TimeToSellAnswer['unsold'] }) {
       title={`Still in hand on ${format.day(unsold.on)}`}
       subtitle={`${format.count(unsold.total, 'rebuild')} ${unsold.total === 1 ? 'holds' : 'hold'} ${format.money(unsold.cents)}: purchase and what was paid so far.${part}`}
     >
+      <Ages ages={unsold.ages} />
       <DataTable caption="Unsold rebuilds" rows={unsold.rebuilds} columns={COLUMNS} rowKey={(row) => row.id} />
     </Panel>
   );
 }
+
+/** How old the money is: since the purchase, the oldest first. */
+function Ages({ ages }: { ages: TimeToSellAnswer['unsold']['ages'] }) {
+  const rows = ages.map((age, at) => ({ ...age, toDays: ages[at + 1]?.fromDays ?? null })).toReversed();
+  const held = rows.filter(({ count }) => count > 0);
+  return (
+    <div className="mb-5">
+      <Table caption="How old the money is" rows={held} columns={AGE_COLUMNS} rowKey={(row) => `${row.fromDays}`} />
+    </div>
+  );
+}
+
+type Age = TimeToSellAnswer['unsold']['ages'][number] & { toDays: number | null };
+
+const AGE_COLUMNS: readonly Column<Age>[] = [
+  {
+    id: 'age',
+    header: 'Days since bought',
+    heads: true,
+    cell: ({ fromDays, toDays }) => (toDays === null ? `${fromDays} and more` : `${fromDays} to ${toDays - 1}`),
+  },
+  { id: 'count', header: 'Rebuilds', number: true, cell: (row) => row.count },
+  {
+    id: 'oldest',
+    header: 'Oldest of them',
+    under: 'phone',
+    cell: (row) => row.oldest && <RebuildLink rebuild={row.oldest} />,
+  },
+  { id: 'money', header: 'Money in them', number: true, cell: (row) => <Money cents={row.cents} /> },
+];
 
 const COLUMNS: readonly Column<Row>[] = [
   {

@@ -18,7 +18,7 @@ export function cellOf(group: Group | undefined, href: (group: Group) => string)
 }
 
 /** Classes down and damage across, in the shop's own order; only those that occur. */
-export function gridOf(fits: WhatPaysAnswer['perHour'], options: WhatPaysAnswer['filters']) {
+export function gridOf(fits: WhatPaysAnswer['fits'], options: WhatPaysAnswer['filters']) {
   const inOrder = (list: readonly { id: string; name: string }[], found: Comparison, key: 'classId' | 'damageId') =>
     list.flatMap(({ id, name }) => {
       const margin = found.groups.find((group) => group[key] === id);

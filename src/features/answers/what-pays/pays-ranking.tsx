@@ -1,6 +1,7 @@
 import { useMemo } from 'react';
 import { Link } from 'react-router-dom';
 import type { WhatPaysAnswer } from '#shared/contracts/answers-what-pays.ts';
+import type { PayView } from '#shared/vocabulary.ts';
 import { Hours, Money } from '../../../ui/figures.tsx';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel } from '../../../ui/panel.tsx';
@@ -9,8 +10,9 @@ import { type Column, Table } from '../../../ui/table.tsx';
 import { useAddress } from '../address.ts';
 import { useShopPath } from '../rebuild-link.tsx';
 import { capital } from '../../../lib/capital.ts';
-import { fitsOf, type Group, nameOf, type PayView } from '../sentences/what-pays.ts';
+import { type Group, nameOf } from '../sentences/what-pays.ts';
 import { figureOf, groupSearch, inRank } from './groups.ts';
+import { VIEW_WORDS } from './view-words.ts';
 
 const SETS = [
   { value: 'damages', label: 'By damage' },
@@ -20,10 +22,10 @@ const SETS = [
 type SetName = (typeof SETS)[number]['value'];
 
 /** Kinds in the order of the lower end of their range, the plain figure and the sums beside it. */
-export function PaysRanking({ answer, view }: { answer: WhatPaysAnswer; view: PayView }) {
+export function PaysRanking({ answer }: { answer: WhatPaysAnswer }) {
   const { search, change } = useAddress();
   const by: SetName = SETS.find(({ value }) => value === search.get('by'))?.value ?? 'damages';
-  const fits = fitsOf(answer, view);
+  const { fits, view } = answer;
   const { groups, average } = fits[by];
   const columns = useColumns(view);
   if (SETS.every(({ value }) => fits[value].groups.length === 0)) return null;
@@ -59,9 +61,9 @@ export function PaysRanking({ answer, view }: { answer: WhatPaysAnswer; view: Pa
 function useColumns(view: PayView): readonly Column<Group>[] {
   const format = useFormatter();
   const path = useShopPath();
-  const isHour = view === 'per-hour';
   return useMemo(() => {
-    const write = (value: number) => (isHour ? format.money(value, 'never') : format.percent(value, 1));
+    const isCost = view === 'on-cost';
+    const write = (value: number) => (isCost ? format.percent(value, 1) : format.money(value, 'never'));
     const gray = (row: Group, text: string) => <span className={row.isThin ? 'text-soft' : ''}>{text}</span>;
     return [
       { id: 'rank', header: 'Rank', number: true, cell: (row) => row.rank ?? '' },
@@ -78,7 +80,7 @@ function useColumns(view: PayView): readonly Column<Group>[] {
       { id: 'n', header: 'Rebuilds', under: 'phone', number: true, cell: (row) => row.n },
       {
         id: 'value',
-        header: isHour ? 'Kept an hour, pulled' : 'On cost, pulled',
+        header: VIEW_WORDS[view].header,
         number: true,
         cell: (row) => (row.isThin ? gray(row, 'too few yet') : <strong>{write(figureOf(row).value)}</strong>),
       },
@@ -106,21 +108,18 @@ function useColumns(view: PayView): readonly Column<Group>[] {
         number: true,
         cell: (row) => <Money cents={row.profitCents} tone="kept" />,
       },
-      isHour
-        ? {
-            id: 'hours',
-            header: 'Own hours',
-            under: 'tablet',
-            number: true,
-            cell: (row) => <Hours seconds={row.ownSeconds} />,
-          }
-        : {
-            id: 'cost',
-            header: 'All-in cost',
-            under: 'tablet',
-            number: true,
-            cell: (row) => <Money cents={row.costCents} />,
-          },
+      {
+        id: 'over',
+        header: isCost ? 'All-in cost' : view === 'all-hours' ? 'All hours' : 'Own hours',
+        under: 'tablet',
+        number: true,
+        cell: (row) =>
+          isCost ? (
+            <Money cents={row.costCents} />
+          ) : (
+            <Hours seconds={view === 'all-hours' ? row.allSeconds : row.ownSeconds} />
+          ),
+      },
     ] satisfies Column<Group>[];
-  }, [format, path, isHour]);
+  }, [format, path, view]);
 }

@@ -1,14 +1,15 @@
 import { Link } from 'react-router-dom';
 import type { YearAnswer } from '#shared/contracts/answers-year.ts';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
-import { useShopPath } from '../rebuild-link.tsx';
+import { RebuildLink, useShopPath } from '../rebuild-link.tsx';
+import { WorkedOutBasis } from '../worked-out-basis.tsx';
 
 /** The year's formula in words, then with this shop's figures, then where the rows stand. */
 export function YearWorkedOut({ answer }: { answer: YearAnswer }) {
   const format = useFormatter();
   const path = useShopPath();
   const exact = (cents: number) => format.money(cents, 'always');
-  const { money, perHour, year } = answer;
+  const { money, perHour, year, withoutOne } = answer;
   const work = money.categories.reduce((sum, one) => sum + one.cents, 0);
   const { own } = perHour;
   return (
@@ -34,6 +35,20 @@ export function YearWorkedOut({ answer }: { answer: YearAnswer }) {
         <Link to={path(`ledger?rebuild=none&from=${answer.from}&to=${answer.through}`)}>overhead of the year</Link>,{' '}
         <Link to={path(`rebuilds?year=${year}`)}>the same rebuilds in the list</Link>.
       </p>
+      <WorkedOutBasis
+        answer={answer}
+        n={answer.n}
+        headline="what was kept"
+        withoutOne={withoutOne.kept}
+        write={exact}
+        definition="kept"
+      />
+      {withoutOne.perHour && (
+        <p className="tabular-nums">
+          By the hour it is <RebuildLink rebuild={withoutOne.perHour.rebuild} short />: without it{' '}
+          {exact(Math.round(withoutOne.perHour.value))}.
+        </p>
+      )}
     </>
   );
 }

@@ -9,6 +9,7 @@ import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel } from '../../../ui/panel.tsx';
 import { type Column, Table } from '../../../ui/table.tsx';
 import { words } from '../sentences/parts.ts';
+import { type TrendRow, TrendsTable } from '../trends-table.tsx';
 
 type Row = YearAnswer['years'][number];
 
@@ -39,8 +40,20 @@ export function YearsTable({ answer }: { answer: YearAnswer }) {
         rowKey={(row) => `${row.year}`}
         rowProps={(row) => (row.year === answer.year ? { 'data-strong': '' } : {})}
       />
+      <div className="mt-6">
+        <TrendsTable rows={trendRows(answer, format)} />
+      </div>
     </Panel>
   );
+}
+
+/** Over all years, whichever is shown. */
+function trendRows({ trends }: YearAnswer, format: Formatter): TrendRow[] {
+  const write = (cents: number) => format.signed(cents, 'never');
+  return [
+    { what: 'Kept an own hour', trend: trends.perHour, better: 'up', write },
+    { what: 'Kept a rebuild', trend: trends.perRebuild, better: 'up', write },
+  ];
 }
 
 /** Years in their order; what left in each, and which one is not over. */

@@ -75,6 +75,10 @@ test('two classes differ only where chance is unlikely', () => {
   };
   const cautions = (p: number) =>
     sayTimeToSell({ ...timeToSellReply(), comparison: { ...test, p } }, format).cautions.at(-1);
-  expect(cautions(0.126)).toBe('Between compact car and small SUV the difference may well be chance (p = 0.126).');
-  expect(cautions(0.01)).toBe('Compact car and small SUV do not sell alike (p = 0.01).');
+  expect(cautions(0.126)).toBe(
+    'That compact car and small SUV sell at different speeds could be luck (log-rank test, p = 0.126).',
+  );
+  expect(cautions(0.01)).toBe(
+    'Compact car and small SUV do not sell at the same speed: that is hardly luck (log-rank test, p = 0.01).',
+  );
 });

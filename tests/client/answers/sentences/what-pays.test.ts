@@ -1,12 +1,11 @@
 import { expect, test } from 'vitest';
 import { createFormatter } from '#shared/formatter.ts';
 import { plain } from '../../../../src/features/answers/sentences/parts.ts';
-import { sayWhatPays } from '../../../../src/features/answers/sentences/what-pays.ts';
+import { oldSheetPays, sayWhatPays } from '../../../../src/features/answers/sentences/what-pays.ts';
 import { comparison, group, whatPaysReply } from '../what-pays-reply.ts';
 
 const format = createFormatter({ currency: 'USD', locale: 'en-US' });
-const say = (reply: ReturnType<typeof whatPaysReply>, view: 'per-hour' | 'on-cost' = 'per-hour') =>
-  plain(sayWhatPays(reply, view, format).answer);
+const say = (reply: ReturnType<typeof whatPaysReply>) => plain(sayWhatPays(reply, format).answer);
 
 const hailSuv = group({ class: 'SUV', damage: 'hail' }, 8, 5_200);
 const floodSmall = group({ class: 'small car', damage: 'flood' }, 6, -800);
@@ -21,7 +20,6 @@ test('kinds with enough rebuilds are named, best and least', () => {
 test('a kind with too few is never named, however well it did', () => {
   const { answer, cautions } = sayWhatPays(
     whatPaysReply({ cells: comparison([hailSuv, floodSmall, rearVan]) }),
-    'per-hour',
     format,
   );
   expect(plain(answer)).not.toContain('van');
@@ -41,7 +39,7 @@ test('where most kinds have too few, damage and class each speak for all', () =>
 
 test('a group whose whole range is below zero is called out', () => {
   const reply = whatPaysReply({ cells: comparison([hailSuv, floodSmall]) });
-  expect(sayWhatPays(reply, 'per-hour', format).cautions).toContain(
+  expect(sayWhatPays(reply, format).cautions).toContain(
     'Small car with flood damage: the whole range lies below zero.',
   );
 });
@@ -72,7 +70,33 @@ test('on cost it speaks in percent', () => {
     group({ class: 'SUV', damage: 'hail' }, 8, 0.31, 0.1),
     group({ class: 'van', damage: 'rear' }, 6, 0.02, 0.1),
   ]);
-  expect(say(whatPaysReply({ cells }), 'on-cost')).toBe(
+  expect(say(whatPaysReply({ cells }, 20, 'on-cost'))).toBe(
     'SUV with hail damage pays best, at 31% on cost; van with rear damage brings least, 2%.',
   );
+});
+
+test('after a wage it speaks of a rebuild, and says where no wage is set', () => {
+  const cells = comparison([
+    group({ class: 'SUV', damage: 'hail' }, 8, 90_000),
+    group({ class: 'van', damage: 'rear' }, 6, -40_000),
+  ]);
+  const reply = whatPaysReply({ cells }, 20, 'after-wage');
+  expect(say(reply)).toMatch(/^No wanted pay per hour is set on the Shop page/);
+  const afterWage = { ...reply.views.afterWage, wantedCentsPerHour: 2500, leftCents: -1, leftPerRebuildCents: -1 };
+  expect(say({ ...reply, views: { ...reply.views, afterWage } })).toBe(
+    'SUV with hail damage pays best, at $900 a rebuild after the wage for own hours; van with rear damage loses $400.',
+  );
+});
+
+test('the old sheet stands beside the whole books, and after the wage', () => {
+  const reply = whatPaysReply({});
+  expect(oldSheetPays(reply, format)).toBe(
+    'An old sheet, with sold ones only and purchase and parts as their cost, would have said $300 a rebuild. ' +
+      'Every bill and every way out leave $200.',
+  );
+  const afterWage = { ...reply.views.afterWage, wantedCentsPerHour: 2500, leftPerRebuildCents: -35_500 };
+  expect(oldSheetPays({ ...reply, views: { ...reply.views, afterWage } }, format)).toMatch(
+    /leave \$200; after \$25 for each own hour, −\$355\.$/,
+  );
+  expect(oldSheetPays({ ...reply, oldSheet: { ...reply.oldSheet, old: { n: 0, keptCents: 0 } } }, format)).toBeNull();
 });

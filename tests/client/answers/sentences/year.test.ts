@@ -107,6 +107,7 @@ describe('what a careful friend adds', () => {
       'One is left out: the purchase price is not known.',
       'One of the three lost money.',
       'One bill came after the sale ($282) and is counted here.',
+      'Before overhead it is $6,140 a rebuild.',
       'Three rebuilds are too few yet to judge a year by.',
     ]);
   });

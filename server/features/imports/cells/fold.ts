@@ -5,6 +5,8 @@ export function fold(text: string): string {
     .replace(/\p{M}+/gu, '')
     .toLowerCase()
     .replaceAll('ß', 'ss')
+    .replaceAll('œ', 'oe')
+    .replaceAll('æ', 'ae')
     .replace(/[^\p{L}\p{N}]+/gu, ' ')
     .trim();
 }

@@ -8,7 +8,8 @@ export type Money = number | 'blank' | 'bad' | 'rough';
 const NOTHING = new Set(['-', '–', '—', 'n/a', 'na', 'free', 'none', 'gratis', 'umsonst', 'kostenlos', 'nil']);
 const ROUGH =
   /^(?:~|≈|ca\.?|circa|about|approx\.?|around|roughly|etwa|rund|ungefähr|unos|aprox\.?|environ|env\.?)|(?:ish|\?|k|or so)$|\d\s*[x×*@]\s*\d/i;
-const SIGN = /[$€£¥]|\b(?:USD|EUR|GBP|CAD|AUD|NZD|CHF|SEK|NOK|DKK|PLN|CZK|MXN|Kč|kr|zł)\b\.?/gi;
+const SIGN =
+  /(?:\b(?:US|CA|AU|NZ|MX|C|A))?[$€£¥]|\b(?:USD|EUR|GBP|CAD|AUD|NZD|CHF|SEK|NOK|DKK|PLN|CZK|MXN|Kč|kr|zł)\b\.?/gi;
 
 /** Reads money as typed, with this decimal mark. `isCostCell`: `-`, `n/a`, `free` mean that nothing was spent. */
 export function moneyReader(decimal: DecimalMark): (text: string, isCostCell?: boolean) => Money {

@@ -20,6 +20,8 @@ export interface ExpenseCells {
   readonly on: Day | 'bad' | 'blank';
   readonly paid: CellMoney;
   readonly back: CellMoney;
+  /** What was planned for the kind of cost of this row. */
+  readonly planned: CellMoney;
   /** An amount or a day is only said roughly. */
   readonly isRough: boolean;
   readonly target: VehicleTarget | undefined;
@@ -47,6 +49,7 @@ export function expenseColumns(plan: Plan) {
     foreseen: col('foreseen'),
     amount: col('amount'),
     credit: col('credit'),
+    planned: col('estimate'),
     hours: col('hours'),
     person: col('person'),
     name: col('vehicle') || col('stock number') || col('model'),
@@ -91,6 +94,7 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
       on: days.next(dateCell),
       paid: cellMoney(plan, cell(cols.amount)),
       back: cellMoney(plan, cell(cols.credit)),
+      planned: cellMoney(plan, cell(cols.planned)),
       isRough: days.isGuess || isRough(plan, cell(cols.amount)) || isRough(plan, cell(cols.credit)),
       target: plan.vehicles.get(name),
       meaning: meaningOf(cell(cols.category).trim(), what),
@@ -119,12 +123,20 @@ export function expenseFault(row: ExpenseCells, cols: ExpenseColumns, isRepeat: 
   if (on === 'bad' || (on === 'blank' && target === 'overhead')) return { reason: 'bad-date', col: cols.date };
   if (typeof paid === 'string' && paid !== 'blank') return { reason: paid, col: cols.amount };
   if (typeof back === 'string' && back !== 'blank') return { reason: back, col: cols.credit };
-  if (paid === 'blank' && back === 'blank' && row.ownSeconds === null)
+  if (paid === 'blank' && back === 'blank' && row.ownSeconds === null && !isPlanned(row))
     return { reason: 'missing-amount', col: cols.amount || cols.credit };
   if ((row.what?.length ?? 0) > LONGEST.what) return { reason: 'cell-too-long', col: cols.what };
   if ((row.vendor?.length ?? 0) > LONGEST.vendor) return { reason: 'cell-too-long', col: cols.vendor };
   return factFault(row, cols);
 }
+
+/** Does a row say what was planned for a kind of cost of a rebuild? */
+export const isPlanned = ({ planned, target, meaning }: ExpenseCells) =>
+  typeof planned === 'number' &&
+  planned > 0 &&
+  typeof target === 'object' &&
+  meaning?.category !== PURCHASE &&
+  meaning?.category !== SALE;
 
 /** A purchase or sale needs a rebuild, and one of which the books do not hold it already. */
 function factFault({ target, meaning }: ExpenseCells, cols: ExpenseColumns): Fault | null {

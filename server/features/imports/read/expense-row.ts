@@ -2,7 +2,7 @@ import { remembered } from '../cells/fold.ts';
 import { PURCHASE, SALE } from '../words/categories.ts';
 import { foreseenOf } from '../words/kinds.ts';
 import { isRefund } from '../words/refunds.ts';
-import { type ExpenseCells, expenseCellReader, expenseColumns, expenseFault } from './expense-cells.ts';
+import { type ExpenseCells, expenseCellReader, expenseColumns, expenseFault, isPlanned } from './expense-cells.ts';
 import { type DraftLine, notData, type Plan, putAside, type RowRead, type RowReader, taken } from './plan.ts';
 import { filled, totalLabel } from './row-kinds.ts';
 import type { ColumnSums } from './sums.ts';
@@ -26,6 +26,7 @@ export function expenseRowReader(plan: Plan, sums: ColumnSums): RowReader {
     const came = said(cols.foreseen > 0 ? (cells[cols.foreseen - 1] ?? '').trim() : '');
     const lines: DraftLine[] = [];
     const isBack = row.back === 'blank' && isTypedPositive(row);
+    if (isPlanned(row)) lines.push(plannedOf(row, line, cols.planned));
     if (typeof row.paid === 'number')
       lines.push(lineOf(row, isBack ? -row.paid : row.paid, { line, col: cols.amount, isBack, ...came }));
     if (typeof row.back === 'number')
@@ -53,6 +54,11 @@ function workOf(row: ExpenseCells, line: number, col: number): DraftLine {
     person,
     isGuess: false,
   };
+}
+
+function plannedOf(row: ExpenseCells, line: number, col: number): DraftLine {
+  const from = { line, col, foreseen: null, isExtra: false, isBack: false };
+  return { ...lineOf(row, typeof row.planned === 'number' ? row.planned : 0, from), kind: 'estimate', vendor: null };
 }
 
 /** A refund whose words say so while its amount says nothing of it. */

@@ -1,4 +1,5 @@
 import type { Meaning } from '#shared/contracts/import-reading.ts';
+import { looksLikeDay } from '../cells/days.ts';
 import { aboutHours, readHours } from '../cells/hours.ts';
 import { PURCHASE, SALE, tradeMeaning } from '../words/categories.ts';
 import { categoryGuesser } from '../words/infer-category.ts';
@@ -104,7 +105,7 @@ function sectionCellReader(plan: Plan) {
       planned: typeof planned === 'number' ? planned : null,
       plannedCol: col('estimate'),
       isWork,
-      date: cell('date') || (columns ? '' : dayInside(cells)),
+      date: cell('date') || (columns && !isSale ? '' : dayInside(cells)),
       seconds: typeof seconds === 'number' ? seconds : null,
       isBadTime: exact === 'bad' && seconds === null,
       cents: typeof paid === 'number' ? paid : typeof back === 'number' ? -back : null,
@@ -132,14 +133,17 @@ function faultOf(row: SectionCells, isBadDay: boolean): RowRead | null {
 
 /** A day that stands beside words in one cell: `sold 6/19/2019`. '' = none. */
 function dayInside(cells: readonly string[]): string {
-  const first = cells.find((cell) => cell.trim() !== '') ?? '';
+  const first = cells.find((cell) => cell.trim() !== '' && !looksLikeDay(cell)) ?? '';
   return /\d{4}-\d\d-\d\d|\d{1,2}[-/.]\d{1,2}[-/.]\d{2,4}/.exec(first)?.[0] ?? '';
 }
 
+const SMALL = /\s(?:am|on|le|el|for|to|für|an|por|pour|à|a)(?=\s|$)/gi;
+
 /** Does the first word of a row say that it is the sale? */
 function isSaleRow(cells: readonly string[]): boolean {
-  const first = cells.find((cell) => cell.trim() !== '') ?? '';
-  const meaning = tradeMeaning(first.replace(/[\d/.:-]+/g, ' '));
+  const first = cells.find((cell) => cell.trim() !== '' && !looksLikeDay(cell)) ?? '';
+  const words = first.replace(/[\d/.:-]+/g, ' ').replace(SMALL, ' ');
+  const meaning = tradeMeaning(words);
   return meaning?.meaning === SALE && meaning.isExact;
 }
 

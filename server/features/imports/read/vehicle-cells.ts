@@ -1,5 +1,6 @@
 import type { Column, Meaning, RebuildFound } from '#shared/contracts/import-reading.ts';
 import type { AsideReason } from '#shared/contracts/import-words.ts';
+import { isNotYet } from '../cells/days.ts';
 import { aboutHours, readHours } from '../cells/hours.ts';
 import { remembered } from '../cells/fold.ts';
 import { makeOf } from '../words/vehicles.ts';
@@ -60,7 +61,8 @@ function takerOf(plan: Plan, column: Column): Take | null {
   if (FIGURES.has(meaning)) return moneyTaker(plan, column);
   if (meaning === 'hours' || meaning === 'estimated hours') return hoursTaker(column);
   const dayOf = plan.days.get(column.col);
-  if (dayOf) return (cell, row) => take(dayOf(cell), (day) => (row.dates[meaning] = day), 'bad-date');
+  if (dayOf)
+    return (cell, row) => take(isNotYet(cell) ? 'blank' : dayOf(cell), (day) => (row.dates[meaning] = day), 'bad-date');
   const field = TEXTS[meaning];
   if (field) return textTaker(field);
   return factTaker(plan, meaning);

@@ -1,6 +1,7 @@
 import type { Meaning } from '#shared/contracts/import-reading.ts';
 import type { Shape } from '#shared/contracts/import-words.ts';
 import { headingMeanings, headingRank, likelyMeanings, plannedPart } from '../words/headings.ts';
+import { tradeMeaning } from '../words/categories.ts';
 import { weekdayOf } from '../words/weekdays.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
 import { bySaying, type Guess, ignored } from './columns.ts';
@@ -44,7 +45,11 @@ const BY_PART = 1000;
 
 /** What the columns of a list of expenses or of hours hold: each meaning goes to the heading that says it best. */
 export function guessOfList(all: readonly ColumnFacts[], shape: Shape, thisYear: number): Guess[] {
-  const guesses: Guess[] = all.map((facts) => plannedGuess(facts, shape) ?? weekdayGuess(facts) ?? unknown(facts));
+  // In a cash book `Soll` stands beside `Haben`, and plans nothing.
+  const isCashBook = all.some((facts) => headingMeanings(facts.heading).includes('credit'));
+  const plannedOf = (facts: ColumnFacts) =>
+    isCashBook && headingMeanings(facts.heading).includes('amount') ? null : plannedGuess(facts, shape);
+  const guesses: Guess[] = all.map((facts) => plannedOf(facts) ?? weekdayGuess(facts) ?? unknown(facts));
   const free = all.map((_, i) => guesses[i]?.meaning === 'ignore');
   const used = new Set<Meaning>(guesses.map(({ meaning }) => meaning));
   for (const { at, meaning } of candidates(all, shape === 'hours' ? OF_HOURS : OF_EXPENSES)) {
@@ -60,7 +65,9 @@ function candidates(all: readonly ColumnFacts[], allowed: readonly Meaning[]) {
   const found: { at: number; meaning: Meaning; rank: number }[] = [];
   all.forEach((facts, at) => {
     const exact = headingMeanings(facts.heading);
-    const meanings = exact.length > 0 ? exact : likelyMeanings(facts.heading);
+    // `Sales tax` is a kind of cost, not sales.
+    const isCost = exact.length === 0 && (tradeMeaning(facts.heading)?.isExact ?? false);
+    const meanings = isCost ? [] : exact.length > 0 ? exact : likelyMeanings(facts.heading);
     for (const meaning of meanings) {
       const order = allowed.indexOf(meaning);
       if (order < 0 || !suits(meaning, facts)) continue;

@@ -13,7 +13,7 @@ import { vehicleText } from './vehicle-columns.ts';
 export interface Survey {
   /** Above 0: the decimal mark is a point; below: a comma; 0: nothing speaks for either. */
   readonly decimalVotes: number;
-  /** Currency → cells that can only be it. */
+  /** Currencies that a cell's sign may stand for → cells with such a sign. */
   readonly currencies: ReadonlyMap<string, number>;
   /** Per date column: what its numbers allow. */
   readonly dates: ReadonlyMap<number, DateEvidence>;
@@ -66,7 +66,8 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
       const cell = cells[at];
       if (!cell || !looksLikeMoney(cell)) continue;
       decimalVotes += decimalVote(cell);
-      for (const currency of currenciesIn(cell) ?? []) count(currencies, currency);
+      const named = currenciesIn(cell);
+      if (named) count(currencies, named.join(' '));
     }
     for (const { at, see } of days) see.cell(cells[at] ?? '');
     const name = nameOf(cells);
@@ -109,7 +110,8 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
       if (!isFigure(cell)) continue;
       isData = true;
       decimalVotes += decimalVote(cell);
-      for (const currency of currenciesIn(cell) ?? []) count(currencies, currency);
+      const named = currenciesIn(cell);
+      if (named) count(currencies, named.join(' '));
     }
     if (!isData) return;
     hashes.push(rowHash(cells));

@@ -6,6 +6,7 @@ import { type DecimalMark, moneyReader } from '../cells/money.ts';
 import type { Heading } from '../read/plan.ts';
 import type { Sheet } from '../sheets/sheet.ts';
 import { categoryReader } from '../words/categories.ts';
+import { settleAmount } from './amount-column.ts';
 import { askOfColumns } from './column-choices.ts';
 import { columnFacts } from './column-facts.ts';
 import { guessColumns } from './columns.ts';
@@ -64,7 +65,13 @@ function guessAll(
     sheet: sheet.number,
     thisYear,
   });
-  const derived = guessed.shape === 'vehicles' ? markDerived(columns, head, moneyReader(decimal)) : columns;
+  const money = moneyReader(decimal);
+  const derived =
+    guessed.shape === 'vehicles'
+      ? markDerived(columns, head, money)
+      : guessed.shape === 'expenses'
+        ? settleAmount(columns, head, money)
+        : columns;
   if (said.length === 0) return { columns: derived, why: '', row: null, ...guessed };
   const changed = new Map(said.map((column) => [column.col, column]));
   const own = derived.map((column) => {

@@ -85,10 +85,15 @@ function refuseForeign(found: readonly Survey[], currency: string): void {
   for (const { currencies } of found) {
     for (const [name, cells] of currencies) counts.set(name, (counts.get(name) ?? 0) + cells);
   }
-  const own = counts.get(currency) ?? 0;
-  counts.delete(currency);
-  const [other, most] = [...counts].reduce((a, b) => (b[1] > a[1] ? b : a), ['', 0]);
-  if (most > own) {
+  let own = 0;
+  let foreign = 0;
+  let [other, most] = ['', 0];
+  for (const [names, cells] of counts) {
+    if (names.split(' ').includes(currency)) own += cells;
+    else foreign += cells;
+    if (!names.split(' ').includes(currency) && cells > most) [other, most] = [names.split(' ')[0] ?? '', cells];
+  }
+  if (foreign > own) {
     throw new FileRefusal(
       'currency',
       `The amounts in this file are in ${other}, and the shop keeps its books in ${currency}.`,

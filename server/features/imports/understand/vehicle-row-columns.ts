@@ -1,7 +1,7 @@
 import type { Meaning } from '#shared/contracts/import-reading.ts';
 import { PURCHASE, SALE } from '../words/categories.ts';
 import { actualPart, dealOf, headingMeanings, likelyMeanings, plannedPart } from '../words/headings.ts';
-import { isOwnWork } from '../words/own-work.ts';
+import { isOwnWork, saysHours } from '../words/own-work.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney } from './column-facts.ts';
 import { bySaying, type CategoryReader, type Guess, ignored } from './columns.ts';
 import { suits } from './suits.ts';
@@ -41,7 +41,10 @@ function guessOne(facts: ColumnFacts, used: ReadonlySet<Meaning>, categoryOf: Ca
   const deal = dealGuess(facts, used);
   const likely = () => byMeaning(facts, likelyMeanings(facts.heading), used);
   if (!holdsMoney(facts)) return deal ?? likely() ?? unknown(facts);
-  if (isOwnWork(facts.heading)) return ignored(OWN_WORK);
+  if (isOwnWork(facts.heading)) {
+    const isTime = !used.has('hours') && saysHours(facts.heading) && holdsHours(facts);
+    return isTime ? bySaying('hours') : ignored(OWN_WORK);
+  }
   const whole = costGuess(facts, actualPart(facts.heading), categoryOf, true);
   return whole ?? deal ?? costGuess(facts, facts.heading, categoryOf, false) ?? likely() ?? unknown(facts);
 }

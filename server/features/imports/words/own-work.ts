@@ -14,6 +14,10 @@ export const isOwnWork = (text: string) => OWN_WORK.test(fold(text.replace(RATE,
 /** Does a text say outright that the work was one's own, not just that it was work? */
 export const isMine = (text: string) => MINE.test(fold(text));
 
+/** Does a heading of own work name hours? */
+export const saysHours = (heading: string) =>
+  /\b(?:h|hrs?|hours?|std|stunden|horas?|heures?)\b/.test(fold(heading.replace(RATE, ' ')));
+
 const HOURS_INSIDE = /(\d{1,4}(?:[.,]\d{1,2})?)\s*(?:h|hrs?|hours?|std|stunden|horas?|heures?)\b/i;
 
 /** The hours that a text of own work names (`labor 12h x $25`), in whole seconds; null = none. */

@@ -148,27 +148,30 @@ function purchasesOf(from: From, reading: Reading, details: readonly RebuildDeta
   });
 }
 
+/** Estimates are kept per category; their rows stand in the reading, as long as it shows all of them. */
 function estimatesOf(from: From, reading: Reading, details: readonly RebuildDetail[]) {
   const shown = reading.firstRows.flatMap((row) => row.lines).filter(({ kind }) => kind === 'estimate');
   return details.flatMap(({ rebuild, categories }) =>
     categories
       .filter(({ estimateCents }) => (estimateCents ?? 0) > 0)
-      .map(({ name, estimateCents }) => {
-        const line = shown.find(
-          ({ rebuild: place, category }) =>
-            place !== null && reading.rebuilds[place]?.tag === rebuild.tag && category === name,
+      .flatMap(({ name, estimateCents }) => {
+        const own = shown.filter(
+          (line) =>
+            line.rebuild !== null && reading.rebuilds[line.rebuild]?.tag === rebuild.tag && line.category === name,
         );
-        return {
+        const isWhole = own.reduce((sum, line) => sum + line.cents, 0) === estimateCents;
+        const whole = { on: rebuild.boughtOn, what: null, cents: estimateCents ?? 0, col: null };
+        return (isWhole ? own : [{ ...whole, sheet: rebuild.importSheet, row: rebuild.importRow }]).map((line) => ({
           rebuildRef: rebuild.tag,
-          date: line?.on ?? rebuild.boughtOn,
+          date: line.on,
           category: name,
-          description: line?.what ?? null,
+          description: line.what,
           vendor: null,
-          amountCents: estimateCents,
+          amountCents: line.cents,
           foreseen: null,
           estimate: true,
-          source: from(imported(rebuild)),
-        };
+          source: { ...from(line), ...(line.col ? { col: line.col } : {}) },
+        }));
       }),
   );
 }

@@ -1,38 +1,84 @@
 import { deflateRawSync } from 'node:zlib';
 
+/** How an archive is written; left out = packed, its sizes before each part. */
+export interface ZipStyle {
+  /** Parts as they are, not packed. */
+  readonly isStored?: boolean;
+  /** Sizes after each part, as programs write that do not know them before. */
+  readonly isStreamed?: boolean;
+  /** Sizes and places in 64 bits. */
+  readonly isWide?: boolean;
+}
+
 /** A zip archive of these parts, written by hand so that tests can make what no spreadsheet program would. */
-export function zipOf(parts: Readonly<Record<string, string | Buffer>>): Buffer {
+export function zipOf(parts: Readonly<Record<string, string | Buffer>>, style: ZipStyle = {}): Buffer {
+  const { isStored = false, isStreamed = false, isWide = false } = style;
   const bodies: Buffer[] = [];
   const entries: Buffer[] = [];
   let at = 0;
   for (const [name, content] of Object.entries(parts)) {
     const raw = Buffer.from(content);
-    const packed = deflateRawSync(raw);
+    const packed = isStored ? raw : deflateRawSync(raw);
+    const sizes = [packed.length, raw.length] as const;
     const local = Buffer.alloc(30);
     local.writeUInt32LE(0x04034b50, 0);
-    local.writeUInt16LE(8, 8);
-    local.writeUInt32LE(packed.length, 18);
-    local.writeUInt32LE(raw.length, 22);
+    local.writeUInt16LE(isStreamed ? 8 : 0, 6);
+    local.writeUInt16LE(isStored ? 0 : 8, 8);
+    if (!isStreamed) sizes.forEach((size, i) => local.writeUInt32LE(size, 18 + 4 * i));
     local.writeUInt16LE(Buffer.byteLength(name), 26);
+    const after = Buffer.alloc(isStreamed ? 16 : 0);
+    if (isStreamed) [0x08074b50, 0, ...sizes].forEach((value, i) => after.writeUInt32LE(value, 4 * i));
+    const extra = isWide ? wideField(raw.length, packed.length, at) : Buffer.alloc(0);
     const entry = Buffer.alloc(46);
     entry.writeUInt32LE(0x02014b50, 0);
-    entry.writeUInt16LE(8, 10);
-    entry.writeUInt32LE(packed.length, 20);
-    entry.writeUInt32LE(raw.length, 24);
+    entry.writeUInt16LE(isStored ? 0 : 8, 10);
+    [...sizes].forEach((size, i) => entry.writeUInt32LE(isWide ? TOO_WIDE : size, 20 + 4 * i));
     entry.writeUInt16LE(Buffer.byteLength(name), 28);
-    entry.writeUInt32LE(at, 42);
-    bodies.push(local, Buffer.from(name), packed);
-    entries.push(entry, Buffer.from(name));
-    at += local.length + Buffer.byteLength(name) + packed.length;
+    entry.writeUInt16LE(extra.length, 30);
+    entry.writeUInt32LE(isWide ? TOO_WIDE : at, 42);
+    bodies.push(local, Buffer.from(name), packed, after);
+    entries.push(entry, Buffer.from(name), extra);
+    at += local.length + Buffer.byteLength(name) + packed.length + after.length;
   }
   const directory = Buffer.concat(entries);
+  const count = Object.keys(parts).length;
+  return Buffer.concat([
+    ...bodies,
+    directory,
+    ...(isWide ? wideEnd(count, at, directory.length) : []),
+    endOf(count, at, directory.length, isWide),
+  ]);
+}
+
+const TOO_WIDE = 0xffffffff;
+
+function wideField(...values: number[]): Buffer {
+  const field = Buffer.alloc(4 + 8 * values.length);
+  field.writeUInt16LE(1, 0);
+  field.writeUInt16LE(8 * values.length, 2);
+  values.forEach((value, i) => field.writeBigUInt64LE(BigInt(value), 4 + 8 * i));
+  return field;
+}
+
+function wideEnd(count: number, at: number, length: number): Buffer[] {
+  const record = Buffer.alloc(56);
+  record.writeUInt32LE(0x06064b50, 0);
+  record.writeBigUInt64LE(44n, 4);
+  [count, count, length, at].forEach((value, i) => record.writeBigUInt64LE(BigInt(value), 24 + 8 * i));
+  const pointer = Buffer.alloc(20);
+  pointer.writeUInt32LE(0x07064b50, 0);
+  pointer.writeBigUInt64LE(BigInt(at + length), 8);
+  return [record, pointer];
+}
+
+function endOf(count: number, at: number, length: number, isWide: boolean): Buffer {
   const end = Buffer.alloc(22);
   end.writeUInt32LE(0x06054b50, 0);
-  end.writeUInt16LE(Object.keys(parts).length, 8);
-  end.writeUInt16LE(Object.keys(parts).length, 10);
-  end.writeUInt32LE(directory.length, 12);
-  end.writeUInt32LE(at, 16);
-  return Buffer.concat([...bodies, directory, end]);
+  end.writeUInt16LE(isWide ? 0xffff : count, 8);
+  end.writeUInt16LE(isWide ? 0xffff : count, 10);
+  end.writeUInt32LE(length, 12);
+  end.writeUInt32LE(isWide ? TOO_WIDE : at, 16);
+  return end;
 }
 
 /** A cell: text, a number, or a number under a format, such as a day (`{ serial: 44205, format: 14 }`). */

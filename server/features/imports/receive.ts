@@ -4,7 +4,7 @@ import { open } from 'node:fs/promises';
 import { ProblemError } from '../../platform/problems.ts';
 import { dropFile, makeImportFolder } from './files.ts';
 import { FileRefusal } from './refusal.ts';
-import { refuseNotText } from './text/encoding.ts';
+import { refuseNotText } from './text/not-text.ts';
 
 export interface ReceivedFile {
   readonly path: string;

@@ -72,7 +72,7 @@ function readBook(zip: Zip, part: string): Book {
 function linkedFile(zip: Zip, relations: readonly Relation[], id: string): string {
   const part = relations.find((one) => one.id === id)?.target ?? '';
   const outside = relationsOf(zip, part).find(({ isOutside }) => isOutside)?.target ?? '';
-  return outside.split(/[/\\]/).at(-1) || 'unknown';
+  return outside.replaceAll('%20', ' ').split(/[/\\]/).at(-1) || 'unknown';
 }
 
 /** The texts that cells refer to by number. Readings beside foreign letters are left out. */

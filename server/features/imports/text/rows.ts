@@ -58,7 +58,6 @@ export function forEachRow(
       if (cells.length > MOST_CELLS)
         throw new FileRefusal('too-wide', `Line ${start} has ${cells.length} cells; ${MOST_CELLS} is the most.`, start);
       if (isLast && i === data.length - 1 && cells.length === 1 && cells[0] === '') continue;
-      if (start === 1 && format.hasNamedDelimiter) continue;
       if (malformed?.has(i) && line - start > LONGEST_MALFORMED) refuseOpen(start);
       unguard(cells);
       onRow(cells, start, malformed?.has(i) ?? false);
@@ -67,8 +66,12 @@ export function forEachRow(
     if (rest.length > LONGEST_CELL) refuseLong(rest, line);
   };
   for (const piece of decode(source, format.encoding)) {
-    take(rest + piece, false);
-    onPart?.(Math.min(1, (done += 65_536) / source.size));
+    // The line that only names the delimiter is none of the table.
+    const isNaming = done === 0 && format.hasNamedDelimiter;
+    if (isNaming) line = 2;
+    take(rest + (isNaming ? piece.slice(piece.indexOf('\n') + 1) : piece), false);
+    done += 65_536;
+    onPart?.(Math.min(1, done / source.size));
   }
   take(rest, true);
 }

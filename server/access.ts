@@ -69,6 +69,7 @@ export const access: AccessTable = {
   'PATCH /api/imports/:importId': BOOKS,
   'DELETE /api/imports/:importId': BOOKS,
   'GET /api/imports/:importId/rows': READS_BOOKS,
+  'GET /api/imports/:importId/progress': READS_BOOKS,
   'POST /api/imports/:importId/commit': BOOKS,
   'POST /api/imports/:importId/undo': BOOKS,
 

@@ -2,6 +2,7 @@ import { createServer } from 'node:http';
 import { createApp } from './app.ts';
 import { recoverImports } from './features/imports/background.ts';
 import { readConfig } from './platform/config.ts';
+import { endStreams } from './platform/event-stream.ts';
 import { openServices } from './services.ts';
 
 const config = readConfig(process.env);
@@ -49,6 +50,7 @@ function stop(): void {
       () => process.exit(1),
     );
   });
+  endStreams();
   server.closeIdleConnections();
 }
 process.on('SIGTERM', stop);

@@ -7,6 +7,7 @@ import { dayInZone } from '#shared/day.ts';
 import type { Role } from '#shared/vocabulary.ts';
 import type { Config } from './config.ts';
 import type { Database } from './database.ts';
+import { Events, sendEvents } from './event-stream.ts';
 import { sha256 } from './ids.ts';
 import type { PasswordService } from './passwords.ts';
 import { invalidRequest, ProblemError } from './problems.ts';
@@ -83,7 +84,7 @@ export interface Route {
 /** Joins a contract to the function that answers it. `upload` reads a multipart body first. */
 export function route<C extends Contract>(
   contract: C,
-  handle: (ctx: Context<C>) => Promise<Reply<C> | Versioned<Reply<C>> | Ready>,
+  handle: (ctx: Context<C>) => Promise<Reply<C> | Versioned<Reply<C>> | Ready | Events<Reply<C>>>,
   upload?: RequestHandler,
 ): Route {
   return { contract, handle: handle as Route['handle'], ...(upload ? { upload } : {}) };
@@ -105,7 +106,7 @@ export function mount(router: Router, routes: readonly Route[], table: AccessTab
     const steps = upload ? [guard(access, services), upload] : [guard(access, services)];
     router[method](contract.path, ...steps, async (req: Request, res: Response) => {
       const ctx = await contextOf(contract, req, res, services);
-      answer(contract, res, await handle(ctx));
+      await answer(contract, res, await handle(ctx));
     });
   }
   if (unused.size > 0) throw new Error(`The access table names routes that do not exist: ${[...unused].join(', ')}`);
@@ -146,7 +147,7 @@ async function contextOf(contract: Contract, req: Request, res: Response, servic
       return { userId: viewer.userId, shopId: viewer.shop.id, role: viewer.shop.role };
     },
     today: () => todayOf(services, ctx.actor.shopId),
-    ifMatch: contract.edits ? readIfMatch(req) : null,
+    ifMatch: contract.edits === true || (contract.edits && req.headers['if-match']) ? readIfMatch(req) : null,
     once: contract.once ? readOnce(req) : null,
     services,
     req,
@@ -190,8 +191,9 @@ async function todayOf({ database, now }: Services, shopId: string): Promise<Day
   return shop.fixed_today ?? dayInZone(now(), shop.time_zone);
 }
 
-function answer(contract: Contract, res: Response, reply: unknown): void {
+async function answer(contract: Contract, res: Response, reply: unknown): Promise<void> {
   if (res.headersSent) return;
+  if (reply instanceof Events) return sendEvents(res, reply, (value) => JSON.stringify(contract.response.parse(value)));
   if (reply === undefined) {
     res.status(204).end();
     return;

@@ -28,7 +28,7 @@ function operation(contract: Contract, access: Access | undefined): object {
     ...fields(contract.params, 'path'),
     ...fields(contract.query, 'query'),
     ...(contract.once ? [header('Idempotency-Key')] : []),
-    ...(contract.edits ? [header('If-Match')] : []),
+    ...(contract.edits ? [header('If-Match', contract.edits === true)] : []),
   ];
   return {
     summary: contract.summary,
@@ -46,8 +46,9 @@ function operation(contract: Contract, access: Access | undefined): object {
 function success(contract: Contract): object {
   if (contract.response instanceof z.ZodVoid) return { 204: { description: 'Done' } };
   const status = contract.once ? 201 : 200;
+  const type = contract.stream ? 'text/event-stream' : 'application/json';
   return {
-    [status]: { description: 'Done', content: { 'application/json': { schema: schema(contract.response, 'output') } } },
+    [status]: { description: 'Done', content: { [type]: { schema: schema(contract.response, 'output') } } },
   };
 }
 
@@ -58,7 +59,7 @@ const problem = () => ({
 
 const body = (type: string, content: object) => ({ required: true, content: { [type]: { schema: content } } });
 
-const header = (name: string) => ({ name, in: 'header', required: true, schema: { type: 'string' } });
+const header = (name: string, required = true) => ({ name, in: 'header', required, schema: { type: 'string' } });
 
 function fields(shape: z.ZodType | undefined, where: 'path' | 'query'): object[] {
   if (!shape) return [];

@@ -103,6 +103,14 @@ export const importsApi = {
     params,
     response: reply,
   },
+  progress: {
+    method: 'GET',
+    path: '/api/imports/:importId/progress',
+    summary: 'Follow an import while it is read or booked; the stream ends when it is done',
+    params,
+    response: progressSchema,
+    stream: true,
+  },
   rows: {
     method: 'GET',
     path: '/api/imports/:importId/rows',
@@ -132,6 +140,7 @@ export const importsApi = {
     summary: 'Book everything that was understood, at once or not at all; asked twice, it books once',
     params,
     response: reply,
+    edits: 'optional',
   },
   undo: {
     method: 'POST',

@@ -44,7 +44,7 @@ describe('the rows of a file', () => {
     const entries = (await ada.get('/api/entries')).body.rows.map((entry: { id: string }) => entry.id);
     expect(
       after.flatMap((row: { lines: { entryId: string | null }[] }) => row.lines.map((line) => line.entryId)),
-    ).toEqual([null, ...[entries[1], entries[0]]]);
+    ).toEqual([null, entries[1], entries[0]]);
   });
 
   it('start where one looks, and go on', async () => {

@@ -1,15 +1,10 @@
 import { shopScope } from '../../books/scope.ts';
 import type { Services } from '../../platform/http.ts';
 import { dropFile, importPath, sweepFiles } from './files.ts';
+import { endProgress, tellProgress } from './progress.ts';
 import { runJob } from './run-job.ts';
 import type { FileAt } from './work.ts';
 import { controlOf, type ImportRecord, importStore, settingsOf } from './store.ts';
-
-/** Share done of the imports under way, by id. Gone after a restart, as they are. */
-const shares = new Map<string, number>();
-
-/** How far an import is, 0–1; null = nothing is being done with it. */
-export const progressOf = (importId: string) => shares.get(importId) ?? null;
 
 const NOT_BOOKED =
   'Booking it failed, and nothing of it stands in the books. Try again; if it fails once more, the server’s log says why.';
@@ -26,13 +21,13 @@ export async function filesAt({ services, shopId }: Asker, importId: string): Pr
 }
 
 const tracked = async (id: string, work: () => Promise<void>, { services }: Asker) => {
-  shares.set(id, 0);
+  tellProgress(id, 0);
   try {
     await work();
   } catch (error) {
     services.logger.error({ err: error, importId: id }, 'import failed');
   } finally {
-    shares.delete(id);
+    endProgress(id);
   }
 };
 
@@ -49,7 +44,7 @@ export function startReading(asker: Asker, record: ImportRecord): void {
       try {
         const done = await runJob(
           { ...job, kind: 'read', files: await filesAt(asker, record.id), settings: settingsOf(record) },
-          (share) => shares.set(record.id, share),
+          (share) => tellProgress(record.id, share),
         );
         if (done.kind === 'read') await write((store) => store.keepReading(record.id, done.reading));
       } catch (error) {
@@ -86,7 +81,7 @@ export function startCommit(
               control: controlOf(record),
               at: new Date().toISOString(),
             },
-            (share) => shares.set(record.id, share),
+            (share) => tellProgress(record.id, share),
           );
           if (done.kind !== 'outdated') return;
           // The books changed under the reading: it is read anew, so that people see what would come in now.

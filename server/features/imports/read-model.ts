@@ -3,7 +3,7 @@ import type { Import, ImportSummary } from '#shared/contracts/imports.ts';
 import type { ShopScope } from '../../books/scope.ts';
 import { readCursor, writeCursor } from '../../platform/cursor.ts';
 import { fromRow } from '../../platform/rows.ts';
-import { progressOf } from './background.ts';
+import { progressOf } from './progress.ts';
 import { importStore, readingOf, settingsOf } from './store.ts';
 
 const PAGE = 100;

@@ -1,12 +1,14 @@
-import { type Import, importsApi } from '#shared/contracts/imports.ts';
+import { type Import, importsApi, type Progress } from '#shared/contracts/imports.ts';
 import { shopScope } from '../../books/scope.ts';
 import { write } from '../../books/write.ts';
+import { Events } from '../../platform/event-stream.ts';
 import { type Context, type Route, route } from '../../platform/http.ts';
 import { ProblemError } from '../../platform/problems.ts';
 import { forgetFiles, startCommit } from './background.ts';
 import { changeImport } from './change-import.ts';
-import { wrongState } from './problems.ts';
+import { refuseStale, wrongState } from './problems.ts';
 import { listRows } from './list-rows.ts';
+import { progressEvents } from './progress.ts';
 import { listImports, showImport } from './read-model.ts';
 import { runJob } from './run-job.ts';
 import { importStore, readingOf } from './store.ts';
@@ -33,6 +35,7 @@ export const importRoutes: Route[] = [
   route(importsApi.list, (ctx) => listImports(readScope(ctx), ctx.query.cursor)),
   route(importsApi.upload, uploadImport),
   route(importsApi.show, (ctx) => shown(ctx as unknown as OnImport)),
+  route(importsApi.progress, followImport),
   route(importsApi.rows, listRows),
   route(importsApi.change, changeImport),
   route(importsApi.commit, async (ctx) => commitImport(ctx as unknown as OnImport)),
@@ -40,12 +43,20 @@ export const importRoutes: Route[] = [
   route(importsApi.discard, async (ctx) => discardImport(ctx)),
 ];
 
+/** Follows an import until it is done. */
+async function followImport(ctx: Context<typeof importsApi.progress>): Promise<Events<Progress>> {
+  const { importId } = ctx.params;
+  await current(ctx as unknown as OnImport);
+  return new Events((closed) => progressEvents(readScope(ctx), importId, closed));
+}
+
 /** Starts the commit. Asking again while it runs, or after, changes nothing: it books once. */
 async function commitImport(ctx: OnImport) {
   const { services, actor } = ctx;
   const before = await current(ctx);
   if (before.state === 'committing' || before.state === 'committed') return shown(ctx);
   if (before.state !== 'ready') throw wrongState('Only a file that was read can be booked.');
+  refuseStale(ctx.ifMatch, before.version);
   const open = readingOf(before)?.choices.filter((choice) => choice.mustAsk && choice.answer === null) ?? [];
   if (open.length > 0) {
     throw new ProblemError(422, {
@@ -57,6 +68,7 @@ async function commitImport(ctx: OnImport) {
   const isMine = await database.lock(async () => {
     const store = importStore(shopScope(database.writer, actor.shopId));
     if (await store.cameInMeanwhile(before)) throw alreadyIn();
+    refuseStale(ctx.ifMatch, (await store.get(before.id)).version);
     return store.move(before.id, 'ready', 'committing');
   });
   if (isMine) startCommit({ services, ...actor, requestId: String(ctx.req.id) }, before);

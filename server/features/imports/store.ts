@@ -112,7 +112,9 @@ export function importStore(scope: ShopScope) {
     },
     /** From one state to another, and why if it is a step back; false = it was not in that state. */
     async move(id: string, from: ImportState, to: ImportState, refusal: string | null = null): Promise<boolean> {
-      return (await only(id, from).update({ state: to, refusal })) === 1;
+      // Read again, it is another reading: who saw the one before must look at it.
+      const version = scope.db.raw(to === 'reading' ? 'version + 1' : 'version');
+      return (await only(id, from).update({ state: to, refusal, version })) === 1;
     },
     async discard(id: string): Promise<void> {
       await scope

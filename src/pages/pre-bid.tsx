@@ -19,9 +19,9 @@ export function PreBidPage() {
   useEffect(() => keepSession(session), [session]);
   return (
     <>
-      <header className="no-print flex min-h-9 flex-wrap items-center justify-between gap-x-6 gap-y-1">
+      <header className="no-print flex min-h-9 items-center justify-between gap-x-6">
         <h1 className="font-semibold text-soft">What is the most I should bid on this one?</h1>
-        <Link to={`/s/${session.shop.id}/pre-bids`} className="inline-flex min-h-11 items-center">
+        <Link to={`/s/${session.shop.id}/pre-bids`} className="inline-flex min-h-11 flex-none items-center">
           Kept sheets
         </Link>
       </header>

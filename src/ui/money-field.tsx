@@ -22,7 +22,7 @@ export function MoneyField({ label, hideLabel, hint, note, error, className, onC
   const said = cents === null ? hint : `= ${format.money(cents, 'always')}`;
   const understood = note ? (
     <>
-      {said} {note}
+      {said} <span className="block">{note}</span>
     </>
   ) : (
     said

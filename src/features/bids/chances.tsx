@@ -1,9 +1,12 @@
 import type { BidFigures } from '#shared/contracts/bids-parts.ts';
+import type { Formatter } from '#shared/formatter.ts';
+import { unbroken } from '../../lib/unbroken.ts';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { Panel } from '../../ui/panel.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
-import { rungWords, timesInTen } from './words.ts';
+import { chanceWords, rungWords } from './words.ts';
 
+type Joint = NonNullable<BidFigures['joint']>;
 type Rate = BidFigures['saleChance'];
 type Line = { readonly what: string; readonly rate: Rate };
 
@@ -38,16 +41,9 @@ export function Chances({ figures, isSeen }: { figures: BidFigures; isSeen: bool
       title="How likely all of it holds"
       subtitle={`${format.count(joint.wanted.n, 'past rebuild')} ${rungWords(joint.rung, isSeen)}, put on this sheet as they came out.`}
     >
-      <p className="mb-3 text-lead font-[640]">
-        {joint.wanted.rate !== null && `All of it together holds ${timesInTen(joint.wanted.rate)}.`}
-      </p>
+      <p className="mb-3 text-lead font-[640]">{chanceWords(joint)}</p>
       <Table caption="How often it would have held" rows={rows} columns={COLUMNS} rowKey={(row) => row.what} />
-      {beyond && (
-        <p className="mt-3">
-          Against what you want, half end above {format.signed(Math.round(beyond.p50))}; one in ten above{' '}
-          {format.signed(Math.round(beyond.p90))}, one in ten below {format.signed(Math.round(beyond.p10))}.
-        </p>
-      )}
+      {beyond && <p className="mt-3">{beyondWords(beyond, format)}</p>}
       <p className="mt-2 text-soft">
         Cushions stack: a careful sale and a careful repair together are more careful than either alone. And these are
         lots you won, under the way you bid until now.
@@ -65,4 +61,11 @@ const COLUMNS: readonly Column<Line>[] = [
 function Range({ rate: { lower, upper } }: { rate: Rate }) {
   const format = useFormatter();
   return lower === null || upper === null ? null : `${format.percent(lower)} to ${format.percent(upper)}`;
+}
+
+function beyondWords({ p10, p50, p90 }: NonNullable<Joint['beyondCents']>, format: Formatter): string {
+  const [low, middle, high] = [p10, p50, p90].map((cents) => format.signed(Math.round(cents)));
+  return unbroken(
+    `Against what you want, half end above ${middle}; one in ten above ${high}, one in ten below ${low}.`,
+  );
 }

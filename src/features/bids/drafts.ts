@@ -15,7 +15,14 @@ const nameOf = (home: string, bidId: string | null) => `${home}draft.${bidId ?? 
 /** The draft of a sheet, over the values that it would start with; null = nothing was typed. */
 export function draftOf(home: string, bidId: string | null, start: SheetForm): Draft | null {
   const found = kept(nameOf(home, bidId)) as Partial<Draft> | null;
-  return found?.values ? { values: { ...start, ...found.values }, version: found.version ?? null } : null;
+  if (!found?.values) return null;
+  const amounts = { ...start.amounts, ...found.values.amounts };
+  return { values: { ...start, ...found.values, amounts }, version: found.version ?? null };
+}
+
+/** Was a new sheet begun here that is not kept yet? */
+export function hasNewDraft(home: string): boolean {
+  return kept(nameOf(home, null)) !== null;
 }
 
 export function keepDraft(home: string, bidId: string | null, draft: Draft): void {

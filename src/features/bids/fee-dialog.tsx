@@ -2,7 +2,6 @@ import { type FormEvent, useState } from 'react';
 import type { BidFields } from '#shared/contracts/bids.ts';
 import { parseCents } from '#shared/money.ts';
 import { ApiProblem } from '../../lib/api-problem.ts';
-import { centsToText } from '../../lib/money-text.ts';
 import { Button } from '../../ui/button.tsx';
 import { Dialog, DialogActions } from '../../ui/dialog.tsx';
 import { ErrorSummary } from '../../ui/error-summary.tsx';
@@ -11,6 +10,7 @@ import { MoneyField } from '../../ui/money-field.tsx';
 import { notify } from '../../ui/toast.tsx';
 import { feesOf, type StepText } from './fee-text.ts';
 import { useChangeFeeTable } from './mutations.ts';
+import { plainMoney } from './sheet-form.ts';
 import type { SheetFormApi } from './use-sheet.ts';
 
 type Props = {
@@ -27,7 +27,7 @@ type Props = {
 export function FeeDialog({ form, sheet, version, mayWrite, onClose }: Props) {
   const format = useFormatter();
   const [start] = useState(() => form.getValues(['feeSteps', 'feeFlatCents', 'bidStepCents']));
-  const text = (cents: number) => centsToText(cents, format.decimal).replace(/[.,]00$/, '');
+  const text = (cents: number) => plainMoney(cents, format.decimal);
   const [steps, setSteps] = useState<StepText[]>(() =>
     start[0].map(([from, fee]) => ({ from: text(from), fee: text(fee) })),
   );
@@ -41,6 +41,8 @@ export function FeeDialog({ form, sheet, version, mayWrite, onClose }: Props) {
 
   const onUse = async (event: FormEvent, isForShop: boolean) => {
     event.preventDefault();
+    // The dialog stands within the sheet's own form.
+    event.stopPropagation();
     if (!fees) return;
     for (const name of ['feeSteps', 'feeFlatCents', 'bidStepCents'] as const)
       form.setValue(name, fees[name], { shouldDirty: true });

@@ -15,7 +15,7 @@ export function MadeOf({ sheet, figures }: Props) {
   const format = useFormatter();
   if (!hasBid(figures)) return null;
   return (
-    <Panel title="What it is made of">
+    <Panel title="What it is made of" id="made-of">
       <WaterfallBars caption={captionOf(figures, format)} rows={madeOf(sheet, figures, format)} format={format} />
       <HowWorkedOut>
         <WorkedOut sheet={sheet} figures={figures} />
@@ -26,8 +26,11 @@ export function MadeOf({ sheet, figures }: Props) {
 
 function captionOf({ saleCents, roomCents, bidCents, feeCents, taxCents }: BidFigures, format: Formatter): string {
   const money = (cents: number | null) => format.money(cents ?? 0);
-  const tax = taxCents ? ` and ${money(taxCents)} of tax` : '';
-  return `Of ${money(saleCents)}, ${money(roomCents)} is left for bid and fees: a bid of ${money(bidCents)} with ${money(feeCents)} of fees${tax} fits.`;
+  const charged = [feeCents ? `${money(feeCents)} of fees` : '', taxCents ? `${money(taxCents)} of tax` : ''].filter(
+    Boolean,
+  );
+  const besides = charged.length === 0 ? '' : ` with ${charged.join(' and ')}`;
+  return `Of ${money(saleCents)}, ${money(roomCents)} is left for bid and fees: a bid of ${money(bidCents)}${besides} fits.`;
 }
 
 /** The parts in order; what takes nothing off is left out. */

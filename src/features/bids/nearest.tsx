@@ -8,8 +8,6 @@ import { type Column, Table } from '../../ui/table.tsx';
 
 type Props = { sheet: BidFields; planCents: number; basis: BidBasis; shopId: string };
 
-const IN_COMMON: Readonly<Record<Trait, string>> = { seen: 'seen or not', damage: 'damage', class: 'class' };
-
 /** The three past rebuilds most like this one, and what came of them. */
 export function Nearest({ sheet, planCents, basis, shopId }: Props) {
   const { classId, damageId, isSeen } = sheet;
@@ -35,9 +33,7 @@ const columns = (shopId: string): readonly Column<Similar<Past>>[] => [
     cell: ({ rebuild, inCommon }) => (
       <>
         <Link to={`/s/${shopId}/rebuilds/${rebuild.id}`}>{rebuild.tag}</Link> {rebuild.name}
-        <span className="block text-label text-soft">
-          {inCommon.length === 0 ? 'little in common' : `same ${inCommon.map((trait) => IN_COMMON[trait]).join(', ')}`}
-        </span>
+        <span className="block text-label text-soft">{commonWords(inCommon, rebuild.isSeen)}</span>
       </>
     ),
   },
@@ -65,3 +61,10 @@ const columns = (shopId: string): readonly Column<Similar<Past>>[] => [
   { id: 'days', header: 'Days', number: true, under: 'phone', cell: ({ rebuild }) => <Days days={rebuild.daysHeld} /> },
   { id: 'kept', header: 'Kept', number: true, cell: ({ rebuild }) => <Money cents={rebuild.keptCents} tone="kept" /> },
 ];
+
+/** `same damage and class, also not seen`. */
+function commonWords(inCommon: readonly Trait[], isSeen: boolean | null): string {
+  const same = inCommon.filter((trait) => trait !== 'seen').join(' and ');
+  const seen = inCommon.includes('seen') ? `also ${isSeen ? 'seen' : 'not seen'}` : '';
+  return [same && `same ${same}`, seen].filter(Boolean).join(', ') || 'little in common';
+}

@@ -5,12 +5,12 @@ import { startFor } from '#shared/measures/like-cars.ts';
 import { parseCents } from '#shared/money.ts';
 import { capital } from '../../lib/capital.ts';
 import { hoursToText } from '../../lib/hours-text.ts';
-import { centsToText } from '../../lib/money-text.ts';
 import { Button } from '../../ui/button.tsx';
 import { FormMoney } from '../../ui/form-fields.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { Panel } from '../../ui/panel.tsx';
 import { biasWords, kindWords } from './words.ts';
+import { plainMoney } from './sheet-form.ts';
 import { type SheetFormApi, useCar } from './use-sheet.ts';
 
 /** Planned repair by category, started from what such cars were planned at, with the shop's own bias beside each. */
@@ -27,7 +27,7 @@ export function PlanFields({ form, basis }: { form: SheetFormApi; basis: BidBasi
       actions={
         start &&
         start.n > 0 && (
-          <Button size="small" className="touch" onClick={() => fillFrom(start, form, format)}>
+          <Button size="small" className="touch" onClick={() => fillFrom(start, basis, form, format)}>
             Start from {format.count(start.n, 'rebuild')}
           </Button>
         )
@@ -35,7 +35,8 @@ export function PlanFields({ form, basis }: { form: SheetFormApi; basis: BidBasi
     >
       {start && start.n > 0 && (
         <p className="mb-3 text-label text-soft">
-          Starting from {kindWords(start, basis, format)}: half planned more, half less. It fills in hours too.
+          Starting from {kindWords(start, basis, format)}: half planned more, half less. Hours and the costs below are
+          filled in too, from what they came to.
         </p>
       )}
       <div className="grid grid-cols-2 gap-x-4 gap-y-3">
@@ -66,14 +67,32 @@ function biasOf(basis: BidBasis, categoryId: string, text: string, format: Forma
   });
 }
 
-/** Puts the middle plan of such cars into the fields, in tens; what is typed already stays. */
-function fillFrom(start: Start, form: SheetFormApi, format: Formatter): void {
+/** Fields of the sheet that take a category's cost; they are not cushioned, so they start from what it came to. */
+const OWN_FIELD = {
+  transport: 'transportCents',
+  title: 'titleCents',
+  selling: 'sellingCents',
+  'paid labor': 'paidLaborCents',
+} as const;
+
+/** Puts the middle plan of such cars into the fields, in tens, and their hours; what is typed already stays. */
+function fillFrom(start: Start, basis: BidBasis, form: SheetFormApi, format: Formatter): void {
   const change = { shouldDirty: true } as const;
-  for (const { categoryId, planCents } of start.lines) {
+  const tens = (cents: number) => plainMoney(Math.round(cents / 1000) * 1000, format.decimal);
+  const own: Partial<Record<(typeof OWN_FIELD)[keyof typeof OWN_FIELD], number>> = {};
+  for (const { categoryId, planCents, actualCents } of start.lines) {
+    const place = basis.categories.find(({ id }) => id === categoryId)?.place ?? null;
     const name = `amounts.${categoryId}` as const;
-    const tens = Math.round(planCents / 1000) * 1000;
-    if (!form.getValues(name) && tens > 0)
-      form.setValue(name, centsToText(tens, format.decimal).replace(/[.,]00$/, ''), change);
+    if (place === null) {
+      if (!form.getValues(name) && planCents >= 500) form.setValue(name, tens(planCents), change);
+    } else if (place in OWN_FIELD) {
+      const field = OWN_FIELD[place as keyof typeof OWN_FIELD];
+      own[field] = (own[field] ?? 0) + actualCents;
+    }
+  }
+  for (const [field, cents] of Object.entries(own)) {
+    const name = field as keyof typeof own;
+    if (!form.getValues(name) && cents >= 500) form.setValue(name, tens(cents), change);
   }
   const { ownSeconds, actualSeconds } = start.hours;
   const whole = (seconds: number) => hoursToText(Math.round(seconds / 3600) * 3600);

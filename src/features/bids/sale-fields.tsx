@@ -13,21 +13,10 @@ export function SaleFields({ form, figures }: { form: SheetFormApi; figures: Bid
       ? `Past sales came to this share of what was expected ${format.number(chance.x)} times in ${format.number(chance.n)}.`
       : '';
   return (
-    <Panel title="The sale">
+    <Panel title="The sale" subtitle="Rebuilt, with its title brand. A careful bid counts on less.">
       <div className="grid grid-cols-2 gap-4">
-        <FormMoney
-          control={form.control}
-          name="expectedSaleCents"
-          label="Sale expected"
-          note="Rebuilt, with its brand."
-        />
-        <FormMoney
-          control={form.control}
-          name="countedSaleCents"
-          label="The bid counts on"
-          placeholder="The same"
-          note="Less, to be careful."
-        />
+        <FormMoney control={form.control} name="expectedSaleCents" label="Sale expected" />
+        <FormMoney control={form.control} name="countedSaleCents" label="The bid counts on" placeholder="The same" />
       </div>
       {reached && <p className="mt-3 text-label text-soft">{reached}</p>}
     </Panel>

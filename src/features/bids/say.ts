@@ -53,9 +53,8 @@ export function cautionsOf(
 }
 
 function jointWords({ joint }: BidFigures, format: Formatter): string {
-  if (!joint || joint.wanted.rate === null) return '';
-  const { x, n } = joint.wanted;
-  return `All of it together holds ${timesInTen(joint.wanted.rate)}: on ${format.number(x)} of ${format.number(n)} past rebuilds put on this sheet.`;
+  if (!joint || joint.both.rate === null) return '';
+  return `All of it together holds ${timesInTen(joint.both.rate)}, tried on ${format.count(joint.both.n, 'past rebuild')}.`;
 }
 
 /** What the sheet leaves out, so that an empty field is no quiet zero. */
@@ -69,6 +68,5 @@ function notCounted(sheet: BidFields): string {
     sheet.days * sheet.holdingCentsPerDay === 0 && 'holding',
     sheet.feeSteps.length === 0 && sheet.feeFlatCents === 0 && 'fees',
   ].filter((one) => one !== false);
-  const list = empty.length > 1 ? `${empty.slice(0, -1).join(', ')} and ${empty.at(-1)}` : empty.join('');
-  return list === '' ? 'Overhead is not counted.' : `Not counted: ${list}, and overhead.`;
+  return empty.length === 0 ? 'Overhead is not counted.' : `Not counted: ${empty.join(', ')} and overhead.`;
 }

@@ -40,7 +40,7 @@ function middle({ n, median, lower, upper }: Wait, format: Formatter): string {
   if (n === 0) return 'none yet';
   if (median === null) return 'half not sold yet';
   const range = lower === null ? '' : upper === null ? ` (${lower} or more)` : ` (${lower} to ${upper})`;
-  return `half by ${format.days(median)}${range}`;
+  return `half within ${format.days(median)}${range}`;
 }
 
 function basedOn({ soldCount, unsoldCount, otherExitCount }: Wait, format: Formatter): string {

@@ -61,6 +61,12 @@ export function SheetActs({ bid, home, shop, typed, mayWrite, onBought, onStartO
             Start over
           </Button>
         )}
+        <a href="#made-of" className="sheet-jump">
+          What it is made of
+        </a>
+        <a href="#walk-round" className="sheet-jump">
+          Walk round it
+        </a>
         {canEnd && typed.isChanged && (
           <span className="text-soft">Keep the changes first, then say what became of it.</span>
         )}

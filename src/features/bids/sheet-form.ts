@@ -86,8 +86,8 @@ export function readSheet(values: SheetForm, schema: ReturnType<typeof sheetForm
   return found.success ? found.data : null;
 }
 
-/** The fields of a kept sheet, or of a new one on this basis, as text. */
-export function sheetForm(sheet: BidFields, decimal: Decimal): SheetForm {
+/** The fields of a kept sheet as text; every category of the shop has its field. */
+export function sheetForm(sheet: BidFields, basis: Pick<BidBasis, 'categories'>, decimal: Decimal): SheetForm {
   const money = (cents: number | null) => plainMoney(cents, decimal);
   const text = (value: string | number | null) => (value === null ? '' : String(value));
   const costs = Object.fromEntries(COSTS.map((cost) => [cost, money(sheet[cost] || null)]));
@@ -106,7 +106,10 @@ export function sheetForm(sheet: BidFields, decimal: Decimal): SheetForm {
     isSeen: sheet.isSeen === null ? '' : sheet.isSeen ? 'yes' : 'no',
     expectedSaleCents: money(sheet.expectedSaleCents),
     countedSaleCents: money(sheet.countedSaleCents),
-    amounts: Object.fromEntries(sheet.lines.map((line) => [line.categoryId, money(line.cents)])),
+    amounts: {
+      ...Object.fromEntries(basis.categories.map(({ id }) => [id, ''])),
+      ...Object.fromEntries(sheet.lines.map((line) => [line.categoryId, money(line.cents)])),
+    },
     ruleKind: sheet.rule.kind,
     level: 'level' in sheet.rule ? sheet.rule.level : '4/5',
     flatPercent: sheet.rule.kind === 'flat' ? text(sheet.rule.percent) : '',
@@ -156,10 +159,10 @@ export function newSheet(basis: BidBasis, decimal: Decimal): SheetForm {
     rule: basis.ruleInForce ? { kind: 'in force' } : { kind: 'two-part', level: '4/5' },
     wantedCentsPerHour: basis.wantedCentsPerHour ?? 0,
   };
-  return { ...sheetForm(start, decimal), expectedSaleCents: '' };
+  return { ...sheetForm(start, basis, decimal), expectedSaleCents: '' };
 }
 
 /** Cents as a field starts with them, the decimals left out where there are none. */
-function plainMoney(cents: number | null, decimal: Decimal): string {
+export function plainMoney(cents: number | null, decimal: Decimal): string {
   return centsToText(cents, decimal).replace(/[.,]00$/, '');
 }

@@ -1,3 +1,4 @@
+import { useMemo } from 'react';
 import { useWatch } from 'react-hook-form';
 import type { Bid } from '#shared/contracts/bids.ts';
 import type { BidBasis } from '#shared/contracts/bids-basis.ts';
@@ -20,6 +21,7 @@ import { SaleFields } from './sale-fields.tsx';
 import { cautionsOf, sayBid } from './say.ts';
 import { Selling } from './selling.tsx';
 import { SheetActs } from './sheet-acts.tsx';
+import type { SheetForm } from './sheet-form.ts';
 import { SheetCautions } from './sheet-cautions.tsx';
 import { type Arrived, useKeeping } from './use-keeping.tsx';
 import { useBase, useTyped } from './use-base.ts';
@@ -44,7 +46,8 @@ export function Sheet({ basis, bid, home, shop, mayWrite, onKept, onBought }: Pr
   const format = useFormatter();
   const base = useBase(bid, basis, home);
   const { form, schema } = useSheetForm(base.first.draft?.values ?? base.start);
-  const values = { ...base.start, ...useWatch({ control: form.control }) } as typeof base.start;
+  const watched = useWatch({ control: form.control });
+  const values = useMemo(() => ({ ...base.start, ...watched }) as SheetForm, [base.start, watched]);
   const typed = useTyped(form, values, { ...base, bid, home });
   const reading = useReading(values, schema, basis);
   const { sheet, figures, whole } = reading;
@@ -83,8 +86,6 @@ export function Sheet({ basis, bid, home, shop, mayWrite, onKept, onBought }: Pr
             <WorkFields {...fields} />
             <RuleFields {...fields} figures={figures} />
             <CostFields {...fields} sheet={sheet} mayWrite={mayWrite} />
-            <WalkRound {...fields} />
-            <NotesFields form={form} />
           </fieldset>
         </form>
         {sheet && figures && whole && (
@@ -98,6 +99,10 @@ export function Sheet({ basis, bid, home, shop, mayWrite, onKept, onBought }: Pr
           </div>
         )}
       </div>
+      <fieldset disabled={!isOpen} className="no-print mt-6 grid min-w-0 gap-6">
+        <WalkRound {...fields} />
+        <NotesFields form={form} />
+      </fieldset>
       {sheet && whole && (
         <BidPaper {...{ sheet, basis }} figures={whole} shopName={shop.name} madeOn={bid?.madeOn ?? shop.today} />
       )}

@@ -11,11 +11,11 @@ import { waitingSheets } from './waiting.ts';
 /** What a sheet starts with: as it is kept, or new; and over that what was typed here and has not arrived yet. */
 export function useBase(bid: Bid | null, basis: BidBasis, home: string) {
   const { decimal } = useFormatter();
-  const start = useMemo(() => (bid ? sheetForm(bid, decimal) : newSheet(basis, decimal)), [bid, basis, decimal]);
+  const start = useMemo(() => (bid ? sheetForm(bid, basis, decimal) : newSheet(basis, decimal)), [bid, basis, decimal]);
   const [first] = useState(() => {
     const waiting = bid && waitingSheets(home).find(({ changes }) => changes?.bidId === bid.id);
     const waits = waiting
-      ? { values: sheetForm(waiting.body, decimal), version: waiting.changes?.version ?? null }
+      ? { values: sheetForm(waiting.body, basis, decimal), version: waiting.changes?.version ?? null }
       : null;
     return { draft: draftOf(home, bid?.id ?? null, start) ?? waits, key: waiting?.key ?? newIdempotencyKey() };
   });
@@ -34,18 +34,24 @@ export function useTyped(
   const now = bid?.version ?? null;
   const base = useRef({ start, version: first.draft ? first.draft.version : now });
   const isChanged = stamp(values) !== stamp(base.current.start);
-  useDraft(home, bid?.id ?? null, { values, version: base.current.version }, isChanged);
+  // A new sheet that was kept is done with, though it still stands there for a moment.
+  const isDone = useRef(false);
+  useDraft(home, bid?.id ?? null, { values, version: base.current.version }, isChanged && !isDone.current);
   const restart = (from: SheetForm, version: number | null) => {
     base.current = { start: from, version };
     form.reset(from);
   };
   useEffect(() => {
     const { current } = base;
-    if (isChanged || (now === current.version && stamp(start) === stamp(current.start))) return;
+    if (isDone.current || isChanged || (now === current.version && stamp(start) === stamp(current.start))) return;
     base.current = { start, version: now };
     form.reset(start);
   }, [form, isChanged, now, start]);
-  return { isChanged, version: base.current.version, restart, forget: () => dropDraft(home, bid?.id ?? null) };
+  const forget = () => {
+    isDone.current = bid === null;
+    dropDraft(home, bid?.id ?? null);
+  };
+  return { isChanged, version: base.current.version, restart, forget };
 }
 
 /** Two forms that say the same have the same; an amount that was emptied is none. */

@@ -40,7 +40,8 @@ export function useKeeping({ form, basis, bid, home, typed, errandKey, onKept }:
       typed.forget();
       if (arrived) {
         dropWaiting(home, errand.key);
-        typed.restart(sheetForm(arrived.bid, decimal), arrived.bid.version);
+        // A new sheet is left as it stands: its page gives way to that of the kept one.
+        if (bid) typed.restart(sheetForm(arrived.bid, basis, decimal), arrived.bid.version);
       }
       setClash(null);
       onKept(arrived);
@@ -59,7 +60,7 @@ export function useKeeping({ form, basis, bid, home, typed, errandKey, onKept }:
   const onTheirs = () => {
     if (!clash) return;
     dropWaiting(home, clash.errand.key);
-    typed.restart(sheetForm(clash.theirs, decimal), clash.theirs.version);
+    typed.restart(sheetForm(clash.theirs, basis, decimal), clash.theirs.version);
     setClash(null);
   };
   const onMine = () => {

@@ -3,7 +3,7 @@ import { useNavigate } from 'react-router-dom';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { UnsentList } from '../../ui/unsent-list.tsx';
 import { Button } from '../../ui/button.tsx';
-import { draftOf, keepDraft } from './drafts.ts';
+import { hasNewDraft, keepDraft } from './drafts.ts';
 import { useSendWaiting } from './send-waiting.tsx';
 import { sheetForm } from './sheet-form.ts';
 import { useIsOnline } from './signal.ts';
@@ -22,9 +22,9 @@ export function WaitingList({ home, shopId, waiting }: Props) {
   const count = format.count(waiting.length, 'sheet');
   const onEdit = ({ key, body, changes }: Errand) => {
     const bidId = changes?.bidId ?? null;
-    const values = sheetForm(body, format.decimal);
+    const values = sheetForm(body, { categories: [] }, format.decimal);
     // A new sheet that was begun meanwhile would be lost under this one.
-    if (bidId === null && draftOf(home, null, values)) return setTaken(true);
+    if (bidId === null && hasNewDraft(home)) return setTaken(true);
     keepDraft(home, bidId, { values, version: changes?.version ?? null });
     if (bidId === null) dropWaiting(home, key);
     void navigate(`/s/${shopId}/pre-bid${bidId ? `/${bidId}` : ''}`);

@@ -23,7 +23,11 @@ export function WalkRound({ form, basis }: Props) {
   const own = surprises?.categories.filter(({ x }) => x > 0) ?? [];
   const category = (id: string) => capital(basis.categories.find((one) => one.id === id)?.name ?? 'another category');
   return (
-    <Panel title="Walk round it" subtitle={<>What tends to surprise on such a car. Tick what you looked at.</>}>
+    <Panel
+      title="Walk round it"
+      id="walk-round"
+      subtitle="What tends to surprise on such a car. Tick what you looked at."
+    >
       <p className="caution-note mb-4">{WALK_ROUND_CAUTION}</p>
       <div className="walk-columns">
         <section>

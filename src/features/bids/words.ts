@@ -16,7 +16,7 @@ export function kindWords({ classId, damageId, n }: Kind, basis: BidBasis, forma
 }
 
 /**
- * How plans usually end: `You usually end 17% over, on 41: $2,457.` The amount is the typed plan with that on top.
+ * How plans usually end: `You usually end 17% over, on 41: $2,457` The amount is the typed plan with that on top.
  * '' = no past that tells.
  */
 export function biasWords(
@@ -29,7 +29,7 @@ export function biasWords(
   const size = format.percent(Math.abs(rate));
   const side = size === format.percent(0) ? 'as planned' : `${size} ${rate > 0 ? 'over' : 'under'}`;
   const comes = planned ? `: ${write((planned * actual) / plan)}` : '';
-  return `You usually end ${side}, on ${format.number(n)}${comes}.`;
+  return `You usually end ${side}, on ${format.number(n)}${comes}`;
 }
 
 /** `4 in 5`. */
@@ -67,6 +67,12 @@ export function timesInTen(rate: number): string {
   const tens = Math.round(rate * 10);
   if (tens === 0) return 'less than once in 10';
   return tens === 1 ? 'about once in 10' : `about ${tens} times in 10`;
+}
+
+/** `All of it together holds about 6 times in 10; it brings what you want about 9 times in 10, …`. '' = nothing tried. */
+export function chanceWords({ both, wanted }: NonNullable<BidFigures['joint']>): string {
+  if (both.rate === null || wanted.rate === null) return '';
+  return `All of it together holds ${timesInTen(both.rate)}; it brings what you want ${timesInTen(wanted.rate)}, since a good sale may pay for a dear repair.`;
 }
 
 /** Can the bid be told from these figures? */

@@ -19,7 +19,7 @@ export function WorkFields({ form, basis }: { form: SheetFormApi; basis: BidBasi
   const { n, plannedSeconds, actualSeconds } = basis.hoursBias;
   const bias = biasWords({ n, plan: plannedSeconds, actual: actualSeconds }, format, {
     planned: parseHours(own),
-    write: (seconds) => `${format.hours(Math.round(seconds / 3600) * 3600)} h`,
+    write: (seconds) => `${format.hours(Math.round(seconds / 3600) * 3600)}\u00a0h`,
   });
   const onUse = () => form.setValue('days', String(Math.round(held ?? 0)), { shouldDirty: true, shouldValidate: true });
   return (

@@ -1,6 +1,6 @@
 import type { z } from 'zod';
 import type { Contract } from '#shared/contract.ts';
-import { send } from './send.ts';
+import { send, type Transport } from './send.ts';
 
 type Part<C, Name extends string, Key extends string = Name> =
   C extends Readonly<Record<Name, infer S extends z.ZodType>> ? { [K in Key]: z.input<S> } : unknown;
@@ -11,7 +11,7 @@ export type CallInput<C extends Contract> = Part<C, 'params'> &
   Part<C, 'body'> &
   (C extends { upload: true } ? { body: FormData } : unknown) &
   (C extends { once: true } ? { idempotencyKey: string } : unknown) &
-  (C extends { edits: true } ? { version: number } : unknown) & { signal?: AbortSignal };
+  (C extends { edits: true } ? { version: number } : unknown) & { signal?: AbortSignal; transport?: Transport };
 
 type Loose = {
   params?: Record<string, unknown>;
@@ -20,6 +20,7 @@ type Loose = {
   idempotencyKey?: string;
   version?: number;
   signal?: AbortSignal;
+  transport?: Transport;
 };
 
 /** Sends what the contract asks for and returns its reply, parsed by the same contract. Throws ApiProblem. */

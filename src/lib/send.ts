@@ -14,14 +14,19 @@ export type Send = {
   signal?: AbortSignal;
   /** About the session itself: it belongs to no shop, and the caller deals with a 401. */
   isAboutSession?: boolean;
+  /** What carries it, where `fetch` will not do. */
+  transport?: Transport;
 };
+
+export type Transport = (url: string, init: RequestInit) => Promise<Response>;
 
 /**
  * Sends one request and returns the reply's JSON, unread (undefined when it is empty). Throws ApiProblem for anything
  * else than success. Pages use `call`, which knows the contract; sign-in uses this, to stay small.
  */
 export async function send(request: Send): Promise<unknown> {
-  const reply = await fetch(request.url, {
+  const carry: Transport = request.transport ?? ((url, init) => fetch(url, init));
+  const reply = await carry(request.url, {
     method: request.method,
     headers: headersOf(request),
     body: bodyOf(request.body),

@@ -1,8 +1,10 @@
 import { useSuspenseQuery } from '@tanstack/react-query';
+import { useSearchParams } from 'react-router-dom';
 import { ledgerQuerySchema } from '#shared/contracts/ledger.ts';
 import { LedgerAnswer } from '../features/ledger/ledger-answer.tsx';
 import { LedgerDesk } from '../features/ledger/ledger-desk.tsx';
 import { LedgerFilters } from '../features/ledger/ledger-filters.tsx';
+import { OpenedEntry } from '../features/ledger/opened-entry.tsx';
 import { useAddressFilters } from '../lib/address-filters.ts';
 import { listsQuery, optionsOf } from '../lib/lists.ts';
 import { rebuildNamesQuery, rebuildOptions } from '../lib/rebuild-names.ts';
@@ -22,10 +24,12 @@ export function LedgerPage() {
   const { data: lists } = useSuspenseQuery(listsQuery());
   const { data: names } = useSuspenseQuery(rebuildNamesQuery());
   const { filters, set, isFiltered } = useAddressFilters(ledgerQuerySchema);
+  const entryId = useSearchParams()[0].get('entry');
   usePageKeys(KEYS);
   const rebuilds = rebuildOptions(names);
   const categories = optionsOf(lists.categories, filters.category ?? null);
   const clear = () => set(Object.fromEntries(Object.keys(filters).map((name) => [name, null])));
+  const canWrite = role === 'owner' || role === 'bookkeeper';
   return (
     <>
       <LedgerAnswer filters={filters} isFiltered={isFiltered} />
@@ -34,7 +38,7 @@ export function LedgerPage() {
           filters={filters}
           shopId={shop.id}
           today={shop.today}
-          canWrite={role === 'owner' || role === 'bookkeeper'}
+          canWrite={canWrite}
           rebuilds={rebuilds}
           categories={categories}
           filterBar={<LedgerFilters filters={filters} set={set} rebuilds={rebuilds} categories={categories} />}
@@ -54,6 +58,9 @@ export function LedgerPage() {
           }
         />
       </section>
+      {entryId && canWrite && (
+        <OpenedEntry {...{ entryId, rebuilds, categories }} onClose={() => set({ entry: null })} />
+      )}
     </>
   );
 }

@@ -3,9 +3,16 @@ import type { z } from 'zod';
 import type { Contract } from '#shared/contract.ts';
 import { type Session, sessionApi } from '#shared/contracts/session.ts';
 import type { Role } from '#shared/vocabulary.ts';
+import { uploadsBy } from './fake-upload.ts';
 
 type Of<C, Name extends string> = C extends Readonly<Record<Name, infer S extends z.ZodType>> ? z.output<S> : undefined;
-type Asked<C> = { params: Of<C, 'params'>; body: Of<C, 'body'>; version: number | null; key: string | null };
+type Asked<C> = {
+  params: Of<C, 'params'>;
+  query: Of<C, 'query'>;
+  body: Of<C, 'body'>;
+  version: number | null;
+  key: string | null;
+};
 type Answer<C extends Contract> = (asked: Asked<C>) => z.input<C['response']>;
 
 interface Route {
@@ -28,33 +35,47 @@ export class Refusal extends Error {
   }
 }
 
-/** Puts a faked server behind `fetch`; `asked` lists every write as "METHOD path body". Undo with vi.unstubAllGlobals. */
+/**
+ * Puts a faked server behind `fetch` and behind uploads; `asked` lists every write as "METHOD path body", an upload with
+ * the names of its files. Undo with vi.unstubAllGlobals.
+ */
 export function fakeServer(routes: readonly Route[]) {
   const asked: string[] = [];
-  vi.stubGlobal('fetch', async (url: string, init: RequestInit = {}) => {
+  const reply = async (url: string, init: RequestInit = {}): Promise<Response> => {
     const method = init.method ?? 'GET';
-    const [path = ''] = url.split('?');
-    if (method !== 'GET') asked.push([method, path, ...(typeof init.body === 'string' ? [init.body] : [])].join(' '));
+    const [path = '', search = ''] = url.split('?');
+    if (method !== 'GET') asked.push([method, path, ...sentWith(init.body)].join(' '));
     const route = routes.find(({ contract }) => contract.method === method && paramsOf(contract, path) !== null);
     if (!route) return refuse({ status: 404, detail: `The test serves no ${method} ${path}` });
     try {
-      const reply = route.answer(read(route.contract, path, init));
-      const parsed = route.contract.response.parse(reply);
+      const parsed = route.contract.response.parse(route.answer(read(route.contract, { path, search }, init)));
       return parsed === undefined ? new Response(null, { status: 204 }) : Response.json(parsed);
     } catch (refusal) {
       if (refusal instanceof Refusal) return refuse(refusal.problem);
       throw refusal;
     }
-  });
+  };
+  vi.stubGlobal('fetch', reply);
+  vi.stubGlobal('XMLHttpRequest', uploadsBy(reply));
   return { asked };
 }
 
-function read(contract: Contract, path: string, init: RequestInit): Asked<Contract> {
+function sentWith(body: RequestInit['body']): string[] {
+  if (typeof body === 'string') return [body];
+  return body instanceof FormData ? body.getAll('file').map((file) => (file as File).name) : [];
+}
+
+function read(
+  contract: Contract,
+  { path, search }: { path: string; search: string },
+  init: RequestInit,
+): Asked<Contract> {
   const headers = new Headers(init.headers);
   const body: unknown = typeof init.body === 'string' ? JSON.parse(init.body) : undefined;
   const match = headers.get('if-match');
   return {
     params: contract.params?.parse(paramsOf(contract, path)) as undefined,
+    query: contract.query?.parse(Object.fromEntries(new URLSearchParams(search))) as undefined,
     body: contract.body?.parse(body) as undefined,
     version: match === null ? null : Number(JSON.parse(match)),
     key: headers.get('idempotency-key'),

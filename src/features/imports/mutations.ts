@@ -2,7 +2,16 @@ import { useQueryClient } from '@tanstack/react-query';
 import { type Import, type ImportSettings, importsApi } from '#shared/contracts/imports.ts';
 import { call } from '../../lib/api.ts';
 import { useBooksChanged } from '../../lib/books-changed.ts';
+import { withProgress } from '../../lib/with-progress.ts';
 import { importQuery } from './queries.ts';
+
+export interface Upload {
+  readonly files: readonly File[];
+  readonly idempotencyKey: string;
+  readonly importAnyway?: boolean;
+  /** Gets the share that has gone, 0–1. */
+  readonly onProgress: (share: number) => void;
+}
 
 /** Writes to imports. Each keeps the page's own import fresh. */
 export function useImportWrites() {
@@ -16,15 +25,19 @@ export function useImportWrites() {
   }
 
   return {
-    async upload(file: File, idempotencyKey: string, importAnyway = false): Promise<Import> {
+    async upload({ files, idempotencyKey, importAnyway = false, onProgress }: Upload): Promise<Import> {
       const body = new FormData();
-      body.append('file', file);
-      return keep(
-        await call(importsApi.upload, { body, idempotencyKey, query: importAnyway ? { importAnyway: 'true' } : {} }),
-      );
+      for (const file of files) body.append('file', file);
+      const query = importAnyway ? { importAnyway: 'true' as const } : {};
+      const transport = withProgress(onProgress);
+      return keep(await call(importsApi.upload, { body, idempotencyKey, query, transport }));
     },
     async change({ id, version }: Import, body: ImportSettings): Promise<Import> {
       return keep(await call(importsApi.change, { params: { importId: id }, version, body }));
+    },
+    /** Fetches how it stands now, after somebody else was quicker. */
+    async latest({ id }: Import): Promise<Import> {
+      return keep(await call(importsApi.show, { params: { importId: id } }));
     },
     async commit({ id }: Import): Promise<Import> {
       return keep(await call(importsApi.commit, { params: { importId: id } }));

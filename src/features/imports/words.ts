@@ -1,5 +1,6 @@
-import type { Meaning } from '#shared/contracts/import-reading.ts';
-import type { AsideReason, NotData } from '#shared/contracts/import-words.ts';
+import type { Hint } from '#shared/contracts/import-beside.ts';
+import type { Column, Line, Meaning } from '#shared/contracts/import-reading.ts';
+import type { AsideReason, NotData, Outcome, Shape } from '#shared/contracts/import-words.ts';
 import type { ImportState } from '#shared/contracts/imports.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 
@@ -74,7 +75,7 @@ export const NOT_DATA_WORDS: Readonly<Record<NotData, string>> = {
 
 export const STATE_WORDS: Readonly<Record<ImportState, string>> = {
   reading: 'Being read',
-  ready: 'Read, not booked yet',
+  ready: 'Read; have a look and book it',
   committing: 'Being booked',
   committed: 'In the books',
   undone: 'Taken out again',
@@ -87,3 +88,40 @@ export function reasonWords(reason: string | null): string {
   if (reason === null) return '';
   return ASIDE_WORDS[reason as AsideReason] ?? NOT_DATA_WORDS[reason as NotData] ?? reason;
 }
+
+/** What a column is taken for, with the kind of cost that goes with it. */
+export const meaningWords = ({ meaning, category }: Pick<Column, 'meaning' | 'category'>) =>
+  `${MEANING_WORDS[meaning]}${category ? `: ${category}` : ''}`;
+
+export const OUTCOME_WORDS: Readonly<Record<Outcome, string>> = {
+  taken: 'Comes in',
+  'put aside': 'Put aside',
+  'not data': 'No data',
+};
+
+export const SHAPE_WORDS: Readonly<Record<Shape, string>> = {
+  expenses: 'one cost per row',
+  vehicles: 'one vehicle per row',
+  hours: 'hours worked',
+  'vehicle sheet': 'one sheet per vehicle',
+};
+
+export const HINT_WORDS: Readonly<Record<Hint['kind'], string>> = {
+  comment: 'Comment',
+  'hidden row': 'Hidden row',
+  'hidden column': 'Hidden column',
+  'formula without a value': 'Formula without a value',
+  link: 'Link to another file',
+};
+
+/** What kind of figure was read; a cost is named by its category alone. */
+export const LINE_WORDS: Readonly<Record<Line['kind'], string>> = {
+  entry: '',
+  purchase: 'Purchase',
+  sale: 'Sale',
+  asking: 'Asking price',
+  'expected sale': 'Expected sale',
+  estimate: 'Planned',
+  hours: 'Hours',
+  'estimated hours': 'Planned hours',
+};

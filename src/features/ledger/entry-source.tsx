@@ -14,9 +14,12 @@ export function EntrySource({ entryId }: { entryId: string }) {
     <section className="grid gap-2 border-t border-rule pt-4">
       {source && (
         <p>
-          From <Link to={`/s/${shop.id}/import/${source.importId}`}>{source.fileName}</Link>
-          {source.row !== null && `, row ${source.row}`}
-          {source.col !== null && `, column ${source.col}`}
+          From{' '}
+          <Link to={`/s/${shop.id}/import/${source.importId}${placeIn(source)}`}>
+            {source.fileName}
+            {source.row !== null && `, row ${source.row}`}
+            {source.col !== null && `, column ${source.col}`}
+          </Link>
         </p>
       )}
       {source?.cells && <p className="text-label text-soft">{source.cells.filter(Boolean).join(' · ')}</p>}
@@ -35,4 +38,10 @@ export function EntrySource({ entryId }: { entryId: string }) {
       )}
     </section>
   );
+}
+
+/** The end of the address that shows the very cell in its file. */
+function placeIn({ sheet, row, col }: { sheet: number | null; row: number | null; col: number | null }): string {
+  if (row === null) return '';
+  return `?sheet=${sheet ?? 1}&row=${row}${col === null ? '' : `&col=${col}`}`;
 }

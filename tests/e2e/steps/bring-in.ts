@@ -20,7 +20,7 @@ export async function startShop(page: Page): Promise<string> {
   await page
     .locator('main')
     .getByRole('link', { name: /spreadsheet/ })
-    .or(page.getByRole('button', { name: 'Choose a file' }))
+    .or(page.getByRole('button', { name: 'Choose files' }))
     .first()
     .waitFor();
   if (!page.url().endsWith('/import'))
@@ -28,7 +28,7 @@ export async function startShop(page: Page): Promise<string> {
       .locator('main')
       .getByRole('link', { name: /spreadsheet/ })
       .click();
-  await expect(page.getByRole('button', { name: 'Choose a file' })).toBeVisible();
+  await expect(page.getByRole('button', { name: 'Choose files' })).toBeVisible();
   return new URL(page.url()).pathname.replace(/\/import$/, '');
 }
 
@@ -69,7 +69,8 @@ export async function importList(page: Page, shop: string): Promise<void> {
   await expect(answerOn(page)).toHaveText(
     `Ready to come in: ${control.dataRows} of ${control.dataRows + 3} rows about 5 rebuilds; the file states no totals to hold it against.`,
   );
-  await expect(rowOf(page.getByRole('table', { name: 'Rows and cells put aside' }), '11')).toContainText('2/30/2020');
+  const aside = rowOf(page.getByRole('table', { name: 'Rows and cells put aside' }), '11');
+  await expect(aside.getByRole('textbox')).toHaveValue('2/30/2020');
   await expect(comesIn(page, 'purchase')).toHaveText(toTheCent(control.totalCentsByCategory['purchase'] ?? 0));
   await expect(comesIn(page, 'Costs together')).toHaveText(toTheCent(control.totalCents));
   await expect(comesIn(page, 'Sales')).toHaveText(toTheCent(control.totalSaleCents));

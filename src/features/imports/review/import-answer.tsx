@@ -1,9 +1,9 @@
 import type { ReactNode } from 'react';
 import type { Reading } from '#shared/contracts/import-reading.ts';
 import type { Import } from '#shared/contracts/imports.ts';
-import { AnswerHeader, Mark } from '../../ui/answer-header.tsx';
-import { Money } from '../../ui/figures.tsx';
-import { useFormatter } from '../../ui/formatter-context.tsx';
+import { AnswerHeader, Mark } from '../../../ui/answer-header.tsx';
+import { Money } from '../../../ui/figures.tsx';
+import { useFormatter } from '../../../ui/formatter-context.tsx';
 
 /** The page's question and its answer, as the import stands. `actions` stand at the right. */
 export function ImportAnswer({ file, actions }: { file: Import; actions?: ReactNode }) {

@@ -1,10 +1,10 @@
 import { useEffect, useRef, useState } from 'react';
 
-/** Takes a file that is dropped anywhere on the page. Gives whether one is being held over it. */
-export function useFileDrop(onFile: (file: File) => void): boolean {
+/** Takes files that are dropped anywhere on the page. Gives whether something is being held over it. */
+export function useFileDrop(onFiles: (files: readonly File[]) => void): boolean {
   const [isOver, setOver] = useState(false);
-  const latest = useRef(onFile);
-  latest.current = onFile;
+  const latest = useRef(onFiles);
+  latest.current = onFiles;
   useEffect(() => {
     const stop = new AbortController();
     const on = (name: 'dragover' | 'dragleave' | 'drop', hear: (event: DragEvent) => void) =>
@@ -17,8 +17,8 @@ export function useFileDrop(onFile: (file: File) => void): boolean {
     on('drop', (event) => {
       event.preventDefault();
       setOver(false);
-      const file = event.dataTransfer?.files[0];
-      if (file) latest.current(file);
+      const files = [...(event.dataTransfer?.files ?? [])];
+      if (files.length > 0) latest.current(files);
     });
     return () => stop.abort();
   }, []);

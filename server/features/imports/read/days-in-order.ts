@@ -1,15 +1,16 @@
 import { type Day, isDay } from '#shared/day.ts';
-import { nearestDay, yearlessParts } from '../cells/days.ts';
+import { looksLikeSerial, nearestDay, yearlessParts } from '../cells/days.ts';
 import type { Plan } from './plan.ts';
 
 /**
- * Reads the days of one column from top to bottom. A day without a year takes the year that brings it nearest to the day
- * above it, or the year in the sheet's name or title; `isGuess` then says of the last one read that it was so.
+ * Reads the days of one column from top to bottom. A day without a year takes the year in the sheet's name or title, else
+ * the one that brings it nearest to the day above it; `isGuess` then says of the last one read that it was so.
  */
 export function daysInOrder(plan: Plan, col: number) {
   const read = plan.days.get(col) ?? (() => 'blank' as const);
   const order = plan.orders.get(col) ?? 'MDY';
-  let before = yearOf(plan);
+  const titled = yearOf(plan);
+  let before = titled;
   const reader = {
     isGuess: false,
     next(text: string): Day | 'bad' | 'blank' {
@@ -18,10 +19,11 @@ export function daysInOrder(plan: Plan, col: number) {
       if (day === 'blank') return day;
       if (day !== 'bad') {
         before = day;
+        reader.isGuess = looksLikeSerial(text.trim());
         return day;
       }
       const parts = before === null ? null : yearlessParts(text, order);
-      const near = parts === null || before === null ? null : nearestDay(parts, before);
+      const near = parts === null || before === null ? null : nearestDay(parts, titled ?? before);
       if (near === null || !isDay(near)) return 'bad';
       reader.isGuess = true;
       before = near;
@@ -32,7 +34,7 @@ export function daysInOrder(plan: Plan, col: number) {
 }
 
 /** The middle of the year that a sheet's name speaks of; null = it speaks of none. */
-function yearOf({ sheet }: Plan): Day | null {
-  const year = /\b(?:19|20)\d\d\b/.exec(sheet.name ?? '')?.[0];
+function yearOf({ sheet, heading }: Plan): Day | null {
+  const year = /\b(?:19|20)\d\d\b/.exec(`${sheet.name ?? ''} ${heading.title}`)?.[0];
   return year ? `${year}-07-01` : null;
 }

@@ -1,5 +1,6 @@
 import { remembered } from '../cells/fold.ts';
 import { PURCHASE, SALE } from '../words/categories.ts';
+import { isCarriedLabel } from '../words/headings.ts';
 import { foreseenOf } from '../words/kinds.ts';
 import { isRefund } from '../words/refunds.ts';
 import { type ExpenseCells, expenseCellReader, expenseColumns, expenseFault, isPlanned } from './expense-cells.ts';
@@ -101,6 +102,7 @@ function readableCents({ paid, back }: ExpenseCells): number | null {
 /** Rows of the list that are no expense: totals, notes. null = an expense, or meant to be one. */
 function rowBeside(cells: readonly string[], { name, dateCell, paid, back }: ExpenseCells): RowRead | null {
   if (dateCell !== '' && name !== '') return null;
-  if (totalLabel(cells) !== undefined) return notData('total');
+  const label = totalLabel(cells);
+  if (label !== undefined) return notData(isCarriedLabel(label) ? 'carried' : 'total');
   return paid === 'blank' && back === 'blank' && filled(cells) === 1 ? notData('note') : null;
 }

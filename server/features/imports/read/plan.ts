@@ -29,6 +29,8 @@ export interface Heading {
   readonly line: number;
   readonly last: number;
   readonly cells: readonly string[];
+  /** What stands above them. */
+  readonly title: string;
 }
 
 /** Everything settled about one sheet. */

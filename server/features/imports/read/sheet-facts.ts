@@ -2,6 +2,7 @@ import type { Meaning } from '#shared/contracts/import-reading.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 import { looksLikeDay } from '../cells/days.ts';
 import { classReader, damageReader } from '../words/kinds.ts';
+import { makeOf } from '../words/vehicles.ts';
 import { headingMeanings } from '../words/headings.ts';
 import type { Draft } from './draft.ts';
 import type { Plan } from './plan.ts';
@@ -10,12 +11,21 @@ import { readOdometer } from './vehicle-cells.ts';
 
 const DATES = new Set<Meaning>(REBUILD_DATES.map(([field]) => field));
 const LONGEST = 60;
+const LONGEST_TAG = 40;
 
 /** Reads rows of labels and values about the vehicle itself: `Bought, 4/18/2019, Miles, 124893, salvage title`. */
 export function factReader(plan: Plan) {
   const damageOf = damageReader(plan.books.damages);
   const classOf = classReader(plan.books.classes);
   const dayOf = plan.days.get(1);
+
+  const tags = new Set([...plan.books.rebuilds.map(({ tag }) => tag), ...tagsOf(plan)].map((tag) => tag.toLowerCase()));
+  /** A stock number is the vehicle's name, unless another has it. */
+  function tagBy({ found, existing }: Draft, number: string): void {
+    if (existing || number.length > LONGEST_TAG || tags.has(number.toLowerCase())) return;
+    tags.add(number.toLowerCase());
+    found.tag = number;
+  }
 
   /** What a label may stand for, and its value; false = the value does not suit it. */
   function take(draft: Draft, meanings: readonly Meaning[], value: string): boolean {
@@ -29,6 +39,11 @@ export function factReader(plan: Plan) {
     }
     if (meanings.includes('odometer')) return set(readOdometer(value), (miles) => (found.odometer ??= miles));
     if (value.length > LONGEST || isFigure(value)) return false;
+    if (meanings.includes('year'))
+      return set(/^(?:19|20)\d\d$/.test(value) ? Number(value) : null, (year) => (found.year ??= year));
+    if (meanings.includes('make')) return set(makeOf(value) ?? value, (make) => (found.make ??= make));
+    if (meanings.includes('model')) return set(value, (model) => (found.model ??= model));
+    if (meanings.includes('stock number')) return set(value, (number) => tagBy(draft, number));
     if (meanings.includes('vin')) return set(value.length <= 20 ? value : null, (vin) => (found.vin ??= vin));
     if (meanings.includes('damage')) return set(damageOf(value), (name) => (found.damageName ??= name));
     if (meanings.includes('title brand')) return set(value, (brand) => (found.titleBrand ??= brand));
@@ -66,6 +81,10 @@ export function factReader(plan: Plan) {
       }
     },
   };
+}
+
+function* tagsOf(plan: Plan): Iterable<string> {
+  for (const target of plan.vehicles.values()) if (typeof target === 'object') yield target.found.tag;
 }
 
 function set<T>(value: T | null, keep: (value: T) => void): boolean {

@@ -26,6 +26,7 @@ export function columnSums(columns: readonly SummedColumn[], sheet = 1) {
     columns.map(({ col }) => [col, { taken: 0, aside: 0, takenSince: 0, asideSince: 0 }]),
   );
   const stated: StatedTotal[] = [];
+  let rows = 0;
 
   /** What a row holds in a column, and whether that came in. */
   function add(col: number, value: number, isTaken: boolean): void {
@@ -73,19 +74,25 @@ export function columnSums(columns: readonly SummedColumn[], sheet = 1) {
     if (stated.length < MOST_KEPT) stated.push({ sheet, ...total });
   }
 
-  /** Does an unlabelled row only repeat the sums of at least two columns? */
-  function isTotal(cells: readonly string[]): boolean {
+  /** Does an unlabelled row only repeat the sums of so many columns? One row alone is no sum. */
+  function isTotal(cells: readonly string[], fewest: number): boolean {
     let agreeing = 0;
+    if (rows < 2) return false;
     for (const { col, read } of columns) {
       const value = read(cells[col - 1] ?? '');
       if (value === null) continue;
       if (value !== sums.get(col)?.taken) return false;
       if (value !== 0) agreeing++;
     }
-    return agreeing >= 2;
+    return agreeing >= fewest;
   }
 
-  return { add, compare, note, isTotal, stated: stated as readonly StatedTotal[] };
+  /** A row of the table came in. */
+  function row(): void {
+    rows++;
+  }
+
+  return { add, row, compare, note, isTotal, stated: stated as readonly StatedTotal[] };
 }
 
 function meansWhole(value: number, sum: Sum, label: string): boolean {

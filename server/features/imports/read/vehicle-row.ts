@@ -5,10 +5,10 @@ import { fold } from '../cells/fold.ts';
 import { SUM_OF_COSTS } from '../understand/derived.ts';
 import { existingFinder } from '../understand/existing-finder.ts';
 import { placeOf, vehicleName } from '../understand/vehicle-columns.ts';
-import { readVehicle } from '../understand/vehicle-text.ts';
+import { looksLikeVehicle, readVehicle } from '../understand/vehicle-text.ts';
 import { type Draft, newDraft, tagMaker } from './draft.ts';
 import { type DraftLine, notData, type Plan, putAside, type RowReader, taken } from './plan.ts';
-import { totalLabel } from './row-kinds.ts';
+import { filled, totalLabel } from './row-kinds.ts';
 import type { ColumnSums } from './sums.ts';
 import { type Figure, type VehicleCells, vehicleCellReader } from './vehicle-cells.ts';
 import { freshCells } from './vehicle-row-before.ts';
@@ -22,6 +22,7 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums, carried: CarriedF
   const bookedAs = (earlier: EarlierRow | undefined) => rebuilds.get(earlier?.rebuildId ?? '') ?? null;
   const tagFor = tagMaker(plan.books.rebuilds.map((rebuild) => rebuild.tag));
   const seen = new Set<string>();
+  const thisYear = Number(plan.books.today.slice(0, 4));
   const named = namer(plan);
   const vehicle = placeOf(plan.columns, 'vehicle');
   const vehicleAt = (cells: readonly string[]) => (cells[vehicle] ?? '').trim();
@@ -34,12 +35,15 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums, carried: CarriedF
   return (cells, line) => {
     const name = nameOf(cells);
     const label = totalLabel(cells);
-    if ((label !== undefined && (name === '' || name === label.trim())) || (name === '' && sums.isTotal(cells))) {
+    if (
+      (label !== undefined && (name === '' || name === label.trim())) ||
+      (!isName(name, thisYear) && sums.isTotal(cells, name === '' ? 2 : 3))
+    ) {
       sums.compare(cells, line, label ?? '');
       return notData('total');
     }
     const row = read(cells);
-    if (name === '' && row.figures.length === 0) return notData('note');
+    if (row.figures.length === 0 && (name === '' || isRemark(cells, name, thisYear))) return notData('note');
     const known = plan.rowDrafts.get(line);
     const earlier = plan.earlier.get(line);
     const existing = known ? known.existing : (bookedAs(earlier) ?? (name === '' ? null : findExisting(name, row)));
@@ -58,6 +62,7 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums, carried: CarriedF
     if (key !== null) seen.add(key);
     const own = known ? withoutCarried(row, known, carried) : row;
     addAll(row, true);
+    sums.row();
     checkRepeated(plan, sums, cells, line);
     const fresh = before && freshCells(plan, read, cells, before);
     if (fresh?.isEmpty) return notData('already in');
@@ -73,6 +78,13 @@ export function vehicleRowReader(plan: Plan, sums: ColumnSums, carried: CarriedF
     return { ...taken(lines), cells: sold.asides, draft, ...(fresh ? { replaces: fresh.replaces } : {}) };
   };
 }
+
+/** A stock number, or a year beside a model. */
+const isName = (name: string, thisYear: number) => /^[\w.-]*\d[\w.-]*$/.test(name) || looksLikeVehicle(name, thisYear);
+
+/** A row of nothing but words that name no vehicle: `checked by D. Okafor`. */
+const isRemark = (cells: readonly string[], name: string, thisYear: number) =>
+  filled(cells) === 1 && !looksLikeVehicle(name, thisYear) && (!/\d/.test(name) || name.split(' ').length > 3);
 
 /** What sheets said of a vehicle so far: cents or seconds by what the column holds. */
 export type CarriedFigures = Map<Draft, Map<string, number>>;

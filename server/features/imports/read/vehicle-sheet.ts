@@ -1,5 +1,7 @@
 import { categoryReader, PURCHASE, SALE } from '../words/categories.ts';
-import { headingMeanings } from '../words/headings.ts';
+import { looksLikeDay } from '../cells/days.ts';
+import { looksLikeMoney } from '../cells/money.ts';
+import { headingMeanings, isCarriedLabel } from '../words/headings.ts';
 import type { Draft } from './draft.ts';
 import { notData, type Plan, putAside, type RowRead, type RowReader, taken } from './plan.ts';
 import { filled, totalLabel } from './row-kinds.ts';
@@ -18,6 +20,7 @@ interface State {
 }
 
 const LONGEST_SECTION = 40;
+const isText = (cell: string) => /\p{L}{2}/u.test(cell) && !looksLikeDay(cell) && !looksLikeMoney(cell);
 
 /**
  * Reads a sheet about one vehicle, or several one below the other: a title, facts, sections of costs and of work with
@@ -42,9 +45,12 @@ export function vehicleSheetReader(plan: Plan, sums: ColumnSums): RowReader {
   }
 
   function beside(cells: readonly string[], line: number): RowRead | null {
-    const label = totalLabel(cells);
     const [first = ''] = cells.filter((cell) => cell.trim() !== '');
-    if (label !== undefined || headingMeanings(first).includes('derived')) {
+    // A cost of a day, from `Total Auto Parts`, is no total.
+    const isDated = cells.some(looksLikeDay) && cells.filter(isText).length > 1;
+    const label = isDated ? undefined : totalLabel(cells);
+    if (label !== undefined && isCarriedLabel(label)) return notData('carried');
+    if (label !== undefined || (!isDated && headingMeanings(first).includes('derived'))) {
       totals.compare(cells, line, label ?? first, state.section.isOwnWork);
       return notData('total');
     }

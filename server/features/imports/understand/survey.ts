@@ -1,5 +1,6 @@
 import type { Column } from '#shared/contracts/import-reading.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
+import { looksLikeDay } from '../cells/days.ts';
 import { currenciesIn, decimalVote, looksLikeMoney } from '../cells/money.ts';
 import { type DateEvidence, dateWatcher } from './date-evidence.ts';
 import type { Sheet } from '../sheets/sheet.ts';
@@ -107,7 +108,7 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
     for (const cell of cells) {
       if (cell === '') continue;
       days.cell(cell);
-      if (!isFigure(cell)) continue;
+      if (!isFigure(cell) || looksLikeDay(cell)) continue;
       isData = true;
       decimalVotes += decimalVote(cell);
       const named = currenciesIn(cell);

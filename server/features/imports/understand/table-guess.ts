@@ -27,6 +27,13 @@ export interface TableGuess {
   readonly row: number | null;
 }
 
+const LONGEST_TITLE = 500;
+const titleOver = ({ above }: Head) =>
+  above
+    .flatMap(({ cells }) => cells)
+    .join(' ')
+    .slice(0, LONGEST_TITLE);
+
 interface Asked {
   readonly books: ShopBooks;
   readonly settings: ImportSettings;
@@ -34,7 +41,7 @@ interface Asked {
   readonly answers: ReadonlyMap<string, string>;
 }
 
-const NO_HEADING: Heading = { line: 0, last: 0, cells: [] };
+const NO_HEADING: Heading = { line: 0, last: 0, cells: [], title: '' };
 
 /** Guesses what a sheet holds from its first rows and what a person said of its columns. */
 export function guessTable(sheet: Sheet, { books, settings, decimal, answers }: Asked): TableGuess {
@@ -42,7 +49,9 @@ export function guessTable(sheet: Sheet, { books, settings, decimal, answers }: 
   const said = (settings.columns ?? []).filter((column) => (column.sheet ?? 1) === sheet.number);
   const guess = guessAll(head, sheet, books, said, decimal);
   const hasRows = head.heading !== null || head.below.length > 0;
-  const heading = head.heading ? { line: head.heading.line, last: head.last, cells: head.heading.cells } : NO_HEADING;
+  const heading = head.heading
+    ? { line: head.heading.line, last: head.last, cells: head.heading.cells, title: titleOver(head) }
+    : NO_HEADING;
   if (guess.shape === null) return { sheet, hasRows, heading, choices: [], ...guess };
   if (guess.shape === 'vehicle sheet') return { sheet, hasRows, heading: NO_HEADING, choices: [], ...guess };
   const asked = askOfColumns(guess.columns, guess.shape, answers, books);

@@ -42,8 +42,8 @@ export function commitRows(
   files: readonly GivenFile[],
   task: CommitTask,
   onPart?: (share: number) => void,
-): Brought {
-  const { plan } = understand(files, shopBooks(raw, task.shopId, task.now), task.settings);
+): { brought: Brought; settings: ImportSettings } {
+  const { plan, settings } = understand(files, shopBooks(raw, task.shopId, task.now), task.settings);
   if (!plan) throw new ReadingOutdated();
   raw.pragma('defer_foreign_keys = ON');
   const books = importedBooks(raw, task);
@@ -72,13 +72,14 @@ export function commitRows(
   const touched = new Set([...writer.touched, ...replaced.touched]);
   if (touched.size > 0) refreshRollup(raw, task.shopId, [...touched]);
   if (writer.hasOverhead() || replaced.hasOverhead()) refreshOverhead(raw, task.shopId);
-  return {
+  const brought = {
     filled,
     workerIds: writer.workerIds,
     replaced: { ...replaced.done, facts },
     vehicles: spellings(plan, writer),
     rebuildIds: read.drafts.map((draft) => writer.idOf(draft)),
   };
+  return { brought, settings };
 }
 
 /** The hashes of the rows of a sheet that came in; rows come in the order in which they were surveyed. */

@@ -81,14 +81,15 @@ const given = (files: readonly FileAt[]) => files.map(({ name, path }) => ({ nam
 function commitJob(raw: RawDatabase, job: CommitJob, onPart: (share: number) => void): Done {
   try {
     const commit = raw.transaction(() => {
-      const brought = commitRows(raw, given(job.files), job, onPart);
+      const { brought, settings } = commitRows(raw, given(job.files), job, onPart);
       const version = raiseBooksVersion(raw, job.shopId);
       const { changes } = raw
         .prepare(
-          `UPDATE imports SET state = 'committed', committed_at = ?, committed_version = ?, reading = json_set(reading, '$.brought', json(?)), version = version + 1
+          `UPDATE imports SET state = 'committed', committed_at = ?, committed_version = ?, reading = json_set(reading, '$.brought', json(?)),
+             mapping = ?, version = version + 1
            WHERE shop_id = ? AND id = ? AND state = 'committing'`,
         )
-        .run(job.at, version, JSON.stringify(brought), job.shopId, job.importId);
+        .run(job.at, version, JSON.stringify(brought), JSON.stringify(settings), job.shopId, job.importId);
       if (changes !== 1) throw new Error('The import is not waiting to be booked.');
       leave(raw, job, 'commit import', null, job.control);
     });

@@ -30,6 +30,8 @@ export function readFile(
       columns: [],
       hints: [],
       choices: [],
+      settings,
+      rememberedFrom: null,
       plan: null,
       refusal: { kind: error.kind, message: error.message, row: error.row },
     });
@@ -89,7 +91,7 @@ function previewOf(understood: Understanding, plan: FilePlan, onPart?: (share: n
           ],
     hints: [...hints],
     earlier: [...plan.earlier],
-    rememberedFrom: null,
+    rememberedFrom: understood.rememberedFrom,
   };
 }
 
@@ -111,6 +113,6 @@ function refusedReading(understood: Understanding): Reading {
     remarks: [],
     hints: [...understood.hints],
     earlier: [],
-    rememberedFrom: null,
+    rememberedFrom: understood.rememberedFrom,
   };
 }

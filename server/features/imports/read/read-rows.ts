@@ -4,6 +4,7 @@ import { asBefore } from '../earlier/as-before.ts';
 import { PURCHASE } from '../words/categories.ts';
 import { emptyControl } from './empty-control.ts';
 import type { Draft } from './draft.ts';
+import { sumGuard } from './sum-guard.ts';
 import type { DraftLine, FilePlan, RowRead } from './plan.ts';
 import { tableReader } from './table-reader.ts';
 import type { CarriedFigures } from './vehicle-row.ts';
@@ -25,6 +26,7 @@ export interface RowsRead {
 export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) => void): RowsRead {
   const drafts: Draft[] = [];
   const tally = newTally();
+  const fits = sumGuard();
   const stated: StatedTotal[] = [];
   const carried: CarriedFigures = new Map();
   plan.tables.forEach((table, done) => {
@@ -36,7 +38,10 @@ export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) =>
         const result = table.shape === 'vehicles' ? all : asBefore(table.earlier.get(line), all);
         const at = { sheet: number, row: line };
         if (result.draft) place(result.draft, at, drafts);
-        for (const made of result.lines) book(made, at, drafts, tally.control);
+        for (const made of result.lines) {
+          book(made, at, drafts, tally.control);
+          fits(made, tally.control, number);
+        }
         tally.count(result);
         sink.row(table.sheet.rawRow?.(line) ?? cells, line, result, number, cells);
       },

@@ -53,7 +53,8 @@ export function dateOrders(
     const column = columns.find((candidate) => candidate.col === col);
     const id = placedId('date-order', column?.sheet ?? 1, col);
     const answer = answers.get(id);
-    orders.set(col, answer === 'MDY' || answer === 'DMY' ? answer : (known ?? usual));
+    // What the dates themselves say goes before an answer that was given for an earlier file.
+    orders.set(col, known ?? (answer === 'MDY' || answer === 'DMY' ? answer : usual));
     if (known !== null || found.unsettled === 0) continue;
     choices.push({
       id,

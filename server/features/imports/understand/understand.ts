@@ -2,6 +2,7 @@ import type { Hint } from '#shared/contracts/import-beside.ts';
 import type { Choice, Column, Reading, SheetFound } from '#shared/contracts/import-reading.ts';
 import type { ImportSettings } from '#shared/contracts/imports.ts';
 import type { ShopBooks } from '../books.ts';
+import { recall } from '../earlier/recall.ts';
 import type { FilePlan } from '../read/plan.ts';
 import { FileRefusal } from '../refusal.ts';
 import { type GivenFile, openFiles } from '../sheets/open-files.ts';
@@ -18,19 +19,26 @@ export interface Understanding {
   readonly columns: readonly Column[];
   readonly hints: readonly Hint[];
   readonly choices: readonly Choice[];
+  /** What people said of these files, and of earlier ones with the same headings. */
+  readonly settings: ImportSettings;
+  readonly rememberedFrom: Reading['rememberedFrom'];
   readonly plan: FilePlan | null;
   readonly refusal: Reading['refusal'];
 }
 
 /**
  * Understands the files of an import before their rows are read: how they are written, where their headings are, what
- * their columns hold, in which order their dates stand, which spellings are one vehicle. Throws a FileRefusal for what is no table.
+ * their columns hold, in which order their dates stand, which spellings are one vehicle. Throws a FileRefusal for what is
+ * no table.
  */
-export function understand(files: readonly GivenFile[], books: ShopBooks, settings: ImportSettings): Understanding {
+export function understand(files: readonly GivenFile[], books: ShopBooks, said: ImportSettings): Understanding {
   const file = openFiles(files);
+  const sheets = editedSheets(file.sheets, said);
+  const recalled = recall(sheets, books.past, said, Number(books.today.slice(0, 4)));
+  const { settings } = recalled;
   const answers = new Map(Object.entries(settings.answers ?? {}));
   const decimal = usualDecimal(books.locale);
-  const guesses = editedSheets(file.sheets, settings)
+  const guesses = sheets
     .map((sheet) => guessTable(sheet, { books, settings, decimal, answers }))
     .filter(({ hasRows, sheet }) => hasRows || sheet.name === null);
   const first = guesses.find((guess) => guess.shape !== null) ?? guesses[0];
@@ -43,7 +51,9 @@ export function understand(files: readonly GivenFile[], books: ShopBooks, settin
       headingRow: first.heading.line || null,
     },
     sheets: guesses.filter(({ sheet }) => sheet.name !== null).map(sheetFound),
-    columns: guesses.flatMap(({ columns }) => columns),
+    columns: guesses.flatMap(({ columns }) => columns).map(recalled.columnSaid),
+    settings,
+    rememberedFrom: recalled.from,
     hints: hintsOf(file.sheets),
   };
   if (first.shape === null) {
@@ -58,8 +68,8 @@ export function understand(files: readonly GivenFile[], books: ShopBooks, settin
   return {
     ...base,
     format: { ...base.format, decimal: plan.decimal },
-    columns: plan.tables.flatMap(({ columns }) => columns),
-    choices: plan.choices,
+    columns: plan.tables.flatMap(({ columns }) => columns).map(recalled.columnSaid),
+    choices: plan.choices.map(recalled.choiceSaid),
     plan,
     refusal: null,
   };

@@ -57,10 +57,10 @@ export function sheetKeeper() {
           line,
         );
       if (line > MOST_ROWS) throw new FileRefusal('too-large', `“${name}” has more rows than a sheet can hold.`);
-      let text = cells[0] ?? '';
-      for (let at = 1; at < end; at++) text += BETWEEN + (cells[at] ?? '');
-      size += text.length;
-      if (text.length > LONGEST_CELL && cells.some((cell) => (cell?.length ?? 0) > LONGEST_CELL))
+      let length = end;
+      for (let at = 0; at < end; at++) length += cells[at]?.length ?? 0;
+      size += length;
+      if (length > LONGEST_CELL && cells.some((cell) => (cell?.length ?? 0) > LONGEST_CELL))
         throw new FileRefusal(
           'cell-too-long',
           `A cell of row ${line} of “${name}” holds more than a million characters.`,
@@ -68,6 +68,8 @@ export function sheetKeeper() {
         );
       if (size > MOST_TEXT)
         throw new FileRefusal('too-large', 'This workbook holds more text than can be read at once.');
+      let text = cells[0] ?? '';
+      for (let at = 1; at < end; at++) text += BETWEEN + (cells[at] ?? '');
       beside.row(line, isHiddenRow);
       if (end > widest) widest = end;
       lines.push(line);

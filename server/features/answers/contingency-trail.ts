@@ -2,7 +2,6 @@ import type { z } from 'zod';
 import type { contingencyAnswerSchema } from '#shared/contracts/answers-contingency.ts';
 import { MARKS_AT_MOST } from '#shared/contracts/answers-parts.ts';
 import type { Trial } from '../../domain/back-test.ts';
-import { byOverrun } from '../../domain/contingency.ts';
 import type { PlannedOutcome } from '../../domain/sets.ts';
 import { residualCents } from '../../domain/two-part-rule.ts';
 import { shopYearOf } from '../../domain/years.ts';
@@ -11,7 +10,8 @@ import { type AnswerInput, rebuildOf, refOf } from './input.ts';
 type Row = z.input<typeof contingencyAnswerSchema>['trail'][number];
 
 export interface TrailParts {
-  readonly outcomes: readonly PlannedOutcome[];
+  /** All of them, in order of overrun. */
+  readonly sorted: readonly PlannedOutcome[];
   /** Those where every entry says whether it was foreseen. */
   readonly told: readonly PlannedOutcome[];
   readonly trials: readonly Trial[];
@@ -22,15 +22,11 @@ export interface TrailParts {
 
 /** Each rebuild against both rules that it would have had; the latest so many, with their places in order of overrun. */
 export function trailOf(input: AnswerInput, parts: TrailParts): Row[] {
-  const { outcomes, told, trials, creepPercent } = parts;
-  const places = placesOf(outcomes.toSorted(byOverrun));
-  const twoPart = new Map(parts.twoPartTrials.map((trial) => [trial.id, trial]));
-  const lefts = told.map(({ id, ...one }) => ({ id, one, left: residualCents({ id, ...one }, creepPercent ?? 0) }));
-  const leftPlaces = placesOf(lefts.toSorted((a, b) => a.left - b.left));
-  const toldById = new Map(lefts.map(({ id, one, left }) => [id, { surpriseCents: one.surpriseCents, left }]));
-  return trials.slice(-MARKS_AT_MOST).map((trial) => {
+  const shown = parts.trials.slice(-MARKS_AT_MOST);
+  const places = placesOf(parts.sorted);
+  const twoPart = twoPartOf(parts);
+  return shown.map((trial) => {
     const { id, exitOn, estimateCents, overrunCents, historySize, asked } = trial;
-    const said = toldById.get(id);
     return {
       ...refOf(rebuildOf(input, id)),
       exitOn,
@@ -42,18 +38,28 @@ export function trailOf(input: AnswerInput, parts: TrailParts): Row[] {
       knownCount: historySize,
       uplift: asked?.uplift ?? null,
       asked,
-      twoPart: said
-        ? {
-            surpriseCents: said.surpriseCents,
-            leftCents: said.left,
-            place: leftPlaces.get(id) ?? 0,
-            asked: twoPart.get(id)?.asked ?? null,
-          }
-        : null,
+      twoPart: twoPart(id),
     };
   });
 }
 
+/** What the two-part rule sees of a rebuild. null = foreseen is not said of every entry. */
+function twoPartOf({ told, twoPartTrials, creepPercent }: TrailParts): (id: string) => Row['twoPart'] {
+  const lefts = told.map((one) => ({ one, id: one.id, leftCents: residualCents(one, creepPercent ?? 0) }));
+  const places = placesOf(lefts.toSorted((a, b) => a.leftCents - b.leftCents));
+  const at = new Map<string, number>();
+  for (const [i, { id }] of told.entries()) at.set(id, i);
+  return (id) => {
+    const left = lefts[at.get(id) ?? -1];
+    if (!left) return null;
+    // Trials stand in the order of the rebuilds that they are of.
+    const asked = twoPartTrials[at.get(id) ?? -1]?.asked ?? null;
+    return { surpriseCents: left.one.surpriseCents, leftCents: left.leftCents, place: places.get(id) ?? 0, asked };
+  };
+}
+
 function placesOf(sorted: readonly { readonly id: string }[]): ReadonlyMap<string, number> {
-  return new Map(sorted.map(({ id }, at) => [id, at + 1]));
+  const places = new Map<string, number>();
+  for (const { id } of sorted) places.set(id, places.size + 1);
+  return places;
 }

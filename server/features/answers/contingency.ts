@@ -3,7 +3,7 @@ import type { contingencyAnswerSchema, contingencyQuerySchema } from '#shared/co
 import type { Rule } from '#shared/contracts/rules.ts';
 import type { ShopRebuild } from '../../books/shop-facts.ts';
 import { type Trial, walkForward } from '../../domain/back-test.ts';
-import { contingency, type Level, levelOf, rankAt, wholePercent } from '../../domain/contingency.ts';
+import { byOverrun, contingency, type Level, levelOf, rankAt, wholePercent } from '../../domain/contingency.ts';
 import { ruleRecord } from '../../domain/rule-record.ts';
 import { type Completed, isOverwritten, plannedOutcomes } from '../../domain/sets.ts';
 import { median, quantile, sum } from '../../domain/statistics.ts';
@@ -38,6 +38,8 @@ export function contingencyAnswer(input: AnswerInput, query: z.output<typeof con
       : walkForward(outcomes, { levels: [level], knowledge: 'asKnown', withTwoPart: false });
   const trials = test?.trials.percent ?? [];
   const twoPartTrials = twoPartTest?.trials.twoPart ?? [];
+  // In order of overrun once: sorting what is sorted costs next to nothing.
+  const sorted = outcomes.toSorted(byOverrun);
   const twoPart = twoPartOf(told, level);
   const { creepPercent } = twoPart;
   return {
@@ -54,13 +56,13 @@ export function contingencyAnswer(input: AnswerInput, query: z.output<typeof con
     level: name,
     estimateCents: sum(outcomes.map((one) => one.estimateCents)),
     overrunCents: sum(outcomes.map((one) => one.overrunCents)),
-    percent: percentOf(input, outcomes, level),
+    percent: percentOf(input, sorted, level),
     twoPart,
     backTest: backTestOf(test, ['percent', ...FLAT_RULES]),
     twoPartBackTest: backTestOf(twoPartTest, ['percent', 'twoPart', ...FLAT_RULES]),
-    trail: trailOf(input, { outcomes, told, trials, twoPartTrials, creepPercent }),
+    trail: trailOf(input, { sorted, told, trials, twoPartTrials, creepPercent }),
     trailTotal: trials.length,
-    drift: driftOf(outcomes, level, input.today),
+    drift: driftOf(sorted, level, input.today),
     wantedCentsPerHour: input.shop.wantedCentsPerHour,
     pastBids: { percent: pastBidsOf(input, trials), twoPart: pastBidsOf(input, twoPartTrials) },
     damages: damagesOf(input, set, level),

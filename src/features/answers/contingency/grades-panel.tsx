@@ -120,7 +120,7 @@ function BasedCell({ rule }: { rule: GradedRule }) {
   const format = useFormatter();
   const { covered, scored } = rule.evidence;
   return (
-    <span className="font-normal">
+    <span className="font-normal whitespace-normal">
       {format.count(rule.rebuildCount, 'rebuild')} up to {format.day(rule.dataUntil)}
       {scored > 0 && (
         <span className="block text-label text-soft">
@@ -136,7 +136,7 @@ function AdoptedCell({ rule }: { rule: GradedRule }) {
   const { review } = rule;
   const kept = review && `${review.decision} after ${review.year} held ${review.x} of ${review.n}`;
   return (
-    <span className="font-normal">
+    <span className="font-normal whitespace-normal">
       {format.day(rule.adoptedOn)}, {rule.adoptedByName}
       {(kept || rule.note) && (
         <span className="block text-label text-soft">{[kept, rule.note].filter(Boolean).join('; ')}</span>

@@ -35,6 +35,6 @@ export function daysInOrder(plan: Plan, col: number) {
 
 /** The middle of the year that a sheet's name speaks of; null = it speaks of none. */
 function yearOf({ sheet, heading }: Plan): Day | null {
-  const year = /\b(?:19|20)\d\d\b/.exec(`${sheet.name ?? ''} ${heading.title}`)?.[0];
+  const year = /\b(?:19|20)\d\d\b/.exec(`${sheet.name ?? ''} ${heading.title ?? ''}`)?.[0];
   return year ? `${year}-07-01` : null;
 }

@@ -4,11 +4,13 @@ import { remembered } from '../cells/fold.ts';
 import { readHours } from '../cells/hours.ts';
 import type { VehicleTarget } from '../understand/vehicle-drafts.ts';
 import { placeOf, vehicleText } from '../understand/vehicle-columns.ts';
-import { type CategoryMeaning, PURCHASE, SALE } from '../words/categories.ts';
+import { type CategoryMeaning, paidWorkCategory, PURCHASE, SALE } from '../words/categories.ts';
 import { categoryGuesser } from '../words/infer-category.ts';
 import { daysInOrder } from './days-in-order.ts';
 import type { Plan } from './plan.ts';
-import { isOwnWork } from '../words/own-work.ts';
+import { hoursInside, saysWork } from '../words/own-work.ts';
+import { ownPayIn } from '../understand/survey.ts';
+import { hoursAt } from '../understand/own-labor.ts';
 
 /** Money of a cell: cents, nothing, or why it cannot be taken. */
 export type CellMoney = number | 'blank' | AsideReason;
@@ -28,6 +30,8 @@ export interface ExpenseCells {
   readonly meaning: CategoryMeaning | undefined;
   /** Own work, in seconds: hours beside words that say so. Then its amount is only hours times a rate. */
   readonly ownSeconds: number | null;
+  /** Money for own time of which the hours are not known: it is put aside. */
+  readonly isOwnPay: boolean;
   readonly person: string | null;
   readonly what: string | null;
   readonly vendor: string | null;
@@ -80,6 +84,9 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
   const guess = categoryGuesser(plan.books.categories);
   const guessOf = remembered((what: string) => guess([what], null));
   const unnamed = plan.categories.get('');
+  const payOf = ownPayIn(plan.columns);
+  const labor = plan.ownLabor;
+  const paidWork = { ...paidWorkCategory(plan.books.categories), isSure: true };
   // A list without a column for it says in its own words what each cost was, unless a person said where they belong.
   const meaningOf = (word: string, what: string | null) =>
     cols.category === 0 && what !== null && !unnamed?.isSure ? guessOf(what) : (plan.categories.get(word) ?? unnamed);
@@ -88,17 +95,23 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
     const name = nameOf(cells);
     const dateCell = cell(cols.date).trim();
     const what = textOf(cell(cols.what));
+    const paid = cellMoney(plan, cell(cols.amount));
+    const isPay = payOf(cells) !== null;
     return {
       name,
       dateCell,
       on: days.next(dateCell),
-      paid: cellMoney(plan, cell(cols.amount)),
+      paid,
       back: cellMoney(plan, cell(cols.credit)),
       planned: cellMoney(plan, cell(cols.planned)),
       isRough: days.isGuess || isRough(plan, cell(cols.amount)) || isRough(plan, cell(cols.credit)),
       target: plan.vehicles.get(name),
-      meaning: meaningOf(cell(cols.category).trim(), what),
-      ownSeconds: cols.hours > 0 ? ownSeconds(cell(cols.hours), [cell(cols.category), what ?? '']) : null,
+      meaning: isPay && labor.as === 'paid' ? paidWork : meaningOf(cell(cols.category).trim(), what),
+      ownSeconds:
+        isPay && labor.as === 'hours' && typeof paid === 'number' && paid > 0
+          ? hoursAt(paid, labor.rate)
+          : ownSeconds(cell(cols.hours), [cell(cols.category), what ?? '']),
+      isOwnPay: isPay && labor.as === 'aside',
       person: textOf(cell(cols.person)),
       what,
       vendor: textOf(cell(cols.vendor)),
@@ -107,8 +120,10 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
 }
 
 function ownSeconds(cell: string, words: readonly string[]): number | null {
+  if (!words.some(saysWork)) return null;
+  const inside = () => words.map(hoursInside).find((seconds) => seconds !== null) ?? null;
   const seconds = readHours(cell);
-  return typeof seconds === 'number' && seconds > 0 && words.some(isOwnWork) ? seconds : null;
+  return typeof seconds === 'number' && seconds > 0 ? seconds : inside();
 }
 
 const LONGEST = { what: 500, vendor: 200 };
@@ -125,6 +140,7 @@ export function expenseFault(row: ExpenseCells, cols: ExpenseColumns, isRepeat: 
   if (typeof back === 'string' && back !== 'blank') return { reason: back, col: cols.credit };
   if (paid === 'blank' && back === 'blank' && row.ownSeconds === null && !isPlanned(row))
     return { reason: 'missing-amount', col: cols.amount || cols.credit };
+  if (row.isOwnPay) return { reason: 'bad-hours', col: cols.amount };
   if ((row.what?.length ?? 0) > LONGEST.what) return { reason: 'cell-too-long', col: cols.what };
   if ((row.vendor?.length ?? 0) > LONGEST.vendor) return { reason: 'cell-too-long', col: cols.vendor };
   return factFault(row, cols);

@@ -23,7 +23,7 @@ export function expenseRowReader(plan: Plan, sums: ColumnSums): RowReader {
     if (typeof row.paid === 'number') sums.add(cols.amount, row.paid, fault === null && !isWork);
     if (typeof row.back === 'number') sums.add(cols.credit, row.back, fault === null);
     if (fault) return putAside(fault.reason, fault.col, readableCents(row));
-    if (isWork) return taken([workOf(row, line, cols.hours)]);
+    if (isWork) return taken([workOf(row, line, cols.hours || cols.amount)]);
     const came = said(cols.foreseen > 0 ? (cells[cols.foreseen - 1] ?? '').trim() : '');
     const lines: DraftLine[] = [];
     const isBack = row.back === 'blank' && isTypedPositive(row);

@@ -7,6 +7,7 @@ import type { DecimalMark, Money } from '../cells/money.ts';
 import type { PastCell } from '../earlier/past.ts';
 import type { EarlierRows } from '../earlier/settle-earlier.ts';
 import type { SurveyedRows } from '../understand/survey.ts';
+import type { OwnLabor } from '../understand/own-labor.ts';
 import type { VehicleTarget } from '../understand/vehicle-drafts.ts';
 import type { CategoryMeaning } from '../words/categories.ts';
 import type { Sheet } from '../sheets/sheet.ts';
@@ -30,7 +31,7 @@ export interface Heading {
   readonly last: number;
   readonly cells: readonly string[];
   /** What stands above them. */
-  readonly title: string;
+  readonly title?: string;
 }
 
 /** Everything settled about one sheet. */
@@ -54,6 +55,8 @@ export interface Plan {
   /** In a workbook: columns that only repeat what other sheets hold in detail. */
   readonly repeated: readonly RepeatedColumn[];
   readonly categories: ReadonlyMap<string, CategoryMeaning>;
+  /** What becomes of money for own time. */
+  readonly ownLabor: OwnLabor;
   /** Lines that repeat a block pasted twice, to be put aside. */
   readonly repeats: ReadonlySet<number>;
   /** What the rows hold that sheets are known by later; see `SurveyedRows`. */

@@ -1,6 +1,14 @@
 import type { Choice } from '#shared/contracts/import-reading.ts';
 import { fold } from '../cells/fold.ts';
-import { type CategoryMeaning, categoryReader, otherCategory, PURCHASE, SALE } from '../words/categories.ts';
+import { isOwnWork } from '../words/own-work.ts';
+import {
+  type CategoryMeaning,
+  categoryReader,
+  otherCategory,
+  paidWorkCategory,
+  PURCHASE,
+  SALE,
+} from '../words/categories.ts';
 
 const MOST_ASKED = 100;
 
@@ -15,11 +23,12 @@ export function categoryWords(
 ): { of: Map<string, CategoryMeaning>; choices: Choice[] } {
   const read = categoryReader(shopCategories);
   const other = otherCategory(shopCategories);
+  const paidWork = paidWorkCategory(shopCategories);
   const allowed = new Set([...shopCategories, PURCHASE, SALE]);
   const of = new Map<string, CategoryMeaning>();
   const choices = new Map<string, Choice>();
   for (const [word, count] of counts) {
-    const found = read(word);
+    const found = read(word) ?? (isOwnWork(word) ? paidWork : null);
     const id = `category:${fold(word)}`;
     const answer = answers.get(id);
     const preset = found?.category ?? other;

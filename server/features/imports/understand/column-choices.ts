@@ -2,8 +2,9 @@ import type { Choice, Column } from '#shared/contracts/import-reading.ts';
 import type { Shape } from '#shared/contracts/import-words.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import type { ShopBooks } from '../books.ts';
-import { otherCategory } from '../words/categories.ts';
+import { otherCategory, paidWorkCategory } from '../words/categories.ts';
 import { headingMeanings, headingWords, plannedPart } from '../words/headings.ts';
+import { OWN_WORK } from './vehicle-row-columns.ts';
 import { placedId } from './placed-id.ts';
 
 /**
@@ -21,7 +22,15 @@ export function askOfColumns(
     shape === 'vehicles' &&
     columns.some((column) => column.meaning === 'derived' && column.why.includes('sum of the costs'));
   const choices: Choice[] = [];
+  const hasHours = columns.some(({ meaning }) => meaning === 'hours');
   const settled = columns.map((column) => {
+    if (column.why === OWN_WORK && column.samples.length > 0 && !hasHours) {
+      const choice = ownLaborChoice(column, answers);
+      choices.push(choice);
+      if (choice.answer !== 'paid work') return column;
+      const { category } = paidWorkCategory(books.categories);
+      return { ...column, meaning: 'cost' as const, category, why: 'You said so.' };
+    }
     if (hasSum || !isUnexplained(column, shape)) return column;
     const id = placedId('columns', column.sheet, column.col);
     const answer = answers.get(id) ?? null;
@@ -35,7 +44,13 @@ export function askOfColumns(
 }
 
 function isUnexplained(column: Column, shape: Shape): boolean {
-  if (column.meaning !== 'ignore' || column.why === 'You said so.' || column.samples.length === 0) return false;
+  if (
+    column.meaning !== 'ignore' ||
+    column.why === OWN_WORK ||
+    column.why === 'You said so.' ||
+    column.samples.length === 0
+  )
+    return false;
   if (plannedPart(column.heading) !== null || !column.samples.every((cell) => looksLikeMoney(cell))) return false;
   const looksPaid = column.samples.some((cell) => /[.,]\d\d\b|[$€£]/.test(cell));
   const isDate = headingMeanings(column.heading).some((meaning) => meaning.endsWith('On'));
@@ -45,6 +60,24 @@ function isUnexplained(column: Column, shape: Shape): boolean {
     headingWords(column.heading) !== '' &&
     (shape === 'vehicles' || headingMeanings(column.heading).includes('amount'))
   );
+}
+
+function ownLaborChoice(column: Column, answers: ReadonlyMap<string, string>): Choice {
+  const id = placedId('own-labor', column.sheet, column.col);
+  return {
+    id,
+    kind: 'own-labor',
+    column: column.heading,
+    question: `Column “${column.heading}” holds money for labor and no hours. Was it your own time?`,
+    options: [
+      { value: 'leave out', label: 'yes: leave it out, own time is no money' },
+      { value: 'paid work', label: 'no: it was paid to somebody' },
+    ],
+    preset: 'leave out',
+    answer: answers.get(id) ?? null,
+    mustAsk: true,
+    why: 'Own time counts in hours and never as a cost; work that somebody was paid for is a cost.',
+  };
 }
 
 function choiceOf(column: Column, shape: Shape, id: string, answer: string | null): Choice {

@@ -11,6 +11,7 @@ import { categoryWords } from './category-words.ts';
 import { copiedSheets } from './copied-sheets.ts';
 import { commonOrder, dateOrders } from './date-order.ts';
 import { knownVehicles } from './known-vehicles.ts';
+import { ownLabor } from './own-labor.ts';
 import { markRepeated } from './overview.ts';
 import type { Survey } from './survey.ts';
 import type { TableGuess } from './table-guess.ts';
@@ -45,14 +46,17 @@ export function makeFilePlan(tables: readonly SurveyedTable[], shape: Shape, { b
   const choices: Choice[] = [...tables.flatMap(({ guess }) => guess.choices), ...copied.choices];
   const plans = tables.map(({ guess, found }): Plan => {
     const settled = settle(guess, found, { books, answers }, order);
-    choices.push(...settled.choices);
+    const money = moneyReader(decimal);
+    const pays = found.ownPay.map((cell) => money(cell)).filter((cents) => typeof cents === 'number');
+    const own = ownLabor(pays, guess.sheet.number, answers);
+    choices.push(...settled.choices, ...(own.choice ? [own.choice] : []));
     return {
       sheet: guess.sheet,
       shape: guess.shape,
       columns: guess.columns,
       heading: guess.heading,
       books,
-      money: moneyReader(decimal),
+      money,
       about: (text) => aboutCents(text, decimal),
       orders: settled.orders,
       days: settled.days,
@@ -62,6 +66,7 @@ export function makeFilePlan(tables: readonly SurveyedTable[], shape: Shape, { b
       ),
       repeated: [],
       categories: settled.categories,
+      ownLabor: own.labor,
       repeats: new Set([...settled.repeats, ...(copied.lines.get(guess.sheet.number) ?? [])]),
       rows: found.rows,
       earlier: earlierRows(matched, guess.sheet.number, answers),

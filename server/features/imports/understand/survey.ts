@@ -8,7 +8,9 @@ import { isFigure, namesVehicle, titleOf } from '../read/sheet-words.ts';
 import { repeatedRows, rowHash } from './repeats.ts';
 import type { Heading } from '../read/plan.ts';
 import { isHeadingAgain } from '../read/row-kinds.ts';
-import { vehicleText } from './vehicle-columns.ts';
+import { readHours } from '../cells/hours.ts';
+import { hoursInside, saysWork } from '../words/own-work.ts';
+import { placeOf, vehicleText } from './vehicle-columns.ts';
 
 /** What only the whole file can tell, found in one pass before any row is understood. */
 export interface Survey {
@@ -22,6 +24,8 @@ export interface Survey {
   readonly categories: ReadonlyMap<string, number>;
   /** Lines on which a block pasted twice stands. */
   readonly repeats: ReadonlySet<number>;
+  /** Amounts for labor without hours and without anybody who was paid, as they stand. */
+  readonly ownPay: readonly string[];
   /** A hash of each row that holds data, and its line. */
   readonly rows: SurveyedRows;
 }
@@ -46,6 +50,21 @@ const MONEY = new Set<Column['meaning']>([
 ]);
 const DATES = new Set<Column['meaning']>(['date', ...REBUILD_DATES.map(([field]) => field)]);
 
+const MOST_PAYS = 1_000;
+
+/** The amount of a row of labor that names neither hours nor a payee; null = the row is another. */
+export function ownPayIn(columns: readonly Column[]): (cells: readonly string[]) => string | null {
+  const [amount, hours, vendor] = (['amount', 'hours', 'vendor'] as const).map((meaning) => placeOf(columns, meaning));
+  const words = (['category', 'what'] as const).map((meaning) => placeOf(columns, meaning)).filter((at) => at >= 0);
+  const at = (cells: readonly string[], place = -1) => (cells[place] ?? '').trim();
+  return (cells) => {
+    const said = words.map((place) => at(cells, place));
+    if (!said.some(saysWork) || at(cells, vendor) !== '') return null;
+    const isTimed = typeof readHours(at(cells, hours)) === 'number' || said.some((text) => hoursInside(text) !== null);
+    return isTimed ? null : at(cells, amount) || null;
+  };
+}
+
 /** Goes through a whole sheet once. */
 export function survey(sheet: Sheet, columns: readonly Column[], heading: Heading, thisYear: number): Survey {
   const money = columns.filter((column) => MONEY.has(column.meaning)).map((column) => column.col - 1);
@@ -55,6 +74,8 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
   const nameOf = vehicleText(columns);
   const isAgain = isHeadingAgain(heading.cells);
   const category = columns.find((column) => column.meaning === 'category');
+  const ownPay: string[] = [];
+  const payOf = ownPayIn(columns);
   const currencies = new Map<string, number>();
   const vehicles = new Map<string, number>();
   const categories = new Map<string, number>();
@@ -73,6 +94,8 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
     for (const { at, see } of days) see.cell(cells[at] ?? '');
     const name = nameOf(cells);
     if (name) count(vehicles, name);
+    const pay = name ? payOf(cells) : null;
+    if (pay && ownPay.length < MOST_PAYS) ownPay.push(pay);
     if (category && name) count(categories, (cells[category.col - 1] ?? '').trim());
     if (cells.some((cell) => cell !== '')) {
       hashes.push(rowHash(cells));
@@ -85,6 +108,7 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
     currencies,
     vehicles,
     categories,
+    ownPay,
     repeats,
     rows: { hashes, lines, prints: rawPrints(sheet, hashes, lines) },
     dates: new Map(days.map(({ at, see }) => [at + 1, see.evidence])),
@@ -128,6 +152,7 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
     currencies,
     vehicles,
     categories: new Map(),
+    ownPay: [],
     repeats,
     rows: { hashes, lines, prints: rawPrints(sheet, hashes, lines).map((hash, i) => ownPrint(hash, owners[i] ?? '')) },
     dates: new Map([[1, days.evidence]]),

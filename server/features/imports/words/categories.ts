@@ -96,3 +96,9 @@ export function categoryReader(shopCategories: readonly string[]): (text: string
 export function otherCategory(shopCategories: readonly string[]): string {
   return categoryReader(shopCategories)('other')?.category ?? shopCategories.at(-1) ?? 'other';
 }
+
+/** Where work goes that somebody was paid for, as a guess. */
+export function paidWorkCategory(shopCategories: readonly string[]): CategoryMeaning {
+  const found = categoryReader(shopCategories)('outside labor');
+  return { category: found?.category ?? otherCategory(shopCategories), isSure: false };
+}

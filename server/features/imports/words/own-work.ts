@@ -1,4 +1,4 @@
-import { fold } from '../cells/fold.ts';
+import { fold, remembered } from '../cells/fold.ts';
 
 const OWN_WORK =
   /^(?:(?:my|own|our|shop|owners?|self|in house)\s)?(?:labou?r|hours|hrs|time|work|time spent|arbeit|arbeitszeit|eigenleistung(?:en)?|eigenarbeit|eigene arbeit|eigene stunden|stunden|zeit|mano de obra|horas|trabajo|main d oeuvre|heures|travail|temps)(?:\s(?:log|hours|hrs|spent|own|mine|my own|me|self|by me|propia|propio|propias|eigene?|interne|perso|cost|costs|value|kosten|horas|stunden|heures))?$/;
@@ -17,6 +17,14 @@ export const isMine = (text: string) => MINE.test(fold(text));
 /** Does a heading of own work name hours? */
 export const saysHours = (heading: string) =>
   /\b(?:h|hrs?|hours?|std|stunden|horas?|heures?)\b/.test(fold(heading.replace(RATE, ' ')));
+
+const MAY_BE_OWN =
+  /labo|time|work|hour|hrs|arbeit|eigen|stunden|zeit|mano|horas|trabajo|tiempo|main|heure|travail|temps/i;
+
+/** Does any of a row's words say that it is labor, or own time outright? */
+export const saysWork = remembered(
+  (text) => MAY_BE_OWN.test(text) && text.length < 80 && (isOwnWork(text) || isMine(text)),
+);
 
 const HOURS_INSIDE = /(\d{1,4}(?:[.,]\d{1,2})?)\s*(?:h|hrs?|hours?|std|stunden|horas?|heures?)\b/i;
 

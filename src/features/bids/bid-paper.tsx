@@ -20,7 +20,8 @@ export function BidPaper({ sheet, basis, figures, shopName, madeOn }: Props) {
   const damages = [nameOf(basis.damages, sheet.damageId), nameOf(basis.damages, sheet.secondDamageId)];
   const seen = sheet.isSeen === null ? null : sheet.isSeen ? 'seen' : 'not seen';
   const car = [sheet.year, sheet.make, sheet.model, nameOf(basis.classes, sheet.classId), ...damages, seen, sheet.vin];
-  const own = surprisesFor(basis.surprises, sheet)?.categories.slice(0, 6) ?? [];
+  const surprises = surprisesFor(basis.surprises, sheet);
+  const own = surprises?.categories.slice(0, 6) ?? [];
   const category = (id: string) => capital(nameOf(basis.categories, id) ?? '');
   return (
     <section className="bid-paper">
@@ -45,7 +46,8 @@ export function BidPaper({ sheet, basis, figures, shopName, madeOn }: Props) {
         <ul>
           {own.map(({ categoryId, x, medianCents }) => (
             <Box key={categoryId} isTicked={sheet.ticks.includes(`own-${categoryId}`)}>
-              {category(categoryId)}: surprised {x} times, {format.money(Math.round(medianCents))} in the middle
+              {category(categoryId)}: a surprise on {x} of {surprises?.n}, {format.money(Math.round(medianCents))} in
+              the middle
             </Box>
           ))}
           {tradeChecks(damages).map(({ key, surprise }) => (

@@ -3,7 +3,7 @@ import { Link } from 'react-router-dom';
 import type { BidRow } from '#shared/contracts/bids.ts';
 import { capital } from '../../lib/capital.ts';
 import { DataTable } from '../../ui/data-table.tsx';
-import { Money } from '../../ui/figures.tsx';
+import { Money, Nothing } from '../../ui/figures.tsx';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import type { Column } from '../../ui/table.tsx';
 
@@ -47,7 +47,7 @@ const columnsOf = (shopId: string): Column<BidRow>[] => [
     number: true,
     under: 'phone',
     sortBy: (row) => row.hammerCents,
-    cell: (row) => <Hammer row={row} />,
+    cell: (row) => (row.hammerCents === null ? <Nothing /> : <Hammer row={row} hammerCents={row.hammerCents} />),
   },
   {
     id: 'became',
@@ -69,13 +69,12 @@ function Kept({ row }: { row: BidRow }) {
 }
 
 /** What the hammer fell at, and how far that lies from the bid to walk away above. */
-function Hammer({ row }: { row: BidRow }) {
+function Hammer({ row, hammerCents }: { row: BidRow; hammerCents: number }) {
   const format = useFormatter();
-  if (row.hammerCents === null) return <Money cents={null} />;
-  const over = row.bidCents === null ? null : row.hammerCents - row.bidCents;
+  const over = row.bidCents === null ? null : hammerCents - row.bidCents;
   return (
     <>
-      <Money cents={row.hammerCents} />
+      <Money cents={hammerCents} />
       {over !== null && over !== 0 && (
         <span className={`block text-label ${over > 0 ? 'text-oxide' : 'text-steel'}`}>
           {format.money(Math.abs(over))} {over > 0 ? 'above' : 'below'}

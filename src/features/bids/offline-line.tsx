@@ -10,14 +10,14 @@ export function OfflineLine({ basis, isOld }: { basis: BidBasis; isOld: boolean 
   const books = `the books as they stood on ${format.day(basis.asOf)}`;
   if (!isOnline || isOld) {
     return (
-      <p role="status" className="offline-line" data-offline>
+      <p role="status" className="offline-line no-print" data-offline>
         <strong className="font-[660]">No signal.</strong> Worked out from {books}. What you keep stays in this browser
         and is sent when there is signal.
       </p>
     );
   }
   return (
-    <p role="status" className="offline-line">
+    <p role="status" className="offline-line no-print">
       {pages === 'ready' && `Works without signal from here on, with ${books}.`}
       {pages === 'asked' && `Worked out from ${books}.`}
       {pages === 'never' &&

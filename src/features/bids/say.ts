@@ -9,7 +9,7 @@ export type Answer = { readonly before: string; readonly figure: string; readonl
 /** The walk-away bid in one sentence, or why there is none yet. */
 export function sayBid(sheet: BidFields | null, figures: BidFigures | null, format: Formatter): Answer {
   const plain = (before: string): Answer => ({ before, figure: '', after: '' });
-  if (!sheet || !figures) return plain('A field cannot be read yet: put in the sale expected, and see what is marked.');
+  if (!sheet || !figures) return plain('A field cannot be read yet: look at what is marked.');
   if (sheet.expectedSaleCents === 0) return plain('Put in what it should sell for.');
   if (figures.rule.isMissing) return plain('No bid yet: this cushion has too little behind it.');
   if (!hasBid(figures)) return plain('Do not bid: even as a gift it would not bring what you want.');

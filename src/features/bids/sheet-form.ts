@@ -80,9 +80,10 @@ export function sheetFormSchema(decimal: Decimal) {
     .transform(into(bidFieldsSchema));
 }
 
-/** What is typed as a sheet to work with, before it has a name too; null while a field cannot be read. */
+/** What is typed as a sheet to work with, before it has a name or a sale too; null while a field cannot be read. */
 export function readSheet(values: SheetForm, schema: ReturnType<typeof sheetFormSchema>): BidFields | null {
-  const found = schema.safeParse({ ...values, name: values.name.trim() || 'no name yet' });
+  const name = values.name.trim() || 'no name yet';
+  const found = schema.safeParse({ ...values, name, expectedSaleCents: values.expectedSaleCents.trim() || '0' });
   return found.success ? found.data : null;
 }
 

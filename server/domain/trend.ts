@@ -41,10 +41,11 @@ export function trend(points: readonly TrendPoint[]): Trend {
 
 function slopesOf(points: readonly TrendPoint[]): number[] {
   const slopes: number[] = [];
-  for (const [i, b] of points.entries()) {
+  for (let i = 1; i < points.length; i += 1) {
+    const { x = 0, y = 0 } = points[i] ?? {};
     for (let j = 0; j < i; j += 1) {
-      const a = points[j];
-      if (a && a.x !== b.x) slopes.push((b.y - a.y) / (b.x - a.x));
+      const other = points[j];
+      if (other && other.x !== x) slopes.push((y - other.y) / (x - other.x));
     }
   }
   return slopes;

@@ -54,6 +54,7 @@ export const LEFT_OUT_REASONS = [
   'left otherwise than by sale',
   'purchase not known',
   'own hours not known',
+  'own or paid hours not known',
   'planned or worked hours not known',
   'class or damage not known',
   'no estimate',
@@ -92,7 +93,7 @@ export const differenceSchema = z.object({
 export type Difference = z.output<typeof differenceSchema>;
 
 /** The latest so many rebuilds are what a trend is read from. */
-export const TREND_AT_MOST = 200;
+export const TREND_AT_MOST = 120;
 /** Change a year: median of the slopes between every two rebuilds, with its 95 % interval. null = nothing apart in time. */
 export const trendSchema = z.object({
   n: count,

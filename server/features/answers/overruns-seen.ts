@@ -75,11 +75,15 @@ export function byDamage(
   set: readonly ShopRebuild[],
   done: readonly ShopRebuild[],
 ): Answer['damages'] {
+  const [planned, finished] = [bySeen(set), bySeen(done)];
   const named = shop.damages.map(({ id, name }) => {
-    const of = (list: readonly ShopRebuild[], seen: boolean) =>
-      list.filter((one) => one.damage === name && one.seen === seen);
-    const [seen, unseen] = [true, false].map((value) => lookedAt(of(set, value), of(done, value)));
-    return { damageId: id, name, seen: seen ?? NOTHING, unseen: unseen ?? NOTHING };
+    const [own, all] = [planned.get(name) ?? NOBODY, finished.get(name) ?? NOBODY];
+    return {
+      damageId: id,
+      name,
+      seen: lookedAt(own.seen, all.seen),
+      unseen: lookedAt(own.unseen, all.unseen),
+    };
   });
   return named
     .filter(({ seen, unseen }) => seen.overrun.n + unseen.overrun.n > 0)
@@ -101,6 +105,27 @@ export function byDamage(
         damageUnseen: ratioDifference(one.unseen.overrun, rest.unseen.overrun),
       };
     });
+}
+
+interface BySeen {
+  readonly seen: ShopRebuild[];
+  readonly unseen: ShopRebuild[];
+}
+const NOBODY: BySeen = { seen: [], unseen: [] };
+
+/** By the name of the damage; where it is not said whether one was seen, it is in neither. */
+function bySeen(list: readonly ShopRebuild[]): Map<string, BySeen> {
+  const damages = new Map<string, BySeen>();
+  for (const one of list) {
+    if (one.damage === null || one.seen === null) continue;
+    let own = damages.get(one.damage);
+    if (!own) {
+      own = { seen: [], unseen: [] };
+      damages.set(one.damage, own);
+    }
+    own[one.seen ? 'seen' : 'unseen'].push(one);
+  }
+  return damages;
 }
 
 function countOf({ seen, unseen }: { seen: Looked; unseen: Looked }): number {

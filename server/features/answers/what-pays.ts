@@ -1,6 +1,6 @@
 import type { z } from 'zod';
 import type { Comparison, WhatPaysQuery, whatPaysAnswerSchema } from '#shared/contracts/answers-what-pays.ts';
-import type { Named } from '../../books/shop-facts.ts';
+import type { Named, ShopRebuild } from '../../books/shop-facts.ts';
 import { type OldSheetGroup, oldSheet } from '../../domain/old-sheet.ts';
 import { profit, rebuildProfit } from '../../domain/profit.ts';
 import { worked } from '../../domain/profit-per-hour.ts';
@@ -30,7 +30,8 @@ export function whatPaysAnswer(whole: AnswerInput, query: WhatPaysQuery): Answer
       ['not sold yet', rebuilds.filter(({ exit }) => exit === null)],
       ['left otherwise than by sale', otherExitsLeftOut(input, query, 'left')],
       ['purchase not known', done.filter(({ purchaseCents }) => purchaseCents === null)],
-      ['own hours not known', done.filter(({ ownSeconds }) => !ownSeconds)],
+      ['own hours not known', view === 'all-hours' ? [] : done.filter(({ ownSeconds }) => !ownSeconds)],
+      ['own or paid hours not known', view === 'all-hours' ? done.filter(lacksHours) : []],
       ['class or damage not known', done.filter((one) => cellOf(one) === null)],
     ]),
     totals,
@@ -49,6 +50,11 @@ export function whatPaysAnswer(whole: AnswerInput, query: WhatPaysQuery): Answer
     ),
     oldSheet: oldSheetOf(whole, query),
   };
+}
+
+/** Not in the view of all hours: own or paid ones are unknown, or there are none. */
+function lacksHours({ ownSeconds, paidSeconds }: ShopRebuild): boolean {
+  return ownSeconds === null || paidSeconds === null || ownSeconds + paidSeconds === 0;
 }
 
 /** A fit as the reply shows it: names with their ids, ranked. */

@@ -35,8 +35,8 @@ export function WorkedOutBasis({ answer, n, headline, withoutOne, write, definit
       </p>
       {withoutOne && (
         <p className="tabular-nums">
-          One rebuild changes this by at most so much: without <RebuildLink rebuild={withoutOne.rebuild} short />{' '}
-          {headline} would be {write(withoutOne.value)}.
+          One rebuild changes this: without <RebuildLink rebuild={withoutOne.rebuild} short /> {headline} would be{' '}
+          {write(withoutOne.value)}.
         </p>
       )}
       <p>

@@ -102,7 +102,7 @@ export const PLAN_AND_OUTCOME: MeasureGroup = {
       says: 'Is it getting better? A slope that no single rebuild can pull far.',
       formula:
         'For every two rebuilds: difference of the figure ÷ years between the days they left. The trend is the middle of all these slopes; its range is read from their order.',
-      edges: 'A range that holds 0 could be luck. Over the latest 200 rebuilds. Fewer than five: too few yet.',
+      edges: 'A range that holds 0 could be luck. Over the latest 120 rebuilds. Fewer than five: too few yet.',
       source: 'Theil 1950; Sen 1968.',
     },
   ],

@@ -154,7 +154,7 @@ test('how it is worked out ends with rows used and left out, what one rebuild ch
   await userEvent.click(await screen.findByText('How this is worked out'));
   expect(screen.getByText(/^Rows used: 9 rebuilds\. Left out: 3 no estimate/)).toBeVisible();
   expect(screen.getByText(/without/)).toHaveTextContent(
-    'One rebuild changes this by at most so much: without B-047 the overrun of all together would be +35.36%.',
+    'One rebuild changes this: without B-047 the overrun of all together would be +35.36%.',
   );
   expect(screen.getByRole('link', { name: 'The definition in full' })).toHaveAttribute(
     'href',

@@ -9,7 +9,7 @@ export type Group = Comparison['groups'][number];
 
 const PER: Record<PayView, string> = {
   'per-hour': 'an hour',
-  'all-hours': "for each hour, anybody's",
+  'all-hours': 'an hour, all hours counted',
   'after-wage': 'a rebuild after the wage for own hours',
   'on-cost': 'on cost',
 };

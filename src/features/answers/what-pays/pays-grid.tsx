@@ -3,7 +3,7 @@ import { PAY_VIEWS } from '#shared/vocabulary.ts';
 import { GridCells } from '../../../charts/grid-cells.tsx';
 import { useFormatter } from '../../../ui/formatter-context.tsx';
 import { Panel } from '../../../ui/panel.tsx';
-import { Segmented } from '../../../ui/segmented.tsx';
+import { ChipChoice } from '../../../ui/segmented.tsx';
 import { useAddress } from '../address.ts';
 import { useShopPath } from '../rebuild-link.tsx';
 import { type Group, payFigure } from '../sentences/what-pays.ts';
@@ -24,8 +24,9 @@ export function PaysGrid({ answer }: { answer: WhatPaysAnswer }) {
       title={VIEW_WORDS[view].title}
       subtitle="Bold: pulled toward the shop's average. Under it the 95% interval of the mean."
       actions={
-        <Segmented
+        <ChipChoice
           label="What to compare"
+          hideLabel
           options={PAY_VIEWS.map((value) => ({ value, label: VIEW_WORDS[value].label }))}
           value={view}
           onChange={(value) => change({ view: value === 'per-hour' ? null : value })}

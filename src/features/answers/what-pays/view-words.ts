@@ -12,8 +12,8 @@ export const VIEW_WORDS: Record<PayView, { label: string; title: string; header:
     },
     'all-hours': {
       label: 'All hours',
-      title: "Brought by each hour of work, anybody's, by class and damage",
-      header: 'An hour of anybody, pulled',
+      title: 'Brought by each hour, own and paid, by class and damage',
+      header: 'Brought an hour, pulled',
       unit: '/h',
       each: 'what it kept and the wages paid on it ÷ all hours, own and paid',
     },

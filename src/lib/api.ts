@@ -11,7 +11,11 @@ export type CallInput<C extends Contract> = Part<C, 'params'> &
   Part<C, 'body'> &
   (C extends { upload: true } ? { body: FormData } : unknown) &
   (C extends { once: true } ? { idempotencyKey: string } : unknown) &
-  (C extends { edits: true } ? { version: number } : unknown) & { signal?: AbortSignal; transport?: Transport };
+  (C extends { edits: true }
+    ? { version: number }
+    : C extends { edits: 'optional' }
+      ? { version?: number }
+      : unknown) & { signal?: AbortSignal; transport?: Transport };
 
 type Loose = {
   params?: Record<string, unknown>;
@@ -29,7 +33,7 @@ export async function call<const C extends Contract>(
   ...[input]: Record<never, never> extends CallInput<C> ? [input?: CallInput<C>] : [input: CallInput<C>]
 ): Promise<z.output<C['response']>> {
   const { params, query, ...rest }: Loose = input ?? {};
-  const url = fillPath(contract.path, params ?? {}) + queryText(query ?? {});
+  const url = addressOf(contract, params) + queryText(query ?? {});
   const reply = await send({ method: contract.method, url, ...rest });
   return contract.response.parse(reply) as z.output<C['response']>;
 }
@@ -39,7 +43,8 @@ export function newIdempotencyKey(): string {
   return crypto.randomUUID();
 }
 
-function fillPath(path: string, params: Record<string, unknown>): string {
+/** The address of a route, its parameters filled in. */
+export function addressOf({ path }: Contract, params: Readonly<Record<string, unknown>> = {}): string {
   return path.replace(/:(\w+)/g, (_, name: string) => encodeURIComponent(String(params[name])));
 }
 

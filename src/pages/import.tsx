@@ -72,20 +72,24 @@ function Review({ file, reading, settings, canWrite }: ReviewProps) {
   const { desk, start, onJump } = useJumps();
   const canChange = canWrite && (file.state === 'ready' || file.state === 'refused');
   const categories = lists.categories.filter((category) => !category.isRetired).map((category) => category.name);
+  const isBooked = file.state === 'committed';
   const to = (path: string) => `/s/${shop.id}/${path}`;
   const shared = { reading, settings, canChange, onJump };
   return (
     <>
-      {file.state === 'committed' && <AfterBooking reading={reading} to={to} />}
+      {isBooked && <AfterBooking reading={reading} to={to} />}
       <EarlierNote reading={reading} to={(importId) => to(`import/${importId}`)} />
-      <ChoicesPanel {...shared} />
-      <Workbench
-        ref={desk}
-        {...{ file, reading, settings, categories, canChange, start }}
-        entryTo={(entryId) => to(`ledger?import=${file.id}&entry=${entryId}`)}
-      />
+      {!isBooked && <ChoicesPanel {...shared} />}
+      {reading.firstRows.length > 0 && (
+        <Workbench
+          ref={desk}
+          {...{ file, reading, settings, categories, canChange, start }}
+          entryTo={(entryId) => to(`ledger?import=${file.id}&entry=${entryId}`)}
+        />
+      )}
       <div className="grid gap-6">
         <AsidesTable {...shared} />
+        {isBooked && <ChoicesPanel {...shared} />}
         {reading.shape && (
           <Panels>
             <ControlTotals reading={reading} />
@@ -109,7 +113,9 @@ function useJumps() {
   const asked = useRef(start);
   asked.current = start;
   useEffect(() => {
-    if (asked.current) desk.current?.go(asked.current);
+    // After the frame has shown the page from its top.
+    const next = requestAnimationFrame(() => asked.current && desk.current?.go(asked.current));
+    return () => cancelAnimationFrame(next);
   }, [address]);
   const onJump = useCallback((place: Place) => desk.current?.go(place), []);
   return { desk, start, onJump };

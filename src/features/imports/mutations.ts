@@ -39,8 +39,8 @@ export function useImportWrites() {
     async latest({ id }: Import): Promise<Import> {
       return keep(await call(importsApi.show, { params: { importId: id } }));
     },
-    async commit({ id }: Import): Promise<Import> {
-      return keep(await call(importsApi.commit, { params: { importId: id } }));
+    async commit({ id, version }: Import): Promise<Import> {
+      return keep(await call(importsApi.commit, { params: { importId: id }, version }));
     },
     async undo({ id }: Import): Promise<Import> {
       const reply = keep(await call(importsApi.undo, { params: { importId: id } }));

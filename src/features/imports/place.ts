@@ -22,7 +22,7 @@ export function sheetsOf(file: Import, reading: Reading): { value: string; label
   const nameOf = (number: number) => file.files.find((one) => one.number === number)?.name;
   const found = reading.sheets.map(({ number, name, file: of }) => {
     const from = file.files.length > 1 ? nameOf(of) : undefined;
-    return { value: String(number), label: from && from !== name ? `${from}: ${name}` : name };
+    return { value: String(number), label: from?.startsWith(name) ? from : from ? `${from}: ${name}` : name };
   });
   return found.length > 1 ? found : [];
 }

@@ -1,6 +1,7 @@
 import { useQueryClient, useSuspenseQuery } from '@tanstack/react-query';
 import { useEffect, useRef, useState } from 'react';
-import { type Import, progressSchema } from '#shared/contracts/imports.ts';
+import { type Import, importsApi } from '#shared/contracts/imports.ts';
+import { addressOf } from '../../lib/api.ts';
 import { useBooksChanged } from '../../lib/books-changed.ts';
 import { importQuery, isUnderWay } from './queries.ts';
 
@@ -28,7 +29,7 @@ function useProgressStream({ id, state }: Import, onStreaming: (isStreaming: boo
   useEffect(() => {
     if (!isOpen) return;
     const { queryKey } = importQuery(id);
-    const stream = new EventSource(`/api/imports/${id}/progress`);
+    const stream = new EventSource(addressOf(importsApi.progress, { importId: id }));
     const end = () => {
       stream.close();
       onStreaming(false);
@@ -37,7 +38,7 @@ function useProgressStream({ id, state }: Import, onStreaming: (isStreaming: boo
     stream.addEventListener('open', () => onStreaming(true));
     stream.addEventListener('error', end);
     stream.addEventListener('message', ({ data }: MessageEvent<string>) => {
-      const told = progressSchema.parse(JSON.parse(data));
+      const told = importsApi.progress.response.parse(JSON.parse(data));
       if (!isUnderWay(told.state)) end();
       else client.setQueryData(queryKey, (file) => file && { ...file, ...told });
     });

@@ -39,7 +39,7 @@ export function FileGrid(props: Props) {
   const { rows, reading, place, facts, settings, onPlace, onNearEnd } = props;
   const id = useId();
   const frame = useRef<HTMLDivElement>(null);
-  useImperativeHandle(props.ref, () => ({ focus: () => frame.current?.focus({ preventScroll: true }) }));
+  useImperativeHandle(props.ref, () => ({ focus: () => frame.current?.focus({ preventScroll: true }) }), []);
   const columns = useMemo(
     () => reading.columns.filter(({ sheet }) => sheet === place.sheet),
     [reading.columns, place.sheet],

@@ -45,7 +45,7 @@ export function Workbench({ ref, file, reading, settings, categories, canChange,
   const { rows, query, sheet, seek } = useRows(file, chosen, filter);
   const place = filter === 'all' ? chosen : placeAmong(rows, chosen);
   const frame = useRef<HTMLElement>(null);
-  const { grid, onGrid, focusGrid } = useGridFocus();
+  const { grid, onGrid, focusGrid } = useGridFocus(() => frame.current?.scrollIntoView({ block: 'start' }));
   const detail = useRef<HTMLDivElement>(null);
   const facts = useMemo(() => factsOf(reading), [reading]);
   const sheets = sheetsOf(file, reading);
@@ -54,7 +54,6 @@ export function Workbench({ ref, file, reading, settings, categories, canChange,
     setFilter('all');
     seek(to);
     setPlace(to);
-    frame.current?.scrollIntoView({ block: 'start' });
     focusGrid();
   };
   useImperativeHandle(ref, () => ({ go }));
@@ -133,17 +132,22 @@ export function Workbench({ ref, file, reading, settings, categories, canChange,
   );
 }
 
-/** Puts the focus on the grid: at once, or as soon as its rows are there. */
-function useGridFocus() {
+/** Shows the grid and puts the focus on it: at once, or as soon as its rows are there. */
+function useGridFocus(show: () => void) {
   const grid = useRef<GridHandle>(null);
   const isWanted = useRef(false);
+  const latest = useRef(show);
+  latest.current = show;
   const onGrid = useCallback<RefCallback<GridHandle>>((handle) => {
     grid.current = handle;
-    if (handle && isWanted.current) handle.focus();
+    if (!handle || !isWanted.current) return;
     isWanted.current = false;
+    latest.current();
+    handle.focus();
   }, []);
   const focusGrid = () => {
     isWanted.current = grid.current === null;
+    show();
     grid.current?.focus();
   };
   return { grid, onGrid, focusGrid };
@@ -151,7 +155,9 @@ function useGridFocus() {
 
 /** Into the first field of what was understood; Enter in the grid leads there. */
 function focusFirst(detail: HTMLElement | null): void {
-  detail?.querySelector<HTMLElement>('input:not([type="checkbox"]), select, button')?.focus();
+  const field = detail?.querySelector<HTMLElement>('input:not([type="checkbox"]), select, button');
+  field?.focus();
+  if (field instanceof HTMLInputElement) field.select();
 }
 
 /** The place, or the first of the rows where it is none of them. */

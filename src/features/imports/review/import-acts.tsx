@@ -22,8 +22,7 @@ type Props = {
 
 const STALE = {
   title: 'Somebody else changed this import meanwhile',
-  detail:
-    'How it stands now is shown below, and all that you changed is still here. Look once more, then read it again.',
+  detail: 'How it stands now is shown below, and all that you changed is still here. Look once more, then press again.',
 };
 
 /** What comes next, in words, and its one button: read it again with what was changed, book it, drop it, take it out. */

@@ -42,7 +42,10 @@ function words({ state, reading }: Import, { count, areCorrections }: Settings, 
     return 'It is in the books. If it was the wrong file, take it out again: nothing of it stays.';
   if (count > 0)
     return `${format.count(count, areCorrections ? 'correction' : 'change')} ${count === 1 ? 'is' : 'are'} not read yet.`;
-  if (state === 'refused') return 'Change what a column holds, or drop this file and bring in another.';
+  if (state === 'refused')
+    return reading?.columns.length
+      ? 'Change what a column holds, or drop this file and bring in another.'
+      : 'Drop this file and bring in another.';
   return reading ? readyWords(reading, format) : '';
 }
 

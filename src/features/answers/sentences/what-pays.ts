@@ -19,6 +19,11 @@ export function payText(value: number, view: PayView, format: Formatter): string
   return `${payFigure(value, view, format)} ${PER[view]}`;
 }
 
+/** The same with chalk under the figure alone: a line does not break within chalk. */
+function markedPay(value: number, view: PayView, format: Formatter): Sentence {
+  return say`${mark(payFigure(value, view, format))} ${PER[view]}`;
+}
+
 /** A value of a view without what it is of. */
 export function payFigure(value: number, view: PayView, format: Formatter): string {
   return view === 'on-cost' ? format.percent(value) : format.money(value, 'never');
@@ -88,7 +93,7 @@ function bestAndLeast({ best, worst }: Extremes, view: PayView, format: Formatte
   const top = best.pulled?.value ?? 0;
   const low = worst.pulled?.value ?? 0;
   const name = isFirst ? '' : `${nameOf(best)} `;
-  const most = mark(isFirst ? payText(top, view, format) : payFigure(top, view, format));
+  const most = isFirst ? markedPay(top, view, format) : mark(payFigure(top, view, format));
   const least = mark(payFigure(Math.abs(low), view, format));
   return say`${name}pays best, at ${most}; ${nameOf(worst)} ${low < 0 ? 'loses' : 'brings least,'} ${least}`;
 }
@@ -97,7 +102,7 @@ function noDifference(answer: WhatPaysAnswer, format: Formatter): Sentence {
   const { view } = answer;
   const value = answer.fits.cells.average?.mean ?? allTogether(answer);
   if (value === null) return ['No kind of wreck can be told from another yet.'];
-  return say`No kind of wreck can be told from another yet: all together they bring ${mark(payText(value, view, format))}.`;
+  return say`No kind of wreck can be told from another yet: all together they bring ${markedPay(value, view, format)}.`;
 }
 
 /** A view's figure of all finished rebuilds, sum over sum. */

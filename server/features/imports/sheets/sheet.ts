@@ -68,12 +68,10 @@ export function sheetKeeper() {
         );
       if (size > MOST_TEXT)
         throw new FileRefusal('too-large', 'This workbook holds more text than can be read at once.');
-      let text = cells[0] ?? '';
-      for (let at = 1; at < end; at++) text += BETWEEN + (cells[at] ?? '');
       beside.row(line, isHiddenRow);
       if (end > widest) widest = end;
       lines.push(line);
-      texts.push(text);
+      texts.push((end < cells.length ? cells.slice(0, end) : cells).join(BETWEEN));
     }
     const sheet: Sheet = {
       number,

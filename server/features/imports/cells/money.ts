@@ -21,9 +21,15 @@ export function moneyReader(decimal: DecimalMark): (text: string, isCostCell?: b
     if (saysNothing(trimmed)) return isCostCell ? 'blank' : 'bad';
     const cents = parseCents(trimmed.replace(SIGN, '').replace(/^\+|[.,]-+$/, ''), decimal);
     if (cents !== null) return cents;
-    return /\d/.test(trimmed) && ROUGH.test(trimmed) ? 'rough' : 'bad';
+    return /\d/.test(trimmed) && (ROUGH.test(trimmed) || OTHER_MARK[decimal].test(trimmed)) ? 'rough' : 'bad';
   };
 }
+
+/** An amount that can only be written with the other decimal mark: `61,20` or `1.234,00` among points. */
+export const OTHER_MARK: Readonly<Record<DecimalMark, RegExp>> = {
+  '.': /^\D*\d{1,3}(?:\.?\d{3})*,\d\d\D*$/,
+  ',': /^\D*\d{1,3}(?:,?\d{3})*\.\d\d\D*$/,
+};
 
 const BEFORE =
   /^(?:~|≈|ca\.?|circa|about|approx\.?|around|roughly|etwa|rund|ungefähr|unos|aprox\.?|environ|env\.?)\s*/i;
@@ -41,6 +47,7 @@ export function aboutCents(text: string, decimal: DecimalMark): number | null {
     const each = parseCents((times[2] ?? '').replace(AFTER, ''), decimal);
     return each === null || Number(times[1]) === 0 ? null : Number(times[1]) * each;
   }
+  if (OTHER_MARK[decimal].test(bare)) return parseCents(bare, decimal === '.' ? ',' : '.');
   const thousands = /^(\d{1,3})(?:[.,](\d{1,3}))?\s*k$/i.exec(bare);
   if (thousands) return (Number(thousands[1]) * 1000 + Number((thousands[2] ?? '').padEnd(3, '0'))) * 100;
   return parseCents(bare.replace(AFTER, '').replace(AFTER, ''), decimal);

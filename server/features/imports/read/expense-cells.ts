@@ -72,7 +72,11 @@ export function cellMoney(plan: Plan, cell: string): CellMoney {
 
 // Most cells are plain figures: they need no second look.
 const MAY_BE_ROUGH = /[a-z~≈?×*@]/i;
-const isRough = (plan: Plan, cell: string) => MAY_BE_ROUGH.test(cell) && plan.money(cell) === 'rough';
+const OTHER_MARK = { '.': /\.\d\d\D*$/, ',': /,\d\d\D*$/ };
+const roughReader = (plan: Plan) => {
+  const other = OTHER_MARK[plan.money('0.5') === 50 ? ',' : '.'];
+  return (cell: string) => (MAY_BE_ROUGH.test(cell) || other.test(cell)) && plan.money(cell) === 'rough';
+};
 
 const kept = (cell: string) => cell.trim().normalize('NFC') || null;
 
@@ -85,6 +89,7 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
   const guessOf = remembered((what: string) => guess([what], null));
   const unnamed = plan.categories.get('');
   const payOf = ownPayIn(plan.columns);
+  const isRough = roughReader(plan);
   const labor = plan.ownLabor;
   const paidWork = { ...paidWorkCategory(plan.books.categories), isSure: true };
   // A list without a column for it says in its own words what each cost was, unless a person said where they belong.
@@ -104,7 +109,7 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
       paid,
       back: cellMoney(plan, cell(cols.credit)),
       planned: cellMoney(plan, cell(cols.planned)),
-      isRough: days.isGuess || isRough(plan, cell(cols.amount)) || isRough(plan, cell(cols.credit)),
+      isRough: days.isGuess || isRough(cell(cols.amount)) || isRough(cell(cols.credit)),
       target: plan.vehicles.get(name),
       meaning: isPay && labor.as === 'paid' ? paidWork : meaningOf(cell(cols.category).trim(), what),
       ownSeconds:

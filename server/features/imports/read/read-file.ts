@@ -5,6 +5,7 @@ import { FileRefusal } from '../refusal.ts';
 import type { GivenFile } from '../sheets/open-files.ts';
 import { type Understanding, understand } from '../understand/understand.ts';
 import { emptyControl } from './empty-control.ts';
+import { overwrittenRemark } from './overwritten.ts';
 import { type DraftLine, type FilePlan, lineOf, type Plan } from './plan.ts';
 import { asidesOf } from './asides.ts';
 import { readRows } from './read-rows.ts';
@@ -83,17 +84,17 @@ function previewOf(understood: Understanding, plan: FilePlan, onPart?: (share: n
     notData: read.notData,
     statedTotals: [...read.statedTotals],
     control: read.control,
-    remarks:
-      ragged === 0
-        ? []
-        : [
-            `${ragged} rows have more cells than there are headings; what stands beyond the headings is kept with the rows and not booked.`,
-          ],
+    remarks: [raggedRemark(ragged), overwrittenRemark(read.drafts)].filter((remark) => remark !== null),
     hints: [...hints],
     earlier: [...plan.earlier],
     rememberedFrom: understood.rememberedFrom,
   };
 }
+
+const raggedRemark = (rows: number) =>
+  rows === 0
+    ? null
+    : `${rows} rows have more cells than there are headings; what stands beyond the headings is kept with the rows and not booked.`;
 
 function refusedReading(understood: Understanding): Reading {
   return {

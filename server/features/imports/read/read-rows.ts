@@ -4,6 +4,7 @@ import { asBefore } from '../earlier/as-before.ts';
 import { PURCHASE } from '../words/categories.ts';
 import { emptyControl } from './empty-control.ts';
 import type { Draft } from './draft.ts';
+import { overwrittenFinder } from './overwritten.ts';
 import { sumGuard } from './sum-guard.ts';
 import type { DraftLine, FilePlan, RowRead } from './plan.ts';
 import { tableReader } from './table-reader.ts';
@@ -27,6 +28,7 @@ export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) =>
   const drafts: Draft[] = [];
   const tally = newTally();
   const fits = sumGuard();
+  const overwritten = overwrittenFinder();
   const stated: StatedTotal[] = [];
   const carried: CarriedFigures = new Map();
   plan.tables.forEach((table, done) => {
@@ -41,6 +43,7 @@ export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) =>
         for (const made of result.lines) {
           book(made, at, drafts, tally.control);
           fits(made, tally.control, number);
+          overwritten.add(made);
         }
         tally.count(result);
         sink.row(table.sheet.rawRow?.(line) ?? cells, line, result, number, cells);
@@ -49,6 +52,7 @@ export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) =>
     );
     stated.push(...totals);
   });
+  overwritten.mark();
   tally.control.rebuilds = drafts.length;
   return { drafts, control: tally.control, notData: tally.notData, statedTotals: stated };
 }

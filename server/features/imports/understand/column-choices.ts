@@ -1,5 +1,6 @@
 import type { Choice, Column } from '#shared/contracts/import-reading.ts';
 import type { Shape } from '#shared/contracts/import-words.ts';
+import { looksLikeDay } from '../cells/days.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import type { ShopBooks } from '../books.ts';
 import { otherCategory, paidWorkCategory } from '../words/categories.ts';
@@ -51,7 +52,11 @@ function isUnexplained(column: Column, shape: Shape): boolean {
     column.samples.length === 0
   )
     return false;
-  if (plannedPart(column.heading) !== null || !column.samples.every((cell) => looksLikeMoney(cell))) return false;
+  if (
+    plannedPart(column.heading) !== null ||
+    !column.samples.every((cell) => looksLikeMoney(cell) && !looksLikeDay(cell))
+  )
+    return false;
   const looksPaid = column.samples.some((cell) => /[.,]\d\d\b|[$€£]/.test(cell));
   const isDate = headingMeanings(column.heading).some((meaning) => meaning.endsWith('On'));
   return (

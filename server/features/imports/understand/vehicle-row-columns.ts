@@ -28,7 +28,24 @@ export function guessOfVehicles(all: readonly ColumnFacts[], categoryOf: Categor
     if (!REPEATABLE.has(guess.meaning) && guess.category === null) used.add(guess.meaning);
     return guess;
   });
-  return withPurchase(all, guesses);
+  return besideDays(all, withPurchase(all, guesses));
+}
+
+/** Money right beside the day of a deal, which nothing else explains, is what the vehicle was bought, or sold, for. */
+function besideDays(all: readonly ColumnFacts[], guesses: readonly Guess[]): Guess[] {
+  const settled = [...guesses];
+  for (const [day, money] of [
+    ['boughtOn', 'purchase'],
+    ['soldOn', 'sale'],
+  ] as const) {
+    const at = settled.findIndex(({ meaning }) => meaning === day) + 1;
+    const facts = all[at];
+    const isFree = settled[at]?.meaning === 'ignore' && settled[at]?.why !== OWN_WORK;
+    if (at === 0 || !facts || !isFree || facts.filled === 0 || !holdsMoney(facts)) continue;
+    if (settled.some(({ meaning }) => meaning === money) || plannedPart(facts.heading) !== null) continue;
+    settled[at] = { meaning: money, category: null, why: 'It holds money and stands beside the day.' };
+  }
+  return settled;
 }
 
 function guessOne(facts: ColumnFacts, used: ReadonlySet<Meaning>, categoryOf: CategoryReader): Guess {

@@ -40,7 +40,7 @@ const HEADINGS: Readonly<Partial<Record<Meaning, string>>> = {
   notes:
     'notes|note|comments|comment|remarks|bemerkung|bemerkungen|notiz|notas|remarques|memo|observaciones|observations|anmerkung|anmerkungen|observacion|commentaire|commentaires|misc notes|status|stand|estado|statut',
   boughtOn:
-    'bought|bought on|purchased|date purchase|date of purchase|date purchased|fecha compra|fecha de compra|date d achat|comprado el|purchase date|date bought|buy date|gekauft|gekauft am|kaufdatum|comprado|achete|date in|in date|bought date|date acquired|acquired|acquired on|acquisition date|date won|won|auction date|day bought|einkaufsdatum|ankaufsdatum|kauf am|angekauft|angekauft am|einkauf am|f compra|adquirido|adquisicion|dia compra|achete le|acquis le|date acquisition',
+    'bought|bought on|purchased|date purchase|date of purchase|date purchased|fecha compra|fecha de compra|date d achat|comprado el|purchase date|date bought|buy date|gekauft|gekauft am|kaufdatum|comprado|achete|date in|in date|bought date|date acquired|acquired|acquired on|acquisition date|date won|won|auction date|day bought|einkaufsdatum|ankaufsdatum|kauf am|angekauft|angekauft am|einkauf am|f compra|adquirido|adquisicion|dia compra|achete le|acquis le|date acquisition|in',
   paidOn: 'paid|paid on|date paid|bezahlt|bezahlt am|pagado el|paye le|payment date',
   pickedUpOn:
     'picked up|pick up|pickup|arrived|abgeholt|date picked up|picked up on|pickup date|date towed|towed on|geholt|abholung|abgeholt am|recogido|recogida|enleve le|recupere le|date arrived|delivered on',
@@ -55,7 +55,7 @@ const HEADINGS: Readonly<Partial<Record<Meaning, string>>> = {
   listedOn:
     'listed|listed on|list date|advertised|inseriert|date listed|posted on|advertised on|ad date|for sale since|listing date|inseriert am|anzeige am|anunciado|anunciado el|publicado|annonce le|mis en vente|en vente le',
   soldOn:
-    'sold on|sold|date sold|sale date|sold date|verkauft|verkauft am|verkaufsdatum|vendido|vendu|fecha venta|fecha de venta|date vente|date de vente|vendido el|vendu le|date out|out date|date of sale|day sold|sold on date|vk am|vk datum|verkauf am|datum verkauf|f venta|vendido fecha|vendida el|date de cession|vendue le|sortie le',
+    'sold on|sold|date sold|sale date|sold date|verkauft|verkauft am|verkaufsdatum|vendido|vendu|fecha venta|fecha de venta|date vente|date de vente|vendido el|vendu le|date out|out date|date of sale|day sold|sold on date|vk am|vk datum|verkauf am|datum verkauf|f venta|vendido fecha|vendida el|date de cession|vendue le|sortie le|out',
   settledOn: 'settled|settled on|closed|abgerechnet',
   purchase:
     'bid|precio compra|precio de compra|compra|prix achat|prix d achat|achat|einkaufspreis|price paid|purchase|purchase price|price|paid|bought for|cost of car|hammer|buy price|kaufpreis|zuschlag|einkauf|bid price|winning bid|hammer bid|hammer price|price of car|car cost|car price|cost of vehicle|vehicle cost|vehicle price|paid for it|paid for car|gave|gave for it|bought at|buy|buy in|buy in price|bid amount|auction price|purchase cost|purchase amount|acquisition cost|ek|ek preis|einkauf preis|ankauf|ankaufpreis|ankaufspreis|kauf|kaufpreis netto|bezahlt|gebot|gekauft fur|pagado|precio coche|precio de subasta|coste compra|coste de compra|importe compra|comprado por|compra coche|prix|prix paye|prix voiture|cout achat|cout d achat|paye|montant achat|achete pour|prix adjuge|adjudication',
@@ -91,6 +91,7 @@ const ACTUAL =
 
 /** A heading without units and punctuation, as compared. */
 export function headingWords(heading: string): string {
+  if (/^\s*[$€£]+\s*$/.test(heading)) return 'amount';
   return fold(heading.replace(UNIT, ' ').replace(/#|№|\bn[º°](?!\p{L})/giu, ' no '));
 }
 
@@ -128,7 +129,7 @@ export function headingRank(heading: string, meaning: Meaning): number | null {
 }
 
 const BUYING = words(
-  'buy buying bought purchase purchased acquired acquisition won kauf kaufen gekauft ankauf angekauft einkauf compra comprado comprada adquirido achat achete acquis',
+  'ek buy buying bought purchase purchased acquired acquisition won kauf kaufen gekauft ankauf angekauft einkauf compra comprado comprada adquirido achat achete acquis',
 );
 const SELLING = words(
   'sale sales sell selling sold verkauf verkauft vk venta vendido vendida vente vendu vendue cession',

@@ -276,7 +276,7 @@ describe('a sheet about one car, later', () => {
     expect(asked(read)).toEqual([]);
     expect(read.reading).toMatchObject({
       control: { costCents: 4000, saleCents: 200_000 },
-      notData: { 'already in': 3 },
+      notData: { 'already in': 5 },
       statedTotals: [{ stated: 30_500, imported: 30_500, explanation: 'Agrees exactly.' }],
     });
     await booked(ada, read);

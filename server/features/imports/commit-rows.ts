@@ -83,7 +83,8 @@ export function commitRows(
 }
 
 /** The hashes of the rows of a sheet that came in; rows come in the order in which they were surveyed. */
-function printKeeper({ rows: { lines, prints: hashes } }: Plan) {
+function printKeeper({ rows }: Plan) {
+  const { lines, hashes } = rows.prints;
   const prints: [row: number, hash: number][] = [];
   let at = 0;
   return {

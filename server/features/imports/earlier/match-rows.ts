@@ -69,13 +69,14 @@ export const headingPrint = ({ line, cells }: Heading): string | null =>
 /** Today's sheet while its rows find their equals. */
 function sideOf({ guess, found }: SurveyedTable) {
   const waiting = new Map<number, number[]>();
-  found.rows.prints.forEach((hash, i) => {
+  const { hashes, lines: all } = found.rows.prints;
+  hashes.forEach((hash, i) => {
     const lines = waiting.get(hash);
-    if (lines) lines.push(found.rows.lines[i] as number);
-    else waiting.set(hash, [found.rows.lines[i] as number]);
+    if (lines) lines.push(all[i] as number);
+    else waiting.set(hash, [all[i] as number]);
   });
   const rests: { match: SheetMatch; rows: number[]; same: Map<number, number> }[] = [];
-  return { guess, waiting, rests, count: found.rows.lines.length, twins: new Map<number, Twin>() };
+  return { guess, waiting, rests, count: all.length, twins: new Map<number, Twin>() };
 }
 type Side = ReturnType<typeof sideOf>;
 

@@ -7,7 +7,7 @@ import type { Sheet } from '../sheets/sheet.ts';
 import { isFigure, namesVehicle, titleOf } from '../read/sheet-words.ts';
 import { repeatedRows, rowHash } from './repeats.ts';
 import type { Heading } from '../read/plan.ts';
-import { isHeadingAgain } from '../read/row-kinds.ts';
+import { isBlank, isHeadingAgain } from '../read/row-kinds.ts';
 import { readHours } from '../cells/hours.ts';
 import { hoursInside, saysWork } from '../words/own-work.ts';
 import { placeOf, vehicleText } from './vehicle-columns.ts';
@@ -33,8 +33,8 @@ export interface Survey {
 export interface SurveyedRows {
   readonly hashes: readonly number[];
   readonly lines: readonly number[];
-  /** As they stood in the file, before anyone put them right; what later files are held against. */
-  readonly prints: readonly number[];
+  /** What later files are held against: of every row, its cells as they stood in the file before anyone put them right. */
+  readonly prints: { readonly hashes: readonly number[]; readonly lines: readonly number[] };
 }
 
 const MONEY = new Set<Column['meaning']>([
@@ -110,7 +110,7 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
     categories,
     ownPay,
     repeats,
-    rows: { hashes, lines, prints: rawPrints(sheet, hashes, lines) },
+    rows: { hashes, lines, prints: { hashes: rawPrints(sheet, hashes, lines), lines } },
     dates: new Map(days.map(({ at, see }) => [at + 1, see.evidence])),
   };
 }
@@ -122,12 +122,17 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
   const days = dateWatcher(thisYear);
   const hashes: number[] = [];
   const lines: number[] = [];
-  const owners: string[] = [];
+  const prints = { hashes: [] as number[], lines: [] as number[] };
   let owner = sheet.name ?? '';
   let decimalVotes = 0;
   sheet.forEachRow((cells, line) => {
     const title = titleOf(cells, thisYear);
     if (title) count(vehicles, (owner = title.text));
+    // The same bill may stand under two vehicles: whose it is belongs to its print.
+    if (!isBlank(cells)) {
+      prints.hashes.push(rowHash([owner, ...(sheet.rawRow?.(line) ?? cells)]));
+      prints.lines.push(line);
+    }
     let isData = false;
     for (const cell of cells) {
       if (cell === '') continue;
@@ -141,7 +146,6 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
     if (!isData) return;
     hashes.push(rowHash(cells));
     lines.push(line);
-    owners.push(owner);
   });
   const repeats = new Set([...repeatedRows(hashes)].map((place) => lines[place] as number));
   // A tab's name speaks where no title does.
@@ -154,7 +158,7 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
     categories: new Map(),
     ownPay: [],
     repeats,
-    rows: { hashes, lines, prints: rawPrints(sheet, hashes, lines).map((hash, i) => ownPrint(hash, owners[i] ?? '')) },
+    rows: { hashes, lines, prints },
     dates: new Map([[1, days.evidence]]),
   };
 }
@@ -162,8 +166,6 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
 const rawPrints = ({ rawRow }: Sheet, hashes: readonly number[], lines: readonly number[]) =>
   rawRow ? hashes.map((hash, i) => ofRaw(rawRow(lines[i] as number)) ?? hash) : hashes;
 const ofRaw = (cells: readonly string[] | undefined) => cells && rowHash(cells);
-/** The same bill may stand under two vehicles: whose it is belongs to its print. */
-const ownPrint = (hash: number, owner: string) => rowHash([String(hash), owner]);
 
 function count(counts: Map<string, number>, key: string): void {
   counts.set(key, (counts.get(key) ?? 0) + 1);

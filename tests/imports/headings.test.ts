@@ -45,6 +45,15 @@ describe('headings of a list', () => {
     expect(read(text).rebuilds).toMatchObject([{ year: 2010, model: 'Venza', purchaseCents: 225_000 }]);
   });
 
+  it('a stock number is the vehicle’s name, and what stands beside it says which vehicle that is', () => {
+    const text =
+      'Date,Stock #,Model,Expense,Amount\n2022-01-05,S101,15 Jetta,Parts,30.00\n2022-01-06,S102,15 Jetta,Parts,20.00';
+    expect(read(text).rebuilds).toMatchObject([
+      { tag: 'S101', year: 2015, model: 'Jetta' },
+      { tag: 'S102', year: 2015, model: 'Jetta' },
+    ]);
+  });
+
   it('hours on every row at a rate are a log of hours', () => {
     const text = 'Day,Tech,Unit,Hrs,Rate,Value\n6/14/2021,Sam,13 Focus,3.5,25,87.50\n6/15/2021,Sam,13 Focus,1,25,25.00';
     expect(read(text).shape).toBe('hours');

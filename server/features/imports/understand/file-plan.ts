@@ -15,7 +15,8 @@ import { ownLabor } from './own-labor.ts';
 import { markRepeated } from './overview.ts';
 import type { Survey } from './survey.ts';
 import type { TableGuess } from './table-guess.ts';
-import { vehicleDrafts } from './vehicle-drafts.ts';
+import { type VehicleTarget, vehicleDrafts } from './vehicle-drafts.ts';
+import { readVehicle } from './vehicle-text.ts';
 
 /** A sheet as guessed, and what all its rows say. */
 export interface SurveyedTable {
@@ -42,6 +43,7 @@ export function makeFilePlan(tables: readonly SurveyedTable[], shape: Shape, { b
   const spelled = spelledBefore(matched, books.rebuilds);
   const known = isMixed ? knownVehicles(tables, books, matched) : [];
   const vehicles = vehicleDrafts(mentioned(tables), books, answers, { known, spelled });
+  describe(tables, vehicles.of, Number(books.today.slice(0, 4)));
   const copied = copiedSheets(tables, answers);
   const choices: Choice[] = [...tables.flatMap(({ guess }) => guess.choices), ...copied.choices];
   const plans = tables.map(({ guess, found }): Plan => {
@@ -85,6 +87,16 @@ export function makeFilePlan(tables: readonly SurveyedTable[], shape: Shape, { b
 
 /** The same word may be asked about on several sheets. */
 const distinct = (choices: readonly Choice[]) => [...new Map(choices.map((choice) => [choice.id, choice])).values()];
+
+/** Gives new rebuilds that are known by a stock number the year, make and model that stand beside it. */
+function describe(tables: readonly SurveyedTable[], of: ReadonlyMap<string, VehicleTarget>, thisYear: number): void {
+  for (const [number, text] of tables.flatMap(({ found }) => [...found.described])) {
+    const target = of.get(number);
+    if (typeof target !== 'object' || target.existing || target.found.model !== null) continue;
+    const { year, make, model } = readVehicle(text, thisYear);
+    Object.assign(target.found, { year, make, model });
+  }
+}
 
 /** How often each spelling of a vehicle stands in the lists of a file. */
 function mentioned(tables: readonly SurveyedTable[]): Map<string, number> {

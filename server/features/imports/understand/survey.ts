@@ -10,7 +10,7 @@ import type { Heading } from '../read/plan.ts';
 import { isBlank, isHeadingAgain } from '../read/row-kinds.ts';
 import { readHours } from '../cells/hours.ts';
 import { hoursInside, saysWork } from '../words/own-work.ts';
-import { placeOf, vehicleText } from './vehicle-columns.ts';
+import { besideNumber, placeOf, vehicleText } from './vehicle-columns.ts';
 
 /** What only the whole file can tell, found in one pass before any row is understood. */
 export interface Survey {
@@ -21,6 +21,8 @@ export interface Survey {
   /** Per date column: what its numbers allow. */
   readonly dates: ReadonlyMap<number, DateEvidence>;
   readonly vehicles: ReadonlyMap<string, number>;
+  /** Stock number → what columns beside it call the vehicle. */
+  readonly described: ReadonlyMap<string, string>;
   readonly categories: ReadonlyMap<string, number>;
   /** Lines on which a block pasted twice stands. */
   readonly repeats: ReadonlySet<number>;
@@ -75,6 +77,8 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
   const isAgain = isHeadingAgain(heading.cells);
   const category = columns.find((column) => column.meaning === 'category');
   const ownPay: string[] = [];
+  const described = new Map<string, string>();
+  const besideOf = besideNumber(columns);
   const payOf = ownPayIn(columns);
   const currencies = new Map<string, number>();
   const vehicles = new Map<string, number>();
@@ -94,6 +98,7 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
     for (const { at, see } of days) see.cell(cells[at] ?? '');
     const name = nameOf(cells);
     if (name) count(vehicles, name);
+    if (name && besideOf && !described.has(name)) described.set(name, besideOf(cells));
     const pay = name ? payOf(cells) : null;
     if (pay && ownPay.length < MOST_PAYS) ownPay.push(pay);
     if (category && name) count(categories, (cells[category.col - 1] ?? '').trim());
@@ -107,6 +112,7 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
     decimalVotes,
     currencies,
     vehicles,
+    described,
     categories,
     ownPay,
     repeats,
@@ -155,6 +161,7 @@ export function surveyVehicleSheet(sheet: Sheet, thisYear: number): Survey {
     decimalVotes,
     currencies,
     vehicles,
+    described: new Map(),
     categories: new Map(),
     ownPay: [],
     repeats,

@@ -22,6 +22,13 @@ export function vehicleText(columns: readonly Column[]): (cells: readonly string
       .trim();
 }
 
+/** In a list with stock numbers: what year, make and model beside them call the vehicle. null = nothing stands beside. */
+export function besideNumber(columns: readonly Column[]): ((cells: readonly string[]) => string) | null {
+  if (placeOf(columns, 'stock number') < 0 || placeOf(columns, 'vehicle') >= 0) return null;
+  const own = columns.filter(({ meaning }) => meaning === 'year' || meaning === 'make' || meaning === 'model');
+  return own.length === 0 ? null : vehicleText(own);
+}
+
 /** What a row with a vehicle of its own calls it: its stock number, else its text, else year, make and model. */
 export function vehicleName(columns: readonly Column[]): (cells: readonly string[]) => string {
   const single = [placeOf(columns, 'stock number'), placeOf(columns, 'vehicle')].find((place) => place >= 0);

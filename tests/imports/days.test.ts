@@ -60,4 +60,10 @@ describe('the order of day and month', () => {
     ]);
     expect(reading.choices).toEqual([]);
   });
+
+  it('is asked where nothing settles it; under German, Spanish or French headings the day is offered first', () => {
+    const [choice] = read('Fecha;Coche;Concepto;Importe\n03/04/2019;11 Ibiza;aleta;60,00').choices;
+    expect(choice).toMatchObject({ kind: 'date-order', preset: 'DMY', mustAsk: true });
+    expect(read(list('3/4/2019')).choices[0]).toMatchObject({ kind: 'date-order', preset: 'MDY' });
+  });
 });

@@ -1,9 +1,13 @@
 import type { Choice, Column } from '#shared/contracts/import-reading.ts';
 import type { DateOrder } from '../cells/days.ts';
+import { fold } from '../cells/fold.ts';
 import { placedId } from './placed-id.ts';
 import type { DateEvidence } from './date-evidence.ts';
 
 const ENOUGH = 5;
+// German, Spanish and French headings: people who write so put the day first.
+const DAY_FIRST_WORDS =
+  /\b(?:datum|tag|woche|fahrzeug|wagen|kfz|betrag|fecha|semana|coche|vehiculo|importe|gasto|jour|semaine|voiture|vehicule|montant)\b/;
 const FEWEST_WEEKS = 3;
 
 /** Month or day first, by what the whole column holds; null = it cannot be told. */
@@ -45,7 +49,8 @@ export function dateOrders(
   common: DateOrder | null,
 ): { orders: Map<number, DateOrder>; choices: Choice[] } {
   const settled = new Map([...evidence].map(([col, found]) => [col, settledOrder(found)]));
-  const usual: DateOrder = locale === 'en-US' ? 'MDY' : 'DMY';
+  const isDayFirst = locale !== 'en-US' || columns.some(({ heading }) => DAY_FIRST_WORDS.test(fold(heading)));
+  const usual: DateOrder = isDayFirst ? 'DMY' : 'MDY';
   const orders = new Map<number, DateOrder>();
   const choices: Choice[] = [];
   for (const [col, found] of evidence) {

@@ -16,9 +16,9 @@ const WhatPaysPage = lazyPage(async () => (await import('../pages/what-pays.tsx'
 const OverrunsPage = lazyPage(async () => (await import('../pages/overruns.tsx')).OverrunsPage);
 const TimeToSellPage = lazyPage(async () => (await import('../pages/time-to-sell.tsx')).TimeToSellPage);
 const ContingencyPage = lazyPage(async () => (await import('../pages/contingency.tsx')).ContingencyPage);
+const RuleReviewPage = lazyPage(async () => (await import('../pages/rule-review.tsx')).RuleReviewPage);
 const PreBidPage = lazyPage(async () => (await import('../pages/pre-bid.tsx')).PreBidPage);
 const PreBidsPage = lazyPage(async () => (await import('../pages/pre-bids.tsx')).PreBidsPage);
-const RuleReviewPage = lazyPage(async () => (await import('../pages/rule-review.tsx')).RuleReviewPage);
 const DefinitionsPage = lazyPage(async () => (await import('../pages/definitions.tsx')).DefinitionsPage);
 const RebuildsPage = lazyPage(async () => (await import('../pages/rebuilds.tsx')).RebuildsPage);
 const RebuildPage = lazyPage(async () => (await import('../pages/rebuild.tsx')).RebuildPage);

@@ -1,7 +1,7 @@
 import { readFile } from 'node:fs/promises';
 import path from 'node:path';
 import { importFile } from '../../server/features/imports/import-file.ts';
-import { importStore } from '../../server/features/imports/store.ts';
+import { importFiles } from '../../server/features/imports/import-files.ts';
 import { shopScope } from '../../server/books/scope.ts';
 import { sha256 } from '../../server/platform/ids.ts';
 import type { Services } from '../../server/platform/http.ts';
@@ -13,7 +13,7 @@ export async function bringInSheets({ database, config, now }: Services, shop: D
   const { shopId, ownerId, requestId } = shop;
   for (const file of [OLD_BOOK_FILES.cars, OLD_BOOK_FILES.receipts]) {
     const bytes = await readFile(file);
-    if (await importStore(shopScope(database.reader, shopId)).findCommitted(sha256(bytes))) continue;
+    if (await importFiles(shopScope(database.reader, shopId)).findCommitted(sha256(bytes))) continue;
     const fileName = path.basename(file);
     await importFile({ database, config, shopId, userId: ownerId, requestId, fileName, bytes, now: now() });
   }

@@ -2,6 +2,7 @@ import { shopScope } from '../../books/scope.ts';
 import type { Services } from '../../platform/http.ts';
 import { dropFile, importPath, sweepFiles } from './files.ts';
 import { endProgress, tellProgress } from './progress.ts';
+import { importFiles } from './import-files.ts';
 import { runJob } from './run-job.ts';
 import type { FileAt } from './work.ts';
 import { controlOf, type ImportRecord, importStore, settingsOf } from './store.ts';
@@ -16,7 +17,7 @@ interface Asker {
 
 /** The files of an import, and where they lie. */
 export async function filesAt({ services, shopId }: Asker, importId: string): Promise<FileAt[]> {
-  const files = await importStore(shopScope(services.database.reader, shopId)).files(importId);
+  const files = await importFiles(shopScope(services.database.reader, shopId)).list(importId);
   return files.map(({ name, number }) => ({ name, path: importPath(services.config.dataDir, importId, number) }));
 }
 

@@ -4,6 +4,7 @@ import type { ShopScope } from '../../books/scope.ts';
 import { readCursor, writeCursor } from '../../platform/cursor.ts';
 import { fromRow } from '../../platform/rows.ts';
 import { progressOf } from './progress.ts';
+import { importFiles } from './import-files.ts';
 import { importStore, readingOf, settingsOf } from './store.ts';
 
 const PAGE = 100;
@@ -54,7 +55,7 @@ function summaries(scope: ShopScope) {
 export async function showImport(scope: ShopScope, id: string): Promise<Import> {
   const store = importStore(scope);
   const record = await store.get(id);
-  const files = await store.files(id);
+  const files = await importFiles(scope).list(id);
   const row: object = await summaries(scope).where('imports.id', id).first();
   return {
     ...fromRow<ImportSummary>(row),

@@ -11,6 +11,7 @@ import { listRows } from './list-rows.ts';
 import { progressEvents } from './progress.ts';
 import { listImports, showImport } from './read-model.ts';
 import { runJob } from './run-job.ts';
+import { importFiles } from './import-files.ts';
 import { importStore, readingOf } from './store.ts';
 import { uploadImport } from './upload-import.ts';
 
@@ -66,8 +67,9 @@ async function commitImport(ctx: OnImport) {
   }
   const { database } = services;
   const isMine = await database.lock(async () => {
-    const store = importStore(shopScope(database.writer, actor.shopId));
-    if (await store.cameInMeanwhile(before)) throw alreadyIn();
+    const scope = shopScope(database.writer, actor.shopId);
+    const store = importStore(scope);
+    if (await importFiles(scope).cameInMeanwhile(before)) throw alreadyIn();
     refuseStale(ctx.ifMatch, (await store.get(before.id)).version);
     return store.move(before.id, 'ready', 'committing');
   });

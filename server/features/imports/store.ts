@@ -1,7 +1,6 @@
 import type { Control, Reading } from '#shared/contracts/import-reading.ts';
 import type { Shape } from '#shared/contracts/import-words.ts';
 import type { ImportSettings, ImportState } from '#shared/contracts/imports.ts';
-import { fromRow } from '../../platform/rows.ts';
 import type { ShopScope } from '../../books/scope.ts';
 
 /** An import as the warehouse keeps it. `mapping` and `reading` are JSON. */
@@ -40,38 +39,8 @@ export interface NewImport {
 /** The only writer of `imports`, beside the worker that commits and undoes. */
 export function importStore(scope: ShopScope) {
   const only = (id: string, state: ImportState) => scope.table('imports').where({ id, state });
-  const importsWith = (sha256: string) => scope.table('import_files').where({ sha256 }).select('import_id');
   return {
     get: (id: string) => scope.get<ImportRecord>('imports', id),
-    /** An import of the same file whose rows stand in the books; null = none. */
-    async findCommitted(sha256: string): Promise<ImportRecord | null> {
-      const row: object | undefined = await scope
-        .table('imports')
-        .whereIn('id', importsWith(sha256))
-        .where({ state: 'committed' })
-        .first();
-      return row ? fromRow<ImportRecord>(row) : null;
-    },
-    /** The files of an import, in their order. */
-    async files(id: string): Promise<NewFile[]> {
-      const rows: object[] = await scope
-        .table('import_files')
-        .where({ import_id: id })
-        .orderBy('number')
-        .select('number', 'name', 'sha256', 'byte_size');
-      return rows.map((row) => fromRow<NewFile>(row));
-    },
-    /** Did the same file go into the books, or is it about to, after this one was brought in? */
-    async cameInMeanwhile({ id, createdAt }: ImportRecord): Promise<boolean> {
-      const own = scope.table('import_files').where({ import_id: id }).select('sha256');
-      const other: object | undefined = await scope
-        .table('imports')
-        .whereIn('id', scope.table('import_files').whereIn('sha256', own).select('import_id'))
-        .whereNot({ id })
-        .whereRaw(`(state = 'committing' OR (state = 'committed' AND committed_at > ?))`, [createdAt])
-        .first('id');
-      return other !== undefined;
-    },
     async create({ id, createdBy, files, settings = {} }: NewImport): Promise<void> {
       const [first] = files;
       if (!first) throw new Error('An import has at least one file');

@@ -8,6 +8,7 @@ import { startReading } from './background.ts';
 import { dropFile, fileHash, importPath, keepFile } from './files.ts';
 import { showImport } from './read-model.ts';
 import { dropReceived, receiveFiles } from './receive.ts';
+import { importFiles } from './import-files.ts';
 import { importStore, type NewFile } from './store.ts';
 
 /**
@@ -32,7 +33,7 @@ export async function uploadImport(ctx: Context<typeof importsApi.upload>): Prom
     const ready = await write({ ...ctx, once }, { action: 'upload file', subject: 'import' }, async (books) => {
       const store = importStore(books.scope);
       const isAnyway = ctx.query.importAnyway ?? false;
-      if (!isAnyway) await refuseKnown(store, files);
+      if (!isAnyway) await refuseKnown(importFiles(books.scope), files);
       await store.create({ id, createdBy: userId, files, settings: isAnyway ? { answers: { earlier: 'twice' } } : {} });
       const reply: Import = await showImport(books.scope, id);
       isNew = true;
@@ -47,11 +48,11 @@ export async function uploadImport(ctx: Context<typeof importsApi.upload>): Prom
 }
 
 /** Refuses files that came in before, and the same file twice. */
-async function refuseKnown(store: ReturnType<typeof importStore>, files: readonly NewFile[]): Promise<void> {
+async function refuseKnown(known: ReturnType<typeof importFiles>, files: readonly NewFile[]): Promise<void> {
   for (const [at, { name, sha256: content }] of files.entries()) {
     const twin = files.slice(0, at).find((other) => other.sha256 === content);
     if (twin) throw alreadyIn(`“${name}” and “${twin.name}” are the same file: leave one out.`);
-    const earlier = await store.findCommitted(content);
+    const earlier = await known.findCommitted(content);
     if (!earlier) continue;
     const day = earlier.committedAt?.slice(0, 10) ?? 'an earlier day';
     const which = files.length === 1 ? 'This very file' : `“${name}”`;

@@ -2,7 +2,8 @@ import { screen, within } from '@testing-library/react';
 import userEvent from '@testing-library/user-event';
 import { afterEach, expect, test, vi } from 'vitest';
 import { openContingency, rule } from './open-contingency.tsx';
-import { contingencyReply, idOf, pastBids, rebuild } from './replies.ts';
+import { contingencyReply, pastBids } from './contingency-replies.ts';
+import { idOf, rebuild } from './replies.ts';
 
 afterEach(() => vi.unstubAllGlobals());
 

@@ -4,7 +4,8 @@ import { type Rule, rulesApi } from '#shared/contracts/rules.ts';
 import type { Role } from '#shared/vocabulary.ts';
 import { ContingencyPage } from '../../../src/pages/contingency.tsx';
 import { openPage, type Request, serve } from './open-page.tsx';
-import { contingencyReply, idOf } from './replies.ts';
+import { contingencyReply } from './contingency-replies.ts';
+import { idOf } from './replies.ts';
 import { forCarReply } from './rule-replies.ts';
 
 /** An adopted rule of 18 % for 2026. */

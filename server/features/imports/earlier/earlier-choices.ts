@@ -1,6 +1,6 @@
 import type { Choice } from '#shared/contracts/import-reading.ts';
 import type { ChangedCell, ChangeKind } from './changed-cells.ts';
-import { type ChangedRow, type Decision, mainKind, type Share } from './settle-earlier.ts';
+import { type ChangedRow, type Decision, mainKind, type Share } from './changed-rows.ts';
 
 type Answers = ReadonlyMap<string, string>;
 

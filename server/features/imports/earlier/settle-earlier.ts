@@ -1,12 +1,11 @@
 import type { Choice, Earlier } from '#shared/contracts/import-reading.ts';
 import type { Plan } from '../read/plan.ts';
-import { type ChangedCell, type ChangeKind, changedCells } from './changed-cells.ts';
+import { changedCells } from './changed-cells.ts';
+import { type ChangedRow, type Decision, mainKind, type Share } from './changed-rows.ts';
 import { AGAIN_ID, againChoice, changeChoices, decisionFor } from './earlier-choices.ts';
 import type { Matched, SheetMatch, Twin } from './match-rows.ts';
 import type { PastRow } from './past.ts';
 
-/** What is done with a row, or a cell, that is not what it was: keep what is booked, take the new for it, count both. */
-export type Decision = 'keep' | 'new' | 'both';
 type Answers = ReadonlyMap<string, string>;
 
 export interface EarlierCell {
@@ -26,15 +25,6 @@ export interface EarlierRow {
   readonly cells: ReadonlyMap<number, EarlierCell>;
 }
 export type EarlierRows = ReadonlyMap<number, EarlierRow>;
-
-/** A row that looks like one of then with something changed. */
-export interface ChangedRow {
-  readonly plan: Plan;
-  readonly line: number;
-  readonly twin: Twin;
-  readonly now: readonly string[];
-  readonly cells: readonly ChangedCell[];
-}
 
 const NO_CELLS: EarlierRow['cells'] = new Map();
 
@@ -93,15 +83,6 @@ function changedRows(plan: Plan, { twins }: Matched): ChangedRow[] {
   return changed;
 }
 
-/** How much of an earlier sheet stands in today's files. */
-export interface Share {
-  readonly match: SheetMatch;
-  readonly sameRows: number;
-  readonly changedRows: number;
-  /** Half of it does. Else its few equal rows may have happened again, and rows like others are rows of their own. */
-  readonly isSure: boolean;
-}
-
 function shareOf(match: SheetMatch, changes: readonly ChangedRow[]): Share {
   const own = changes.filter(({ twin }) => twin.match === match);
   const rewritten = own.filter(({ cells }) => cells.length === 0).length;
@@ -120,12 +101,6 @@ function settled({ plan, twin, cells }: ChangedRow, answers: Answers): EarlierRo
   ]);
   return rowOf(twin, 'keep', new Map(settledCells));
 }
-
-const ORDER: readonly ChangeKind[] = ['amount', 'place', 'date', 'text'];
-
-/** A row is asked about as a whole, by what weighs most of its changes. */
-export const mainKind = (cells: readonly ChangedCell[]): ChangeKind =>
-  ORDER.find((kind) => cells.some((cell) => cell.kind === kind)) ?? 'text';
 
 function earlierOf(shares: readonly Share[]): Earlier[] {
   const byImport = new Map<string, Earlier>();

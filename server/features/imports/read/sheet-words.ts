@@ -1,4 +1,3 @@
-import { fold } from '../cells/fold.ts';
 import { looksLikeDay } from '../cells/days.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import { readVehicle } from '../understand/vehicle-text.ts';

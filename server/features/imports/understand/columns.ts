@@ -1,20 +1,9 @@
-import type { Column, Meaning } from '#shared/contracts/import-reading.ts';
+import type { Column } from '#shared/contracts/import-reading.ts';
 import type { Shape } from '#shared/contracts/import-words.ts';
-import type { CategoryMeaning } from '../words/categories.ts';
 import type { ColumnFacts } from './column-facts.ts';
+import { type CategoryReader, ignored } from './guess.ts';
 import { guessOfList } from './list-columns.ts';
 import { guessOfVehicles } from './vehicle-row-columns.ts';
-
-export type CategoryReader = (text: string) => CategoryMeaning | null;
-/** What a column holds, and why. */
-export type Guess = Pick<Column, 'meaning' | 'category' | 'why'>;
-
-export const ignored = (why: string): Guess => ({ meaning: 'ignore', category: null, why });
-export const bySaying = (meaning: Meaning): Guess => ({
-  meaning,
-  category: null,
-  why: 'The heading says so, and the cells below suit it.',
-});
 
 /** Guesses what each column holds in a sheet of this shape. Every guess says why. */
 export function guessColumns(

@@ -4,7 +4,7 @@ import { headingMeanings, headingRank, likelyMeanings, plannedPart } from '../wo
 import { tradeMeaning } from '../words/categories.ts';
 import { weekdayOf } from '../words/weekdays.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
-import { bySaying, type Guess, ignored } from './columns.ts';
+import { bySaying, type Guess, ignored } from './guess.ts';
 import { suits } from './suits.ts';
 import { looksLikeVehicle } from './vehicle-text.ts';
 

@@ -5,7 +5,7 @@ import { type CategoryMeaning, SALE } from '../words/categories.ts';
 import { weekdayOf } from '../words/weekdays.ts';
 import { actualPart, dealOf, headingMeanings, plannedPart } from '../words/headings.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
-import type { Guess } from './columns.ts';
+import type { Guess } from './guess.ts';
 import { guessOfList } from './list-columns.ts';
 import { sectionColumns } from '../read/section-columns.ts';
 import { isFigure, tabNamesVehicle, titleOf } from '../read/sheet-words.ts';

@@ -3,7 +3,7 @@ import { PURCHASE, SALE } from '../words/categories.ts';
 import { actualPart, dealOf, headingMeanings, likelyMeanings, plannedPart } from '../words/headings.ts';
 import { isOwnWork, saysHours } from '../words/own-work.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney } from './column-facts.ts';
-import { bySaying, type CategoryReader, type Guess, ignored } from './columns.ts';
+import { bySaying, type CategoryReader, type Guess, ignored } from './guess.ts';
 import { suits } from './suits.ts';
 
 const NOT_OF_VEHICLES = new Set<Meaning>([

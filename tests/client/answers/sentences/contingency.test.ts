@@ -8,7 +8,7 @@ import {
   sayDrift,
 } from '../../../../src/features/answers/sentences/contingency.ts';
 import { plain } from '../../../../src/features/answers/sentences/parts.ts';
-import { contingencyReply, drift, score } from '../replies.ts';
+import { contingencyReply, drift, score } from '../contingency-replies.ts';
 
 const format = createFormatter({ currency: 'USD', locale: 'en-US' });
 const say = (...changes: Parameters<typeof contingencyReply>) => sayContingency(contingencyReply(...changes), format);

@@ -19,6 +19,9 @@ const MONTHS = [
 ];
 const MONTH_OF = new Map(MONTHS.flatMap((names, index) => names.split(' ').map((name) => [name, index + 1] as const)));
 
+/** The month that a word names, 1–12; null = none. */
+export const monthOf = (word: string): number | null => MONTH_OF.get(plain(word)) ?? null;
+
 const ISO = /^(\d{4})[-/.](\d{1,2})[-/.](\d{1,2})(?:[T ].*)?$/;
 const NUMERIC = /^(\d{1,2})([-/.])(\d{1,2})\2(\d{4}|\d{2})(?:,? \d{1,2}:\d{2}.*)?$/;
 const DAY_FIRST =

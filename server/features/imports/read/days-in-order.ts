@@ -1,10 +1,12 @@
 import { type Day, isDay } from '#shared/day.ts';
+import { isCoarseDay, isShortMonth } from '../cells/coarse-days.ts';
 import { looksLikeSerial, nearestDay, yearlessParts } from '../cells/days.ts';
 import type { Plan } from './plan.ts';
 
 /**
  * Reads the days of one column from top to bottom. A day without a year takes the year in the sheet's name or title, else
- * the one that brings it nearest to the day above it; `isGuess` then says of the last one read that it was so.
+ * the one that brings it nearest to the day above it; `isGuess` then says of the last one read that it was so. Less than
+ * a day (`Mar 2021`) is no day: what it dates comes in without one, as a guess.
  */
 export function daysInOrder(plan: Plan, col: number) {
   const read = plan.days.get(col) ?? (() => 'blank' as const);
@@ -21,6 +23,10 @@ export function daysInOrder(plan: Plan, col: number) {
         before = day;
         reader.isGuess = looksLikeSerial(text.trim());
         return day;
+      }
+      if (isCoarseDay(text) || isShortMonth(text, before)) {
+        reader.isGuess = true;
+        return 'blank';
       }
       const parts = before === null ? null : yearlessParts(text, order);
       const near = parts === null || before === null ? null : nearestDay(parts, titled ?? before);

@@ -7,6 +7,7 @@ import { placeOf, vehicleText } from '../understand/vehicle-columns.ts';
 import { type CategoryMeaning, paidWorkCategory, PURCHASE, SALE } from '../words/categories.ts';
 import { categoryGuesser } from '../words/infer-category.ts';
 import { daysInOrder } from './days-in-order.ts';
+import { keptText } from './faulty-texts.ts';
 import type { Plan } from './plan.ts';
 import { hoursInside, saysWork } from '../words/own-work.ts';
 import { ownPayIn } from '../understand/survey.ts';
@@ -78,13 +79,11 @@ const roughReader = (plan: Plan) => {
   return (cell: string) => (MAY_BE_ROUGH.test(cell) || other.test(cell)) && plan.money(cell) === 'rough';
 };
 
-const kept = (cell: string) => cell.trim().normalize('NFC') || null;
-
 /** Reads the cells of one row, each on its own. */
 export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: readonly string[]) => ExpenseCells {
   const nameOf = vehicleText(plan.columns);
   const days = daysInOrder(plan, cols.date);
-  const textOf = remembered(kept);
+  const textOf = remembered(keptText);
   const guess = categoryGuesser(plan.books.categories);
   const guessOf = remembered((what: string) => guess([what], null));
   const unnamed = plan.categories.get('');
@@ -111,7 +110,7 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
       planned: cellMoney(plan, cell(cols.planned)),
       isRough: days.isGuess || isRough(cell(cols.amount)) || isRough(cell(cols.credit)),
       target: plan.vehicles.get(name),
-      meaning: isPay && labor.as === 'paid' ? paidWork : meaningOf(cell(cols.category).trim(), what),
+      meaning: isPay && labor.as === 'paid' ? paidWork : meaningOf(textOf(cell(cols.category)) ?? '', what),
       ownSeconds:
         isPay && labor.as === 'hours' && typeof paid === 'number' && paid > 0
           ? hoursAt(paid, labor.rate)

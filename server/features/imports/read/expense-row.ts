@@ -4,6 +4,7 @@ import { isCarriedLabel } from '../words/headings.ts';
 import { foreseenOf } from '../words/kinds.ts';
 import { isRefund } from '../words/refunds.ts';
 import { type ExpenseCells, expenseCellReader, expenseColumns, expenseFault, isPlanned } from './expense-cells.ts';
+import { withoutFaulty } from './faulty-texts.ts';
 import { type DraftLine, notData, type Plan, putAside, type RowRead, type RowReader, taken } from './plan.ts';
 import { filled, totalLabel } from './row-kinds.ts';
 import type { ColumnSums } from './sums.ts';
@@ -13,7 +14,8 @@ export function expenseRowReader(plan: Plan, sums: ColumnSums): RowReader {
   const cols = expenseColumns(plan);
   const read = expenseCellReader(plan, cols);
   const said = remembered(foreseenOf);
-  return (cells, line) => {
+  const texts = [cols.category, cols.what, cols.vendor, cols.foreseen, cols.person];
+  const readRow: RowReader = (cells, line) => {
     const row = read(cells);
     const beside = rowBeside(cells, row);
     if (beside?.reason === 'total') sums.compare(cells, line, totalLabel(cells) ?? '');
@@ -34,6 +36,7 @@ export function expenseRowReader(plan: Plan, sums: ColumnSums): RowReader {
       lines.push(lineOf(row, -row.back, { line, col: cols.credit, isBack: false, ...came }));
     return taken(lines);
   };
+  return (cells, line) => withoutFaulty(readRow(cells, line), cells, texts);
 }
 
 /** A row that came in before was taken then: that the books hold its purchase or sale is no fault of it. */

@@ -1,8 +1,10 @@
 import { addDays, type Day, dayNumber } from '#shared/day.ts';
+import { firstOfWeek } from '../cells/coarse-days.ts';
 import { aboutHours, readHours } from '../cells/hours.ts';
 import { placeOf, vehicleText } from '../understand/vehicle-columns.ts';
 import { weekdayOf } from '../words/weekdays.ts';
 import { daysInOrder } from './days-in-order.ts';
+import { keptText, withoutFaulty } from './faulty-texts.ts';
 import { type CellAside, type DraftLine, notData, type Plan, putAside, type RowReader, taken } from './plan.ts';
 import { filled, totalLabel } from './row-kinds.ts';
 import type { ColumnSums } from './sums.ts';
@@ -26,8 +28,8 @@ export function hoursGridReader(plan: Plan, sums: ColumnSums): RowReader {
   const nameOf = vehicleText(plan.columns);
   const days = daysInOrder(plan, date + 1);
   const isEnding = ENDING.test(plan.columns[date]?.heading ?? '');
-  const text = (cells: readonly string[], place: number) => (cells[place] ?? '').trim().normalize('NFC') || null;
-  return (cells, line) => {
+  const text = (cells: readonly string[], place: number) => keptText(cells[place] ?? '');
+  const readRow: RowReader = (cells, line) => {
     const name = nameOf(cells);
     const label = name === '' || text(cells, date) === null ? totalLabel(cells) : undefined;
     if (label !== undefined) {
@@ -35,7 +37,8 @@ export function hoursGridReader(plan: Plan, sums: ColumnSums): RowReader {
       return notData('total');
     }
     const [who, what] = [text(cells, person), text(cells, task)];
-    const week = days.next(text(cells, date) ?? '');
+    const dateCell = (cells[date] ?? '').trim();
+    const week = firstOfWeek(dateCell) ?? days.next(dateCell);
     const target = plan.vehicles.get(name);
     if (filled(cells) === 1) return notData('note');
     if (plan.repeats.has(line)) return putAside('duplicate', null, null);
@@ -58,6 +61,7 @@ export function hoursGridReader(plan: Plan, sums: ColumnSums): RowReader {
     }
     return { ...taken(lines), cells: asides };
   };
+  return (cells, line) => withoutFaulty(readRow(cells, line), cells, [person + 1, task + 1]);
 }
 
 const NOTHING = {

@@ -1,6 +1,7 @@
 import { aboutHours, readHours } from '../cells/hours.ts';
 import { placeOf, vehicleText } from '../understand/vehicle-columns.ts';
 import { daysInOrder } from './days-in-order.ts';
+import { keptText, withoutFaulty } from './faulty-texts.ts';
 import { notData, type Plan, putAside, type RowReader, taken } from './plan.ts';
 import { filled, totalLabel } from './row-kinds.ts';
 import type { ColumnSums } from './sums.ts';
@@ -14,9 +15,8 @@ export function hoursRowReader(plan: Plan, sums: ColumnSums): RowReader {
   const nameCol = Math.max(at('vehicle'), at('stock number'), at('model')) + 1;
   const nameOf = vehicleText(plan.columns);
   const days = daysInOrder(plan, date + 1);
-  const textAt = (cells: readonly string[], place: number) =>
-    place < 0 ? null : (cells[place] ?? '').trim().normalize('NFC') || null;
-  return (cells, line) => {
+  const textAt = (cells: readonly string[], place: number) => (place < 0 ? null : keptText(cells[place] ?? ''));
+  const readRow: RowReader = (cells, line) => {
     const name = nameOf(cells);
     const dateCell = (cells[date] ?? '').trim();
     const exact = readHours(cells[hours] ?? '');
@@ -69,4 +69,5 @@ export function hoursRowReader(plan: Plan, sums: ColumnSums): RowReader {
       },
     ]);
   };
+  return (cells, line) => withoutFaulty(readRow(cells, line), cells, [person + 1, task + 1]);
 }

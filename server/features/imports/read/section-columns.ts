@@ -1,5 +1,6 @@
 import type { Meaning } from '#shared/contracts/import-reading.ts';
 import { looksLikeDay } from '../cells/days.ts';
+import { isFaulty } from '../cells/faulty-cells.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import { headingMeanings, plannedPart } from '../words/headings.ts';
 import { filled } from './row-kinds.ts';
@@ -56,7 +57,7 @@ export function looseColumns(cells: readonly string[]): SectionColumns {
     label = /:\s*$/.test(cell) ? at : -1;
     if (looksLikeDay(cell)) {
       if (!columns.has('date')) columns.set('date', at);
-    } else if (looksLikeMoney(cell)) columns.set('amount', at);
+    } else if (looksLikeMoney(cell) || (isFaulty(cell) && !columns.has('amount'))) columns.set('amount', at);
     else if (!columns.has('what')) columns.set('what', at);
     else if (!columns.has('vendor')) columns.set('vendor', at);
   }

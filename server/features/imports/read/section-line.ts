@@ -7,6 +7,7 @@ import { isRefund } from '../words/refunds.ts';
 import { daysInOrder } from './days-in-order.ts';
 import type { Draft } from './draft.ts';
 import { cellMoney } from './expense-cells.ts';
+import { keptText, withoutFaulty } from './faulty-texts.ts';
 import { type DraftLine, notData, type Plan, putAside, type RowRead, taken } from './plan.ts';
 import { filled } from './row-kinds.ts';
 import { looseColumns, type SectionColumns } from './section-columns.ts';
@@ -20,6 +21,7 @@ export interface Section {
 }
 
 const LONGEST = 200;
+const TEXTS: readonly Meaning[] = ['category', 'what', 'task', 'vendor', 'person'];
 
 /** Reads one row of a section as a cost, a piece of own work, or the sale of its vehicle. */
 export function sectionLineReader(plan: Plan) {
@@ -35,7 +37,8 @@ export function sectionLineReader(plan: Plan) {
     if (fault) return fault;
     const { category, isSure } = categoryFor([row.category, row.what, row.first], section.category);
     const planned = plannedLine(row, category, draft, line);
-    if (row.cents === null && row.seconds === null) return planned ? taken([planned]) : unread(cells, row, section);
+    if (row.cents === null && row.seconds === null)
+      return planned ? withoutFaulty(taken([planned]), cells, row.textCols) : unread(cells, row, section);
     const kind = row.isWork ? 'hours' : row.isSale ? 'sale' : kindOf(category);
     const cents = row.isWork ? 0 : (row.cents ?? 0);
     const isBack = kind === 'entry' && cents > 0 && isRefund(row.what);
@@ -55,7 +58,7 @@ export function sectionLineReader(plan: Plan) {
       row: line,
       col: row.col,
     };
-    return taken(planned ? [planned, made] : [made]);
+    return withoutFaulty(taken(planned ? [planned, made] : [made]), cells, row.textCols);
   };
 }
 
@@ -90,7 +93,7 @@ function sectionCellReader(plan: Plan) {
     const isSale = isSaleRow(cells);
     const at = (isSale ? null : columns) ?? looseColumns(cells);
     const cell = (meaning: Meaning) => (cells[at.get(meaning) ?? -1] ?? '').trim();
-    const text = (meaning: Meaning) => cell(meaning).normalize('NFC') || null;
+    const text = (meaning: Meaning) => keptText(cell(meaning));
     const col = (meaning: Meaning) => (at.get(meaning) ?? -1) + 1;
     const time = at.has('hours') ? cell('hours') : isOwnWork ? cell('amount') : '';
     const exact = readHours(time);
@@ -115,6 +118,7 @@ function sectionCellReader(plan: Plan) {
       category: text('category'),
       first: columns ? null : (cells.find((one) => one.trim() !== '')?.trim() ?? null),
       vendor: text('vendor'),
+      textCols: TEXTS.map(col),
       person: text('person') ?? (at.has('hours') ? null : text('vendor')),
       amountCol,
       col: (isWork && at.has('hours') ? col('hours') : amountCol) ?? 1,

@@ -1,11 +1,12 @@
 import type { Meaning } from '#shared/contracts/import-reading.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
+import { isCoarseDay } from '../cells/coarse-days.ts';
 import { looksLikeDay } from '../cells/days.ts';
 import { classReader, damageReader } from '../words/kinds.ts';
 import { makeOf } from '../words/vehicles.ts';
 import { headingMeanings } from '../words/headings.ts';
 import type { Draft } from './draft.ts';
-import type { Plan } from './plan.ts';
+import { type CellAside, type Plan, type RowRead, taken } from './plan.ts';
 import { isFigure, isOnlyColor, isTitleBrand, type VehicleTitle } from './sheet-words.ts';
 import { readOdometer } from './vehicle-cells.ts';
 
@@ -53,24 +54,30 @@ export function factReader(plan: Plan) {
   }
 
   return {
-    /** Takes what a row says of the vehicle; false = it says nothing, or holds an amount and is more than facts. */
-    row(draft: Draft, cells: readonly string[]): boolean {
+    /** Takes what a row says of the vehicle; null = it says nothing, or holds an amount and is more than facts. */
+    row(draft: Draft, cells: readonly string[]): RowRead | null {
       const words = cells
         .flatMap((cell) => cell.split(/:\s+/))
         .map((cell) => cell.trim())
         .filter((cell) => cell !== '');
-      if (words.some(isFigure)) return false;
+      if (words.some(isFigure)) return null;
+      const asides: CellAside[] = [];
       let isTaken = false;
       for (let at = 0; at < words.length; at++) {
         const word = words[at] ?? '';
         const meanings = headingMeanings(word);
         const value = words[at + 1];
-        if (meanings.length > 0 && value !== undefined && take(draft, meanings, value)) {
+        const isDay = meanings.some((meaning) => DATES.has(meaning));
+        if (isDay && value !== undefined && isCoarseDay(value)) {
+          const col = cells.findIndex((cell) => cell.includes(value)) + 1;
+          asides.push({ col, reason: 'bad-date', text: value, cents: null });
+          at++;
+        } else if (meanings.length > 0 && value !== undefined && take(draft, meanings, value)) {
           isTaken = true;
           at++;
         } else if (isTaken && isTitleBrand(word)) draft.found.titleBrand ??= word;
       }
-      return isTaken;
+      return isTaken || asides.length > 0 ? { ...taken([]), draft, cells: asides } : null;
     },
     /** Takes what a title says beside the vehicle's name. */
     title({ found }: Draft, { besides }: VehicleTitle): void {

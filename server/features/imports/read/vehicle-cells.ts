@@ -2,6 +2,7 @@ import type { Column, Meaning, RebuildFound } from '#shared/contracts/import-rea
 import type { AsideReason } from '#shared/contracts/import-words.ts';
 import { isNotYet } from '../cells/days.ts';
 import { aboutHours, readHours } from '../cells/hours.ts';
+import { isFaulty } from '../cells/faulty-cells.ts';
 import { remembered } from '../cells/fold.ts';
 import { makeOf } from '../words/vehicles.ts';
 import { classReader, damageReader, yesOrNo } from '../words/kinds.ts';
@@ -63,6 +64,7 @@ function takerOf(plan: Plan, column: Column): Take | null {
   const dayOf = plan.days.get(column.col);
   if (dayOf)
     return (cell, row) => take(isNotYet(cell) ? 'blank' : dayOf(cell), (day) => (row.dates[meaning] = day), 'bad-date');
+  if (meaning === 'vehicle' || meaning === 'stock number') return (cell) => (isFaulty(cell) ? 'bad-value' : null);
   const field = TEXTS[meaning];
   if (field) return textTaker(field);
   return factTaker(plan, meaning);
@@ -99,6 +101,7 @@ function hoursTaker(column: Column): Take {
 
 function textTaker(field: keyof RebuildFound): Take {
   return (cell, row) => {
+    if (isFaulty(cell)) return 'bad-value';
     const before = row.known[field];
     // `VW` and `Chevy` stand for one make each.
     const own = field === 'make' ? (makeOf(cell) ?? cell) : cell;

@@ -76,7 +76,8 @@ export function vehicleSheetReader(plan: Plan, sums: ColumnSums): RowReader {
     if (opened) return opened;
     const { draft } = state;
     if (!draft) return cells.some(isFigure) ? putAside('missing-vehicle', null, null) : notData('title');
-    if (state.section.columns === null && facts.row(draft, cells)) return { ...taken([]), draft };
+    const fact = state.section.columns === null ? facts.row(draft, cells) : null;
+    if (fact) return fact;
     const read = lineOf(cells, line, state.section, draft);
     totals.add(read);
     return read;

@@ -45,7 +45,9 @@ export function categoryWords(
       column: null,
       question:
         word === ''
-          ? `${count} rows name no kind of cost. Where do they belong?`
+          ? count === 1
+            ? 'One row names no kind of cost. Where does it belong?'
+            : `${count} rows name no kind of cost. Where do they belong?`
           : `What does “${word}” mean? It stands on ${count === 1 ? 'one row' : `${count} rows`}.`,
       options: [
         ...shopCategories.map((name) => ({ value: name, label: name })),

@@ -2,6 +2,7 @@ import type { ShopBooks } from '../books.ts';
 import type { Matched } from '../earlier/match-rows.ts';
 import { fold } from '../cells/fold.ts';
 import { type Draft, newDraft, tagMaker } from '../read/draft.ts';
+import { keptText } from '../read/faulty-texts.ts';
 import { isBlank, isHeadingAgain, totalLabel } from '../read/row-kinds.ts';
 import { placeOf, vehicleName } from './vehicle-columns.ts';
 import { existingFinder } from './existing-finder.ts';
@@ -31,7 +32,7 @@ export function knownVehicles(tables: readonly SurveyedTable[], books: ShopBooks
     const nameOf = vehicleName(columns);
     const isAgain = isHeadingAgain(heading.cells);
     const at = (cells: readonly string[], meaning: 'year' | 'make' | 'model' | 'vehicle') =>
-      (cells[placeOf(columns, meaning)] ?? '').trim();
+      keptText(cells[placeOf(columns, meaning)] ?? '') ?? '';
     sheet.forEachRow((cells, row) => {
       if (row <= heading.last || isBlank(cells) || isAgain(cells)) return;
       const name = nameOf(cells);

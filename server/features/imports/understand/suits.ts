@@ -1,7 +1,7 @@
 import type { Meaning } from '#shared/contracts/import-reading.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 import { weekdayOf } from '../words/weekdays.ts';
-import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
+import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText, holdsYears } from './column-facts.ts';
 
 const DATES = new Set<Meaning>(['date', ...REBUILD_DATES.map(([field]) => field)]);
 const MONEY = new Set<Meaning>(['amount', 'credit', 'estimate', 'purchase', 'sale', 'asking', 'expected sale']);
@@ -10,7 +10,7 @@ const NUMBERS = new Set<Meaning>(['odometer', 'stock number', 'vin', 'notes', 'v
 
 /** Do the cells of a column suit what its heading says? */
 export function suits(meaning: Meaning, facts: ColumnFacts): boolean {
-  if (DATES.has(meaning)) return holdsDays(facts);
+  if (DATES.has(meaning)) return holdsDays(facts) || holdsYears(facts);
   if (HOURS.has(meaning)) return holdsHours(facts) || weekdayOf(facts.heading) !== null;
   if (meaning === 'year') return facts.filled === 0 || facts.modelYear >= 0.6;
   if (NUMBERS.has(meaning)) return meaning === 'vin' || facts.day < 0.6 || meaning === 'derived';

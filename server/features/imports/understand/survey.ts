@@ -2,6 +2,7 @@ import type { Column } from '#shared/contracts/import-reading.ts';
 import { REBUILD_DATES } from '#shared/vocabulary.ts';
 import { looksLikeDay } from '../cells/days.ts';
 import { currenciesIn, decimalVote, looksLikeMoney } from '../cells/money.ts';
+import { keptText } from '../read/faulty-texts.ts';
 import { type DateEvidence, dateWatcher } from './date-evidence.ts';
 import type { Sheet } from '../sheets/sheet.ts';
 import { isFigure, namesVehicle, titleOf } from '../read/sheet-words.ts';
@@ -101,7 +102,7 @@ export function survey(sheet: Sheet, columns: readonly Column[], heading: Headin
     if (name && besideOf && !described.has(name)) described.set(name, besideOf(cells));
     const pay = name ? payOf(cells) : null;
     if (pay && ownPay.length < MOST_PAYS) ownPay.push(pay);
-    if (category && name) count(categories, (cells[category.col - 1] ?? '').trim());
+    if (category && name) count(categories, keptText(cells[category.col - 1] ?? '') ?? '');
     if (cells.some((cell) => cell !== '')) {
       hashes.push(rowHash(cells));
       lines.push(line);

@@ -16,6 +16,7 @@ export function emptyBooks(changes: Partial<ShopBooks> = {}): ShopBooks {
     locale: 'en-US',
     today: '2026-12-01',
     categories: DEFAULT_CATEGORIES.map(({ name }) => name),
+    retiredCategories: [],
     classes: [...DEFAULT_CLASSES],
     damages: [...DEFAULT_DAMAGES],
     rebuilds: [],

@@ -21,6 +21,8 @@ export interface ShopBooks {
   readonly locale: string;
   readonly today: Day;
   readonly categories: readonly string[];
+  /** Categories that the shop no longer offers: old files may still name them. */
+  readonly retiredCategories: readonly string[];
   readonly classes: readonly string[];
   readonly damages: readonly string[];
   readonly rebuilds: readonly ExistingRebuild[];

@@ -26,17 +26,18 @@ export function shopBooks(raw: RawDatabase, shopId: string, now: Date): ShopBook
   const shop = raw
     .prepare('SELECT currency, locale, time_zone, fixed_today FROM shops WHERE id = ?')
     .get(shopId) as ShopRow;
-  const names = (table: string) =>
+  const names = (table: string, isRetired = 0) =>
     raw
-      .prepare(`SELECT name FROM ${table} WHERE shop_id = ? AND is_retired = 0 ORDER BY position`)
+      .prepare(`SELECT name FROM ${table} WHERE shop_id = ? AND is_retired = ? ORDER BY position`)
       .pluck()
-      .all(shopId) as string[];
+      .all(shopId, isRetired) as string[];
   const rebuilds = raw.prepare(REBUILDS).all(shopId) as RebuildRow[];
   return {
     currency: shop.currency,
     locale: shop.locale,
     today: shop.fixed_today ?? dayInZone(now, shop.time_zone),
     categories: names('categories'),
+    retiredCategories: names('categories', 1),
     classes: names('vehicle_classes'),
     damages: names('damage_types'),
     past: pastSheets(raw, shopId),

@@ -15,4 +15,5 @@ export function withoutFaulty(read: RowRead, cells: readonly string[], cols: rea
 }
 
 /** What a cell says in words, as it is kept; null = nothing, or a spreadsheet's fault. */
-export const keptText = (cell: string): string | null => (saysNothing(cell) ? null : cell.trim().normalize('NFC') || null);
+export const keptText = (cell: string): string | null =>
+  saysNothing(cell) ? null : cell.trim().normalize('NFC') || null;

@@ -28,7 +28,7 @@ const isText = (cell: string) => /\p{L}{2}/u.test(cell) && !looksLikeDay(cell) &
  */
 export function vehicleSheetReader(plan: Plan, sums: ColumnSums): RowReader {
   const thisYear = Number(plan.books.today.slice(0, 4));
-  const categoryOf = categoryReader(plan.books.categories);
+  const categoryOf = categoryReader(plan.books.categories, plan.books.retiredCategories);
   const facts = factReader(plan);
   const totals = sectionSums(plan, sums);
   const lineOf = sectionLineReader(plan);

@@ -1,4 +1,5 @@
 import type { Choice } from '#shared/contracts/import-reading.ts';
+import type { ShopBooks } from '../books.ts';
 import { fold } from '../cells/fold.ts';
 import { isOwnWork } from '../words/own-work.ts';
 import {
@@ -18,10 +19,10 @@ const MOST_ASKED = 100;
  */
 export function categoryWords(
   counts: ReadonlyMap<string, number>,
-  shopCategories: readonly string[],
+  { categories: shopCategories, retiredCategories: retired }: Pick<ShopBooks, 'categories' | 'retiredCategories'>,
   answers: ReadonlyMap<string, string>,
 ): { of: Map<string, CategoryMeaning>; choices: Choice[] } {
-  const read = categoryReader(shopCategories);
+  const read = categoryReader(shopCategories, retired);
   const other = otherCategory(shopCategories);
   const paidWork = paidWorkCategory(shopCategories);
   const allowed = new Set([...shopCategories, PURCHASE, SALE]);

@@ -116,7 +116,7 @@ function settle(guess: TableGuess, found: Survey, { books, answers }: Known, ord
   const dates = dateOrders(guess.columns, found.dates, books.locale, answers, order);
   const words =
     guess.shape === 'expenses'
-      ? categoryWords(found.categories.size ? found.categories : new Map([['', 1]]), books.categories, answers)
+      ? categoryWords(found.categories.size ? found.categories : new Map([['', 1]]), books, answers)
       : { of: new Map(), choices: [] };
   const id = guess.sheet.number === 1 ? 'duplicate' : `duplicate:${guess.sheet.number}`;
   const repeat = repeatChoice(id, found.repeats.size, guess.sheet.name, answers);

@@ -66,7 +66,7 @@ function guessAll(
   decimal: DecimalMark,
 ) {
   const facts = columnFacts(head);
-  const categoryOf = categoryReader(books.categories);
+  const categoryOf = categoryReader(books.categories, books.retiredCategories);
   const thisYear = Number(books.today.slice(0, 4));
   const guessed = guessShape(head, facts, categoryOf, { sheetName: sheet.name, thisYear });
   if (guessed.shape === 'vehicle sheet') return { columns: [], why: '', row: null, ...guessed };

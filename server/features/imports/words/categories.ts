@@ -71,10 +71,13 @@ export interface CategoryMeaning {
 
 /**
  * Reads category words for a shop: its own names first, then trade words that mean the same as one of them.
- * null = a word that nobody knows.
+ * null = a word that nobody knows. `retired`: names that it no longer offers, known only when written out.
  */
-export function categoryReader(shopCategories: readonly string[]): (text: string) => CategoryMeaning | null {
-  const byName = new Map(shopCategories.map((name) => [fold(name), name]));
+export function categoryReader(
+  shopCategories: readonly string[],
+  retired: readonly string[] = [],
+): (text: string) => CategoryMeaning | null {
+  const byName = new Map([...retired, ...shopCategories].map((name) => [fold(name), name]));
   const byMeaning = new Map<string, string>();
   for (const name of shopCategories) {
     const meaning = tradeMeaning(name)?.meaning;

@@ -57,7 +57,8 @@ function isUnexplained(column: Column, shape: Shape): boolean {
     !column.samples.every((cell) => looksLikeMoney(cell) && !looksLikeDay(cell))
   )
     return false;
-  const looksPaid = column.samples.some((cell) => /[.,]\d\d\b|[$€£]/.test(cell));
+  const looksPaid =
+    column.samples.some((cell) => /[.,]\d\d\b|[$€£]/.test(cell)) || (shape === 'vehicles' && areRound(column.samples));
   const isDate = headingMeanings(column.heading).some((meaning) => meaning.endsWith('On'));
   return (
     looksPaid &&
@@ -66,6 +67,12 @@ function isUnexplained(column: Column, shape: Shape): boolean {
     (shape === 'vehicles' || headingMeanings(column.heading).includes('amount'))
   );
 }
+
+const FEWEST_ROUND = 2;
+
+/** Whole sums of money are mostly round; lot numbers, keys and the like are not all so. */
+const areRound = (samples: readonly string[]) =>
+  samples.length >= FEWEST_ROUND && samples.every((cell) => /^[1-9][\d.,]*[05]$/.test(cell.trim()));
 
 function ownLaborChoice(column: Column, answers: ReadonlyMap<string, string>): Choice {
   const id = placedId('own-labor', column.sheet, column.col);

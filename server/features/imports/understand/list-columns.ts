@@ -97,6 +97,7 @@ function unknown(facts: ColumnFacts): Guess {
   );
 }
 
+const NO_OTHER = 'The heading says so, and no other column holds amounts.';
 const NAMES: readonly Meaning[] = ['vehicle', 'stock number', 'model'];
 
 /** What a list cannot do without and no heading names is known by its cells: days, vehicles, amounts. */
@@ -118,7 +119,15 @@ function byCells(all: readonly ColumnFacts[], guesses: readonly Guess[], shape: 
   } else if (lacks('amount', 'credit', 'estimate')) {
     const looksPaid = (facts: ColumnFacts) =>
       holdsMoney(facts) && facts.samples.some((cell) => /[.,]\d\d\b|[$€£]/.test(cell));
-    take('amount', looksPaid, 'Its cells hold amounts.');
+    // Beside nothing that a cost is told by, several columns of figures may as well be hours of several people.
+    const isTold = !lacks('date', 'category', 'what', 'vendor');
+    const figures = all.filter((facts, i) => settled[i]?.meaning === 'ignore' && facts.filled > 0 && holdsMoney(facts));
+    const total = all.findIndex(
+      (facts, i) =>
+        settled[i]?.meaning === 'derived' && holdsMoney(facts) && headingMeanings(facts.heading).includes('amount'),
+    );
+    if (isTold && total >= 0) settled[total] = { meaning: 'amount', category: null, why: NO_OTHER };
+    else if (isTold || figures.length < 2) take('amount', looksPaid, 'Its cells hold amounts.');
   }
   return settled;
 }

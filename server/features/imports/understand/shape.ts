@@ -1,5 +1,6 @@
 import type { Meaning } from '#shared/contracts/import-reading.ts';
 import type { Shape } from '#shared/contracts/import-words.ts';
+import { looksLikeDay } from '../cells/days.ts';
 import { looksLikeMoney } from '../cells/money.ts';
 import { type CategoryMeaning, SALE } from '../words/categories.ts';
 import { weekdayOf } from '../words/weekdays.ts';
@@ -8,7 +9,7 @@ import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from '
 import type { Guess } from './guess.ts';
 import { guessOfList } from './list-columns.ts';
 import { sectionColumns } from '../read/section-columns.ts';
-import { isFigure, tabNamesVehicle, titleOf } from '../read/sheet-words.ts';
+import { isFigure, namesVehicle, tabNamesVehicle, titleOf } from '../read/sheet-words.ts';
 import type { Head, HeadRow } from './head.ts';
 
 /** What one row stands for, or why the sheet cannot be read. */
@@ -23,6 +24,8 @@ export function guessShape(
   categoryOf: (text: string) => CategoryMeaning | null,
   { sheetName, thisYear }: { readonly sheetName: string | null; readonly thisYear: number },
 ): ShapeGuess {
+  const across = vehiclesAcross(head, thisYear);
+  if (across) return { shape: null, row: across.line, why: ACROSS };
   if (isVehicleSheet(head, all, sheetName, thisYear)) return { shape: 'vehicle sheet' };
   if (!head.heading) {
     return {
@@ -70,8 +73,8 @@ const isSaleOf = (all: readonly ColumnFacts[]) =>
   all.some(
     (facts) =>
       facts.filled > 0 &&
-      holdsMoney(facts) &&
-      (dealOf(facts.heading) === 'selling' || headingMeanings(facts.heading).includes('sale')),
+      ((holdsMoney(facts) && headingMeanings(facts.heading).includes('sale')) ||
+        ((holdsMoney(facts) || holdsDays(facts)) && dealOf(facts.heading) === 'selling')),
   );
 
 /** Do hours stand on every row, and is nothing said of a vendor or a kind of cost? Then amounts are hours at a rate. */
@@ -100,6 +103,20 @@ function isVehicleSheet(head: Head, all: readonly ColumnFacts[], sheetName: stri
 
 /** A row of words and an amount: `towing, 3/16/2019, Blue Heron, 185.00`. */
 const isCostRow = ({ cells }: HeadRow) => cells.some(isFigure) && cells.some((cell) => /\p{L}{3}/u.test(cell));
+
+const ACROSS =
+  'The vehicles stand side by side, one per column. Copy the table, paste it turned (rows as columns), and bring it in again.';
+
+/** A row of nothing but vehicles, as over a table that has one per column; null = there is none. */
+function vehiclesAcross(head: Head, thisYear: number): HeadRow | null {
+  const rows = [...head.above, ...(head.heading ? [head.heading] : []), ...head.below].slice(0, TITLE_WITHIN);
+  const isAcross = ({ cells }: HeadRow) => {
+    const filled = cells.filter((cell) => cell.trim() !== '');
+    const named = new Set(filled.filter((cell) => !looksLikeDay(cell) && namesVehicle(cell, thisYear)));
+    return named.size >= 2 && named.size >= filled.length - 1;
+  };
+  return rows.find(isAcross) ?? null;
+}
 
 const TITLE_WITHIN = 12;
 const FEWEST_WEEKDAYS = 4;

@@ -15,15 +15,28 @@ export function underGroups(upper: readonly string[], lower: readonly string[]):
   const isGroups = groups.length > 0 && !upper.some((cell) => looksLikeMoney(cell) || looksLikeDay(cell));
   const known = groups.filter((cell) => tradeMeaning(cell) !== null || headingMeanings(cell).length > 0);
   if (!isGroups || known.length < groups.length / 2) return null;
+  const again = repeatedUnder(upper, lower);
   let group = '';
   let merged = 0;
   const cells = lower.map((cell, at) => {
     group = (upper[at] ?? '').trim() || group;
-    if (group === '' || !QUALIFIER.test(fold(cell))) return cell;
+    if (group === '' || !(QUALIFIER.test(fold(cell)) || again.has(fold(cell)))) return cell;
     merged++;
     return `${group} ${cell.trim()}`;
   });
   return merged >= 2 ? cells : null;
+}
+
+/** What stands under several groups: `Date` under `Purchase` and under `Sale` is told apart by them alone. */
+function repeatedUnder(upper: readonly string[], lower: readonly string[]): ReadonlySet<string> {
+  const groups = new Map<string, Set<string>>();
+  let group = '';
+  for (const [at, cell] of lower.entries()) {
+    group = (upper[at] ?? '').trim() || group;
+    const word = fold(cell);
+    if (word !== '' && group !== '') groups.set(word, (groups.get(word) ?? new Set()).add(group));
+  }
+  return new Set([...groups].filter(([, over]) => over.size > 1).map(([word]) => word));
 }
 
 /** Headings above a row that only says which figure is which: `Parts` over two columns, `est` and `actual` below. null = none. */

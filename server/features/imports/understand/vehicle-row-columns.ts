@@ -1,6 +1,6 @@
 import type { Meaning } from '#shared/contracts/import-reading.ts';
 import { PURCHASE, SALE } from '../words/categories.ts';
-import { actualPart, dealOf, headingMeanings, likelyMeanings, plannedPart } from '../words/headings.ts';
+import { actualPart, dealOf, headingMeanings, isTotalLabel, likelyMeanings, plannedPart } from '../words/headings.ts';
 import { isOwnWork, saysHours } from '../words/own-work.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney } from './column-facts.ts';
 import { bySaying, type CategoryReader, type Guess, ignored } from './guess.ts';
@@ -81,7 +81,8 @@ function byMeaning(facts: ColumnFacts, meanings: readonly Meaning[], used: Reado
     (meaning) => !NOT_OF_VEHICLES.has(meaning) && !used.has(meaning) && suits(meaning, facts),
   );
   if (!found) return null;
-  const isNumber = found === 'vehicle' && facts.samples.every((cell) => STOCK_NUMBER.test(cell));
+  const names = facts.samples.filter((cell) => !isTotalLabel(cell));
+  const isNumber = found === 'vehicle' && names.length > 0 && names.every((cell) => STOCK_NUMBER.test(cell));
   return bySaying(isNumber && !used.has('stock number') ? 'stock number' : found);
 }
 

@@ -1,7 +1,7 @@
 import { fold, remembered } from '../cells/fold.ts';
 
 const OWN_WORK =
-  /^(?:(?:my|own|our|shop|owners?|self|in house)\s)?(?:labou?r|hours|hrs|time|work|time spent|arbeit|arbeitszeit|eigenleistung(?:en)?|eigenarbeit|eigene arbeit|eigene stunden|stunden|zeit|mano de obra|horas|trabajo|main d oeuvre|heures|travail|temps)(?:\s(?:log|hours|hrs|spent|own|mine|my own|me|self|by me|propia|propio|propias|eigene?|interne|perso|cost|costs|value|kosten|horas|stunden|heures))?$/;
+  /^(?:(?:my|own|our|shop|owners?|self|in house)\s)?(?:labou?r|hours|hrs|time|work|time spent|arbeit|arbeitszeit|eigenleistung(?:en)?|eigenarbeit|eigene arbeit|eigene stunden|stunden|zeit|mano de obra|horas|trabajo|main d oeuvre|heures|travail|temps)(?:\s(?:log|h|std|hours|hrs|spent|own|mine|my own|me|self|by me|propia|propio|propias|eigene?|interne|perso|cost|costs|value|kosten|horas|stunden|heures))?$/;
 const MINE =
   /\b(?:my|own|our|owners?|self) (?:labou?r|hours|hrs|time|work)\b|\b(?:eigenleistung|eigenarbeit|eigene (?:arbeit|stunden|zeit)|arbeitszeit eigen|mano de obra propia|horas propias|mi tiempo|mi trabajo|main d oeuvre propre|mon temps|mes heures)\b/;
 // `@ $25`, `x 25/hr`, `12h`: what stands beside the word without changing it.

@@ -9,7 +9,7 @@ describe('sheets as small shops keep them', () => {
       [
         'Car,,Purchase,,Repair,,Sale,',
         'No.,Vehicle,Date,Price,Parts,Paint,Date,Price',
-        '1,2012 Altima,2022-01-03,1900,810.25,220,100,417,2022-03-30,5700',
+        '1,2012 Altima,2022-01-03,1900,810.25,220,2022-03-30,5700',
         '2,2014 Soul,2022-02-03,2050,655.00,180,2022-05-01,6150',
         '3,2016 Spark,2022-04-06,1500,720.00,160,,',
       ].join('\n'),

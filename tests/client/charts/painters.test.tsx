@@ -91,7 +91,7 @@ test('the grid says value, range and count, and too few where it cannot', () => 
     '$25 /h$20 to $3011 rebuilds',
     '2 rebuildstoo few yet',
     'no rebuilds',
-    '$20 /h13 rebuilds',
+    '$20 /h$15 to $2513 rebuilds',
   ]);
 });
 

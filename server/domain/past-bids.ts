@@ -6,6 +6,7 @@ export interface PastBid {
   readonly id: string;
   /** null = not known, here and below. */
   readonly purchaseCents: number | null;
+  /** 0 = none was put in either. */
   readonly expectedSaleCents: number | null;
   readonly plannedSeconds: number | null;
   readonly estimateCents: number;
@@ -58,7 +59,7 @@ export function pastBids(bids: readonly PastBid[], wantedCentsPerHour: number | 
     const { id, purchaseCents, expectedSaleCents, reserveCents, profitCents, ownSeconds } = bid;
     const payCents = ownPay(bid.plannedSeconds, wantedCentsPerHour);
     if (purchaseCents === null) out.noPurchaseIds.push(id);
-    else if (expectedSaleCents === null) out.noSaleIds.push(id);
+    else if (!expectedSaleCents) out.noSaleIds.push(id);
     else if (payCents === null) out.noHoursIds.push(id);
     else {
       const withoutCents = expectedSaleCents - bid.estimateCents - payCents;

@@ -24,7 +24,7 @@ const stepSchema = z.object({
   rebuild: rebuildRefSchema.nullable(),
 });
 
-const tiedUpSchema = z.object({ on: daySchema, rebuildCount: count, cents });
+const tiedUpSchema = z.object({ on: yearEdge, rebuildCount: count, cents });
 
 /** One shop year (definitions §18.6): kept = profit of the rebuilds that left in it − overhead dated in it. */
 const shopYearSchema = z.object({

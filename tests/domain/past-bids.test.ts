@@ -50,6 +50,8 @@ describe('what the rule would have done to past bids', () => {
       [
         bid('no purchase', { purchaseCents: null, expectedSaleCents: null }),
         bid('no sale', { expectedSaleCents: null }),
+        // A sheet on which no sale was put in is kept with 0.
+        bid('sale of nothing', { expectedSaleCents: 0 }),
         bid('no hours', { plannedSeconds: null }),
       ],
       2_500,
@@ -60,7 +62,7 @@ describe('what the rule would have done to past bids', () => {
       skipped: [],
       aboveAnyway: [],
       noPurchaseIds: ['no purchase'],
-      noSaleIds: ['no sale'],
+      noSaleIds: ['no sale', 'sale of nothing'],
       noHoursIds: ['no hours'],
     });
     // Hours that ask for nothing need not be planned.

@@ -17,6 +17,12 @@ describe('the year', () => {
     expect(outOf(answer)).toEqual({ 'purchase not known': ['S-6'], 'own hours not known': ['S-6'] });
   });
 
+  it('answers for the year before the first day that books may hold', async () => {
+    const { ask } = await openSmallShop();
+    const answer = await ask<YearAnswer>('year?year=1949');
+    expect(answer).toMatchObject({ year: 1949, exitCount: 0, keptCents: 0, tiedUp: { on: '1949-12-31', cents: 0 } });
+  });
+
   it('steps through both years to the same totals', async () => {
     const { ask } = await openSmallShop();
     const { steps } = await ask<YearAnswer>('year');

@@ -77,6 +77,19 @@ describe('buying from a sheet', () => {
     expect(summary.total).toBe(6);
     expect((await ada.get(`/api/bids/${id}`)).body).toMatchObject({ state: 'open', version: 1 });
   });
+
+  it('makes nothing of a plan that no estimate can hold', async () => {
+    const { ada, books, keep } = await shop();
+    const most = 1_000_000_000_000;
+    const lines = [{ categoryId: books.categoryId('transport'), cents: most }];
+    const dear = await keep({ lines, transportCents: most });
+    const long = await keep({ ownSeconds: 360_000_000, paidSeconds: 1 });
+    for (const { id } of [dear, long]) {
+      const reply = await edit(ada, `/api/bids/${id}/buy`, 1, PURCHASE, `buy-${id}`);
+      expect([reply.status, reply.body.detail]).toEqual([422, 'The sheet plans for more than an estimate can hold.']);
+    }
+    expect((await ada.get('/api/rebuilds')).body.summary.total).toBe(6);
+  });
 });
 
 describe('the fee table', () => {

@@ -51,6 +51,13 @@ describe('a kept sheet', () => {
     expect((await ada.request('patch', `/api/bids/${id}`).send({ name: 'x' })).status).toBe(428);
   });
 
+  it('refuses amounts that together are too large to be reckoned exactly', async () => {
+    const { ada, sheet } = await shop();
+    const reply = await ada.post('/api/bids', sheet({ days: 10_000, holdingCentsPerDay: 1_000_000_000_000 }));
+    expect([reply.status, reply.body.detail]).toEqual([422, 'These amounts are too large to work out a bid.']);
+    expect((await ada.get('/api/bids')).body.total).toBe(0);
+  });
+
   it('refuses what cannot be, at its field', async () => {
     const { ada, sheet, books } = await shop();
     const faults = async (fields: object) => {

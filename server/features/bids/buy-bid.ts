@@ -1,6 +1,7 @@
 import type { z } from 'zod';
 import type { BidBasis, SheetPlace } from '#shared/contracts/bids-basis.ts';
 import type { Bid, buySchema } from '#shared/contracts/bids.ts';
+import { type EstimateFields, estimateFieldsSchema } from '#shared/contracts/estimates.ts';
 import type { Day } from '#shared/day.ts';
 import { bidFee, bidTax } from '#shared/measures/walk-away-bid.ts';
 import { bidStore } from '../../books/bid-sheets.ts';
@@ -22,14 +23,8 @@ export interface Buying {
  */
 export async function buyBid(books: Books, bid: Bid, purchase: Purchase, buying: Buying): Promise<Bid> {
   if (bid.state !== 'open') throw impossible('', 'This sheet is closed. Open it again to buy from it.');
+  const plan = estimateFields(bid, purchase, buying);
   const rebuild = await books.rebuilds.create(rebuildFields(bid, purchase));
-  const plan = {
-    lines: estimateLines(bid, purchase.hammerCents, buying.categories),
-    plannedSeconds: bid.ownSeconds + bid.paidSeconds,
-    expectedSaleCents: bid.expectedSaleCents,
-    expectedDays: bid.days,
-    note: `From the pre-bid sheet of ${bid.madeOn}: ${bid.name}`,
-  };
   const estimate = await books.estimates.create(rebuild.id, plan, buying.today);
   await books.estimates.lock(estimate.id, estimate.version);
   return bidStore(books.scope).setOutcome(bid.id, buying.version, {
@@ -52,6 +47,19 @@ function rebuildFields(bid: Bid, { tag, boughtOn, hammerCents }: Purchase) {
     titleBrandBought: bid.titleBrand,
     boughtFrom: bid.seller,
   };
+}
+
+/** What goes together on a sheet field by field may be too much for one estimate. */
+function estimateFields(bid: Bid, { hammerCents }: Purchase, { categories }: Buying): EstimateFields {
+  const { success, data } = estimateFieldsSchema.safeParse({
+    lines: estimateLines(bid, hammerCents, categories),
+    plannedSeconds: bid.ownSeconds + bid.paidSeconds,
+    expectedSaleCents: bid.expectedSaleCents,
+    expectedDays: bid.days,
+    note: `From the pre-bid sheet of ${bid.madeOn}: ${bid.name}`,
+  });
+  if (!success) throw impossible('', 'The sheet plans for more than an estimate can hold.');
+  return data;
 }
 
 /**

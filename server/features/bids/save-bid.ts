@@ -7,6 +7,7 @@ import {
   type outcomeSchema,
   type shownSchema,
 } from '#shared/contracts/bids.ts';
+import { bidFiguresSchema } from '#shared/contracts/bids-parts.ts';
 import { bidFigures } from '#shared/measures/bid-sheet.ts';
 import { type BidStore, bidStore, type WorkedSheet } from '../../books/bid-sheets.ts';
 import type { Books } from '../../books/books.ts';
@@ -69,7 +70,10 @@ export function setOutcome(
 function workedOut(sheet: BidFields, basis: BidBasis): WorkedSheet {
   // A kept sheet carries its state and figures too.
   const fields = bidFieldsSchema.strip().parse(sheet);
-  return { fields, figures: bidFigures(fields, basis), booksVersion: basis.booksVersion };
+  // Beyond what a number holds exactly, nothing is worked out.
+  const { success, data: figures } = bidFiguresSchema.safeParse(bidFigures(fields, basis));
+  if (!success) throw impossible('', 'These amounts are too large to work out a bid.');
+  return { fields, figures, booksVersion: basis.booksVersion };
 }
 
 function agreement({ figures }: WorkedSheet, shown: Shown): boolean | null {

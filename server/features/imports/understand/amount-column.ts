@@ -36,7 +36,8 @@ export function settleAmount(columns: readonly Column[], head: Head, money: Mone
 
 const MADE = 'It is what two other columns make together.';
 const PART = 'It only goes into the amount beside it.';
-const TURNED = 'The heading says so; money that went out stands negative here.';
+/** Said of a column that counts what went out negative. */
+export const TURNED = 'The heading says so; money that went out stands negative here.';
 
 /** What each column holds in each row, in cents; null = no figure. */
 function figuresOf(columns: readonly Column[], head: Head, money: Money) {

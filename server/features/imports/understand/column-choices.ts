@@ -5,6 +5,7 @@ import { looksLikeMoney } from '../cells/money.ts';
 import type { ShopBooks } from '../books.ts';
 import { otherCategory, paidWorkCategory } from '../words/categories.ts';
 import { headingMeanings, headingWords, plannedPart } from '../words/headings.ts';
+import { NOT_IT } from './rival-columns.ts';
 import { OWN_WORK } from './vehicle-row-columns.ts';
 import { placedId } from './placed-id.ts';
 
@@ -18,10 +19,8 @@ export function askOfColumns(
   answers: ReadonlyMap<string, string>,
   books: ShopBooks,
 ): { columns: Column[]; choices: Choice[] } {
-  if (shape === 'hours') return { columns: [...columns], choices: [] };
-  const hasSum =
-    shape === 'vehicles' &&
-    columns.some((column) => column.meaning === 'derived' && column.why.includes('sum of the costs'));
+  if (shape !== 'vehicles') return { columns: [...columns], choices: [] };
+  const hasSum = columns.some((column) => column.meaning === 'derived' && column.why.includes('sum of the costs'));
   const choices: Choice[] = [];
   const hasHours = columns.some(({ meaning }) => meaning === 'hours');
   const settled = columns.map((column) => {
@@ -32,22 +31,21 @@ export function askOfColumns(
       const { category } = paidWorkCategory(books.categories);
       return { ...column, meaning: 'cost' as const, category, why: 'You said so.' };
     }
-    if (hasSum || !isUnexplained(column, shape)) return column;
+    if (hasSum || !isUnexplained(column)) return column;
     const id = placedId('columns', column.sheet, column.col);
     const answer = answers.get(id) ?? null;
-    choices.push(choiceOf(column, shape, id, answer));
+    choices.push(choiceOf(column, id, answer));
     if (answer !== 'cost') return column;
-    return shape === 'vehicles'
-      ? { ...column, meaning: 'cost' as const, category: otherCategory(books.categories), why: 'You said so.' }
-      : { ...column, meaning: 'amount' as const, category: null, why: 'You said so.' };
+    return { ...column, meaning: 'cost' as const, category: otherCategory(books.categories), why: 'You said so.' };
   });
   return { columns: settled, choices };
 }
 
-function isUnexplained(column: Column, shape: Shape): boolean {
+function isUnexplained(column: Column): boolean {
   if (
     column.meaning !== 'ignore' ||
     column.why === OWN_WORK ||
+    column.why === NOT_IT ||
     column.why === 'You said so.' ||
     column.samples.length === 0
   )
@@ -57,15 +55,9 @@ function isUnexplained(column: Column, shape: Shape): boolean {
     !column.samples.every((cell) => looksLikeMoney(cell) && !looksLikeDay(cell))
   )
     return false;
-  const looksPaid =
-    column.samples.some((cell) => /[.,]\d\d\b|[$€£]/.test(cell)) || (shape === 'vehicles' && areRound(column.samples));
-  const isDate = headingMeanings(column.heading).some((meaning) => meaning.endsWith('On'));
-  return (
-    looksPaid &&
-    !isDate &&
-    headingWords(column.heading) !== '' &&
-    (shape === 'vehicles' || headingMeanings(column.heading).includes('amount'))
-  );
+  const looksPaid = column.samples.some((cell) => /[.,]\d\d\b|[$€£]/.test(cell)) || areRound(column.samples);
+  const isOther = headingMeanings(column.heading).some((meaning) => meaning.endsWith('On') || meaning === 'asking');
+  return looksPaid && !isOther && headingWords(column.heading) !== '';
 }
 
 const FEWEST_ROUND = 2;
@@ -92,10 +84,10 @@ function ownLaborChoice(column: Column, answers: ReadonlyMap<string, string>): C
   };
 }
 
-function choiceOf(column: Column, shape: Shape, id: string, answer: string | null): Choice {
+function choiceOf(column: Column, id: string, answer: string | null): Choice {
   return {
     id,
-    kind: shape === 'vehicles' ? 'columns' : 'amount-column',
+    kind: 'columns',
     column: column.heading,
     question: `Does column “${column.heading}” hold costs of its own?`,
     options: [

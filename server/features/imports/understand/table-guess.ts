@@ -12,6 +12,7 @@ import { columnFacts } from './column-facts.ts';
 import { guessColumns } from './columns.ts';
 import { markDerived } from './derived.ts';
 import { type Head, readHead } from './head.ts';
+import { askOfRivals } from './rival-columns.ts';
 import { guessShape } from './shape.ts';
 
 /** What the first rows of a sheet let expect of all its rows. */
@@ -54,8 +55,9 @@ export function guessTable(sheet: Sheet, { books, settings, decimal, answers }: 
     : NO_HEADING;
   if (guess.shape === null) return { sheet, hasRows, heading, choices: [], ...guess };
   if (guess.shape === 'vehicle sheet') return { sheet, hasRows, heading: NO_HEADING, choices: [], ...guess };
-  const asked = askOfColumns(guess.columns, guess.shape, answers, books);
-  return { sheet, hasRows, heading, ...guess, columns: asked.columns, choices: asked.choices };
+  const rivals = askOfRivals(guess.columns, guess.shape, { head, money: moneyReader(decimal), answers });
+  const asked = askOfColumns(rivals.columns, guess.shape, answers, books);
+  return { sheet, hasRows, heading, ...guess, columns: asked.columns, choices: [...rivals.choices, ...asked.choices] };
 }
 
 function guessAll(

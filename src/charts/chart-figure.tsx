@@ -38,7 +38,7 @@ export function ChartFigure({ caption, table, children }: Props) {
 
 function TextTable({ caption, table }: { caption: string; table: ChartTable }) {
   return (
-    <div className="table-frame mt-2" tabIndex={0} role="region" aria-label="The same as a table">
+    <div className="table-frame mt-2" tabIndex={0} role="region" aria-label={`As a table: ${caption}`}>
       <table className="table">
         <caption className="sr-only">{caption}</caption>
         <thead>

@@ -1,13 +1,15 @@
+import type { BidBasis } from '#shared/contracts/bids-basis.ts';
 import type { BidFigures } from '#shared/contracts/bids-parts.ts';
 import type { Formatter } from '#shared/formatter.ts';
 import { unbroken } from '../../lib/unbroken.ts';
 import { useFormatter } from '../../ui/formatter-context.tsx';
 import { Panel } from '../../ui/panel.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
-import { chanceWords, rungWords } from './words.ts';
+import { chanceWords, cutWords, rungWords } from './words.ts';
 
 type Joint = NonNullable<BidFigures['joint']>;
 type Rate = BidFigures['saleChance'];
+type Props = { figures: BidFigures; isSeen: boolean | null; basis: BidBasis };
 type Line = { readonly what: string; readonly rate: Rate };
 
 const REASONS = {
@@ -19,7 +21,7 @@ const REASONS = {
 } as const;
 
 /** Past rebuilds put on this sheet: how often repair and sale, each and together, would have held. */
-export function Chances({ figures, isSeen }: { figures: BidFigures; isSeen: boolean | null }) {
+export function Chances({ figures, isSeen, basis }: Props) {
   const format = useFormatter();
   const { joint, jointReason } = figures;
   if (!joint) {
@@ -39,7 +41,7 @@ export function Chances({ figures, isSeen }: { figures: BidFigures; isSeen: bool
   return (
     <Panel
       title="How likely all of it holds"
-      subtitle={`${format.count(joint.wanted.n, 'past rebuild')} ${rungWords(joint.rung, isSeen)}, put on this sheet as they came out.`}
+      subtitle={`${format.count(joint.wanted.n, 'past rebuild')} ${rungWords(joint.rung, isSeen)}, put on this sheet as they came out.${cutWords(basis, format)}`}
     >
       <p className="mb-3 text-lead font-[640]">{chanceWords(joint)}</p>
       <Table caption="How often it would have held" rows={rows} columns={COLUMNS} rowKey={(row) => row.what} />

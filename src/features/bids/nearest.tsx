@@ -3,18 +3,24 @@ import type { BidFields } from '#shared/contracts/bids.ts';
 import type { BidBasis, Past } from '#shared/contracts/bids-basis.ts';
 import { type Similar, similarRebuilds, type Trait } from '#shared/measures/similar.ts';
 import { Days, Hours, Money } from '../../ui/figures.tsx';
+import { useFormatter } from '../../ui/formatter-context.tsx';
 import { Panel } from '../../ui/panel.tsx';
 import { type Column, Table } from '../../ui/table.tsx';
+import { cutWords } from './words.ts';
 
 type Props = { sheet: BidFields; planCents: number; basis: BidBasis; shopId: string };
 
 /** The three past rebuilds most like this one, and what came of them. */
 export function Nearest({ sheet, planCents, basis, shopId }: Props) {
+  const format = useFormatter();
   const { classId, damageId, isSeen } = sheet;
   const rows = similarRebuilds(basis.past, { classId, damageId, isSeen, planCents });
   if (rows.length === 0) return null;
   return (
-    <Panel title="The nearest past rebuilds" subtitle="By what they have in common, then by the size of the plan.">
+    <Panel
+      title="The nearest past rebuilds"
+      subtitle={`By what they have in common, then by the size of the plan.${cutWords(basis, format)}`}
+    >
       <Table
         caption="The nearest past rebuilds"
         rows={rows}

@@ -1,8 +1,8 @@
 import type { BidFields } from '#shared/contracts/bids.ts';
 import type { BidBasis } from '#shared/contracts/bids-basis.ts';
-import { tradeCautions } from '#shared/trade-cautions.ts';
+import { bidCautions } from '#shared/trade-cautions.ts';
 
-/** Cautions for the work that this car will bring, by its damage and what is planned. */
+/** Cautions for the work that this car will bring, by its damage, what hides behind that, and what is planned. */
 export function SheetCautions({ sheet, basis }: { sheet: BidFields; basis: BidBasis }) {
   const cautions = cautionsOfSheet(sheet, basis);
   if (cautions.length === 0) return null;
@@ -20,12 +20,11 @@ export function SheetCautions({ sheet, basis }: { sheet: BidFields; basis: BidBa
   );
 }
 
-export function cautionsOfSheet(sheet: BidFields, basis: BidBasis) {
+function cautionsOfSheet(sheet: BidFields, basis: BidBasis) {
   const damage = (id: string | null) => basis.damages.filter((one) => one.id === id).map(({ name }) => name);
   const planned = new Set(sheet.lines.map(({ categoryId }) => categoryId));
-  return tradeCautions({
+  return bidCautions({
     damages: [...damage(sheet.damageId), ...damage(sheet.secondDamageId)],
     categories: basis.categories.filter(({ id }) => planned.has(id)).map(({ name }) => name),
-    entries: [],
   });
 }

@@ -81,7 +81,7 @@ export function Sheet({ basis, bid, home, shop, mayWrite, onKept, onBought }: Pr
         <form id="sheet" noValidate onSubmit={(event) => void keeping.onSubmit(event)} className="min-w-0">
           <fieldset disabled={!isOpen} className="grid min-w-0 gap-6">
             <CarFields {...fields} />
-            <SaleFields form={form} figures={whole} />
+            <SaleFields form={form} basis={basis} figures={whole} />
             <PlanFields {...fields} />
             <WorkFields {...fields} />
             <RuleFields {...fields} figures={figures} />
@@ -92,7 +92,7 @@ export function Sheet({ basis, bid, home, shop, mayWrite, onKept, onBought }: Pr
           <div className="grid min-w-0 content-start gap-6">
             <MadeOf sheet={sheet} figures={figures} />
             <Moves sheet={sheet} figures={figures} basis={basis} />
-            <Chances figures={whole} isSeen={sheet.isSeen} />
+            <Chances figures={whole} isSeen={sheet.isSeen} basis={basis} />
             <Selling sheet={sheet} basis={basis} />
             <Nearest sheet={sheet} planCents={figures.planCents} basis={basis} shopId={shop.id} />
             <SheetCautions sheet={sheet} basis={basis} />

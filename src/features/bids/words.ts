@@ -32,6 +32,12 @@ export function biasWords(
   return `You usually end ${side}, on ${format.number(n)}${comes}`;
 }
 
+/** ` Looked at: the last 100 that left, of 330.` with its space before; '' = all of them are looked at. */
+export function cutWords({ past, pastTotal }: BidBasis, format: Formatter): string {
+  if (pastTotal <= past.length) return '';
+  return ` Looked at: the last ${format.number(past.length)} that left, of ${format.number(pastTotal)}.`;
+}
+
 /** `4 in 5`. */
 export function levelWords(level: LevelName): string {
   return level.replace('/', ' in ');

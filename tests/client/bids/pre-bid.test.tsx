@@ -7,7 +7,7 @@ import { keptNames } from '../../../src/lib/kept.ts';
 import { PreBidPage } from '../../../src/pages/pre-bid.tsx';
 import { buildSession, fakeServer, idOf, on, Refusal, signedIn } from '../../support/fake-server.ts';
 import { showPage } from '../../support/show-page.tsx';
-import { buildBasis, buildBid } from './replies.ts';
+import { buildBasis, buildBid, buildPast } from './replies.ts';
 
 const PATH = '/s/:shopId/pre-bid/:bidId?';
 const HOME = `/s/${idOf('s')}/pre-bid`;
@@ -22,9 +22,9 @@ type Routes = Parameters<typeof fakeServer>[0];
 function open(routes: Routes = [], { address = HOME, role = 'owner' }: { address?: string; role?: Role } = {}) {
   const server = fakeServer([
     signedIn(buildSession(role)),
+    ...routes,
     on(bidsApi.basis, () => buildBasis()),
     on(bidsApi.get, () => buildBid()),
-    ...routes,
   ]);
   return { ...server, page: showPage(<PreBidPage />, { path: PATH, address }) };
 }
@@ -197,6 +197,21 @@ test('the walk round lists the shop’s own surprises above the trade’s checks
   expect(own.compareDocumentPosition(common) & Node.DOCUMENT_POSITION_FOLLOWING).toBeTruthy();
   await userEvent.click(common);
   expect(common).toBeChecked();
+});
+
+test('where the past is cut, what looks back at it says so', async () => {
+  const past = [buildPast()];
+  open([on(bidsApi.basis, () => buildBasis({ past, pastTotal: 330 }))]);
+  await typeExample();
+  const cut = await screen.findAllByText(/Looked at: the last 1 that left, of 330\./);
+  expect(cut).toHaveLength(2);
+});
+
+test('a look at a car warns of what hides behind its damage', async () => {
+  open();
+  await userEvent.selectOptions(await field('Damage'), 'Front');
+  const cautions = await screen.findByRole('list', { name: 'Cautions' });
+  expect(cautions).toHaveTextContent('Air conditioning: refrigerant');
 });
 
 test('an accountant may try figures, and keeps nothing', async () => {

@@ -83,6 +83,27 @@ export function buildBasis(change: Partial<BidBasis> = {}): BidBasis {
   };
 }
 
+/** A past rebuild that sold for what was expected. */
+export function buildPast(): BidBasis['past'][number] {
+  return {
+    id: idOf('z'),
+    tag: 'B-07',
+    name: '2014 Orrin Vale',
+    classId: null,
+    damageId: null,
+    isSeen: false,
+    leftOn: '2026-02-01',
+    estimateCents: 200_000,
+    actualCents: 240_000,
+    plannedSeconds: 144_000,
+    actualSeconds: 180_000,
+    daysHeld: 90,
+    keptCents: 150_000,
+    proceedsCents: 900_000,
+    expectedSaleCents: 900_000,
+  };
+}
+
 /** The worked example as a kept sheet: it comes to 3,950. */
 export function buildBid(change: Partial<Bid> = {}): Bid {
   const { version: _, ...fees } = buildBasis().feeTable;

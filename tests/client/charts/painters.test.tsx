@@ -40,6 +40,18 @@ test('a chart says its finding and holds its figures as a table', async () => {
   ]);
 });
 
+test('two charts with their tables open are told apart', async () => {
+  show(
+    <>
+      <BackTestBars caption="One of two ran short." bars={bars} format={format} />
+      <BackTestBars caption="None ran short." bars={bars.slice(2)} format={format} />
+    </>,
+  );
+  for (const fold of screen.getAllByText('As a table')) await userEvent.click(fold);
+  const names = screen.getAllByRole('region').map((region) => region.getAttribute('aria-label'));
+  expect(names).toEqual(['As a table: One of two ran short.', 'As a table: None ran short.']);
+});
+
 test('its points are one stop for Tab; arrows move between them and each opens its rebuild', async () => {
   show(<BackTestBars caption="One of two ran short." bars={bars} format={format} />);
   await userEvent.tab();

@@ -101,5 +101,7 @@ export async function adoptRule(page: Page, shop: string): Promise<void> {
   const dialog = page.getByRole('dialog', { name: 'Adopt a rule' });
   await dialog.getByRole('button', adopt).click();
   await expect(dialog).toBeHidden();
-  await expect(page.getByRole('table', { name: 'Rules adopted' })).toContainText(`${asked(4, 5)}`);
+  await expect(page.getByText(new RegExp(`^In force for \\d{4}: ${asked(4, 5)}`))).toBeVisible();
+  await page.goto(`${shop}/contingency/review`);
+  await expect(page.getByRole('table', { name: 'Rules adopted' })).toContainText(asked(4, 5));
 }

@@ -46,7 +46,8 @@ export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) =>
           overwritten.add(made);
         }
         tally.count(result);
-        sink.row(table.sheet.rawRow?.(line) ?? cells, line, result, number, cells);
+        const raw = table.sheet.rawRow?.(line) ?? cells;
+        sink.row(table.sheet.asGiven?.(line, raw) ?? raw, line, result, number, cells);
       },
       onPart && ((share) => onPart((done + share) / plan.tables.length)),
     );

@@ -14,6 +14,8 @@ export interface Sheet {
   readonly isHidden: boolean;
   /** A row that a person put right, as it stood in the file; undefined = nobody touched it. */
   rawRow?(line: number): readonly string[] | undefined;
+  /** A row without what was put into it from the rows above; left out = nothing was. */
+  asGiven?(line: number, cells: readonly string[]): readonly string[];
   /** Rows that a person left out: they are given as blank. */
   readonly leftOut?: ReadonlySet<number>;
   /** What stands beside its cells: comments, hidden rows and columns, formulas without a value. */

@@ -8,6 +8,7 @@ import { FileRefusal } from '../refusal.ts';
 import { type GivenFile, openFiles } from '../sheets/open-files.ts';
 import { editedSheets } from '../sheets/edited-sheet.ts';
 import { hintsOf } from '../sheets/sheet.ts';
+import { carryNames } from './carried-names.ts';
 import { makeFilePlan, type SurveyedTable, usualDecimal } from './file-plan.ts';
 import { guessTable, type TableGuess } from './table-guess.ts';
 import { type Survey, survey, surveyVehicleSheet } from './survey.ts';
@@ -39,7 +40,7 @@ export function understand(files: readonly GivenFile[], books: ShopBooks, said: 
   const answers = new Map(Object.entries(settings.answers ?? {}));
   const decimal = usualDecimal(books.locale);
   const guesses = sheets
-    .map((sheet) => guessTable(sheet, { books, settings, decimal, answers }))
+    .map((sheet) => carryNames(guessTable(sheet, { books, settings, decimal, answers }), answers))
     .filter(({ hasRows, sheet }) => hasRows || sheet.name === null);
   const first = guesses.find((guess) => guess.shape !== null) ?? guesses[0];
   if (!first) throw new FileRefusal('empty', 'No sheet of this workbook holds anything.');

@@ -28,7 +28,7 @@ export function ChartFigure({ caption, table, children }: Props) {
         {tip && width !== null && <TipBox tip={tip} width={width} />}
       </div>
       <figcaption className="text-soft">{caption}</figcaption>
-      <details className="no-print">
+      <details className="no-print min-w-0">
         <summary className="inline-block min-h-6 text-label text-soft underline underline-offset-3">As a table</summary>
         <TextTable caption={caption} table={table} />
       </details>

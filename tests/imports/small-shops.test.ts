@@ -76,4 +76,32 @@ describe('sheets as small shops keep them', () => {
       'transport',
     ]);
   });
+
+  it('money back typed positive is money back where the kind of cost says so, too', () => {
+    const text = [
+      'Date,Vehicle,Type,Description,Amount',
+      '2022-01-08,2012 Altima,Parts,alternator,180.00',
+      '2022-01-09,2012 Altima,Core return,alternator core,40.00',
+      '2022-01-15,2012 Altima,Parts credit,hood,20.00',
+      '2022-01-16,2012 Altima,Parts,return spring,12.00',
+    ].join('\n');
+    expect(linesOf(read(text)).map(({ cents, isGuess }) => [cents, isGuess])).toEqual([
+      [18_000, false],
+      [-4000, true],
+      [-2000, true],
+      [1200, false],
+    ]);
+  });
+
+  it('the numbers of an account’s postings are no vehicles', () => {
+    const text = [
+      'Date,Description,Reference,Debit,Credit,Balance',
+      '01/14/2023,Lot 55,1001,1850.00,,8150.00',
+      '01/15/2023,Tow,1002,140.00,,8010.00',
+      '01/25/2023,Fender,1003,155.40,,7854.60',
+      '02/20/2023,Shop rent,1004,900.00,,6954.60',
+      '03/15/2023,Deposit,1005,,5400.00,12354.60',
+    ].join('\n');
+    expect(read(text).refusal?.message).toContain('No column names the vehicle');
+  });
 });

@@ -29,6 +29,8 @@ export interface ExpenseCells {
   readonly isRough: boolean;
   readonly target: VehicleTarget | undefined;
   readonly meaning: CategoryMeaning | undefined;
+  /** Its category as the file writes it. */
+  readonly kind: string | null;
   /** Own work, in seconds: hours beside words that say so. Then its amount is only hours times a rate. */
   readonly ownSeconds: number | null;
   /** Money for own time of which the hours are not known: it is put aside. */
@@ -99,6 +101,7 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
     const name = nameOf(cells);
     const dateCell = cell(cols.date).trim();
     const what = textOf(cell(cols.what));
+    const kind = textOf(cell(cols.category));
     const paid = cellMoney(plan, cell(cols.amount));
     const isPay = payOf(cells) !== null;
     return {
@@ -110,7 +113,8 @@ export function expenseCellReader(plan: Plan, cols: ExpenseColumns): (cells: rea
       planned: cellMoney(plan, cell(cols.planned)),
       isRough: days.isGuess || isRough(cell(cols.amount)) || isRough(cell(cols.credit)),
       target: plan.vehicles.get(name),
-      meaning: isPay && labor.as === 'paid' ? paidWork : meaningOf(textOf(cell(cols.category)) ?? '', what),
+      meaning: isPay && labor.as === 'paid' ? paidWork : meaningOf(kind ?? '', what),
+      kind,
       ownSeconds:
         isPay && labor.as === 'hours' && typeof paid === 'number' && paid > 0
           ? hoursAt(paid, labor.rate)

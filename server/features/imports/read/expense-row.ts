@@ -66,9 +66,9 @@ function plannedOf(row: ExpenseCells, line: number, col: number): DraftLine {
 }
 
 /** A refund whose words say so while its amount says nothing of it. */
-function isTypedPositive({ paid, what, meaning }: ExpenseCells): boolean {
+function isTypedPositive({ paid, what, kind, meaning }: ExpenseCells): boolean {
   const isFact = meaning?.category === PURCHASE || meaning?.category === SALE;
-  return typeof paid === 'number' && paid > 0 && !isFact && isRefund(what);
+  return typeof paid === 'number' && paid > 0 && !isFact && (isRefund(what) || isRefund(kind));
 }
 
 function lineOf(

@@ -1,5 +1,6 @@
 import type { Meaning } from '#shared/contracts/import-reading.ts';
 import type { Shape } from '#shared/contracts/import-words.ts';
+import { fold } from '../cells/fold.ts';
 import { headingMeanings, headingRank, likelyMeanings, plannedPart } from '../words/headings.ts';
 import { tradeMeaning } from '../words/categories.ts';
 import { weekdayOf } from '../words/weekdays.ts';
@@ -70,12 +71,20 @@ function candidates(all: readonly ColumnFacts[], allowed: readonly Meaning[]) {
     const meanings = isCost ? [] : exact.length > 0 ? exact : likelyMeanings(facts.heading);
     for (const meaning of meanings) {
       const order = allowed.indexOf(meaning);
-      if (order < 0 || !suits(meaning, facts)) continue;
+      if (order < 0 || !suits(meaning, facts) || (meaning === 'stock number' && isVoucher(facts))) continue;
       found.push({ at, meaning, rank: (headingRank(facts.heading, meaning) ?? BY_PART) + order / 100 });
     }
   });
   return found.sort((a, b) => a.rank - b.rank || a.at - b.at);
 }
+
+const FEWEST_VOUCHERS = 5;
+
+/** A reference that is another one on every row numbers receipts, not vehicles. */
+export const isVoucher = ({ heading, filled, distinct }: ColumnFacts) =>
+  filled >= FEWEST_VOUCHERS &&
+  distinct === 1 &&
+  /^(?:ref|referen|beleg|voucher|receipt|check|cheque)/.test(fold(heading));
 
 function plannedGuess(facts: ColumnFacts, shape: Shape): Guess | null {
   const isPlanned = shape === 'expenses' && plannedPart(facts.heading) !== null && facts.filled > 0;

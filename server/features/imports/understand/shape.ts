@@ -7,7 +7,7 @@ import { weekdayOf } from '../words/weekdays.ts';
 import { actualPart, dealOf, headingMeanings, plannedPart } from '../words/headings.ts';
 import { type ColumnFacts, holdsDays, holdsHours, holdsMoney, holdsText } from './column-facts.ts';
 import type { Guess } from './guess.ts';
-import { guessOfList } from './list-columns.ts';
+import { guessOfList, isVoucher } from './list-columns.ts';
 import { sectionColumns } from '../read/section-columns.ts';
 import { isFigure, namesVehicle, tabNamesVehicle, titleOf } from '../read/sheet-words.ts';
 import type { Head, HeadRow } from './head.ts';
@@ -39,8 +39,9 @@ export function guessShape(
   const means = (meaning: Meaning, holds: (facts: ColumnFacts) => boolean) =>
     all.find((facts) => holds(facts) && headingMeanings(facts.heading).includes(meaning));
   const costs = all.filter((facts) => facts.filled > 0 && holdsMoney(facts) && isCost(facts, categoryOf));
+  const isDated = means('date', isPlainDate) !== undefined;
   const name =
-    means('stock number', holdsNames) ??
+    means('stock number', (facts) => holdsNames(facts) && !(isDated && isVoucher(facts))) ??
     means('vehicle', holdsNames) ??
     means('model', () => true) ??
     column('vehicle', 'stock number', 'model');

@@ -2,7 +2,7 @@ import { flatReserve, reserve, twoPartReserve } from '#shared/measures/reserves.
 import { byOverrun } from './contingency.ts';
 import { RankTree } from './rank-tree.ts';
 import type { PlannedOutcome } from './sets.ts';
-import { creepPercent, residualCents } from './two-part-rule.ts';
+import { creepPercent, residualCents, sortedResiduals } from './two-part-rule.ts';
 
 /** What a rule asked for, at the time. `uplift` is the overrun taken, unrounded; a two-part rule has none. */
 export interface Asked {
@@ -29,16 +29,20 @@ export function percentOverTime(outcomes: readonly PlannedOutcome[]): HistoryRul
   };
 }
 
-/** The two-part rule (§11b) over growing histories. The creep is a whole percent and moves little: one tree for each. */
+/**
+ * The two-part rule (§11b) over growing histories. The creep is a whole percent and moves little: one tree for each, over
+ * no more outcomes than were known when it last came up, since most come up only while few are known.
+ */
 export function twoPartOverTime(outcomes: readonly PlannedOutcome[]): HistoryRule {
   const creepSums = prefixSums(outcomes.map((outcome) => outcome.overrunCents - outcome.surpriseCents));
   const estimateSums = prefixSums(outcomes.map((outcome) => outcome.estimateCents));
+  const creeps = creepSums.map((creepCents, size) => creepPercent(creepCents, estimateSums[size] ?? 0));
+  const lastSize = new Map(creeps.map((creep, size) => [creep, size]));
   const byCreep = new Map<number, (historySize: number, k: number) => number>();
   return (historySize, k, estimateCents) => {
-    const creep = creepPercent(creepSums[historySize] ?? 0, estimateSums[historySize] ?? 0);
-    const known = byCreep.get(creep);
-    const kth = known ?? residualsOverTime(outcomes, creep);
-    if (!known) byCreep.set(creep, kth);
+    const creep = creeps[historySize] ?? 0;
+    const kth = byCreep.get(creep) ?? residualsOverTime(outcomes.slice(0, lastSize.get(creep)), creep);
+    byCreep.set(creep, kth);
     const flatCents = Math.max(0, kth(historySize, k));
     return { reserveCents: twoPartReserve(creep, flatCents, estimateCents), uplift: null };
   };
@@ -49,13 +53,23 @@ export function flatOverTime(percent: number): HistoryRule {
   return (_historySize, _k, estimateCents) => ({ reserveCents: flatReserve(percent, estimateCents), uplift: null });
 }
 
+/** Equal residuals share the rank of the first of them: whichever of them is the k-th, it is the same sum. */
 function residualsOverTime(outcomes: readonly PlannedOutcome[], creep: number): (size: number, k: number) => number {
-  const residuals = Float64Array.from(outcomes, (outcome) => residualCents(outcome, creep));
-  const order = Int32Array.from(residuals.keys()).sort((a, b) => (residuals[a] ?? 0) - (residuals[b] ?? 0));
-  const rankOf = new Int32Array(residuals.length);
-  for (const [rank, index] of order.entries()) rankOf[index] = rank;
+  const sorted = sortedResiduals(outcomes, creep);
+  const rankOf = new Int32Array(outcomes.map((outcome) => placeIn(sorted, residualCents(outcome, creep))));
   const seen = growing(rankOf);
-  return (size, k) => residuals[order[seen(size, k)] ?? 0] ?? 0;
+  return (size, k) => sorted[seen(size, k)] ?? 0;
+}
+
+/** How many of the sorted values are below this one. */
+function placeIn(sorted: Float64Array, value: number): number {
+  let [low, high] = [0, sorted.length];
+  while (low < high) {
+    const middle = (low + high) >> 1;
+    if ((sorted[middle] ?? value) < value) low = middle + 1;
+    else high = middle;
+  }
+  return low;
 }
 
 /** Rank of the k-th smallest among the first `size` items, `size` never shrinking. */

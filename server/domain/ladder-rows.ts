@@ -3,7 +3,7 @@ import { byOverrun, contingency, type Level } from './contingency.ts';
 import type { RebuildFacts } from './facts.ts';
 import type { Car } from './ladder.ts';
 import { grouped } from './grouped.ts';
-import { type Completed, planned, plannedOutcomes } from './sets.ts';
+import { byExit, type Completed, planned, plannedOutcomes } from './sets.ts';
 import { twoPartRule } from './two-part-rule.ts';
 
 /** The rules of one rung, at each of the levels asked for. What the rung does not look at is null. */
@@ -24,7 +24,8 @@ export interface LadderRow extends Car {
  * browser needs to climb the ladder without signal. Rungs with fewer than nine carry no rule and are left out.
  */
 export function ladderRows(facts: readonly RebuildFacts[], levels: readonly Level[]): LadderRow[] {
-  const set = planned(facts);
+  // In the order in which they left once, so that no rung has to be brought into it again.
+  const set = planned(facts).sort(byExit);
   return [
     ...groupsOf(set, 'class+damage+seen', ({ class: name, damage, seen }) => [name, damage, seen]),
     ...groupsOf(set, 'damage+seen', ({ damage, seen }) => [null, damage, seen]),
@@ -50,7 +51,8 @@ function groupsOf(set: readonly Completed[], rung: Rung, keyOf: (car: Car) => Ke
 function rulesOf(members: readonly Completed[], levels: readonly Level[]): Pick<LadderRow, 'percent' | 'twoPart'> {
   // In order once: each level sorts anew, which costs next to nothing then.
   const outcomes = plannedOutcomes(members).sort(byOverrun);
-  const told = plannedOutcomes(members.filter(({ hasUnknownForeseen }) => !hasUnknownForeseen));
+  const untold = new Set(members.filter(({ hasUnknownForeseen }) => hasUnknownForeseen).map(({ id }) => id));
+  const told = outcomes.filter(({ id }) => !untold.has(id));
   const twoPart = levels.map((level) => twoPartRule(told, level));
   return {
     percent: {

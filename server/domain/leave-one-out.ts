@@ -2,7 +2,7 @@ import type { Overran } from '#shared/measures/reserves.ts';
 import { byOverrun, type Level, rankAt } from './contingency.ts';
 import type { PlannedOutcome } from './sets.ts';
 import { sum } from './statistics.ts';
-import { creepPercent, residualCents } from './two-part-rule.ts';
+import { creepPercent, residualCents, sortedResiduals } from './two-part-rule.ts';
 
 /** Between what a figure moves when any one rebuild is left out of it. */
 export interface Moves<T> {
@@ -35,13 +35,13 @@ export function twoPartWithoutOne(
   if (set.length < 2 || k > set.length - 1) return null;
   const creepCents = sum(set.map((one) => one.overrunCents - one.surpriseCents));
   const estimateCents = sum(set.map((one) => one.estimateCents));
-  const sortedAt = new Map<number, readonly number[]>();
+  const sortedAt = new Map<number, Float64Array>();
   const [creeps, flats]: [number[], number[]] = [[], []];
   for (const one of set) {
     const creep = creepPercent(creepCents - one.overrunCents + one.surpriseCents, estimateCents - one.estimateCents);
-    const sorted = sortedAt.get(creep) ?? set.map((each) => residualCents(each, creep)).sort((a, b) => a - b);
+    const sorted = sortedAt.get(creep) ?? sortedResiduals(set, creep);
     sortedAt.set(creep, sorted);
-    const [kth = 0, next = 0] = sorted.slice(k - 1, k + 1);
+    const [kth, next] = [sorted[k - 1] ?? 0, sorted[k] ?? 0];
     creeps.push(creep);
     flats.push(Math.max(0, residualCents(one, creep) <= kth ? next : kth));
   }

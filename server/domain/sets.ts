@@ -55,18 +55,22 @@ export function plannedAndTold(facts: readonly RebuildFacts[]): Completed[] {
   return planned(facts).filter((rebuild) => !rebuild.hasUnknownForeseen);
 }
 
-/** The outcomes of a set, in the order in which they became known: by exit day, then id (§11). */
+/** The outcomes of a set, in the order in which they became known (§11). */
 export function plannedOutcomes(set: readonly Completed[]): PlannedOutcome[] {
-  return set
-    .map((rebuild) => ({
-      id: rebuild.id,
-      exitOn: rebuild.exit.on,
-      boughtOn: rebuild.boughtOn,
-      estimateCents: rebuild.estimateCents,
-      overrunCents: rebuild.planningCents - rebuild.estimateCents,
-      surpriseCents: rebuild.surprisePlanningCents,
-    }))
-    .sort((a, b) => (a.exitOn < b.exitOn ? -1 : a.exitOn > b.exitOn ? 1 : byCodePoint(a.id, b.id)));
+  return set.toSorted(byExit).map((rebuild) => ({
+    id: rebuild.id,
+    exitOn: rebuild.exit.on,
+    boughtOn: rebuild.boughtOn,
+    estimateCents: rebuild.estimateCents,
+    overrunCents: rebuild.planningCents - rebuild.estimateCents,
+    surpriseCents: rebuild.surprisePlanningCents,
+  }));
+}
+
+/** The order in which outcomes became known: by exit day, then id (§11). */
+export function byExit(a: Completed, b: Completed): number {
+  if (a.exit.on !== b.exit.on) return a.exit.on < b.exit.on ? -1 : 1;
+  return byCodePoint(a.id, b.id);
 }
 
 /** One rebuild on the market: days from listing to its sale, or to where we lost sight of it. */

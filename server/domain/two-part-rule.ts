@@ -28,6 +28,11 @@ export function residualCents(outcome: PlannedOutcome, creep: number): number {
   return outcome.overrunCents - flatReserve(creep, outcome.estimateCents);
 }
 
+/** The residuals of a set at one creep, the smallest first. A numeric array sorts itself without asking back for each pair. */
+export function sortedResiduals(set: readonly PlannedOutcome[], creep: number): Float64Array {
+  return new Float64Array(set.map((outcome) => residualCents(outcome, creep))).sort();
+}
+
 /**
  * Percent for known work costing more, dollars for surprises (definitions §11b, §18.3): budget = E + ceil(a·E) + b,
  * a = `creepPercent`, b = max(0, k-th of the sorted residuals), k as in §10. a comes from the same rebuilds, so the
@@ -39,8 +44,7 @@ export function twoPartRule(set: readonly PlannedOutcome[], level: Level): TwoPa
   if (n === 0) return { n, level, creepPercent: null, k, flatCents: null };
   const creepCents = sum(set.map((outcome) => outcome.overrunCents - outcome.surpriseCents));
   const creep = creepPercent(creepCents, sum(set.map((outcome) => outcome.estimateCents)));
-  const residuals = set.map((outcome) => residualCents(outcome, creep)).sort((a, b) => a - b);
-  const taken = residuals[k - 1];
+  const taken = sortedResiduals(set, creep)[k - 1];
   return { n, level, creepPercent: creep, k, flatCents: taken === undefined ? null : Math.max(0, taken) };
 }
 

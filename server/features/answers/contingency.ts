@@ -4,9 +4,10 @@ import type { Rule } from '#shared/contracts/rules.ts';
 import type { ShopRebuild } from '../../books/shop-facts.ts';
 import { type Trial, walkForward } from '../../domain/back-test.ts';
 import { byOverrun, contingency, type Level, levelOf, rankAt, wholePercent } from '../../domain/contingency.ts';
+import { grouped } from '../../domain/grouped.ts';
 import { ruleRecord } from '../../domain/rule-record.ts';
-import { type Completed, isOverwritten, plannedOutcomes } from '../../domain/sets.ts';
-import { median, quantile, sum } from '../../domain/statistics.ts';
+import { type Completed, isOverwritten, type PlannedOutcome, plannedOutcomes } from '../../domain/sets.ts';
+import { quantiles, sum } from '../../domain/statistics.ts';
 import { shopYearOf, yearSpan } from '../../domain/years.ts';
 import { driftOf } from './contingency-drift.ts';
 import { pastBidsOf } from './contingency-past-bids.ts';
@@ -29,7 +30,7 @@ export function contingencyAnswer(input: AnswerInput, query: z.output<typeof con
   const done = rebuilds.filter((one): one is ShopRebuild & Completed => one.exit !== null);
   const set = done.filter((one) => one.estimateCents > 0 && !isOverwritten(one));
   const outcomes = plannedOutcomes(set);
-  const told = plannedOutcomes(set.filter(({ hasUnknownForeseen }) => !hasUnknownForeseen));
+  const told = outcomes.filter(({ id }) => !rebuildOf(input, id).hasUnknownForeseen);
   const [twoPartTest] = walkForward(told, { levels: [level], knowledge: 'asKnown', withTwoPart: true });
   // Where every entry says whether it was foreseen, both are the same rebuilds, and one walk serves both.
   const [test] =
@@ -65,7 +66,7 @@ export function contingencyAnswer(input: AnswerInput, query: z.output<typeof con
     drift: driftOf(sorted, level, input.today),
     wantedCentsPerHour: input.shop.wantedCentsPerHour,
     pastBids: { percent: pastBidsOf(input, trials), twoPart: pastBidsOf(input, twoPartTrials) },
-    damages: damagesOf(input, set, level),
+    damages: damagesOf(input, outcomes, level),
     ...rulesOf(input),
   };
 }
@@ -81,13 +82,14 @@ function unscored(input: AnswerInput, trials: readonly Trial[]) {
   ] as const;
 }
 
-function damagesOf({ shop }: AnswerInput, set: readonly Completed[], level: Level): Answer['damages'] {
-  return shop.damages.flatMap(({ id, name }) => {
-    const members = set.filter(({ damage }) => damage === name);
+function damagesOf(input: AnswerInput, outcomes: readonly PlannedOutcome[], level: Level): Answer['damages'] {
+  const byDamage = grouped(outcomes, ({ id }) => rebuildOf(input, id).damage);
+  return input.shop.damages.flatMap(({ id, name }) => {
+    const members = byDamage.get(name) ?? [];
     if (members.length === 0) return [];
-    const outcomes = plannedOutcomes(members);
-    const rates = outcomes.map((one) => one.overrunCents / one.estimateCents);
-    const { uplift, taken } = contingency(outcomes, level);
+    const rates = members.map((one) => one.overrunCents / one.estimateCents);
+    const [middle = null, q10 = null, q90 = null] = quantiles(rates, [0.5, 0.1, 0.9]);
+    const { uplift, taken } = contingency(members, level);
     const hasOwn = members.length >= OWN_FIGURE_FROM && taken !== null;
     return [
       {
@@ -95,9 +97,9 @@ function damagesOf({ shop }: AnswerInput, set: readonly Completed[], level: Leve
         name,
         n: members.length,
         k: rankAt(members.length, level),
-        median: median(rates),
-        q10: quantile(rates, 0.1),
-        q90: quantile(rates, 0.9),
+        median: middle,
+        q10,
+        q90,
         uplift: hasOwn ? uplift : null,
         percent: hasOwn ? wholePercent(taken) : null,
       },

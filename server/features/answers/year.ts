@@ -59,7 +59,7 @@ export function yearAnswer(whole: AnswerInput, { year: asked, exits: counted }: 
     steps: yearSteps(shop, byId, { from: span.from, to: through }, last),
     money: moneyOf(shop, exits, own?.overheadCents ?? 0),
     late: lateOf(exits),
-    tiedUp: input.tiedUpOn(through),
+    tiedUp: own?.tiedUp ?? input.tiedUpOn(through),
     returns: returnsOf(exits, input.flowsOf(exits.map(({ id }) => id))),
     rebuilds: left
       .toSorted((a, b) => (a.exit.on < b.exit.on ? 1 : a.exit.on > b.exit.on ? -1 : 0))

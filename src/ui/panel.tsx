@@ -50,9 +50,9 @@ export function Panels({ children, wide = false }: { children: ReactNode; wide?:
 /** "How this is worked out": opens the formula in words with this shop's figures. Children: what it says; `label` to say it otherwise. */
 export function HowWorkedOut({ children, label = 'How this is worked out' }: { children: ReactNode; label?: string }) {
   return (
-    <details className="disclosure">
+    <details className="disclosure min-w-0">
       <summary className="inline-block min-h-6 text-steel underline underline-offset-3">{label}</summary>
-      <div className="mt-3 grid max-w-[58rem] gap-2 border-l-4 border-rule pl-4">{children}</div>
+      <div className="mt-3 grid min-w-0 max-w-[58rem] gap-2 border-l-4 border-rule pl-4 *:min-w-0">{children}</div>
     </details>
   );
 }

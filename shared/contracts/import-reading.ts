@@ -143,6 +143,8 @@ export const rebuildFoundSchema = z.object({
   dates: z.record(z.string(), z.string()),
   /** How the file writes it. */
   spellings: z.array(z.string()),
+  /** What stands for it in the answer to `vehicle:SPELLING`; null = its spellings are no question. */
+  vehicleId: z.string().nullable().default(null),
   /** Its plan equals what it came to in every category, so it was written over and says nothing of overrun. */
   isOverwritten: z.boolean().default(false),
   sheet: sheetSchema,

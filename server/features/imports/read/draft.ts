@@ -43,6 +43,7 @@ export function newDraft(
       expectedSaleCents: null,
       dates: {},
       spellings: [],
+      vehicleId: null,
       isOverwritten: false,
       sheet: 1,
       row,

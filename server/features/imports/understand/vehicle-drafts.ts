@@ -38,6 +38,7 @@ export function vehicleDrafts(
     const { target, choice } =
       rows.length > 0 ? ofKnown(group, rows, counts, answers) : ofBooks(group, finder, answers, tagFor);
     if (choice) choices.push(choice);
+    if (typeof target === 'object') target.found.vehicleId = group.id;
     drafts.set(group, target);
   }
   for (const spelling of counts.keys()) {
@@ -108,7 +109,8 @@ function ofBooks(
   answers: ReadonlyMap<string, string>,
   tagFor: (wanted: string) => string,
 ): Settled {
-  const fits = finder.byModel(group.year, group.model);
+  // One that was told from another of the same year and model is not the shop's one of them.
+  const fits = group.isSplit ? [] : finder.byModel(group.year, group.model);
   const sameTag = group.spellings.map((spelling) => finder.byTag(spelling)).find((found) => found !== null);
   const { existing, choice } = sameTag ? { existing: sameTag, choice: null } : chooseExisting(group, fits, answers);
   if (existing === 'ambiguous') return { target: existing, choice };
@@ -135,10 +137,10 @@ function spellingChoice(doubt: VehicleDoubt, answers: ReadonlyMap<string, string
       { value: 'own', label: 'a vehicle of its own' },
       { value: 'aside', label: 'put its rows aside' },
     ],
-    preset: doubt.taken?.id ?? 'aside',
+    preset: doubt.preset ?? doubt.taken?.id ?? 'aside',
     answer: answers.get(id) ?? null,
     mustAsk: doubt.taken === null,
-    why: doubt.taken === null ? `${doubt.why} More than one fits.` : doubt.why,
+    why: doubt.others.length > 1 ? `${doubt.why} More than one fits.` : doubt.why,
   };
 }
 

@@ -1,4 +1,5 @@
 import { fold } from '../cells/fold.ts';
+import { splitGroups } from './split-groups.ts';
 import { isSlip, modelKey, readVehicle, type VehicleText } from './vehicle-text.ts';
 
 /** Spellings that mean one vehicle. */
@@ -12,6 +13,8 @@ export interface VehicleGroup {
   model: string | null;
   count: number;
   readonly spellings: string[];
+  /** A person, or its color, told it from one of the same year and model. */
+  readonly isSplit?: boolean;
 }
 
 /** A spelling that fits a vehicle without being the same: what it was taken for, and what else it may be. */
@@ -21,6 +24,8 @@ export interface VehicleDoubt {
   readonly taken: VehicleGroup | null;
   readonly others: readonly VehicleGroup[];
   readonly why: string;
+  /** What is done unless someone answers otherwise, where that is neither `taken` nor 'aside'. */
+  readonly preset?: 'own';
 }
 
 export interface VehicleGroups {
@@ -32,7 +37,7 @@ export interface VehicleGroups {
 /**
  * Puts the spellings of a file together into vehicles. The same year and model is the same vehicle, whatever the
  * order, case, color or make beside it; a slip of the pen or a missing year joins the only vehicle that it fits.
- * `answers`: spelling → group id, 'own' or 'aside', as a person decided.
+ * `answers`: any spelling → group id, 'own' or 'aside', as a person decided.
  */
 export function groupVehicles(
   counts: ReadonlyMap<string, number>,
@@ -66,7 +71,9 @@ export function groupVehicles(
     for (const spelling of group.spellings) of.set(spelling, end);
     if (typeof end !== 'string' && end !== group) absorb(end, group);
   }
-  return { of, groups: [...groups.values()].filter((group) => follow(group, target) === group), doubts };
+  const grouped = { of, groups: [...groups.values()].filter((group) => follow(group, target) === group), doubts };
+  splitGroups(grouped, counts, answers);
+  return grouped;
 }
 
 function join(groups: Map<string, VehicleGroup>, spelling: string, part: VehicleText, count: number): void {

@@ -41,6 +41,26 @@ export function isColor(word: string): boolean {
   return COLOR_WORDS.has(fold(word));
 }
 
+// The same color in other words, and shades that people mix up.
+const SAME_COLORS = [
+  'red rot rojo rouge maroon burgundy',
+  'blue blau azul bleu',
+  'green grun verde vert',
+  'black schwarz negro noir',
+  'white weiss blanco blanc',
+  'silver silber plata gray grey grau gris argent',
+  'gold tan beige champagne braun brown',
+  'yellow gelb',
+  'purple lila',
+].map((words) => words.split(' '));
+
+/** The color that a word names, in one language; null = no color. */
+export function colorOf(word: string): string | null {
+  const color = fold(word);
+  if (!COLOR_WORDS.has(color)) return null;
+  return SAME_COLORS.find((words) => words.includes(color))?.[0] ?? color;
+}
+
 /** Does the vehicle cell say that a cost belongs to no vehicle? */
 export function isOverhead(text: string): boolean {
   return OVERHEAD_WORDS.has(fold(text));

@@ -82,6 +82,11 @@ type SpellingProps = { found: RebuildFound } & Omit<Props, 'onJump'>;
 /** Every spelling of a vehicle; one that was taken for it with a doubt can be taken for another. */
 function Spellings({ found, reading, settings, canChange }: SpellingProps) {
   const doubts = reading.choices.filter((choice) => choice.kind === 'vehicle' && isAbout(choice, found));
+  const asked = new Set(doubts.map(({ id }) => id));
+  const others = reading.rebuilds.flatMap(({ tag, vehicleId }) =>
+    vehicleId ? [{ value: vehicleId, label: tag }] : [],
+  );
+  const free = found.vehicleId === null || found.spellings.length === 1 ? [] : found.spellings;
   return (
     <div className="grid gap-2">
       <span className="text-soft">{found.spellings.join(' · ')}</span>
@@ -96,9 +101,26 @@ function Spellings({ found, reading, settings, canChange }: SpellingProps) {
             onChange={(event) => event.target.value && settings.setAnswer(choice.id, event.target.value)}
           />
         ))}
+      {canChange &&
+        free
+          .filter((spelling) => !asked.has(`vehicle:${spelling}`))
+          .map((spelling) => (
+            <SelectField
+              key={spelling}
+              label={`“${spelling}” is`}
+              options={[...others, ...ELSEWHERE]}
+              value={settings.answerOf(`vehicle:${spelling}`) ?? found.vehicleId ?? ''}
+              onChange={(event) => settings.setAnswer(`vehicle:${spelling}`, event.target.value)}
+            />
+          ))}
     </div>
   );
 }
+
+const ELSEWHERE = [
+  { value: 'own', label: 'a vehicle of its own' },
+  { value: 'aside', label: 'none: put its rows aside' },
+];
 
 /** A question about a vehicle ends its id with the spelling that is in doubt. */
 const isAbout = (choice: Choice, { spellings }: RebuildFound) =>

@@ -41,17 +41,22 @@ export function ErrorState({ error, onRetry }: { error: unknown; onRetry?: () =>
   );
 }
 
+const REFUSED: ReadonlySet<unknown> = new Set([400, 409, 413, 415, 422]);
+
 type Words = { title: string; detail: string | null; requestId: string | null };
 
 function wordsOf(error: unknown): Words {
   const problem = typeof error === 'object' && error !== null ? (error as Record<string, unknown>) : {};
   const extra = (problem['extra'] ?? {}) as Record<string, unknown>;
   const text = (value: unknown) => (typeof value === 'string' ? value : null);
+  const detail = text(problem['detail']);
+  // What HTTP calls a refused request says nothing to people, and there is nothing to look up in the log.
+  if (detail !== null && REFUSED.has(problem['status'])) {
+    return { title: 'This cannot be taken as it is', detail, requestId: null };
+  }
   return {
     title: text(problem['title']) ?? 'This page ran into an error of ours',
-    detail:
-      text(problem['detail']) ??
-      (problem['title'] ? null : 'What you saved is safe. Try again; if it stays, reload the page.'),
+    detail: detail ?? (problem['title'] ? null : 'What you saved is safe. Try again; if it stays, reload the page.'),
     requestId: text(extra['requestId']),
   };
 }

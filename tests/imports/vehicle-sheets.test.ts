@@ -161,3 +161,51 @@ describe('a sheet about one vehicle', () => {
     ]);
   });
 });
+
+describe('the day of a sale apart from its price', () => {
+  const COSTS = [
+    ['2013 F-150'],
+    ['Bought', '4/18/2019', '', 'Miles', '120,400'],
+    ['bid', '4/18/2019', 'Larkfield auction', '1000.00'],
+    [],
+    ['Parts'],
+    ['Date', 'Item', 'From', 'Cost'],
+    ['5/1/2019', 'hood', 'Old Mill', '150.00'],
+    ['5/20/2019', 'clips', '', ''],
+  ];
+
+  it.each([
+    [
+      'below',
+      [
+        ['Sold', '8/22/2019'],
+        ['Sale price', '', '', '9,500.00'],
+      ],
+    ],
+    [
+      'after',
+      [
+        ['Sale price', '', '', '9,500.00'],
+        ['Sold on', '8/22/2019'],
+      ],
+    ],
+  ])('is taken from the row %s the costs; a cost without an amount is still put aside', (_, rows) => {
+    const reading = read(text([...COSTS, ...rows]));
+    expect(reading.rebuilds[0]).toMatchObject({ saleCents: 950_000, dates: { soldOn: '2019-08-22' } });
+    expect(reading.asides.map(({ reason, row }) => [reason, row])).toEqual([['missing-amount', 8]]);
+  });
+
+  it('is left out while no price stands anywhere', () => {
+    expect(read(text([...COSTS, ['Sold', '8/22/2019']])).rebuilds[0]?.dates).toEqual({ boughtOn: '2019-04-18' });
+  });
+});
+
+it.each(['2013 F-150', '2014 A4', '2016 X5'])('a title may name its vehicle by a letter and a number: %s', (title) => {
+  const sheet = [[title], ['Date', 'Item', 'Cost'], ['5/1/2019', 'hood', '150.00'], ['5/2/2019', 'lamp', '50.00']];
+  expect(read(text(sheet))).toMatchObject({ shape: 'vehicle sheet', rebuilds: [{ tag: title }] });
+});
+
+it.each(['2013 Q2', '2014 W12'])('but no quarter and no week: %s', (title) => {
+  const sheet = [[title], ['Date', 'Item', 'Cost'], ['5/1/2019', 'hood', '150.00'], ['5/2/2019', 'lamp', '50.00']];
+  expect(read(text(sheet)).rebuilds).toEqual([]);
+});

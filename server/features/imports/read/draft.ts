@@ -1,4 +1,5 @@
 import type { RebuildFound } from '#shared/contracts/import-reading.ts';
+import type { Day } from '#shared/day.ts';
 import type { ExistingRebuild } from '../books.ts';
 
 /** A rebuild while rows are being read. `place` is its place in the list of those that rows came in for; −1 = none yet. */
@@ -7,6 +8,8 @@ export interface Draft {
   readonly existing: ExistingRebuild | null;
   /** Facts that take the place of those that the books hold; all others only fill what they do not know. */
   readonly overwrites: Set<string>;
+  /** The day of the sale where it stands apart from the price; it counts only beside one. null = it does not. */
+  soldOn: Day | null;
   place: number;
 }
 
@@ -21,6 +24,7 @@ export function newDraft(
     place: -1,
     existing,
     overwrites: new Set(),
+    soldOn: null,
     found: {
       tag: existing?.tag ?? tag,
       existingId: existing?.id ?? null,

@@ -53,6 +53,9 @@ export function readRows(plan: FilePlan, sink: Sink, onPart?: (share: number) =>
     );
     stated.push(...totals);
   });
+  // A sale's day stands in the books beside its price only.
+  for (const { found, soldOn } of drafts)
+    if (soldOn !== null && found.saleCents !== null) found.dates.soldOn ??= soldOn;
   overwritten.mark();
   tally.control.rebuilds = drafts.length;
   return { drafts, control: tally.control, notData: tally.notData, statedTotals: stated };

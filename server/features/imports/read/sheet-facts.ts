@@ -34,8 +34,9 @@ export function factReader(plan: Plan) {
     const date = meanings.find((meaning) => DATES.has(meaning));
     if (date && looksLikeDay(value)) {
       const day = dayOf?.(value);
-      // A sale's day stands in the books beside its price only.
-      if (day && day !== 'bad' && day !== 'blank' && date !== 'soldOn') found.dates[date] = day;
+      if (!day || day === 'bad' || day === 'blank') return true;
+      if (date === 'soldOn') draft.soldOn ??= day;
+      else found.dates[date] = day;
       return true;
     }
     if (meanings.includes('odometer')) return set(readOdometer(value), (miles) => (found.odometer ??= miles));

@@ -47,8 +47,12 @@ export function namesVehicle(text: string, thisYear: number): boolean {
   if (year === null || model === null || text.split(/\s+/).length > 6) return false;
   if (make !== null) return true;
   const isOther = headingMeanings(model).length > 0 || tradeMeaning(model) !== null || makeOf(model) !== null;
-  return /\b(?:19|20)\d\d\b/.test(text) && !isOther && /\p{L}{2}/u.test(model) && model.split(' ').length <= 2;
+  const isName = /\p{L}{2}/u.test(model) || LETTER_AND_NUMBER.test(model);
+  return /\b(?:19|20)\d\d\b/.test(text) && !isOther && isName && model.split(' ').length <= 2;
 }
+
+/** `F-150`, `A4`, `X5`; but no quarter and no week. */
+const LETTER_AND_NUMBER = /^(?!Q[1-4]$|K?W\d)\p{Lu}{1,3}-?\d{1,4}\b/u;
 
 const GENERIC =
   /^(?:sheet|tab|table|tabelle|blatt|hoja|feuil|summary|overview|list|data|notes?|total|totals|misc|old|copy)\b/i;

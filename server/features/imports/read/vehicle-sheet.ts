@@ -20,6 +20,11 @@ interface State {
 }
 
 const LONGEST_SECTION = 40;
+/** A label and a day, as `Sold, 8/2/2019` under a table of costs. */
+const isLabeledDay = (cells: readonly string[]) => {
+  const [label, day, ...more] = cells.filter((cell) => cell.trim() !== '');
+  return more.length === 0 && day !== undefined && looksLikeDay(day) && !looksLikeDay(label ?? '');
+};
 const isText = (cell: string) => /\p{L}{2}/u.test(cell) && !looksLikeDay(cell) && !looksLikeMoney(cell);
 
 /**
@@ -76,7 +81,7 @@ export function vehicleSheetReader(plan: Plan, sums: ColumnSums): RowReader {
     if (opened) return opened;
     const { draft } = state;
     if (!draft) return cells.some(isFigure) ? putAside('missing-vehicle', null, null) : notData('title');
-    const fact = state.section.columns === null ? facts.row(draft, cells) : null;
+    const fact = state.section.columns === null || isLabeledDay(cells) ? facts.row(draft, cells) : null;
     if (fact) return fact;
     const read = lineOf(cells, line, state.section, draft);
     totals.add(read);

@@ -209,3 +209,40 @@ it.each(['2013 Q2', '2014 W12'])('but no quarter and no week: %s', (title) => {
   const sheet = [[title], ['Date', 'Item', 'Cost'], ['5/1/2019', 'hood', '150.00'], ['5/2/2019', 'lamp', '50.00']];
   expect(read(text(sheet)).rebuilds).toEqual([]);
 });
+
+describe('two tables beside each other', () => {
+  const sheet = [
+    ['2013 Ford F-150'],
+    ['Date', 'Item', 'Cost', '', 'Date', 'Task', 'Hours'],
+    ['5/1/2019', 'hood', '150.00', '', '5/2/2019', 'hang hood', '3.5'],
+    ['5/3/2019', 'lamp', '50.00', '', '5/4/2019', 'wire lamp', '2'],
+    ['', '', '', '', '5/5/2019', 'clean', 'long'],
+    ['5/6/2019', 'clips', '4.50'],
+    ['Total', '', '204.50', '', 'Total', '', '5.5'],
+    ['Sold', '8/22/2019', '9500.00'],
+  ];
+
+  it('are read both, and what cannot be read in one of them is put aside', () => {
+    const reading = read(text(sheet));
+    expect(short(text(sheet))).toEqual([
+      ['F-150', 'parts', 150, '2019-05-01'],
+      ['F-150', 'hours', 3.5, '2019-05-02'],
+      ['F-150', 'parts', 50, '2019-05-03'],
+      ['F-150', 'hours', 2, '2019-05-04'],
+      ['F-150', 'parts', 4.5, '2019-05-06'],
+      ['F-150', 'sale', 9500, '2019-08-22'],
+    ]);
+    expect(reading.asides.map(({ row, reason }) => [row, reason])).toEqual([[5, 'bad-hours']]);
+    expect(reading.statedTotals.map(({ measure, stated, imported }) => [measure, stated, imported])).toEqual([
+      ['money', 20_450, 20_450],
+      ['hours', 19_800, 19_800],
+    ]);
+  });
+
+  it('a cell at fault in one leaves the other in', () => {
+    const faulty = sheet.map((row, at) => (at === 2 ? row.with(2, 'about a hundred') : row));
+    const { asides, control } = read(text(faulty));
+    expect(asides).toMatchObject([{ row: 3, col: 3, isCell: true }, { row: 5 }]);
+    expect(control).toMatchObject({ hoursSeconds: 19_800, costCents: 5450 });
+  });
+});

@@ -144,7 +144,7 @@ function dayInside(cells: readonly string[]): string {
 const SMALL = /\s(?:am|on|le|el|for|to|für|an|por|pour|à|a)(?=\s|$)/gi;
 
 /** Does the first word of a row say that it is the sale? */
-function isSaleRow(cells: readonly string[]): boolean {
+export function isSaleRow(cells: readonly string[]): boolean {
   const first = cells.find((cell) => cell.trim() !== '' && !looksLikeDay(cell)) ?? '';
   const words = first.replace(/[\d/.:-]+/g, ' ').replace(SMALL, ' ');
   const meaning = tradeMeaning(words);

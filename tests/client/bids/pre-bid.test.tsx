@@ -134,12 +134,13 @@ test('where somebody else was quicker, both versions are shown', async () => {
   let reads = 0;
   const { asked } = open(
     [
+      on(bidsApi.basis, () => buildBasis()),
+      on(bidsApi.get, () => (reads++ === 0 ? buildBid() : theirs)),
       on(bidsApi.change, ({ version }) => {
         if (version !== 5) throw new Refusal({ status: 412, detail: 'It was changed.' });
         return { bid: buildBid({ expectedSaleCents: 1_100_000, version: 6 }), agrees: true };
       }),
-      on(bidsApi.get, () => (reads++ === 0 ? buildBid() : theirs)),
-    ].reverse(),
+    ],
     { address: `${HOME}/${idOf('b')}` },
   );
   await type('Sale expected', '11000');

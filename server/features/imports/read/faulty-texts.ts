@@ -1,8 +1,9 @@
 import { isFaulty } from '../cells/faulty-cells.ts';
 import type { CellAside, RowRead } from './plan.ts';
 
-// A formula that holds words of its own says something: it is kept as it stands, and never run.
-const saysNothing = (cell: string) => isFaulty(cell) && !cell.includes('"');
+// A formula that holds words of its own, or refers to nothing, is a text: it is kept as it stands, and never run.
+const saysNothing = (cell: string) =>
+  isFaulty(cell) && !cell.includes('"') && !(cell.startsWith('=') && !/\p{L}/u.test(cell));
 
 /** A row that came in, with its texts (columns from 1; 0 = none) that hold a spreadsheet's fault put aside. */
 export function withoutFaulty(read: RowRead, cells: readonly string[], cols: readonly number[]): RowRead {

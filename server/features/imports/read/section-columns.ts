@@ -41,6 +41,20 @@ export function sectionColumns(cells: readonly string[], isOwnWork: boolean): Se
   return known >= 2 && known >= filled(cells) / 2 && isTable ? columns : null;
 }
 
+/** The columns of a section with what a person said of them going before what its headings say. */
+export function asSaid(
+  columns: SectionColumns,
+  said: readonly { readonly col: number; readonly meaning: Meaning }[],
+): SectionColumns {
+  if (said.length === 0) return columns;
+  const named = new Map(said.map(({ col, meaning }) => [col - 1, meaning]));
+  const kept = [...columns].filter(([meaning, at]) => !named.has(at) && ![...named.values()].includes(meaning));
+  const own = [...named].flatMap(([at, meaning]): [Meaning, number][] =>
+    WANTED.includes(meaning) ? [[meaning, at]] : [],
+  );
+  return new Map([...kept, ...own]);
+}
+
 /**
  * Where a row without headings above it holds its parts: the first day, the last amount, the texts in order. A label
  * right before the amount (`Buyer fee:`) says what it was.

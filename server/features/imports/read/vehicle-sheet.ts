@@ -1,3 +1,4 @@
+import { YOU_SAID } from '../understand/section-headings.ts';
 import { categoryReader, PURCHASE, SALE } from '../words/categories.ts';
 import { looksLikeDay } from '../cells/days.ts';
 import { looksLikeMoney } from '../cells/money.ts';
@@ -5,7 +6,7 @@ import { headingMeanings, isCarriedLabel } from '../words/headings.ts';
 import type { Draft } from './draft.ts';
 import { notData, type Plan, putAside, type RowRead, type RowReader, taken } from './plan.ts';
 import { filled, totalLabel } from './row-kinds.ts';
-import { type SectionColumns, sectionColumns } from './section-columns.ts';
+import { asSaid, type SectionColumns, sectionColumns } from './section-columns.ts';
 import { isSaleRow, type Section, sectionLineReader } from './section-line.ts';
 import { sectionSums } from './section-sums.ts';
 import { halves, type SideBySide, sideBySide, together } from './side-by-side.ts';
@@ -39,6 +40,7 @@ export function vehicleSheetReader(plan: Plan, sums: ColumnSums): RowReader {
   const categoryOf = categoryReader(plan.books.categories, plan.books.retiredCategories);
   const facts = factReader(plan);
   const totals = sectionSums(plan, sums);
+  const said = plan.columns.filter(({ why }) => why === YOU_SAID);
   const readLine = halvesReader(sectionLineReader(plan));
   const state: State = { draft: targetOf(plan, plan.sheet.name ?? ''), section: NO_SECTION, beside: null };
 
@@ -74,8 +76,12 @@ export function vehicleSheetReader(plan: Plan, sums: ColumnSums): RowReader {
       return notData('title');
     }
     const tables = sideBySide(cells);
-    const columns = tables?.left ?? sectionColumns(cells, state.section.isOwnWork);
-    if (!columns) return null;
+    const named = tables?.left ?? sectionColumns(cells, state.section.isOwnWork);
+    if (!named) return null;
+    const columns = asSaid(
+      named,
+      said.filter(({ col }) => (cells[col - 1] ?? '').trim() !== ''),
+    );
     state.beside = tables;
     state.section = { ...state.section, columns };
     totals.section();

@@ -12,6 +12,7 @@ import { columnFacts } from './column-facts.ts';
 import { guessColumns } from './columns.ts';
 import { markDerived } from './derived.ts';
 import { type Head, readHead } from './head.ts';
+import { sectionHeadings } from './section-headings.ts';
 import { askOfRivals } from './rival-columns.ts';
 import { guessShape } from './shape.ts';
 
@@ -71,7 +72,8 @@ function guessAll(
   const categoryOf = categoryReader(books.categories, books.retiredCategories);
   const thisYear = Number(books.today.slice(0, 4));
   const guessed = guessShape(head, facts, categoryOf, { sheetName: sheet.name, thisYear });
-  if (guessed.shape === 'vehicle sheet') return { columns: [], why: '', row: null, ...guessed };
+  if (guessed.shape === 'vehicle sheet')
+    return { columns: sectionHeadings(head, sheet.number, said), why: '', row: null, ...guessed };
   const columns = guessColumns(facts, guessed.shape ?? 'expenses', categoryOf, {
     sheet: sheet.number,
     thisYear,

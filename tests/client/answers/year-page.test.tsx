@@ -99,7 +99,7 @@ test('what went wrong is said, and trying again gets the answer', async () => {
   let isDown = true;
   year(() => (isDown ? problem(400, 'That did not work', 'The year is not one of the shop’s.') : yearReply()));
   openPage(<YearPage />);
-  expect(await screen.findByRole('alert')).toHaveTextContent('That did not work');
+  expect(await screen.findByRole('alert')).toHaveTextContent('The year is not one of the shop’s.');
   isDown = false;
   await userEvent.click(screen.getByRole('button', { name: 'Try again' }));
   expect(await screen.findByText('$18,420', { selector: 'mark' })).toBeInTheDocument();

@@ -15,7 +15,7 @@ async function pagesPrinted(page: Page, part: 'card' | 'sheet'): Promise<number>
 
 test('a rule through its year: adopt it, put it on paper, look back, keep the one before', async ({ page }) => {
   await page.goto(`${await signInToDemo(page)}/contingency`);
-  await page.getByText('Percentage and sum', { exact: true }).click();
+  await page.locator('label', { hasText: 'Percentage and sum' }).click();
   await expect(page).toHaveURL(/[?&]rule=two-part/);
   await expect(answerOn(page)).toContainText('for surprises');
 
